@@ -1,15 +1,15 @@
-import { readdirSync } from "node:fs";
-import { readFile, readdir, writeFile } from "node:fs/promises";
-import path from "node:path";
-import { promisify } from "node:util";
-import { brotliCompress, constants, gzip } from "node:zlib";
-import tailwindcss from "@tailwindcss/vite";
-import react from "@vitejs/plugin-react";
-import type { Plugin } from "vite";
-import { defineConfig } from "vitest/config";
+import { readdirSync } from 'node:fs';
+import { readFile, readdir, writeFile } from 'node:fs/promises';
+import path from 'node:path';
+import { promisify } from 'node:util';
+import { brotliCompress, constants, gzip } from 'node:zlib';
+import tailwindcss from '@tailwindcss/vite';
+import react from '@vitejs/plugin-react';
+import type { Plugin } from 'vite';
+import { defineConfig } from 'vitest/config';
 
 const root = import.meta.dirname;
-const apiSource = path.join(root, "apps/api/src");
+const apiSource = path.join(root, 'apps/api/src');
 
 /** Ports of `npm run dev`: the page is served on the first, the API listens on the second. */
 const webPort = Number(process.env.TIERWELL_WEB_PORT ?? 4100);
@@ -21,14 +21,14 @@ const apiPort = Number(process.env.TIERWELL_API_PORT ?? 4104);
  * found beside whichever file starts it.
  */
 function serverEntries(): Record<string, string> {
-  const entries = readdirSync(path.join(apiSource, "entry"))
-    .filter((name) => name.endsWith(".ts") && !name.includes(".test."))
-    .map((name) => path.join(apiSource, "entry", name));
-  const threads = readdirSync(apiSource, { recursive: true, encoding: "utf8" })
-    .filter((name) => name.endsWith(".thread.ts"))
+  const entries = readdirSync(path.join(apiSource, 'entry'))
+    .filter((name) => name.endsWith('.ts') && !name.includes('.test.'))
+    .map((name) => path.join(apiSource, 'entry', name));
+  const threads = readdirSync(apiSource, { recursive: true, encoding: 'utf8' })
+    .filter((name) => name.endsWith('.thread.ts'))
     .map((name) => path.join(apiSource, name));
   return Object.fromEntries(
-    [...entries, ...threads].map((file) => [path.basename(file, ".ts"), file]),
+    [...entries, ...threads].map((file) => [path.basename(file, '.ts'), file]),
   );
 }
 
@@ -38,13 +38,11 @@ const compressible = /\.(?:js|css|svg|json|map|txt|webmanifest)$/;
 /** Writes `.br` and `.gz` beside every hashed asset once, so that no request pays for it. */
 function precompress(): Plugin {
   return {
-    name: "tierwell:precompress",
-    apply: (_config, env) => env.command === "build" && env.isSsrBuild !== true,
+    name: 'tierwell:precompress',
+    apply: (_config, env) => env.command === 'build' && env.isSsrBuild !== true,
     async writeBundle(options) {
-      const assets = path.join(options.dir ?? "dist/client", "assets");
-      const names = (await readdir(assets)).filter((name) =>
-        compressible.test(name),
-      );
+      const assets = path.join(options.dir ?? 'dist/client', 'assets');
+      const names = (await readdir(assets)).filter((name) => compressible.test(name));
       await Promise.all(
         names.map(async (name) => {
           const file = path.join(assets, name);
@@ -57,10 +55,7 @@ function precompress(): Plugin {
             }),
             promisify(gzip)(bytes, { level: constants.Z_BEST_COMPRESSION }),
           ]);
-          await Promise.all([
-            writeFile(`${file}.br`, br),
-            writeFile(`${file}.gz`, gz),
-          ]);
+          await Promise.all([writeFile(`${file}.br`, br), writeFile(`${file}.gz`, gz)]);
         }),
       );
     },
@@ -70,37 +65,37 @@ function precompress(): Plugin {
 /** `vite build` makes the client, `vite build --ssr` the server; `npm run build` runs both. */
 export default defineConfig(({ isSsrBuild }) => ({
   root,
-  appType: "spa",
+  appType: 'spa',
   plugins: isSsrBuild ? [] : [react(), tailwindcss(), precompress()],
   server: {
-    host: "127.0.0.1",
+    host: '127.0.0.1',
     port: webPort,
     strictPort: true,
     proxy: {
-      "/api": { target: `http://127.0.0.1:${apiPort}`, changeOrigin: false },
+      '/api': { target: `http://127.0.0.1:${apiPort}`, changeOrigin: false },
     },
-    watch: { ignored: ["**/.data/**", "**/dist/**", "**/test-results/**"] },
+    watch: { ignored: ['**/.data/**', '**/dist/**', '**/test-results/**'] },
   },
   build: isSsrBuild
     ? {
         ssr: true,
-        outDir: "dist/server",
-        target: "node20",
+        outDir: 'dist/server',
+        target: 'node20',
         sourcemap: true,
         minify: false,
         copyPublicDir: false,
         rolldownOptions: {
           input: serverEntries(),
           output: {
-            entryFileNames: "[name].js",
-            chunkFileNames: "[name]-[hash].js",
+            entryFileNames: '[name].js',
+            chunkFileNames: '[name]-[hash].js',
           },
         },
       }
     : {
-        outDir: "dist/client",
+        outDir: 'dist/client',
         manifest: true,
-        target: "es2022",
+        target: 'es2022',
         assetsInlineLimit: 0,
       },
   test: {
@@ -113,20 +108,18 @@ export default defineConfig(({ isSsrBuild }) => ({
       {
         extends: true,
         test: {
-          name: "unit",
-          environment: "node",
-          include: [
-            "{packages/shared/src,apps/api/src,fakes,e2e}/**/*.test.ts",
-          ],
+          name: 'unit',
+          environment: 'node',
+          include: ['{packages/shared/src,apps/api/src,fakes,e2e}/**/*.test.ts'],
         },
       },
       {
         extends: true,
         test: {
-          name: "web",
-          environment: "jsdom",
-          setupFiles: ["apps/web/src/testing/setup.ts"],
-          include: ["apps/web/src/**/*.test.{ts,tsx}"],
+          name: 'web',
+          environment: 'jsdom',
+          setupFiles: ['apps/web/src/testing/setup.ts'],
+          include: ['apps/web/src/**/*.test.{ts,tsx}'],
         },
       },
     ],

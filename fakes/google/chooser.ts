@@ -1,15 +1,15 @@
-import type { Html } from "#fakes/harness/html.ts";
-import { html, page } from "#fakes/harness/html.ts";
-import { people } from "./people.ts";
+import type { Html } from '#fakes/harness/html.ts';
+import { html, page } from '#fakes/harness/html.ts';
+import { people } from './people.ts';
 
-const standsInFor = "Google sign-in";
+const standsInFor = 'Google sign-in';
 
 const outcomes = [
-  ["", "Nothing, it works"],
-  ["bad-code", "The code that comes back is refused"],
-  ["slow-token", "The answer takes ten seconds"],
-  ["unverified-email", "The address is not verified"],
-  ["token-error", "The service breaks after the choice"],
+  ['', 'Nothing, it works'],
+  ['bad-code', 'The code that comes back is refused'],
+  ['slow-token', 'The answer takes ten seconds'],
+  ['unverified-email', 'The address is not verified'],
+  ['token-error', 'The service breaks after the choice'],
 ] as const;
 
 function account(name: string, email: string): Html {
@@ -21,7 +21,7 @@ function account(name: string, email: string): Html {
 /** The account chooser; `key` is the held request that the choice belongs to. */
 export function chooserPage(key: string, returnsTo: string): string {
   return page({
-    title: "Choose an account",
+    title: 'Choose an account',
     standsInFor,
     narrow: true,
     body: html`
@@ -38,14 +38,9 @@ export function chooserPage(key: string, returnsTo: string): string {
         ${people.map((person) => account(`${person.givenName} ${person.familyName}`, person.email))}
         <details>
           <summary>Use another address</summary>
-          <label
-            >E-mail address
-            <input name="otherEmail" type="email" autocomplete="off"
-          /></label>
+          <label>E-mail address <input name="otherEmail" type="email" autocomplete="off" /></label>
           <label>Name <input name="otherName" autocomplete="off" /></label>
-          <button class="main" name="other" value="yes">
-            Go on with this address
-          </button>
+          <button class="main" name="other" value="yes">Go on with this address</button>
         </details>
         <button name="deny" value="yes">Deny access</button>
       </form>
@@ -56,7 +51,7 @@ export function chooserPage(key: string, returnsTo: string): string {
 /** What a browser sees where the request itself is wrong and nobody can be sent back. */
 export function refusalPage(error: string, description: string): string {
   return page({
-    title: "Access blocked",
+    title: 'Access blocked',
     standsInFor,
     narrow: true,
     body: html`<div class="rim padded">
@@ -88,13 +83,11 @@ export function overviewPage(
       </tr>`,
   );
   return page({
-    title: "Calls to the Google stand-in",
+    title: 'Calls to the Google stand-in',
     standsInFor,
     body: html`
       <h1>Calls</h1>
-      <p class="quiet">
-        Press “Sign in with Google” in the app to come to the account chooser.
-      </p>
+      <p class="quiet">Press “Sign in with Google” in the app to come to the account chooser.</p>
       <div class="rim">
         <table>
           <tr>

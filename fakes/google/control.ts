@@ -1,7 +1,7 @@
-import * as z from "zod/mini";
-import { read, tell } from "#fakes/harness/control-request.ts";
-import type { GoogleCall, GoogleClient, GoogleFailure } from "./wire.ts";
-import { googleCall } from "./wire.ts";
+import * as z from 'zod/mini';
+import { read, tell } from '#fakes/harness/control-request.ts';
+import type { GoogleCall, GoogleClient, GoogleFailure } from './wire.ts';
+import { googleCall } from './wire.ts';
 
 export interface GoogleControl {
   /** Lets the next `times` sign-ins fail in this way (1 unless said). */
@@ -16,13 +16,12 @@ export interface GoogleControl {
 /** The control client of a running stand-in, for tests; `url` as its `start` gave it. */
 export function googleControl(url: string): GoogleControl {
   return {
-    failNext: (failure, times = 1) =>
-      tell(`${url}/api/failures`, "POST", { failure, times }),
-    clearFailures: () => tell(`${url}/api/failures`, "DELETE"),
+    failNext: (failure, times = 1) => tell(`${url}/api/failures`, 'POST', { failure, times }),
+    clearFailures: () => tell(`${url}/api/failures`, 'DELETE'),
     calls: (since) => {
-      const query = since === undefined ? "" : `?since=${since.toISOString()}`;
+      const query = since === undefined ? '' : `?since=${since.toISOString()}`;
       return read(`${url}/api/calls${query}`, z.array(googleCall));
     },
-    register: (client) => tell(`${url}/api/clients`, "PUT", client),
+    register: (client) => tell(`${url}/api/clients`, 'PUT', client),
   };
 }

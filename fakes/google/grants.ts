@@ -1,6 +1,6 @@
-import { createHash, randomBytes, timingSafeEqual } from "node:crypto";
-import type { Person } from "./people.ts";
-import type { GoogleClient } from "./wire.ts";
+import { createHash, randomBytes, timingSafeEqual } from 'node:crypto';
+import type { Person } from './people.ts';
+import type { GoogleClient } from './wire.ts';
 
 /** A code lives ten minutes, the longest RFC 6749 (4.1.2) recommends; a token an hour. */
 const codeLifetimeMs = 10 * 60_000;
@@ -30,11 +30,7 @@ interface Code {
 
 /** The error codes of RFC 6749, section 5.2, with the sentence a developer reads. */
 export interface TokenRefusal {
-  error:
-    | "invalid_client"
-    | "invalid_grant"
-    | "invalid_request"
-    | "unsupported_grant_type";
+  error: 'invalid_client' | 'invalid_grant' | 'invalid_request' | 'unsupported_grant_type';
   description: string;
 }
 
@@ -44,11 +40,7 @@ export interface Grants {
   /** The held request, taken away: an account is chosen once. */
   release(key: string): AuthorizationRequest | undefined;
   /** A single-use code; one that is not `usable` is refused when it is redeemed. */
-  issueCode(
-    request: AuthorizationRequest,
-    identity: Identity,
-    usable: boolean,
-  ): string;
+  issueCode(request: AuthorizationRequest, identity: Identity, usable: boolean): string;
   redeem(asked: {
     client: GoogleClient;
     code: string;
@@ -65,22 +57,16 @@ function sameText(a: string, b: string): boolean {
 }
 
 /** RFC 7636, section 4.6: BASE64URL(SHA256(verifier)) must equal the challenge. */
-function verifierFits(
-  challenge: string | undefined,
-  verifier: string | undefined,
-): boolean {
+function verifierFits(challenge: string | undefined, verifier: string | undefined): boolean {
   if (challenge === undefined) return verifier === undefined;
   if (verifier === undefined) return false;
-  return sameText(
-    createHash("sha256").update(verifier).digest("base64url"),
-    challenge,
-  );
+  return sameText(createHash('sha256').update(verifier).digest('base64url'), challenge);
 }
 
-const secret = (): string => randomBytes(24).toString("base64url");
+const secret = (): string => randomBytes(24).toString('base64url');
 
 function refused(description: string): TokenRefusal {
-  return { error: "invalid_grant", description };
+  return { error: 'invalid_grant', description };
 }
 
 /** Codes and tokens in memory; `now` decides what has run out. */
@@ -117,22 +103,19 @@ export function createGrants(now: () => Date): Grants {
 
     redeem({ client, code, redirectUri, verifier }) {
       const grant = codes.get(code);
-      if (grant === undefined || !grant.usable)
-        return refused("The code is unknown.");
+      if (grant === undefined || !grant.usable) return refused('The code is unknown.');
       if (grant.spentOn !== undefined) {
         // RFC 6749, 4.1.2: a code used twice may be stolen, so what it gave is taken back.
         tokens.delete(grant.spentOn);
-        return refused("The code was used before.");
+        return refused('The code was used before.');
       }
-      if (grant.expiresAt <= now().getTime())
-        return refused("The code has expired.");
-      if (grant.request.clientId !== client.id)
-        return refused("The code is another client’s.");
+      if (grant.expiresAt <= now().getTime()) return refused('The code has expired.');
+      if (grant.request.clientId !== client.id) return refused('The code is another client’s.');
       if (grant.request.redirectUri !== redirectUri) {
-        return refused("redirect_uri is not the one the code was asked with.");
+        return refused('redirect_uri is not the one the code was asked with.');
       }
       if (!verifierFits(grant.request.codeChallenge, verifier)) {
-        return refused("code_verifier does not match code_challenge.");
+        return refused('code_verifier does not match code_challenge.');
       }
       const token = `ya29.${secret()}`;
       grant.spentOn = token;
@@ -149,9 +132,7 @@ export function createGrants(now: () => Date): Grants {
 
     identityOf(token) {
       const found = tokens.get(token);
-      return found !== undefined && found.expiresAt > now().getTime()
-        ? found.identity
-        : undefined;
+      return found !== undefined && found.expiresAt > now().getTime() ? found.identity : undefined;
     },
   };
 }

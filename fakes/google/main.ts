@@ -1,14 +1,14 @@
-import * as z from "zod/mini";
-import { runUntilStopped } from "#fakes/harness/run.ts";
-import { start } from "./start.ts";
+import * as z from 'zod/mini';
+import { runUntilStopped } from '#fakes/harness/run.ts';
+import { start } from './start.ts';
 
 const env = z
   .object({
-    GOOGLE_FAKE_PORT: z.prefault(z.coerce.number(), "4103"),
+    GOOGLE_FAKE_PORT: z.prefault(z.coerce.number(), '4103'),
     GOOGLE_FAKE_DATA: z.optional(z.string()),
-    GOOGLE_CLIENT_ID: z.prefault(z.string(), "tierwell"),
-    GOOGLE_CLIENT_SECRET: z.prefault(z.string(), "only-for-the-stand-in"),
-    GOOGLE_REDIRECT_URIS: z.prefault(z.string(), ""),
+    GOOGLE_CLIENT_ID: z.prefault(z.string(), 'tierwell'),
+    GOOGLE_CLIENT_SECRET: z.prefault(z.string(), 'only-for-the-stand-in'),
+    GOOGLE_REDIRECT_URIS: z.prefault(z.string(), ''),
   })
   .parse(process.env);
 
@@ -19,9 +19,7 @@ const fake = await start({
     {
       id: env.GOOGLE_CLIENT_ID,
       secret: env.GOOGLE_CLIENT_SECRET,
-      redirectUris: env.GOOGLE_REDIRECT_URIS.split(" ").filter(
-        (uri) => uri !== "",
-      ),
+      redirectUris: env.GOOGLE_REDIRECT_URIS.split(' ').filter((uri) => uri !== ''),
     },
   ],
 });

@@ -1,16 +1,11 @@
-import { createCallLog } from "#fakes/harness/call-log.ts";
-import { createFailureQueue } from "#fakes/harness/failure-queue.ts";
-import {
-  close,
-  createLoopbackApp,
-  listen,
-  portOf,
-} from "#fakes/harness/loopback-app.ts";
-import { createControlRoutes } from "./control-routes.ts";
-import { createGrants } from "./grants.ts";
-import type { GoogleState } from "./oauth-routes.ts";
-import { createOauthRoutes } from "./oauth-routes.ts";
-import type { GoogleClient, GoogleFailure } from "./wire.ts";
+import { createCallLog } from '#fakes/harness/call-log.ts';
+import { createFailureQueue } from '#fakes/harness/failure-queue.ts';
+import { close, createLoopbackApp, listen, portOf } from '#fakes/harness/loopback-app.ts';
+import { createControlRoutes } from './control-routes.ts';
+import { createGrants } from './grants.ts';
+import type { GoogleState } from './oauth-routes.ts';
+import { createOauthRoutes } from './oauth-routes.ts';
+import type { GoogleClient, GoogleFailure } from './wire.ts';
 
 export interface GoogleFake {
   /** Where it listens, without a slash at the end. */

@@ -1,4 +1,4 @@
-import * as z from "zod/mini";
+import * as z from 'zod/mini';
 
 /**
  * Ways to fail, as the account chooser and the control client ask for them:
@@ -8,16 +8,16 @@ import * as z from "zod/mini";
  * - `unverified-email`: the account's address is not verified;
  * - `token-error`, `userinfo-error`: that endpoint answers 503.
  */
-export const googleFailure = z.discriminatedUnion("kind", [
-  z.object({ kind: z.literal("denied") }),
-  z.object({ kind: z.literal("bad-code") }),
+export const googleFailure = z.discriminatedUnion('kind', [
+  z.object({ kind: z.literal('denied') }),
+  z.object({ kind: z.literal('bad-code') }),
   z.object({
-    kind: z.literal("slow-token"),
+    kind: z.literal('slow-token'),
     ms: z.int().check(z.minimum(0), z.maximum(120_000)),
   }),
-  z.object({ kind: z.literal("unverified-email") }),
-  z.object({ kind: z.literal("token-error") }),
-  z.object({ kind: z.literal("userinfo-error") }),
+  z.object({ kind: z.literal('unverified-email') }),
+  z.object({ kind: z.literal('token-error') }),
+  z.object({ kind: z.literal('userinfo-error') }),
 ]);
 export type GoogleFailure = z.infer<typeof googleFailure>;
 
@@ -30,7 +30,7 @@ export const plannedGoogleFailure = z.object({
 export const googleCall = z.object({
   n: z.int(),
   at: z.string(),
-  endpoint: z.enum(["authorize", "choose", "token", "userinfo"]),
+  endpoint: z.enum(['authorize', 'choose', 'token', 'userinfo']),
   status: z.int(),
   outcome: z.string(),
   clientId: z.optional(z.string()),

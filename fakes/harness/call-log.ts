@@ -1,5 +1,5 @@
-import { appendFileSync, mkdirSync } from "node:fs";
-import path from "node:path";
+import { appendFileSync, mkdirSync } from 'node:fs';
+import path from 'node:path';
 
 /** One thing a fake was asked and how it answered; `n` counts from 1 within one start. */
 export type Call<Detail> = { n: number; at: string } & Detail;
@@ -20,12 +20,8 @@ export function createCallLog<Detail extends object>(options: {
   now: () => Date;
 }): CallLog<Detail> {
   const calls: Call<Detail>[] = [];
-  const file =
-    options.folder === undefined
-      ? undefined
-      : path.join(options.folder, "calls.jsonl");
-  if (options.folder !== undefined)
-    mkdirSync(options.folder, { recursive: true });
+  const file = options.folder === undefined ? undefined : path.join(options.folder, 'calls.jsonl');
+  if (options.folder !== undefined) mkdirSync(options.folder, { recursive: true });
 
   return {
     add(detail) {
@@ -39,9 +35,7 @@ export function createCallLog<Detail extends object>(options: {
       return call;
     },
     list(since) {
-      return since === undefined
-        ? [...calls]
-        : calls.filter((call) => call.at >= since);
+      return since === undefined ? [...calls] : calls.filter((call) => call.at >= since);
     },
   };
 }

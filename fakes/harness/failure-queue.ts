@@ -8,9 +8,7 @@ export interface FailureQueue<Failure> {
   /** Plans a failure for the next `times` occasions that it fits. */
   add(planned: PlannedFailure<Failure>): void;
   /** Uses up one occasion of the first planned failure that fits, or answers undefined. */
-  take<Chosen extends Failure>(
-    fits: (failure: Failure) => failure is Chosen,
-  ): Chosen | undefined;
+  take<Chosen extends Failure>(fits: (failure: Failure) => failure is Chosen): Chosen | undefined;
   list(): PlannedFailure<Failure>[];
   clear(): void;
 }

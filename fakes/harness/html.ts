@@ -10,32 +10,27 @@ export class Html {
 type Value = string | number | Html | Html[] | undefined | false;
 
 const entities: Record<string, string> = {
-  "&": "&amp;",
-  "<": "&lt;",
-  ">": "&gt;",
-  '"': "&quot;",
-  "'": "&#39;",
+  '&': '&amp;',
+  '<': '&lt;',
+  '>': '&gt;',
+  '"': '&quot;',
+  "'": '&#39;',
 };
 
 function escaped(text: string): string {
-  return text.replace(
-    /[&<>"']/g,
-    (character) => entities[character] ?? character,
-  );
+  return text.replace(/[&<>"']/g, (character) => entities[character] ?? character);
 }
 
 function rendered(value: Value): string {
-  if (value === undefined || value === false) return "";
-  if (Array.isArray(value)) return value.join("");
+  if (value === undefined || value === false) return '';
+  if (Array.isArray(value)) return value.join('');
   return value instanceof Html ? value.markup : escaped(String(value));
 }
 
 /** A template tag that escapes everything put into it except markup it made itself. */
 export function html(strings: TemplateStringsArray, ...values: Value[]): Html {
   return new Html(
-    strings
-      .map((string, index) => string + rendered(values[index] ?? undefined))
-      .join(""),
+    strings.map((string, index) => string + rendered(values[index] ?? undefined)).join(''),
   );
 }
 
@@ -44,9 +39,7 @@ export function linked(text: string): Html {
   const parts = text.split(/(https?:\/\/[^\s<>"']+)/g);
   return html`${parts.map((part, index) =>
     index % 2 === 1
-      ? html`<a href="${part}" target="_blank" rel="noopener noreferrer"
-          >${part}</a
-        >`
+      ? html`<a href="${part}" target="_blank" rel="noopener noreferrer">${part}</a>`
       : html`${part}`,
   )}`;
 }
@@ -87,10 +80,8 @@ export function page(options: {
   standsInFor: string;
   narrow?: boolean;
   body: Html;
-  script?: string;
+  scriptSrc?: string;
 }): string {
-  const script =
-    options.script === undefined ? "" : `<script>${options.script}</script>`;
   return html`<!doctype html>
     <html lang="en">
       <head>
@@ -105,15 +96,10 @@ export function page(options: {
       <body>
         <header>
           <strong>${options.standsInFor}</strong>
-          <span
-            >Stand-in. Runs on this computer only; nothing here reaches the
-            outside.</span
-          >
+          <span>Stand-in. Runs on this computer only; nothing here reaches the outside.</span>
         </header>
-        <main class="${options.narrow === true ? "narrow" : ""}">
-          ${options.body}
-        </main>
-        ${new Html(script)}
+        <main class="${options.narrow === true ? 'narrow' : ''}">${options.body}</main>
+        ${options.scriptSrc !== undefined && html`<script src="${options.scriptSrc}"></script>`}
       </body>
     </html>`.markup;
 }

@@ -1,16 +1,13 @@
-import { once } from "node:events";
-import type { Server } from "node:http";
-import type { AddressInfo } from "node:net";
-import type { Express } from "express";
-import express from "express";
+import { once } from 'node:events';
+import type { Server } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import type { Express } from 'express';
+import express from 'express';
 
 /** The port a listening server was given; throws where it listens on no TCP port. */
-export function portOf(server: {
-  address(): AddressInfo | string | null;
-}): number {
+export function portOf(server: { address(): AddressInfo | string | null }): number {
   const address = server.address();
-  if (address === null || typeof address === "string")
-    throw new Error("not listening on a port");
+  if (address === null || typeof address === 'string') throw new Error('not listening on a port');
   return address.port;
 }
 
@@ -20,13 +17,10 @@ export function portOf(server: {
  */
 export function createLoopbackApp(): Express {
   const app = express();
-  app.disable("x-powered-by");
+  app.disable('x-powered-by');
   app.use((request, response, next) => {
-    if (request.hostname !== "127.0.0.1" && request.hostname !== "localhost") {
-      response
-        .status(421)
-        .type("text")
-        .send("This stand-in answers on 127.0.0.1 only.\n");
+    if (request.hostname !== '127.0.0.1' && request.hostname !== 'localhost') {
+      response.status(421).type('text').send('This stand-in answers on 127.0.0.1 only.\n');
       return;
     }
     next();
@@ -36,14 +30,14 @@ export function createLoopbackApp(): Express {
 
 /** Listens on 127.0.0.1; port 0 takes any free one. Rejects when the port is taken. */
 export async function listen(app: Express, port: number): Promise<Server> {
-  const server = app.listen(port, "127.0.0.1");
-  await once(server, "listening");
+  const server = app.listen(port, '127.0.0.1');
+  await once(server, 'listening');
   return server;
 }
 
 /** Stops a server at once, idle keep-alive connections included. */
 export async function close(server: Server): Promise<void> {
-  const closed = once(server, "close");
+  const closed = once(server, 'close');
   server.close();
   server.closeAllConnections();
   await closed;

@@ -2,10 +2,7 @@
  * Runs a fake by hand or as a child process: says where it is, and stops cleanly on Ctrl-C, on
  * SIGTERM, and when the process that started it goes away (its IPC channel closes).
  */
-export function runUntilStopped(running: {
-  lines: string[];
-  stop: () => Promise<void>;
-}): void {
+export function runUntilStopped(running: { lines: string[]; stop: () => Promise<void> }): void {
   for (const line of running.lines) console.log(line);
   let stopping = false;
   const stop = () => {
@@ -19,7 +16,7 @@ export function runUntilStopped(running: {
       },
     );
   };
-  process.on("SIGINT", stop);
-  process.on("SIGTERM", stop);
-  process.on("disconnect", stop);
+  process.on('SIGINT', stop);
+  process.on('SIGTERM', stop);
+  process.on('disconnect', stop);
 }
