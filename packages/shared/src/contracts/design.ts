@@ -120,7 +120,7 @@ export const guests = z.object({
       z.minimum(1, 'Write how many people will eat, at least 1.'),
       z.maximum(2000, 'For more than 2,000 people please write to us first.'),
     ),
-  occasionId: slug.check(z.minLength(1, 'Choose the occasion.')),
+  occasionId: z.string().check(z.minLength(1, 'Choose the occasion.'), z.maxLength(60)),
   otherDesserts: z.boolean(),
   portionSizeId,
   allergies: z.array(declaration).check(z.maxLength(20, 'At most 20 entries; please write to us.')),
