@@ -1,0 +1,66 @@
+import sqlite3 from 'sqlite3';
+import { Sequelize, Transaction } from 'sequelize';
+import { StrayWriteError, transactionNamespace } from './transaction.ts';
+
+/** How long a statement waits for another process to finish its write, milliseconds. */
+const busyTimeout = 5000;
+
+/**
+ * A connection as we want every one to be. Sequelize opens one for reading and another for each
+ * transaction. Statements run one after the other, so that waiting ones do not hold libuv's
+ * threads.
+ */
+class TunedDatabase extends sqlite3.Database {
+  constructor(file: string, mode: number, opened: (error: Error | null) => void) {
+    super(file, mode, opened);
+    this.serialize();
+    this.configure('busyTimeout', busyTimeout);
+    this.run('PRAGMA synchronous = NORMAL');
+  }
+
+  /**
+   * Before each SELECT Sequelize asks for the types of every table's columns to choose parsers by.
+   * Ours are STRICT and parsed by the models' getters, so the answer never changes anything: give
+   * it at once instead of asking the file.
+   */
+  override all(sql: string, ...rest: unknown[]): this {
+    const done = rest.at(-1);
+    if (sql.startsWith('PRAGMA table_info(') && typeof done === 'function') {
+      done.call(this, null, []);
+      return this;
+    }
+    return super.all(sql, ...rest);
+  }
+}
+
+const writes: ReadonlySet<unknown> = new Set([
+  'INSERT',
+  'UPDATE',
+  'BULKUPDATE',
+  'DELETE',
+  'BULKDELETE',
+  'UPSERT',
+]);
+
+/**
+ * Opens the file for the models: WAL, foreign keys on, BEGIN IMMEDIATE, and a reading connection
+ * on which SQLite itself refuses to write, so that no statement escapes `inTransaction`.
+ */
+export async function connect(file: string): Promise<Sequelize> {
+  Sequelize.useCLS(transactionNamespace);
+  const sequelize = new Sequelize({
+    dialect: 'sqlite',
+    dialectModule: { ...sqlite3, Database: TunedDatabase },
+    storage: file,
+    transactionType: Transaction.TYPES.IMMEDIATE,
+    logging: false,
+    typeValidation: true,
+    define: { underscored: true, timestamps: false, freezeTableName: true },
+  });
+  sequelize.addHook('beforeQuery', (options) => {
+    if (writes.has(options.type) && !options.transaction) throw new StrayWriteError();
+  });
+  await sequelize.query('PRAGMA journal_mode = WAL');
+  await sequelize.query('PRAGMA query_only = ON');
+  return sequelize;
+}

@@ -1,0 +1,17 @@
+import { studioAndCatalogue } from './0001-studio-and-catalogue.ts';
+import { pantry } from './0002-pantry.ts';
+import { orders } from './0003-orders.ts';
+import { plan } from './0004-plan.ts';
+import { people } from './0005-people.ts';
+import { moneyAndMail } from './0006-money-and-mail.ts';
+import type { Migration } from './migration.ts';
+
+/** Every migration in the order they run. Names are fixed once released; new ones go last. */
+export const migrations: readonly Migration[] = [
+  studioAndCatalogue,
+  pantry,
+  orders,
+  plan,
+  people,
+  moneyAndMail,
+];

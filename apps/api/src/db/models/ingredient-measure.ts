@@ -1,0 +1,47 @@
+import { Model } from 'sequelize';
+import type {
+  CreationOptional,
+  InferAttributes,
+  InferCreationAttributes,
+  Sequelize,
+} from 'sequelize';
+import { integer, key, nullable, oneOf, text } from '../columns.ts';
+
+export const measures = [
+  'cup',
+  'tablespoon',
+  'teaspoon',
+  'stick',
+  'can',
+  'piece',
+  'pinch',
+] as const;
+export type Measure = (typeof measures)[number];
+
+/** Weight of a household measure of a product; each stored, since measures do not multiply through. */
+export class IngredientMeasure extends Model<
+  InferAttributes<IngredientMeasure>,
+  InferCreationAttributes<IngredientMeasure>
+> {
+  declare id: CreationOptional<string>;
+  declare ingredientId: string;
+  declare measure: Measure;
+  /** Packed, sifted. */
+  declare qualifier: string | null;
+  declare weightMg: number;
+  declare source: string | null;
+}
+
+export function initIngredientMeasure(sequelize: Sequelize): void {
+  IngredientMeasure.init(
+    {
+      id: key(),
+      ingredientId: text(),
+      measure: oneOf(measures),
+      qualifier: nullable(text()),
+      weightMg: integer(),
+      source: nullable(text()),
+    },
+    { sequelize, tableName: 'ingredient_measures' },
+  );
+}

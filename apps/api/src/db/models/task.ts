@@ -1,0 +1,89 @@
+import { Model } from 'sequelize';
+import type {
+  CreationOptional,
+  InferAttributes,
+  InferCreationAttributes,
+  NonAttribute,
+  Sequelize,
+} from 'sequelize';
+import {
+  instant,
+  integer,
+  key,
+  nullable,
+  oneOf,
+  text,
+  withDefault,
+  writtenAt,
+} from '../columns.ts';
+import type { Assignment } from './assignment.ts';
+import type { Order } from './order.ts';
+
+export const planTaskKinds = [
+  'bake',
+  'custard',
+  'buttercream',
+  'filling',
+  'fill-and-crumb-coat',
+  'final-coat',
+  'cover',
+  'decorate',
+  'stack',
+  'box',
+  'handover',
+  'drive',
+  'set-up',
+] as const;
+export type PlanTaskKind = (typeof planTaskKinds)[number];
+
+export const workStates = ['planned', 'started', 'finished', 'late', 'dropped'] as const;
+export type WorkState = (typeof workStates)[number];
+
+/** One piece of work on one order. */
+export class Task extends Model<InferAttributes<Task>, InferCreationAttributes<Task>> {
+  declare id: CreationOptional<string>;
+  declare orderId: string;
+  declare revisionId: string;
+  declare kind: PlanTaskKind;
+  declare label: string;
+  declare itemId: string | null;
+  declare tierPosition: number | null;
+  declare benchMinutes: CreationOptional<number>;
+  declare mixerMinutes: CreationOptional<number>;
+  declare ovenMinutes: CreationOptional<number>;
+  declare skillId: string | null;
+  declare state: CreationOptional<WorkState>;
+  declare minutesTaken: number | null;
+  declare startedAt: Date | null;
+  declare finishedAt: Date | null;
+  declare finishedByUserId: string | null;
+  declare createdAt: CreationOptional<Date>;
+
+  declare order?: NonAttribute<Order>;
+  declare assignment?: NonAttribute<Assignment | null>;
+}
+
+export function initTask(sequelize: Sequelize): void {
+  Task.init(
+    {
+      id: key(),
+      orderId: text(),
+      revisionId: text(),
+      kind: oneOf(planTaskKinds),
+      label: text(),
+      itemId: nullable(text()),
+      tierPosition: nullable(integer()),
+      benchMinutes: withDefault(integer(), 0),
+      mixerMinutes: withDefault(integer(), 0),
+      ovenMinutes: withDefault(integer(), 0),
+      skillId: nullable(text()),
+      state: withDefault(oneOf(workStates), 'planned'),
+      minutesTaken: nullable(integer()),
+      startedAt: nullable(instant('startedAt')),
+      finishedAt: nullable(instant('finishedAt')),
+      finishedByUserId: nullable(text()),
+      createdAt: writtenAt('createdAt'),
+    },
+    { sequelize, tableName: 'tasks' },
+  );
+}
