@@ -1,0 +1,44 @@
+import type { Design } from '../contracts/design.ts';
+import type { Guests } from '../contracts/design.ts';
+import type { Menu, PortionSize } from '../contracts/menu.ts';
+import { portionsOfSheet, portionsPerTier, sheetSizeOf } from './sizes.ts';
+import { UnknownPart } from './unknown-part.ts';
+
+/** The portion the guests chose. Throws `UnknownPart`. */
+export function portionSizeOf(guests: Guests, menu: Menu): PortionSize {
+  const size = menu.portionSizes.find((it) => it.id === guests.portionSizeId);
+  if (size === undefined) throw new UnknownPart(['guests', 'portionSizeId'], guests.portionSizeId);
+  return size;
+}
+
+/** Portions to aim for: everybody, or the studio's share of them where there are other desserts. */
+export function portionsWanted(
+  guests: Pick<Guests, 'headCount' | 'otherDesserts'>,
+  menu: Menu,
+): number {
+  if (!guests.otherDesserts) return guests.headCount;
+  return Math.max(1, Math.ceil((guests.headCount * menu.studio.dessertFactorPpm) / 1_000_000));
+}
+
+export type PortionCount = {
+  readonly wanted: number;
+  readonly fed: number;
+  readonly perTier: number[];
+};
+
+/** Portions wanted and served; nothing is served while there is no cake. Throws `UnknownPart`. */
+export function countPortions(design: Design, menu: Menu): PortionCount {
+  const size = portionSizeOf(design.guests, menu);
+  const perTier = portionsServed(design, menu, size);
+  return {
+    wanted: portionsWanted(design.guests, menu),
+    fed: perTier.reduce((sum, it) => sum + it, 0),
+    perTier,
+  };
+}
+
+function portionsServed({ cake }: Design, menu: Menu, size: PortionSize): number[] {
+  if (cake === null) return [];
+  if (cake.kind === 'tiered') return portionsPerTier(cake.tiers, size);
+  return cake.sheet === null ? [] : [portionsOfSheet(sheetSizeOf(cake.sheet, menu), size)];
+}

@@ -1,0 +1,17 @@
+/** "a", "a and b", "a, b and c". */
+export function listOf(words: readonly string[], last = 'and'): string {
+  if (words.length < 2) return words[0] ?? '';
+  return `${words.slice(0, -1).join(', ')} ${last} ${words.at(-1) ?? ''}`;
+}
+
+const counts = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six'] as const;
+
+/** "Three tiers", "One tier": figures above six stay figures. */
+export function countOf(count: number, one: string, many = `${one}s`): string {
+  return `${counts[count] ?? String(count)} ${count === 1 ? one : many}`;
+}
+
+/** The first letter in upper case, the rest as it is. */
+export function capitalise(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
