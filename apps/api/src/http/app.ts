@@ -1,0 +1,67 @@
+import { existsSync } from 'node:fs';
+import path from 'node:path';
+import express, { type Express } from 'express';
+import { pinoHttp } from 'pino-http';
+import type { Deps } from '#api/modules/deps.ts';
+import { clientAssets, clientPage } from './client-files.ts';
+import { featureRoutes } from './features.ts';
+import { openApiRoutes } from './openapi.ts';
+import { guardOrigin } from './origin-guard.ts';
+import { handleError, noSuchRoute } from './problem.ts';
+import type { RouteContract } from './route.ts';
+import { securityHeaders } from './security-headers.ts';
+import { sessions } from './session.ts';
+
+/** Largest JSON body: an order with eight photos' notes is under 40 kB. */
+const bodyLimit = '256kb';
+
+export type App = {
+  readonly handler: Express;
+  /** Every route there is, as declared. */
+  readonly declared: readonly RouteContract[];
+};
+
+/**
+ * The whole HTTP side, outermost first: log, headers, the client's files, guard, body, what is the
+ * same for everybody, session, what is not, and at the end the page or a problem.
+ */
+export function createApp(deps: Deps): App {
+  const { env, logger } = deps;
+  const features = featureRoutes(deps);
+  const declared = features.flatMap((feature) => feature.declared);
+  const page = openApiRoutes(declared);
+  const everyFeature = [page, ...features];
+
+  const app = express();
+  app.disable('x-powered-by');
+  app.disable('etag');
+  app.set('trust proxy', env.trustedProxies);
+  app.use(
+    pinoHttp({
+      logger,
+      // Paths only: queries hold names people search for, headers hold cookies.
+      serializers: {
+        req: (request: { id: unknown; method: string; url: string }) => ({
+          id: request.id,
+          method: request.method,
+          path: request.url.split('?')[0],
+        }),
+        res: (response: { statusCode: number }) => ({ status: response.statusCode }),
+      },
+      customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'error' : 'info'),
+    }),
+  );
+  app.use(securityHeaders({ secure: env.secureCookies }));
+  const hasClient = existsSync(path.join(env.clientDir, 'index.html'));
+  if (hasClient) app.use(clientAssets(env.clientDir));
+  app.use(guardOrigin(env.origins));
+  app.use(express.json({ limit: bodyLimit }));
+  for (const feature of everyFeature) if (feature.anonymous) app.use(feature.router);
+  app.use('/api', sessions(deps));
+  for (const feature of everyFeature) if (!feature.anonymous) app.use(feature.router);
+  app.use('/api', noSuchRoute);
+  if (hasClient) app.use(clientPage(env.clientDir));
+  app.use(noSuchRoute);
+  app.use(handleError);
+  return { handler: app, declared: [...page.declared, ...declared] };
+}

@@ -1,0 +1,80 @@
+import { promisify } from 'node:util';
+import type { Request, RequestHandler } from 'express';
+import session from 'express-session';
+import type { Deps } from '#api/modules/deps.ts';
+import { forgetActor } from './authenticate.ts';
+import type { SecondFactorState } from './session-data.ts';
+import { sessionLimits, SessionStore } from './session-store.ts';
+
+/**
+ * The session of a request. The cookie only says which row it is; both limits are kept by the row
+ * and the program's clock, the cookie's age only lets browsers forget it.
+ */
+export function sessions({ env, clock }: Pick<Deps, 'env' | 'clock'>): RequestHandler {
+  return session({
+    name: env.secureCookies ? '__Host-tierwell' : 'tierwell',
+    secret: env.sessionSecret,
+    store: new SessionStore(clock),
+    resave: false,
+    saveUninitialized: false,
+    rolling: false,
+    cookie: {
+      httpOnly: true,
+      sameSite: 'lax',
+      secure: env.secureCookies,
+      path: '/',
+      maxAge: sessionLimits.customer.absoluteMs,
+    },
+  });
+}
+
+/** Whoever has just proven who they are. */
+export type SignedIn = {
+  readonly userId: string;
+  readonly staff: boolean;
+  readonly secondFactor: SecondFactorState;
+};
+
+/**
+ * Starts a session under a new name (what was known of the old one before signing in opens
+ * nothing any more). Private links a customer opened as a guest are carried over; staff have none.
+ */
+export async function startSession(request: Request, who: SignedIn): Promise<void> {
+  const orderIds = request.session.orderIds ?? [];
+  await renew(request);
+  request.session.userId = who.userId;
+  request.session.staff = who.staff;
+  request.session.secondFactor = who.secondFactor;
+  if (!who.staff && orderIds.length > 0) request.session.orderIds = orderIds;
+  await saveSession(request);
+}
+
+/** Adds an order this browser may see; the session is renewed since its rights grow. */
+export async function grantOrder(request: Request, orderId: string): Promise<void> {
+  const { userId, staff, secondFactor, orderIds = [] } = request.session;
+  if (orderIds.includes(orderId)) return;
+  await renew(request);
+  request.session.userId = userId;
+  request.session.staff = staff;
+  request.session.secondFactor = secondFactor;
+  request.session.orderIds = [...orderIds, orderId];
+  await saveSession(request);
+}
+
+/** Ends this session; the next request is a visitor's. */
+export async function endSession(request: Request): Promise<void> {
+  await renew(request);
+}
+
+/** Writes the session before the answer leaves, so that the next request finds it. */
+export async function saveSession(request: Request): Promise<void> {
+  request.session.agent = (request.get('User-Agent') ?? '').slice(0, 300);
+  request.session.address = request.ip ?? '';
+  await promisify(request.session.save.bind(request.session))();
+  forgetActor(request);
+}
+
+async function renew(request: Request): Promise<void> {
+  await promisify(request.session.regenerate.bind(request.session))();
+  forgetActor(request);
+}
