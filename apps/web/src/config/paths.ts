@@ -1,0 +1,46 @@
+import type { PolicyText } from '#shared/contracts/menu.ts';
+
+/** The order's six steps, in their order; each is an address of its own. */
+export const orderSteps = ['day', 'cake', 'setting', 'look', 'you', 'check'] as const;
+export type OrderStep = (typeof orderSteps)[number];
+
+/** What a one-time link out of an e-mail is for; each opens a page of its own. */
+export const linkPurposes = [
+  'sign-in',
+  'invitation',
+  'password-reset',
+  'first-owner',
+  'confirm',
+] as const;
+export type LinkPurpose = (typeof linkPurposes)[number];
+
+/** Every address of the web app. `pattern` strings are for the router, functions for links. */
+export const paths = {
+  home: '/',
+  menu: '/menu',
+  care: '/care',
+  policies: '/policies',
+  policy: (kind: PolicyText['kind']) => `/policies#${kind}`,
+  order: '/order',
+  orderStep: (step: OrderStep) => `/order/${step}`,
+  orderSent: '/order/sent',
+  myOrder: (code: string) => `/orders/${encodeURIComponent(code)}`,
+  account: '/account',
+  signIn: '/sign-in',
+  signInThen: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,
+  staffSignIn: '/sign-in/staff',
+  secondFactor: '/sign-in/second-factor',
+  forgottenPassword: '/sign-in/forgotten-password',
+  link: (purpose: LinkPurpose) => `/links/${purpose}`,
+  staff: '/staff',
+  staffOrders: '/staff/orders',
+  staffOrder: (number: number) => `/staff/orders/${number}`,
+  staffCalendar: '/staff/calendar',
+  staffPeople: '/staff/studio',
+  staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,
+} as const;
+
+/** A place of ours to go on to, from an untrusted `next` parameter; never another site. */
+export function safeNext(next: string | null, otherwise: string): string {
+  return next !== null && /^\/(?![/\\])/.test(next) ? next : otherwise;
+}

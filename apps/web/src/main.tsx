@@ -1,0 +1,14 @@
+import '@fontsource-variable/bricolage-grotesque/wght.css';
+import '@fontsource-variable/instrument-sans/wght.css';
+import './styles/theme.css';
+import { StrictMode } from 'react';
+import { createRoot } from 'react-dom/client';
+import { App } from '#web/app/app.tsx';
+
+const root = document.getElementById('root');
+if (!root) throw new Error('The page has no #root to draw in.');
+createRoot(root).render(
+  <StrictMode>
+    <App />
+  </StrictMode>,
+);
