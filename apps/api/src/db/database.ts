@@ -44,3 +44,5 @@ export async function openDatabase(
   registerModels(sequelize);
   return database;
 }
+
+export type { Database } from './current-database.ts';

@@ -279,5 +279,7 @@ CREATE TRIGGER work_time_versions_no_update BEFORE UPDATE ON work_time_versions
 BEGIN SELECT RAISE(ABORT, 'work_time_versions is never changed in place'); END;
 CREATE TRIGGER work_time_versions_no_delete BEFORE DELETE ON work_time_versions
 BEGIN SELECT RAISE(ABORT, 'work_time_versions is never changed in place'); END;
+
+INSERT INTO plan_state (id) VALUES (1);
 `,
 };

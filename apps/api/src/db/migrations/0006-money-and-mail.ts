@@ -60,7 +60,7 @@ CREATE TABLE outbox (
   payload TEXT NOT NULL CHECK (json_valid(payload)),
   unique_key TEXT NOT NULL UNIQUE,
   order_id TEXT REFERENCES orders (id),
-  state TEXT NOT NULL DEFAULT 'pending' CHECK (state IN ('pending', 'leased', 'done', 'given-up')),
+  state TEXT NOT NULL DEFAULT 'queued' CHECK (state IN ('queued', 'leased', 'done', 'given-up')),
   attempts INTEGER NOT NULL DEFAULT 0 CHECK (attempts >= 0),
   next_at TEXT NOT NULL CHECK (next_at GLOB '????-??-?? ??:??:??.??? +00:00'),
   leased_until TEXT CHECK (leased_until GLOB '????-??-?? ??:??:??.??? +00:00'),
@@ -70,8 +70,8 @@ CREATE TABLE outbox (
   done_at TEXT CHECK (done_at GLOB '????-??-?? ??:??:??.??? +00:00'),
   CHECK ((state = 'leased') = (leased_until IS NOT NULL))
 ) STRICT;
-CREATE INDEX outbox_next_at ON outbox (next_at) WHERE state IN ('pending', 'leased');
-CREATE INDEX outbox_order_id_id ON outbox (order_id, id) WHERE state IN ('pending', 'leased');
+CREATE INDEX outbox_next_at ON outbox (next_at) WHERE state IN ('queued', 'leased');
+CREATE INDEX outbox_order_id_id ON outbox (order_id, id) WHERE state IN ('queued', 'leased');
 CREATE INDEX outbox_order_id ON outbox (order_id) WHERE order_id IS NOT NULL;
 
 CREATE TABLE sent_mail (

@@ -19,7 +19,7 @@ import {
 import { idFacts } from '../json-shapes.ts';
 import type { IdFacts } from '../json-shapes.ts';
 
-export const outboxStates = ['pending', 'leased', 'done', 'given-up'] as const;
+export const outboxStates = ['queued', 'leased', 'done', 'given-up'] as const;
 export type OutboxState = (typeof outboxStates)[number];
 
 /** A side effect to be carried out, written in the transaction that caused it. */
@@ -52,7 +52,7 @@ export function initOutboxRow(sequelize: Sequelize): void {
       payload: json('payload', idFacts),
       uniqueKey: text(),
       orderId: nullable(text()),
-      state: withDefault(oneOf(outboxStates), 'pending'),
+      state: withDefault(oneOf(outboxStates), 'queued'),
       attempts: withDefault(integer(), 0),
       nextAt: instant('nextAt'),
       leasedUntil: nullable(instant('leasedUntil')),
