@@ -1,0 +1,45 @@
+import type { SubmitOrderInput } from '#shared/contracts/orders.ts';
+
+/** The one form of the wizard; an unanswered number is NaN, everything else null or empty. */
+export type OrderForm = SubmitOrderInput;
+
+/** The form before anything is answered. */
+export function emptyOrder(): OrderForm {
+  return {
+    day: {
+      headCount: Number.NaN,
+      occasionId: '',
+      otherDesserts: false,
+      portionSizeId: 'dessert',
+      allergies: [],
+      diets: [],
+      dietNote: '',
+      infants: false,
+      susceptible: false,
+      date: null,
+      windowStart: null,
+    },
+    cake: { kind: 'tiered', tiers: [], sheet: null, coating: null },
+    setting: { place: 'indoors', warmestC: null, minutesOut: 60, driveMinutes: 20 },
+    look: { palette: [], words: [], decorations: [], note: '' },
+    extras: [],
+    photos: [],
+    you: {
+      name: '',
+      email: '',
+      phone: '',
+      reachBy: 'email',
+      otherCollects: false,
+      collectorName: '',
+      collectorPhone: '',
+    },
+    consents: { policies: false, allergyData: false, showPhotos: false },
+    seenTotalMinor: null,
+    askWithoutDate: false,
+  };
+}
+
+/** Whether anything at all has been answered, so that there is something to keep. */
+export function isUntouched(values: OrderForm): boolean {
+  return JSON.stringify(values) === JSON.stringify(emptyOrder());
+}
