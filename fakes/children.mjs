@@ -1,13 +1,15 @@
 /*
  * The processes of one running stack: started in an order, stopped in the reverse one. Each is in
  * a process group of its own, so that Ctrl-C reaches only us and we decide who goes when; each has
- * an IPC channel, whose closing tells it that we are gone.
+ * an IPC channel, whose closing tells it that we are gone (see stop-with-parent.mjs).
  */
 import { spawn } from 'node:child_process';
 import { createWriteStream } from 'node:fs';
 import path from 'node:path';
 import { createInterface } from 'node:readline';
 import { root } from './prepare.mjs';
+
+const stopWithParent = path.join(import.meta.dirname, 'stop-with-parent.mjs');
 
 /** How long a process may take to stop before it is ended. */
 const patienceMs = 15_000;
@@ -23,7 +25,7 @@ export function createChildren(logFolder, onDeath) {
   let stopping = false;
 
   function start({ name, args, env, onLine }) {
-    const child = spawn(process.execPath, args, {
+    const child = spawn(process.execPath, ['--import', stopWithParent, ...args], {
       cwd: root,
       detached: true,
       stdio: ['ignore', 'pipe', 'pipe', 'ipc'],

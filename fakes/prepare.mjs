@@ -95,6 +95,6 @@ export async function buildIfNeeded() {
   const hash = await hashOfSources();
   if (existsSync(stamp) && (await readFile(stamp, 'utf8')) === hash) return;
   console.log('Building.');
-  await run('npm', ['run', 'build', '--loglevel=error', '--', '--logLevel=warn']);
+  await run('npm', ['run', 'build', '--silent']);
   await writeFile(stamp, hash);
 }

@@ -62,14 +62,15 @@ async function prepareData(data, reset) {
     await writeFile(marker, 'Made by the demo, which may remove this folder.\n');
 }
 
-async function untilReady(url, hasEnded) {
+/** Waits until an address answers well, or everything has ended meanwhile. */
+async function untilReady(address, hasEnded) {
   for (let waited = 0; waited < readyWithinMs; waited += lookAgainMs) {
     if (hasEnded()) return;
-    const answer = await fetch(`${url}/api/ready`).catch(() => undefined);
+    const answer = await fetch(address).catch(() => undefined);
     if (answer?.ok === true) return;
     await pause(lookAgainMs);
   }
-  throw new Unready(`${url}/api/ready did not answer within ${readyWithinMs / 1000} s.`);
+  throw new Unready(`${address} did not answer within ${readyWithinMs / 1000} s.`);
 }
 
 /** Collects what the application says between `--- people` and `--- end`. */
@@ -171,19 +172,23 @@ export async function runStack({ script, splitPorts, parts }) {
       GOOGLE_REDIRECT_URIS: `${url}/api/auth/google/callback`,
     },
   });
-  const people = createPeople();
-  for (const part of parts(stack)) {
-    children.start({
-      ...part,
-      onLine(line) {
-        people.hear(line);
-        part.onLine?.(line);
-      },
-    });
-  }
 
+  const people = createPeople();
+  const hasEnded = () => ended;
   try {
-    await untilReady(url, () => ended);
+    // The app may send mail as soon as it is up, so what it talks to is up before it.
+    await untilReady(`http://127.0.0.1:${ports.mailbox}/`, hasEnded);
+    await untilReady(`${google}/`, hasEnded);
+    for (const part of ended ? [] : parts(stack)) {
+      children.start({
+        ...part,
+        onLine(line) {
+          people.hear(line);
+          part.onLine?.(line);
+        },
+      });
+    }
+    await untilReady(`${url}/api/ready`, hasEnded);
     if (!ended) console.log(summary(stack, people.lines));
   } catch (error) {
     console.error(error.message);

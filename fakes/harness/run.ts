@@ -1,7 +1,4 @@
-/**
- * Runs a fake by hand or as a child process: says where it is, and stops cleanly on Ctrl-C, on
- * SIGTERM, and when the process that started it goes away (its IPC channel closes).
- */
+/** Says where a fake is, and stops it cleanly on Ctrl-C and on SIGTERM. */
 export function runUntilStopped(running: { lines: string[]; stop: () => Promise<void> }): void {
   for (const line of running.lines) console.log(line);
   let stopping = false;
@@ -18,5 +15,4 @@ export function runUntilStopped(running: { lines: string[]; stop: () => Promise<
   };
   process.on('SIGINT', stop);
   process.on('SIGTERM', stop);
-  process.on('disconnect', stop);
 }
