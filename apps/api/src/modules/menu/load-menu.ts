@@ -1,0 +1,121 @@
+import { createHash } from 'node:crypto';
+import { Op } from 'sequelize';
+import type { Menu, PolicyText, PriceBook } from '#shared/contracts/menu.ts';
+import { portionSizeId } from '#shared/contracts/vocabulary.ts';
+import type { PriceBookContent } from '#api/db/json-shapes.ts';
+import { AllergyRule } from '#api/db/models/allergy-rule.ts';
+import { Extra } from '#api/db/models/extra.ts';
+import { Occasion } from '#api/db/models/occasion.ts';
+import { PolicyVersion } from '#api/db/models/policy-version.ts';
+import { PortionSize } from '#api/db/models/portion-size.ts';
+import { PriceBookVersion } from '#api/db/models/price-book-version.ts';
+import { SheetSize } from '#api/db/models/sheet-size.ts';
+import { Studio } from '#api/db/models/studio.ts';
+import { TierSize } from '#api/db/models/tier-size.ts';
+import { localAt } from '#shared/dates/local-time.ts';
+import { loadCakeParts } from './load-cake-parts.ts';
+import { offered } from './offered.ts';
+import { presentStudioCard } from './studio-card.ts';
+
+/** The menu as it stands at this instant. */
+export async function loadMenu(now: Date): Promise<Menu> {
+  const [studio, book] = await Promise.all([
+    Studio.findByPk(1, { rejectOnEmpty: true }),
+    PriceBookVersion.findOne({
+      where: { validFrom: { [Op.lte]: now } },
+      order: [['n', 'DESC']],
+      rejectOnEmpty: true,
+    }),
+  ]);
+  const [cakeParts, portionSizes, occasions, tierSizes, sheetSizes, extras, rules, policies] =
+    await Promise.all([
+      loadCakeParts(book.content),
+      PortionSize.findAll(offered),
+      Occasion.findAll(offered),
+      TierSize.findAll(offered),
+      SheetSize.findAll(offered),
+      Extra.findAll(offered),
+      AllergyRule.findAll(),
+      loadPolicies(now, studio.zone),
+    ]);
+  const { handles, ...parts } = cakeParts;
+  const content: Omit<Menu, 'version'> = {
+    studio: presentStudioCard(studio, handles),
+    portionSizes: portionSizes.map(({ id, name, widthMm, depthMm, blurb }) => ({
+      id: portionSizeIdOf(id),
+      name,
+      widthMm,
+      depthMm,
+      blurb,
+    })),
+    occasions: occasions.map(({ id, name }) => ({ id, name })),
+    tierSizes: tierSizes.map(({ shape, widthMm, depthMm, heightsMm }) => ({
+      shape,
+      widthMm,
+      depthMm,
+      heightsMm,
+    })),
+    sheetSizes: sheetSizes.map(({ id, name, widthMm, depthMm, heightMm }) => ({
+      id,
+      name,
+      widthMm,
+      depthMm,
+      heightMm,
+    })),
+    ...parts,
+    extras: extras.map(({ id, name, blurb }) => ({
+      id,
+      name,
+      blurb,
+      priceMinor: book.content.extraPrices[id] ?? 0,
+    })),
+    priceBook: publicPriceBook(book.id, book.content),
+    allergyRules: rules.map(({ allergen, severity, answer }) => ({ allergen, severity, answer })),
+    policies,
+    wordsPer100Mm: studio.wordsPerDecimetre,
+    maxPhotos: studio.maxPhotos,
+  };
+  const hash = createHash('sha256').update(JSON.stringify(content)).digest('base64url');
+  return { version: hash.slice(0, 16), ...content };
+}
+
+/** Only what the price of a cake needs; what the owner alone sees stays out. */
+function publicPriceBook(versionId: string, content: PriceBookContent): PriceBook {
+  return {
+    versionId,
+    currency: content.currency,
+    tierBands: content.tierBands,
+    sheetPerPortionMinor: content.sheetPerPortionMinor,
+    dummyTierMinor: content.dummyTierMinor,
+    finishes: content.finishes,
+    wordsMinor: content.wordsMinor,
+    minimumMinor: content.minimumMinor,
+    rush: content.rush,
+    taxInclusive: content.taxInclusive,
+    taxes: content.taxes,
+    roundToMinor: content.roundToMinor,
+    depositPpm: content.depositPpm,
+    depositFloorMinor: content.depositFloorMinor,
+    balanceDueDays: content.balanceDueDays,
+  };
+}
+
+/** The newest text of each kind that is in force. */
+async function loadPolicies(now: Date, zone: string): Promise<PolicyText[]> {
+  const versions = await PolicyVersion.findAll({
+    where: { validFrom: { [Op.lte]: now } },
+    order: [['n', 'ASC']],
+  });
+  const newest = new Map(versions.map((version) => [version.kind, version]));
+  return [...newest.values()].map(({ id, kind, title, text, validFrom }) => ({
+    kind,
+    versionId: id,
+    title,
+    text,
+    since: localAt(validFrom, zone).date,
+  }));
+}
+
+function portionSizeIdOf(id: string): Menu['portionSizes'][number]['id'] {
+  return portionSizeId.parse(id);
+}
