@@ -96,7 +96,7 @@ function summary(stack, people) {
     'Tierwell is running. Ctrl-C stops it.',
     '',
     `  Order a cake    ${stack.url}/`,
-    `  Staff sign in   ${stack.url}/staff/sign-in`,
+    `  Staff sign in   ${stack.url}/sign-in/staff`,
     ...people.map((line) => `    ${line}`),
     `  Mailbox         http://127.0.0.1:${stack.ports.mailbox}/   every e-mail ends here`,
     `  Google          http://127.0.0.1:${stack.ports.google}/   the stand-in's calls`,
@@ -169,7 +169,7 @@ export async function runStack({ script, splitPorts, parts }) {
       GOOGLE_FAKE_DATA: path.join(data, 'google'),
       GOOGLE_CLIENT_ID: stack.env.GOOGLE_CLIENT_ID,
       GOOGLE_CLIENT_SECRET: secret,
-      GOOGLE_REDIRECT_URIS: `${url}/api/auth/google/callback`,
+      GOOGLE_REDIRECT_URIS: `${url}/api/session/google/callback`,
     },
   });
 

@@ -1,11 +1,11 @@
 import type { Html } from '#fakes/harness/html.ts';
-import { html, page } from '#fakes/harness/html.ts';
+import { html, page, readable } from '#fakes/harness/html.ts';
 import { people } from './people.ts';
 
 const standsInFor = 'Google sign-in';
 
 const outcomes = [
-  ['', 'Nothing, it works'],
+  ['', 'No, let it work'],
   ['bad-code', 'The code that comes back is refused'],
   ['slow-token', 'The answer takes ten seconds'],
   ['unverified-email', 'The address is not verified'],
@@ -21,16 +21,16 @@ function account(name: string, email: string): Html {
 /** The account chooser; `key` is the held request that the choice belongs to. */
 export function chooserPage(key: string, returnsTo: string): string {
   return page({
-    title: 'Choose an account',
+    title: 'Who is signing in?',
     standsInFor,
     narrow: true,
     body: html`
       <form method="post" action="/o/oauth2/v2/auth/choose" class="rim padded">
-        <h1>Choose an account</h1>
-        <p class="quiet">to go on to ${returnsTo}. The people are invented.</p>
+        <h1>Who is signing in?</h1>
+        <p class="quiet">Afterwards you are back at ${returnsTo}. The people are invented.</p>
         <input type="hidden" name="key" value="${key}" />
         <label
-          >What should go wrong
+          >Should something go wrong?
           <select name="outcome">
             ${outcomes.map(([value, label]) => html`<option value="${value}">${label}</option>`)}
           </select></label
@@ -42,7 +42,7 @@ export function chooserPage(key: string, returnsTo: string): string {
           <label>Name <input name="otherName" autocomplete="off" /></label>
           <button class="main" name="other" value="yes">Go on with this address</button>
         </details>
-        <button name="deny" value="yes">Deny access</button>
+        <button name="deny" value="yes">Say no</button>
       </form>
     `,
   });
@@ -51,11 +51,11 @@ export function chooserPage(key: string, returnsTo: string): string {
 /** What a browser sees where the request itself is wrong and nobody can be sent back. */
 export function refusalPage(error: string, description: string): string {
   return page({
-    title: 'Access blocked',
+    title: 'This request is refused',
     standsInFor,
     narrow: true,
     body: html`<div class="rim padded">
-      <h1>Access blocked</h1>
+      <h1>This request is refused</h1>
       <p>${description}</p>
       <p class="quiet">Error 400: ${error}</p>
     </div>`,
@@ -75,7 +75,7 @@ export function overviewPage(
   const rows = calls.map(
     (call) =>
       html`<tr>
-        <td>${call.at}</td>
+        <td>${readable(call.at)}</td>
         <td>${call.endpoint}</td>
         <td>${call.status}</td>
         <td>${call.outcome}</td>
@@ -88,7 +88,7 @@ export function overviewPage(
     body: html`
       <h1>Calls</h1>
       <p class="quiet">Press “Sign in with Google” in the app to come to the account chooser.</p>
-      <div class="rim">
+      <div class="rim wide">
         <table>
           <tr>
             <th>When</th>

@@ -34,6 +34,16 @@ export function html(strings: TemplateStringsArray, ...values: Value[]): Html {
   );
 }
 
+/** An instant as people read it, to the second and in UTC. */
+export function readable(instant: string): string {
+  const date = new Date(instant).toLocaleString('en-GB', {
+    dateStyle: 'medium',
+    timeStyle: 'medium',
+    timeZone: 'UTC',
+  });
+  return `${date} UTC`;
+}
+
 /** Escaped text in which http(s) addresses are links that open in a new tab. */
 export function linked(text: string): Html {
   const parts = text.split(/(https?:\/\/[^\s<>"']+)/g);
@@ -53,13 +63,17 @@ const style = `
   main { max-width: 960px; margin: 0 auto; padding: 24px }
   main.narrow { max-width: 480px }
   h1 { font-size: 24px; line-height: 1.2; margin: 0 0 16px } h2 { font-size: 18px; margin: 32px 0 8px }
-  a { color: #23429a } p { margin: 0 0 12px } .quiet { color: #566179 }
+  a { color: #23429a } p { margin: 0 0 12px } .quiet { color: #566179 } details { margin-bottom: 16px }
   .rim { border: 2px solid #23429a; border-radius: 14px; overflow: hidden }
   .padded { padding: 24px }
   table { border-collapse: collapse; width: 100% }
   th, td { padding: 8px 12px; text-align: left; vertical-align: top; border-bottom: 1px solid #d5dce8;
     overflow-wrap: anywhere }
-  th { color: #566179; font-weight: 500 } tr:last-child > td { border-bottom: 0 }
+  th { color: #566179; font-weight: 500 } tr:last-child > * { border-bottom: 0 }
+  .wide { overflow-x: auto } .wide th, .wide td { white-space: nowrap }
+  ol.rows { list-style: none; margin: 0; padding: 0 }
+  ol.rows > li { padding: 12px 24px; overflow-wrap: anywhere; border-bottom: 1px solid #d5dce8 }
+  ol.rows > li:last-child { border-bottom: 0 } ol.rows a { font-weight: 500 }
   pre { margin: 0; white-space: pre-wrap; overflow-wrap: anywhere; font: 14px/1.5 ui-monospace, monospace }
   iframe { display: block; width: 100%; height: 70vh; border: 0; background: #fff }
   button, input, select { font: inherit; color: inherit; min-height: 44px; border-radius: 10px;

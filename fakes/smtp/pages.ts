@@ -1,5 +1,5 @@
 import type { Html } from '#fakes/harness/html.ts';
-import { html, linked, page } from '#fakes/harness/html.ts';
+import { html, linked, page, readable } from '#fakes/harness/html.ts';
 import type { PlannedFailure } from '#fakes/harness/failure-queue.ts';
 import type { MailMessage, SmtpFailure } from './wire.ts';
 
@@ -12,6 +12,10 @@ const kinds = [
   ['drop-after-data', 'Cut the line before the answer'],
   ['slow', 'Take ten seconds to answer'],
 ] as const;
+
+function subjectOf({ subject }: MailMessage): string {
+  return subject === '' ? '(no subject)' : subject;
+}
 
 function failureForm(waiting: PlannedFailure<SmtpFailure>[]): Html {
   const planned = waiting.map(
@@ -50,18 +54,16 @@ export function mailboxPage(
   waiting: PlannedFailure<SmtpFailure>[],
 ): string {
   const rows = messages.toReversed().map(
-    (message) =>
-      html`<tr>
-        <td>
-          <a href="/messages/${message.id}"
-            >${message.subject === '' ? '(no subject)' : message.subject}</a
-          >
-          ${message.attachments.some((one) => !one.inline) && html`<div class="quiet">with attachment</div>`}
-        </td>
-        <td>${message.to.join(', ')}</td>
-        <td>${message.from}</td>
-        <td>${message.receivedAt}</td>
-      </tr>`,
+    (message) => html`
+      <li>
+        <a href="/messages/${message.id}">${subjectOf(message)}</a>
+        <div>to ${message.to.join(', ')}</div>
+        <div class="quiet">
+          from ${message.from}, ${readable(message.receivedAt)}
+          ${message.attachments.some((one) => !one.inline) && html`, with attachment`}
+        </div>
+      </li>
+    `,
   );
   return page({
     title: 'Mailbox',
@@ -69,23 +71,9 @@ export function mailboxPage(
     scriptSrc: '/mailbox.js',
     body: html`
       <h1>Messages</h1>
-      <div class="rim">
-        <table data-count="${messages.length}">
-          <tr>
-            <th>Subject</th>
-            <th>To</th>
-            <th>From</th>
-            <th>Received</th>
-          </tr>
-          ${
-            rows.length === 0
-              ? html`<tr>
-                  <td colspan="4">None yet.</td>
-                </tr>`
-              : rows
-          }
-        </table>
-      </div>
+      <ol class="rows rim" data-count="${messages.length}">
+        ${rows.length === 0 ? html`<li>None yet.</li>` : rows}
+      </ol>
       ${failureForm(waiting)}
     `,
   });
@@ -116,15 +104,15 @@ function attachments(message: MailMessage): Html {
 /** One message: as HTML in a sandboxed frame, as text, its attachments and its headers. */
 export function messagePage(message: MailMessage): string {
   return page({
-    title: message.subject,
+    title: subjectOf(message),
     standsInFor,
     body: html`
       <p><a href="/">All messages</a></p>
-      <h1>${message.subject === '' ? '(no subject)' : message.subject}</h1>
+      <h1>${subjectOf(message)}</h1>
       <p>
         From ${message.from}<br />
         To ${message.to.join(', ')}<br />
-        <span class="quiet">Received ${message.receivedAt}</span>
+        <span class="quiet">Received ${readable(message.receivedAt)}</span>
       </p>
       ${
         message.html !== null &&
