@@ -1,9 +1,12 @@
 import { mkdir } from 'node:fs/promises';
 import path from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
+import { QueryTypes } from 'sequelize';
 import { Umzug } from 'umzug';
 import { systemClock } from '#api/platform/clock.ts';
+import { currentDatabase } from './current-database.ts';
 import { migrations } from './migrations/list.ts';
+import type { Migration } from './migrations/migration.ts';
 import { PlainConnection } from './plain-connection.ts';
 
 /** How long one process waits for another that is migrating, milliseconds. */
@@ -22,14 +25,17 @@ const bookkeeping = `CREATE TABLE IF NOT EXISTS schema_migrations (
  * waits and finds nothing to do.
  * @throws when the file was made by a newer version, or a migration fails
  */
-export async function migrateDatabase(file: string): Promise<string[]> {
+export async function migrateDatabase(
+  file: string,
+  list: readonly Migration[] = migrations,
+): Promise<string[]> {
   await mkdir(path.dirname(file), { recursive: true });
   const connection = await PlainConnection.open(file, patience);
   try {
     await useWriteAheadLog(connection);
     await connection.exec('PRAGMA foreign_keys = OFF; BEGIN EXCLUSIVE');
     try {
-      const ran = await runPending(connection);
+      const ran = await runPending(connection, list);
       const broken = await connection.all('PRAGMA foreign_key_check');
       if (broken.length > 0) {
         throw new Error(`Foreign keys are broken after migrating: ${JSON.stringify(broken[0])}`);
@@ -45,16 +51,32 @@ export async function migrateDatabase(file: string): Promise<string[]> {
   }
 }
 
-/** Names of migrations a file still lacks, for the readiness check; the file is only read. */
-export function pendingMigrations(applied: readonly string[]): string[] {
-  return migrations.map(({ name }) => name).filter((name) => !applied.includes(name));
+/** Names of the migrations that the open database still lacks, for the readiness check. */
+export async function pendingMigrations(): Promise<string[]> {
+  const applied = await currentDatabase().sequelize.query<{ name: string }>(
+    'SELECT name FROM schema_migrations',
+    { type: QueryTypes.SELECT },
+  );
+  const names = new Set(applied.map(({ name }) => name));
+  return migrations.map(({ name }) => name).filter((name) => !names.has(name));
 }
 
-async function runPending(connection: PlainConnection): Promise<string[]> {
+async function runPending(
+  connection: PlainConnection,
+  list: readonly Migration[],
+): Promise<string[]> {
   await connection.exec(bookkeeping);
-  const known = new Set(migrations.map(({ name }) => name));
+  const known = new Set(list.map(({ name }) => name));
+  const executed = async (): Promise<string[]> => {
+    const rows = await connection.all('SELECT name FROM schema_migrations');
+    return rows.map((row) => String(row['name']));
+  };
+  const newer = (await executed()).find((name) => !known.has(name));
+  if (newer !== undefined) {
+    throw new Error(`This database was made by a newer version (it has ${newer}).`);
+  }
   const umzug = new Umzug({
-    migrations: migrations.map(({ name, sql }) => ({ name, up: () => connection.exec(sql) })),
+    migrations: list.map(({ name, sql }) => ({ name, up: () => connection.exec(sql) })),
     storage: {
       async logMigration({ name }) {
         await connection.run('INSERT INTO schema_migrations (name, at) VALUES (?, ?)', [
@@ -65,17 +87,10 @@ async function runPending(connection: PlainConnection): Promise<string[]> {
       async unlogMigration() {
         throw new Error('Migrations only go forward.');
       },
-      async executed() {
-        const rows = await connection.all('SELECT name FROM schema_migrations ORDER BY rowid');
-        return rows.map((row) => String(row['name']));
-      },
+      executed,
     },
     logger: undefined,
   });
-  const newer = (await umzug.executed()).find(({ name }) => !known.has(name));
-  if (newer) {
-    throw new Error(`This database was made by a newer version (it has ${newer.name}).`);
-  }
   return (await umzug.up()).map(({ name }) => name);
 }
 
