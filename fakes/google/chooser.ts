@@ -29,6 +29,8 @@ export function chooserPage(key: string, returnsTo: string): string {
         <h1>Who is signing in?</h1>
         <p class="quiet">Afterwards you are back at ${returnsTo}. The people are invented.</p>
         <input type="hidden" name="key" value="${key}" />
+        <!-- What Enter presses: the address being typed, not the first person below. -->
+        <button name="other" value="yes" hidden>Go on</button>
         <label
           >Should something go wrong?
           <select name="outcome">

@@ -17,6 +17,10 @@ function subjectOf({ subject }: MailMessage): string {
   return subject === '' ? '(no subject)' : subject;
 }
 
+function withAttachment({ attachments }: MailMessage): string {
+  return attachments.some(({ inline }) => !inline) ? ', with attachment' : '';
+}
+
 function failureForm(waiting: PlannedFailure<SmtpFailure>[]): Html {
   const planned = waiting.map(
     ({ failure, times }) =>
@@ -59,8 +63,7 @@ export function mailboxPage(
         <a href="/messages/${message.id}">${subjectOf(message)}</a>
         <div>to ${message.to.join(', ')}</div>
         <div class="quiet">
-          from ${message.from}, ${readable(message.receivedAt)}
-          ${message.attachments.some((one) => !one.inline) && html`, with attachment`}
+          from ${message.from}, ${readable(message.receivedAt)}${withAttachment(message)}
         </div>
       </li>
     `,
@@ -89,7 +92,7 @@ export const mailboxScript = `
   }, 3000);
 `;
 
-function attachments(message: MailMessage): Html {
+function attachmentList(message: MailMessage): Html {
   return html`<ul>
     ${message.attachments.map(
       (attachment, index) =>
@@ -127,7 +130,7 @@ export function messagePage(message: MailMessage): string {
       ${
         message.attachments.length > 0 &&
         html`<h2>Attachments</h2>
-          ${attachments(message)}`
+          ${attachmentList(message)}`
       }
       <h2>Text</h2>
       <pre>${linked(message.text)}</pre>
