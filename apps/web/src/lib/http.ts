@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
 import { problem } from '#shared/contracts/common.ts';
+import { guardHeader } from '#shared/contracts/headers.ts';
 import { type ErrorCode, errorTitles } from '#shared/errors.ts';
 
 export type ProblemIssue = {
@@ -40,7 +41,7 @@ function isErrorCode(code: string): code is ErrorCode {
 }
 
 /** What tells the API that a request came from this application's own script. */
-export const ownScriptHeader = { 'x-tierwell': '1' } as const;
+export const ownScriptHeader = { [guardHeader]: '1' } as const;
 
 export type Request<S extends z.ZodMiniType> = {
   readonly method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
@@ -116,24 +117,4 @@ export function refusal(status: number, json: unknown): ApiProblem {
   const code: ErrorCode =
     status === 429 ? 'too-many-requests' : status === 404 ? 'not-found' : 'internal';
   return new ApiProblem({ type: 'about:blank', title: errorTitles[code], status, code });
-}
-
-/** What to tell a person about any failure: what is wrong and what to do. */
-export function describeFailure(error: unknown): {
-  readonly title: string;
-  readonly detail: string;
-} {
-  if (error instanceof NetworkProblem) {
-    return {
-      title: 'We cannot reach the studio just now',
-      detail: 'Check your connection and try again. What you wrote is kept.',
-    };
-  }
-  if (error instanceof ApiProblem) {
-    return { title: error.message, detail: error.detail };
-  }
-  return {
-    title: errorTitles.internal,
-    detail: 'Please try again; if it goes on, write to the studio.',
-  };
 }

@@ -19,18 +19,18 @@ const either = new RegExp(`${grouped.source}|${plain.source}`, 'g');
 /**
  * A plain number as people type it: "70", "about 70 people", "1,200", "1 200", "2.5", "2,5",
  * "a dozen". A comma or space before exactly three figures parts thousands; any other comma is a
- * decimal. NaN if the text says no number, or more than one.
+ * decimal. Null if the text says no number, or more than one.
  */
-export function readNumber(text: string): number {
+export function readNumber(text: string): number | null {
   const tidy = text.toLowerCase().replaceAll(/[\u00a0\u202f\u2009]/g, ' ');
   const [only, ...more] = tidy.match(either) ?? [];
-  if (more.length > 0) return Number.NaN;
+  if (more.length > 0) return null;
   if (only === undefined) return readWord(tidy);
   const figures = grouped.test(only) ? only.replaceAll(/[, ]/g, '') : only.replace(',', '.');
   return Number(figures.replace('\u2212', '-'));
 }
 
-function readWord(text: string): number {
+function readWord(text: string): number | null {
   const [only, ...more] = text.split(/[^a-z]+/).flatMap((word) => words[word] ?? []);
-  return only === undefined || more.length > 0 ? Number.NaN : only;
+  return only === undefined || more.length > 0 ? null : only;
 }

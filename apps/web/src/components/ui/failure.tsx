@@ -1,4 +1,4 @@
-import { describeFailure } from '#web/lib/http.ts';
+import { describeFailure } from '#web/lib/describe-failure.ts';
 import { Button } from './button.tsx';
 import { Notice } from './notice.tsx';
 

@@ -11,8 +11,8 @@ type Props = Omit<
     readonly value: number | null;
     /** Null when empty, NaN when it cannot be read: the contract's own message then says why. */
     readonly onValue: (value: number | null) => void;
-    /** Reads what was typed: a number in the value's unit, or NaN if it says none. */
-    readonly read?: (text: string) => number;
+    /** Reads what was typed: a number in the value's unit, or null if it says none. */
+    readonly read?: (text: string) => number | null;
     /** Writes the value once the field is left. */
     readonly write?: (value: number) => string;
     /** Shown after the box: "people", "min". */
@@ -67,11 +67,10 @@ export function NumberField({
           onChange={(event) => {
             const next = event.target.value;
             setTyped(next);
-            onValue(next.trim() === '' ? null : read(next));
+            onValue(next.trim() === '' ? null : (read(next) ?? Number.NaN));
           }}
           onBlur={(event) => {
-            if (typed !== null && (typed.trim() === '' || !Number.isNaN(read(typed))))
-              setTyped(null);
+            if (typed !== null && (typed.trim() === '' || read(typed) !== null)) setTyped(null);
             onBlur?.(event);
           }}
         />

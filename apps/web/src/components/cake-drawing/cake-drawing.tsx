@@ -1,0 +1,118 @@
+import { useId } from 'react';
+import type { Cake, Look } from '#shared/contracts/design.ts';
+import type { Menu } from '#shared/contracts/menu.ts';
+import { summariseCake } from '#shared/kitchen/summarise-design.ts';
+import { classNames } from '#web/lib/class-names.ts';
+import { describeCake } from './describe-cake.ts';
+import type { Room, Shown, ViewProps } from './layout.ts';
+import { SheetView } from './sheet-view.tsx';
+import { TieredView } from './tiered-view.tsx';
+
+type Props = {
+  /** Null before there is a cake: the bare board. */
+  readonly cake: Cake | null;
+  readonly look: Look | null;
+  readonly menu: Menu;
+  /** `full` with names and dimension lines, `small` the cake alone. */
+  readonly size?: 'full' | 'small';
+  /** How far it has come, 0 to 1: so much of it is filled in from the board up. */
+  readonly made?: number;
+  readonly className?: string;
+};
+
+const views = {
+  full: { width: 420, height: 400, room: { x: 84, y: 48, width: 262, height: 300 } },
+  small: { width: 240, height: 190, room: { x: 8, y: 34, width: 224, height: 148 } },
+} as const;
+
+/** The cake, drawn to scale from the side, with what it is told in words for those who cannot see it. */
+export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, className }: Props) {
+  const id = useId();
+  const view = views[size];
+  const there =
+    cake !== null && (cake.kind === 'sheet' ? cake.sheet !== null : cake.tiers.length > 0);
+  const level = view.room.y - 40 + (view.room.height + 40) * (1 - made);
+  const draw = (show: Shown) =>
+    there && (
+      <Drawn
+        cake={cake}
+        look={look}
+        menu={menu}
+        room={view.room}
+        show={show}
+        hatch={`${id}-hatch`}
+      />
+    );
+  return (
+    <svg
+      viewBox={`0 0 ${view.width} ${view.height}`}
+      role="img"
+      aria-labelledby={`${id}-title`}
+      aria-describedby={`${id}-words`}
+      className={classNames('block w-full font-sans', className)}
+    >
+      <title id={`${id}-title`}>
+        {there ? `${summariseCake(cake, menu)}, drawn to scale` : 'An empty board'}
+      </title>
+      <desc id={`${id}-words`}>
+        {there ? describeCake(cake, look, menu) : 'The cake appears here as you choose it.'}
+      </desc>
+      <defs>
+        <pattern
+          id={`${id}-hatch`}
+          width="7"
+          height="7"
+          patternUnits="userSpaceOnUse"
+          patternTransform="rotate(45)"
+        >
+          <path d="M0 0v7" stroke="var(--color-slate)" strokeWidth="1.2" />
+        </pattern>
+        <clipPath id={`${id}-made`}>
+          <rect
+            x="0"
+            width={view.width}
+            y={level}
+            height={view.height}
+            style={{ transition: 'y 200ms var(--ease-world)' }}
+          />
+        </clipPath>
+      </defs>
+      {!there && <BareBoard room={view.room} />}
+      {made < 1 && <g opacity="0.3">{draw('cake')}</g>}
+      <g clipPath={made < 1 ? `url(#${id}-made)` : undefined}>{draw('cake')}</g>
+      {size === 'full' && draw('measures')}
+    </svg>
+  );
+}
+
+function Drawn(props: ViewProps) {
+  return props.cake.kind === 'sheet' ? <SheetView {...props} /> : <TieredView {...props} />;
+}
+
+function BareBoard({ room }: { readonly room: Room }) {
+  const { x, y, width, height } = room;
+  const side = Math.min(width * 0.5, height * 0.5);
+  return (
+    <g>
+      <rect
+        x={x + width * 0.12}
+        y={y + height - 5}
+        width={width * 0.76}
+        height="5"
+        rx="1.5"
+        fill="var(--color-ink)"
+      />
+      <rect
+        x={x + (width - side) / 2}
+        y={y + height - 5 - side * 0.7}
+        width={side}
+        height={side * 0.7}
+        rx="3"
+        fill="none"
+        stroke="var(--color-seam)"
+        strokeWidth="1.6"
+        strokeDasharray="5 5"
+      />
+    </g>
+  );
+}
