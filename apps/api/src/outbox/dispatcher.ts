@@ -16,7 +16,8 @@ export type Dispatcher = Loop & {
 };
 
 export type DispatcherOptions = {
-  readonly handlers: EventHandlers;
+  /** All of them in the program; a test may give the few it is about. */
+  readonly handlers: Partial<EventHandlers>;
   readonly clock: Clock;
   readonly logger: Logger;
   /** Tells this process from other workers on the same file. */
@@ -65,7 +66,7 @@ export function createDispatcher({
 }
 
 async function attempt(
-  handlers: EventHandlers,
+  handlers: Partial<EventHandlers>,
   row: OutboxRow,
   lease: Lease,
 ): Promise<Error | null> {
@@ -83,10 +84,12 @@ async function attempt(
 }
 
 async function handle<K extends EventKind>(
-  handlers: EventHandlers,
+  handlers: Partial<EventHandlers>,
   kind: K,
   payload: unknown,
   context: HandlerContext,
 ): Promise<void> {
-  await handlers[kind](readPayload(kind, payload), context);
+  const handler = handlers[kind];
+  if (!handler) throw new Error(`Nothing here handles ${kind}.`);
+  await handler(readPayload(kind, payload), context);
 }

@@ -18,6 +18,8 @@ export type EventPayloads = {
   'private-link-renewed': { orderId: string };
   'message-written': { orderId: string; messageId: string };
   'sign-in-link-asked': { tokenId: string };
+  /** Staff never sign in by a link; the mail says how they do. */
+  'sign-in-link-refused': { userId: string };
   'password-reset-asked': { tokenId: string };
   'action-to-confirm': { tokenId: string };
   'staff-invited': { tokenId: string };
@@ -29,6 +31,7 @@ export type EventKind = keyof EventPayloads;
 
 const ofOrder = z.object({ orderId: id });
 const ofToken = z.object({ tokenId: id });
+const ofUser = z.object({ userId: id });
 const ofMessage = z.object({ orderId: id, messageId: id });
 const ofLiftedStop = z.object({ orderId: id, liftedStopId: id });
 const ofMail = z.object({ sentMailId: z.int() });
@@ -49,6 +52,7 @@ const parsers: Parsers = {
   'private-link-renewed': (payload) => ofOrder.parse(payload),
   'message-written': (payload) => ofMessage.parse(payload),
   'sign-in-link-asked': (payload) => ofToken.parse(payload),
+  'sign-in-link-refused': (payload) => ofUser.parse(payload),
   'password-reset-asked': (payload) => ofToken.parse(payload),
   'action-to-confirm': (payload) => ofToken.parse(payload),
   'staff-invited': (payload) => ofToken.parse(payload),
