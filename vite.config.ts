@@ -110,7 +110,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         test: {
           name: 'unit',
           environment: 'node',
-          include: ['{packages/shared/src,apps/api/src,fakes,e2e}/**/*.test.ts'],
+          include: ['{packages/shared/src,apps/api/src,fakes}/**/*.test.ts'],
         },
       },
       {
