@@ -2,7 +2,7 @@ import * as z from 'zod/mini';
 import { id, localDate, minor } from './common.ts';
 import { allergenEntry } from './menu.ts';
 import { adviceLevel, coveringId, styleId } from './vocabulary.ts';
-import { cake, design, setting, tier } from './design.ts';
+import { cake, design, look, setting, tier } from './design.ts';
 
 /** `POST /api/estimates`: a design, and the day it is for if one is chosen (rush, season). */
 export const estimateRequest = z.object({
@@ -52,6 +52,7 @@ export type Price = z.infer<typeof price>;
 export const designPatch = z.object({
   cake: z.optional(cake),
   setting: z.optional(setting),
+  look: z.optional(look),
 });
 export type DesignPatch = z.infer<typeof designPatch>;
 

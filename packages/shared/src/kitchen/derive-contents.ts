@@ -1,5 +1,4 @@
-import type { AllergenEntry, Contents } from '../contracts/menu.ts';
-import type { AllergenId } from '../contracts/vocabulary.ts';
+import type { AllergenEntry, Contents } from '#shared/contracts/menu.ts';
 import { mergeAllergens } from './merge-allergens.ts';
 
 /** What a label says about one thing; `unknown` is never taken for `no`. */
@@ -116,9 +115,8 @@ function gatherFormula(formula: FormulaNode, above: readonly string[]): Gathered
 }
 
 function gatherIngredient(ingredient: IngredientNode): Gathered {
-  const declared = ingredient.allergens.filter((it) => it.state !== 'not-declared');
   return {
-    allergens: declared,
+    allergens: ingredient.allergens,
     statement:
       ingredient.madeOf === '' ? ingredient.name : `${ingredient.name} (${ingredient.madeOf})`,
     facts: {
@@ -151,9 +149,4 @@ function statementOf(
     .sort(([, a], [, b]) => b - a)
     .map(([text]) => text)
     .join(', ');
-}
-
-/** Whether contents hold an allergen for certain. */
-export function containsAllergen(contents: Contents, allergen: AllergenId): boolean {
-  return contents.allergens.some((it) => it.allergen === allergen && it.state === 'contains');
 }

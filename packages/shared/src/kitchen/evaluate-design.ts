@@ -1,5 +1,5 @@
-import type { Estimate, EstimateRequest } from '../contracts/estimates.ts';
-import type { Menu } from '../contracts/menu.ts';
+import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
+import type { Menu } from '#shared/contracts/menu.ts';
 import { countPortions } from './portions.ts';
 
 /**

@@ -67,14 +67,6 @@ function bothScales(celsius: number, fahrenheit: number, lead: TemperatureLead):
   return lead === 'F' ? `${fahrenheit} °F / ${celsius} °C` : `${celsius} °C / ${fahrenheit} °F`;
 }
 
-/** `45 min`, `2 h`, `1 h 40 min`. */
-export function formatDuration(minutes: number): string {
-  const hours = Math.floor(minutes / 60);
-  const rest = Math.round(minutes % 60);
-  if (hours === 0) return `${rest} min`;
-  return rest === 0 ? `${hours} h` : `${hours} h ${rest} min`;
-}
-
 /** `2.4 kg / 5 lb 5 oz`, the unit that goes with the studio's lengths first. */
 export function formatWeight(grams: number, lead: LengthLead): string {
   const metric = grams < 1000 ? `${Math.round(grams)} g` : `${(grams / 1000).toFixed(1)} kg`;

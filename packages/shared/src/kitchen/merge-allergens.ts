@@ -1,35 +1,39 @@
-import type { AllergenEntry } from '../contracts/menu.ts';
-import { allergenIds } from '../contracts/vocabulary.ts';
+import type { AllergenEntry } from '#shared/contracts/menu.ts';
+import { allergenIds, type AllergenId } from '#shared/contracts/vocabulary.ts';
 
-type AllergenState = AllergenEntry['state'];
+/** What is known to be in something comes before what nobody knows, and that before a warning. */
+const heaviestFirst = ['contains', 'unknown', 'may-contain'] as const;
+export type DeclaredState = (typeof heaviestFirst)[number];
 
-/** How much a state weighs when several parts meet: what is known to be in it comes first. */
-const weight: Record<AllergenState, number> = {
-  'not-declared': 0,
-  'may-contain': 1,
-  unknown: 2,
-  contains: 3,
-};
-
-/** The heavier of two states. */
-export function heavierState(a: AllergenState, b: AllergenState): AllergenState {
-  return weight[a] >= weight[b] ? a : b;
+/** The heaviest of some states; null where none is declared. */
+export function heaviestOf(states: readonly AllergenEntry['state'][]): DeclaredState | null {
+  return heaviestFirst.find((it) => states.includes(it)) ?? null;
 }
 
 /**
- * One list from several: per allergen the heaviest state and every species named. The order is
- * that of the allergen list, so that the same cake always reads the same. Merging never removes
- * an allergen and never makes a state lighter.
+ * One list from several, in the order of the allergen list and heaviest state first. An allergen
+ * stands once per state, so that "contains hazelnut" beside "may contain almond" keeps both
+ * truths; a lighter entry that a heavier one already covers is left out. No species means any of
+ * them. Merging never loses an allergen or a species and never makes a state lighter.
  */
 export function mergeAllergens(lists: readonly (readonly AllergenEntry[])[]): AllergenEntry[] {
-  const merged = new Map<AllergenEntry['allergen'], AllergenEntry>();
-  for (const entry of lists.flat()) {
-    const known = merged.get(entry.allergen);
-    merged.set(entry.allergen, {
-      allergen: entry.allergen,
-      species: [...new Set([...(known?.species ?? []), ...entry.species])].sort(),
-      state: known === undefined ? entry.state : heavierState(known.state, entry.state),
-    });
+  const entries = lists.flat();
+  return allergenIds.flatMap((allergen) => {
+    const own = entries.filter((it) => it.allergen === allergen);
+    return own.length === 0 ? [] : mergeOne(allergen, own);
+  });
+}
+
+function mergeOne(allergen: AllergenId, entries: readonly AllergenEntry[]): AllergenEntry[] {
+  const merged: AllergenEntry[] = [];
+  for (const state of heaviestFirst) {
+    const same = entries.filter((it) => it.state === state);
+    if (same.length === 0) continue;
+    const any = same.some((it) => it.species.length === 0);
+    const species = any ? [] : [...new Set(same.flatMap((it) => it.species))].sort();
+    const coveredBy = (heavier: AllergenEntry) =>
+      heavier.species.length === 0 || (!any && species.every((it) => heavier.species.includes(it)));
+    if (!merged.some(coveredBy)) merged.push({ allergen, species, state });
   }
-  return allergenIds.flatMap((id) => merged.get(id) ?? []);
+  return merged;
 }

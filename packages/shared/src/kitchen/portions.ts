@@ -1,6 +1,6 @@
-import type { Design } from '../contracts/design.ts';
-import type { Guests } from '../contracts/design.ts';
-import type { Menu, PortionSize } from '../contracts/menu.ts';
+import type { Design } from '#shared/contracts/design.ts';
+import type { Guests } from '#shared/contracts/design.ts';
+import type { Menu, PortionSize } from '#shared/contracts/menu.ts';
 import { portionsOfSheet, portionsPerTier, sheetSizeOf } from './sizes.ts';
 import { UnknownPart } from './unknown-part.ts';
 

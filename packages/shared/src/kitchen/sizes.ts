@@ -1,6 +1,6 @@
-import type { Cake, Sheet, Tier } from '../contracts/design.ts';
-import type { Menu, PortionSize, SheetSize } from '../contracts/menu.ts';
-import type { Shape } from '../contracts/vocabulary.ts';
+import type { Cake, Sheet, Tier } from '#shared/contracts/design.ts';
+import type { Menu, PortionSize, SheetSize } from '#shared/contracts/menu.ts';
+import type { Shape } from '#shared/contracts/vocabulary.ts';
 import { UnknownPart } from './unknown-part.ts';
 
 /** A block of cake seen from above and its height, millimetres. */

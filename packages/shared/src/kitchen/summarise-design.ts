@@ -1,8 +1,9 @@
-import type { Cake, Design } from '../contracts/design.ts';
-import type { Menu } from '../contracts/menu.ts';
+import type { Cake, Design } from '#shared/contracts/design.ts';
+import type { Menu } from '#shared/contracts/menu.ts';
 import { lengthFigure } from './measures.ts';
 import { countPortions } from './portions.ts';
-import { countOf, listOf } from './sentences.ts';
+import { formatList } from '#shared/dates/format.ts';
+import { countOf } from './sentences.ts';
 import { sheetSizeOf } from './sizes.ts';
 
 /**
@@ -31,5 +32,5 @@ export function summariseCake(cake: Cake, menu: Menu): string {
   const [only] = shapes;
   const shape = shapes.size === 1 && only !== undefined && only !== 'round' ? `${only} ` : '';
   const aside = dummies === 0 ? '' : ` (${countOf(dummies, 'dummy', 'dummies').toLowerCase()})`;
-  return `${countOf(cake.tiers.length, `${shape}tier`)}${aside}, ${listOf(sizes)} ${lead}`;
+  return `${countOf(cake.tiers.length, `${shape}tier`)}${aside}, ${formatList(sizes)} ${lead}`;
 }

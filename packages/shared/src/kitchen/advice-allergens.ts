@@ -1,0 +1,243 @@
+import type { Declaration } from '#shared/contracts/design.ts';
+import type { Advice } from '#shared/contracts/estimates.ts';
+import { severities, type Severity } from '#shared/contracts/vocabulary.ts';
+import { formatList } from '#shared/dates/format.ts';
+import { allergenName, speciesName } from './allergen-names.ts';
+import {
+  clashesWith,
+  gravest,
+  isAbout,
+  isListed,
+  mayContainLevel,
+  stateFor,
+  type ListedDeclaration,
+} from './clashes.ts';
+import { note } from './note.ts';
+import { capitalise } from './sentences.ts';
+import type { Situation } from './situation.ts';
+import { waysWithout } from './ways-out.ts';
+
+/**
+ * What the guests' allergies mean for this cake and this kitchen. What is in it is said, never
+ * what is not; a thing told in words waits for a baker.
+ */
+export function allergenAdvice(situation: Situation): Advice[] {
+  const { allergies } = situation.resolved.design.guests;
+  return [
+    ...onePerThing(allergies.filter(isListed)).flatMap((it) => adviceFor(it, situation)),
+    ...allergies.filter((it) => !isListed(it)).map(toldInWords),
+  ];
+}
+
+/** Two guests with the same allergy are one subject, as grave as the graver of them. */
+function onePerThing(declarations: readonly ListedDeclaration[]): ListedDeclaration[] {
+  const things = new Map<string, ListedDeclaration>();
+  for (const declared of declarations) {
+    const key = `${declared.allergen}:${declared.species ?? ''}`;
+    const known = things.get(key);
+    things.set(
+      key,
+      known === undefined
+        ? declared
+        : {
+            ...known,
+            guests: known.guests + declared.guests,
+            severity: graver(known.severity, declared.severity),
+          },
+    );
+  }
+  return [...things.values()];
+}
+
+const graver = (a: Severity, b: Severity): Severity =>
+  severities.indexOf(a) >= severities.indexOf(b) ? a : b;
+
+function toldInWords(declaration: Declaration): Advice {
+  return note({
+    code: 'allergy-text',
+    level: 'stop',
+    step: 'day',
+    about: `allergy-text:${declaration.text}`,
+    sentence: `You told us about “${declaration.text}”. A baker reads it and answers you before anything is confirmed.`,
+    talk: true,
+  });
+}
+
+function adviceFor(declared: ListedDeclaration, situation: Situation): Advice[] {
+  const { parts, resolved } = situation;
+  const inState = (state: 'contains' | 'unknown' | 'may-contain') =>
+    parts
+      .filter((it) => (it.unread ? 'unknown' : stateFor(it.contents, declared)) === state)
+      .map((it) => it.name);
+  const contained = inState('contains');
+  const unknown = inState('unknown');
+  const warned = inState('may-contain');
+  const ways =
+    contained.length + unknown.length > 0 ||
+    (warned.length > 0 && mayContainLevel(declared.severity) === 'stop')
+      ? waysWithout(situation, (it) => clashesWith(it, declared))
+      : [];
+  const shared = { declared, situation, ways };
+  const found = [
+    ...(contained.length === 0 ? [] : [containedAdvice(contained, shared)]),
+    ...(unknown.length === 0 ? [] : [unknownAdvice(unknown, shared)]),
+    ...(warned.length === 0 ? [] : [warnedAdvice(warned, shared)]),
+    ...nearMiss(declared, situation),
+  ];
+  const handled = resolved.menu.studio.handles.some(
+    (it) => it.state !== 'not-declared' && isAbout(it, declared),
+  );
+  // Where it is in the cake, that it is also in the kitchen is news only to the gravely allergic.
+  const tellKitchen = handled && (contained.length === 0 || gravest.includes(declared.severity));
+  return tellKitchen ? [...found, kitchenAdvice(shared)] : found;
+}
+
+type Shared = {
+  readonly declared: ListedDeclaration;
+  readonly situation: Situation;
+  readonly ways: Advice['ways'];
+};
+
+function containedAdvice(parts: readonly string[], shared: Shared): Advice {
+  const { declared, ways } = shared;
+  const answer = ownersAnswer(shared);
+  return note({
+    code: 'allergen',
+    level: 'stop',
+    step: stepOf(shared),
+    about: aboutOf('allergen', declared),
+    sentence: `${capitalise(nameOf(shared))} is in ${formatList(parts)}; ${whose(declared)}.`,
+    instead: [wayWords(shared), answerWords[answer]].filter((it) => it !== '').join(' '),
+    ways,
+    talk: answer !== 'refuse',
+  });
+}
+
+function unknownAdvice(parts: readonly string[], shared: Shared): Advice {
+  const { declared, ways } = shared;
+  return note({
+    code: 'allergen-unknown',
+    level: 'stop',
+    step: stepOf(shared),
+    about: aboutOf('allergen-unknown', declared),
+    sentence: `We do not know yet whether ${nameOf(shared)} is in ${formatList(parts)}; ${whose(declared)}.`,
+    instead: `We have to read the label first. ${wayWords(shared)}`.trim(),
+    ways,
+    talk: true,
+  });
+}
+
+function warnedAdvice(parts: readonly string[], shared: Shared): Advice {
+  const { declared, ways } = shared;
+  const level = mayContainLevel(declared.severity);
+  return note({
+    code: 'allergen',
+    level,
+    step: stepOf(shared),
+    about: aboutOf('may-contain', declared),
+    sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(declared)}.`,
+    instead: wayWords(shared),
+    ways,
+    talk: level === 'stop',
+  });
+}
+
+/** Another nut than the one named: not a stop, but never passed over either. */
+function nearMiss(declared: ListedDeclaration, { parts, resolved }: Situation): Advice[] {
+  if (declared.species === null) return [];
+  const others = parts.flatMap(({ contents }) =>
+    contents.allergens.filter(
+      (it) =>
+        it.allergen === declared.allergen && it.state !== 'not-declared' && !isAbout(it, declared),
+    ),
+  );
+  const species = [...new Set(others.flatMap((it) => it.species))].sort().map(speciesName);
+  if (species.length === 0) return [];
+  const kind = allergenName(declared.allergen, resolved.menu.studio.labelRegion);
+  return [
+    note({
+      code: 'allergen',
+      level: 'care',
+      step: 'cake',
+      about: aboutOf('near', declared),
+      sentence: `You named ${speciesName(declared.species)}; this cake has ${formatList(species)}.`,
+      instead: `If ${kind} other than ${speciesName(declared.species)} matter too, tell us.`,
+    }),
+  ];
+}
+
+function kitchenAdvice(shared: Shared): Advice {
+  const { declared } = shared;
+  const grave = gravest.includes(declared.severity);
+  return note({
+    code: 'kitchen',
+    level: grave ? 'stop' : 'care',
+    step: 'day',
+    about: aboutOf('kitchen', declared),
+    sentence: `We handle ${nameOf(shared)} in this kitchen, so a trace of it can get into any cake we make; ${whose(declared)}.`,
+    instead: grave
+      ? 'We talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
+      : 'Tell your guest, and let them decide.',
+    talk: grave,
+  });
+}
+
+const aboutOf = (what: string, { allergen, species }: ListedDeclaration): string =>
+  species === null ? `${what}:${allergen}` : `${what}:${allergen}:${species}`;
+
+/** Before there is a cake it belongs to the day; else to where most of it is chosen. */
+const stepOf = ({ situation }: Shared): Advice['step'] =>
+  situation.parts.length > 0 && situation.parts.every((it) => it.kind === 'decoration')
+    ? 'look'
+    : 'cake';
+
+const nameOf = ({ declared, situation }: Shared): string =>
+  declared.species === null
+    ? allergenName(declared.allergen, situation.resolved.menu.studio.labelRegion)
+    : speciesName(declared.species);
+
+const reactions: Record<Severity, { readonly one: string; readonly many: string }> = {
+  avoids: { one: 'one guest avoids it', many: 'guests avoid it' },
+  intolerance: { one: 'one guest does not tolerate it', many: 'guests do not tolerate it' },
+  coeliac: { one: 'one guest has coeliac disease', many: 'guests have coeliac disease' },
+  allergy: { one: 'one guest is allergic to it', many: 'guests are allergic to it' },
+  anaphylaxis: {
+    one: 'one guest can have a severe reaction to it',
+    many: 'guests can have a severe reaction to it',
+  },
+};
+
+function whose({ guests, severity }: ListedDeclaration): string {
+  const { one, many } = reactions[severity];
+  return guests === 1 ? one : `${guests} ${many}`;
+}
+
+function wayWords({ ways, situation, declared }: Shared): string {
+  if (situation.parts.length === 0) return '';
+  if (ways.length === 0 && clashingParts(situation, declared)) {
+    return 'Nothing on our menu makes this cake without it; write to us and we will say what we can do.';
+  }
+  return ways.length === 0 ? '' : 'These are made without it.';
+}
+
+const clashingParts = ({ parts }: Situation, declared: ListedDeclaration): boolean =>
+  parts.some((it) => it.unread || clashesWith(it.contents, declared));
+
+type Answer = 'take' | 'talk' | 'refuse';
+
+/** The owner's word: the allergen's own rule, else the one for all, else a talk. */
+function ownersAnswer({ declared, situation }: Shared): Answer {
+  const rules = situation.resolved.menu.allergyRules.filter(
+    (it) => it.severity === declared.severity,
+  );
+  const rule =
+    rules.find((it) => it.allergen === declared.allergen) ??
+    rules.find((it) => it.allergen === null);
+  return rule?.answer ?? 'talk';
+}
+
+const answerWords: Record<Answer, string> = {
+  take: 'If your guest will not eat from this cake, tell us so.',
+  talk: 'As it is, we talk with you before we take it.',
+  refuse: 'As it is, we cannot take this order.',
+};

@@ -1,0 +1,26 @@
+import type { Menu } from '#shared/contracts/menu.ts';
+import type { ResolvedTier } from './resolve-design.ts';
+import { portionsOfBlock, portionsOfSheet, type Footprint } from './sizes.ts';
+
+/**
+ * The portion prices are reckoned in, whatever portion the guests chose: the same cake cut
+ * smaller is the same work and the same sponge.
+ */
+export function pricePortion(menu: Menu): Footprint {
+  return (
+    menu.portionSizes.find((it) => it.id === 'dessert') ??
+    menu.portionSizes[0] ?? { widthMm: 25, depthMm: 50 }
+  );
+}
+
+/**
+ * Portions of a tier that are paid for: a keepsake is cake although nobody eats it on the day, a
+ * dummy is not.
+ */
+export function chargedPortions(tier: ResolvedTier, kind: 'tiered' | 'sheet', menu: Menu): number {
+  if (!tier.real) return 0;
+  const portion = pricePortion(menu);
+  return kind === 'tiered'
+    ? portionsOfBlock(tier.block, portion)
+    : portionsOfSheet({ id: '', name: '', ...tier.block }, portion);
+}

@@ -1,0 +1,87 @@
+import type { Declaration } from '#shared/contracts/design.ts';
+import type { AllergenEntry, Contents } from '#shared/contracts/menu.ts';
+import type { AllergenId, DietId, Severity } from '#shared/contracts/vocabulary.ts';
+import { sameSpecies } from './allergen-names.ts';
+import { heaviestOf, type DeclaredState } from './merge-allergens.ts';
+
+/** An allergen declared from the list; those told in words are answered by a baker. */
+export type ListedDeclaration = Declaration & { readonly allergen: AllergenId };
+
+export function isListed(declaration: Declaration): declaration is ListedDeclaration {
+  return declaration.allergen !== null;
+}
+
+/** Severities for which what a kitchen handles, or a maker warns of, is reason enough to stop. */
+export const gravest: readonly Severity[] = ['coeliac', 'anaphylaxis'];
+const grave: readonly Severity[] = ['allergy', ...gravest];
+
+/**
+ * Whether an entry is about what was declared. An entry that names no species may be any; for
+ * coeliac disease every gluten cereal is.
+ */
+export function isAbout(
+  entry: Pick<AllergenEntry, 'allergen' | 'species'>,
+  { allergen, species, severity }: ListedDeclaration,
+): boolean {
+  if (entry.allergen !== allergen) return false;
+  if (species === null || entry.species.length === 0) return true;
+  if (severity === 'coeliac' && allergen === 'gluten-cereals') return true;
+  return entry.species.some((it) => sameSpecies(it, species));
+}
+
+/** How a part stands to a declaration; null where its labels do not mention it. */
+export function stateFor(contents: Contents, declaration: ListedDeclaration): DeclaredState | null {
+  return heaviestOf(
+    contents.allergens.filter((it) => isAbout(it, declaration)).map((it) => it.state),
+  );
+}
+
+/** Whether a part must be changed for a declaration; a maker's warning weighs by severity. */
+export function clashesWith(contents: Contents, declaration: ListedDeclaration): boolean {
+  const state = stateFor(contents, declaration);
+  if (state === null) return false;
+  return state !== 'may-contain' || grave.includes(declaration.severity);
+}
+
+/** The level of a maker's "may contain": a stop for those who are told to heed it. */
+export function mayContainLevel(severity: Severity): 'care' | 'stop' {
+  return grave.includes(severity) ? 'stop' : 'care';
+}
+
+const has = (contents: Contents, allergen: AllergenId): boolean =>
+  contents.allergens.some((it) => it.allergen === allergen && it.state === 'contains');
+
+/** What in a part does not go with a diet, as it is read: "milk", "gelatine". */
+export function dietClashes(contents: Contents, diet: DietId): string[] {
+  const seafood = (['fish', 'crustaceans', 'molluscs'] as const).filter((it) => has(contents, it));
+  const found = {
+    alcohol: contents.alcohol ? ['alcohol'] : [],
+    gelatine: contents.gelatine ? ['gelatine'] : [],
+    slaughter: contents.animalOrigin && !contents.gelatine ? ['something of animal origin'] : [],
+    cochineal: contents.cochineal ? ['cochineal'] : [],
+    farm: [
+      ...(has(contents, 'milk') ? ['milk'] : []),
+      ...(has(contents, 'egg') ? ['egg'] : []),
+      ...(contents.honey ? ['honey'] : []),
+    ],
+  };
+  switch (diet) {
+    case 'vegan':
+      return [...found.farm, ...found.gelatine, ...found.slaughter, ...found.cochineal, ...seafood];
+    case 'vegetarian':
+      return [...found.gelatine, ...found.slaughter, ...found.cochineal, ...seafood];
+    case 'halal':
+      return [...found.alcohol, ...found.gelatine, ...found.slaughter];
+    case 'kosher':
+      return [
+        ...found.gelatine,
+        ...found.slaughter,
+        ...found.cochineal,
+        ...seafood.filter((it) => it !== 'fish'),
+      ];
+    case 'no-alcohol':
+      return found.alcohol;
+    case 'no-gelatine':
+      return found.gelatine;
+  }
+}
