@@ -1,0 +1,398 @@
+import { addDays, datesInRange, weekdayOf } from './local-time.ts';
+import type { LocalDate } from './local-time.ts';
+import type { ColdPlace, PlannedOrder, Shift, Supply, Work } from './model.ts';
+
+/**
+ * The independent checker: verifies a plan against the definitions of the model. It shares
+ * nothing with the planner but the types and the calendar, so that a mistake there is found here.
+ */
+
+export type Fault = {
+  readonly rule:
+    | 'missing-work'
+    | 'unknown-work'
+    | 'outside-shift'
+    | 'in-the-past'
+    | 'after-pickup'
+    | 'gap'
+    | 'shelf-life'
+    | 'too-early'
+    | 'capacity'
+    | 'one-order-a-shift'
+    | 'hands'
+    | 'allergen'
+    | 'cold'
+    | 'window'
+    | 'cap'
+    | 'kept-back'
+    | 'closed'
+    | 'book-not-open'
+    | 'notice';
+  readonly orderId: string;
+  readonly sentence: string;
+};
+
+type Placed = {
+  readonly orderId: string;
+  readonly work: Work;
+  readonly shift: Shift | undefined;
+  readonly start: number;
+  readonly end: number;
+};
+
+/** What stands in the book, gathered once for many checks. */
+export type Standing = {
+  readonly supply: Supply;
+  readonly orders: readonly PlannedOrder[];
+  readonly byShift: ReadonlyMap<string, readonly Placed[]>;
+};
+
+/** Gathers standing orders for `checkAddition`. */
+export function gatherStanding(supply: Supply, orders: readonly PlannedOrder[]): Standing {
+  const byShift = new Map<string, Placed[]>();
+  for (const order of orders) {
+    for (const placed of readPlaces(supply, order)) {
+      const key = placed.shift?.key;
+      if (key !== undefined) byShift.set(key, [...(byShift.get(key) ?? []), placed]);
+    }
+  }
+  return { supply, orders, byShift };
+}
+
+/** Every fault of one order beside those that stand; an empty list is a plan that holds. */
+export function checkAddition(standing: Standing, order: PlannedOrder): Fault[] {
+  const { supply } = standing;
+  const others = standing.orders.filter((it) => it.orderId !== order.orderId);
+  const placed = readPlaces(supply, order);
+  const fault = (rule: Fault['rule'], sentence: string): Fault => ({
+    rule,
+    orderId: order.orderId,
+    sentence,
+  });
+  const touched = new Set(placed.map((it) => it.shift?.key).filter((key) => key !== undefined));
+  return [
+    ...checkComplete(order, fault),
+    ...checkTimes(supply, order, placed, fault),
+    ...checkLinks(order, placed, fault),
+    ...[...touched].flatMap((key) => {
+      const rest = (standing.byShift.get(key) ?? []).filter((it) => it.orderId !== order.orderId);
+      return checkShift(
+        placed.filter((it) => it.shift?.key === key),
+        rest,
+        fault,
+      );
+    }),
+    ...checkAllergens(order, placed, others, standing, fault),
+    ...checkCold(supply, order, placed, others, fault),
+    ...checkPickup(supply, order, others, fault),
+  ];
+}
+
+/** Every fault of a whole plan. Orders that have standing work in shifts gone by are checked from now on. */
+export function checkPlan(supply: Supply, orders: readonly PlannedOrder[]): Fault[] {
+  const standing = gatherStanding(supply, orders);
+  return orders.flatMap((order) => checkAddition(standing, order));
+}
+
+type MakeFault = (rule: Fault['rule'], sentence: string) => Fault;
+
+const shiftIndexes = new WeakMap<Supply, ReadonlyMap<string, Shift>>();
+
+function shiftsOf(supply: Supply): ReadonlyMap<string, Shift> {
+  let index = shiftIndexes.get(supply);
+  if (index === undefined) {
+    index = new Map(supply.shifts.map((it) => [it.key, it]));
+    shiftIndexes.set(supply, index);
+  }
+  return index;
+}
+
+function readPlaces(supply: Supply, order: PlannedOrder): Placed[] {
+  const shifts = shiftsOf(supply);
+  const placed: Placed[] = [];
+  for (const place of order.places) {
+    const work = order.demand.work.find((it) => it.key === place.key);
+    if (work === undefined) continue;
+    placed.push({
+      orderId: order.orderId,
+      work,
+      shift: shifts.get(place.shiftKey),
+      start: place.startAt,
+      end: place.startAt + work.minutes,
+    });
+  }
+  return placed;
+}
+
+function checkComplete(order: PlannedOrder, fault: MakeFault): Fault[] {
+  const faults: Fault[] = [];
+  for (const work of order.demand.work) {
+    const times = order.places.filter((it) => it.key === work.key).length;
+    if (times !== 1)
+      faults.push(fault('missing-work', `${work.label} stands ${times} times in the plan.`));
+  }
+  for (const place of order.places) {
+    if (!order.demand.work.some((it) => it.key === place.key)) {
+      faults.push(fault('unknown-work', `${place.key} is no work of this order.`));
+    }
+  }
+  return faults;
+}
+
+function checkTimes(
+  supply: Supply,
+  order: PlannedOrder,
+  placed: readonly Placed[],
+  fault: MakeFault,
+): Fault[] {
+  const faults: Fault[] = [];
+  for (const { work, shift, start, end } of placed) {
+    if (!Number.isInteger(start))
+      faults.push(fault('outside-shift', `${work.label} does not start on a whole minute.`));
+    if (start < supply.now) faults.push(fault('in-the-past', `${work.label} starts before now.`));
+    if (shift === undefined || start < shift.startAt || end > shift.endAt) {
+      faults.push(fault('outside-shift', `${work.label} is not inside its shift.`));
+    }
+    if (end > order.pickup.startAt)
+      faults.push(fault('after-pickup', `${work.label} ends after the pickup begins.`));
+    if (work.within !== null && order.pickup.endAt - start > work.within) {
+      faults.push(fault('too-early', `${work.label} is too long before the pickup.`));
+    }
+  }
+  return faults;
+}
+
+function checkLinks(order: PlannedOrder, placed: readonly Placed[], fault: MakeFault): Fault[] {
+  const faults: Fault[] = [];
+  const at = new Map(placed.map((it) => [it.work.key, it]));
+  for (const link of order.demand.links) {
+    const before = at.get(link.before);
+    const after = at.get(link.after);
+    if (before === undefined || after === undefined) continue;
+    const between = after.start - before.end;
+    if (between < link.gap)
+      faults.push(
+        fault('gap', `${after.work.label} is only ${between} min after ${before.work.label}.`),
+      );
+    if (link.keeps !== null && between > link.keeps) {
+      faults.push(
+        fault('shelf-life', `${before.work.label} does not keep until ${after.work.label}.`),
+      );
+    }
+  }
+  return faults;
+}
+
+/** Sums of a shift against its capacities, and people and machines at every minute. */
+function checkShift(own: readonly Placed[], rest: readonly Placed[], fault: MakeFault): Fault[] {
+  const shift = own[0]?.shift;
+  if (shift === undefined) return [];
+  const all = [...own, ...rest];
+  const total = (minutesOf: (work: Work) => number) =>
+    all.reduce((sum, it) => sum + minutesOf(it.work), 0);
+  const faults: Fault[] = [];
+  const limit = (name: string, needed: number, capacity: number) => {
+    if (needed > capacity)
+      faults.push(fault('capacity', `${shift.key}: ${name} ${needed} of ${capacity} min.`));
+  };
+  // A resource nobody of this order draws on cannot be overdrawn by it.
+  if (own.some((it) => it.work.benchMinutes > 0))
+    limit(
+      'bench',
+      total((it) => it.benchMinutes),
+      shift.benchMinutes,
+    );
+  if (own.some((it) => it.work.mixerMinutes > 0))
+    limit(
+      'mixer',
+      total((it) => it.mixerMinutes),
+      shift.mixerMinutes,
+    );
+  if (own.some((it) => it.work.ovenMinutes > 0))
+    limit(
+      'oven',
+      total((it) => it.ovenMinutes),
+      shift.ovenMinutes,
+    );
+  for (const skill of new Set(own.map((it) => it.work.skill))) {
+    if (skill === null) continue;
+    const skilled = shift.people.filter((it) => it.skills.includes(skill)).length;
+    limit(
+      skill,
+      total((it) => (it.skill === skill ? it.benchMinutes : 0)),
+      shift.skillMinutes.get(skill) ?? 0,
+    );
+    const most = busiest(
+      all
+        .filter((it) => it.work.skill === skill)
+        .map((it) => [it.start, it.start + it.work.benchMinutes, 1]),
+    );
+    if (most > skilled) faults.push(fault('hands', `${shift.key}: ${most} at ${skill} at once.`));
+  }
+  const ownBench = own.reduce((sum, it) => sum + it.work.benchMinutes, 0);
+  if (ownBench > shift.endAt - shift.startAt) {
+    faults.push(fault('one-order-a-shift', `${shift.key}: one order takes ${ownBench} min.`));
+  }
+  const hands = busiest(all.map((it) => [it.start, it.start + it.work.benchMinutes, 1]));
+  if (hands > shift.people.length)
+    faults.push(fault('hands', `${shift.key}: ${hands} pieces of work at once.`));
+  const mixing = busiest(all.map((it) => [it.start, it.start + it.work.mixerMinutes, 1]));
+  if (mixing > shift.mixers) faults.push(fault('hands', `${shift.key}: ${mixing} mixers at once.`));
+  const baking = busiest(
+    all
+      .filter((it) => it.work.ovenMinutes > 0)
+      .map((it) => {
+        const from = it.start + it.work.benchMinutes;
+        return [from, it.end, Math.ceil(it.work.ovenMinutes / (it.end - from))];
+      }),
+  );
+  if (baking > shift.decks)
+    faults.push(fault('hands', `${shift.key}: ${baking} oven decks at once.`));
+  return faults;
+}
+
+/** The most units in use at any moment of half-open stretches. */
+function busiest(
+  stretches: readonly (readonly [from: number, to: number, units: number])[],
+): number {
+  const steps = stretches
+    .filter(([from, to]) => to > from)
+    .flatMap(([from, to, units]): [number, number][] => [
+      [from, units],
+      [to, -units],
+    ])
+    .toSorted((a, b) => a[0] - b[0] || a[1] - b[1]);
+  let now = 0;
+  let most = 0;
+  for (const [, change] of steps) {
+    now += change;
+    most = Math.max(most, now);
+  }
+  return most;
+}
+
+/** Work kept apart from an allergen is over before any that contains it starts in its shift. */
+function checkAllergens(
+  order: PlannedOrder,
+  placed: readonly Placed[],
+  others: readonly PlannedOrder[],
+  standing: Standing,
+  fault: MakeFault,
+): Fault[] {
+  const faults: Fault[] = [];
+  const demands = new Map(others.map((it) => [it.orderId, it.demand]));
+  for (const own of placed) {
+    for (const other of standing.byShift.get(own.shift?.key ?? '') ?? []) {
+      const theirs = demands.get(other.orderId);
+      if (theirs === undefined) continue;
+      const apart = order.demand.apart.some((it) => theirs.contains.includes(it));
+      const wanted = theirs.apart.some((it) => order.demand.contains.includes(it));
+      if (apart && own.end > other.start)
+        faults.push(
+          fault(
+            'allergen',
+            `${own.work.label} is not before work with an allergen it is kept apart from.`,
+          ),
+        );
+      if (wanted && other.end > own.start)
+        faults.push(
+          fault(
+            'allergen',
+            `${own.work.label} is not after work kept apart from an allergen in it.`,
+          ),
+        );
+    }
+  }
+  return faults;
+}
+
+function checkCold(
+  supply: Supply,
+  order: PlannedOrder,
+  placed: readonly Placed[],
+  others: readonly PlannedOrder[],
+  fault: MakeFault,
+): Fault[] {
+  const fills = placed
+    .filter((it) => it.work.kind === 'fill-and-crumb-coat')
+    .flatMap((it) => it.shift?.date ?? []);
+  const first = fills.toSorted()[0];
+  if (first !== undefined && (order.coldFrom === null || order.coldFrom > first)) {
+    return [fault('cold', 'The cake is filled before it has its place in the cold.')];
+  }
+  if (supply.cold === null || order.coldFrom === null) return [];
+  const { cold } = supply;
+  const from = order.coldFrom < supply.today ? supply.today : order.coldFrom;
+  return datesInRange(from, addDays(order.pickup.date, -1)).flatMap((night) => {
+    const boxes = [order, ...others]
+      .filter((it) => it.coldFrom !== null && it.coldFrom <= night && night < it.pickup.date)
+      .flatMap((it) => it.demand.boxes);
+    return haveRoom(cold, boxes)
+      ? []
+      : [fault('cold', `No room in the cold in the night of ${night}.`)];
+  });
+}
+
+type ColdBox = PlannedOrder['demand']['boxes'][number];
+
+/** Hall's condition: every set of kinds of places must be enough for the boxes that need it. */
+function haveRoom(cold: readonly ColdPlace[], boxes: readonly ColdBox[]): boolean {
+  const wants = boxes.map((box) =>
+    cold.reduce((mask, place, n) => {
+      const upright = box.widthMm <= place.widthMm && box.depthMm <= place.depthMm;
+      const turned = box.depthMm <= place.widthMm && box.widthMm <= place.depthMm;
+      return box.heightMm <= place.heightMm && (upright || turned) ? mask | (1 << n) : mask;
+    }, 0),
+  );
+  for (let set = 0; set < 1 << cold.length; set += 1) {
+    const places = cold.reduce((sum, place, n) => sum + ((set >> n) & 1) * place.places, 0);
+    if (wants.filter((mask) => (mask & ~set) === 0).length > places) return false;
+  }
+  return true;
+}
+
+function checkPickup(
+  supply: Supply,
+  order: PlannedOrder,
+  others: readonly PlannedOrder[],
+  fault: MakeFault,
+): Fault[] {
+  const { pickup, demand } = order;
+  const faults: Fault[] = [];
+  const windows = supply.windows.get(pickup.date) ?? [];
+  const window = windows.find((it) => it.startMinute === pickup.startMinute);
+  const sameDay = others.filter((it) => it.pickup.date === pickup.date);
+  if (window === undefined) {
+    faults.push(fault('closed', `No pickup window on ${pickup.date} at ${pickup.startMinute}.`));
+  } else {
+    if (window.startAt !== pickup.startAt || window.endAt !== pickup.endAt) {
+      faults.push(fault('window', 'The pickup is not when its window is.'));
+    }
+    const taken = sameDay.filter((it) => it.pickup.startMinute === pickup.startMinute).length;
+    if (taken + 1 > window.handovers)
+      faults.push(fault('window', `${taken + 1} handovers where there are ${window.handovers}.`));
+  }
+  for (const cap of supply.caps) {
+    const counts = (it: PlannedOrder) =>
+      cap.occasionId === null || it.demand.occasionId === cap.occasionId;
+    if (!counts(order)) continue;
+    if (cap.weekday !== null && cap.weekday !== weekdayOf(pickup.date)) continue;
+    if (cap.date !== null && cap.date !== pickup.date) continue;
+    if (sameDay.filter(counts).length + 1 > cap.maxOrders) {
+      faults.push(fault('cap', `More than ${cap.maxOrders} orders on ${pickup.date}.`));
+    }
+  }
+  const handovers = windows.reduce((sum, it) => sum + it.handovers, 0);
+  if (supply.keptBack > 0 && sameDay.length + 1 > handovers - supply.keptBack) {
+    faults.push(fault('kept-back', 'Only the handovers kept back for regulars are left.'));
+  }
+  if (pickup.date > supply.bookOpenUntil)
+    faults.push(fault('book-not-open', 'The book is not open that far ahead.'));
+  if (pickup.date < earliestDay(supply, demand.noticeDays))
+    faults.push(fault('notice', 'That is less notice than it needs.'));
+  return faults;
+}
+
+function earliestDay(supply: Supply, noticeDays: number): LocalDate {
+  return addDays(supply.today, noticeDays);
+}

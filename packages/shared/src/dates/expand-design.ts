@@ -1,0 +1,101 @@
+import type { AllergenId, Severity } from '#shared/contracts/vocabulary.ts';
+import { amountsOf, batterG } from '#shared/kitchen/amounts.ts';
+import { containedAllergens, partsOf } from '#shared/kitchen/parts.ts';
+import type { ResolvedDesign, ResolvedTier } from '#shared/kitchen/resolve-design.ts';
+import type { Block } from '#shared/kitchen/sizes.ts';
+import { bakeSponges, makeFillings, mixFrostings } from './expand-batches.ts';
+import { boxCake, coatTier, decorateCake, stackTiers } from './expand-coats.ts';
+import { Expansion, type Equipment, type Layer } from './expansion.ts';
+import type { Box, Demand } from './model.ts';
+import type { WorkTimes } from './work-times.ts';
+
+export type ExpandInput = {
+  readonly resolved: ResolvedDesign;
+  readonly workTimes: WorkTimes;
+  readonly equipment: Equipment;
+  /** Days, the larger of what the kind of item and the occasion ask for. */
+  readonly noticeDays: number;
+};
+
+/** Room round a tier on its board, and over it, in the fridge; millimetres. */
+const boardMarginMm = 40;
+const headroomMm = 20;
+
+/** Severities for which work is kept apart from what the guest must not have. */
+const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylaxis'];
+
+/**
+ * Expands a chosen cake into tasks, batches and the gaps between them, in whole minutes by the
+ * studio's work times. Work longer than the longest piece is split into parts. Handing over is no
+ * work here: the pickup windows count it. Tiers keep cold places of their own, since most stand
+ * apart until they are stacked.
+ * @throws when the design has no cake or no coating yet
+ */
+export function expandDesign({ resolved, workTimes, equipment, noticeDays }: ExpandInput): Demand {
+  const plan = new Expansion(workTimes, equipment);
+  const layers = layersOf(resolved);
+  const real = layers.filter((it) => it.tier.real);
+  const sponges = bakeSponges(plan, real);
+  const fillings = makeFillings(plan, real);
+  const frostings = mixFrostings(plan, layers);
+  const coats = layers.map((layer) => {
+    if (layer.tier.coating === null) throw new Error('A cake without a coating cannot be planned.');
+    return coatTier(plan, layer, layer.tier.coating, { sponges, fillings, frostings });
+  });
+  if (coats.length === 0) throw new Error('A design without a cake cannot be planned.');
+  const standing = stackTiers(plan, layers, coats);
+  const dressed = decorateCake(plan, resolved, standing);
+  boxCake(plan, layers.length, dressed);
+  const contains = containedAllergens(partsOf(resolved))
+    .filter((it) => it.state === 'contains')
+    .map((it) => it.allergen);
+  return {
+    occasionId: resolved.design.guests.occasionId,
+    noticeDays: Math.max(noticeDays, ...resolved.decorations.map((it) => it.decoration.noticeDays)),
+    work: plan.work,
+    links: plan.links,
+    boxes: layers.map((layer) => boxOf(layer.tier.block)),
+    contains,
+    apart: apartFrom(resolved, contains),
+  };
+}
+
+/** A cake that contains the allergen cannot be kept apart from it; that is the advice's to stop. */
+function apartFrom({ design }: ResolvedDesign, contains: readonly AllergenId[]): AllergenId[] {
+  const declared = design.guests.allergies
+    .filter((it) => keepsApart.includes(it.severity))
+    .flatMap((it) => it.allergen ?? []);
+  return [...new Set(declared)].filter((it) => !contains.includes(it));
+}
+
+function layersOf(resolved: ResolvedDesign): Layer[] {
+  const amounts = amountsOf(resolved);
+  return resolved.tiers.map((tier, index) => {
+    const grams = amounts.perTier[index];
+    const { sponge } = tier;
+    return {
+      tier,
+      index,
+      name: tierName(tier, resolved),
+      batterG: sponge === null ? 0 : Math.ceil(batterG(grams?.spongeG ?? 0, sponge)),
+      fillingG: Math.ceil(grams?.fillingG ?? 0),
+      frostingG: Math.ceil(grams?.frostingG ?? 0),
+      coveringG: Math.ceil(grams?.coveringG ?? 0),
+    };
+  });
+}
+
+function tierName({ index }: ResolvedTier, { design, tiers }: ResolvedDesign): string {
+  if (design.cake?.kind === 'sheet') return 'the sheet';
+  if (tiers.length === 1) return 'the cake';
+  if (index === 0) return 'the bottom tier';
+  return index === tiers.length - 1 ? 'the top tier' : `tier ${index + 1}`;
+}
+
+function boxOf(block: Block): Box {
+  return {
+    widthMm: block.widthMm + 2 * boardMarginMm,
+    depthMm: block.depthMm + 2 * boardMarginMm,
+    heightMm: block.heightMm + headroomMm,
+  };
+}
