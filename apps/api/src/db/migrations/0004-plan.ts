@@ -149,6 +149,7 @@ CREATE TABLE tasks (
   mixer_minutes INTEGER NOT NULL DEFAULT 0 CHECK (mixer_minutes >= 0),
   oven_minutes INTEGER NOT NULL DEFAULT 0 CHECK (oven_minutes >= 0),
   skill_id TEXT REFERENCES skills (id),
+  within_minutes INTEGER CHECK (within_minutes >= 0),
   state TEXT NOT NULL DEFAULT 'planned' CHECK (state IN ('planned', 'started', 'finished', 'late', 'dropped')),
   minutes_taken INTEGER CHECK (minutes_taken >= 0),
   started_at TEXT CHECK (started_at GLOB '????-??-?? ??:??:??.??? +00:00'),
@@ -198,6 +199,7 @@ CREATE TABLE task_links (
   after_task_id TEXT REFERENCES tasks (id) ON DELETE CASCADE,
   after_batch_id TEXT REFERENCES batches (id) ON DELETE CASCADE,
   gap_minutes INTEGER NOT NULL DEFAULT 0 CHECK (gap_minutes >= 0),
+  keeps_minutes INTEGER CHECK (keeps_minutes >= gap_minutes),
   CHECK ((before_task_id IS NULL) <> (before_batch_id IS NULL)),
   CHECK ((after_task_id IS NULL) <> (after_batch_id IS NULL))
 ) STRICT;

@@ -15,6 +15,8 @@ export class TaskLink extends Model<InferAttributes<TaskLink>, InferCreationAttr
   declare afterTaskId: string | null;
   declare afterBatchId: string | null;
   declare gapMinutes: CreationOptional<number>;
+  /** Shelf life of what the first makes: the second starts at most so long after it ends. */
+  declare keepsMinutes: number | null;
 }
 
 export function initTaskLink(sequelize: Sequelize): void {
@@ -26,6 +28,7 @@ export function initTaskLink(sequelize: Sequelize): void {
       afterTaskId: nullable(text()),
       afterBatchId: nullable(text()),
       gapMinutes: withDefault(integer(), 0),
+      keepsMinutes: nullable(integer()),
     },
     { sequelize, tableName: 'task_links' },
   );

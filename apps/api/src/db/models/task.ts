@@ -52,6 +52,8 @@ export class Task extends Model<InferAttributes<Task>, InferCreationAttributes<T
   declare mixerMinutes: CreationOptional<number>;
   declare ovenMinutes: CreationOptional<number>;
   declare skillId: string | null;
+  /** It starts at most so long before the pickup window's end: what it makes keeps no longer. */
+  declare withinMinutes: number | null;
   declare state: CreationOptional<WorkState>;
   declare minutesTaken: number | null;
   declare startedAt: Date | null;
@@ -77,6 +79,7 @@ export function initTask(sequelize: Sequelize): void {
       mixerMinutes: withDefault(integer(), 0),
       ovenMinutes: withDefault(integer(), 0),
       skillId: nullable(text()),
+    withinMinutes: nullable(integer()),
       state: withDefault(oneOf(workStates), 'planned'),
       minutesTaken: nullable(integer()),
       startedAt: nullable(instant('startedAt')),
