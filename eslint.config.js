@@ -54,8 +54,11 @@ export default defineConfig(
         'error',
         { considerDefaultExhaustiveForUnions: true },
       ],
-      // Destructuring is how a field is left out.
-      '@typescript-eslint/no-unused-vars': ['error', { ignoreRestSiblings: true }],
+      // Destructuring is how a field is left out; an argument that is only in the way is `_named`.
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', ignoreRestSiblings: true },
+      ],
     },
   },
   {

@@ -169,7 +169,7 @@ export async function runStack({ script, splitPorts, parts }) {
       GOOGLE_FAKE_DATA: path.join(data, 'google'),
       GOOGLE_CLIENT_ID: stack.env.GOOGLE_CLIENT_ID,
       GOOGLE_CLIENT_SECRET: secret,
-      GOOGLE_REDIRECT_URIS: `${url}/api/session/google/callback`,
+      GOOGLE_REDIRECT_URIS: `${url}/api/auth/google/callback`,
     },
   });
 
