@@ -1,6 +1,6 @@
 import { DataTypes } from 'sequelize';
 import type { ModelAttributeColumnOptions } from 'sequelize';
-import * as z from 'zod/mini';
+import type * as z from 'zod/mini';
 import { newId } from '#api/platform/ids.ts';
 import { currentClock } from './current-database.ts';
 

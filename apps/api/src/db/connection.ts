@@ -1,6 +1,6 @@
 import sqlite3 from 'sqlite3';
 import { Sequelize, Transaction } from 'sequelize';
-import { StrayWriteError, transactionNamespace } from './transaction.ts';
+import { isInTransaction, StrayWriteError, transactionNamespace } from './transaction.ts';
 
 /** How long a statement waits for another process to finish its write, milliseconds. */
 const busyTimeout = 5000;
@@ -58,7 +58,8 @@ export async function connect(file: string): Promise<Sequelize> {
     define: { underscored: true, timestamps: false, freezeTableName: true },
   });
   sequelize.addHook('beforeQuery', (options) => {
-    if (writes.has(options.type) && !options.transaction) throw new StrayWriteError();
+    const strays = options.transaction ? !isInTransaction() : writes.has(options.type);
+    if (strays) throw new StrayWriteError();
   });
   await sequelize.query('PRAGMA journal_mode = WAL');
   await sequelize.query('PRAGMA query_only = ON');

@@ -1,11 +1,17 @@
 import path from 'node:path';
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
 import { openTestDatabase } from '#api/testing/fresh-database.ts';
 import type { TestDatabase } from '#api/testing/fresh-database.ts';
 import { runBeside } from '#api/testing/run-beside.ts';
 import { PlanState } from './models/plan-state.ts';
 import { Skill } from './models/skill.ts';
-import { afterCommit, inTransaction, isInTransaction, StrayWriteError } from './transaction.ts';
+import {
+  afterCommit,
+  inTransaction,
+  isInTransaction,
+  StrayWriteError,
+  transactionNamespace,
+} from './transaction.ts';
 
 let test: TestDatabase;
 beforeAll(async () => {
@@ -102,12 +108,13 @@ describe('inTransaction', () => {
   });
 
   it('lets nobody else open a transaction', async () => {
-    const { sequelize } = test.database;
-    await expect(sequelize.transaction(() => Promise.resolve())).rejects.toThrow(
-      'Only inTransaction',
-    );
-    const nested = inTransaction(() => sequelize.transaction(() => Promise.resolve()));
-    await expect(nested).rejects.toThrow('Only inTransaction');
+    vi.spyOn(console, 'warn').mockReturnValue(undefined);
+    const own = Skill.findOrCreate({ where: { id: 'lettering' }, defaults: lettering });
+    await expect(own).rejects.toThrow(StrayWriteError);
+    expect(await Skill.count()).toBe(0);
+    const open = (): void => transactionNamespace.run(() => undefined);
+    expect(open).toThrow('Only inTransaction');
+    await expect(inTransaction(async () => open())).rejects.toThrow('Only inTransaction');
   });
 });
 

@@ -34,6 +34,6 @@ export async function enqueue<K extends EventKind>(
     orderId,
     nextAt: notBefore ?? currentClock().now(),
   });
-  afterCommit(outboxSignal.notify);
+  afterCommit(() => outboxSignal.notify());
   return true;
 }

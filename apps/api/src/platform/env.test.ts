@@ -10,10 +10,11 @@ const production = {
   MAIL_FROM: 'The Studio <hello@alder-falls.com>',
 };
 
-const names: Record<string, string | undefined> = {};
-
 /** What is said of an environment, name by name. */
-function faults(changes: typeof names, kind: 'production' | 'demo' = 'production'): string[] {
+function faults(
+  changes: Record<string, string | undefined>,
+  kind: 'production' | 'demo' = 'production',
+): string[] {
   try {
     readEnv({ ...production, ...changes }, kind);
     return [];

@@ -56,7 +56,7 @@ describe('the models', () => {
        AND name NOT LIKE 'sqlite_%' AND name <> 'schema_migrations' ORDER BY name`,
     );
     const models = Object.values(test.database.sequelize.models);
-    const modelOf = new Map(models.map((model) => [String(model.getTableName()), model]));
+    const modelOf = new Map(models.map((model) => [model.tableName, model]));
     expect([...modelOf.keys()].sort()).toEqual(tables.map(({ name }) => name));
 
     for (const { name, sql } of tables) {
