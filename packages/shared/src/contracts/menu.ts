@@ -193,6 +193,8 @@ export const extraItem = z.object({
   name: z.string(),
   blurb: z.string(),
   priceMinor: minor,
+  /** Category in the price book's taxes; without one it is taxed as goods. */
+  taxCategory: z.optional(slug),
 });
 export type ExtraItem = z.infer<typeof extraItem>;
 

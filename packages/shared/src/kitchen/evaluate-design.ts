@@ -1,35 +1,55 @@
 import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { adviseOn } from './advice.ts';
+import { amountsOf, carriedWeightG, heightMm } from './amounts.ts';
+import { mergeAllergens } from './merge-allergens.ts';
+import { containedAllergens, partsOf } from './parts.ts';
 import { countPortions } from './portions.ts';
+import { priceDesign } from './price.ts';
+import { proposeCakes } from './propose-cakes.ts';
+import { rankCoats } from './rank-coats.ts';
+import { resolveDesign } from './resolve-design.ts';
+import { tableOf } from './situation.ts';
+import { keepCoolText } from './time-out.ts';
 
 /**
  * Everything worked out about a design: portions, proposals, price, allergens, ranks, advice,
  * amounts. Pure; the same in the browser and on the server. `today` is the studio's local date.
  * Never throws on a design that passes the contract and names what the menu has; throws
- * `UnknownPart` (with the path inside the design) otherwise.
+ * `UnknownPart` (with the path inside the design) otherwise. Proposals are remembered per `menu`
+ * object, so pass the same one again while it has not changed.
  */
-export function evaluateDesign(request: EstimateRequest, menu: Menu, _today: string): Estimate {
-  const { design } = request;
+export function evaluateDesign(request: EstimateRequest, menu: Menu, today: string): Estimate {
+  const { design, date } = request;
+  const resolved = resolveDesign(design, menu);
+  const terms = { date, today };
+  const portions = countPortions(design, menu);
+  const proposals = proposeCakes(resolved, terms);
+  const parts = partsOf(resolved);
+  const table = tableOf(resolved, parts, date);
+  const ranks = rankCoats(table);
+  const amounts = amountsOf(resolved);
   return {
-    portions: countPortions(design, menu),
-    proposals: [],
-    price: {
-      currency: menu.priceBook.currency,
-      priceBookVersionId: menu.priceBook.versionId,
-      lines: [],
-      subtotalMinor: 0,
-      taxMinor: 0,
-      taxInclusive: menu.priceBook.taxInclusive,
-      totalMinor: 0,
-      depositMinor: 0,
+    portions,
+    proposals,
+    price: priceDesign(resolved, terms),
+    allergens: containedAllergens(parts),
+    handled: mergeAllergens([menu.studio.handles]),
+    ranks,
+    advice: adviseOn({ ...table, ranks }, portions, proposals),
+    weightG: carriedWeightG(resolved, amounts),
+    amounts: {
+      spongeG: Math.round(amounts.spongeG),
+      fillingG: Math.round(amounts.fillingG),
+      frostingG: Math.round(amounts.frostingG),
+      coveringG: Math.round(amounts.coveringG),
     },
-    allergens: [],
-    handled: menu.studio.handles,
-    ranks: [],
-    advice: [],
-    weightG: 0,
-    amounts: { spongeG: 0, fillingG: 0, frostingG: 0, coveringG: 0 },
-    heightMm: 0,
-    keepCool: '',
+    heightMm: heightMm(resolved),
+    keepCool: keepCoolText(
+      design.setting,
+      table.warmth?.celsius ?? null,
+      menu.studio.labelRegion,
+      menu.studio.temperatureLead,
+    ),
   };
 }

@@ -238,9 +238,10 @@ function rushLines(
 }
 
 function extraLines({ extras }: ResolvedDesign): PriceLine[] {
-  return extras.map(({ extra, quantity }) =>
-    lineOf('extra', extra.name, quantity, quantity * extra.priceMinor, taxCategories.goods),
-  );
+  return extras.map(({ extra, quantity }) => {
+    const category = extra.taxCategory ?? taxCategories.goods;
+    return lineOf('extra', extra.name, quantity, quantity * extra.priceMinor, category);
+  });
 }
 
 function minimumLines(lines: readonly PriceLine[], book: PriceBook, hasCake: boolean): PriceLine[] {

@@ -1,0 +1,193 @@
+import type { Tier } from '#shared/contracts/design.ts';
+import type { Menu, PortionSize, TierSize } from '#shared/contracts/menu.ts';
+import { formatList } from '#shared/dates/format.ts';
+import { lengthFigure } from './measures.ts';
+import { countOf } from './sentences.ts';
+import { doubleHeightMm, portionsOfBlock, smallestStepMm } from './sizes.ts';
+
+/** A stack of the studio's tins, from the board up, and how many it feeds. */
+export type Stack = {
+  readonly sizes: readonly TierSize[];
+  readonly heightMm: number;
+  readonly portions: number;
+};
+
+export type ProposedStack = Stack & {
+  readonly id: string;
+  readonly name: string;
+  readonly blurb: string;
+};
+
+/** The look of a stack: tiers within these steps of one another, and no more than this many. */
+const largestStepMm = 130;
+const mostTiers = 6;
+
+/** The usual height of a tier, 4 in; the size's nearest is taken. */
+const usualHeightMm = 102;
+
+/** "Some over" has this much more than wanted, at least. */
+const someOver = 1.1;
+
+/** A millimetre lost between inches and millimetres is not a smaller step. */
+const roundingMm = 1;
+
+const stacksByMenu = new WeakMap<Menu, Map<string, readonly Stack[]>>();
+
+/** Every sensible stack of the studio's round sizes (square where it bakes no round ones). */
+function stacksOf(menu: Menu, portion: PortionSize): readonly Stack[] {
+  let byPortion = stacksByMenu.get(menu);
+  if (byPortion === undefined) {
+    byPortion = new Map();
+    stacksByMenu.set(menu, byPortion);
+  }
+  let stacks = byPortion.get(portion.id);
+  if (stacks === undefined) {
+    stacks = enumerate(menu, portion);
+    byPortion.set(portion.id, stacks);
+  }
+  return stacks;
+}
+
+function enumerate(menu: Menu, portion: PortionSize): Stack[] {
+  const round = menu.tierSizes.filter((it) => it.shape === 'round');
+  const shapes = round.length > 0 ? round : menu.tierSizes.filter((it) => it.shape === 'square');
+  const widestFirst = shapes.toSorted((a, b) => b.widthMm - a.widthMm);
+  const stacks: Stack[] = [];
+  const grow = (sizes: readonly TierSize[], from: number) => {
+    if (sizes.length > 0) stacks.push(...atHeights(sizes, portion));
+    if (sizes.length === mostTiers) return;
+    const top = sizes.at(-1);
+    for (const [index, next] of widestFirst.entries()) {
+      if (index < from) continue;
+      if (top !== undefined) {
+        const step = top.widthMm - next.widthMm;
+        if (step < smallestStepMm - roundingMm || step > largestStepMm) continue;
+      }
+      grow([...sizes, next], index + 1);
+    }
+  };
+  grow([], 0);
+  return stacks.sort((a, b) => a.portions - b.portions);
+}
+
+/** A stack at the usual height, and again with double tiers for tables that need more. */
+function atHeights(sizes: readonly TierSize[], portion: PortionSize): Stack[] {
+  const common = (sizes[0]?.heightsMm ?? []).filter((height) =>
+    sizes.every((it) => it.heightsMm.includes(height)),
+  );
+  const nearest = (heights: readonly number[], wanted: number) =>
+    heights.toSorted((a, b) => Math.abs(a - wanted) - Math.abs(b - wanted))[0];
+  const usual = nearest(
+    common.filter((it) => it <= doubleHeightMm),
+    usualHeightMm,
+  );
+  const double = nearest(
+    common.filter((it) => it > doubleHeightMm),
+    doubleHeightMm,
+  );
+  return [usual, double].flatMap((heightMm) =>
+    heightMm === undefined
+      ? []
+      : [
+          {
+            sizes,
+            heightMm,
+            portions: sizes.reduce(
+              (sum, it) => sum + portionsOfBlock({ ...it, heightMm }, portion),
+              0,
+            ),
+          },
+        ],
+  );
+}
+
+/** How many tiers look right for a table (memory). */
+function usualTiers(wanted: number): number {
+  if (wanted <= 28) return 1;
+  if (wanted <= 60) return 2;
+  if (wanted <= 120) return 3;
+  return wanted <= 200 ? 4 : 5;
+}
+
+/**
+ * Two or three stacks that feed a number of portions: the one that wastes least, one with some
+ * over, and one of another number of tiers. Usual heights before double ones. Empty where the
+ * studio bakes nothing large enough. The same menu and number always give the same answer.
+ */
+export function proposeStacks(wanted: number, menu: Menu, portion: PortionSize): ProposedStack[] {
+  const enough = stacksOf(menu, portion).filter((it) => it.portions >= wanted);
+  const single = enough.filter((it) => it.heightMm <= doubleHeightMm);
+  const usable = single.length > 0 ? single : enough;
+  const tiers = usualTiers(wanted);
+  const offBy = (it: Stack) => Math.abs(it.sizes.length - tiers);
+  // Waste first; between stacks that waste much the same, the more usual number of tiers.
+  const slack = Math.max(2, Math.round(wanted * 0.05));
+  const cost = (it: Stack, from: number) =>
+    Math.floor((it.portions - from) / slack) * 2 + offBy(it) * 1.5;
+  const best = (from: number, stacks: readonly Stack[]) =>
+    stacks
+      .filter((it) => it.portions >= from)
+      .toSorted((a, b) => cost(a, from) - cost(b, from) || a.portions - b.portions)[0];
+
+  const just = best(wanted, usable);
+  if (just === undefined) return [];
+  const over = best(
+    Math.max(just.portions + 1, Math.ceil(wanted * someOver)),
+    usable.filter((it) => it.sizes.length === just.sizes.length),
+  );
+  const other = best(
+    wanted,
+    usable.filter(
+      (it) => it.sizes.length !== just.sizes.length && it.portions <= wanted + 2 * slack + 2,
+    ),
+  );
+  return [
+    describe(just, 'Just enough', menu),
+    ...(over === undefined ? [] : [describe(over, 'Some over', menu)]),
+    ...(other === undefined
+      ? []
+      : [
+          describe(
+            other,
+            other.sizes.length > just.sizes.length ? 'Taller' : 'Lower and wider',
+            menu,
+          ),
+        ]),
+  ];
+}
+
+function describe(stack: Stack, blurb: string, menu: Menu): ProposedStack {
+  const lead = menu.studio.lengthLead;
+  const figures = stack.sizes.map((it) => lengthFigure(it.widthMm, lead));
+  return {
+    ...stack,
+    id: `${stack.sizes.map((it) => `${it.shape}-${it.widthMm}`).join('+')}x${stack.heightMm}`,
+    name: `${countOf(stack.sizes.length, 'tier')}, ${formatList(figures)} ${lead}`,
+    blurb,
+  };
+}
+
+/** Layers of sponge for a height: one for about every 35 mm, an even number when cut double. */
+export function usualLayers(heightMm: number): number {
+  if (heightMm <= 90) return 2;
+  return heightMm <= doubleHeightMm ? 3 : 4;
+}
+
+/** The tiers of a stack as they stand in a design. */
+export function tiersOf(
+  stack: Stack,
+  inside: { readonly spongeId: string | null; readonly fillingId: string | null },
+): Tier[] {
+  return stack.sizes.map(({ shape, widthMm, depthMm }) => ({
+    shape,
+    widthMm,
+    depthMm,
+    heightMm: stack.heightMm,
+    layers: usualLayers(stack.heightMm),
+    real: true,
+    keepsake: false,
+    spongeId: inside.spongeId,
+    fillingId: inside.fillingId,
+    coating: null,
+  }));
+}
