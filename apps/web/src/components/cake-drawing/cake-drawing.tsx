@@ -4,7 +4,8 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
 import { classNames } from '#web/lib/class-names.ts';
 import { describeCake } from './describe-cake.ts';
-import type { Room, Shown, ViewProps } from './layout.ts';
+import { decorationsPerTier, reachAbove } from './decorated.tsx';
+import { type Room, type Shown, type ViewProps, layOutTiers, measureGap } from './layout.ts';
 import { SheetView } from './sheet-view.tsx';
 import { TieredView } from './tiered-view.tsx';
 
@@ -32,6 +33,7 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
   const there =
     cake !== null && (cake.kind === 'sheet' ? cake.sheet !== null : cake.tiers.length > 0);
   const level = view.room.y - 40 + (view.room.height + 40) * (1 - made);
+  const headroom = there && size === 'full' ? emptyAbove(cake, look, menu, view.room) : 0;
   const draw = (show: Shown) =>
     there && (
       <Drawn
@@ -45,7 +47,7 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
     );
   return (
     <svg
-      viewBox={`0 0 ${view.width} ${view.height}`}
+      viewBox={`0 ${headroom} ${view.width} ${view.height - headroom}`}
       role="img"
       aria-labelledby={`${id}-title`}
       aria-describedby={`${id}-words`}
@@ -83,6 +85,14 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
       {size === 'full' && draw('measures')}
     </svg>
   );
+}
+
+/** What of the sheet of paper stays empty above a low cake with its dimension line, and is cut off. */
+function emptyAbove(cake: Cake, look: Look | null, menu: Menu, room: Room): number {
+  if (cake.kind === 'sheet') return 0;
+  const { top, scale } = layOutTiers(cake, menu, room);
+  const highest = decorationsPerTier(look, menu, cake.tiers.length).at(-1) ?? [];
+  return Math.max(0, top - reachAbove(highest, scale) - measureGap - 28);
 }
 
 function Drawn(props: ViewProps) {

@@ -162,9 +162,9 @@ function Sprinkles({ box, colour }: { readonly box: Box; readonly colour: string
   return (
     <g strokeWidth="1.7" strokeLinecap="round">
       {Array.from({ length: count }, (_, at) => {
-        // A golden-ratio walk scatters evenly and always the same way.
-        const across = (at * 0.618034) % 1;
-        const up = ((at * 0.381966) % 1) ** 1.6;
+        // Steps by the plastic number scatter evenly over a plane, and always the same way.
+        const across = (at * 0.754878) % 1;
+        const up = ((at * 0.56984) % 1) ** 1.6;
         const turn = (at * 137) % 180;
         const tint =
           at % 2 === 0 ? colour : (sprinkleColours[(at >> 1) % sprinkleColours.length] ?? colour);
@@ -196,6 +196,31 @@ const spots = [
 
 const mostOfAKind = 4;
 
+const clusterSize = (scale: number) => Math.min(15, Math.max(8, 26 * scale));
+const figureSize = (scale: number) => Math.min(34, Math.max(16, 60 * scale));
+const topperSize = (scale: number) => Math.min(44, Math.max(22, 90 * scale));
+
+/** How far what stands on the top tier reaches above it, in units of the drawing. */
+export function reachAbove(placed: readonly Placed[], scale: number): number {
+  return Math.max(
+    0,
+    ...placed.map(({ glyph }) => {
+      switch (glyph) {
+        case 'topper':
+          return topperSize(scale) * 1.05;
+        case 'figure':
+          return figureSize(scale) * 1.05;
+        case 'flower':
+        case 'fruit':
+        case 'leaf':
+          return clusterSize(scale) * 1.7;
+        default:
+          return 0;
+      }
+    }),
+  );
+}
+
 type StandingProps = {
   readonly at: TierBox;
   /** The tier above, if there is one. */
@@ -208,7 +233,7 @@ type StandingProps = {
 /** What sits on a tier's top: clusters on its ledge, figures, toppers; pictures on its face. */
 export function Standing({ at, above, placed, index, scale }: StandingProps) {
   const right = index % 2 === 0;
-  const size = Math.min(15, Math.max(8, 26 * scale));
+  const size = clusterSize(scale);
   const ledge =
     above === undefined ? at.x + at.width * 0.66 : right ? above.x + above.width - 2 : above.x + 2;
   const cluster = placed.flatMap((it) =>
@@ -277,9 +302,9 @@ function Other({ it, n, at, above, right, scale }: OtherProps) {
   return (
     <g transform={`translate(${x} ${at.y + 1})`}>
       {it.glyph === 'figure' ? (
-        <Figure colour={it.colour} size={Math.min(34, Math.max(16, 60 * scale))} />
+        <Figure colour={it.colour} size={figureSize(scale)} />
       ) : (
-        <Topper colour={it.colour} size={Math.min(44, Math.max(22, 90 * scale))} />
+        <Topper colour={it.colour} size={topperSize(scale)} />
       )}
     </g>
   );

@@ -38,6 +38,9 @@ export type ViewProps = {
   readonly hatch: string;
 };
 
+/** The topmost dimension line lies so far above what it measures. */
+export const measureGap = 18;
+
 /** A small cake is not blown up to fill the page: this many units a millimetre at most. */
 const largestScale = 1.05;
 

@@ -8,7 +8,7 @@ import type { Box, ViewProps } from './layout.ts';
 import { PipedWords } from './piped-words.tsx';
 import { TierCoat } from './tier-coat.tsx';
 
-const gap = 34;
+const gap = 42;
 const boardMarginMm = 50;
 
 /** A sheet cake: from above, where its words and pictures lie, and from the side; one scale. */
@@ -36,7 +36,16 @@ export function SheetView({ cake, look, menu, room, show, hatch }: ViewProps) {
   const words = look?.words.map((it) => it.text).join(' ') ?? '';
   const tier = { ...cake.sheet, real: true };
   const lead = menu.studio.lengthLead;
-  const faceTier = { tier: { ...standIn, ...tier }, ...top, y: top.y + depth * 0.28 };
+  const flowered = placed.some((it) => ['flower', 'leaf', 'fruit'].includes(it.glyph));
+  const pictured = placed.some((it) => it.glyph === 'print');
+  // Flowers keep to the far corner, a picture to the near half, words have what is left.
+  const corner = {
+    tier: { ...standIn, ...tier },
+    ...top,
+    x: top.x + width * 0.2,
+    y: top.y + depth * 0.2,
+  };
+  const nearHalf = { ...corner, ...top, y: top.y + depth * 0.42, height: depth * 0.56 };
   if (show === 'measures') {
     return (
       <g>
@@ -57,7 +66,7 @@ export function SheetView({ cake, look, menu, room, show, hatch }: ViewProps) {
           <text x={top.x - margin} y={top.y - margin - 8}>
             from above
           </text>
-          <text x={side.x - margin} y={side.y - 9}>
+          <text x={side.x - margin} y={side.y - 15}>
             from the side, {formatLength(size.heightMm, lead)} high
           </text>
         </g>
@@ -93,8 +102,29 @@ export function SheetView({ cake, look, menu, room, show, hatch }: ViewProps) {
           <path d={`M${top.x + 2} ${top.y + depth - 2} ${pipedEdge(coat.style, width - 4, 7)} z`} />
         </g>
       )}
-      <PipedWords box={{ ...top, y: top.y + depth * 0.12 }} text={words} ground={colour} />
-      <Standing at={faceTier} above={undefined} placed={placed} index={0} scale={scale} />
+      <PipedWords
+        box={{
+          ...top,
+          width: width * (flowered ? 0.78 : 1),
+          height: depth * (pictured ? 0.56 : 1),
+        }}
+        text={words}
+        ground={colour}
+      />
+      <Standing
+        at={corner}
+        above={undefined}
+        placed={placed.filter((it) => it.glyph !== 'print')}
+        index={0}
+        scale={scale}
+      />
+      <Standing
+        at={nearHalf}
+        above={undefined}
+        placed={placed.filter((it) => it.glyph === 'print')}
+        index={0}
+        scale={scale}
+      />
       <rect
         x={side.x - margin}
         y={side.y + height}

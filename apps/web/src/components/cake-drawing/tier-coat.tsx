@@ -82,7 +82,7 @@ function Layers({
   const filling = menu.fillings.find((it) => it.id === tier.fillingId)?.colour;
   const colour = strong && filling !== undefined ? filling : lineOn(filling ?? fill);
   return (
-    <g strokeWidth={strong ? 3 : 1.4} strokeOpacity={strong ? 1 : 0.75} style={{ stroke: colour }}>
+    <g strokeWidth={strong ? 3 : 1.4} strokeOpacity={strong ? 1 : 0.5} style={{ stroke: colour }}>
       {Array.from({ length: Math.max(0, tier.layers - 1) }, (_, at) => (
         <path
           key={at}
@@ -114,27 +114,28 @@ function Combed({ box, fill }: { readonly box: Box; readonly fill: string }) {
 function Scraped({ box, fill }: { readonly box: Box; readonly fill: string }) {
   const { x, y, width, height } = box;
   const patches = [
-    [0.01, 0.02, 0.98, 0.13],
-    [0.02, 0.27, 0.34, 0.12],
-    [0.52, 0.3, 0.46, 0.1],
-    [0.16, 0.56, 0.52, 0.13],
-    [0.01, 0.84, 0.42, 0.13],
-    [0.58, 0.8, 0.41, 0.15],
+    [0.004, -0.02, 0.99, 0.22],
+    [0.02, 0.25, 0.4, 0.18],
+    [0.48, 0.3, 0.5, 0.14],
+    [0.12, 0.53, 0.6, 0.18],
+    [0.01, 0.78, 0.46, 0.2],
+    [0.52, 0.76, 0.47, 0.22],
   ] as const;
   return (
     <g fillOpacity="0.86" fill={fill}>
       {patches.map(([left, top, wide, high]) => (
-        <rect
+        <path
           key={`${left} ${top}`}
-          x={x + left * width}
-          y={y + top * height}
-          width={wide * width}
-          height={high * height}
-          rx={(high * height) / 2}
+          d={smear(x + left * width, y + top * height, wide * width, high * height)}
         />
       ))}
     </g>
   );
+}
+
+/** One stroke of the scraper: it starts thin, spreads and trails off. */
+function smear(x: number, y: number, w: number, h: number): string {
+  return `M${x} ${y + h * 0.55}q${w * 0.22} ${-h * 0.75} ${w * 0.5} ${-h * 0.45}t${w * 0.5} ${h * 0.2}q${-w * 0.16} ${h * 0.6} ${-w * 0.44} ${h * 0.42}t${-w * 0.56} ${-h * 0.17}z`;
 }
 
 function FootBorder({

@@ -1,19 +1,27 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatLength, lengthFigure } from '#shared/kitchen/measures.ts';
 import { coatColour } from '#web/components/coats/coat-colour.ts';
-import { Bands, Standing, decorationsPerTier } from './decorated.tsx';
+import { Bands, Standing, decorationsPerTier, reachAbove } from './decorated.tsx';
 import { Dimension } from './dimension.tsx';
-import { type TierBox, type ViewProps, layOutTiers } from './layout.ts';
+import { type TierBox, type ViewProps, layOutTiers, measureGap } from './layout.ts';
 import { PipedWords } from './piped-words.tsx';
 import { TierCoat } from './tier-coat.tsx';
 
 /** A tiered cake from the side, to scale, on its board. */
 export function TieredView({ cake, look, menu, room, show, hatch }: ViewProps) {
   const { tiers, board, scale } = layOutTiers(cake, menu, room);
-  if (show === 'measures') {
-    return <Measures menu={menu} tiers={tiers} floor={board.y} boardEnd={board.x + board.width} />;
-  }
   const perTier = decorationsPerTier(look, menu, cake.tiers.length);
+  if (show === 'measures') {
+    return (
+      <Measures
+        menu={menu}
+        tiers={tiers}
+        floor={board.y}
+        boardEnd={board.x + board.width}
+        reach={reachAbove(perTier.at(-1) ?? [], scale)}
+      />
+    );
+  }
   return (
     <g>
       <rect
@@ -58,9 +66,10 @@ type MeasuresProps = {
   readonly tiers: readonly TierBox[];
   readonly floor: number;
   readonly boardEnd: number;
+  readonly reach: number;
 };
 
-function Measures({ menu, tiers, floor, boardEnd }: MeasuresProps) {
+function Measures({ menu, tiers, floor, boardEnd, reach }: MeasuresProps) {
   const lowest = tiers[0];
   const highest = tiers.at(-1);
   if (lowest === undefined || highest === undefined) return null;
@@ -75,7 +84,7 @@ function Measures({ menu, tiers, floor, boardEnd }: MeasuresProps) {
         <Dimension
           from={highest.x}
           to={highest.x + highest.width}
-          at={highest.y - 26}
+          at={highest.y - measureGap - reach}
           text={`${lengthFigure(highest.tier.widthMm, lead)} ${lead}`}
           side="before"
         />
