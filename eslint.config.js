@@ -75,6 +75,11 @@ export default defineConfig(
     rules: { 'no-console': 'error' },
   },
   {
+    // The page has no other log to tell a fault to.
+    files: ['apps/web/src/app/**'],
+    rules: { 'no-console': ['error', { allow: ['error'] }] },
+  },
+  {
     files: ['apps/api/**/*.ts'],
     ignores: ['apps/api/src/db/transaction.ts'],
     rules: { 'no-restricted-syntax': ['error', defaultExport, transaction] },
@@ -84,7 +89,14 @@ export default defineConfig(
     extends: [reactHooks.configs.flat['recommended-latest'], jsxA11y.flatConfigs.recommended],
   },
   {
-    files: ['eslint.config.js', 'vite.config.ts', 'e2e/playwright.config.ts', 'e2e/tools/*.mjs'],
+    // Tools want a default export, and so do the packages whose types we describe.
+    files: [
+      'eslint.config.js',
+      'vite.config.ts',
+      'e2e/playwright.config.ts',
+      'e2e/tools/*.mjs',
+      '**/*.d.ts',
+    ],
     rules: { 'no-restricted-syntax': 'off' },
   },
 );
