@@ -20,10 +20,18 @@ export function forgetActor(request: Request): void {
   known.delete(request);
 }
 
-async function findActor(request: Request): Promise<Actor> {
-  const { userId, secondFactor, orderIds = [] } = request.session;
+/** The account a request is signed in to, before any second factor; null for visitors. */
+export async function accountOf(request: Request): Promise<User | null> {
+  const { userId } = request.session;
   const user = userId === undefined ? null : await User.findByPk(userId);
-  if (user === null || user.email === null || user.endedAt !== null || user.erasedAt !== null) {
+  const stands = user !== null && user.endedAt === null && user.erasedAt === null;
+  return stands ? user : null;
+}
+
+async function findActor(request: Request): Promise<Actor> {
+  const { secondFactor, orderIds = [] } = request.session;
+  const user = await accountOf(request);
+  if (user === null || user.email === null) {
     return orderIds.length === 0 ? { kind: 'visitor' } : { kind: 'guest', orderIds };
   }
   const { id, name, email, role } = user;

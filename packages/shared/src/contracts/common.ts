@@ -23,7 +23,13 @@ export const line = (max: number, message = `At most ${max} characters, please.`
 
 /** One line that must not be empty. */
 export const requiredLine = (max: number, missing: string) =>
-  z.string().check(z.trim(), z.minLength(1, missing), z.maxLength(max, `At most ${max} characters, please.`));
+  z
+    .string()
+    .check(
+      z.trim(),
+      z.minLength(1, missing),
+      z.maxLength(max, `At most ${max} characters, please.`),
+    );
 
 /** Longer text, line breaks kept. */
 export const prose = (max: number) =>
@@ -48,6 +54,7 @@ export const rowVersion = z.int().check(z.minimum(0));
 
 /** What a command answers when there is nothing to show. */
 export const done = z.object({ done: z.literal(true) });
+export const itIsDone: z.infer<typeof done> = { done: true };
 
 /** RFC 9457 problem details with every issue's path. */
 export const problem = z.object({
