@@ -1,14 +1,14 @@
 import sqlite3 from 'sqlite3';
 import { Sequelize, Transaction } from 'sequelize';
+import { keepWriter } from './kept-writer.ts';
 import { isInTransaction, StrayWriteError, transactionNamespace } from './transaction.ts';
 
 /** How long a statement waits for another process to finish its write, milliseconds. */
 const busyTimeout = 5000;
 
 /**
- * A connection as we want every one to be. Sequelize opens one for reading and another for each
- * transaction. Statements run one after the other, so that waiting ones do not hold libuv's
- * threads.
+ * A connection as we want every one to be; there is one for reading and one for writing.
+ * Statements run one after the other, so that waiting ones do not hold libuv's threads.
  */
 class TunedDatabase extends sqlite3.Database {
   constructor(file: string, mode: number, opened: (error: Error | null) => void) {
@@ -57,6 +57,7 @@ export async function connect(file: string): Promise<Sequelize> {
     typeValidation: true,
     define: { underscored: true, timestamps: false, freezeTableName: true },
   });
+  keepWriter(sequelize);
   sequelize.addHook('beforeQuery', (options) => {
     const strays = options.transaction ? !isInTransaction() : writes.has(options.type);
     if (strays) throw new StrayWriteError();
