@@ -89,16 +89,6 @@ CREATE TABLE sessions (
 CREATE INDEX sessions_user_id ON sessions (user_id) WHERE user_id IS NOT NULL;
 CREATE INDEX sessions_expires ON sessions (expires);
 
-CREATE TABLE order_access (
-  id TEXT NOT NULL PRIMARY KEY,
-  order_id TEXT NOT NULL REFERENCES orders (id),
-  hash TEXT NOT NULL UNIQUE,
-  created_at TEXT NOT NULL CHECK (created_at GLOB '????-??-?? ??:??:??.??? +00:00'),
-  expires_at TEXT NOT NULL CHECK (expires_at GLOB '????-??-?? ??:??:??.??? +00:00'),
-  revoked_at TEXT CHECK (revoked_at GLOB '????-??-?? ??:??:??.??? +00:00')
-) STRICT;
-CREATE INDEX order_access_order_id ON order_access (order_id);
-
 CREATE TABLE consents (
   id TEXT NOT NULL PRIMARY KEY,
   order_id TEXT REFERENCES orders (id),

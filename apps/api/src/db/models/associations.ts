@@ -31,7 +31,6 @@ import { MailAttempt } from './mail-attempt.ts';
 import { Message } from './message.ts';
 import { Occasion } from './occasion.ts';
 import { Order } from './order.ts';
-import { OrderAccess } from './order-access.ts';
 import { OrderContact } from './order-contact.ts';
 import { OrderEvent } from './order-event.ts';
 import { OrderItem } from './order-item.ts';
@@ -115,7 +114,6 @@ export function associateModels(): void {
   Identity.belongsTo(User, { as: 'user', foreignKey: 'userId', ...bare });
   Token.belongsTo(User, { as: 'user', foreignKey: 'userId', ...bare });
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId', ...bare });
-  OrderAccess.belongsTo(Order, { as: 'order', foreignKey: 'orderId', ...bare });
   DecorationIngredient.belongsTo(Ingredient, {
     as: 'ingredient',
     foreignKey: 'ingredientId',

@@ -45,7 +45,6 @@ import { initMessage } from './message.ts';
 import { initNoticeRule } from './notice-rule.ts';
 import { initOccasion } from './occasion.ts';
 import { initOrder } from './order.ts';
-import { initOrderAccess } from './order-access.ts';
 import { initOrderContact } from './order-contact.ts';
 import { initOrderEvent } from './order-event.ts';
 import { initOrderItem } from './order-item.ts';
@@ -133,7 +132,6 @@ const initialisers = [
   initNoticeRule,
   initOccasion,
   initOrder,
-  initOrderAccess,
   initOrderContact,
   initOrderEvent,
   initOrderItem,
