@@ -3,6 +3,7 @@ import type { DesignPatch } from '#shared/contracts/estimates.ts';
 import type { Menu, SheetSize } from '#shared/contracts/menu.ts';
 import { smallestStepMm } from '#shared/kitchen/sizes.ts';
 import type { OrderForm } from '../draft/empty-order.ts';
+import type { Inside } from './first-inside.ts';
 
 /** The parts of the form that change together: words and decorations follow their tier. */
 export type CakeAndLook = { readonly cake: Cake; readonly look: Look };
@@ -107,9 +108,6 @@ export function nextTier(cake: Cake, menu: Menu, inside: Inside): Tier | null {
     coating: null,
   };
 }
-
-/** A sponge and a filling to begin with. */
-export type Inside = { readonly spongeId: string | null; readonly fillingId: string | null };
 
 export function addTier(from: CakeAndLook, tier: Tier): CakeAndLook {
   return { ...from, cake: { ...from.cake, kind: 'tiered', tiers: [...from.cake.tiers, tier] } };

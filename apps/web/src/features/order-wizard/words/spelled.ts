@@ -18,13 +18,8 @@ const names: Readonly<Record<string, string>> = {
 const segmenter = new Intl.Segmenter(undefined, { granularity: 'grapheme' });
 
 /** The signs of a text as people count them: an emoji or an accented letter is one. */
-export function signsOf(text: string): string[] {
+function signsOf(text: string): string[] {
   return [...segmenter.segment(text)].map((part) => part.segment);
-}
-
-/** How many signs a text has. */
-export function countSigns(text: string): number {
-  return signsOf(text).length;
 }
 
 /** Spells words back, sign by sign, the way one would over the telephone. */

@@ -1,0 +1,19 @@
+import { useWizard } from '../../wizard/wizard-context.ts';
+import { StepPage } from '../frame/step-page.tsx';
+import { FeedsMeter } from './feeds-meter.tsx';
+import { KindChoice } from './kind-choice.tsx';
+import { SheetFields } from './sheet-fields.tsx';
+import { TierList } from './tier-list.tsx';
+
+/** What is baked: a proposed stack, a sheet, or the customer's own; then what is inside. */
+export function CakeStep() {
+  const { values } = useWizard();
+  const { cake } = values;
+  return (
+    <StepPage step="cake">
+      <KindChoice />
+      <FeedsMeter />
+      {cake.kind === 'sheet' ? <SheetFields /> : <TierList />}
+    </StepPage>
+  );
+}

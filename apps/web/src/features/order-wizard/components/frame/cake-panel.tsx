@@ -1,0 +1,25 @@
+import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
+import { Failure } from '#web/components/ui/failure.tsx';
+import { Pending } from '#web/components/ui/pending.tsx';
+import { useWizard } from '../../wizard/wizard-context.ts';
+import { AdviceList } from './advice-list.tsx';
+import { EstimateLines } from './estimate-lines.tsx';
+
+/** The drawing to scale, the running estimate under it, then the advice. */
+export function CakePanel({ onLeave }: { readonly onLeave?: () => void }) {
+  const { menu, design, running } = useWizard();
+  const { estimate, failed, retry } = running;
+  return (
+    <div className="grid gap-4">
+      <CakeDrawing cake={design?.cake ?? null} look={design?.look ?? null} menu={menu} />
+      {failed && estimate === null && <Failure error={new Error('rules')} onRetry={retry} />}
+      {!failed && estimate === null && design !== null && <Pending what="Working it out…" />}
+      {estimate !== null && (
+        <>
+          <EstimateLines estimate={estimate} locale={menu.studio.locale} />
+          <AdviceList advice={estimate.advice} keepCool={estimate.keepCool} onLeave={onLeave} />
+        </>
+      )}
+    </div>
+  );
+}

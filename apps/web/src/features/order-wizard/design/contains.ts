@@ -1,0 +1,56 @@
+import type { Declaration } from '#shared/contracts/design.ts';
+import type { Contents } from '#shared/contracts/menu.ts';
+import type { DietId, LabelRegion } from '#shared/contracts/vocabulary.ts';
+import { allergenLabel, allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
+import { clashesWith, dietClashes, isListed } from '#shared/kitchen/clashes.ts';
+import { formatList } from '#shared/dates/format.ts';
+
+/** "contains milk and egg", with what a maker warns of or does not say; never that it is without. */
+export function containsLine(contents: Contents, region: LabelRegion): string {
+  const named = (state: 'contains' | 'may-contain' | 'unknown') =>
+    contents.allergens.filter((it) => it.state === state).map((it) => allergenLabel(it, region));
+  const parts = [
+    ['contains', named('contains')],
+    ['may contain', named('may-contain')],
+    ['label unclear about', named('unknown')],
+  ] as const;
+  const known = parts
+    .filter(([, names]) => names.length > 0)
+    .map(([verb, names]) => `${verb} ${formatList(names)}`);
+  if (contents.alcohol) known.push('made with alcohol');
+  if (contents.gelatine) known.push('made with gelatine');
+  return known.length === 0 ? 'no listed allergen on its labels' : known.join('; ');
+}
+
+/** A declaration in a few words: "egg", "hazelnut", or what was written. */
+export function declaredName(declaration: Declaration, region: LabelRegion): string {
+  if (declaration.allergen === null) return declaration.text.trim();
+  return declaration.species === null
+    ? allergenName(declaration.allergen, region)
+    : speciesName(declaration.species);
+}
+
+/** What of the guests' allergies and diets a part goes against; empty where nothing is known to. */
+export function clashesOf(
+  contents: Contents,
+  allergies: readonly Declaration[],
+  diets: readonly DietId[],
+  region: LabelRegion,
+): readonly string[] {
+  return [
+    ...allergies
+      .filter((it) => isListed(it) && clashesWith(contents, it))
+      .map((it) => `your guest’s ${declaredName(it, region)}`),
+    ...diets.filter((it) => dietClashes(contents, it).length > 0).map((it) => dietWords[it]),
+  ];
+}
+
+/** The diets as they are read. */
+export const dietWords: Readonly<Record<DietId, string>> = {
+  vegetarian: 'vegetarian',
+  vegan: 'vegan',
+  halal: 'halal',
+  kosher: 'kosher',
+  'no-alcohol': 'no alcohol',
+  'no-gelatine': 'no gelatine',
+};
