@@ -1,5 +1,10 @@
 import * as z from 'zod/mini';
-import { Strategy, type Profile, type VerifyCallback } from 'passport-google-oauth20';
+import {
+  Strategy,
+  type Profile,
+  type StrategyOptions,
+  type VerifyCallback,
+} from 'passport-google-oauth20';
 
 export type GoogleSettings = {
   readonly clientId: string;
@@ -18,12 +23,27 @@ export type GoogleProfile = {
   readonly name: string;
 };
 
+/** Shows the access token in a header, not in the address, which servers write down (RFC 6750). */
+class GoogleStrategy extends Strategy {
+  constructor(options: StrategyOptions, verify: Verify) {
+    super(options, verify);
+    this._oauth2.useAuthorizationHeaderforGET(true);
+  }
+}
+
+type Verify = (
+  accessToken: string,
+  refreshToken: string,
+  profile: Profile,
+  done: VerifyCallback,
+) => void;
+
 /**
  * Google's sign-in, with state and PKCE kept in the session between the two requests. Its answer
  * is the profile alone: no token of Google's is kept.
  */
 export function createGoogleStrategy(settings: GoogleSettings, callbackUrl: string): Strategy {
-  return new Strategy(
+  return new GoogleStrategy(
     {
       clientID: settings.clientId,
       clientSecret: settings.clientSecret,
@@ -35,7 +55,7 @@ export function createGoogleStrategy(settings: GoogleSettings, callbackUrl: stri
       state: true,
       pkce: true,
     },
-    (_accessToken: string, _refreshToken: string, profile: Profile, done: VerifyCallback) => {
+    (_accessToken, _refreshToken, profile, done) => {
       done(null, profileOf(profile));
     },
   );

@@ -48,7 +48,8 @@ export function createApp(deps: Deps): App {
         }),
         res: (response: { statusCode: number }) => ({ status: response.statusCode }),
       },
-      customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'error' : 'info'),
+      // The error itself was logged where it was caught.
+      customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'warn' : 'info'),
     }),
   );
   app.use(securityHeaders({ secure: env.secureCookies }));

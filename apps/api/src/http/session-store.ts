@@ -41,7 +41,9 @@ export function sessionRowId(sid: string): string {
   return createHash('sha256').update(sid).digest('base64url');
 }
 
-const storedData = z.looseObject({ cookie: z.looseObject({}) });
+const storedData = z.looseObject({
+  cookie: z.looseObject({ expires: z.nullish(z.string()), originalMaxAge: z.nullish(z.number()) }),
+});
 
 type Done<T = void> = (error: unknown, result?: T) => void;
 
@@ -140,8 +142,11 @@ export class SessionStore extends session.Store {
 function readData(text: string, seenAt: number): SessionData | null {
   const parsed = z.safeParse(storedData, JSON.parse(text));
   if (!parsed.success) return null;
-  const { cookie, ...rest } = parsed.data;
-  return { ...rest, seenAt, cookie: Object.assign(new session.Cookie(), cookie) };
+  const { cookie: kept, ...rest } = parsed.data;
+  const cookie = Object.assign(new session.Cookie(), kept, {
+    expires: kept.expires == null ? null : new Date(kept.expires),
+  });
+  return { ...rest, seenAt, cookie };
 }
 
 function earlier(one: Date, other: Date): Date {

@@ -3,7 +3,7 @@ import { createServer } from 'node:http';
 import { createApp, type App } from '#api/http/app.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { readEnv, type Env } from '#api/platform/env.ts';
-import type { Logger } from '#api/platform/logger.ts';
+import { createLogger, type Logger } from '#api/platform/logger.ts';
 import { openTestDatabase, type TestDatabaseOptions } from './fresh-database.ts';
 import type { TestClock } from './test-clock.ts';
 import { TestClient } from './test-client.ts';
@@ -22,6 +22,7 @@ export type TestApp = {
 export type TestAppOptions = TestDatabaseOptions & {
   /** More of the environment, such as where the stand-in for Google is, by the app's address. */
   readonly env?: (url: string) => Promise<Record<string, string>> | Record<string, string>;
+  /** Errors are shown unless a test expects them. */
   readonly logger?: Logger;
 };
 
@@ -46,7 +47,7 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
     'test',
   );
   const { database, clock } = opened;
-  const deps: Deps = { database, clock, env, logger: options.logger ?? opened.logger };
+  const deps: Deps = { database, clock, env, logger: options.logger ?? createLogger('error') };
   const app = createApp(deps);
   server.on('request', app.handler);
   return {
