@@ -1,6 +1,6 @@
 import type { Declaration } from '#shared/contracts/design.ts';
 import type { Advice } from '#shared/contracts/estimates.ts';
-import { severities, type Severity } from '#shared/contracts/vocabulary.ts';
+import { severities, type LabelRegion, type Severity } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { allergenName, speciesName } from './allergen-names.ts';
 import {
@@ -106,7 +106,7 @@ function containedAdvice(parts: readonly string[], shared: Shared): Advice {
     level: 'stop',
     step: stepOf(shared),
     about: aboutOf('allergen', declared),
-    sentence: `${capitalise(nameOf(shared))} is in ${formatList(parts)}; ${whose(declared)}.`,
+    sentence: `${capitalise(nameOf(shared))} is in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
     instead: [wayWords(shared), answerWords[answer]].filter((it) => it !== '').join(' '),
     ways,
     talk: answer !== 'refuse',
@@ -120,7 +120,7 @@ function unknownAdvice(parts: readonly string[], shared: Shared): Advice {
     level: 'stop',
     step: stepOf(shared),
     about: aboutOf('allergen-unknown', declared),
-    sentence: `We do not know yet whether ${nameOf(shared)} is in ${formatList(parts)}; ${whose(declared)}.`,
+    sentence: `We do not know yet whether ${nameOf(shared)} is in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
     instead: `We have to read the label first. ${wayWords(shared)}`.trim(),
     ways,
     talk: true,
@@ -135,7 +135,7 @@ function warnedAdvice(parts: readonly string[], shared: Shared): Advice {
     level,
     step: stepOf(shared),
     about: aboutOf('may-contain', declared),
-    sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(declared)}.`,
+    sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
     instead: wayWords(shared),
     ways,
     talk: level === 'stop',
@@ -174,7 +174,7 @@ function kitchenAdvice(shared: Shared): Advice {
     level: grave ? 'stop' : 'care',
     step: 'day',
     about: aboutOf('kitchen', declared),
-    sentence: `We handle ${nameOf(shared)} in this kitchen, so a trace of it can get into any cake we make; ${whose(declared)}.`,
+    sentence: `We handle ${nameOf(shared)} in this kitchen, so traces can get into any cake we make; ${whose(declared, regionOf(shared))}.`,
     instead: grave
       ? 'We talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
       : 'Tell your guest, and let them decide.',
@@ -191,10 +191,14 @@ const stepOf = ({ situation }: Shared): Advice['step'] =>
     ? 'look'
     : 'cake';
 
-const nameOf = ({ declared, situation }: Shared): string =>
-  declared.species === null
-    ? allergenName(declared.allergen, situation.resolved.menu.studio.labelRegion)
+const regionOf = ({ situation }: Shared): LabelRegion => situation.resolved.menu.studio.labelRegion;
+
+const nameOf = (shared: Shared): string => {
+  const { declared } = shared;
+  return declared.species === null
+    ? allergenName(declared.allergen, regionOf(shared))
     : speciesName(declared.species);
+};
 
 const reactions: Record<Severity, { readonly one: string; readonly many: string }> = {
   avoids: { one: 'one guest avoids it', many: 'guests avoid it' },
@@ -207,9 +211,10 @@ const reactions: Record<Severity, { readonly one: string; readonly many: string 
   },
 };
 
-function whose({ guests, severity }: ListedDeclaration): string {
+function whose({ guests, severity }: ListedDeclaration, region: LabelRegion): string {
   const { one, many } = reactions[severity];
-  return guests === 1 ? one : `${guests} ${many}`;
+  const words = guests === 1 ? one : `${guests} ${many}`;
+  return region === 'US' ? words.replace('coeliac', 'celiac') : words;
 }
 
 function wayWords({ ways, situation, declared }: Shared): string {

@@ -47,7 +47,7 @@ const usNine: readonly AllergenId[] = [
 type Region = LabelRegion;
 
 const names: Record<AllergenId, { readonly us: string; readonly eu: string }> = {
-  'gluten-cereals': { us: 'wheat', eu: 'gluten cereals' },
+  'gluten-cereals': { us: 'wheat (gluten cereals)', eu: 'gluten cereals' },
   crustaceans: { us: 'crustacean shellfish', eu: 'crustaceans' },
   egg: { us: 'egg', eu: 'egg' },
   fish: { us: 'fish', eu: 'fish' },

@@ -25,6 +25,9 @@ export function coldHoldingC(region: LabelRegion): number {
   return region === 'UK' ? 8 : 5;
 }
 
+/** A large tier takes one to three hours to soften (memory); the shorter one fits the limit. */
+const softeningMinutes = 60;
+
 /** "Keep it in the fridge until ...": what goes on the care card and under the setting. */
 export function keepCoolText(
   setting: Setting | null,
@@ -41,5 +44,7 @@ export function keepCoolText(
   const before = Math.min(left, setting.minutesOut);
   const until =
     before === 0 ? 'until you cut it' : `until ${formatDuration(before)} before you cut it`;
-  return `${fridge}, ${until}. It may be out for ${formatDuration(allowed)} in all, the drive included.`;
+  const tip =
+    before >= softeningMinutes ? ' A large tier eats best after about an hour in the room.' : '';
+  return `${fridge}, ${until}. It may be out for ${formatDuration(allowed)} in all, the drive included.${tip}`;
 }

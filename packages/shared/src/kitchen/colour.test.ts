@@ -1,0 +1,69 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { colourDifference, colourPicks, nearerBases, paletteFor, reachableTint } from './colour.ts';
+import { styles } from './testing/menu-parts-fixture.ts';
+import { sharmaPairs } from './testing/sharma-pairs.ts';
+
+const styleColour = (id: string) => styles.find((it) => it.id === id)?.colour ?? '';
+const bases = styles.map(({ id, name, colour }) => ({ id, name, colour }));
+
+describe('the difference of two colours', () => {
+  // Sharma, Wu, Dalal 2005, table 1; printed to four decimals.
+  it.each(sharmaPairs.map((pair, index) => [index + 1, ...pair] as const))(
+    'agrees with the published pair %i',
+    (_, [l1, a1, b1], [l2, a2, b2], difference) => {
+      const one = { mode: 'lab65' as const, l: l1, a: a1, b: b1 };
+      const two = { mode: 'lab65' as const, l: l2, a: a2, b: b2 };
+      expect(colourDifference(one, two)).toBeCloseTo(difference, 4);
+      expect(colourDifference(two, one)).toBeCloseTo(difference, 4);
+    },
+  );
+
+  it('has all 34 pairs', () => {
+    expect(sharmaPairs).toHaveLength(34);
+  });
+
+  it('refuses what is not a colour', () => {
+    expect(() => colourDifference('#ffffff', 'teal-ish')).toThrow(RangeError);
+  });
+});
+
+describe('a wanted colour on a base', () => {
+  it('does not come as a clean pale blue on bright yellow, and says where it does', () => {
+    const paleBlue = '#bcd7ea';
+    const french = styleColour('french');
+    expect(reachableTint(paleBlue, french).reach).toBe('not-on-this-base');
+    const nearer = nearerBases(paleBlue, french, bases);
+    expect(nearer.map((it) => it.id)).toEqual(expect.arrayContaining(['italian', 'russian']));
+    expect(nearer[0]?.tint.reach).toBe('close');
+  });
+
+  it('comes close on any base where it is deep', () => {
+    for (const { colour } of bases) {
+      expect(reachableTint('#2d4372', colour).reach).toBe('close');
+    }
+  });
+
+  it('never comes lighter than the base in any channel', () => {
+    const hex = fc
+      .integer({ min: 0, max: 0xffffff })
+      .map((it) => `#${it.toString(16).padStart(6, '0')}`);
+    fc.assert(
+      fc.property(hex, fc.constantFrom(...bases), (wanted, base) => {
+        const { reached } = reachableTint(wanted, base.colour);
+        for (const at of [1, 3, 5]) {
+          const channel = (it: string) => Number.parseInt(it.slice(at, at + 2), 16);
+          expect(channel(reached)).toBeLessThanOrEqual(channel(base.colour));
+          expect(channel(reached)).toBeLessThanOrEqual(channel(wanted));
+        }
+      }),
+    );
+  });
+
+  it('offers only picks that keep their name on the base', () => {
+    const onFrench = paletteFor(styleColour('french')).map((it) => it.name);
+    expect(onFrench).not.toContain('Morning sky');
+    expect(onFrench).toContain('Fir');
+    expect(paletteFor('#ffffff')).toHaveLength(colourPicks.length);
+  });
+});
