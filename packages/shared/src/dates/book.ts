@@ -82,8 +82,8 @@ export class Book {
     for (const order of standing) this.put(order);
   }
 
-  get standing(): readonly PlannedOrder[] {
-    return [...this.orders.values()];
+  standingOf(orderId: string): PlannedOrder | null {
+    return this.orders.get(orderId) ?? null;
   }
 
   /** Gives the order its place; work in shifts that are not in the supply takes nothing. */
@@ -180,7 +180,7 @@ export class Book {
     while (date > this.supply.today) {
       const night = addDays(date, -1);
       const there = standing.filter(
-        (it) => it.coldFrom !== null && it.coldFrom <= night && it.pickup.date > night,
+        (it) => it.coldFrom !== null && it.coldFrom <= night && it.coldUntil > night,
       );
       if (!fitsTheCold(cold, [...there.flatMap((it) => it.demand.boxes), ...boxes])) break;
       date = night;

@@ -320,12 +320,15 @@ function checkCold(
   if (first !== undefined && (order.coldFrom === null || order.coldFrom > first)) {
     return [fault('cold', 'The cake is filled before it has its place in the cold.')];
   }
+  if (order.coldUntil < order.pickup.date) {
+    return [fault('cold', 'The cake leaves the cold before its pickup.')];
+  }
   if (supply.cold === null || order.coldFrom === null) return [];
   const { cold } = supply;
   const from = order.coldFrom < supply.today ? supply.today : order.coldFrom;
   return datesInRange(from, addDays(order.pickup.date, -1)).flatMap((night) => {
     const boxes = [order, ...others]
-      .filter((it) => it.coldFrom !== null && it.coldFrom <= night && night < it.pickup.date)
+      .filter((it) => it.coldFrom !== null && it.coldFrom <= night && night < it.coldUntil)
       .flatMap((it) => it.demand.boxes);
     return haveRoom(cold, boxes)
       ? []

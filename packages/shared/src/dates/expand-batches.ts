@@ -1,6 +1,7 @@
 import type { ButtercreamStyle } from '#shared/contracts/menu.ts';
 import type { TaskKind } from '#shared/contracts/vocabulary.ts';
-import { batchMinutes, groupBy, sum, type Expansion, type Layer } from './expansion.ts';
+import { groupBy } from '#shared/group-by.ts';
+import { batchMinutes, sum, type Expansion, type Layer } from './expansion.ts';
 import type { BatchSource, Work } from './model.ts';
 
 /** Keys of the batches, by the id of the part they are for. */
@@ -49,6 +50,7 @@ export function bakeSponges(plan: Expansion, layers: readonly Layer[]): Batches 
   const { bowlG, deckMm2, decks } = plan.equipment;
   const keys = new Map<string, string[]>();
   for (const [sponge, of] of groupBy(layers, (it) => it.tier.sponge)) {
+    if (sponge === null) continue;
     const grams = Math.max(1, sum(of.map((it) => it.batterG)));
     // Two layers bake in one tin and are split, so a tier needs a tin for every two of them.
     const tinsMm2 = sum(
@@ -84,6 +86,7 @@ export function bakeSponges(plan: Expansion, layers: readonly Layer[]): Batches 
 export function makeFillings(plan: Expansion, layers: readonly Layer[]): Batches {
   const keys = new Map<string, string[]>();
   for (const [filling, of] of groupBy(layers, (it) => (it.fillingG > 0 ? it.tier.filling : null))) {
+    if (filling === null) continue;
     const grams = sum(of.map((it) => it.fillingG));
     keys.set(
       filling.id,
@@ -113,6 +116,7 @@ export type Frostings = {
 export function mixFrostings(plan: Expansion, layers: readonly Layer[]): Frostings {
   const byStyle = new Map<string, string[]>();
   for (const [style, of] of groupBy(layers, (it) => it.tier.coating?.style ?? null)) {
+    if (style === null) continue;
     byStyle.set(style.id, mixStyle(plan, style, Math.max(1, sum(of.map((it) => it.frostingG)))));
   }
   const underGanache = layers.filter((it) => it.tier.coating?.covering.id === 'ganache');

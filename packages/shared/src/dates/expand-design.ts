@@ -22,7 +22,7 @@ const boardMarginMm = 40;
 const headroomMm = 20;
 
 /** Severities for which work is kept apart from what the guest must not have. */
-const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylaxis'];
+export const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylaxis'];
 
 /**
  * Expands a chosen cake into tasks, batches and the gaps between them, in whole minutes by the
@@ -92,7 +92,8 @@ function tierName({ index }: ResolvedTier, { design, tiers }: ResolvedDesign): s
   return index === tiers.length - 1 ? 'the top tier' : `tier ${index + 1}`;
 }
 
-function boxOf(block: Block): Box {
+/** What a tier takes of the fridge, on its board. */
+export function boxOf(block: Pick<Block, 'widthMm' | 'depthMm' | 'heightMm'>): Box {
   return {
     widthMm: block.widthMm + 2 * boardMarginMm,
     depthMm: block.depthMm + 2 * boardMarginMm,

@@ -116,18 +116,5 @@ export function coatedMm2(block: Block): number {
   return Math.round(areaMm2(block) + perimeterMm(block) * block.heightMm);
 }
 
-/** Layers by what they have in common. */
-export function groupBy<T>(
-  layers: readonly Layer[],
-  partOf: (layer: Layer) => T | null,
-): Map<T, Layer[]> {
-  const groups = new Map<T, Layer[]>();
-  for (const layer of layers) {
-    const part = partOf(layer);
-    if (part !== null) groups.set(part, [...(groups.get(part) ?? []), layer]);
-  }
-  return groups;
-}
-
 export const sum = (numbers: readonly number[]): number =>
   numbers.reduce((total, it) => total + it, 0);

@@ -152,6 +152,8 @@ export type PlannedOrder = {
   readonly places: readonly Place[];
   /** The first night it stands in the cold; null before its fill has a day. */
   readonly coldFrom: LocalDate | null;
+  /** The first night it is gone again: its pickup day, or later while nobody has collected it. */
+  readonly coldUntil: LocalDate;
 };
 
 /** Why a day or a window cannot be had, as the planner says it. */

@@ -44,7 +44,10 @@ export function placeWork(
   for (const [work, place] of progress.done.toReversed()) book.takeBackWork(demand, work, place);
   if (stuck !== undefined) return { found: false, refusal: { kind: 'no-place', work: stuck.work } };
   const places = progress.done.map(([, place]) => place);
-  return { found: true, order: { orderId, demand, pickup, places, coldFrom: progress.coldFrom } };
+  return {
+    found: true,
+    order: { orderId, demand, pickup, places, coldFrom: progress.coldFrom, coldUntil: pickup.date },
+  };
 }
 
 function placePiece(

@@ -1,0 +1,102 @@
+import { addDays, today } from '#shared/dates/local-time.ts';
+import type { LocalDate, UtcMinute } from '#shared/dates/local-time.ts';
+import { openBook } from '#shared/dates/answer-dates.ts';
+import type { DateAnswers, OpenBook } from '#shared/dates/answer-dates.ts';
+import { currentClock, currentDatabase } from '#api/db/current-database.ts';
+import type { Database } from '#api/db/database.ts';
+import { Studio } from '#api/db/models/studio.ts';
+import { readPlanVersions } from '#api/db/plan-versions.ts';
+import type { PlanVersions } from '#api/db/plan-versions.ts';
+import { loadStanding } from './load-standing.ts';
+import { loadSupply } from './load-supply.ts';
+import { loadPlanSettings } from './plan-settings.ts';
+import type { PlanSettings } from './plan-settings.ts';
+
+/** The order book as it stood at one version of the plan, ready to be asked. */
+export type KeptBook = {
+  readonly versions: PlanVersions;
+  readonly open: OpenBook;
+  readonly settings: PlanSettings;
+  readonly until: LocalDate;
+  /** Answers already given from this book, by what was asked. */
+  readonly answers: Map<string, DateAnswers>;
+};
+
+type Kept = { readonly database: Database; readonly mark: UtcMinute; readonly book: KeptBook };
+
+/**
+ * Planning looks from the next mark of ten minutes on, so that a book is good until then: it may
+ * offer a few minutes too few of the running shift, never one that is gone.
+ */
+const markMinutes = 10;
+
+/** How far a book looks at least, and in what steps further. */
+const stepDays = 130;
+
+let kept: Kept | null = null;
+let opening: Promise<KeptBook> | null = null;
+let openingFor = '';
+
+/** The first minute work may still be put into. */
+export function planningNow(now: Date): UtcMinute {
+  return Math.ceil(now.getTime() / 60_000 / markMinutes) * markMinutes;
+}
+
+/**
+ * The book as it is now, up to a day at least; kept until plan, hours or menu change or its ten
+ * minutes are over. Many who ask at once wait for the same one.
+ */
+export async function currentBook(until: LocalDate): Promise<KeptBook> {
+  const versions = await readPlanVersions();
+  const mark = planningNow(currentClock().now());
+  if (kept !== null && isGood(kept, versions, mark, until)) return kept.book;
+  const wanted = `${versions.planVersion} ${versions.settingsVersion} ${mark} ${until}`;
+  if (opening === null || openingFor !== wanted) {
+    openingFor = wanted;
+    const mine = openAt(mark, until).finally(() => {
+      if (opening === mine) opening = null;
+    });
+    opening = mine;
+  }
+  return opening;
+}
+
+function isGood(it: Kept, versions: PlanVersions, mark: UtcMinute, until: LocalDate): boolean {
+  return (
+    it.database === currentDatabase() &&
+    it.mark === mark &&
+    it.book.until >= until &&
+    it.book.versions.planVersion === versions.planVersion &&
+    it.book.versions.settingsVersion === versions.settingsVersion &&
+    it.book.versions.catalogueVersion === versions.catalogueVersion
+  );
+}
+
+/** Reads everything at one version: what changes while it is read is read again. */
+async function openAt(mark: UtcMinute, wanted: LocalDate): Promise<KeptBook> {
+  const database = currentDatabase();
+  const { zone } = await Studio.findByPk(1, { rejectOnEmpty: true });
+  let until = addDays(today(new Date(mark * 60_000), zone), stepDays);
+  while (until < wanted) until = addDays(until, stepDays);
+  for (;;) {
+    const versions = await readPlanVersions();
+    const [supply, settings] = await Promise.all([loadSupply(mark, until), loadPlanSettings()]);
+    const standing = await loadStanding(supply);
+    const after = await readPlanVersions();
+    if (
+      after.planVersion !== versions.planVersion ||
+      after.settingsVersion !== versions.settingsVersion
+    ) {
+      continue;
+    }
+    const book = {
+      versions,
+      open: openBook(supply, standing),
+      settings,
+      until,
+      answers: new Map(),
+    };
+    kept = { database, mark, book };
+    return book;
+  }
+}
