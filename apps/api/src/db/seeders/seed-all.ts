@@ -2,6 +2,7 @@ import { today } from '#shared/dates/local-time.ts';
 import type { Database } from '#api/db/database.ts';
 import type { Clock } from '#api/platform/clock.ts';
 import { studio } from './catalogue/studio.ts';
+import { seedPlan } from './plan.ts';
 import { runOnce } from './run-once.ts';
 import { seedCatalogue } from './seed-catalogue.ts';
 import { seedPantry } from './seed-pantry.ts';
@@ -25,4 +26,5 @@ export async function seedAll(_database: Database, options: SeedOptions): Promis
   await runOnce('studio', () =>
     seedStudio({ now, today: day, requireSecondFactor: !options.demo }),
   );
+  await runOnce('plan', () => seedPlan({ now, today: day }));
 }

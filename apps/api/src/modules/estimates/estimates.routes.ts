@@ -3,7 +3,7 @@ import { createRoutes } from '#api/http/route.ts';
 import type { FeatureRoutes } from '#api/http/route.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { preparedMenu } from '#api/modules/menu/menu.queries.ts';
-import { estimateDesign } from './estimate-design.ts';
+import { estimateDesign } from './estimate-design.queries.ts';
 
 /** Estimates bind nobody and are the same for everybody. */
 export function estimatesRoutes({ clock }: Deps): FeatureRoutes {

@@ -1,0 +1,34 @@
+import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
+import { isLive } from '#shared/orders/transitions.ts';
+import { holdsOrder } from '#api/platform/actor.ts';
+import type { Actor } from '#api/platform/actor.ts';
+import { canMove } from './change-order-status.command.ts';
+
+/** What the people an order belongs to may do with it; staff have routes of their own. */
+export type OrderAction = 'see' | 'withdraw' | 'write' | 'add-photos' | 'see-calendar-file';
+
+export type OrderResource = {
+  readonly id: string;
+  readonly customerId: string | null;
+  readonly status: OrderStatus;
+};
+
+type Rule = (actor: Actor, order: OrderResource) => boolean;
+
+const rules: Readonly<Record<OrderAction, Rule>> = {
+  see: (actor, order) => actor.kind === 'staff' || holdsOrder(actor, order),
+  withdraw: (actor, order) => holdsOrder(actor, order) && canMove(order, 'withdraw', actor),
+  write: (actor, order) => holdsOrder(actor, order),
+  'add-photos': (actor, order) => holdsOrder(actor, order) && isLive(order.status),
+  'see-calendar-file': (actor, order) =>
+    (actor.kind === 'staff' || holdsOrder(actor, order)) && hasPromise(order.status),
+};
+
+export function mayOrder(actor: Actor, action: OrderAction, order: OrderResource): boolean {
+  return rules[action](actor, order);
+}
+
+/** The pickup is promised, so a calendar may hold it. */
+function hasPromise(status: OrderStatus): boolean {
+  return status === 'confirmed' || status === 'making' || status === 'ready';
+}
