@@ -30,7 +30,7 @@ export function declaredName(declaration: Declaration, region: LabelRegion): str
     : speciesName(declaration.species);
 }
 
-/** What of the guests' allergies and diets a part goes against; empty where nothing is known to. */
+/** The guests' allergies and diets that speak against a part; empty where none is known to. */
 export function clashesOf(
   contents: Contents,
   allergies: readonly Declaration[],
@@ -40,7 +40,7 @@ export function clashesOf(
   return [
     ...allergies
       .filter((it) => isListed(it) && clashesWith(contents, it))
-      .map((it) => `your guest’s ${declaredName(it, region)}`),
+      .map((it) => declaredName(it, region)),
     ...diets.filter((it) => dietClashes(contents, it).length > 0).map((it) => dietWords[it]),
   ];
 }

@@ -1,6 +1,7 @@
 import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
+import { asItComesOut } from '../../design/as-it-comes-out.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { AdviceList } from './advice-list.tsx';
 import { EstimateLines } from './estimate-lines.tsx';
@@ -9,9 +10,10 @@ import { EstimateLines } from './estimate-lines.tsx';
 export function CakePanel({ onLeave }: { readonly onLeave?: () => void }) {
   const { menu, design, running } = useWizard();
   const { estimate, failed, retry } = running;
+  const cake = design?.cake ? asItComesOut(design.cake, menu) : null;
   return (
     <div className="grid gap-4">
-      <CakeDrawing cake={design?.cake ?? null} look={design?.look ?? null} menu={menu} />
+      <CakeDrawing cake={cake} look={design?.look ?? null} menu={menu} />
       {failed && estimate === null && <Failure error={new Error('rules')} onRetry={retry} />}
       {!failed && estimate === null && design !== null && <Pending what="Working it out…" />}
       {estimate !== null && (
