@@ -106,7 +106,7 @@ function containedAdvice(parts: readonly string[], shared: Shared): Advice {
     level: 'stop',
     step: stepOf(shared),
     about: aboutOf('allergen', declared),
-    sentence: `${capitalise(nameOf(shared))} is in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
+    sentence: `${capitalise(nameOf(shared))} ${isPlural(nameOf(shared)) ? 'are' : 'is'} in ${formatList(parts)}; ${whose(shared)}.`,
     instead: [wayWords(shared), answerWords[answer]].filter((it) => it !== '').join(' '),
     ways,
     talk: answer !== 'refuse',
@@ -120,7 +120,7 @@ function unknownAdvice(parts: readonly string[], shared: Shared): Advice {
     level: 'stop',
     step: stepOf(shared),
     about: aboutOf('allergen-unknown', declared),
-    sentence: `We do not know yet whether ${nameOf(shared)} is in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
+    sentence: `We do not know yet about ${nameOf(shared)} in ${formatList(parts)}; ${whose(shared)}.`,
     instead: `We have to read the label first. ${wayWords(shared)}`.trim(),
     ways,
     talk: true,
@@ -135,7 +135,7 @@ function warnedAdvice(parts: readonly string[], shared: Shared): Advice {
     level,
     step: stepOf(shared),
     about: aboutOf('may-contain', declared),
-    sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(declared, regionOf(shared))}.`,
+    sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(shared)}.`,
     instead: wayWords(shared),
     ways,
     talk: level === 'stop',
@@ -160,7 +160,7 @@ function nearMiss(declared: ListedDeclaration, { parts, resolved }: Situation): 
       level: 'care',
       step: 'cake',
       about: aboutOf('near', declared),
-      sentence: `You named ${speciesName(declared.species)}; this cake has ${formatList(species)}.`,
+      sentence: `You named ${speciesName(declared.species)}; this cake has ${formatList(species)} in it or in a warning on a label.`,
       instead: `If ${kind} other than ${speciesName(declared.species)} matter too, tell us.`,
     }),
   ];
@@ -174,7 +174,7 @@ function kitchenAdvice(shared: Shared): Advice {
     level: grave ? 'stop' : 'care',
     step: 'day',
     about: aboutOf('kitchen', declared),
-    sentence: `We handle ${nameOf(shared)} in this kitchen, so traces can get into any cake we make; ${whose(declared, regionOf(shared))}.`,
+    sentence: `We handle ${nameOf(shared)} in this kitchen, so traces can get into any cake we make; ${whose(shared)}.`,
     instead: grave
       ? 'We talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
       : 'Tell your guest, and let them decide.',
@@ -211,11 +211,16 @@ const reactions: Record<Severity, { readonly one: string; readonly many: string 
   },
 };
 
-function whose({ guests, severity }: ListedDeclaration, region: LabelRegion): string {
+function whose(shared: Shared): string {
+  const { guests, severity } = shared.declared;
   const { one, many } = reactions[severity];
   const words = guests === 1 ? one : `${guests} ${many}`;
-  return region === 'US' ? words.replace('coeliac', 'celiac') : words;
+  const ofRegion = regionOf(shared) === 'US' ? words.replace('coeliac', 'celiac') : words;
+  return isPlural(nameOf(shared)) ? ofRegion.replace(/\bit$/, 'them') : ofRegion;
 }
+
+/** "Tree nuts are in ...": the list's plurals, and no other, end in s. */
+const isPlural = (name: string): boolean => name.endsWith('s');
 
 function wayWords({ ways, situation, declared }: Shared): string {
   if (situation.parts.length === 0) return '';

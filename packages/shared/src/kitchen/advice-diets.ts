@@ -16,6 +16,11 @@ const dietWords: Record<DietId, string> = {
   'no-gelatine': 'without gelatine',
 };
 
+/** Diets that are about one thing alone; the sentence names that thing. */
+const substances = { 'no-alcohol': 'Alcohol', 'no-gelatine': 'Gelatine' } as const;
+
+const isSubstance = (diet: DietId): diet is keyof typeof substances => diet in substances;
+
 /** Diets that are more than a list of ingredients. */
 const certified: readonly DietId[] = ['halal', 'kosher'];
 
@@ -25,7 +30,9 @@ export function dietAdvice(situation: Situation): Advice[] {
   return resolved.design.guests.diets.flatMap((diet): Advice[] => {
     const clashing = parts.flatMap((part) => {
       const what = part.unread ? ['a label we have not read'] : dietClashes(part.contents, diet);
-      return what.length === 0 ? [] : [`${part.name} (${formatList(what)})`];
+      if (what.length === 0) return [];
+      // "Alcohol is in Rum caramel" needs no "(alcohol)" after it.
+      return [isSubstance(diet) ? part.name : `${part.name} (${formatList(what)})`];
     });
     const shared = { code: 'diet', level: 'care', step: 'cake', about: `diet:${diet}` } as const;
     const askUs = `${capitalise(dietWords[diet])} is more than a list of ingredients: ask us which of ours carry a certificate.`;
@@ -34,7 +41,9 @@ export function dietAdvice(situation: Situation): Advice[] {
       return [
         note({
           ...shared,
-          sentence: `Not ${dietWords[diet]}: ${formatList(clashing)}.`,
+          sentence: isSubstance(diet)
+            ? `${substances[diet]} is in ${formatList(clashing)}.`
+            : `Not ${dietWords[diet]}: ${formatList(clashing)}.`,
           instead: [
             ways.length === 0
               ? 'Nothing on our menu makes this cake that way; write to us.'
