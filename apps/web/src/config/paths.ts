@@ -14,6 +14,10 @@ export const linkPurposes = [
 ] as const;
 export type LinkPurpose = (typeof linkPurposes)[number];
 
+/** How much the calendar shows at once. */
+export const calendarViews = ['day', 'week', 'month'] as const;
+export type CalendarViewName = (typeof calendarViews)[number];
+
 /** Every address of the web app. `pattern` strings are for the router, functions for links. */
 export const paths = {
   home: '/',
@@ -36,7 +40,10 @@ export const paths = {
   staffOrders: '/staff/orders',
   staffOrder: (number: number) => `/staff/orders/${number}`,
   staffCalendar: '/staff/calendar',
+  staffCalendarAt: (view: CalendarViewName, date: string) =>
+    `/staff/calendar?view=${view}&date=${date}`,
   staffPeople: '/staff/studio',
+  staffMe: '/staff/me',
   staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,
 } as const;
 
