@@ -1,10 +1,15 @@
+import { estimatesRoutes } from '#api/modules/estimates/estimates.routes.ts';
+import { ordersRoutes } from '#api/modules/orders/orders.routes.ts';
+import { photosRoutes } from '#api/modules/photos/photos.routes.ts';
 import { accountsRoutes } from '#api/modules/accounts/accounts.routes.ts';
+import { datesRoutes } from '#api/modules/dates/dates.routes.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { healthRoutes } from '#api/modules/health/health.routes.ts';
 import { menuRoutes } from '#api/modules/menu/menu.routes.ts';
 import { peopleRoutes } from '#api/modules/people/people.routes.ts';
 import { googleRoutes } from '#api/modules/sessions/google.routes.ts';
 import { linksRoutes } from '#api/modules/sessions/links.routes.ts';
+import { orderAccessRoutes } from '#api/modules/sessions/order-access.routes.ts';
 import { secondFactorRoutes } from '#api/modules/sessions/second-factor.routes.ts';
 import { sessionsRoutes } from '#api/modules/sessions/sessions.routes.ts';
 import type { FeatureRoutes } from './route.ts';
@@ -13,10 +18,15 @@ import type { FeatureRoutes } from './route.ts';
 export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
   return [
     menuRoutes(deps),
+    estimatesRoutes(deps),
+    photosRoutes(deps),
+    ordersRoutes(deps),
+    datesRoutes(deps),
     sessionsRoutes(deps),
     linksRoutes(deps),
     googleRoutes(deps),
     secondFactorRoutes(deps),
+    orderAccessRoutes(deps),
     accountsRoutes(deps),
     peopleRoutes(deps),
     healthRoutes(deps),

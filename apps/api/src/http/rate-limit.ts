@@ -21,6 +21,8 @@ const limits = {
   'spend-link': { windowMs: 15 * minuteMs, limit: 60 },
   'open-private-link': { windowMs: 15 * minuteMs, limit: 120 },
   google: { windowMs: 15 * minuteMs, limit: 60 },
+  /** The calendar asks again at each choice; the answers are kept. */
+  'answer-dates': { windowMs: minuteMs, limit: 120 },
   'submit-order': { windowMs: 60 * minuteMs, limit: 30 },
   'upload-photo': { windowMs: 60 * minuteMs, limit: 120 },
   'write-message': { windowMs: 15 * minuteMs, limit: 60 },

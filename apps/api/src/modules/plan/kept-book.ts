@@ -1,4 +1,4 @@
-import { addDays, today } from '#shared/dates/local-time.ts';
+import { addDays, addMonths, today } from '#shared/dates/local-time.ts';
 import type { LocalDate, UtcMinute } from '#shared/dates/local-time.ts';
 import { openBook } from '#shared/dates/answer-dates.ts';
 import type { DateAnswers, OpenBook } from '#shared/dates/answer-dates.ts';
@@ -33,6 +33,9 @@ const markMinutes = 10;
 /** How far a book looks at least, and in what steps further. */
 const stepDays = 130;
 
+/** Nobody plans further ahead than this, however the book is set. */
+const mostMonths = 60;
+
 let kept: Kept | null = null;
 let opening: Promise<KeptBook> | null = null;
 let openingFor = '';
@@ -46,13 +49,14 @@ export function planningNow(now: Date): UtcMinute {
  * The book as it is now, up to a day at least; kept until plan, hours or menu change or its ten
  * minutes are over. Many who ask at once wait for the same one.
  */
-export async function currentBook(until: LocalDate): Promise<KeptBook> {
+export async function currentBook(wanted: LocalDate): Promise<KeptBook> {
+  const until = await reachFor(wanted);
   const versions = await readPlanVersions();
   const mark = planningNow(currentClock().now());
   if (kept !== null && isGood(kept, versions, mark, until)) return kept.book;
-  const wanted = `${versions.planVersion} ${versions.settingsVersion} ${mark} ${until}`;
-  if (opening === null || openingFor !== wanted) {
-    openingFor = wanted;
+  const question = `${versions.planVersion} ${versions.settingsVersion} ${mark} ${until}`;
+  if (opening === null || openingFor !== question) {
+    openingFor = question;
     const mine = openAt(mark, until).finally(() => {
       if (opening === mine) opening = null;
     });
@@ -72,12 +76,28 @@ function isGood(it: Kept, versions: PlanVersions, mark: UtcMinute, until: LocalD
   );
 }
 
+/** The day it is, and the last day customers may ask for. */
+export async function bookLimits(): Promise<{
+  readonly today: LocalDate;
+  readonly openUntil: LocalDate;
+}> {
+  const { zone, bookOpenMonths } = await Studio.findByPk(1, { rejectOnEmpty: true });
+  const day = today(currentClock().now(), zone);
+  return { today: day, openUntil: addMonths(day, Math.min(bookOpenMonths, mostMonths)) };
+}
+
+/** As far as a book can look for a day: a little at least, and never beyond its limit. */
+async function reachFor(wanted: LocalDate): Promise<LocalDate> {
+  const { today: day } = await bookLimits();
+  const limit = addMonths(day, mostMonths);
+  let until = addDays(day, stepDays);
+  while (until < wanted && until < limit) until = addDays(until, stepDays);
+  return until;
+}
+
 /** Reads everything at one version: what changes while it is read is read again. */
-async function openAt(mark: UtcMinute, wanted: LocalDate): Promise<KeptBook> {
+async function openAt(mark: UtcMinute, until: LocalDate): Promise<KeptBook> {
   const database = currentDatabase();
-  const { zone } = await Studio.findByPk(1, { rejectOnEmpty: true });
-  let until = addDays(today(new Date(mark * 60_000), zone), stepDays);
-  while (until < wanted) until = addDays(until, stepDays);
   for (;;) {
     const versions = await readPlanVersions();
     const [supply, settings] = await Promise.all([loadSupply(mark, until), loadPlanSettings()]);

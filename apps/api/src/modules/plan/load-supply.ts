@@ -42,9 +42,6 @@ export type Hours = {
   readonly closures: ReadonlyMap<LocalDate, Closure>;
 };
 
-/** Days beyond which nobody plans, however the book is set. */
-const bookLimitMonths = 60;
-
 export const shiftKey = (date: LocalDate, startMinute: number): string => `${date} ${startMinute}`;
 
 /** The weekly pattern with its exceptions and closures, day by day. */
@@ -243,7 +240,7 @@ export async function loadSupply(now: UtcMinute, until: LocalDate): Promise<Supp
       maxOrders: it.maxOrders,
     })),
     keptBack: studio.regularsKeptBack,
-    bookOpenUntil: addMonths(day, Math.min(bookLimitMonths, studio.bookOpenMonths)),
+    bookOpenUntil: addMonths(day, studio.bookOpenMonths),
     cold: cold.length === 0 ? null : cold,
   };
 }

@@ -4,25 +4,27 @@ import type { LocalDate } from '#shared/dates/local-time.ts';
 import { preparedMenu } from '#api/modules/menu/menu.queries.ts';
 import { answersOf } from './answers-of.ts';
 import { demandOf } from './demand-of.ts';
-import { currentBook } from './kept-book.ts';
+import { bookLimits, currentBook } from './kept-book.ts';
 
 /** How far to either side other days are looked for. */
 const lookAroundDays = 60;
 
-/** The nearest open days to a day, on both sides of it, nearest first. */
+/** The nearest open days to a day, on both sides of it, in order of date. */
 export async function nearestOpenDays(
   design: Design,
   around: LocalDate,
   count: number,
 ): Promise<LocalDate[]> {
-  const { menu } = await preparedMenu();
-  const book = await currentBook(addDays(around, lookAroundDays));
-  const { today } = book.open.supply;
-  const { demand } = demandOf(design, menu, book.settings);
-  const earliest = addDays(around, -lookAroundDays);
+  const [{ menu }, { today, openUntil }] = await Promise.all([preparedMenu(), bookLimits()]);
+  const middle = around < today ? today : around > openUntil ? openUntil : around;
+  const earliest = addDays(middle, -lookAroundDays);
+  const latest = addDays(middle, lookAroundDays);
   const from = earliest < today ? today : earliest;
-  const { days } = answersOf(book, demand, from, addDays(around, lookAroundDays));
-  const distance = (date: LocalDate) => Math.abs(Date.parse(date) - Date.parse(around));
+  const to = latest > openUntil ? openUntil : latest;
+  const book = await currentBook(to);
+  const { demand } = demandOf(design, menu, book.settings);
+  const { days } = answersOf(book, demand, from, to);
+  const distance = (date: LocalDate) => Math.abs(Date.parse(date) - Date.parse(middle));
   return days
     .filter((it) => (it.answer === 'open' || it.answer === 'last-place') && it.date !== around)
     .map((it) => it.date)

@@ -13,7 +13,7 @@ import { Task } from '#api/db/models/task.ts';
 import { preparedMenu } from '#api/modules/menu/menu.queries.ts';
 import { answersOf } from './answers-of.ts';
 import { demandOf } from './demand-of.ts';
-import { currentBook } from './kept-book.ts';
+import { bookLimits, currentBook } from './kept-book.ts';
 import type { KeptBook } from './kept-book.ts';
 import { loadHours } from './load-supply.ts';
 import { logFaults } from './log-faults.ts';
@@ -29,14 +29,19 @@ export async function answerDatesFor(
   from: LocalDate,
   to: LocalDate,
 ): Promise<DatesResponse> {
-  const { menu } = await preparedMenu();
-  const last = addDays(to, lookAheadDays);
+  const [{ menu }, { openUntil }] = await Promise.all([preparedMenu(), bookLimits()]);
+  const after = to < openUntil ? addDays(to, 1) : null;
+  const last = after === null ? openUntil : earlier(addDays(after, lookAheadDays), openUntil);
   const book = await currentBook(last);
   const { demand, likely } = demandOf(design, menu, book.settings);
   const { days } = answersOf(book, demand, from, to);
-  const firstOpen =
-    firstOpenOf(days) ?? firstOpenOf(answersOf(book, demand, addDays(to, 1), last).days);
-  return { likely, days, firstOpen };
+  const inside = firstOpenOf(days);
+  if (inside !== null || after === null) return { likely, days, firstOpen: inside };
+  return { likely, days, firstOpen: firstOpenOf(answersOf(book, demand, after, last).days) };
+}
+
+function earlier(a: LocalDate, b: LocalDate): LocalDate {
+  return a < b ? a : b;
 }
 
 function firstOpenOf(days: DatesResponse['days']): LocalDate | null {
