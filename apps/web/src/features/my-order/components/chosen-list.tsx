@@ -1,0 +1,108 @@
+import type { Menu } from '#shared/contracts/menu.ts';
+import type { OrderView } from '#shared/contracts/orders.ts';
+import { formatDuration } from '#shared/dates/format.ts';
+import { allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
+import { formatTemperature } from '#shared/kitchen/measures.ts';
+import { capitalise } from '#shared/kitchen/sentences.ts';
+import { DataList, type DataRow } from '#web/components/ui/data-list.tsx';
+
+const places = {
+  indoors: 'Indoors',
+  shade: 'Outside, in shade',
+  sun: 'Outside, in the sun',
+} as const;
+
+/** What was asked for besides the cake's own drawing. */
+export function ChosenList({ order, menu }: { readonly order: OrderView; readonly menu: Menu }) {
+  const { guests, setting, look, extras } = order.design;
+  const region = menu.studio.labelRegion;
+  const rows: (DataRow | null)[] = [
+    {
+      key: 'guests',
+      label: 'For',
+      value: `${guests.headCount} people, ${(menu.occasions.find((it) => it.id === guests.occasionId)?.name ?? '').toLowerCase()}`,
+    },
+    guests.allergies.length === 0
+      ? null
+      : {
+          key: 'allergies',
+          label: 'Allergies you told us',
+          value: guests.allergies
+            .map((it) => {
+              const named =
+                it.allergen === null
+                  ? it.text
+                  : it.species === null
+                    ? allergenName(it.allergen, region)
+                    : speciesName(it.species);
+              return `${capitalise(named)} (${it.guests} ${it.guests === 1 ? 'guest' : 'guests'})`;
+            })
+            .join(', '),
+        },
+    setting === null
+      ? null
+      : {
+          key: 'setting',
+          label: 'Where it stands',
+          value: [
+            places[setting.place],
+            setting.warmestC === null
+              ? 'warmth not known'
+              : `up to ${formatTemperature(setting.warmestC, menu.studio.temperatureLead)}`,
+            `${formatDuration(setting.minutesOut)} out before cutting`,
+            `${formatDuration(setting.driveMinutes)} on the road`,
+          ].join(', '),
+        },
+    look === null || look.words.every((it) => it.text.trim() === '')
+      ? null
+      : {
+          key: 'words',
+          label: 'Words',
+          value: look.words.map((it) => `“${it.text.trim()}”`).join(', '),
+        },
+    look === null || look.decorations.length === 0
+      ? null
+      : {
+          key: 'decorations',
+          label: 'Decorations',
+          value: look.decorations
+            .map((it) => {
+              const name =
+                menu.decorations.find((known) => known.id === it.decorationId)?.name ??
+                it.decorationId;
+              return it.quantity > 1 ? `${it.quantity} x ${name}` : name;
+            })
+            .join(', '),
+        },
+    extras.length === 0
+      ? null
+      : {
+          key: 'extras',
+          label: 'Beside the cake',
+          value: extras
+            .map(
+              (it) =>
+                `${it.quantity} x ${menu.extras.find((known) => known.id === it.extraId)?.name ?? it.extraId}`,
+            )
+            .join(', '),
+        },
+    look === null || look.note === ''
+      ? null
+      : {
+          key: 'note',
+          label: 'Your note',
+          value: <span className="whitespace-pre-line">{look.note}</span>,
+        },
+    {
+      key: 'collects',
+      label: 'Who collects',
+      value: order.collector?.name ?? order.orderedBy.name,
+    },
+    {
+      key: 'photos',
+      label: 'Showing photos of it',
+      value: order.showPhotos ? 'You allow it' : 'Not without asking you',
+    },
+  ];
+  return <DataList rows={rows.filter((it) => it !== null)} />;
+}

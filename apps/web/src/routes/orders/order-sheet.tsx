@@ -1,0 +1,132 @@
+import type { Menu } from '#shared/contracts/menu.ts';
+import type { OrderView } from '#shared/contracts/orders.ts';
+import { formatDay } from '#shared/dates/format.ts';
+import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
+import { LinkButton } from '#web/components/ui/link-button.tsx';
+import { Notice } from '#web/components/ui/notice.tsx';
+import { PageTitle } from '#web/components/ui/page-title.tsx';
+import { Rim } from '#web/components/ui/rim.tsx';
+import { Section } from '#web/components/ui/section.tsx';
+import { HeaderSlot } from '#web/components/ui/site-header.tsx';
+import { paths } from '#web/config/paths.ts';
+import { AdviceList } from '#web/features/my-order/components/advice-list.tsx';
+import { ChosenList } from '#web/features/my-order/components/chosen-list.tsx';
+import { HoldNotice } from '#web/features/my-order/components/hold-notice.tsx';
+import { MadeWith } from '#web/features/my-order/components/made-with.tsx';
+import { MessageThread } from '#web/features/my-order/components/message-thread.tsx';
+import { PhotoRow } from '#web/features/my-order/components/photo-row.tsx';
+import { PriceList } from '#web/features/my-order/components/price-list.tsx';
+import { StageRuler } from '#web/features/my-order/components/stage-ruler.tsx';
+import { WithdrawOrder } from '#web/features/my-order/components/withdraw-order.tsx';
+import {
+  orderHeadings,
+  pickupWords,
+  stageIndex,
+  stages,
+} from '#web/features/my-order/order-words.ts';
+
+type Props = { readonly order: OrderView; readonly menu: Menu };
+
+/** Everything about one order, for its customer. */
+export function OrderSheet({ order, menu }: Props) {
+  const { studio } = menu;
+  const { locale } = studio;
+  const reached = stageIndex(order.stage);
+  const warned = order.offer.advice.filter((it) => it.level !== 'ok');
+  const price = order.agreedPrice ?? order.offer.price;
+  return (
+    <div className="page grid gap-x-12 gap-y-8 py-8 lg:grid-cols-[minmax(0,5fr)_minmax(0,6fr)]">
+      <HeaderSlot>
+        <span className="text-slate tabular-nums">No. {order.number}</span>
+      </HeaderSlot>
+      <header className="grid gap-2 lg:col-span-2">
+        <PageTitle title={orderHeadings[order.status]} />
+        <Collect order={order} menu={menu} />
+      </header>
+
+      <div className="grid content-start gap-5">
+        {reached >= 0 && <StageRuler reached={reached} />}
+        <Rim label="Your cake" className="p-4 sm:p-6">
+          <CakeDrawing
+            cake={order.design.cake}
+            look={order.design.look}
+            menu={menu}
+            made={reached < 0 ? 0 : (stages[reached]?.made ?? 1)}
+          />
+        </Rim>
+        {order.ending !== null && (
+          <Notice tone={order.status === 'withdrawn' ? 'plain' : 'berry'} title={order.ending}>
+            {order.otherDates.length > 0 && (
+              <p>
+                The nearest days we could keep:{' '}
+                {order.otherDates.map((it) => formatDay(it, { locale })).join(', ')}.
+              </p>
+            )}
+            <div>
+              <LinkButton to={paths.order} kind="secondary">
+                Start another order
+              </LinkButton>
+            </div>
+          </Notice>
+        )}
+        <HoldNotice order={order} locale={locale} answerHours={studio.answerHours} />
+        <Section title={order.agreedPrice === null ? 'The estimate' : 'The price'}>
+          <PriceList price={price} agreed={order.agreedPrice !== null} locale={locale} />
+        </Section>
+      </div>
+
+      <div className="grid content-start gap-9">
+        <Section title="When you have it">
+          {order.offer.keepCool !== '' && <p className="measure">{order.offer.keepCool}</p>}
+          {warned.length > 0 && <AdviceList advice={warned} />}
+        </Section>
+        <Section title="Made with">
+          <MadeWith
+            offer={order.offer}
+            region={studio.labelRegion}
+            kitchenNotice={studio.kitchenNotice}
+          />
+        </Section>
+        <Section title="What you asked for">
+          <ChosenList order={order} menu={menu} />
+        </Section>
+        {order.photos.length > 0 && (
+          <Section title="Photos">
+            <PhotoRow photos={order.photos} />
+          </Section>
+        )}
+        <Section title="Messages">
+          <MessageThread order={order} studio={studio.name} locale={locale} />
+        </Section>
+        {order.can.withdraw && (
+          <Section title="Changed your mind?">
+            <p className="measure">You can withdraw the order until it is confirmed.</p>
+            <div>
+              <WithdrawOrder order={order} />
+            </div>
+          </Section>
+        )}
+      </div>
+    </div>
+  );
+}
+
+function Collect({ order, menu }: Props) {
+  const { studio } = menu;
+  const when = pickupWords(order.pickup, studio.locale);
+  const where = `${studio.street}, ${studio.town}`;
+  if (order.status === 'collected')
+    return <p>Collected from us, {where}. We hope it was a good day.</p>;
+  if (order.ending !== null) return <p>It was for {when}.</p>;
+  return (
+    <p className="text-lg">
+      {order.status === 'asked' || order.status === 'quoted' ? 'To collect on ' : 'Collect on '}
+      <strong>{when}</strong>, {where}.{' '}
+      {order.can.seeCalendarFile && (
+        <a href={`/api/orders/${encodeURIComponent(order.code)}/calendar.ics`} className="link">
+          Add to calendar
+        </a>
+      )}
+    </p>
+  );
+}
