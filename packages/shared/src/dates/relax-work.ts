@@ -1,6 +1,6 @@
 import { chainBackwards } from './chain.ts';
 import type { LocalDate, UtcMinute } from './local-time.ts';
-import type { Demand, PickupTime, PlannedOrder, Supply, Work } from './model.ts';
+import type { Demand, PickupTime, PlannedOrder, Shift, Supply, Work } from './model.ts';
 
 /** What there is too little of, whatever is moved, and the last day of work it is needed on. */
 export type Shortage = { readonly resource: string; readonly day: LocalDate };
@@ -42,19 +42,27 @@ function cachedBounds(demand: Demand): readonly Bounds[] {
 type Resource = {
   readonly name: string;
   readonly needs: (work: Work) => number;
-  readonly has: (shift: Supply['shifts'][number]) => number;
+  /** What a shift has of it in all, and how many can be used at once. */
+  readonly has: (shift: Shift) => readonly [minutes: number, atOnce: number];
 };
 
 function resourcesOf(demand: Demand): Resource[] {
   const skills = new Set(demand.work.flatMap((it) => it.skill ?? []));
   return [
-    { name: 'bench', needs: (it) => it.benchMinutes, has: (it) => it.benchMinutes },
-    { name: 'mixer', needs: (it) => it.mixerMinutes, has: (it) => it.mixerMinutes },
-    { name: 'oven', needs: (it) => it.ovenMinutes, has: (it) => it.ovenMinutes },
-    ...[...skills].map((skill) => ({
+    {
+      name: 'bench',
+      needs: (it) => it.benchMinutes,
+      has: (it) => [it.benchMinutes, it.people.length],
+    },
+    { name: 'mixer', needs: (it) => it.mixerMinutes, has: (it) => [it.mixerMinutes, it.mixers] },
+    { name: 'oven', needs: (it) => it.ovenMinutes, has: (it) => [it.ovenMinutes, it.decks] },
+    ...[...skills].map((skill): Resource => ({
       name: skill,
-      needs: (it: Work) => (it.skill === skill ? it.benchMinutes : 0),
-      has: (it: Supply['shifts'][number]) => it.skillMinutes.get(skill) ?? 0,
+      needs: (it) => (it.skill === skill ? it.benchMinutes : 0),
+      has: (it) => [
+        it.skillMinutes.get(skill) ?? 0,
+        it.people.filter((person) => person.skills.includes(skill)).length,
+      ],
     })),
   ];
 }
@@ -78,11 +86,15 @@ export function findShortage(
     for (const resource of resourcesOf(demand)) {
       const own = mustLie(bounds, supply.now, pickup, from, pickup.startAt, resource);
       if (own === 0) continue;
-      const capacity = shifts.reduce((sum, it) => sum + resource.has(it), 0);
-      const alone = shifts.reduce(
-        (sum, it) => sum + Math.min(resource.has(it), it.endAt - it.startAt),
-        0,
-      );
+      let capacity = 0;
+      let alone = 0;
+      for (const shift of shifts) {
+        const inside = Math.min(shift.endAt, pickup.startAt) - Math.max(shift.opensAt, from);
+        const [minutes, atOnce] = resource.has(shift);
+        const usable = Math.min(minutes, atOnce * Math.max(0, inside));
+        capacity += usable;
+        alone += Math.min(usable, shift.endAt - shift.startAt);
+      }
       let committed = 0;
       for (const order of standing) {
         if (order.pickup.startAt > pickup.startAt || order.pickup.endAt < from) continue;
