@@ -60,17 +60,16 @@ function responsesOf(contract: RouteContract): Json {
   for (const code of [...usualRefusals, ...(contract.refusals ?? [])]) {
     byStatus.set(statusOf[code], [...(byStatus.get(statusOf[code]) ?? []), code]);
   }
-  const refused = [...byStatus].map(([status, codes]) => [
-    String(status),
-    {
+  const responses: Record<string, Json> = {
+    [String(contract.status ?? 200)]: { description: 'Done.', content },
+  };
+  for (const [status, codes] of byStatus) {
+    responses[String(status)] = {
       description: codes.join(', '),
       content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
-    },
-  ]);
-  return {
-    [String(contract.status ?? 200)]: { description: 'Done.', content },
-    ...Object.fromEntries(refused),
-  };
+    };
+  }
+  return responses;
 }
 
 /** The OpenAPI 3.1 description, made from the same contracts that requests are parsed by. */

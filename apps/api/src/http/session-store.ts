@@ -144,7 +144,7 @@ function readData(text: string, seenAt: number): SessionData | null {
   if (!parsed.success) return null;
   const { cookie: kept, ...rest } = parsed.data;
   const cookie = Object.assign(new session.Cookie(), kept, {
-    expires: kept.expires == null ? null : new Date(kept.expires),
+    expires: typeof kept.expires === 'string' ? new Date(kept.expires) : null,
   });
   return { ...rest, seenAt, cookie };
 }

@@ -62,7 +62,7 @@ export async function confirmSecondFactor(
         secretEncrypted: { [Op.ne]: null },
       },
     });
-    if (begun?.secretEncrypted == null) {
+    if (begun === null || begun.secretEncrypted === null) {
       throw new AppError('wrong-state', { detail: 'Begin with the picture to scan.' });
     }
     const secret = openSecret(env.sessionSecret, user.id, begun.secretEncrypted);

@@ -1,4 +1,4 @@
-import type { Request, Response } from 'express';
+import type { Handler, Request, RequestHandler, Response } from 'express';
 import passport from 'passport';
 import * as z from 'zod/mini';
 import {
@@ -25,6 +25,9 @@ import {
 
 /** What the sign-in page says when this did not work out. */
 type GoogleProblem = GoogleRefusal | 'google-denied' | 'google-failed';
+
+/** Passport, which types leave open, as Express knows it. */
+const authenticator: passport.Authenticator<Handler, RequestHandler> = passport;
 
 const callbackPath = '/api/auth/google/callback';
 
@@ -55,7 +58,7 @@ export function googleRoutes(deps: Deps): FeatureRoutes {
         if (error !== null) logger.warn({ err: error }, 'signing in with Google failed');
         resolve({ problem: 'google-failed' });
       };
-      void passport.authenticate(strategy, { session: false }, settle)(
+      void authenticator.authenticate(strategy, { session: false }, settle)(
         request,
         response,
         (error: unknown) => settle(error, null),
@@ -84,7 +87,7 @@ export function googleRoutes(deps: Deps): FeatureRoutes {
       };
       await new Promise<void>((resolve, reject) => {
         response.once('finish', resolve).once('error', reject);
-        void passport.authenticate(strategy, { session: false })(request, response, reject);
+        void authenticator.authenticate(strategy, { session: false })(request, response, reject);
       });
     },
     limitByAddress(deps, 'google'),

@@ -29,7 +29,7 @@ export async function passSecondFactor(
   await inTransaction(async () => {
     const now = clock.now();
     const authenticator = await findAuthenticator(user.id);
-    if (authenticator?.secretEncrypted == null) {
+    if (authenticator === null || authenticator.secretEncrypted === null) {
       throw new AppError('wrong-state', { detail: 'There is no second factor on this account.' });
     }
     const secret = openSecret(env.sessionSecret, user.id, authenticator.secretEncrypted);

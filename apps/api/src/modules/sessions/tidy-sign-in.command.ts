@@ -17,7 +17,9 @@ export async function tidySignIn({ clock }: Pick<Deps, 'clock'>): Promise<void> 
   const before = (days: number) => ({ [Op.lt]: new Date(now.getTime() - days * dayMs) });
   await inTransaction(async () => {
     await Session.destroy({
-      where: { [Op.or]: [{ expires: { [Op.lte]: now } }, { absoluteExpiresAt: { [Op.lte]: now } }] },
+      where: {
+        [Op.or]: [{ expires: { [Op.lte]: now } }, { absoluteExpiresAt: { [Op.lte]: now } }],
+      },
     });
     await SignInFailure.destroy({ where: { at: before(1) } });
     const old = await Token.findAll({ where: { expiresAt: before(30) } });
