@@ -1,5 +1,6 @@
+import type { Order } from 'sequelize';
+
+const inOrder: Order = [['position', 'ASC']];
+
 /** Finds what is offered now, in the studio's own order; the catalogue archives, never deletes. */
-export const offered = {
-  where: { archivedAt: null },
-  order: [['position', 'ASC'] as [string, string]],
-};
+export const offered = { where: { archivedAt: null }, order: inOrder };
