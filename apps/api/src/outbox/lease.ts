@@ -12,13 +12,22 @@ const leaseMs = 120_000;
 const errorLength = 500;
 
 /**
- * Tables whose rows are work to be done by one worker at a time, and the state that work ends
- * well in. They share the columns id, order_id, state, attempts, next_at, leased_until, leased_by
- * and last_error.
+ * Tables whose rows are work to be done by one worker at a time, the state that work ends well in,
+ * and which rows wait for one another. They share the columns id, order_id, state, attempts,
+ * next_at, leased_until, leased_by and last_error.
  */
 const tables = {
-  outbox: { well: 'done', wellAt: 'done_at' },
-  sent_mail: { well: 'sent', wellAt: 'sent_at' },
+  outbox: {
+    well: 'done',
+    wellAt: 'done_at',
+    inTurn: 'earlier.order_id = due.order_id',
+  },
+  sent_mail: {
+    well: 'sent',
+    wellAt: 'sent_at',
+    // An inbox of ours that is full must not hold up what the customer is to hear.
+    inTurn: 'earlier.order_id = due.order_id AND earlier.to_address = due.to_address',
+  },
 } as const;
 
 /** A row a worker may work on now; `attempt` counts from 1. */
@@ -36,9 +45,10 @@ export type LeaseQueueOptions = {
 };
 
 /**
- * Hands out the due rows of a table, oldest first. Rows of one order keep their order: a row waits
- * while an earlier one is under way or failed a moment ago, though not for one that is set for
- * later. A lease that ran out (its worker was killed) is handed out again.
+ * Hands out the due rows of a table, oldest first. Rows of one order (of mail: to one address)
+ * keep their order: a row waits while an earlier one is under way or failed a moment ago, though
+ * not for one that is set for later. A lease that ran out (its worker was killed) is handed out
+ * again.
  */
 export class LeaseQueue {
   readonly #table: keyof typeof tables;
@@ -103,7 +113,7 @@ export class LeaseQueue {
          AND (state = 'queued' OR leased_until <= :now)
          AND NOT EXISTS (
            SELECT 1 FROM ${this.#table} AS earlier
-           WHERE earlier.order_id = due.order_id AND earlier.id < due.id
+           WHERE ${tables[this.#table].inTurn} AND earlier.id < due.id
              AND earlier.state IN ('queued', 'leased')
              AND (earlier.attempts > 0 OR earlier.next_at <= :now)
          )

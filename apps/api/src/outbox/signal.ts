@@ -20,3 +20,6 @@ export function createSignal(): Signal {
 
 /** An outbox row has been committed. */
 export const outboxSignal = createSignal();
+
+/** A rendered mail has been committed. */
+export const mailSignal = createSignal();
