@@ -1,6 +1,6 @@
 import type { Coating, Look } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import { coatColour } from '#web/components/coats/coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { pipedEdge } from '#web/components/coats/piped-edge.ts';
 import { deeper, outlineOf } from '#web/components/coats/shades.ts';
 import {

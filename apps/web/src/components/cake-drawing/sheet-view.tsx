@@ -1,5 +1,5 @@
 import { formatLength } from '#shared/kitchen/measures.ts';
-import { coatColour } from '#web/components/coats/coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { pipedEdge } from '#web/components/coats/piped-edge.ts';
 import { deeper, lineOn } from '#web/components/coats/shades.ts';
 import { Bands, Standing, decorationsPerTier } from './decorated.tsx';

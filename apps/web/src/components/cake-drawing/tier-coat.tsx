@@ -1,7 +1,7 @@
 import type { Coating, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { CoveringId } from '#shared/contracts/vocabulary.ts';
-import { coatColour } from '#web/components/coats/coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { pipedEdge } from '#web/components/coats/piped-edge.ts';
 import { deeper, lineOn } from '#web/components/coats/shades.ts';
 import type { Box } from './layout.ts';

@@ -1,6 +1,6 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatLength, lengthFigure } from '#shared/kitchen/measures.ts';
-import { coatColour } from '#web/components/coats/coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { Bands, Standing, decorationsPerTier, reachAbove } from './decorated.tsx';
 import { Dimension } from './dimension.tsx';
 import { type TierBox, type ViewProps, layOutTiers, measureGap } from './layout.ts';

@@ -1,7 +1,7 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { CoveringId, StyleId } from '#shared/contracts/vocabulary.ts';
 import { classNames } from '#web/lib/class-names.ts';
-import { coatColour } from './coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { pipedEdge } from './piped-edge.ts';
 import { deeper, lineOn, outlineOf } from './shades.ts';
 

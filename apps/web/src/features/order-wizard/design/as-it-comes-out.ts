@@ -1,7 +1,7 @@
 import type { Cake, Coating } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { reachableTint } from '#shared/kitchen/colour.ts';
-import { coatColour } from '#web/components/coats/coat-colour.ts';
+import { coatColour } from '#shared/kitchen/coat-colour.ts';
 
 /** The colour a coat has before anything is mixed into it. */
 export function baseOf(coating: Coating, menu: Menu): string {
