@@ -182,7 +182,7 @@ export const answerAllergy = z.object({ rowVersion, text: requiredLine(1000, 'Wr
 export type AnswerAllergy = z.infer<typeof answerAllergy>;
 
 /** `POST .../lift-stop`: the owner's written reason, which stays and which the customer reads. */
-export const liftStop = z.object({ rowVersion, about: z.string().check(z.maxLength(200)), reason: requiredLine(1000, 'Write the reason; it stays with the order.') });
+export const liftStop = z.object({ rowVersion, about: z.string().check(z.maxLength(300)), reason: requiredLine(1000, 'Write the reason; it stays with the order.') });
 export type LiftStop = z.infer<typeof liftStop>;
 
 /** `GET /api/staff/calendar?from&to` */

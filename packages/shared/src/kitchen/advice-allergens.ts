@@ -1,4 +1,3 @@
-import type { Declaration } from '#shared/contracts/design.ts';
 import type { Advice } from '#shared/contracts/estimates.ts';
 import { severities, type LabelRegion, type Severity } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
@@ -23,9 +22,10 @@ import { waysWithout } from './ways-out.ts';
  */
 export function allergenAdvice(situation: Situation): Advice[] {
   const { allergies } = situation.resolved.design.guests;
+  const told = allergies.filter((it) => !isListed(it)).map((it) => it.text.trim());
   return [
     ...onePerThing(allergies.filter(isListed)).flatMap((it) => adviceFor(it, situation)),
-    ...allergies.filter((it) => !isListed(it)).map(toldInWords),
+    ...[...new Set(told)].map(toldInWords),
   ];
 }
 
@@ -52,13 +52,13 @@ function onePerThing(declarations: readonly ListedDeclaration[]): ListedDeclarat
 const graver = (a: Severity, b: Severity): Severity =>
   severities.indexOf(a) >= severities.indexOf(b) ? a : b;
 
-function toldInWords(declaration: Declaration): Advice {
+function toldInWords(text: string): Advice {
   return note({
     code: 'allergy-text',
     level: 'stop',
     step: 'day',
-    about: `allergy-text:${declaration.text}`,
-    sentence: `You told us about “${declaration.text}”. A baker reads it and answers you before anything is confirmed.`,
+    about: `allergy-text:${text}`,
+    sentence: `You told us about “${text}”. A baker reads it and answers you before anything is confirmed.`,
     talk: true,
   });
 }

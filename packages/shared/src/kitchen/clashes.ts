@@ -51,37 +51,36 @@ export function mayContainLevel(severity: Severity): 'care' | 'stop' {
 const has = (contents: Contents, allergen: AllergenId): boolean =>
   contents.allergens.some((it) => it.allergen === allergen && it.state === 'contains');
 
+/** One thing a diet may speak against, and how to see it in a part. */
+const substances = {
+  milk: (it: Contents) => has(it, 'milk'),
+  egg: (it: Contents) => has(it, 'egg'),
+  honey: (it: Contents) => it.honey,
+  alcohol: (it: Contents) => it.alcohol,
+  gelatine: (it: Contents) => it.gelatine,
+  // Gelatine is named by its own name, not once more as what it is made of.
+  'something of animal origin': (it: Contents) => it.animalOrigin && !it.gelatine,
+  cochineal: (it: Contents) => it.cochineal,
+  fish: (it: Contents) => has(it, 'fish'),
+  crustaceans: (it: Contents) => has(it, 'crustaceans'),
+  molluscs: (it: Contents) => has(it, 'molluscs'),
+} as const;
+
+type Substance = keyof typeof substances;
+
+const slaughter = ['gelatine', 'something of animal origin', 'cochineal'] as const;
+const shellfish = ['crustaceans', 'molluscs'] as const;
+
+const spokenAgainst: Record<DietId, readonly Substance[]> = {
+  vegan: ['milk', 'egg', 'honey', ...slaughter, 'fish', ...shellfish],
+  vegetarian: [...slaughter, 'fish', ...shellfish],
+  halal: ['alcohol', 'gelatine', 'something of animal origin'],
+  kosher: [...slaughter, ...shellfish],
+  'no-alcohol': ['alcohol'],
+  'no-gelatine': ['gelatine'],
+};
+
 /** What in a part does not go with a diet, as it is read: "milk", "gelatine". */
 export function dietClashes(contents: Contents, diet: DietId): string[] {
-  const seafood = (['fish', 'crustaceans', 'molluscs'] as const).filter((it) => has(contents, it));
-  const found = {
-    alcohol: contents.alcohol ? ['alcohol'] : [],
-    gelatine: contents.gelatine ? ['gelatine'] : [],
-    slaughter: contents.animalOrigin && !contents.gelatine ? ['something of animal origin'] : [],
-    cochineal: contents.cochineal ? ['cochineal'] : [],
-    farm: [
-      ...(has(contents, 'milk') ? ['milk'] : []),
-      ...(has(contents, 'egg') ? ['egg'] : []),
-      ...(contents.honey ? ['honey'] : []),
-    ],
-  };
-  switch (diet) {
-    case 'vegan':
-      return [...found.farm, ...found.gelatine, ...found.slaughter, ...found.cochineal, ...seafood];
-    case 'vegetarian':
-      return [...found.gelatine, ...found.slaughter, ...found.cochineal, ...seafood];
-    case 'halal':
-      return [...found.alcohol, ...found.gelatine, ...found.slaughter];
-    case 'kosher':
-      return [
-        ...found.gelatine,
-        ...found.slaughter,
-        ...found.cochineal,
-        ...seafood.filter((it) => it !== 'fish'),
-      ];
-    case 'no-alcohol':
-      return found.alcohol;
-    case 'no-gelatine':
-      return found.gelatine;
-  }
+  return spokenAgainst[diet].filter((it) => substances[it](contents));
 }

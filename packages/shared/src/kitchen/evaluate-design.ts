@@ -27,7 +27,7 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
   const proposals = proposeCakes(resolved, terms);
   const parts = partsOf(resolved);
   const table = tableOf(resolved, parts, date);
-  const ranks = rankCoats(table);
+  const coats = rankCoats(table);
   const amounts = amountsOf(resolved);
   return {
     portions,
@@ -35,8 +35,8 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
     price: priceDesign(resolved, terms),
     allergens: containedAllergens(parts),
     handled: mergeAllergens([menu.studio.handles]),
-    ranks,
-    advice: adviseOn({ ...table, ranks }, portions, proposals),
+    ranks: coats.map((it) => it.rank),
+    advice: adviseOn({ ...table, coats }, portions, proposals),
     weightG: carriedWeightG(resolved, amounts),
     amounts: {
       spongeG: Math.round(amounts.spongeG),

@@ -111,8 +111,8 @@ function usualTiers(wanted: number): number {
 
 /**
  * Two or three stacks that feed a number of portions: the one that wastes least, one with some
- * over, and one of another number of tiers. Usual heights before double ones. Empty where the
- * studio bakes nothing large enough. The same menu and number always give the same answer.
+ * over, and one of another number of tiers. Least waste first; usual heights before
+ * double ones. Empty where the studio bakes nothing large enough. The same menu and number always give the same answer.
  */
 export function proposeStacks(wanted: number, menu: Menu, portion: PortionSize): ProposedStack[] {
   const enough = stacksOf(menu, portion).filter((it) => it.portions >= wanted);
@@ -144,17 +144,12 @@ export function proposeStacks(wanted: number, menu: Menu, portion: PortionSize):
   return [
     describe(just, 'Just enough', menu),
     ...(over === undefined ? [] : [describe(over, 'Some over', menu)]),
-    ...(other === undefined
-      ? []
-      : [
-          describe(
-            other,
-            other.sizes.length > just.sizes.length ? 'Taller' : 'Lower and wider',
-            menu,
-          ),
-        ]),
-  ];
+    ...(other === undefined ? [] : [describe(other, otherWord(other, just), menu)]),
+  ].sort((a, b) => a.portions - b.portions);
 }
+
+const otherWord = (other: Stack, just: Stack): string =>
+  other.sizes.length > just.sizes.length ? 'Taller' : 'Lower and wider';
 
 function describe(stack: Stack, blurb: string, menu: Menu): ProposedStack {
   const lead = menu.studio.lengthLead;

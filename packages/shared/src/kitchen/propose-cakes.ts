@@ -5,7 +5,7 @@ import { priceDesign, type PriceTerms } from './price.ts';
 import { proposeStacks, tiersOf } from './proposals.ts';
 import { portionsWanted } from './portions.ts';
 import { resolveDesign, type ResolvedDesign } from './resolve-design.ts';
-import { clashesWithGuests } from './situation.ts';
+import { guestsClash } from './situation.ts';
 
 /** A cake is proposed and priced again and again while other answers change; a few are kept. */
 const remembered = new WeakMap<Menu, Map<string, readonly Proposal[]>>();
@@ -52,7 +52,7 @@ function insideOf(resolved: ResolvedDesign): {
   if (chosen !== undefined && chosen.sponge !== null && chosen.filling !== null) {
     return { spongeId: chosen.sponge.id, fillingId: chosen.filling.id };
   }
-  const clashes = clashesWithGuests(resolved);
+  const clashes = guestsClash(resolved);
   const first = <Item extends { id: string; contents: Parameters<typeof clashes>[0] }>(
     items: readonly Item[],
   ) => (items.find((it) => !clashes(it.contents)) ?? items[0])?.id ?? null;

@@ -1,13 +1,10 @@
-import type { CoatRank } from '#shared/contracts/estimates.ts';
-import type { ButtercreamStyle, Contents, Covering } from '#shared/contracts/menu.ts';
+import type { Contents } from '#shared/contracts/menu.ts';
 import type { AdviceLevel } from '#shared/contracts/vocabulary.ts';
 import { allergenName } from './allergen-names.ts';
 import { clashesWith, dietClashes, isListed } from './clashes.ts';
 import { byLevel, coatLimitC, fareOfCoat, sharper } from './heat.ts';
 import { formatTemperature } from './measures.ts';
-import type { Table } from './situation.ts';
-
-type Coat = { readonly covering: Covering; readonly style: ButtercreamStyle | null };
+import type { Coat, RankedCoat, Table } from './situation.ts';
 
 /** Every coat the menu makes: each covering over each style, and those that need none. */
 function coatsOfMenu({ coverings, styles }: Table['resolved']['menu']): Coat[] {
@@ -22,20 +19,19 @@ function coatsOfMenu({ coverings, styles }: Table['resolved']['menu']): Coat[] {
  * All coats, best first for the setting and the guests: by level, then by how much warmth they
  * have to spare, then by how smooth they come out.
  */
-export function rankCoats(table: Table): CoatRank[] {
+export function rankCoats(table: Table): RankedCoat[] {
   return coatsOfMenu(table.resolved.menu)
-    .map((coat) => ({ coat, limitC: coatLimitC(coat), ...judge(coat, table) }))
+    .map((coat) => ({ ...coat, limitC: coatLimitC(coat), ...judge(coat, table) }))
     .sort(
       (a, b) =>
         byLevel(a.level, b.level) ||
         b.limitC - a.limitC ||
-        (b.coat.style?.smoothness ?? 0) - (a.coat.style?.smoothness ?? 0),
+        (b.style?.smoothness ?? 0) - (a.style?.smoothness ?? 0),
     )
-    .map(({ coat, level, sentence }) => ({
-      covering: coat.covering.id,
-      style: coat.style?.id ?? null,
-      level,
-      sentence,
+    .map(({ covering, style, level, sentence }) => ({
+      covering,
+      style,
+      rank: { covering: covering.id, style: style?.id ?? null, level, sentence },
     }));
 }
 

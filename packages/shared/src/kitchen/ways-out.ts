@@ -1,10 +1,10 @@
 import type { Cake, Coating } from '#shared/contracts/design.ts';
-import type { Advice, CoatRank } from '#shared/contracts/estimates.ts';
-import type { Contents, Covering, Filling, Menu, Sponge } from '#shared/contracts/menu.ts';
+import type { Advice } from '#shared/contracts/estimates.ts';
+import type { Contents, Filling, Sponge } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { coatingName, type ResolvedCoating } from './resolve-design.ts';
 import { named } from './sentences.ts';
-import { clashesWithGuests, type Situation } from './situation.ts';
+import type { Coat, Situation } from './situation.ts';
 
 export type Way = Advice['ways'][number];
 
@@ -13,22 +13,8 @@ type Clashes = (contents: Contents) => boolean;
 /** How many ways are offered at once; more would be a menu again. */
 const mostWays = 3;
 
-type CoatChoice = { readonly covering: Covering; readonly style: Menu['styles'][number] | null };
-
-/** The coats of the menu in the order they are ranked, with what the menu says about them. */
-export function rankedCoats(
-  ranks: readonly CoatRank[],
-  menu: Menu,
-): (CoatChoice & { readonly rank: CoatRank })[] {
-  return ranks.flatMap((rank) => {
-    const covering = menu.coverings.find((it) => it.id === rank.covering);
-    const style = menu.styles.find((it) => it.id === rank.style) ?? null;
-    return covering === undefined ? [] : [{ rank, covering, style }];
-  });
-}
-
 /** The same coat in another covering or style; the finish stays where the new one has it. */
-function recoat(old: Coating, { covering, style }: CoatChoice): Coating {
+function recoat(old: Coating, { covering, style }: Coat): Coating {
   return {
     covering: covering.id,
     style: style?.id ?? null,
@@ -39,15 +25,11 @@ function recoat(old: Coating, { covering, style }: CoatChoice): Coating {
   };
 }
 
-const sameCoat = (a: Coating, b: CoatChoice | ResolvedCoating): boolean =>
+const sameCoat = (a: Coating, b: Coat | ResolvedCoating): boolean =>
   a.covering === b.covering.id && a.style === (b.style?.id ?? null);
 
 /** A cake whose offending coats, the whole cake's or single tiers', are replaced by one other. */
-export function withCoat(
-  cake: Cake,
-  offends: (coating: Coating) => boolean,
-  choice: CoatChoice,
-): Cake {
+export function withCoat(cake: Cake, offends: (coating: Coating) => boolean, choice: Coat): Cake {
   const change = (it: Coating | null) => (it !== null && offends(it) ? recoat(it, choice) : it);
   return {
     ...cake,
@@ -60,12 +42,12 @@ export function withCoat(
 export function otherCoats(
   situation: Situation,
   coat: ResolvedCoating,
-  suits: (choice: CoatChoice) => boolean = () => true,
+  suits: (choice: Coat) => boolean = () => true,
 ): Way[] {
-  const { resolved, ranks } = situation;
+  const { resolved, coats } = situation;
   const { cake } = resolved.design;
   if (cake === null) return [];
-  const offered = rankedCoats(ranks, resolved.menu).filter(
+  const offered = coats.filter(
     (it) =>
       it.rank.level !== 'stop' &&
       !(it.covering.id === coat.covering.id && it.style?.id === coat.style?.id) &&
@@ -91,13 +73,13 @@ export function otherCoats(
  * empty where the menu has no such cake.
  */
 export function waysWithout(situation: Situation, clashes: Clashes): Way[] {
-  const guests = clashesWithGuests(situation.resolved);
+  const guests = situation.clashesWithGuests;
   const forAll = waysFor(situation, (it) => clashes(it) || guests(it));
   return forAll.length > 0 ? forAll : waysFor(situation, clashes);
 }
 
 function waysFor(situation: Situation, clashes: Clashes): Way[] {
-  const { resolved, parts, ranks } = situation;
+  const { resolved, parts } = situation;
   const { menu, design } = resolved;
   const { cake, look } = design;
   if (cake === null) return [];
@@ -113,7 +95,7 @@ function waysFor(situation: Situation, clashes: Clashes): Way[] {
 
   const sponges = menu.sponges.filter((it) => !clashes(it.contents));
   const fillings = menu.fillings.filter((it) => !clashes(it.contents));
-  const coats = coatsWithout(situation, ranks, clashes);
+  const coats = coatsWithout(situation, clashes);
   const badCoat = (it: Coating) => !coats.some((choice) => sameCoat(it, choice));
   const needsCoat = kinds.has('buttercream') || kinds.has('covering');
 
@@ -155,13 +137,9 @@ function waysFor(situation: Situation, clashes: Clashes): Way[] {
 }
 
 /** Coats whose covering and style both do without; those that hold in the setting come first. */
-function coatsWithout(
-  { resolved, warmth }: Situation,
-  ranks: readonly CoatRank[],
-  clashes: Clashes,
-): CoatChoice[] {
+function coatsWithout({ resolved, warmth, coats }: Situation, clashes: Clashes): Coat[] {
   const current = resolved.tiers.find((it) => it.coating !== null)?.coating?.covering.id;
-  const clean = rankedCoats(ranks, resolved.menu).filter(
+  const clean = coats.filter(
     (it) => !clashes(it.covering.contents) && !(it.style !== null && clashes(it.style.contents)),
   );
   const holding = warmth === null ? clean : clean.filter((it) => it.rank.level !== 'stop');
@@ -177,7 +155,7 @@ function remade(
   change: {
     readonly sponge: Sponge | null;
     readonly filling: Filling | null;
-    readonly coat: CoatChoice | null;
+    readonly coat: Coat | null;
     readonly badSponges: ReadonlySet<string>;
     readonly badFillings: ReadonlySet<string>;
     readonly badCoat: (coating: Coating) => boolean;
@@ -214,7 +192,7 @@ export function otherFillings(
   const { design, menu } = situation.resolved;
   const { cake } = design;
   if (cake === null) return [];
-  const guests = clashesWithGuests(situation.resolved);
+  const guests = situation.clashesWithGuests;
   return menu.fillings
     .filter((it) => it.id !== filling.id && suits(it) && !guests(it.contents))
     .slice(0, mostWays)
