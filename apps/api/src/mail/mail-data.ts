@@ -78,7 +78,8 @@ export type MailData = {
     readonly dateOpen: boolean;
     readonly stops: readonly string[];
     readonly cares: readonly string[];
-    readonly allergyTold: boolean;
+    /** Something about who will eat is to be read on the order's page. */
+    readonly aboutGuests: 'allergy' | 'advice' | null;
   };
   'withdrawn-notice': OfOrder & { readonly reason: string };
   'hold-ran-out-notice': OfOrder;

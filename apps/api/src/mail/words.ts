@@ -1,3 +1,4 @@
+import * as z from 'zod/mini';
 import type { MailTemplate } from './mail-data.ts';
 import { oneLine } from './plain.ts';
 
@@ -126,6 +127,11 @@ export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
       'If the address is wrong, ring the customer. If the mail server is at fault, put that right and send the e-mail again from its page.',
   },
 };
+
+/** The name of a mail as a row has it. */
+export const mailTemplate = z.custom<MailTemplate>(
+  (name) => typeof name === 'string' && Object.hasOwn(standardWords, name),
+);
 
 /** Words with their gaps filled, in one go: what is filled in is not looked through again. */
 export function fillIn(words: string, values: Readonly<Record<string, string>>): string {

@@ -84,18 +84,26 @@ export const staffTemplates: StaffTemplates = {
 };
 
 /** Advice on top. What guests cannot eat stays on the order's page. */
-function first({ stops, cares, allergyTold }: MailData['new-order']): Block[] {
-  const allergy = notice(
-    'stop',
-    'An allergy was told',
-    'What it is stands on the order’s page, not in this e-mail.',
-  );
+function first({ stops, cares, aboutGuests }: MailData['new-order']): Block[] {
   return [
-    ...(allergyTold ? [allergy] : []),
+    ...(aboutGuests === null ? [] : [guestsNotice[aboutGuests]]),
     ...stops.map((sentence) => notice('stop', 'Stop', sentence)),
     ...cares.map((sentence) => notice('now', 'Care', sentence)),
   ];
 }
+
+const guestsNotice = {
+  allergy: notice(
+    'stop',
+    'An allergy was told',
+    'What it is stands on the order’s page and not in this e-mail.',
+  ),
+  advice: notice(
+    'now',
+    'There is advice about the guests',
+    'It stands on the order’s page and not in this e-mail.',
+  ),
+} as const;
 
 function place({ hold, dateOpen }: MailData['new-order'], house: House): Block {
   if (hold === null) {
