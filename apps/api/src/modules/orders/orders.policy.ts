@@ -1,8 +1,8 @@
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
-import { isLive } from '#shared/orders/transitions.ts';
+import { findTransition, isLive } from '#shared/orders/transitions.ts';
 import { holdsOrder } from '#api/platform/actor.ts';
 import type { Actor } from '#api/platform/actor.ts';
-import { canMove } from './change-order-status.command.ts';
+import { canMove, orderActorOf } from './change-order-status.command.ts';
 
 /** What the people an order belongs to may do with it; staff have routes of their own. */
 export type OrderAction = 'see' | 'withdraw' | 'write' | 'add-photos' | 'see-calendar-file';
@@ -26,6 +26,11 @@ const rules: Readonly<Record<OrderAction, Rule>> = {
 
 export function mayOrder(actor: Actor, action: OrderAction, order: OrderResource): boolean {
   return rules[action](actor, order);
+}
+
+/** Whether the table of an order's life lets this actor send one at all. */
+export function maySubmitOrder(actor: Actor): boolean {
+  return findTransition(null, 'submit', orderActorOf(actor)) !== null;
 }
 
 /** The pickup is promised, so a calendar may hold it. */

@@ -18,7 +18,7 @@ import type { Actor } from '#api/platform/actor.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { calendarFileOf } from './calendar-file.queries.ts';
 import { loadOrderPage } from './order-page.queries.ts';
-import { mayOrder } from './orders.policy.ts';
+import { mayOrder, maySubmitOrder } from './orders.policy.ts';
 import type { OrderAction } from './orders.policy.ts';
 import { presentOrder } from './orders.presenter.ts';
 import { findOrderByCode, resourceOf } from './orders.queries.ts';
@@ -44,6 +44,7 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
       refusals: ['price-changed', 'date-gone', 'too-many-holds', 'key-reused', 'not-allowed'],
     },
     async ({ actor, body, idempotencyKey, request }) => {
+      authorise(actor, maySubmitOrder(actor));
       const { orderId, answer } = await submitOrderCommand(deps, {
         form: body,
         idempotencyKey,
@@ -131,7 +132,7 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
           'Content-Disposition': `attachment; filename="cake-${order.number}.ics"`,
         })
         .type('text/calendar; charset=utf-8')
-        .send(await calendarFileOf(order, deps.env.publicUrl));
+        .send(await calendarFileOf(order.id, deps.env.publicUrl));
     },
   );
 
