@@ -1,16 +1,15 @@
-import type { Menu } from '#shared/contracts/menu.ts';
+import type { Menu, PortionSize } from '#shared/contracts/menu.ts';
 import type { ResolvedTier } from './resolve-design.ts';
-import { portionsOfBlock, portionsOfSheet, type Footprint } from './sizes.ts';
+import { portionsOfBlock, portionsOfSheet } from './sizes.ts';
 
 /**
  * The portion prices are reckoned in, whatever portion the guests chose: the same cake cut
  * smaller is the same work and the same sponge.
  */
-export function pricePortion(menu: Menu): Footprint {
-  return (
-    menu.portionSizes.find((it) => it.id === 'dessert') ??
-    menu.portionSizes[0] ?? { widthMm: 25, depthMm: 50 }
-  );
+export function pricePortion(menu: Menu): PortionSize {
+  const size = menu.portionSizes.find((it) => it.id === 'dessert') ?? menu.portionSizes[0];
+  if (size === undefined) throw new RangeError('The menu has no portion sizes.');
+  return size;
 }
 
 /**

@@ -97,9 +97,9 @@ describe('contents', () => {
   });
 
   it('refuse a formula that comes back to itself', () => {
-    const inner = { ...formula('Inner', []), lines: [] as FormulaLine[] };
-    const outer = formula('Outer', [line(inner, 1)]);
-    inner.lines.push(line(outer, 1));
+    const lines: FormulaLine[] = [];
+    const outer = formula('Outer', [line(formula('Inner', lines), 1)]);
+    lines.push(line(outer, 1));
     expect(() => deriveContents(outer)).toThrow(FormulaCycle);
     expect(() => deriveContents(outer)).toThrow(
       expect.objectContaining({ formulaIds: ['Outer', 'Inner', 'Outer'] }),

@@ -118,6 +118,8 @@ describe('the lines', () => {
     const dessert = priceOf(designWith({}));
     const coffee = priceOf(designWith({ guests: { portionSizeId: 'coffee' } }));
     expect(coffee.totalMinor).toBe(dessert.totalMinor);
+    expect(dessert.lines[0]?.label).toBe('10 in round tier');
+    expect(coffee.lines[0]?.label).toBe('10 in round tier, by the dessert portion');
   });
 
   it('charge a keepsake as cake and a dummy as a dummy', () => {

@@ -2,7 +2,7 @@ import { add, dinero, halfUp, multiply, toSnapshot, transformScale, type Dinero 
 import type { Price, PriceLine } from '#shared/contracts/estimates.ts';
 import type { PriceBook } from '#shared/contracts/menu.ts';
 import { daysBetween } from '#shared/dates/local-time.ts';
-import { chargedPortions } from './charged-portions.ts';
+import { chargedPortions, pricePortion } from './charged-portions.ts';
 import { lengthFigure } from './measures.ts';
 import { minorDigits, splitByLargestRemainder } from './money.ts';
 import { coatingName, type ResolvedDesign, type ResolvedTier } from './resolve-design.ts';
@@ -177,14 +177,18 @@ function tierLine(
   tier: ResolvedTier,
   portions: number,
   kind: 'tiered' | 'sheet',
-  { menu, design }: ResolvedDesign,
+  { menu, design, portionSize }: ResolvedDesign,
 ): PriceLine {
   const { priceBook: book, studio } = menu;
   const { widthMm, depthMm, shape } = tier.block;
   const cake = taxCategories.cake;
+  const reckoned = pricePortion(menu);
+  // The guests' own count is another number, so the line says what its number counts.
+  const by =
+    reckoned.id === portionSize.id ? '' : `, by the ${reckoned.name.toLowerCase()} portion`;
   if (kind === 'sheet') {
     const name = menu.sheetSizes.find((it) => it.id === design.cake?.sheet?.sizeId)?.name ?? '';
-    const label = `Sheet, ${name}`;
+    const label = `Sheet, ${name}${by}`;
     return lineOf('sheet', label, portions, portions * book.sheetPerPortionMinor, cake);
   }
   const lead = studio.lengthLead;
@@ -197,7 +201,8 @@ function tierLine(
   const widest = Math.max(widthMm, depthMm);
   const band = book.tierBands.find((it) => widest <= it.upToMm) ?? book.tierBands.at(-1);
   const amount = portions * (band?.perPortionMinor ?? 0);
-  return lineOf('tier', tier.keepsake ? `${label}, to keep` : label, portions, amount, cake);
+  const kept = tier.keepsake ? ', to keep' : '';
+  return lineOf('tier', `${label}${kept}${by}`, portions, amount, cake);
 }
 
 function decorationLines({ decorations, tiers }: ResolvedDesign): PriceLine[] {
