@@ -39,7 +39,8 @@ export function emptyOrder(): OrderForm {
   };
 }
 
-/** Whether anything at all has been answered, so that there is something to keep. */
+/** Whether anything but a known name and address is there, so that there is something to keep. */
 export function isUntouched(values: OrderForm): boolean {
-  return JSON.stringify(values) === JSON.stringify(emptyOrder());
+  const empty = emptyOrder();
+  return JSON.stringify({ ...values, you: empty.you }) === JSON.stringify(empty);
 }

@@ -33,10 +33,9 @@ function bench() {
   const queue = new PhotoQueue({
     upload: (_file, name, { signal, onProgress }) =>
       new Promise((end, fail) => {
-        signal.addEventListener('abort', () => fail(signal.reason));
+        signal.addEventListener('abort', () => fail(new Error('aborted')));
         calls.push({ name, signal, onProgress, end, fail });
       }),
-    onArrived: (photo, from) => arrived.push(`${from.name}=${photo.photo.id}`),
     later: (run, ms) => {
       const pause = { ms, run, off: false };
       pauses.push(pause);
@@ -45,6 +44,7 @@ function bench() {
       };
     },
   });
+  queue.onArrival((photo, from) => arrived.push(`${from.name}=${photo.photo.id}`));
   const states = () => queue.snapshot().map((it) => `${it.name} ${it.state}`);
   return { queue, calls, pauses, arrived, states };
 }

@@ -22,10 +22,12 @@ export type PhotoQueueOptions = {
     name: string,
     options: { onProgress: (share: number) => void; signal: AbortSignal },
   ) => Promise<UploadedPhoto>;
-  readonly onArrived: (photo: UploadedPhoto, from: QueuedPhoto) => void;
   /** Runs something later; answers how to call it off. */
   readonly later: (run: () => void, ms: number) => () => void;
 };
+
+/** Told of every photo that has arrived. */
+export type OnArrived = (photo: UploadedPhoto, from: QueuedPhoto) => void;
 
 /** Pauses before trying again by itself; after the last, every time that long. */
 export const retryPausesMs = [2_000, 5_000, 15_000, 30_000] as const;
@@ -40,6 +42,7 @@ const passing = new Set(['unavailable', 'too-many-requests', 'internal']);
 export class PhotoQueue {
   readonly #options: PhotoQueueOptions;
   readonly #listeners = new Set<() => void>();
+  readonly #arrivals = new Set<OnArrived>();
   #photos: readonly QueuedPhoto[] = [];
   #nextKey = 1;
   #running: { readonly key: number; readonly abort: AbortController } | null = null;
@@ -52,6 +55,12 @@ export class PhotoQueue {
   readonly subscribe = (listener: () => void): (() => void) => {
     this.#listeners.add(listener);
     return () => this.#listeners.delete(listener);
+  };
+
+  /** Told of arrivals; answers how to stop listening. */
+  readonly onArrival = (listener: OnArrived): (() => void) => {
+    this.#arrivals.add(listener);
+    return () => this.#arrivals.delete(listener);
   };
 
   readonly snapshot = (): readonly QueuedPhoto[] => this.#photos;
@@ -122,7 +131,7 @@ export class PhotoQueue {
       });
       if (!abort.signal.aborted) {
         this.#set(this.#photos.filter((it) => it.key !== key));
-        this.#options.onArrived(arrived, photo);
+        for (const told of this.#arrivals) told(arrived, photo);
       }
     } catch (error) {
       if (!abort.signal.aborted) this.#failed(photo, error);

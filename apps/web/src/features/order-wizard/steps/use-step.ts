@@ -41,12 +41,13 @@ export type StepFlow = {
 
 /** Going ahead from a step: its answers are checked first, and what is missing is listed. */
 export function useStep(step: OrderStep): StepFlow {
-  const { state } = useLocation();
+  const location = useLocation();
+  const { hash } = location;
   const navigate = useNavigate();
   const { values, reach } = useWizard();
   const { trigger, getValues, clearErrors, control } = useFormContext<OrderForm>();
   const { errors } = useFormState({ control });
-  const { fromCheck: returning, missing: sentHere } = passed(state);
+  const { fromCheck: returning, missing: sentHere } = passed(location.state);
   const [attempt, setAttempt] = useState(sentHere === true ? 1 : 0);
   const next = returning === true && step !== 'check' ? 'check' : stepAfter(step);
 
@@ -54,6 +55,14 @@ export function useStep(step: OrderStep): StepFlow {
     clearErrors();
     reach(step);
   }, [step, clearErrors, reach]);
+
+  // A link to one answer ends at its field.
+  useEffect(() => {
+    const field = hash === '' ? null : document.getElementById(hash.slice(1));
+    field?.closest('details')?.setAttribute('open', '');
+    field?.scrollIntoView({ block: 'center' });
+    field?.focus({ preventScroll: true });
+  }, [hash]);
 
   // Once the customer has tried to go on, the list shrinks as answers come in.
   useEffect(() => {

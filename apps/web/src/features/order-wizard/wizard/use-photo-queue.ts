@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useState } from 'react';
 import { uploadPhoto } from '../api/upload-photo.ts';
 import type { KeptPicture } from '../draft/draft-record.ts';
 import { PhotoQueue } from '../photos/photo-queue.ts';
@@ -14,28 +14,30 @@ export function usePhotoQueue(
   onArrived: Arrived,
   later: (run: () => void, ms: number) => () => void,
 ): PhotoQueue {
-  const arrived = useRef(onArrived);
-  useEffect(() => {
-    arrived.current = onArrived;
-  }, [onArrived]);
+  const [queue] = useState(() => new PhotoQueue({ upload: uploadPhoto, later }));
 
-  const [queue] = useState(
+  useEffect(
     () =>
-      new PhotoQueue({
-        upload: uploadPhoto,
-        later,
-        onArrived: ({ photo, claimKey }, { name, file }) => {
-          void thumbnailOf(file).then((thumbnail) =>
-            arrived.current(photo.id, claimKey, { name, thumbnail, palette: photo.palette }),
-          );
-        },
+      queue.onArrival(({ photo, claimKey }, { name, file }) => {
+        void thumbnailOf(file).then((thumbnail) =>
+          onArrived(photo.id, claimKey, { name, thumbnail, palette: photo.palette }),
+        );
       }),
+    [queue, onArrived],
   );
 
   useEffect(() => {
     const again = () => queue.retry();
+    // Files on their way do not survive the page; the browser asks before it is closed.
+    const ask = (event: BeforeUnloadEvent) => {
+      if (queue.snapshot().length > 0) event.preventDefault();
+    };
     window.addEventListener('online', again);
-    return () => window.removeEventListener('online', again);
+    window.addEventListener('beforeunload', ask);
+    return () => {
+      window.removeEventListener('online', again);
+      window.removeEventListener('beforeunload', ask);
+    };
   }, [queue]);
 
   return queue;

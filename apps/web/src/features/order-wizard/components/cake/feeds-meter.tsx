@@ -5,7 +5,7 @@ import { Aloud } from '../frame/estimate-lines.tsx';
 export function FeedsMeter() {
   const { running, design } = useWizard();
   const { estimate } = running;
-  if (estimate === null || design?.cake == null) return null;
+  if (estimate === null || !design?.cake) return null;
   const { wanted, fed } = estimate.portions;
   const over = fed - wanted;
   const verdict =

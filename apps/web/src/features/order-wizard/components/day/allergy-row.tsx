@@ -1,5 +1,5 @@
 import type { Declaration } from '#shared/contracts/design.ts';
-import { severities, type AllergenId, type Severity } from '#shared/contracts/vocabulary.ts';
+import { severities, type AllergenId } from '#shared/contracts/vocabulary.ts';
 import {
   allergenName,
   declarableAllergens,
@@ -13,15 +13,7 @@ import { Select } from '#web/components/ui/select.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-
-/** How grave it is, in the words of the form. */
-export const severityWords: Readonly<Record<Severity, string>> = {
-  avoids: 'Would rather not eat it',
-  intolerance: 'Intolerance',
-  coeliac: 'Coeliac disease',
-  allergy: 'Allergy',
-  anaphylaxis: 'Severe allergy (anaphylaxis)',
-};
+import { severityWords } from './severity-words.ts';
 
 const ownWords = 'own-words';
 

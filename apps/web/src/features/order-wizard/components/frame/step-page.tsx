@@ -1,4 +1,4 @@
-import { type ReactNode, useEffect } from 'react';
+import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { Button } from '#web/components/ui/button.tsx';
 import { FormErrorSummary } from '#web/components/ui/form-error-summary.tsx';
@@ -7,6 +7,7 @@ import { paths, type OrderStep } from '#web/config/paths.ts';
 import { stepBefore, steps } from '../../steps/steps.ts';
 import { useStep } from '../../steps/use-step.ts';
 import { BottomBar } from './bottom-bar.tsx';
+import { DateWatch } from './date-watch.tsx';
 
 type Props = {
   readonly step: OrderStep;
@@ -31,6 +32,7 @@ export function StepPage({ step, children }: Props) {
         <FormErrorSummary problems={problems} attempt={attempt} />
       </div>
       {children}
+      {step !== 'day' && <DateWatch />}
       <BottomBar
         action={next !== null && <Button type="submit">{steps[next].onwards}</Button>}
         back={
@@ -43,15 +45,4 @@ export function StepPage({ step, children }: Props) {
       />
     </form>
   );
-}
-
-/** How high the bar at the foot of a phone's screen is, so that news appears above it. */
-export function useFootOfScreen(height: string): void {
-  useEffect(() => {
-    const { style } = document.documentElement;
-    style.setProperty('--foot', height);
-    return () => {
-      style.removeProperty('--foot');
-    };
-  }, [height]);
 }

@@ -9,13 +9,7 @@ import { colourName } from '../../design/colour-name.ts';
 import { tierName } from '../../design/tier-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-
-/** Who makes or brings it. */
-export const sourceWords = {
-  studio: 'We make it',
-  customer: 'You bring it',
-  florist: 'Your florist brings it',
-} as const;
+import { sourceWords } from './source-words.ts';
 
 const whole = 'whole';
 

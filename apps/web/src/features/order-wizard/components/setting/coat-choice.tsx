@@ -1,5 +1,5 @@
 import type { CoatRank } from '#shared/contracts/estimates.ts';
-import { coveringIds, type CoveringId, type FinishId } from '#shared/contracts/vocabulary.ts';
+import { coveringIds, type CoveringId } from '#shared/contracts/vocabulary.ts';
 import { CoatSwatch } from '#web/components/coats/coat-swatch.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { Dots } from '#web/components/ui/dots.tsx';
@@ -9,14 +9,8 @@ import { coatOf, pickCovering, pickFromKey, pickKey } from '../../design/choose-
 import { containsLine } from '../../design/contains.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
+import { finishWords } from './setting-words.ts';
 import { Verdict } from './verdict.tsx';
-
-/** The finishes as they are read. */
-export const finishWords: Readonly<Record<FinishId, string>> = {
-  smooth: 'Smooth',
-  textured: 'Textured',
-  piped: 'Piped',
-};
 
 /** The covering, then the buttercreams ranked for the day, then how it is finished. */
 export function CoatChoice() {

@@ -7,13 +7,7 @@ import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { NumberField } from '#web/components/ui/number-field.tsx';
 import { useAnswer } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-
-/** The places a cake may stand, as they are read. */
-export const placeWords = {
-  indoors: 'Indoors',
-  shade: 'Outside, in shade',
-  sun: 'In the sun',
-} as const;
+import { placeWords } from './setting-words.ts';
 
 const parsedTemperature = (lead: 'F' | 'C') => (text: string) => parseTemperature(text, lead);
 

@@ -5,7 +5,7 @@ import { Select } from '#web/components/ui/select.tsx';
 import { coatOf, coatTier, pickFromKey, pickKey } from '../../design/choose-coat.ts';
 import { tierName } from '../../design/tier-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { finishWords } from './coat-choice.tsx';
+import { finishWords } from './setting-words.ts';
 
 const levelWords = { ok: '', care: ' (with care)', stop: ' (not for your day)' } as const;
 

@@ -2,8 +2,8 @@ import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
 import { useAnswer } from '../../steps/use-answer.ts';
+import { reachWords } from './reach-words.ts';
 
-export const reachWords = { email: 'E-mail', phone: 'Telephone', text: 'Text message' } as const;
 const reachChips = [
   { value: 'email', label: reachWords.email },
   { value: 'phone', label: reachWords.phone },
