@@ -11,6 +11,9 @@ const CarePage = lazyPage(async () => (await import('#web/routes/care/care-page.
 const PoliciesPage = lazyPage(
   async () => (await import('#web/routes/policies/policies-page.tsx')).PoliciesPage,
 );
+const OrderRoutes = lazyPage(
+  async () => (await import('#web/routes/order/order-routes.tsx')).OrderRoutes,
+);
 const MyOrderPage = lazyPage(
   async () => (await import('#web/routes/orders/my-order-page.tsx')).MyOrderPage,
 );
@@ -43,6 +46,7 @@ export function AppRouter() {
           <Route path={paths.menu} element={<MenuPage />} />
           <Route path={paths.care} element={<CarePage />} />
           <Route path={paths.policies} element={<PoliciesPage />} />
+          <Route path={`${paths.order}/*`} element={<OrderRoutes />} />
           <Route path="/orders/:code" element={<MyOrderPage />} />
           <Route path={paths.account} element={<AccountPage />} />
           <Route path={paths.signIn} element={<SignInPage />} />
