@@ -1,27 +1,44 @@
+import { createSmtpClient } from '#api/clients/smtp.ts';
 import type { Deps } from '#api/modules/deps.ts';
-import { tidySignIn } from '#api/modules/sessions/tidy-sign-in.command.ts';
+import { createMailHandlers } from '#api/modules/mail/mail-handlers.ts';
+import { createMailSender } from '#api/modules/mail/mail-sender.ts';
+import { removeStalePhotos } from '#api/modules/photos/remove-stale-photos.command.ts';
+import { expireHolds } from '#api/modules/plan/expire-holds.command.ts';
+import { removeExpired } from '#api/modules/sessions/remove-expired.command.ts';
 import { beatMs, noteBeat } from '#api/outbox/beat.ts';
+import { createDispatcher } from '#api/outbox/dispatcher.ts';
+import type { Loop } from '#api/outbox/loop.ts';
+import { newId } from '#api/platform/ids.ts';
 import { type PeriodicWork, type Running, startPeriodic } from '#api/platform/periodic.ts';
 
 const minuteMs = 60_000;
 
-/** What comes round by the clock, beside the work that rows ask for. */
-function rounds(deps: Deps, name: string): readonly PeriodicWork[] {
+/** What comes round by the clock. */
+function rounds(deps: Deps, worker: string): readonly PeriodicWork[] {
+  const { clock } = deps;
   return [
-    { name: 'beat', everyMs: beatMs, work: () => noteBeat(name, deps.clock) },
-    { name: 'tidy-sign-in', everyMs: 60 * minuteMs, work: () => tidySignIn(deps) },
+    { name: 'beat', everyMs: beatMs, work: () => noteBeat(worker, clock) },
+    { name: 'expire-holds', everyMs: minuteMs, work: () => expireHolds(clock.now()) },
+    { name: 'remove-stale-photos', everyMs: 60 * minuteMs, work: () => removeStalePhotos(deps) },
+    { name: 'remove-expired', everyMs: 60 * minuteMs, work: () => removeExpired(deps) },
   ];
 }
 
-/** Starts the work that nobody waits for. */
+/** Starts the work that nobody waits for: side effects, mail, and what comes round by the clock. */
 export async function start(deps: Deps): Promise<Running> {
-  const name = `worker-${process.pid}`;
+  const { clock, logger, env } = deps;
+  const worker = newId();
+  const loops: readonly Loop[] = [
+    createDispatcher({ handlers: createMailHandlers(deps), clock, logger, worker }),
+    createMailSender({ smtp: createSmtpClient(env.smtp), clock, logger, worker }),
+  ];
   // Shown once before anybody asks whether the program is ready.
-  await noteBeat(name, deps.clock);
-  const running = rounds(deps, name).map((round) => startPeriodic(round, deps.logger));
+  await noteBeat(worker, clock);
+  for (const loop of loops) loop.start();
+  const periodic = rounds(deps, worker).map((round) => startPeriodic(round, logger));
   return {
     async stop() {
-      await Promise.all(running.map((each) => each.stop()));
+      await Promise.all([...periodic, ...loops].map((each) => each.stop()));
     },
   };
 }
