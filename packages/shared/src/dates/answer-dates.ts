@@ -1,6 +1,6 @@
 import type { DateAnswer, DateReason, DayAnswer, PickupWindow } from '#shared/contracts/dates.ts';
 import { Book } from './book.ts';
-import { checkAddition, gatherStanding } from './check-plan.ts';
+import { checkAddition, checkLaterWindow, gatherStanding } from './check-plan.ts';
 import type { Fault, Standing } from './check-plan.ts';
 import { fitsSomewhere } from './cold.ts';
 import { formatDay, formatWeekday } from './format.ts';
@@ -186,11 +186,11 @@ class Question {
     };
   }
 
-  /** A plan for the window that the checker has passed; an earlier window's is tried first. */
+  /** A plan for the window that the checker has passed; that of an earlier one that day first. */
   plan(window: Window, earlier: PlannedOrder | null): PlannedOrder | null {
     if (earlier !== null) {
       const same = { ...earlier, pickup: window };
-      if (checkAddition(this.open.standing, same).length === 0) return same;
+      if (checkLaterWindow(this.open.standing, same).length === 0) return same;
     }
     const placement = placeWork(this.open.book, this.ready, window, this.orderId);
     if (!placement.found) return null;

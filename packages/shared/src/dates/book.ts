@@ -171,13 +171,16 @@ export class Book {
     return window !== undefined && this.countInWindow(pickup) < window.handovers;
   }
 
-  /** The earliest day a cake may be filled so that every night up to its pickup has room for it. */
-  coldSince(boxes: readonly Box[], pickupDate: LocalDate): LocalDate {
+  /**
+   * The earliest day, from `first` on, a cake may be filled so that every night up to its pickup
+   * has room for it.
+   */
+  coldSince(boxes: readonly Box[], pickupDate: LocalDate, first: LocalDate): LocalDate {
     const { cold } = this.supply;
     let date = pickupDate;
-    if (cold === null) return this.supply.today;
+    if (cold === null) return first;
     const standing = [...this.orders.values()];
-    while (date > this.supply.today) {
+    while (date > first) {
       const night = addDays(date, -1);
       const there = standing.filter(
         (it) => it.coldFrom !== null && it.coldFrom <= night && it.coldUntil > night,

@@ -64,11 +64,7 @@ export function checkAddition(standing: Standing, order: PlannedOrder): Fault[] 
   const { supply } = standing;
   const others = standing.orders.filter((it) => it.orderId !== order.orderId);
   const placed = readPlaces(supply, order);
-  const fault = (rule: Fault['rule'], sentence: string): Fault => ({
-    rule,
-    orderId: order.orderId,
-    sentence,
-  });
+  const fault = faultOf(order);
   const touched = new Set(placed.map((it) => it.shift?.key).filter((key) => key !== undefined));
   return [
     ...checkComplete(order, fault),
@@ -88,6 +84,20 @@ export function checkAddition(standing: Standing, order: PlannedOrder): Fault[] 
   ];
 }
 
+/**
+ * What another window of the same day can spoil in a plan that holds for an earlier one: its
+ * times against the pickup, and the window itself. Everything else is the same.
+ */
+export function checkLaterWindow(standing: Standing, order: PlannedOrder): Fault[] {
+  const { supply } = standing;
+  const others = standing.orders.filter((it) => it.orderId !== order.orderId);
+  const fault = faultOf(order);
+  return [
+    ...checkTimes(supply, order, readPlaces(supply, order), fault),
+    ...checkPickup(supply, order, others, fault),
+  ];
+}
+
 /** Every fault of a whole plan. Orders that have standing work in shifts gone by are checked from now on. */
 export function checkPlan(supply: Supply, orders: readonly PlannedOrder[]): Fault[] {
   const standing = gatherStanding(supply, orders);
@@ -95,6 +105,10 @@ export function checkPlan(supply: Supply, orders: readonly PlannedOrder[]): Faul
 }
 
 type MakeFault = (rule: Fault['rule'], sentence: string) => Fault;
+
+function faultOf({ orderId }: PlannedOrder): MakeFault {
+  return (rule, sentence) => ({ rule, orderId, sentence });
+}
 
 const shiftIndexes = new WeakMap<Supply, ReadonlyMap<string, Shift>>();
 

@@ -1,6 +1,7 @@
 import type { Book } from './book.ts';
 import type { ChainedWork } from './chain.ts';
 import { chainBackwards } from './chain.ts';
+import { addDays } from './local-time.ts';
 import type { LocalDate, UtcMinute } from './local-time.ts';
 import type { Demand, PickupTime, Place, Placement, Work } from './model.ts';
 import { coldStartsWith } from './model.ts';
@@ -36,7 +37,7 @@ export function placeWork(
   if (!book.hasHandover(pickup)) return { found: false, refusal: { kind: 'window-full' } };
   const refusal = book.refusesDay(pickup.date, demand.occasionId);
   if (refusal !== null) return { found: false, refusal };
-  const coldSince = book.coldSince(demand.boxes, pickup.date);
+  const coldSince = book.coldSince(demand.boxes, pickup.date, firstFillDay(book, demand, pickup));
   const progress: Progress = { placed: new Map(), done: [], ownBench: new Map(), coldFrom: null };
   const stuck = chain.find(
     (piece) => !placePiece(book, demand, piece, pickup, coldSince, progress),
@@ -48,6 +49,19 @@ export function placeWork(
     found: true,
     order: { orderId, demand, pickup, places, coldFrom: progress.coldFrom, coldUntil: pickup.date },
   };
+}
+
+/** No fill can be on a day before this one, by how long a finished cake keeps. */
+function firstFillDay(book: Book, { work }: Demand, pickup: PickupTime): LocalDate {
+  const { today } = book.supply;
+  let reach = 0;
+  for (const { kind, within } of work) {
+    if (kind !== coldStartsWith) continue;
+    if (within === null) return today;
+    reach = Math.max(reach, within);
+  }
+  const first = addDays(pickup.date, -Math.ceil(reach / (24 * 60)) - 1);
+  return first < today ? today : first;
 }
 
 function placePiece(

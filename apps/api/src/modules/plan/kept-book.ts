@@ -2,6 +2,7 @@ import { addDays, addMonths, today } from '#shared/dates/local-time.ts';
 import type { LocalDate, UtcMinute } from '#shared/dates/local-time.ts';
 import { openBook } from '#shared/dates/answer-dates.ts';
 import type { DateAnswers, OpenBook } from '#shared/dates/answer-dates.ts';
+import type { Supply } from '#shared/dates/model.ts';
 import { currentClock, currentDatabase } from '#api/db/current-database.ts';
 import type { Database } from '#api/db/database.ts';
 import { Studio } from '#api/db/models/studio.ts';
@@ -100,7 +101,7 @@ async function openAt(mark: UtcMinute, until: LocalDate): Promise<KeptBook> {
   const database = currentDatabase();
   for (;;) {
     const versions = await readPlanVersions();
-    const [supply, settings] = await Promise.all([loadSupply(mark, until), loadPlanSettings()]);
+    const { supply, settings } = await groundAt(versions, mark, until);
     const standing = await loadStanding(supply);
     const after = await readPlanVersions();
     if (
@@ -119,4 +120,27 @@ async function openAt(mark: UtcMinute, until: LocalDate): Promise<KeptBook> {
     kept = { database, mark, book };
     return book;
   }
+}
+
+/**
+ * Hours and times change only with the settings: writing work into a shift writes the shift down
+ * as the week has it.
+ */
+async function groundAt(
+  versions: PlanVersions,
+  mark: UtcMinute,
+  until: LocalDate,
+): Promise<{ readonly supply: Supply; readonly settings: PlanSettings }> {
+  if (
+    kept !== null &&
+    kept.database === currentDatabase() &&
+    kept.mark === mark &&
+    kept.book.until === until &&
+    kept.book.versions.settingsVersion === versions.settingsVersion &&
+    kept.book.versions.catalogueVersion === versions.catalogueVersion
+  ) {
+    return { supply: kept.book.open.supply, settings: kept.book.settings };
+  }
+  const [supply, settings] = await Promise.all([loadSupply(mark, until), loadPlanSettings()]);
+  return { supply, settings };
 }

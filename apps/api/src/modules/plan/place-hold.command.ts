@@ -7,7 +7,7 @@ import { Order } from '#api/db/models/order.ts';
 import { Studio } from '#api/db/models/studio.ts';
 import { AppError } from '#api/platform/app-error.ts';
 import { answerTime } from './keep-place.command.ts';
-import type { PickupChoice } from './pickup-choice.ts';
+import type { PickupChoice } from './plan.queries.ts';
 import { planAndWrite } from './plan-order.ts';
 import type { PlacedPickup } from './plan-order.ts';
 import { storeWork } from './store-work.ts';

@@ -15,7 +15,7 @@ import { currentBook } from './kept-book.ts';
 import type { KeptBook } from './kept-book.ts';
 import { nearestOpenDays } from './nearest-open-days.queries.ts';
 import { logFaults } from './log-faults.ts';
-import type { PickupChoice } from './pickup-choice.ts';
+import type { PickupChoice } from './plan.queries.ts';
 
 /** The pickup an order gets, with or without a plan behind it. */
 export type PlacedPickup = {

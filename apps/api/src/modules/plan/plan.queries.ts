@@ -17,8 +17,10 @@ import { bookLimits, currentBook } from './kept-book.ts';
 import type { KeptBook } from './kept-book.ts';
 import { loadHours } from './load-supply.ts';
 import { logFaults } from './log-faults.ts';
-import type { PickupChoice } from './pickup-choice.ts';
 import { loadPlanSettings } from './plan-settings.ts';
+
+/** A pickup as people choose it. */
+export type PickupChoice = { readonly date: LocalDate; readonly windowStart: number };
 
 /** How far past a range the next open day is looked for, in steps of so many days. */
 const lookAheadDays = 60;

@@ -1,6 +1,6 @@
 import type { Design } from '#shared/contracts/design.ts';
 import { takeNextPlanVersion } from '#api/db/plan-versions.ts';
-import type { PickupChoice } from './pickup-choice.ts';
+import type { PickupChoice } from './plan.queries.ts';
 import { dateGone, planAndWrite } from './plan-order.ts';
 import type { FoundPlan, PlacedPickup } from './plan-order.ts';
 import { hasBegun, removeWork, storeWork } from './store-work.ts';

@@ -1,4 +1,6 @@
 import { Op } from 'sequelize';
+import type { CreationAttributes } from 'sequelize';
+import { placedWork } from '#shared/dates/book.ts';
 import { fromUtcMinute } from '#shared/dates/local-time.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
 import type { PlannedOrder, Work } from '#shared/dates/model.ts';
@@ -31,8 +33,16 @@ export async function storeWork(
   planVersion: number,
 ): Promise<void> {
   const shiftIds = await ensureShifts(planned);
-  const rows = new Map<string, Row>();
-  for (const work of planned.demand.work) rows.set(work.key, await storePiece(owner, work));
+  const shiftOf = (shiftKey: string): string => {
+    const id = shiftIds.get(shiftKey);
+    if (id === undefined) throw new Error(`The plan names a shift that is not there: ${shiftKey}`);
+    return id;
+  };
+  const placed = placedWork(planned);
+  const rows = await storePieces(
+    owner,
+    placed.map(([work, place]) => ({ work, shiftId: shiftOf(place.shiftKey) })),
+  );
   await TaskLink.bulkCreate(
     planned.demand.links.flatMap((link) => {
       const before = rows.get(link.before);
@@ -48,56 +58,67 @@ export async function storeWork(
       };
     }),
   );
-  const minutes = new Map(planned.demand.work.map((it) => [it.key, it.minutes]));
-  for (const place of planned.places) {
-    const row = rows.get(place.key);
-    const shiftId = shiftIds.get(place.shiftKey);
-    if (row === undefined || shiftId === undefined) {
-      throw new Error(`The plan names work or a shift that is not there: ${place.key}`);
-    }
-    await Assignment.create({
-      ...row,
-      shiftId,
+  await Assignment.bulkCreate(
+    placed.map(([work, place]) => ({
+      taskId: rows.get(work.key)?.taskId ?? null,
+      batchId: rows.get(work.key)?.batchId ?? null,
+      shiftId: shiftOf(place.shiftKey),
       startAt: fromUtcMinute(place.startAt),
-      minutes: minutes.get(place.key) ?? 0,
+      minutes: work.minutes,
       planVersion,
-    });
-    if (row.batchId !== null) await Batch.update({ shiftId }, { where: { id: row.batchId } });
-  }
+    })),
+  );
 }
 
-async function storePiece(owner: WorkOwner, work: Work): Promise<Row> {
-  const minutes = {
-    benchMinutes: work.benchMinutes,
-    mixerMinutes: work.mixerMinutes,
-    ovenMinutes: work.ovenMinutes,
-  };
-  const formulaVersionId = work.batch === null ? null : await formulaVersionOf(work.batch.source);
-  if (work.batch !== null && formulaVersionId !== null) {
-    const weightMg = work.batch.grams * 1000;
-    const batch = await Batch.create({
-      formulaVersionId,
-      bowls: work.batch.bowls,
-      weightMg,
+async function storePieces(
+  owner: WorkOwner,
+  pieces: readonly { readonly work: Work; readonly shiftId: string }[],
+): Promise<Map<string, Row>> {
+  const rows = new Map<string, Row>();
+  const tasks: CreationAttributes<Task>[] = [];
+  const batches: CreationAttributes<Batch>[] = [];
+  const shares: CreationAttributes<BatchShare>[] = [];
+  for (const { work, shiftId } of pieces) {
+    const id = newId();
+    const minutes = {
+      benchMinutes: work.benchMinutes,
+      mixerMinutes: work.mixerMinutes,
+      ovenMinutes: work.ovenMinutes,
+    };
+    const formulaVersionId = work.batch === null ? null : await formulaVersionOf(work.batch.source);
+    if (work.batch !== null && formulaVersionId !== null) {
+      const weightMg = work.batch.grams * 1000;
+      batches.push({
+        id,
+        formulaVersionId,
+        shiftId,
+        bowls: work.batch.bowls,
+        weightMg,
+        ...minutes,
+      });
+      shares.push({ batchId: id, orderId: owner.orderId, weightMg });
+      rows.set(work.key, { taskId: null, batchId: id });
+      continue;
+    }
+    // Something made without a formula of the studio's is still work on the order.
+    tasks.push({
+      id,
+      orderId: owner.orderId,
+      revisionId: owner.revisionId,
+      itemId: owner.itemId,
+      kind: work.kind,
+      label: work.label,
+      tierPosition: work.tier,
+      skillId: work.skill,
+      withinMinutes: work.within,
       ...minutes,
     });
-    await BatchShare.create({ batchId: batch.id, orderId: owner.orderId, weightMg });
-    return { taskId: null, batchId: batch.id };
+    rows.set(work.key, { taskId: id, batchId: null });
   }
-  // Something made without a formula of the studio's is still work on the order.
-  const task = await Task.create({
-    id: newId(),
-    orderId: owner.orderId,
-    revisionId: owner.revisionId,
-    itemId: owner.itemId,
-    kind: work.kind,
-    label: work.label,
-    tierPosition: work.tier,
-    skillId: work.skill,
-    withinMinutes: work.within,
-    ...minutes,
-  });
-  return { taskId: task.id, batchId: null };
+  await Task.bulkCreate(tasks);
+  await Batch.bulkCreate(batches);
+  await BatchShare.bulkCreate(shares);
+  return rows;
 }
 
 /** Shifts of the weekly pattern are written down when the first work is put into them. */
