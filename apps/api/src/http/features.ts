@@ -11,6 +11,10 @@ import { googleRoutes } from '#api/modules/sessions/google.routes.ts';
 import { linksRoutes } from '#api/modules/sessions/links.routes.ts';
 import { orderAccessRoutes } from '#api/modules/sessions/order-access.routes.ts';
 import { secondFactorRoutes } from '#api/modules/sessions/second-factor.routes.ts';
+import { staffMailRoutes } from '#api/modules/staff-orders/staff-mail.routes.ts';
+import { staffMovesRoutes } from '#api/modules/staff-orders/staff-moves.routes.ts';
+import { staffOrdersRoutes } from '#api/modules/staff-orders/staff-orders.routes.ts';
+import { calendarRoutes } from '#api/modules/calendar/calendar.routes.ts';
 import { sessionsRoutes } from '#api/modules/sessions/sessions.routes.ts';
 import type { FeatureRoutes } from './route.ts';
 
@@ -21,6 +25,10 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     estimatesRoutes(deps),
     photosRoutes(deps),
     ordersRoutes(deps),
+    staffOrdersRoutes(deps),
+    staffMovesRoutes(deps),
+    staffMailRoutes(deps),
+    calendarRoutes(deps),
     datesRoutes(deps),
     sessionsRoutes(deps),
     linksRoutes(deps),

@@ -1,6 +1,7 @@
 import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import { FormulaCycle } from '#shared/kitchen/derive-contents.ts';
 import type { FormulaLine, FormulaNode, IngredientNode } from '#shared/kitchen/derive-contents.ts';
+import { groupBy } from '#shared/group-by.ts';
 import { mergeAllergens } from '#shared/kitchen/merge-allergens.ts';
 import { FormulaLine as LineRow } from '#api/db/models/formula-line.ts';
 import { FormulaStep as StepRow } from '#api/db/models/formula-step.ts';
@@ -116,14 +117,4 @@ function entryOf(row: IngredientAllergen): AllergenEntry {
 function present<T>(found: T | undefined, id: string | null): T {
   if (found === undefined) throw new Error(`The pantry has no ${id ?? 'such part'}.`);
   return found;
-}
-
-function groupBy<T>(rows: readonly T[], keyOf: (row: T) => string): Map<string, T[]> {
-  const groups = new Map<string, T[]>();
-  for (const row of rows) {
-    const group = groups.get(keyOf(row));
-    if (group === undefined) groups.set(keyOf(row), [row]);
-    else group.push(row);
-  }
-  return groups;
 }

@@ -1,4 +1,3 @@
-import { Op } from 'sequelize';
 import type { Price } from '#shared/contracts/estimates.ts';
 import { price } from '#shared/contracts/estimates.ts';
 import type { OrderRevision } from '#api/db/models/order-revision.ts';
@@ -85,9 +84,9 @@ async function agreedPriceOf(orderId: string): Promise<Price | null> {
 /** Days that were offered with the last decline, if it was one. */
 export async function offeredDatesOf(orderId: string): Promise<string[]> {
   const declined = await OrderEvent.findOne({
-    where: { orderId, kind: { [Op.eq]: 'declined' } },
+    where: { orderId, kind: 'declined' },
     order: [['seq', 'DESC']],
   });
-  const dates = declined?.data['dates'];
+  const dates = declined?.data['otherDates'];
   return typeof dates === 'string' && dates !== '' ? dates.split(',') : [];
 }

@@ -1,0 +1,82 @@
+import { Op, QueryTypes } from 'sequelize';
+import * as z from 'zod/mini';
+import type { Advice } from '#shared/contracts/estimates.ts';
+import type { CalendarDay, PlannedTask } from '#shared/contracts/staff.ts';
+import { today } from '#shared/dates/local-time.ts';
+import { currentClock, currentDatabase } from '#api/db/current-database.ts';
+import { Order } from '#api/db/models/order.ts';
+import { Studio } from '#api/db/models/studio.ts';
+import { loadCalendarDays } from '#api/modules/plan/calendar-days.queries.ts';
+import { plannedTasksOf } from '#api/modules/plan/planned-tasks.queries.ts';
+import { blockersOf } from '#api/modules/staff-orders/blockers.queries.ts';
+import { loadOrderCards } from '#api/modules/staff-orders/order-cards.queries.ts';
+import type { OrderCard } from '#api/modules/staff-orders/order-cards.queries.ts';
+import { loadFit } from '#api/modules/staff-orders/staff-order.queries.ts';
+import type { Fit } from '#api/modules/staff-orders/staff-order.queries.ts';
+
+/** More requests than this are answered from the orders table. */
+const mostWaiting = 40;
+
+export type Calendar = {
+  readonly today: string;
+  readonly days: CalendarDay[];
+  readonly lanes: readonly (OrderCard & { readonly tasks: PlannedTask[] })[];
+  readonly waiting: readonly (OrderCard & { readonly advice: Advice | null; readonly fits: Fit })[];
+};
+
+const someIds = z.array(z.object({ id: z.string() }));
+
+/** The studio's days: load, a lane per promised cake, and what waits for an answer. */
+export async function loadCalendar(from: string, to: string): Promise<Calendar> {
+  const [studio, days, lanes, waiting] = await Promise.all([
+    Studio.findByPk(1, { rejectOnEmpty: true }),
+    loadCalendarDays(from, to),
+    loadLanes(from, to),
+    loadWaiting(),
+  ]);
+  return { today: today(currentClock().now(), studio.zone), days, lanes, waiting };
+}
+
+/** Cakes that are promised and collected or worked on in the range, by pickup. */
+async function loadLanes(from: string, to: string): Promise<Calendar['lanes']> {
+  const rows = await currentDatabase().sequelize.query(
+    `SELECT o.id FROM orders o
+     WHERE o.status IN ('agreed', 'confirmed', 'making', 'ready', 'collected', 'uncollected')
+       AND (o.pickup_date BETWEEN :from AND :to
+         OR EXISTS (SELECT 1 FROM tasks t JOIN assignments a ON a.task_id = t.id
+           JOIN shifts s ON s.id = a.shift_id
+           WHERE t.order_id = o.id AND s.local_date BETWEEN :from AND :to))
+     ORDER BY o.pickup_date, o.window_start_minute, o.number`,
+    { type: QueryTypes.SELECT, replacements: { from, to } },
+  );
+  const ids = someIds.parse(rows).map(({ id }) => id);
+  const [cards, tasks] = await Promise.all([loadOrderCards(ids), plannedTasksOf(ids)]);
+  return cards.map((card) => ({ ...card, tasks: tasks.get(card.order.id) ?? [] }));
+}
+
+/** Requests nobody has answered, the nearest pickup first. */
+async function loadWaiting(): Promise<Calendar['waiting']> {
+  const orders = await Order.findAll({
+    attributes: ['id'],
+    where: { status: { [Op.in]: ['asked', 'quoted'] } },
+    order: [
+      ['pickupDate', 'ASC'],
+      ['number', 'ASC'],
+    ],
+    limit: mostWaiting,
+  });
+  const cards = await loadOrderCards(orders.map(({ id }) => id));
+  return Promise.all(
+    cards.map(async (card) => ({
+      ...card,
+      advice: await sharpestAdvice(card),
+      fits: await loadFit(card),
+    })),
+  );
+}
+
+/** What has to be settled first, else what needs care. */
+async function sharpestAdvice({ revision }: OrderCard): Promise<Advice | null> {
+  const [blocker] = await blockersOf(revision);
+  return blocker ?? revision.estimate.advice.find(({ level }) => level === 'care') ?? null;
+}
