@@ -63,7 +63,12 @@ export type MailData = {
   confirmed: OfOrder & { readonly note: string };
   declined: OfOrder & { readonly reason: string; readonly nearest: readonly LocalDate[] };
   withdrawn: OfOrder;
-  moved: OfOrder & { readonly from: MailPickup | null; readonly note: string };
+  moved: OfOrder & {
+    readonly from: MailPickup | null;
+    readonly note: string;
+    /** A calendar file comes with it. */
+    readonly calendar: boolean;
+  };
   'hold-ran-out': OfOrder;
   'stop-lifted': OfOrder & { readonly reason: string };
   'private-link-renewed': OfOrder;

@@ -47,6 +47,8 @@ const styleSheet = new Html(`
     .now { background-color: #3B3212 !important; }
     .stop { background-color: #4A1722 !important; }
     .quiet { background-color: #1D2B4F !important; border-color: #3A4970 !important; }
+    .drawn { border-color: #8FA8F0 !important; }
+    .board { background-color: #8FA8F0 !important; }
   }`);
 
 /** The whole mail as HTML. */
@@ -150,12 +152,13 @@ function link(url: string, label: string): Html {
   >`;
 }
 
-function paragraphs(words: string): Html {
+/** @param dir `auto` for words of somebody who may write from right to left */
+function paragraphs(words: string, dir: 'ltr' | 'auto' = 'ltr'): Html {
   const parts = words.split(/\n{2,}/).filter((part) => part !== '');
   const last = parts.length - 1;
   return html`${parts.map(
     (part, index) =>
-      html`<p class="ink" dir="auto" style="margin: 0 0 ${index === last ? 0 : 12}px 0; ${body}">
+      html`<p class="ink" dir="${dir}" style="margin: 0 0 ${index === last ? 0 : 12}px 0; ${body}">
         ${htmlLines(part)}
       </p>`,
   )}`;
@@ -278,7 +281,7 @@ function quoteHtml({ by, text }: Extract<Block, { kind: 'quote' }>): Html {
     style="background-color: ${cloud}; border-left: 4px solid ${cobalt}; border-radius: 4px; padding: 12px 16px;"
   >
     <p class="slate" style="margin: 0 0 4px 0; ${small}"><bdi>${nameInText(by)}</bdi></p>
-    ${paragraphs(proseOf(text))}
+    ${paragraphs(proseOf(text), 'auto')}
   </div>`;
 }
 
@@ -297,7 +300,8 @@ function drawingHtml(tiers: readonly DrawnTier[], label: string): Html {
       html`<tr>
         <td align="center">
           <div
-            style="width: ${px(widthMm)}px; height: ${px(heightMm)}px; background-color: ${colour}; border: 2px solid ${cobalt}; border-bottom-width: 0; border-radius: 5px 5px 0 0; font-size: 0; line-height: 0;"
+            class="drawn"
+            style="width: ${px(widthMm)}px; height: ${px(heightMm)}px; background-color: ${hexOf(colour)}; border: 2px solid ${cobalt}; border-bottom-width: 0; border-radius: 5px 5px 0 0; font-size: 0; line-height: 0;"
           >
             &nbsp;
           </div>
@@ -321,6 +325,7 @@ function drawingHtml(tiers: readonly DrawnTier[], label: string): Html {
     <tr>
       <td align="center">
         <div
+          class="board"
           style="width: ${px(widest) + 40}px; height: 5px; background-color: ${cobalt}; border-radius: 3px; font-size: 0; line-height: 0;"
         >
           &nbsp;
@@ -331,4 +336,9 @@ function drawingHtml(tiers: readonly DrawnTier[], label: string): Html {
       <td style="height: 16px; font-size: 0; line-height: 0;">&nbsp;</td>
     </tr>
   </table>`;
+}
+
+/** A colour that may stand in a style, where escaping alone would not do. */
+function hexOf(colour: string): string {
+  return /^#[0-9a-f]{6}$/i.test(colour) ? colour : enamel;
 }

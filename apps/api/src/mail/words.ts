@@ -17,72 +17,72 @@ export type MailWords = {
 export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
   'order-received': {
     subject: 'Order No. {number}: we have it',
-    lead: 'Hello {name},\n\nthank you for asking us. Your order for {day} is here, and a baker will read all of it before we answer.',
+    lead: 'Hello {name},\n\nThank you for asking us. Your order for {day} is here, and a baker will read all of it before we answer.',
     closing: 'Something not right? Write to us from your order’s page, or answer this e-mail.',
   },
   confirmed: {
     subject: 'Order No. {number} is confirmed for {day}',
-    lead: 'Hello {name},\n\nit is settled: we make your cake for {day}. The file with this e-mail puts the pickup into your calendar.',
+    lead: 'Hello {name},\n\nIt is settled: we make your cake for {day}. The file with this e-mail puts the pickup into your calendar.',
     closing: 'We look forward to making it. If anything changes, tell us as early as you can.',
   },
   declined: {
     subject: 'Order No. {number}: we cannot take it',
-    lead: 'Hello {name},\n\nwe are sorry: we cannot make this cake for {day}.',
+    lead: 'Hello {name},\n\nWe are sorry: we cannot make this cake for {day}.',
     closing:
       'Nothing is owed, and we keep no place for it any more. We would gladly bake for you another time.',
   },
   withdrawn: {
     subject: 'Order No. {number} is withdrawn',
-    lead: 'Hello {name},\n\nyou have taken your order for {day} back. We keep no place for it any more, and nothing is owed.',
+    lead: 'Hello {name},\n\nYou have taken your order for {day} back. We keep no place for it any more, and nothing is owed.',
     closing: 'Was that not you? Then answer this e-mail or ring us, and we will put it right.',
   },
   moved: {
     subject: 'Order No. {number}: your pickup is now {day}',
-    lead: 'Hello {name},\n\nwe have moved the pickup of your cake. Please read the new day and time below.',
+    lead: 'Hello {name},\n\nWe have moved the pickup of your cake. Please read the new day and time below.',
     closing:
       'If that does not suit you, tell us soon: write from your order’s page, answer this e-mail, or ring us.',
   },
   'hold-ran-out': {
     subject: 'Order No. {number}: your date is not kept any more',
-    lead: 'Hello {name},\n\nthe time for which we kept a place for {day} is over, so somebody else may take it now. Your order itself is still with us.',
+    lead: 'Hello {name},\n\nThe time for which we kept a place for {day} is over, so somebody else may take it now. Your order itself is still with us.',
     closing:
       'Do you still want the cake? You need not order again: write to us from your order’s page, and we look for a place.',
   },
   'stop-lifted': {
     subject: 'Order No. {number}: please read this about your cake',
-    lead: 'Hello {name},\n\nour program had stopped your order over something at your table. The owner has looked at it and takes it on, for the reason below.',
+    lead: 'Hello {name},\n\nOur program had stopped your order over something at your table. The owner has looked at it and takes it on, for the reason below.',
     closing:
       'Please read it with care. What is in the cake has not changed. If this is not what you talked about with us, answer this e-mail or ring us before anything is made.',
   },
   'private-link-renewed': {
     subject: 'Order No. {number}: a new link to your order',
-    lead: 'Hello {name},\n\nhere is a new private link to your order. The links in earlier e-mails do not open it any more.',
+    lead: 'Hello {name},\n\nHere is a new private link to your order. The links in earlier e-mails do not open it any more.',
     closing:
       'Whoever has the link can read your order and write to us about it, so keep it to yourself.',
   },
   message: {
     subject: 'Order No. {number}: a message from {studio}',
-    lead: 'Hello {name},\n\nwe have written to you about your order:',
+    lead: 'Hello {name},\n\nWe have written to you about your order:',
     closing: '',
   },
   ready: {
     subject: 'Order No. {number}: your cake is ready',
-    lead: 'Hello {name},\n\nyour cake is ready and waits for you in the cold.',
+    lead: 'Hello {name},\n\nYour cake is ready and waits for you in the cold.',
     closing: 'Have the order’s number with you: No. {number}. We wish you a lovely day.',
   },
   'thank-you': {
     subject: 'Order No. {number}: thank you',
-    lead: 'Hello {name},\n\nyour cake has left our counter. Thank you for letting us make it.',
+    lead: 'Hello {name},\n\nYour cake has left our counter. Thank you for letting us make it.',
     closing: 'If anything was not as it should be, tell us: that is how we get better.',
   },
   'sign-in-link': {
     subject: 'Your link to sign in at {studio}',
-    lead: 'Hello,\n\nsomebody, we hope you, asked to sign in with this address.',
+    lead: 'Hello,\n\nSomebody, we hope you, asked to sign in with this address.',
     closing: 'If it was not you, do nothing: without the link nobody gets in.',
   },
   'action-to-confirm': {
     subject: 'Please confirm: erase your account at {studio}',
-    lead: 'Hello {name},\n\nyou asked us to erase your account and what we keep about you. We do it once you say so again.',
+    lead: 'Hello {name},\n\nYou asked us to erase your account and what we keep about you. We do it once you say so again.',
     closing: 'If it was not you, do nothing, and nothing happens.',
   },
   'new-order': {
@@ -107,17 +107,17 @@ export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
   },
   'staff-invitation': {
     subject: 'Come and work with {studio}',
-    lead: 'Hello {name},\n\nyou are invited to the order book of {studio}, as {role}.',
+    lead: 'Hello {name},\n\nYou are invited to the order book of {studio}, as {role}.',
     closing: 'If you do not know what this is about, do nothing.',
   },
   'password-reset': {
     subject: 'Choose a new password for {studio}',
-    lead: 'Hello {name},\n\nsomebody, we hope you, asked for a new password.',
+    lead: 'Hello {name},\n\nSomebody, we hope you, asked for a new password.',
     closing: 'If it was not you, do nothing: your password stays as it is.',
   },
   'sign-in-link-refused': {
     subject: 'How you sign in at {studio}',
-    lead: 'Hello {name},\n\nsomebody, we hope you, asked for a link to sign in. Whoever works here signs in with a password, never by a link.',
+    lead: 'Hello {name},\n\nSomebody, we hope you, asked for a link to sign in. Whoever works here signs in with a password, never by a link.',
     closing: 'If it was not you, do nothing.',
   },
   'mail-given-up': {

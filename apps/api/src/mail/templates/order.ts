@@ -97,7 +97,7 @@ export const orderTemplates: OrderTemplates = {
       blocks: [facts(fact('Cake', order.summary)), openOrder(order)],
     }),
 
-  moved: ({ order, from, note }, house) =>
+  moved: ({ order, from, note, calendar }, house) =>
     orderBody(order, house, {
       title: 'Your pickup has moved',
       preview: order.pickup === null ? '' : pickupText(order.pickup, house),
@@ -108,6 +108,7 @@ export const orderTemplates: OrderTemplates = {
           fact('Where', house.studio.address),
           fact('Cake', order.summary),
         ),
+        ...(calendar ? [text('The file with this e-mail moves it in your calendar.')] : []),
         ...fromUs(note, house),
         openOrder(order),
       ],

@@ -1,3 +1,4 @@
+import type { MailAttachment } from '#api/db/json-shapes.ts';
 import { LiftedStop } from '#api/db/models/lifted-stop.ts';
 import { Message } from '#api/db/models/message.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
@@ -37,6 +38,15 @@ type OrderMailHandlers = Pick<
 export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
   const { toCustomer, toStudio } = sendersOf(deps);
 
+  const calendarAttachment = async ({ record }: ToldOrder): Promise<MailAttachment> => {
+    const file = await calendarFileOf(record.order.id, deps.env.publicUrl);
+    return {
+      filename: `pickup-${record.order.number}.ics`,
+      contentType: 'text/calendar; charset=utf-8; method=PUBLISH',
+      base64: Buffer.from(file).toString('base64'),
+    };
+  };
+
   return {
     async 'order-asked'({ orderId }, context) {
       const told = await loadToldOrder(deps, orderId);
@@ -69,15 +79,8 @@ export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
 
     async 'order-confirmed'({ orderId }, context) {
       const told = await loadToldOrder(deps, orderId);
-      const { order } = told.record;
-      const calendar = await calendarFileOf(orderId, deps.env.publicUrl);
-      await toCustomer(told, context, 'confirmed', await confirmedMail(told), [
-        {
-          filename: `pickup-${order.number}.ics`,
-          contentType: 'text/calendar; charset=utf-8; method=PUBLISH',
-          base64: Buffer.from(calendar).toString('base64'),
-        },
-      ]);
+      const calendar = await calendarAttachment(told);
+      await toCustomer(told, context, 'confirmed', await confirmedMail(told), [calendar]);
     },
 
     async 'order-declined'({ orderId }, context) {
@@ -100,11 +103,17 @@ export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
 
     async 'order-moved'({ orderId }, context) {
       const told = await loadToldOrder(deps, orderId);
-      await toCustomer(told, context, 'moved', {
+      const { order, revision } = told.record;
+      // A pickup that is only asked for is in nobody's calendar yet.
+      const calendar = order.confirmedAt !== null && order.pickupDate !== null;
+      const data = {
         order: told.forCustomer,
         from: await movedFrom(orderId),
-        note: told.record.revision.changeNote ?? '',
-      });
+        note: revision.changeNote ?? '',
+        calendar,
+      };
+      const attachments = calendar ? [await calendarAttachment(told)] : [];
+      await toCustomer(told, context, 'moved', data, attachments);
     },
 
     async 'order-ready'({ orderId }, context) {
