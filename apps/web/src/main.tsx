@@ -11,7 +11,10 @@ installMessages();
 
 const root = document.getElementById('root');
 if (!root) throw new Error('The page has no #root to draw in.');
-createRoot(root).render(
+createRoot(root, {
+  // The boundary that catches an error decides what is a fault worth reporting.
+  onCaughtError: () => undefined,
+}).render(
   <StrictMode>
     <App />
   </StrictMode>,

@@ -31,16 +31,17 @@ export function PublicLayout() {
 function Places() {
   const user = useSession().data?.user ?? null;
   return (
-    <nav
-      aria-label="Places"
-      className="-mx-2 flex flex-wrap items-center gap-x-1 sm:mx-0 sm:ml-auto sm:gap-x-3"
-    >
-      <Place to={paths.menu}>Menu</Place>
-      <Place to={paths.care}>Care and allergens</Place>
-      {user === null && <Place to={paths.signIn}>Sign in</Place>}
-      {user?.role === 'customer' && <Place to={paths.account}>My account</Place>}
-      {user !== null && user.role !== 'customer' && <Place to={paths.staff}>To the studio</Place>}
-      <Place to={paths.order}>Order a cake</Place>
+    <nav aria-label="Places" className="contents">
+      <div className="ml-auto max-[23rem]:-mx-2">
+        <Place to={paths.order}>Order a cake</Place>
+      </div>
+      <div className="-mx-2 -mt-1.5 flex w-[calc(100%+1rem)] flex-wrap gap-x-1 sm:m-0 sm:w-auto sm:gap-x-3">
+        <Place to={paths.menu}>Menu</Place>
+        <Place to={paths.care}>Care and allergens</Place>
+        {user === null && <Place to={paths.signIn}>Sign in</Place>}
+        {user?.role === 'customer' && <Place to={paths.account}>My account</Place>}
+        {user !== null && user.role !== 'customer' && <Place to={paths.staff}>To the studio</Place>}
+      </div>
     </nav>
   );
 }
@@ -72,14 +73,14 @@ function PublicFooter({ studio }: { readonly studio: StudioCard | null }) {
               {studio.street}, {studio.town}
               {studio.region !== '' && `, ${studio.region}`} {studio.postcode}
             </p>
-            <p>
+            <p className="flex flex-wrap gap-x-6">
               <a
                 href={`tel:${studio.phone.replaceAll(/[^+\d]/g, '')}`}
                 className="link inline-block py-1"
               >
                 {studio.phone}
-              </a>{' '}
-              <a href={`mailto:${studio.email}`} className="link inline-block py-1 sm:ml-3">
+              </a>
+              <a href={`mailto:${studio.email}`} className="link inline-block py-1">
                 {studio.email}
               </a>
             </p>

@@ -1,4 +1,4 @@
-import * as z from 'zod/mini';
+import type * as z from 'zod/mini';
 import { problem } from '#shared/contracts/common.ts';
 import { guardHeader } from '#shared/contracts/headers.ts';
 import { type ErrorCode, errorTitles } from '#shared/errors.ts';

@@ -32,8 +32,10 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
   const view = views[size];
   const there =
     cake !== null && (cake.kind === 'sheet' ? cake.sheet !== null : cake.tiers.length > 0);
-  const level = view.room.y - 40 + (view.room.height + 40) * (1 - made);
-  const headroom = there && size === 'full' ? emptyAbove(cake, look, menu, view.room) : 0;
+  const highest = there ? highestPoint(cake, look, menu, view.room) : view.room.y;
+  const headroom = size === 'full' ? Math.max(0, highest - measureGap - 28) : 0;
+  const floor = view.room.y + view.room.height;
+  const level = highest + (floor - highest) * (1 - made);
   const draw = (show: Shown) =>
     there && (
       <Drawn
@@ -51,7 +53,11 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
       role="img"
       aria-labelledby={`${id}-title`}
       aria-describedby={`${id}-words`}
-      className={classNames('block w-full font-sans', className)}
+      className={classNames(
+        'mx-auto block w-full font-sans',
+        size === 'full' && 'max-w-xl',
+        className,
+      )}
     >
       <title id={`${id}-title`}>
         {there ? `${summariseCake(cake, menu)}, drawn to scale` : 'An empty board'}
@@ -87,12 +93,11 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
   );
 }
 
-/** What of the sheet of paper stays empty above a low cake with its dimension line, and is cut off. */
-function emptyAbove(cake: Cake, look: Look | null, menu: Menu, room: Room): number {
-  if (cake.kind === 'sheet') return 0;
+/** Where the drawing of the cake begins, with what stands on it. */
+function highestPoint(cake: Cake, look: Look | null, menu: Menu, room: Room): number {
+  if (cake.kind === 'sheet') return room.y;
   const { top, scale } = layOutTiers(cake, menu, room);
-  const highest = decorationsPerTier(look, menu, cake.tiers.length).at(-1) ?? [];
-  return Math.max(0, top - reachAbove(highest, scale) - measureGap - 28);
+  return top - reachAbove(decorationsPerTier(look, menu, cake.tiers.length).at(-1) ?? [], scale);
 }
 
 function Drawn(props: ViewProps) {

@@ -37,7 +37,8 @@ export function decorationsPerTier(
       key: `${at}`,
       glyph,
       colour: placed.colour ?? defaultColour(glyph, menu),
-      quantity: placed.quantity,
+      // Priced for a tier or the whole, it is as many as go round.
+      quantity: known.per === 'piece' ? placed.quantity : mostOfAKind,
     };
     const tiers = placed.tier === null ? tiersOfWhole(glyph, tierCount) : [placed.tier];
     for (const tier of tiers) perTier[tier]?.push(entry);
@@ -165,7 +166,7 @@ function Sprinkles({ box, colour }: { readonly box: Box; readonly colour: string
         // Steps by the plastic number scatter evenly over a plane, and always the same way.
         const across = (at * 0.754878) % 1;
         const up = ((at * 0.56984) % 1) ** 1.6;
-        const turn = (at * 137) % 180;
+        const turn = (at * at * 47) % 180;
         const tint =
           at % 2 === 0 ? colour : (sprinkleColours[(at >> 1) % sprinkleColours.length] ?? colour);
         return (

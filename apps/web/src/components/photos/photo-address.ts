@@ -28,7 +28,5 @@ export function photoKindWords(kind: Photo['kind']): string {
 
 /** What stands for the picture in words. */
 export function photoAlt(photo: Photo): string {
-  return photo.note === ''
-    ? `${kinds[photo.kind]}, photo`
-    : `${kinds[photo.kind]}: ${photo.note}`;
+  return photo.note === '' ? `${kinds[photo.kind]}, photo` : `${kinds[photo.kind]}: ${photo.note}`;
 }

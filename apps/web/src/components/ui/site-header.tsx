@@ -21,10 +21,10 @@ export function SiteHeader({ name, homeTo, mark, nav, children }: Props) {
   return (
     <SlotContext value={slot}>
       <header className="border-t-[5px] border-b border-t-cobalt border-b-cobalt print:border-t-2">
-        <div className="page flex min-h-14 flex-wrap items-center gap-x-6 gap-y-1 py-1.5">
+        <div className="page flex min-h-14 flex-wrap items-center gap-x-4 gap-y-1 py-1.5 sm:gap-x-6">
           <Link
             to={homeTo}
-            className="inline-flex min-h-11 items-center gap-3 rounded-mark font-display text-lg leading-tight font-bold text-cobalt sm:text-xl"
+            className="inline-flex min-h-11 items-center gap-3 rounded-mark font-display text-lg leading-tight font-bold text-cobalt max-[23rem]:text-base sm:text-xl"
           >
             {mark}
             {name === '' ? <span className="inline-block h-5 w-40 rounded-mark bg-cloud" /> : name}

@@ -66,7 +66,9 @@ export function CarePage() {
               .map((it) => (
                 <li key={it.id} className="flex justify-between gap-6 border-b border-seam py-2">
                   <span>{it.name}</span>
-                  <span className="tabular-nums">holds to {degrees(it.holdsToC)}</span>
+                  <span className="whitespace-nowrap tabular-nums">
+                    holds to {degrees(it.holdsToC)}
+                  </span>
                 </li>
               ))}
           </ul>

@@ -30,7 +30,7 @@ export function CoatComparison({ menu }: { readonly menu: Menu }) {
   const asked = wish.allergen !== null || wish.warmestC !== null;
   return (
     <div className="grid gap-6">
-      <div className="grid gap-5 rounded-action bg-cloud p-4 sm:grid-cols-2 sm:p-5">
+      <div className="grid gap-5 rounded-action bg-cloud p-4 sm:grid-cols-2 sm:items-end sm:p-5">
         <Select
           label="Somebody must not have"
           value={allergen ?? ''}
@@ -62,7 +62,7 @@ export function CoatComparison({ menu }: { readonly menu: Menu }) {
       </div>
       <p role="status" className="text-slate">
         {asked
-          ? `${left} of ${menu.styles.length} buttercreams are left by themselves; the sponge under them counts too.`
+          ? `Left by themselves: ${left} of ${menu.styles.length} buttercreams. The sponge under them counts too.`
           : 'Each swatch is the colour the food has by itself.'}
       </p>
       <ul className="grid">
@@ -163,8 +163,8 @@ function VerdictLine({ verdict: { level, reasons } }: { readonly verdict: Verdic
     <p className="flex gap-2 text-sm font-semibold">
       <ToneGlyph tone={stop ? 'berry' : 'butter'} />
       <span className={stop ? 'text-berry' : undefined}>
-        {stop ? 'Falls away: ' : 'With care: '}
-        {reasons.join('; ').toLowerCase()}.
+        {stop ? 'Falls away. ' : 'With care. '}
+        {reasons.join('. ')}.
       </span>
     </p>
   );

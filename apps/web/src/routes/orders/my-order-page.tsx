@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useEffect } from 'react';
-import { Link, useLocation, useNavigate, useParams } from 'react-router-dom';
+import { useLocation, useNavigate, useParams } from 'react-router-dom';
+import type { StudioCard } from '#shared/contracts/menu.ts';
 import { EmptyState } from '#web/components/ui/empty-state.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
@@ -43,7 +44,7 @@ export function MyOrderPage() {
     <div className="page grid gap-6 py-8">
       <PageTitle title="Your order" />
       {closed ? (
-        <NotOpenHere code={code} />
+        <NotOpenHere code={code} studio={menu.studio} />
       ) : (
         <Failure error={order.error} onRetry={() => void order.refetch()} />
       )}
@@ -51,18 +52,20 @@ export function MyOrderPage() {
   );
 }
 
-function NotOpenHere({ code }: { readonly code: string }) {
+type NotOpenProps = { readonly code: string; readonly studio: StudioCard };
+
+function NotOpenHere({ code, studio }: NotOpenProps) {
   return (
     <EmptyState
       title="We cannot open it for you here"
       action={<LinkButton to={paths.signInThen(paths.myOrder(code))}>Sign in</LinkButton>}
     >
       <p>
-        Open it with the link in our e-mail, or sign in with the address you ordered with. Anything
-        else?{' '}
-        <Link to={paths.home} className="link">
-          Call or write to us
-        </Link>
+        Open it with the link in our e-mail, or sign in with the address you ordered with. Neither
+        works? Write to{' '}
+        <a href={`mailto:${studio.email}`} className="link">
+          {studio.email}
+        </a>
         .
       </p>
     </EmptyState>

@@ -13,7 +13,7 @@ export function StageRuler({ reached }: { readonly reached: number }) {
           key={stage}
           aria-current={at === reached ? 'step' : undefined}
           className={classNames(
-            'border-l-[1.5px] border-cobalt px-2 pt-4 pb-1.5 text-sm leading-tight',
+            'border-l-[1.5px] border-cobalt px-1.5 pt-4 pb-1.5 text-[0.8rem] leading-tight sm:px-2 sm:text-sm',
             at <= reached && 'bg-butter-tint',
             at === reached ? 'font-bold' : at < reached ? 'font-medium' : 'text-slate',
           )}
