@@ -12,12 +12,14 @@ import { newId } from '#api/platform/ids.ts';
 import { type PeriodicWork, type Running, startPeriodic } from '#api/platform/periodic.ts';
 
 const minuteMs = 60_000;
+/** One row, whichever process goes round. */
+const beatName = 'worker';
 
 /** What comes round by the clock. */
-function rounds(deps: Deps, worker: string): readonly PeriodicWork[] {
+function rounds(deps: Deps): readonly PeriodicWork[] {
   const { clock } = deps;
   return [
-    { name: 'beat', everyMs: beatMs, work: () => noteBeat(worker, clock) },
+    { name: 'beat', everyMs: beatMs, work: () => noteBeat(beatName, clock) },
     { name: 'expire-holds', everyMs: minuteMs, work: () => expireHolds(clock.now()) },
     { name: 'remove-stale-photos', everyMs: 60 * minuteMs, work: () => removeStalePhotos(deps) },
     { name: 'remove-expired', everyMs: 60 * minuteMs, work: () => removeExpired(deps) },
@@ -33,9 +35,9 @@ export async function start(deps: Deps): Promise<Running> {
     createMailSender({ smtp: createSmtpClient(env.smtp), clock, logger, worker }),
   ];
   // Shown once before anybody asks whether the program is ready.
-  await noteBeat(worker, clock);
+  await noteBeat(beatName, clock);
   for (const loop of loops) loop.start();
-  const periodic = rounds(deps, worker).map((round) => startPeriodic(round, logger));
+  const periodic = rounds(deps).map((round) => startPeriodic(round, logger));
   return {
     async stop() {
       await Promise.all([...periodic, ...loops].map((each) => each.stop()));

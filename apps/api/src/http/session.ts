@@ -11,13 +11,14 @@ import { sessionLimits, SessionStore } from './session-store.ts';
  * and the program's clock, the cookie's age only lets browsers forget it.
  */
 export function sessions({ env, clock }: Pick<Deps, 'env' | 'clock'>): RequestHandler {
-  return session({
+  const middleware = session({
     name: env.secureCookies ? '__Host-tierwell' : 'tierwell',
     secret: env.sessionSecret,
     store: new SessionStore(clock),
     resave: false,
     saveUninitialized: false,
     rolling: false,
+    proxy: true,
     cookie: {
       httpOnly: true,
       sameSite: 'lax',
@@ -26,6 +27,12 @@ export function sessions({ env, clock }: Pick<Deps, 'env' | 'clock'>): RequestHa
       maxAge: sessionLimits.customer.absoluteMs,
     },
   });
+  return (request, response, next) => {
+    // Where the public address is https, people come through a proxy that ends TLS, and not every
+    // one says so; without this word the cookie (which is Secure all the same) would be held back.
+    if (env.secureCookies) request.headers['x-forwarded-proto'] ??= 'https';
+    middleware(request, response, next);
+  };
 }
 
 /** Whoever has just proven who they are. */
