@@ -4,20 +4,21 @@
 const directing = /[\u202a-\u202e\u2066-\u2069]/g;
 const rightToLeft = /[\p{sc=Hebrew}\p{sc=Arabic}\p{sc=Syriac}\p{sc=Thaana}\p{sc=Nko}]/u;
 
-/** Text on one line, so that in a header it can begin no header of its own. */
+/**
+ * Text on one line, so that in a header it can begin no header of its own, and with no marks that
+ * would turn the words around it.
+ */
 export function oneLine(text: string): string {
   return text
+    .replaceAll(directing, '')
     .replaceAll(/\p{Cc}+/gu, ' ')
     .replaceAll(/ {2,}/g, ' ')
     .trim();
 }
 
-/**
- * A name among other words. One written from right to left is kept to itself, and no name turns
- * the words around it.
- */
+/** A name among other words; one written from right to left is kept to itself. */
 export function nameInText(name: string): string {
-  const line = oneLine(name.replaceAll(directing, ''));
+  const line = oneLine(name);
   return rightToLeft.test(line) ? `\u2068${line}\u2069` : line;
 }
 

@@ -140,9 +140,9 @@ export function fillIn(words: string, values: Readonly<Record<string, string>>):
   );
 }
 
-/** A subject: one line, of a length that inboxes show. */
+/** A subject of a length that inboxes show, on one line as long as each value is. */
 export function subjectOf(words: string, values: Readonly<Record<string, string>>): string {
-  const subject = oneLine(fillIn(words, values));
+  const subject = fillIn(oneLine(words), values);
   const characters = Array.from(subject);
   return characters.length <= 150 ? subject : `${characters.slice(0, 149).join('').trimEnd()}…`;
 }

@@ -4,7 +4,7 @@ import { fact, facts, heading, notice, text } from '../content.ts';
 import type { Block } from '../content.ts';
 import type { House } from '../house.ts';
 import type { MailData } from '../mail-data.ts';
-import { proseOf } from '../plain.ts';
+import { nameInText, oneLine, proseOf } from '../plain.ts';
 import { momentText, orderDay, pickupText } from '../when.ts';
 import {
   contentsOf,
@@ -156,7 +156,7 @@ export const orderTemplates: OrderTemplates = {
           order.pickup === null ? null : fact('Pickup', pickupText(order.pickup, house)),
           fact('Where', house.studio.address),
           openings.length === 0 ? null : fact('Open for pickups', openings.join('\n')),
-          order.collector === null ? null : fact('Collected by', order.collector),
+          order.collector === null ? null : fact('Collected by', nameInText(order.collector)),
         ),
         heading('Getting it home'),
         sentences([
@@ -201,7 +201,7 @@ function fromUs(words: string, { studio }: House): Block[] {
 }
 
 function sentences(words: readonly string[]): Block {
-  return { kind: 'list', items: words.map((each) => ({ text: each })) };
+  return { kind: 'list', items: words.map((each) => ({ text: oneLine(each) })) };
 }
 
 /** The first words of a message. */

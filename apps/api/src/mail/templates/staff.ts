@@ -87,8 +87,8 @@ export const staffTemplates: StaffTemplates = {
 function first({ stops, cares, aboutGuests }: MailData['new-order']): Block[] {
   return [
     ...(aboutGuests === null ? [] : [guestsNotice[aboutGuests]]),
-    ...stops.map((sentence) => notice('stop', 'Stop', sentence)),
-    ...cares.map((sentence) => notice('now', 'Care', sentence)),
+    ...stops.map((sentence) => notice('stop', 'Stop', oneLine(sentence))),
+    ...cares.map((sentence) => notice('now', 'Care', oneLine(sentence))),
   ];
 }
 
