@@ -46,7 +46,7 @@ export function OrderWizard({ step, signedInAs }: Props) {
         <div className="min-w-0 max-w-3xl">
           <StepGuard key={step} step={step} />
         </div>
-        <SidePanel />
+        <SidePanel step={step} />
       </div>
     </>
   );

@@ -16,7 +16,7 @@ export function CheckAdvice({ advice }: { readonly advice: readonly Advice[] }) 
       )}
       <ul className="grid gap-3">
         {[...stops, ...cares].map((it) => (
-          <AdviceItem key={`${it.code} ${it.about}`} advice={it} />
+          <AdviceItem key={`${it.code} ${it.about}`} step="check" advice={it} />
         ))}
       </ul>
     </section>

@@ -63,6 +63,7 @@ export function CheckStep() {
         Nothing is to be paid now, and the price is the baker’s to confirm.
       </p>
       <BottomBar
+        step="check"
         action={
           <Button type="submit" pending={sending.pending}>
             {sending.refusal?.kind === 'price-changed' && total !== null

@@ -16,7 +16,7 @@ export function GuestFields() {
     <div className="grid gap-6">
       <NumberField
         name={headCount.name}
-        label="How many will eat?"
+        label="Number of people"
         hint="Everybody who gets a slice, children too."
         unit="people"
         error={headCount.error}

@@ -2,13 +2,16 @@ import { Link } from 'react-router-dom';
 import type { Advice } from '#shared/contracts/estimates.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { ToneGlyph, type Tone } from '#web/components/ui/notice.tsx';
-import { paths } from '#web/config/paths.ts';
+import { paths, type OrderStep } from '#web/config/paths.ts';
 import { applyPatch } from '../../design/edit-cake.ts';
 import { steps } from '../../steps/steps.ts';
+import { fromCheck } from '../../steps/use-step.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { Aloud } from './estimate-lines.tsx';
 
 type Props = {
+  /** The page this is on; no link leads to where one is. */
+  readonly step: OrderStep;
   readonly advice: readonly Advice[];
   readonly keepCool: string;
   /** Called when a link leads away from here, to close a drawer. */
@@ -23,7 +26,7 @@ const tones: Readonly<Record<Advice['level'], Tone>> = {
 const rank: Readonly<Record<Advice['level'], number>> = { stop: 0, care: 1, ok: 2 };
 
 /** What to look after, the gravest first, each with what to do instead. */
-export function AdviceList({ advice, keepCool, onLeave }: Props) {
+export function AdviceList({ step, advice, keepCool, onLeave }: Props) {
   const sorted = advice.toSorted((a, b) => rank[a.level] - rank[b.level]);
   const grave = sorted.filter((it) => it.level !== 'ok');
   return (
@@ -31,7 +34,7 @@ export function AdviceList({ advice, keepCool, onLeave }: Props) {
       {sorted.length > 0 && (
         <ul className="grid gap-3">
           {sorted.map((it) => (
-            <AdviceItem key={`${it.code} ${it.about}`} advice={it} onLeave={onLeave} />
+            <AdviceItem key={`${it.code} ${it.about}`} step={step} advice={it} onLeave={onLeave} />
           ))}
         </ul>
       )}
@@ -42,12 +45,13 @@ export function AdviceList({ advice, keepCool, onLeave }: Props) {
 }
 
 type ItemProps = {
+  readonly step: OrderStep;
   readonly advice: Advice;
   readonly onLeave?: (() => void) | undefined;
 };
 
 /** One piece of advice; its ways out are applied in one press, with Undo. */
-export function AdviceItem({ advice, onLeave }: ItemProps) {
+export function AdviceItem({ step, advice, onLeave }: ItemProps) {
   const { values, change } = useWizard();
   return (
     <li className="flex gap-2.5 text-sm">
@@ -70,13 +74,16 @@ export function AdviceItem({ advice, onLeave }: ItemProps) {
                 {way.label}
               </Button>
             ))}
-            <Link
-              to={paths.orderStep(advice.step)}
-              onClick={onLeave}
-              className="link inline-flex min-h-11 items-center px-2"
-            >
-              {steps[advice.step].name}
-            </Link>
+            {advice.step !== step && (
+              <Link
+                to={paths.orderStep(advice.step)}
+                state={step === 'check' ? fromCheck : null}
+                onClick={onLeave}
+                className="link inline-flex min-h-11 items-center px-2"
+              >
+                To {steps[advice.step].name.toLowerCase()}
+              </Link>
+            )}
           </div>
         )}
       </div>

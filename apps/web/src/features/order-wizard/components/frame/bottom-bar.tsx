@@ -2,12 +2,14 @@ import { type ReactNode, Suspense, lazy, useState } from 'react';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { Drawer } from '#web/components/ui/drawer.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
+import type { OrderStep } from '#web/config/paths.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { panelTitle } from './panel-title.ts';
 
 const CakePanel = lazy(async () => ({ default: (await import('./cake-panel.tsx')).CakePanel }));
 
 type Props = {
+  readonly step: OrderStep;
   /** The page's one primary action. */
   readonly action: ReactNode;
   readonly back: ReactNode;
@@ -17,7 +19,7 @@ type Props = {
  * The way on. On a wide screen it stands under the answers; on a narrow one it stays at the foot
  * of the screen with the running total, which opens the drawing, the estimate and the advice.
  */
-export function BottomBar({ action, back }: Props) {
+export function BottomBar({ step, action, back }: Props) {
   const [open, setOpen] = useState(false);
   const { values, design } = useWizard();
   return (
@@ -30,12 +32,12 @@ export function BottomBar({ action, back }: Props) {
         <div className="min-w-0 lg:hidden">
           <RunningTotal onOpen={() => setOpen(true)} />
         </div>
-        {action}
+        <div className="shrink-0">{action}</div>
         <div className="hidden lg:block">{back}</div>
       </div>
       <Drawer open={open} onClose={() => setOpen(false)} title={panelTitle(values, design)}>
         <Suspense fallback={<Pending what="Drawing your cake…" />}>
-          <CakePanel onLeave={() => setOpen(false)} />
+          <CakePanel step={step} onLeave={() => setOpen(false)} />
         </Suspense>
       </Drawer>
     </>
@@ -62,7 +64,9 @@ function RunningTotal({ onOpen }: { readonly onOpen: () => void }) {
           : formatMoney(estimate.price.totalMinor, estimate.price.currency, menu.studio.locale)}
       </span>
       <span className="text-sm font-semibold text-cobalt underline underline-offset-3">
-        {worries === 0 ? 'See your cake' : `See your cake and ${worries} notes`}
+        {worries === 0
+          ? 'See your cake'
+          : `See your cake, ${worries} ${worries === 1 ? 'note' : 'notes'}`}
       </span>
     </button>
   );

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { DayAnswer } from '#shared/contracts/dates.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
@@ -27,6 +27,14 @@ export function DateWatch() {
   const verdict = dateVerdict(answer, windowStart, askWithoutDate);
   const [lastStood, setLastStood] = useState<OrderForm | null>(null);
 
+  const box = useRef<HTMLDivElement>(null);
+  const shown = date !== null && answer !== null && (verdict === 'lost' || verdict === 'to-ask');
+
+  // It stands at the foot of the screen and must not cover what is being typed in.
+  useEffect(() => {
+    if (shown) document.activeElement?.scrollIntoView({ block: 'center' });
+  }, [shown]);
+
   // The answer is about these very answers only once typing has rested.
   if (verdict === 'stands' && rested === design && lastStood !== values) setLastStood(values);
   if (date === null || answer === null || rested !== design) return null;
@@ -44,8 +52,9 @@ export function DateWatch() {
   };
 
   return (
-    <div className="sticky bottom-20 z-10 lg:bottom-4">
+    <div ref={box} className="sticky bottom-20 z-10 bg-enamel lg:bottom-4">
       <Notice
+        className={verdict === 'lost' ? 'border-2 border-berry' : 'border-2 border-butter'}
         tone={verdict === 'lost' ? 'berry' : 'butter'}
         live="assertive"
         title={

@@ -34,6 +34,7 @@ export function StepPage({ step, children }: Props) {
       {children}
       {step !== 'day' && <DateWatch />}
       <BottomBar
+        step={step}
         action={next !== null && <Button type="submit">{steps[next].onwards}</Button>}
         back={
           before !== null && (

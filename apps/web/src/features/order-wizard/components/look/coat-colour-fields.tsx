@@ -3,7 +3,7 @@ import { colourPicks, nearerBases, reachableTint, type Reach } from '#shared/kit
 import { formatList } from '#shared/dates/format.ts';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { baseOf } from '../../design/as-it-comes-out.ts';
-import { colourName } from '../../design/colour-name.ts';
+import { colourName, photoColour } from '../../design/colour-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { ColourDot } from './colour-dot.tsx';
 import { OwnColour } from './own-colour.tsx';
@@ -43,10 +43,9 @@ export function CoatColourFields({ coating }: { readonly coating: Coating }) {
           { value: plain, label: 'As it is', picture: <ColourDot colour={base} /> },
           ...wanted.map((colour) => {
             const tint = reachableTint(colour, base);
-            const photo = fromPhotos.includes(colour) ? ' from your photo' : '';
             return {
               value: colour,
-              label: `${colourName(colour)}${photo}${reachWords[tint.reach]}`,
+              label: `${photoColour(colour, fromPhotos) ?? colourName(colour)}${reachWords[tint.reach]}`,
               picture: <ColourDot colour={tint.reached} />,
             };
           }),

@@ -11,11 +11,11 @@ export function OwnColour({ label, onChoose }: Props) {
   const id = useId();
   const [colour, setColour] = useState('#d9767c');
   return (
-    <div className="flex flex-wrap items-end gap-3">
-      <div className="grid gap-1.5">
-        <label htmlFor={id} className="font-semibold">
-          {label}
-        </label>
+    <div className="grid gap-1.5">
+      <label htmlFor={id} className="font-semibold">
+        {label}
+      </label>
+      <div className="flex gap-3">
         <input
           id={id}
           type="color"
@@ -23,10 +23,10 @@ export function OwnColour({ label, onChoose }: Props) {
           className="h-11 w-20 cursor-pointer rounded-action border-[1.5px] border-slate bg-enamel p-1"
           onChange={(event) => setColour(event.target.value.toLowerCase())}
         />
+        <Button kind="secondary" onClick={() => onChoose(colour)}>
+          Take it
+        </Button>
       </div>
-      <Button kind="secondary" onClick={() => onChoose(colour)}>
-        Take it
-      </Button>
     </div>
   );
 }

@@ -1,6 +1,6 @@
 import { colourPicks } from '#shared/kitchen/colour.ts';
 import { ChipChoices } from '#web/components/ui/chips.tsx';
-import { colourName } from '../../design/colour-name.ts';
+import { colourName, photoColour } from '../../design/colour-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { ColourDot } from './colour-dot.tsx';
@@ -22,31 +22,36 @@ export function PaletteFields() {
     if (palette.length <= mostColours) change({ look: { ...look, palette } });
   };
   return (
-    <div className="grid gap-4">
-      <ChipChoices
-        name="look.palette"
-        legend="Colours for what goes on it"
-        optional
-        hint={
-          full
-            ? 'That is five; take one out to choose another.'
-            : 'Up to five, for flowers, piping and ribbon.'
-        }
-        error={problem}
-        chips={offered.map((colour) => ({
-          value: colour,
-          label: `${colourName(colour)}${fromPhotos.includes(colour) ? ' from your photo' : ''}`,
-          picture: <ColourDot colour={colour} />,
-        }))}
-        value={look.palette}
-        onValue={put}
-      />
-      <OwnColour
-        label="Another colour for it"
-        onChoose={(colour) => {
-          if (!look.palette.includes(colour)) put([...look.palette, colour]);
-        }}
-      />
-    </div>
+    <details open={look.palette.length > 0 || undefined}>
+      <summary className="link inline-flex min-h-11 items-center">
+        Colours for what goes on it
+      </summary>
+      <div className="grid gap-4 pt-2">
+        <ChipChoices
+          name="look.palette"
+          legend="As many as five"
+          optional
+          hint={
+            full
+              ? 'That is five; take one out to choose another.'
+              : 'For flowers, piping and ribbon; your photos’ colours come first.'
+          }
+          error={problem}
+          chips={offered.map((colour) => ({
+            value: colour,
+            label: photoColour(colour, fromPhotos) ?? colourName(colour),
+            picture: <ColourDot colour={colour} />,
+          }))}
+          value={look.palette}
+          onValue={put}
+        />
+        <OwnColour
+          label="Another colour for it"
+          onChoose={(colour) => {
+            if (!look.palette.includes(colour)) put([...look.palette, colour]);
+          }}
+        />
+      </div>
+    </details>
   );
 }
