@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
+import compression from 'compression';
 import express, { type Express } from 'express';
 import { pinoHttp } from 'pino-http';
 import type { Deps } from '#api/modules/deps.ts';
@@ -11,6 +12,9 @@ import { handleError, noSuchRoute } from './problem.ts';
 import type { RouteContract } from './route.ts';
 import { securityHeaders } from './security-headers.ts';
 import { sessions } from './session.ts';
+
+/** Answers from this size on are sent compressed where the browser takes it, bytes. */
+const compressFrom = 2048;
 
 /** Largest JSON body: an order with eight photos' notes is under 40 kB. */
 const bodyLimit = '256kb';
@@ -57,6 +61,7 @@ export function createApp(deps: Deps): App {
   if (hasClient) app.use(clientAssets(env.clientDir));
   app.use(guardOrigin(env.origins));
   app.use(express.json({ limit: bodyLimit }));
+  app.use(compression({ threshold: compressFrom }));
   for (const feature of everyFeature) if (feature.anonymous) app.use(feature.router);
   app.use('/api', sessions(deps));
   for (const feature of everyFeature) if (!feature.anonymous) app.use(feature.router);

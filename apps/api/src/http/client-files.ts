@@ -12,6 +12,10 @@ const yearMs = 365 * 86_400_000;
  */
 export function clientAssets(folder: string): Router {
   const router = Router();
+  router.use((request, _response, next) => {
+    // No call is a file: the disk is not asked.
+    next(request.path.startsWith('/api') ? 'router' : undefined);
+  });
   router.use(
     '/assets',
     expressStaticGzip(path.join(folder, 'assets'), {
