@@ -11,8 +11,9 @@ import { Sponge } from '#api/db/models/sponge.ts';
 export async function formulaVersionOf({ part, id }: BatchSource): Promise<string | null> {
   if (part === 'custard') return custardInside(await formulaVersionOf({ part: 'style', id }));
   const row = await findPart(part, id);
-  if (row?.formulaId == null) return null;
-  return (await Formula.findByPk(row.formulaId))?.currentVersionId ?? null;
+  const formulaId = row?.formulaId ?? null;
+  if (formulaId === null) return null;
+  return (await Formula.findByPk(formulaId))?.currentVersionId ?? null;
 }
 
 function findPart(part: Exclude<BatchSource['part'], 'custard'>, id: string) {
