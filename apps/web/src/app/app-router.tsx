@@ -1,7 +1,9 @@
+import { Suspense } from 'react';
 import { Route, Routes } from 'react-router-dom';
 import { paths } from '#web/config/paths.ts';
 import { lazyPage } from '#web/lib/lazy-page.ts';
 import { NotFoundPage } from '#web/routes/not-found-page.tsx';
+import { PagePending } from './page-frame.tsx';
 import { PublicLayout } from './public-layout.tsx';
 import { ScrollToTop } from './scroll-to-top.tsx';
 
@@ -33,6 +35,7 @@ const ForgottenPasswordPage = lazyPage(
   async () =>
     (await import('#web/routes/sign-in/forgotten-password-page.tsx')).ForgottenPasswordPage,
 );
+const StaffRouter = lazyPage(async () => (await import('./staff-router.tsx')).StaffRouter);
 const LinkPage = lazyPage(async () => (await import('#web/routes/sign-in/link-page.tsx')).LinkPage);
 
 /** Every address and its page; each page loads apart, the staff's with their own frame. */
@@ -41,6 +44,14 @@ export function AppRouter() {
     <>
       <ScrollToTop />
       <Routes>
+        <Route
+          path={`${paths.staff}/*`}
+          element={
+            <Suspense fallback={<PagePending />}>
+              <StaffRouter />
+            </Suspense>
+          }
+        />
         <Route element={<PublicLayout />}>
           <Route path={paths.home} element={<HomePage />} />
           <Route path={paths.menu} element={<MenuPage />} />

@@ -1,0 +1,81 @@
+import type { Menu } from '#shared/contracts/menu.ts';
+import { statusWords } from '#web/components/order/status-mark.tsx';
+import { Button } from '#web/components/ui/button.tsx';
+import { Dialog } from '#web/components/ui/dialog.tsx';
+import { Failure } from '#web/components/ui/failure.tsx';
+import { Notice } from '#web/components/ui/notice.tsx';
+import { Pending } from '#web/components/ui/pending.tsx';
+import { useStaffOrder } from '../api/get-staff-order.ts';
+import type { ActProps } from './act-props.ts';
+import { CollectDialog } from './collect-dialog.tsx';
+import { ConfirmDialog } from './confirm-dialog.tsx';
+import { DeclineDialog } from './decline-dialog.tsx';
+import { MarkDialog } from './mark-dialog.tsx';
+import { MoveDialog } from './move-dialog.tsx';
+import type { OrderAct } from './order-act.ts';
+
+type Props = {
+  readonly number: number;
+  readonly act: OrderAct;
+  readonly menu: Menu;
+  readonly onClose: () => void;
+};
+
+const titles: Readonly<Record<OrderAct, (number: number) => string>> = {
+  confirm: (number) => `Confirm No. ${number}`,
+  decline: (number) => `Decline No. ${number}`,
+  move: (number) => `Move the pickup of No. ${number}`,
+  start: (number) => `Start making No. ${number}`,
+  ready: (number) => `No. ${number} is ready`,
+  collect: (number) => `No. ${number} is collected`,
+  uncollected: (number) => `Nobody came for No. ${number}`,
+};
+
+/** One act on one order, from wherever it was asked for; it always works on the order as it is now. */
+export function OrderActionDialog({ number, act, menu, onClose }: Props) {
+  const { data, isPending, error, refetch } = useStaffOrder(number);
+  return (
+    <Dialog open onClose={onClose} title={titles[act](number)}>
+      {isPending ? (
+        <Pending what="Fetching the order…" />
+      ) : data === undefined ? (
+        <Failure error={error} onRetry={() => void refetch()} />
+      ) : (
+        <Act order={data} act={act} menu={menu} onDone={onClose} onClose={onClose} />
+      )}
+    </Dialog>
+  );
+}
+
+function Act({ act, ...props }: ActProps & { readonly act: OrderAct }) {
+  switch (act) {
+    case 'confirm':
+      return <ConfirmDialog {...props} />;
+    case 'decline':
+      return props.order.can.decline ? <DeclineDialog {...props} /> : <MovedOn {...props} />;
+    case 'move':
+      return props.order.can.move ? <MoveDialog {...props} /> : <MovedOn {...props} />;
+    case 'collect':
+      return props.order.can.collect ? <CollectDialog {...props} /> : <MovedOn {...props} />;
+    case 'start':
+    case 'ready':
+    case 'uncollected':
+      return props.order.can[act] ? <MarkDialog act={act} {...props} /> : <MovedOn {...props} />;
+  }
+}
+
+/** The order stands elsewhere than the page that offered this thought. */
+function MovedOn({ order, onClose }: ActProps) {
+  return (
+    <>
+      <Notice tone="butter" title="This cannot be done any more" live="polite">
+        <p>
+          No. {order.number} is now: {statusWords[order.status]}.
+        </p>
+      </Notice>
+      <div>
+        <Button onClick={onClose}>Close</Button>
+      </div>
+    </>
+  );
+}

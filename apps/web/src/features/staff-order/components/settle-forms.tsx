@@ -1,0 +1,112 @@
+import { useState } from 'react';
+import * as z from 'zod/mini';
+import type { Advice } from '#shared/contracts/estimates.ts';
+import {
+  type DeclaredAllergy,
+  type StaffOrder,
+  answerAllergy,
+  liftStop,
+} from '#shared/contracts/staff.ts';
+import { Button } from '#web/components/ui/button.tsx';
+import { errorOf } from '#web/components/ui/form-problems.tsx';
+import { TextArea } from '#web/components/ui/text-area.tsx';
+import { useToast } from '#web/components/ui/toast.tsx';
+import { useContractForm } from '#web/lib/use-contract-form.ts';
+import { ActFailure } from '../actions/act-failure.tsx';
+import { useAnswerAllergy } from '../api/answer-allergy.ts';
+import { useLiftStop } from '../api/lift-stop.ts';
+
+const answerForm = z.omit(answerAllergy, { rowVersion: true });
+const liftForm = z.omit(liftStop, { rowVersion: true, about: true });
+
+type AnswerProps = { readonly order: StaffOrder; readonly allergy: DeclaredAllergy };
+
+/** Records the talk about one declared allergy. */
+export function AnswerAllergyForm({ order, allergy }: AnswerProps) {
+  const { form, failure, submit } = useContractForm(answerForm, { text: '' });
+  const answer = useAnswerAllergy(order.number);
+  const toast = useToast();
+  const [open, setOpen] = useState(false);
+  if (!open) {
+    return (
+      <div>
+        <Button kind="secondary" aria-expanded={false} onClick={() => setOpen(true)}>
+          Record the talk
+        </Button>
+      </div>
+    );
+  }
+  return (
+    <form
+      noValidate
+      className="grid gap-3"
+      onSubmit={submit(async ({ text }) => {
+        await answer.mutateAsync({ text, allergyId: allergy.id, rowVersion: order.rowVersion });
+        toast({ message: 'The talk is noted with the order.' });
+      })}
+    >
+      <ActFailure error={failure} />
+      <TextArea
+        {...form.register('text')}
+        label="What was said and settled"
+        hint="With whom, and what they decided. It stays with the order; what the cake contains stays as it is."
+        rows={3}
+        error={errorOf(form.formState.errors, 'text')}
+      />
+      <div className="flex flex-wrap gap-3">
+        <Button type="submit" pending={answer.isPending}>
+          Note it
+        </Button>
+        <Button kind="quiet" onClick={() => setOpen(false)}>
+          Not yet
+        </Button>
+      </div>
+    </form>
+  );
+}
+
+type LiftProps = { readonly order: StaffOrder; readonly blocker: Advice };
+
+/** The owner's written reason to take an order against a stop. */
+export function LiftStopForm({ order, blocker }: LiftProps) {
+  const { form, failure, submit } = useContractForm(liftForm, { reason: '' });
+  const lift = useLiftStop(order.number);
+  const toast = useToast();
+  const [open, setOpen] = useState(false);
+  if (!open) {
+    return (
+      <div>
+        <Button kind="danger" aria-expanded={false} onClick={() => setOpen(true)}>
+          Take it all the same
+        </Button>
+      </div>
+    );
+  }
+  return (
+    <form
+      noValidate
+      className="grid gap-3"
+      onSubmit={submit(async ({ reason }) => {
+        await lift.mutateAsync({ reason, about: blocker.about, rowVersion: order.rowVersion });
+        toast({ message: 'Your reason is noted; the customer reads it.' });
+      })}
+    >
+      <ActFailure error={failure} />
+      <TextArea
+        {...form.register('reason')}
+        label="Why you take it all the same"
+        hint="It stays with the order for good, and the customer reads and accepts it."
+        rows={3}
+        error={errorOf(form.formState.errors, 'reason')}
+      />
+      <div className="flex flex-wrap gap-3">
+        <Button type="submit" kind="danger" pending={lift.isPending}>
+          Take it, for this reason
+        </Button>
+        <Button kind="quiet" onClick={() => setOpen(false)}>
+          Not yet
+        </Button>
+      </div>
+    </form>
+  );
+}
