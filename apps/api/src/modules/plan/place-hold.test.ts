@@ -27,7 +27,7 @@ import type { TestApp } from '#api/testing/test-app.ts';
 import type { Answer } from '#api/testing/test-client.ts';
 import { TestClock } from '#api/testing/test-clock.ts';
 import { expireHolds } from './expire-holds.command.ts';
-import { keepPlace, lengthenGuestHold, releasePlace } from './keep-place.command.ts';
+import { finishWork, keepPlace, lengthenGuestHold, releasePlace } from './keep-place.command.ts';
 import { currentBook } from './kept-book.ts';
 import { activeHoldsOf, fitOf, hasPlace } from './plan.queries.ts';
 import { replanOrder } from './replan-order.command.ts';
@@ -300,6 +300,22 @@ describe('planning an order anew', () => {
       code: 'date-gone',
     });
     expect(await hasPlace(order.id)).toBe(true);
+  });
+
+  it('leaves work that has begun where it is, and moves only the pickup it still suits', async () => {
+    const order = await send(form(date));
+    await inTransaction(() => finishWork(order.id, null));
+    const before = await Task.findAll({ where: { orderId: order.id }, order: ['id'] });
+    expect(new Set(before.map((it) => it.state))).toEqual(new Set(['finished']));
+    const wish = { ...(await wishFor(order, date, 930)), mustFit: true };
+    const { outcome } = await replanOrder(wish, () => Promise.resolve(null));
+    expect(outcome).toMatchObject({ answer: 'open', window: { date, startMinute: 930 } });
+    const after = await Task.findAll({ where: { orderId: order.id }, order: ['id'] });
+    expect(after.map((it) => it.id)).toEqual(before.map((it) => it.id));
+    const sunday = { ...(await wishFor(order, '2027-08-15')), mustFit: true };
+    await expect(replanOrder(sunday, () => Promise.resolve(null))).rejects.toMatchObject({
+      code: 'date-gone',
+    });
   });
 
   it('says in a sentence whether it fits', async () => {

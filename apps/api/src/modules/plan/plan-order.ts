@@ -5,6 +5,7 @@ import type { DateReason } from '#shared/contracts/dates.ts';
 import type { Design } from '#shared/contracts/design.ts';
 import { fromUtcMinute } from '#shared/dates/local-time.ts';
 import type { Demand, PlannedOrder, Window } from '#shared/dates/model.ts';
+import type { WorkTimes } from '#shared/dates/work-times.ts';
 import { currentDatabase } from '#api/db/current-database.ts';
 import { readPlanVersions, takeNextPlanVersion } from '#api/db/plan-versions.ts';
 import { inTransaction, isInTransaction } from '#api/db/transaction.ts';
@@ -31,6 +32,8 @@ export type Wish = {
   readonly pickup: PickupChoice;
   /** Notice, how far the book is open and places kept back bind customers, not the staff. */
   readonly asStaff: boolean;
+  /** Times the order was planned with before, where they are not the studio's present ones. */
+  readonly workTimes?: WorkTimes;
   /** Work that has begun stays where it is; only its pickup moves. */
   readonly begun: boolean;
 };
@@ -114,7 +117,8 @@ type Answered = Omit<WindowPlan, 'answer'> & { readonly answer: FoundPlan['answe
 
 async function planAt(book: KeptBook, wish: Wish): Promise<Answered> {
   const { open, settings } = book;
-  const { demand: full } = demandOf(wish.design, await freshMenu(), settings);
+  const times = { ...settings, workTimes: wish.workTimes ?? settings.workTimes };
+  const { demand: full } = demandOf(wish.design, await freshMenu(), times);
   const demand: Demand = wish.asStaff ? { ...full, noticeDays: 0 } : full;
   const choice = { date: wish.pickup.date, startMinute: wish.pickup.windowStart };
   const standing = open.standing.orders.filter((it) => it.orderId !== wish.orderId);

@@ -3,9 +3,9 @@ import type { DatesResponse } from '#shared/contracts/dates.ts';
 import type { Design } from '#shared/contracts/design.ts';
 import { planWindow } from '#shared/dates/answer-dates.ts';
 import { formatDuration, formatList, formatWeekday } from '#shared/dates/format.ts';
-import { addDays, fromUtcMinute, localAtUtcMinute } from '#shared/dates/local-time.ts';
+import { addDays, localAtUtcMinute } from '#shared/dates/local-time.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
-import type { PlannedOrder, Window } from '#shared/dates/model.ts';
+import type { PlannedOrder } from '#shared/dates/model.ts';
 import { currentClock } from '#api/db/current-database.ts';
 import { Assignment } from '#api/db/models/assignment.ts';
 import { Hold } from '#api/db/models/hold.ts';
@@ -15,7 +15,6 @@ import { answersOf } from './answers-of.ts';
 import { demandOf } from './demand-of.ts';
 import { bookLimits, currentBook } from './kept-book.ts';
 import type { KeptBook } from './kept-book.ts';
-import { loadHours } from './load-supply.ts';
 import { logFaults } from './log-faults.ts';
 import { loadPlanSettings } from './plan-settings.ts';
 
@@ -119,16 +118,4 @@ export async function activeHoldsOf(
 /** For `order_revisions.work_time_version_id`. */
 export async function currentWorkTimeVersionId(): Promise<string> {
   return (await loadPlanSettings()).workTimeVersionId;
-}
-
-/** A pickup window as the hours have it now, or null when there is none. */
-export async function windowOf(
-  pickup: PickupChoice,
-): Promise<{ readonly minutes: number; readonly startAt: Date } | null> {
-  const { windows } = await loadHours(pickup.date, pickup.date);
-  const window = windows
-    .get(pickup.date)
-    ?.find((it: Window) => it.startMinute === pickup.windowStart);
-  if (window === undefined) return null;
-  return { minutes: window.minutes, startAt: fromUtcMinute(window.startAt) };
 }

@@ -1,8 +1,10 @@
 import type { Design } from '#shared/contracts/design.ts';
+import { OrderRevision } from '#api/db/models/order-revision.ts';
 import { takeNextPlanVersion } from '#api/db/plan-versions.ts';
 import type { PickupChoice } from './plan.queries.ts';
 import { dateGone, planAndWrite } from './plan-order.ts';
 import type { FoundPlan, PlacedPickup } from './plan-order.ts';
+import { loadWorkTimes } from './plan-settings.ts';
 import { hasBegun, removeWork, storeWork } from './store-work.ts';
 
 export type ReplanWish = {
@@ -32,7 +34,9 @@ export async function replanOrder<T>(
 ): Promise<{ readonly outcome: ReplanOutcome; readonly value: T }> {
   const { orderId, revisionId, itemId, design, pickup, mustFit } = wish;
   const begun = await hasBegun(orderId);
-  const planned = { orderId, design, pickup, asStaff: true, begun };
+  const { workTimeVersionId } = await OrderRevision.findByPk(revisionId, { rejectOnEmpty: true });
+  const workTimes = await loadWorkTimes(workTimeVersionId);
+  const planned = { orderId, design, pickup, asStaff: true, begun, workTimes };
   return planAndWrite(planned, async (plan) => {
     const unplanned = plan.planned === null && !begun;
     if (unplanned && mustFit) throw await dateGone(planned, null);
