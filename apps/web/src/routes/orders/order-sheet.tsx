@@ -9,6 +9,7 @@ import { Rim } from '#web/components/ui/rim.tsx';
 import { Section } from '#web/components/ui/section.tsx';
 import { HeaderSlot } from '#web/components/ui/site-header.tsx';
 import { paths } from '#web/config/paths.ts';
+import { AddPhoto } from '#web/features/my-order/components/add-photo.tsx';
 import { AdviceList } from '#web/features/my-order/components/advice-list.tsx';
 import { ChosenList } from '#web/features/my-order/components/chosen-list.tsx';
 import { HoldNotice } from '#web/features/my-order/components/hold-notice.tsx';
@@ -90,9 +91,10 @@ export function OrderSheet({ order, menu }: Props) {
         <Section title="What you asked for">
           <ChosenList order={order} menu={menu} />
         </Section>
-        {order.photos.length > 0 && (
+        {(order.photos.length > 0 || order.can.addPhotos) && (
           <Section title="Photos">
-            <PhotoRow photos={order.photos} />
+            {order.photos.length > 0 && <PhotoRow photos={order.photos} />}
+            {order.can.addPhotos && <AddPhoto code={order.code} />}
           </Section>
         )}
         <Section title="Messages">

@@ -3,14 +3,12 @@ import { useFormContext } from 'react-hook-form';
 import { Button } from '#web/components/ui/button.tsx';
 import { VisuallyHidden } from '#web/components/ui/visually-hidden.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
+import { acceptedPhotos } from '#web/lib/accepted-photos.ts';
 import type { OrderForm } from '../../draft/empty-order.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { PhotoRow } from './photo-row.tsx';
 import { PhotoUnderWay } from './photo-under-way.tsx';
-
-/** What browsers show by themselves; leaving HEIC out makes phones convert it as they hand it over. */
-const accepted = 'image/jpeg,image/png,image/webp,image/avif,image/gif';
 
 /** Pictures to go by, each with a note; they go up while other questions are answered. */
 export function PhotoFields() {
@@ -82,7 +80,7 @@ export function PhotoFields() {
           <input
             id={id}
             type="file"
-            accept={accepted}
+            accept={acceptedPhotos}
             multiple
             className="peer sr-only"
             onChange={(event) => {
