@@ -13,8 +13,8 @@ export type UploadOptions = {
 };
 
 /**
- * Receives one file into a temporary place and removes it once the answer is out, whatever that
- * answer is. Its name and its declared type are not looked at.
+ * Receives one file into a temporary place for `useUpload`, and removes it whatever the answer is.
+ * Its name and its declared type are not looked at.
  */
 export function receiveUpload({ field, folder, maxBytes }: UploadOptions): RequestHandler {
   const receive = multer({
@@ -36,15 +36,29 @@ export function receiveUpload({ field, folder, maxBytes }: UploadOptions): Reque
   };
 }
 
-/** Where the received file lies. @throws `invalid-input` when none was sent */
-export function uploadedFile(request: Request, field: string): string {
+/**
+ * Does something with the received file; its bytes are gone before the answer leaves.
+ * @throws `invalid-input` when none was sent
+ */
+export async function useUpload<T>(
+  request: Request,
+  field: string,
+  work: (file: string) => Promise<T>,
+): Promise<T> {
   const { file } = request;
-  if (file !== undefined) return path.resolve(file.path);
-  throw new AppError('invalid-input', {
-    issues: [{ path: [field], message: 'Choose a picture first.' }],
-  });
+  if (file === undefined) {
+    throw new AppError('invalid-input', {
+      issues: [{ path: [field], message: 'Choose a picture first.' }],
+    });
+  }
+  try {
+    return await work(path.resolve(file.path));
+  } finally {
+    await rm(file.path, { force: true });
+  }
 }
 
+/** Where it was refused before anybody used it. */
 function removeAfter(request: Request, response: Response): void {
   response.once('close', () => {
     if (request.file === undefined) return;

@@ -6,6 +6,7 @@ import path from 'node:path';
 import { databaseFile } from '#api/db/database.ts';
 import { migrateDatabase } from '#api/db/migrate.ts';
 import { migrations } from '#api/db/migrations/list.ts';
+import { PlainConnection } from '#api/db/plain-connection.ts';
 
 const prefix = 'tierwell-tests-';
 const seedersDir = path.join(import.meta.dirname, '../db/seeders');
@@ -36,9 +37,23 @@ export async function templateFile(
   const dir = await newDataDir();
   await migrateDatabase(databaseFile(dir));
   await prepare(dir);
+  await foldIn(databaseFile(dir));
   await rename(databaseFile(dir), file);
   rmSync(dir, { recursive: true, force: true });
   return file;
+}
+
+/**
+ * Brings what is still in the write-ahead log into the file itself, which alone is kept: closing
+ * does so too, but not while another connection of the process is still on its way out.
+ */
+async function foldIn(file: string): Promise<void> {
+  const connection = await PlainConnection.open(file, 10_000);
+  try {
+    await connection.exec('PRAGMA wal_checkpoint(TRUNCATE)');
+  } finally {
+    await connection.close();
+  }
 }
 
 /** Puts a copy of a template where a database of the folder belongs. */

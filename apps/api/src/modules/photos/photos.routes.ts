@@ -8,7 +8,7 @@ import { Order } from '#api/db/models/order.ts';
 import { limitByAddress } from '#api/http/rate-limit.ts';
 import { createRoutes } from '#api/http/route.ts';
 import type { FeatureRoutes } from '#api/http/route.ts';
-import { receiveUpload, uploadedFile } from '#api/http/upload.ts';
+import { receiveUpload, useUpload } from '#api/http/upload.ts';
 import { validate } from '#api/http/validate.ts';
 import { authorise, reveal } from '#api/modules/authorise.ts';
 import type { Deps } from '#api/modules/deps.ts';
@@ -60,8 +60,9 @@ export function photosRoutes(deps: Deps): FeatureRoutes {
     },
     async ({ actor, request }) => {
       const { kind, note } = validate(customersFields, { ...request.body });
-      const file = uploadedFile(request, field);
-      const kept = await keepPhoto(deps, { file, kind, note, actor, order: null });
+      const kept = await useUpload(request, field, (file) =>
+        keepPhoto(deps, { file, kind, note, actor, order: null }),
+      );
       return { photo: presentPhoto(kept.photo), claimKey: kept.claimKey ?? '' };
     },
     ...receive,
@@ -84,8 +85,10 @@ export function photosRoutes(deps: Deps): FeatureRoutes {
       reveal(mayOrderAs(actor, 'see', order));
       authorise(actor, mayOrderAs(actor, 'add-photos', order));
       const { kind, note } = validate(customersFields, { ...request.body });
-      const file = uploadedFile(request, field);
-      return presentPhoto((await keepPhoto(deps, { file, kind, note, actor, order })).photo);
+      const { photo: kept } = await useUpload(request, field, (file) =>
+        keepPhoto(deps, { file, kind, note, actor, order }),
+      );
+      return presentPhoto(kept);
     },
     ...receive,
   );
@@ -106,8 +109,10 @@ export function photosRoutes(deps: Deps): FeatureRoutes {
       authorise(actor, actor.kind === 'staff');
       const order = await findOrderByNumber(Number(params.number));
       const { kind, note } = validate(staffFields, { ...request.body });
-      const file = uploadedFile(request, field);
-      return presentPhoto((await keepPhoto(deps, { file, kind, note, actor, order })).photo);
+      const { photo: kept } = await useUpload(request, field, (file) =>
+        keepPhoto(deps, { file, kind, note, actor, order }),
+      );
+      return presentPhoto(kept);
     },
     ...receive,
   );

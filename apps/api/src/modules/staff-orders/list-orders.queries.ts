@@ -65,10 +65,10 @@ export async function findOrders(query: ListOrdersQuery): Promise<FoundOrders> {
     const { status, count } = countRow.parse(row);
     byStatus.set(status, count);
   }
-  const wanted = query.status ?? orderStatuses;
+  const wanted: readonly OrderStatus[] = query.status ?? orderStatuses;
   return {
     ids: ids.map((row) => idRow.parse(row).id),
-    total: wanted.reduce<number>((sum, status) => sum + (byStatus.get(status) ?? 0), 0),
+    total: wanted.reduce((sum, status) => sum + (byStatus.get(status) ?? 0), 0),
     page,
     perPage,
     counts: Object.fromEntries(byStatus),
