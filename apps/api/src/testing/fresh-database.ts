@@ -31,7 +31,9 @@ export async function openTestDatabase({
   clock = new TestClock(),
   seeded,
 }: TestDatabaseOptions = {}): Promise<TestDatabase> {
-  const template = await templateFile(seeded?.name ?? 'empty', async (dir) => {
+  // What is seeded is dated: a test set in May must not be given what another seeded in June.
+  const name = seeded === undefined ? 'empty' : `${seeded.name}-${clock.now().getTime()}`;
+  const template = await templateFile(name, async (dir) => {
     if (!seeded) return;
     const filling = await openDatabase(dir, { clock, logger: quiet });
     try {
