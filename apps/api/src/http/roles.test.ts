@@ -3,8 +3,11 @@ import sharp from 'sharp';
 import * as z from 'zod/mini';
 import { idempotencyHeader } from '#shared/contracts/headers.ts';
 import { photo as photoView } from '#shared/contracts/photos.ts';
+import { Closure } from '#api/db/models/closure.ts';
+import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
+import { SentMail } from '#api/db/models/sent-mail.ts';
 import { Session } from '#api/db/models/session.ts';
 import { Token } from '#api/db/models/token.ts';
 import { User } from '#api/db/models/user.ts';
@@ -51,6 +54,7 @@ const everybody: Cells = ['may', 'may', 'may', 'may', 'may', 'may', 'may'];
 const whoeverSignedIn: Cells = [401, 401, 'may', 'may', 'may', 'may', 'may'];
 const customers: Cells = [401, 401, 'may', 'may', 403, 403, 403];
 const staff: Cells = [401, 401, 403, 403, 'may', 'may', 'may'];
+const bakers: Cells = [401, 401, 403, 403, 403, 'may', 'may'];
 const owners: Cells = [401, 401, 403, 403, 403, 403, 'may'];
 /** Somebody else's order is no order. */
 const whoeverSeesIt: Cells = [404, 404, 404, 'may', 'may', 'may', 'may'];
@@ -67,6 +71,9 @@ type Scene = {
   readonly session: Session;
   /** A picture of no order yet. */
   readonly photo: Photo;
+  readonly allergy: DeclaredAllergy;
+  readonly mail: SentMail;
+  readonly closure: Closure;
 };
 
 type Call = {
@@ -90,6 +97,12 @@ const withOwnSession = (each: Line): Line => ({ ...each, ownSession: true });
 const post = (path: string, body?: unknown): Call => ({ method: 'POST', path, body });
 const put = (path: string, body?: unknown): Call => ({ method: 'PUT', path, body });
 const remove = (path: string): Call => ({ method: 'DELETE', path });
+
+/** Something done to an order by staff, which says which state of it they saw. */
+const onOrder =
+  (verb: string, body: object = {}): Line['call'] =>
+  ({ order }) =>
+    post(`/api/staff/orders/${order.number}/${verb}`, { rowVersion: order.rowVersion, ...body });
 
 const token = 'no such key';
 const password = 'plum jam on rye toast';
@@ -194,6 +207,40 @@ const table: Readonly<Record<string, Line>> = {
     remove(`/api/photos/${photo.id}?key=${encodeURIComponent(claimKey)}`),
   ),
 
+  // Orders, as staff have them.
+  'list-orders': line(staff, '/api/staff/orders'),
+  'see-staff-order': line(staff, ({ order }) => ({ path: `/api/staff/orders/${order.number}` })),
+  'look-at-confirmation': line(bakers, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/confirmation`,
+  })),
+  'confirm-order': line(bakers, onOrder('confirm')),
+  'decline-order': line(bakers, onOrder('decline', { reason: 'We are full.', offerDates: false })),
+  'move-order': line(bakers, onOrder('move', { date: day, windowStart: 600, note: '' })),
+  'start-order': line(bakers, onOrder('start')),
+  'mark-order-ready': line(staff, onOrder('ready')),
+  'collect-order': line(
+    staff,
+    onOrder('collected', { collectedBy: 'Ada Tarn', condition: '', photoId: null }),
+  ),
+  'mark-order-uncollected': line(staff, onOrder('uncollected')),
+  'answer-allergy': line(bakers, (scene) =>
+    onOrder(`allergies/${scene.allergy.id}/answer`, { text: 'We talked.' })(scene),
+  ),
+  // No stop stands on this order, which the owner alone is told.
+  'lift-stop': line(
+    [401, 401, 403, 403, 403, 403, 404],
+    onOrder('lift-stop', { about: 'egg', reason: 'We talked.' }),
+  ),
+  'renew-link': line(staff, onOrder('link')),
+  'write-staff-message': line(staff, onOrder('messages', { body: 'See you on Saturday.' })),
+  'see-mail': line(staff, ({ mail }) => ({ path: `/api/staff/mail/${mail.id}` })),
+  'send-mail-again': line(staff, ({ mail }) => post(`/api/staff/mail/${mail.id}/send-again`)),
+  'see-calendar': line(staff, `/api/staff/calendar?from=${day}&to=${day}`),
+  'block-day': line(bakers, () =>
+    post('/api/staff/closures', { date: '2027-12-25', reason: 'Holiday' }),
+  ),
+  'open-day': line(bakers, ({ closure }) => remove(`/api/staff/closures/${closure.id}`)),
+
   // The people of the studio.
   'list-people': line(owners, '/api/staff/people'),
   'invite-staff': line(owners, () =>
@@ -268,6 +315,34 @@ async function makeScene(actor: ActorName): Promise<Scene> {
       expires: later,
       absoluteExpiresAt: later,
     }),
+    allergy: await DeclaredAllergy.create({
+      revisionId: order.currentRevisionId ?? '',
+      position: 0,
+      allergen: 'egg',
+      severity: 'allergy',
+      guests: 1,
+    }),
+    closure: await Closure.create({
+      fromDate: '2027-12-24',
+      toDate: '2027-12-24',
+      kind: 'blocked',
+      reason: 'Holiday',
+    }),
+    mail: await SentMail.create({
+      template: 'order-received',
+      orderId: order.id,
+      fromAddress: 'hello@oxbowlane.example',
+      toAddress: 'ada@example.com',
+      subject: 'Your order',
+      html: '<p>Thank you.</p>',
+      text: 'Thank you.',
+      attachments: [],
+      messageId: `<${newId()}@oxbowlane.example>`,
+      uniqueKey: newId(),
+      state: 'sent',
+      nextAt: app.clock.now(),
+      sentAt: app.clock.now(),
+    }),
     photo: await Photo.create({
       kind: 'inspiration',
       claimKeyHash: hashKey(claimKey),
@@ -300,7 +375,7 @@ beforeAll(async () => {
     clock: new TestClock('2027-05-03T12:00:00Z'),
     seeded: seededStudio,
     env: () => ({ GOOGLE_CLIENT_ID: 'studio', GOOGLE_CLIENT_SECRET: 'a secret' }),
-    logger: createLogger('fatal'),
+    logger: createLogger('error'),
   });
   await setSecondFactorRequired(false);
   for (const role of ['counter', 'baker', 'owner'] as const) users.set(role, await addUser(role));

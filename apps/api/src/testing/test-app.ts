@@ -30,6 +30,8 @@ export type TestAppOptions = TestDatabaseOptions & {
 export async function startTestApp(options: TestAppOptions = {}): Promise<TestApp> {
   const opened = await openTestDatabase(options);
   const server = createServer();
+  // A test may be slow; a connection it comes back to is still there.
+  server.keepAliveTimeout = 600_000;
   server.listen(0, '127.0.0.1');
   await once(server, 'listening');
   const address = server.address();

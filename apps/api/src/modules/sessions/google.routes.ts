@@ -107,7 +107,10 @@ export function googleRoutes(deps: Deps): FeatureRoutes {
         response.redirect(303, `/sign-in?problem=${problem}`);
       delete request.session.google;
       if (request.query.error === 'access_denied') return stop('google-denied');
-      if (asked === undefined) return stop('google-failed');
+      // Without a code the strategy would take the request for a beginning.
+      if (asked === undefined || typeof request.query.code !== 'string') {
+        return stop('google-failed');
+      }
       const outcome = await finish(request, response);
       if ('problem' in outcome) return stop(outcome.problem);
       const result = await settleSignIn(request, asked.purpose, outcome.profile);

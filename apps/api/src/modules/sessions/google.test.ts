@@ -189,6 +189,15 @@ describe('when it does not work out', () => {
     expect(nobody.headers.get('Location')).toBe('/sign-in?problem=google-failed');
   });
 
+  it('the way back is asked for without an answer', async () => {
+    for (const query of ['', '?state=x', '?error=server_error', '?code=a&code=b']) {
+      const client = app.visitor();
+      await client.get('/api/auth/google');
+      const answer = await client.get(`/api/auth/google/callback${query}`);
+      expect(answer.headers.get('Location')).toBe('/sign-in?problem=google-failed');
+    }
+  });
+
   it('an answer is good once', async () => {
     const client = app.visitor();
     const back = await choose(await client.get('/api/auth/google'), {
