@@ -1,8 +1,10 @@
 import { Route, Routes } from 'react-router-dom';
 import { ResumeOrder } from '#web/features/order-wizard/components/resume-order.tsx';
+import { lazyPage } from '#web/lib/lazy-page.ts';
 import { OrderLayout } from './order-layout.tsx';
 import { OrderStepPage } from './order-step-page.tsx';
-import { SentPage } from './sent-page.tsx';
+
+const SentPage = lazyPage(async () => (await import('./sent-page.tsx')).SentPage);
 
 /** The pages of ordering: six steps over one draft, and the one after sending. */
 export function OrderRoutes() {

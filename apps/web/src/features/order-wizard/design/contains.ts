@@ -4,6 +4,7 @@ import type { DietId, LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { allergenLabel, allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
 import { clashesWith, dietClashes, isListed } from '#shared/kitchen/clashes.ts';
 import { formatList } from '#shared/dates/format.ts';
+import { dietWords } from './diet-words.ts';
 
 /** "contains milk and egg", with what a maker warns of or does not say; never that it is without. */
 export function containsLine(contents: Contents, region: LabelRegion): string {
@@ -44,13 +45,3 @@ export function clashesOf(
     ...diets.filter((it) => dietClashes(contents, it).length > 0).map((it) => dietWords[it]),
   ];
 }
-
-/** The diets as they are read. */
-export const dietWords: Readonly<Record<DietId, string>> = {
-  vegetarian: 'vegetarian',
-  vegan: 'vegan',
-  halal: 'halal',
-  kosher: 'kosher',
-  'no-alcohol': 'no alcohol',
-  'no-gelatine': 'no gelatine',
-};

@@ -1,8 +1,13 @@
 import { useEffect, useState } from 'react';
-import { uploadPhoto } from '../api/upload-photo.ts';
 import type { KeptPicture } from '../draft/draft-record.ts';
-import { PhotoQueue } from '../photos/photo-queue.ts';
-import { thumbnailOf } from '../photos/thumbnail.ts';
+import { PhotoQueue, type PhotoQueueOptions } from '../photos/photo-queue.ts';
+
+/** Photos come long after the first page, and what sends them with them. */
+const upload: PhotoQueueOptions['upload'] = async (...photo) =>
+  (await import('../api/upload-photo.ts')).uploadPhoto(...photo);
+
+const thumbnailOf = async (file: Blob) =>
+  (await import('../photos/thumbnail.ts')).thumbnailOf(file);
 
 type Arrived = (id: string, claimKey: string, picture: KeptPicture) => void;
 
@@ -14,7 +19,7 @@ export function usePhotoQueue(
   onArrived: Arrived,
   later: (run: () => void, ms: number) => () => void,
 ): PhotoQueue {
-  const [queue] = useState(() => new PhotoQueue({ upload: uploadPhoto, later }));
+  const [queue] = useState(() => new PhotoQueue({ upload, later }));
 
   useEffect(
     () =>

@@ -7,7 +7,7 @@ import type { OrderStep } from '#web/config/paths.ts';
 import { designOf } from '../design/design-of.ts';
 import { fitToMenu } from '../design/fit-to-menu.ts';
 import { DraftKeeper } from '../draft/draft-keeper.ts';
-import type { KeptPicture, SendAttempt } from '../draft/draft-record.ts';
+import type { DraftRecord, KeptPicture, SendAttempt } from '../draft/draft-record.ts';
 import { deviceShelf } from '../draft/draft-storage.ts';
 import { emptyOrder, isUntouched, type OrderForm } from '../draft/empty-order.ts';
 import { orderResolver } from '../draft/order-resolver.ts';
@@ -35,6 +35,12 @@ type Aside = {
 
 const emptyAside: Aside = { reached: 'day', pictures: {}, attempt: null };
 
+function asideOf(record: DraftRecord | null): Aside {
+  if (record === null) return emptyAside;
+  const { reached, pictures, attempt } = record;
+  return { reached, pictures, attempt };
+}
+
 function later(run: () => void, ms: number): () => void {
   const timer = setTimeout(run, ms);
   return () => clearTimeout(timer);
@@ -49,8 +55,7 @@ function begin(menu: Menu, customer: Customer | null) {
     restored,
   );
   const { values, gone } = fitToMenu(restored?.values ?? emptyOrder(), menu);
-  const aside: Aside = restored ?? emptyAside;
-  return { keeper, values: introduce(values, customer), gone, aside };
+  return { keeper, values: introduce(values, customer), gone, aside: asideOf(restored) };
 }
 
 /** Fills in the name and address of whoever is signed in, where nothing was written yet. */
@@ -184,7 +189,7 @@ export function WizardProvider({ menu, customer, children }: Props) {
     const fitted = fitToMenu(other?.values ?? emptyOrder(), menu);
     touched.current = false;
     form.reset(introduce(fitted.values, customer));
-    setAside(other ?? emptyAside);
+    setAside(asideOf(other));
   }, [keeper, menu, form, customer]);
 
   const finish = useCallback(() => {

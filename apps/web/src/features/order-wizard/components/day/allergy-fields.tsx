@@ -1,15 +1,20 @@
+import { Suspense, lazy } from 'react';
 import type { Declaration } from '#shared/contracts/design.ts';
 import { dietIds } from '#shared/contracts/vocabulary.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { ChipChoices } from '#web/components/ui/chips.tsx';
+import { Pending } from '#web/components/ui/pending.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
-import { fieldId } from '#web/lib/forms.ts';
-import { dietWords } from '../../design/contains.ts';
+import { dietWords } from '../../design/diet-words.ts';
 import { useAnswer } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { AllergyRow } from './allergy-row.tsx';
+
+/** Most orders have none, so the questions about them load when one is added. */
+const AllergyRows = lazy(async () => ({
+  default: (await import('./allergy-rows.tsx')).AllergyRows,
+}));
 
 const mostRows = 20;
 
@@ -44,33 +49,13 @@ export function AllergyFields() {
       </div>
 
       {day.allergies.length > 0 && (
-        <ul className="grid gap-5">
-          {day.allergies.map((row, at) => (
-            <AllergyRow
-              // Rows have no name of their own, and are only added at the end.
-              key={at}
-              at={at}
-              row={row}
-              onChange={(next) => setRows(day.allergies.map((it, i) => (i === at ? next : it)))}
-              onRemove={() =>
-                setRows(
-                  day.allergies.filter((_, i) => i !== at),
-                  'Allergy taken out.',
-                )
-              }
-            />
-          ))}
-        </ul>
+        <Suspense fallback={<Pending what="One moment…" />}>
+          <AllergyRows rows={day.allergies} onRows={setRows} />
+        </Suspense>
       )}
       {day.allergies.length < mostRows ? (
         <div>
-          <Button
-            kind="secondary"
-            onClick={() => {
-              setRows([...day.allergies, blank]);
-              focusRow(day.allergies.length);
-            }}
-          >
+          <Button kind="secondary" onClick={() => setRows([...day.allergies, blank])}>
             {day.allergies.length === 0 ? 'Add an allergy' : 'Add another'}
           </Button>
         </div>
@@ -113,11 +98,4 @@ export function AllergyFields() {
       </div>
     </section>
   );
-}
-
-/** Moves to the first question of a new row once it is drawn. */
-function focusRow(at: number): void {
-  requestAnimationFrame(() => {
-    document.getElementById(fieldId(`day.allergies.${at}.allergen`))?.focus();
-  });
 }

@@ -1,12 +1,9 @@
 import { type ReactNode, Suspense, lazy, useState } from 'react';
 import { formatMoney } from '#shared/kitchen/money.ts';
-import { Drawer } from '#web/components/ui/drawer.tsx';
-import { Pending } from '#web/components/ui/pending.tsx';
 import type { OrderStep } from '#web/config/paths.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { panelTitle } from './panel-title.ts';
 
-const CakePanel = lazy(async () => ({ default: (await import('./cake-panel.tsx')).CakePanel }));
+const CakeDrawer = lazy(async () => ({ default: (await import('./cake-drawer.tsx')).CakeDrawer }));
 
 type Props = {
   readonly step: OrderStep;
@@ -21,7 +18,8 @@ type Props = {
  */
 export function BottomBar({ step, action, back }: Props) {
   const [open, setOpen] = useState(false);
-  const { values, design } = useWizard();
+  // Once opened it stays, so that closing it can give the focus back.
+  const [opened, setOpened] = useState(false);
   return (
     <>
       {back && <div className="lg:hidden">{back}</div>}
@@ -30,16 +28,21 @@ export function BottomBar({ step, action, back }: Props) {
         className="sticky bottom-0 z-10 -mx-[clamp(1rem,3.2vw,2.5rem)] flex items-center justify-between gap-4 border-t border-seam bg-enamel px-[clamp(1rem,3.2vw,2.5rem)] py-3 lg:static lg:mx-0 lg:justify-start lg:border-0 lg:p-0"
       >
         <div className="min-w-0 lg:hidden">
-          <RunningTotal onOpen={() => setOpen(true)} />
+          <RunningTotal
+            onOpen={() => {
+              setOpened(true);
+              setOpen(true);
+            }}
+          />
         </div>
         <div className="shrink-0">{action}</div>
         <div className="hidden lg:block">{back}</div>
       </div>
-      <Drawer open={open} onClose={() => setOpen(false)} title={panelTitle(values, design)}>
-        <Suspense fallback={<Pending what="Drawing your cake…" />}>
-          <CakePanel step={step} onLeave={() => setOpen(false)} />
+      {opened && (
+        <Suspense>
+          <CakeDrawer step={step} open={open} onClose={() => setOpen(false)} />
         </Suspense>
-      </Drawer>
+      )}
     </>
   );
 }

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { type ReactNode, Suspense, lazy } from 'react';
 import { Link } from 'react-router-dom';
 import { Button } from '#web/components/ui/button.tsx';
 import { FormErrorSummary } from '#web/components/ui/form-error-summary.tsx';
@@ -7,7 +7,9 @@ import { paths, type OrderStep } from '#web/config/paths.ts';
 import { stepBefore, steps } from '../../steps/steps.ts';
 import { useStep } from '../../steps/use-step.ts';
 import { BottomBar } from './bottom-bar.tsx';
-import { DateWatch } from './date-watch.tsx';
+
+/** The first page has the calendar itself. */
+const DateWatch = lazy(async () => ({ default: (await import('./date-watch.tsx')).DateWatch }));
 
 type Props = {
   readonly step: OrderStep;
@@ -32,7 +34,11 @@ export function StepPage({ step, children }: Props) {
         <FormErrorSummary problems={problems} attempt={attempt} />
       </div>
       {children}
-      {step !== 'day' && <DateWatch />}
+      {step !== 'day' && (
+        <Suspense>
+          <DateWatch />
+        </Suspense>
+      )}
       <BottomBar
         step={step}
         action={next !== null && <Button type="submit">{steps[next].onwards}</Button>}

@@ -1,7 +1,8 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
-import { declaredName, dietWords } from '../../../design/contains.ts';
+import { declaredName } from '../../../design/contains.ts';
+import { dietWords } from '../../../design/diet-words.ts';
 import type { OrderForm } from '../../../draft/empty-order.ts';
 import { severityWords } from '../../day/severity-words.ts';
 import type { CheckRow } from '../check-rows.tsx';
