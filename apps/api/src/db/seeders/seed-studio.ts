@@ -1,9 +1,11 @@
 import { AllergyRule } from '#api/db/models/allergy-rule.ts';
+import { EmailText } from '#api/db/models/email-text.ts';
 import { KitchenAllergen } from '#api/db/models/kitchen-allergen.ts';
 import { PlanState } from '#api/db/models/plan-state.ts';
 import { PolicyVersion } from '#api/db/models/policy-version.ts';
 import { PriceBookVersion } from '#api/db/models/price-book-version.ts';
 import { Studio } from '#api/db/models/studio.ts';
+import { emailTexts } from './catalogue/email-texts.ts';
 import { policies } from './catalogue/policies.ts';
 import { firstPriceBook } from './catalogue/price-book.ts';
 import { allergyRules, kitchenAllergens, studio } from './catalogue/studio.ts';
@@ -31,4 +33,5 @@ export async function seedStudio(options: {
   await PolicyVersion.bulkCreate(
     policies.map((policy) => ({ ...policy, n: 1, validFrom: options.now })),
   );
+  await EmailText.bulkCreate(emailTexts.map((it) => ({ ...it, updatedAt: options.now })));
 }

@@ -320,10 +320,12 @@ describe('what becomes of an order', () => {
     expect(text).toMatch(/\d+ °F \/ \d+ °C/);
   });
 
-  it('collected: thanks', async () => {
+  it('collected: thanks, in the words the studio has written itself', async () => {
     const { order, email } = await known();
     await happens('order-collected', order, { status: 'collected' });
-    expect(to(email, await deliver()).subject).toContain('thank you');
+    const mail = to(email, await deliver());
+    expect(mail.subject).toBe(`Order No. ${order.number}: thank you from the lane`);
+    expect(flat(mail.text)).toContain('the best ones hang by the oven');
   });
 
   it('a hold that ran out: both sides are told', async () => {
@@ -468,7 +470,7 @@ describe('mail about mail', () => {
 
     await mailbox.clear();
     await sendMailAgain(mail, owner.id);
-    await sendMailAgain(mail, owner.id);
+    await expect(sendMailAgain(mail, owner.id)).rejects.toMatchObject({ code: 'wrong-state' });
     const again = to(email, await deliver());
     expect(again.text.trim()).toBe(mail.text.trim());
     expect(again.messageId).not.toBe(mail.messageId);

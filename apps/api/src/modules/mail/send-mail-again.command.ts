@@ -6,8 +6,8 @@ import { AppError } from '#api/platform/app-error.ts';
 /**
  * Sends a mail once more as it was, to the same address. Pressing twice is once: the next copy can
  * be asked for when the last has left.
- * @throws `wrong-state` for one still on its way, one that was erased, and one whose link works
- *   once: that is asked for anew
+ * @throws `wrong-state` while it or a copy is on its way, for one that was erased, and for one
+ *   whose link works once: that is asked for anew
  */
 export async function sendMailAgain(mail: SentMail, byUserId: string): Promise<void> {
   const { id, state, erasedAt, tokenId, orderId } = mail;
@@ -19,11 +19,13 @@ export async function sendMailAgain(mail: SentMail, byUserId: string): Promise<v
     if (copies.some((copy) => copy.state === 'queued' || copy.state === 'leased')) {
       throw refused('A copy of it is on its way already.');
     }
-    await enqueue(
-      'mail-to-send-again',
-      { sentMailId: id, byUserId },
-      { uniqueKey: `mail-to-send-again:${id}:${copies.length}`, orderId: orderId ?? undefined },
-    );
+    const uniqueKey = `mail-to-send-again:${id}:${copies.length}`;
+    const asked = { sentMailId: id, byUserId };
+    const first = await enqueue('mail-to-send-again', asked, {
+      uniqueKey,
+      orderId: orderId ?? undefined,
+    });
+    if (!first) throw refused('A copy of it is on its way already.');
   });
 }
 

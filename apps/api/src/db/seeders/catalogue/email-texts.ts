@@ -1,0 +1,24 @@
+/**
+ * E-mails in the studio's own voice; all others are in the house's words. Gaps in braces are filled
+ * with the order's facts.
+ */
+export const emailTexts: readonly {
+  readonly template: string;
+  readonly subject: string;
+  readonly lead: string;
+  readonly closing: string;
+}[] = [
+  {
+    template: 'ready',
+    subject: 'Order No. {number}: your cake is ready',
+    lead: 'Hello {name},\n\nYour cake is boxed and waits for you in the cold. Ring the bell at the counter if nobody is there: we are by the oven.',
+    closing: 'Have the order’s number with you: No. {number}. We wish you a lovely day.',
+  },
+  {
+    template: 'thank-you',
+    subject: 'Order No. {number}: thank you from the lane',
+    lead: 'Hello {name},\n\nYour cake has left our counter. Thank you for letting us make it.',
+    closing:
+      'Send us a photo of the table if you like: the best ones hang by the oven. And if anything was not as it should be, tell us; that is how we get better.',
+  },
+];
