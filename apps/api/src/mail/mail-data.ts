@@ -55,8 +55,9 @@ export type MailData = {
     readonly hold: Hold | null;
     /** The date could not be promised when it was asked for. */
     readonly dateOpen: boolean;
-    /** What to mind, about the table and the cake. */
-    readonly advice: readonly string[];
+    /** What has to be settled first, about the table and the cake; and what to mind. */
+    readonly stops: readonly string[];
+    readonly cares: readonly string[];
     /** The studio's answer time. */
     readonly answerHours: number;
   };

@@ -34,7 +34,7 @@ type OrderTemplates = Pick<
 /** Mails to whoever ordered. */
 export const orderTemplates: OrderTemplates = {
   'order-received': (data, house) => {
-    const { order, advice } = data;
+    const { order, stops, cares } = data;
     return orderBody(order, house, {
       title: 'We have your order',
       preview: `For ${orderDay(order, house)}: ${order.summary}`,
@@ -46,7 +46,8 @@ export const orderTemplates: OrderTemplates = {
         text(
           'This is an estimate: it binds neither you nor us. The price is settled when we confirm.',
         ),
-        ...(advice.length === 0 ? [] : [heading('Worth knowing'), sentences(advice)]),
+        ...stops.map((each) => notice('stop', 'To settle before we confirm', oneLine(each))),
+        ...(cares.length === 0 ? [] : [heading('Worth knowing'), sentences(cares)]),
         ...contentsOf(order),
       ],
     });

@@ -92,13 +92,14 @@ function contentsOf(
 ): Pick<MailOrder, 'contains' | 'mayContain' | 'handled'> {
   const named = (entries: readonly AllergenEntry[]): string[] =>
     entries.map((entry) => allergenLabel(entry, studio.labelRegion));
+  const contains = named(allergens.filter(({ state }) => state === 'contains'));
   return {
-    contains: named(allergens.filter(({ state }) => state === 'contains')),
+    contains,
     // What nobody knows yet is told as a maybe, never left out.
     mayContain: named(
       allergens.filter(({ state }) => state === 'may-contain' || state === 'unknown'),
     ),
-    handled: named(handled),
+    handled: named(handled).filter((name) => !contains.includes(name)),
   };
 }
 

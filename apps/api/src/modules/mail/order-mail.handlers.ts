@@ -64,7 +64,8 @@ export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
         await toCustomer(told, context, 'order-received', {
           ...place,
           order: told.forCustomer,
-          advice: [...stops, ...cares],
+          stops,
+          cares,
           answerHours,
         });
         await toStudio(told, context, 'new-order', {
