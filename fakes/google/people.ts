@@ -33,7 +33,7 @@ export const people: readonly Person[] = [
   ['Tomas', 'Adair', 'tomas.adair@example.com'],
   ['Priya', 'Venkat', 'priya.venkat@example.com'],
   ['Ines', 'Castellan', 'ines.castellan@example.com'],
-  ['Maren', 'Holt', 'maren@oxbowlane.example'],
+  ['Ida', 'Thorne', 'ida@oxbowlane.example'],
 ].map(([givenName = '', familyName = '', email = '']) => ({
   sub: subOf(email),
   givenName,

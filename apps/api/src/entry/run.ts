@@ -12,13 +12,19 @@ import { start as startWorker } from './worker.ts';
  * The whole program in one process: reads the environment, brings the database up to date, runs
  * web and worker, and on SIGTERM or SIGINT finishes what is under way and ends.
  * @param prepare what an entry does before people come in
+ * @param fill what it does even before the database is opened by the clock on the wall
  */
-export async function run(kind: EnvKind, prepare: (deps: Deps) => Promise<void>): Promise<void> {
+export async function run(
+  kind: EnvKind,
+  prepare: (deps: Deps) => Promise<void>,
+  fill: (parts: Pick<Deps, 'env' | 'logger'>) => Promise<void> = async () => {},
+): Promise<void> {
   const stopped = untilStopped();
   try {
     const env = readEnv(process.env, kind);
     const logger = createLogger(env.logLevel);
     await migrateDatabase(databaseFile(env.dataDir));
+    await fill({ env, logger });
     const database = await openDatabase(env.dataDir, { clock: systemClock, logger });
     const deps: Deps = { database, clock: systemClock, env, logger };
     const running: Running[] = [];

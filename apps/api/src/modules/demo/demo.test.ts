@@ -1,0 +1,68 @@
+import { rm } from 'node:fs/promises';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openDatabase } from '#api/db/database.ts';
+import type { Database } from '#api/db/database.ts';
+import { Order } from '#api/db/models/order.ts';
+import { OutboxRow } from '#api/db/models/outbox-row.ts';
+import { Photo } from '#api/db/models/photo.ts';
+import { loadCalendar } from '#api/modules/calendar/calendar.queries.ts';
+import { readEnv } from '#api/platform/env.ts';
+import { createLogger } from '#api/platform/logger.ts';
+import { newDataDir } from '#api/testing/template-file.ts';
+import { TestClock } from '#api/testing/test-clock.ts';
+import { fillDemo } from './fill-demo.command.ts';
+
+const logger = createLogger('error');
+let dataDir: string;
+let database: Database;
+const now = new Date('2027-05-12T15:00:00Z');
+
+beforeAll(async () => {
+  dataDir = await newDataDir();
+  const env = readEnv({ TIERWELL_DATA: dataDir }, 'demo');
+  await fillDemo({ env, logger }, now);
+  // Starting it again keeps the data.
+  await fillDemo({ env, logger }, now);
+  database = await openDatabase(dataDir, { clock: new TestClock(now), logger });
+}, 60_000);
+afterAll(async () => {
+  await database.close();
+  await rm(dataDir, { recursive: true });
+});
+
+describe('the demo’s studio', () => {
+  it('has orders in every state a visitor should see, each made once', async () => {
+    const orders = await Order.findAll({ order: [['number', 'ASC']] });
+    const states = orders.map(({ status }) => status).toSorted();
+    expect(states).toEqual([
+      'asked',
+      'asked',
+      'asked',
+      'collected',
+      'confirmed',
+      'confirmed',
+      'confirmed',
+      'declined',
+      'making',
+      'ready',
+      'withdrawn',
+    ]);
+    expect(orders[0]?.number).toBe(2401);
+    expect(await Photo.count({ where: { orderId: null } })).toBe(0);
+  });
+
+  it('has three requests waiting: one in the way of an allergy, one without a promise', async () => {
+    const { waiting, lanes } = await loadCalendar('2027-05-10', '2027-06-06');
+    expect(waiting).toHaveLength(3);
+    expect(
+      waiting.some(({ advice }) => advice?.code === 'allergen' && advice.level === 'stop'),
+    ).toBe(true);
+    expect(waiting.filter(({ order }) => order.dateAnswer === 'ask-us')).toHaveLength(1);
+    expect(lanes.length).toBeGreaterThanOrEqual(5);
+  });
+
+  it('sends none of the e-mails of its past', async () => {
+    expect(await OutboxRow.count({ where: { state: 'queued' } })).toBe(0);
+    expect(await OutboxRow.count({ where: { state: 'done' } })).toBeGreaterThan(10);
+  });
+});
