@@ -233,7 +233,7 @@ const inApi = [
     'api-outbox-below-modules',
     `${api}outbox/`,
     [shared, `${api}(outbox|db|clients|mail|platform)/`],
-    'Handlers work on rows, clients and mail; modules write the rows.',
+    'Modules write the rows and make the handlers; the entry hands these to the dispatcher.',
   ),
   mayOnlyReach(
     'api-mail-below-outbox',
