@@ -10,14 +10,15 @@ export default defineConfig({
   forbidOnly: isCi,
   retries: 0,
   workers: 2,
-  timeout: 90_000,
+  timeout: 180_000,
   expect: { timeout: 15_000 },
   reporter: [['list'], ['json', { outputFile: '../test-results/report.json' }]],
   use: {
     browserName: 'chromium',
     locale: 'en-US',
     timezoneId: 'America/New_York',
-    trace: 'retain-on-failure',
+    actionTimeout: 15_000,
+    navigationTimeout: 20_000,
     screenshot: 'only-on-failure',
     launchOptions: {
       executablePath: '/usr/bin/chromium',
@@ -35,6 +36,7 @@ export default defineConfig({
   projects: [
     {
       name: 'phone',
+      grepInvert: /@desktop/,
       use: {
         viewport: { width: 390, height: 844 },
         deviceScaleFactor: 2,
@@ -42,6 +44,10 @@ export default defineConfig({
         isMobile: true,
       },
     },
-    { name: 'desktop', use: { viewport: { width: 1440, height: 900 } } },
+    {
+      name: 'desktop',
+      grepInvert: /@phone/,
+      use: { viewport: { width: 1440, height: 900 } },
+    },
   ],
 });
