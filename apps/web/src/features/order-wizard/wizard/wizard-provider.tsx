@@ -12,6 +12,7 @@ import { deviceShelf } from '../draft/draft-storage.ts';
 import { emptyOrder, isUntouched, type OrderForm } from '../draft/empty-order.ts';
 import { orderResolver } from '../draft/order-resolver.ts';
 import { laterStep } from '../steps/steps.ts';
+import { same } from './same.ts';
 import { useEstimate } from './use-estimate.ts';
 import { usePhotoQueue } from './use-photo-queue.ts';
 import { useStable } from './use-stable.ts';
@@ -82,7 +83,9 @@ export function WizardProvider({ menu, customer, children }: Props) {
     () =>
       form.subscribe({
         formState: { values: true },
-        callback: (state) => setValues(structuredClone(state.values)),
+        // Told of errors too, and the form changes its values in place: a copy, if they changed.
+        callback: (state) =>
+          setValues((last) => (same(last, state.values) ? last : structuredClone(state.values))),
       }),
     [form],
   );
