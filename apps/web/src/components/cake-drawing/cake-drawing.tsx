@@ -18,6 +18,8 @@ type Props = {
   readonly size?: 'full' | 'small';
   /** How far it has come, 0 to 1: so much of it is filled in from the board up. */
   readonly made?: number;
+  /** Cuts off the empty paper above a low cake; without it small drawings line up. */
+  readonly trimmed?: boolean;
   readonly className?: string;
 };
 
@@ -27,13 +29,22 @@ const views = {
 } as const;
 
 /** The cake, drawn to scale from the side, with what it is told in words for those who cannot see it. */
-export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, className }: Props) {
+export function CakeDrawing({
+  cake,
+  look,
+  menu,
+  size = 'full',
+  made = 1,
+  trimmed = size === 'full',
+  className,
+}: Props) {
   const id = useId();
   const view = views[size];
   const there =
     cake !== null && (cake.kind === 'sheet' ? cake.sheet !== null : cake.tiers.length > 0);
   const highest = there ? highestPoint(cake, look, menu, view.room) : view.room.y;
-  const headroom = size === 'full' ? Math.max(0, highest - measureGap - 28) : 0;
+  const above = size === 'full' ? measureGap + 28 : 6;
+  const headroom = trimmed ? Math.max(0, highest - above) : 0;
   const floor = view.room.y + view.room.height;
   const level = highest + (floor - highest) * (1 - made);
   const draw = (show: Shown) =>
@@ -86,7 +97,7 @@ export function CakeDrawing({ cake, look, menu, size = 'full', made = 1, classNa
         </clipPath>
       </defs>
       {!there && <BareBoard room={view.room} />}
-      {made < 1 && <g opacity="0.3">{draw('cake')}</g>}
+      {made < 1 && <g opacity="0.45">{draw('cake')}</g>}
       <g clipPath={made < 1 ? `url(#${id}-made)` : undefined}>{draw('cake')}</g>
       {size === 'full' && draw('measures')}
     </svg>

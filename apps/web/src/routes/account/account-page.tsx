@@ -52,7 +52,7 @@ function CustomerAccount() {
       {account.data && (
         <>
           <Section title="My orders">
-            <Rim label="My orders" className="p-3 sm:p-5">
+            <Rim className="p-3 sm:p-5">
               <OwnOrders
                 orders={account.data.orders}
                 locale={locale}

@@ -27,7 +27,7 @@ export function CarePage() {
   );
   const label = (it: (typeof studio.handles)[number]) => allergenLabel(it, studio.labelRegion);
   const allergyPolicy = policies.find((it) => it.kind === 'allergy');
-  const cautions = [...new Set(decorations.map((it) => it.caution).filter((it) => it !== ''))];
+  const comesOff = decorations.filter((it) => it.edge !== 'edible' && it.caution !== '');
   const lightlyCooked = styles.filter((it) => it.contents.undercookedEgg);
   return (
     <div className="page grid gap-10 py-8">
@@ -104,8 +104,10 @@ export function CarePage() {
               card says how many there are.
             </li>
             <li>Wires, picks, ribbons and flowers that are not for eating come off first.</li>
-            {cautions.map((it) => (
-              <li key={it}>{it}</li>
+            {comesOff.map((it) => (
+              <li key={it.id}>
+                <strong>{it.name}.</strong> {it.caution}
+              </li>
             ))}
             <li>Small decorations can choke a young child: take them off first.</li>
           </ul>

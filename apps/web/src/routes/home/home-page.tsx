@@ -65,7 +65,8 @@ export function HomePage() {
                 look={sample.design.look}
                 menu={menu}
                 size="small"
-                className="max-h-72"
+                trimmed
+                className="max-h-60"
               />
               <h2 className="text-lg">{sample.name}</h2>
               <SampleLine sample={sample} menu={menu} />

@@ -3,6 +3,13 @@ import type { Menu } from '#shared/contracts/menu.ts';
 
 export type SampleCake = { readonly id: string; readonly name: string; readonly design: Design };
 
+/** About 4 in: what a tier is unless somebody asks otherwise. */
+const usualHeightMm = 102;
+
+function closest(list: readonly number[], wanted: number): number | undefined {
+  return [...list].sort((a, b) => Math.abs(a - wanted) - Math.abs(b - wanted))[0];
+}
+
 /** Made of what the studio's own menu has, so that every drawing is a cake one could order. */
 export function sampleCakes(menu: Menu): readonly SampleCake[] {
   const rounds = menu.tierSizes
@@ -23,7 +30,7 @@ export function sampleCakes(menu: Menu): readonly SampleCake[] {
         shape: 'round',
         widthMm: size.widthMm,
         depthMm: size.depthMm,
-        heightMm: size.heightsMm[0] ?? 100,
+        heightMm: closest(size.heightsMm, usualHeightMm) ?? usualHeightMm,
         layers: 3,
         real: true,
         keepsake: false,

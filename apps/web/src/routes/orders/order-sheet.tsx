@@ -77,17 +77,21 @@ export function OrderSheet({ order, menu }: Props) {
       </div>
 
       <div className="grid content-start gap-9">
-        <Section title="When you have it">
-          {order.offer.keepCool !== '' && <p className="measure">{order.offer.keepCool}</p>}
-          {warned.length > 0 && <AdviceList advice={warned} />}
-        </Section>
-        <Section title="Made with">
-          <MadeWith
-            offer={order.offer}
-            region={studio.labelRegion}
-            kitchenNotice={studio.kitchenNotice}
-          />
-        </Section>
+        {order.ending === null && (
+          <>
+            <Section title="When you have it">
+              {order.offer.keepCool !== '' && <p className="measure">{order.offer.keepCool}</p>}
+              {warned.length > 0 && <AdviceList advice={warned} />}
+            </Section>
+            <Section title="Made with">
+              <MadeWith
+                offer={order.offer}
+                region={studio.labelRegion}
+                kitchenNotice={studio.kitchenNotice}
+              />
+            </Section>
+          </>
+        )}
         <Section title="What you asked for">
           <ChosenList order={order} menu={menu} />
         </Section>

@@ -10,6 +10,7 @@ import { lookAtLinkQuery } from '#web/features/session/api/look-at-link.ts';
 import { useSpendLink } from '#web/features/session/api/spend-link.ts';
 import { NewAccountForm } from '#web/features/session/components/new-account-form.tsx';
 import { NewPasswordForm } from '#web/features/session/components/new-password-form.tsx';
+import { ApiProblem } from '#web/lib/http.ts';
 import { afterSignIn } from './after-sign-in.ts';
 import { NarrowPage } from './narrow-page.tsx';
 
@@ -35,7 +36,7 @@ export function LinkPage() {
     return (
       <NarrowPage title="This link does not open anything" aside={<OtherWays />}>
         {error ? (
-          <Failure error={error} onRetry={() => void refetch()} />
+          <Failure error={error} onRetry={spent(error) ? undefined : () => void refetch()} />
         ) : (
           <Notice tone="berry" title="The address is not whole">
             <p>Copy it again from the e-mail, all of it, or press the button there.</p>
@@ -69,6 +70,11 @@ export function LinkPage() {
     case 'password-reset':
       return <ResetPage token={token} email={link.email} />;
   }
+}
+
+/** A link that has done its work will not do it again. */
+function spent(error: unknown): boolean {
+  return error instanceof ApiProblem && error.code === 'link-spent';
 }
 
 type SpendProps = {

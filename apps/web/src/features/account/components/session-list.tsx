@@ -4,6 +4,7 @@ import { Failure } from '#web/components/ui/failure.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
 import { VisuallyHidden } from '#web/components/ui/visually-hidden.tsx';
 import { useEndSession } from '../api/end-session.ts';
+import { agentWords } from '../agent-words.ts';
 import { sessionsQuery } from '../api/list-sessions.ts';
 
 /** Where one is signed in, each place with a way to sign it out. */
@@ -25,7 +26,7 @@ export function SessionList({ locale }: { readonly locale: string }) {
           >
             <div>
               <p className="font-semibold">
-                {it.agent === '' ? 'A browser' : it.agent}
+                {agentWords(it.agent)}
                 {it.current && <span className="font-normal text-slate"> (this one)</span>}
               </p>
               <p className="text-sm text-slate tabular-nums">
@@ -40,7 +41,7 @@ export function SessionList({ locale }: { readonly locale: string }) {
                 onClick={() => end.mutate(it.id)}
               >
                 Sign out
-                <VisuallyHidden> {it.agent}</VisuallyHidden>
+                <VisuallyHidden> {agentWords(it.agent)}</VisuallyHidden>
               </Button>
             )}
           </li>
