@@ -5,6 +5,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import { submittedOrder } from '#shared/contracts/orders.ts';
 import type { SubmitOrder, SubmittedOrder } from '#shared/contracts/orders.ts';
 import { findTransition } from '#shared/orders/transitions.ts';
+import type { OrderTransition } from '#shared/orders/transitions.ts';
 import { Consent } from '#api/db/models/consent.ts';
 import { IdempotencyKey } from '#api/db/models/idempotency-key.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
@@ -51,13 +52,14 @@ class SentAlready extends Error {
 /**
  * Takes an order: prices it again, keeps a place in the plan for it where there is one, and writes
  * it with its events and e-mails in one transaction. The same key twice is one order.
- * @throws `price-changed`, `date-gone`, `too-many-holds`, `key-reused`, `invalid-input`
+ * @throws `price-changed`, `date-gone`, `too-many-holds`, `key-reused`, `invalid-input`, `not-allowed`
  */
 export async function submitOrder(deps: Deps, input: SubmitInput): Promise<Submitted> {
+  const transition = submitTransition(input.actor);
   const requestHash = createHash('sha256').update(JSON.stringify(input.form)).digest('hex');
   const before = await findSubmitted(deps, input, requestHash);
   if (before !== null) return before;
-  const prepared = await prepare(deps, input.form);
+  const prepared = { ...(await prepare(deps, input.form)), transition };
   try {
     return await placeAndWrite(deps, input, prepared, requestHash);
   } catch (error) {
@@ -68,9 +70,13 @@ export async function submitOrder(deps: Deps, input: SubmitInput): Promise<Submi
   }
 }
 
-type Prepared = { readonly menu: Menu; readonly estimate: Estimate };
+type Prepared = {
+  readonly menu: Menu;
+  readonly estimate: Estimate;
+  readonly transition: OrderTransition;
+};
 
-async function prepare({ clock }: Deps, form: SubmitOrder): Promise<Prepared> {
+async function prepare({ clock }: Deps, form: SubmitOrder): Promise<Omit<Prepared, 'transition'>> {
   const menu = await freshMenu();
   const { date } = form.day;
   const estimate = estimateDesign(
@@ -131,7 +137,7 @@ async function placeAndWrite(
       await order.update({ currentRevisionId: revisionId });
       await writeConsents(orderId, form, prepared.menu);
       await attachPhotos(orderId, form.photos);
-      await noteSubmitted(order, input);
+      await noteSubmitted(order, input, prepared.transition);
       const kept = {
         code: order.code,
         number: order.number,
@@ -165,12 +171,10 @@ async function writeOrder(
   { env }: Deps,
   input: SubmitInput & Prepared & { readonly orderId: string; readonly placed: HoldOutcome },
 ): Promise<Order> {
-  const { form, orderId, placed, estimate, menu, actor } = input;
+  const { form, orderId, placed, estimate, menu, actor, transition } = input;
   const studio = await Studio.findByPk(1, { rejectOnEmpty: true });
   const highest = await Order.max<number | null, Order>('number');
   const { you } = form;
-  const transition = findTransition(null, 'submit', orderActorOf(actor));
-  if (transition === null) throw new AppError('not-allowed');
   const order = await Order.create({
     id: orderId,
     number: highest === null ? studio.firstOrderNumber : highest + 1,
@@ -244,9 +248,11 @@ async function writeConsents(orderId: string, form: SubmitOrder, menu: Menu): Pr
   ]);
 }
 
-async function noteSubmitted(order: Order, { actor, form }: SubmitInput): Promise<void> {
-  const transition = findTransition(null, 'submit', orderActorOf(actor));
-  if (transition === null) throw new AppError('not-allowed');
+async function noteSubmitted(
+  order: Order,
+  { actor, form }: SubmitInput,
+  transition: OrderTransition,
+): Promise<void> {
   await noteOrderEvent({
     orderId: order.id,
     kind: 'submitted',
@@ -287,4 +293,11 @@ function keyRow({ idempotencyKey }: SubmitInput) {
 function keyFor({ env }: Deps, actor: Actor, order: Order): string | null {
   const known = actor.kind === 'customer' || actor.kind === 'staff';
   return known ? null : senderKeyOf(env.sessionSecret, order);
+}
+
+/** @throws `not-allowed` for whoever the table of moves does not let send orders */
+function submitTransition(actor: Actor): OrderTransition {
+  const transition = findTransition(null, 'submit', orderActorOf(actor));
+  if (transition === null) throw new AppError('not-allowed');
+  return transition;
 }
