@@ -65,6 +65,7 @@ function precompress(): Plugin {
 /** `vite build` makes the client, `vite build --ssr` the server; `npm run build` runs both. */
 export default defineConfig(({ isSsrBuild }) => ({
   root,
+  publicDir: 'apps/web/public',
   appType: 'spa',
   plugins: isSsrBuild ? [] : [react(), tailwindcss(), precompress()],
   server: {

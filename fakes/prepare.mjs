@@ -65,7 +65,6 @@ export async function installIfNeeded() {
 const sources = [
   'apps',
   'packages',
-  'public',
   'index.html',
   'package.json',
   'package-lock.json',
