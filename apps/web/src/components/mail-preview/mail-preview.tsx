@@ -30,7 +30,7 @@ export function MailPreview({ html, text, title }: Props) {
       {shown === 'html' ? (
         <iframe
           title={title}
-          srcDoc={html}
+          srcDoc={withoutStyleSheet(html)}
           sandbox=""
           className="h-[26rem] w-full rounded-action border border-seam bg-enamel"
         />
@@ -45,4 +45,12 @@ export function MailPreview({ html, text, title }: Props) {
       )}
     </div>
   );
+}
+
+/**
+ * A mail's look is in its attributes; its style sheet only turns it for dark rooms, and our own
+ * pages' policy, which the frame inherits, lets no style sheet through.
+ */
+function withoutStyleSheet(html: string): string {
+  return html.replace(/<style>[^<]*<\/style>/g, '');
 }

@@ -21,39 +21,37 @@ export function SizeTable({ menu }: { readonly menu: Menu }) {
     })),
   ];
   return (
-    <div className="overflow-x-auto">
-      <table className="w-full min-w-md border-collapse tabular-nums">
-        <caption className="sr-only">Portions by size of cake and size of portion</caption>
-        <thead>
-          <tr className="border-b-2 border-cobalt text-left align-bottom">
-            <th scope="col" className="py-2 pr-4 font-semibold">
-              A tier or sheet of
+    <table className="w-full border-collapse tabular-nums">
+      <caption className="sr-only">Portions by size of cake and size of portion</caption>
+      <thead>
+        <tr className="border-b-2 border-cobalt text-left align-bottom">
+          <th scope="col" className="py-2 pr-2 sm:pr-4 font-semibold">
+            A tier or sheet of
+          </th>
+          {menu.portionSizes.map((it) => (
+            <th key={it.id} scope="col" className="py-2 pl-2 sm:pl-4 text-right font-semibold">
+              {it.name}
+              <span className="block text-sm font-normal text-slate">
+                {formatLength(it.widthMm, lead)} x {formatLength(it.depthMm, lead)}
+              </span>
             </th>
-            {menu.portionSizes.map((it) => (
-              <th key={it.id} scope="col" className="py-2 pl-4 text-right font-semibold">
-                {it.name}
-                <span className="block text-sm font-normal text-slate">
-                  {formatLength(it.widthMm, lead)} x {formatLength(it.depthMm, lead)}
-                </span>
-              </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((row) => (
+          <tr key={row.key} className="border-b border-seam">
+            <th scope="row" className="py-2.5 pr-2 sm:pr-4 text-left font-medium">
+              {row.name}
+            </th>
+            {row.counts.map((count, at) => (
+              <td key={menu.portionSizes[at]?.id ?? at} className="py-2.5 pl-2 sm:pl-4 text-right">
+                {count}
+              </td>
             ))}
           </tr>
-        </thead>
-        <tbody>
-          {rows.map((row) => (
-            <tr key={row.key} className="border-b border-seam">
-              <th scope="row" className="py-2.5 pr-4 text-left font-medium">
-                {row.name}
-              </th>
-              {row.counts.map((count, at) => (
-                <td key={menu.portionSizes[at]?.id ?? at} className="py-2.5 pl-4 text-right">
-                  {count}
-                </td>
-              ))}
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+        ))}
+      </tbody>
+    </table>
   );
 }

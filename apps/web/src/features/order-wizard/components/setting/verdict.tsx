@@ -8,8 +8,9 @@ const words: Readonly<Record<AdviceLevel, string>> = {
 };
 
 const colours: Readonly<Record<AdviceLevel, string>> = {
-  ok: 'text-leaf',
-  care: 'text-ink',
+  // On their tints, since the row under them changes its own when it is chosen.
+  ok: '-ml-1 rounded-mark bg-leaf-tint px-1 text-leaf',
+  care: '-ml-1 rounded-mark bg-butter-tint px-1 text-ink',
   stop: 'text-berry',
 };
 
@@ -23,13 +24,7 @@ export function Verdict({
 }) {
   return (
     <span className="grid gap-0.5 text-sm">
-      <span className={classNames('font-semibold', colours[level])}>
-        {level === 'care' ? (
-          <span className="-ml-1 rounded-mark bg-butter-tint px-1">{words.care}</span>
-        ) : (
-          words[level]
-        )}
-      </span>
+      <span className={classNames('w-fit font-semibold', colours[level])}>{words[level]}</span>
       <span className="font-normal text-slate">{sentence}</span>
     </span>
   );
