@@ -106,10 +106,7 @@ function useSignedOutWatch(): void {
 function StaffPlaces({ user }: { readonly user: User }) {
   return (
     <>
-      <nav
-        aria-label="Places"
-        className="order-last -mx-2 flex w-full gap-x-1 sm:order-none sm:mx-0 sm:w-auto sm:gap-x-3"
-      >
+      <nav aria-label="Places" className="-mx-2 flex sm:mx-0 sm:gap-x-3">
         <Place to={paths.staffOrders}>Orders</Place>
         <Place to={paths.staffCalendar}>Calendar</Place>
         {user.role === 'owner' && <Place to={paths.staffPeople}>Studio</Place>}
@@ -118,7 +115,8 @@ function StaffPlaces({ user }: { readonly user: User }) {
         to={paths.staffMe}
         className="link ml-auto inline-flex min-h-11 items-center text-sm font-normal"
       >
-        {user.name}, {user.role}
+        {user.name}
+        <span className="hidden sm:inline">, {user.role}</span>
       </Link>
     </>
   );

@@ -1,7 +1,7 @@
 import { useCallback, useSyncExternalStore } from 'react';
 
 /** From here on there is room for seven days side by side. */
-export const roomForWeek = '(min-width: 56rem)';
+export const roomForWeek = '(min-width: 48rem)';
 /** From here on a table reads better than cards. */
 export const roomForTable = '(min-width: 52rem)';
 

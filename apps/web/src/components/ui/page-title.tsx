@@ -1,4 +1,4 @@
-import { type ReactNode, useEffect, useRef } from 'react';
+import { type ReactNode, useEffect, useRef, useState } from 'react';
 import { useLocation } from 'react-router-dom';
 import { useSiteName } from './site-name.tsx';
 
@@ -19,16 +19,18 @@ export function PageTitle({ title, children, className }: Props) {
   const site = useSiteName();
   const { key, pathname } = useLocation();
   // The first page of a visit keeps the browser's own starting point.
-  const arrived = key !== 'default';
+  const [first] = useState({ pathname, arrived: key !== 'default' });
 
   useEffect(() => {
     document.title = site === '' ? title : `${title} · ${site}`;
   }, [title, site]);
 
   useEffect(() => {
-    if (arrived) heading.current?.focus({ preventScroll: true });
+    if (first.arrived || pathname !== first.pathname) {
+      heading.current?.focus({ preventScroll: true });
+    }
     // A new page is a new path; a changed query or fragment on the same page is not.
-  }, [pathname, arrived]);
+  }, [pathname, first]);
 
   return (
     <h1 ref={heading} tabIndex={-1} className={className}>

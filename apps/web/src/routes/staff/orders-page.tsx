@@ -16,6 +16,7 @@ import { OrdersTable } from '#web/features/staff-orders/components/orders-table.
 import { Pager } from '#web/features/staff-orders/components/pager.tsx';
 import { ViewBar } from '#web/features/staff-orders/components/view-bar.tsx';
 import {
+  asAsked,
   isNarrowed,
   readOrdersSearch,
   writeOrdersSearch,
@@ -29,7 +30,8 @@ export function OrdersPage() {
   const [search] = useSearchParams();
   const navigate = useNavigate();
   const query = readOrdersSearch(search);
-  const { data, error, isPending, isPlaceholderData, isFetching, refetch } = useStaffOrders(query);
+  const asked = asAsked(query);
+  const { data, error, isPending, isPlaceholderData, isFetching, refetch } = useStaffOrders(asked);
   const table = useMedia(roomForTable);
   const onQuery = useCallback(
     (next: ListOrdersQuery) => void navigate(`?${writeOrdersSearch(next)}`, { replace: true }),
@@ -73,7 +75,7 @@ export function OrdersPage() {
               className={classNames('overflow-hidden', isPlaceholderData && 'opacity-60')}
             >
               {table ? (
-                <OrdersTable rows={data.rows} query={query} locale={locale} />
+                <OrdersTable rows={data.rows} query={asked} locale={locale} />
               ) : (
                 <OrdersCards rows={data.rows} locale={locale} />
               )}

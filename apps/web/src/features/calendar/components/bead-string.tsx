@@ -85,7 +85,7 @@ export function BeadString({ lane, scale, locale }: Props) {
                 key={bead.key}
                 aria-hidden="true"
                 className="pointer-events-none absolute -translate-x-1/2 text-[0.8125rem] leading-none whitespace-nowrap"
-                style={{ left: bead.x, top: bead.side === 'above' ? 9 : 47 }}
+                style={{ left: bead.x, top: bead.side === 'above' ? 3 : 52 }}
               >
                 {bead.label}
               </span>

@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { type CalendarDay, type WaitingRequest, blockDay } from '#shared/contracts/staff.ts';
 import { formatDay, formatList, formatWindow } from '#shared/dates/format.ts';
@@ -8,6 +7,7 @@ import { FormProblems, errorOf } from '#web/components/ui/form-problems.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
+import { Unfold } from '#web/components/ui/unfold.tsx';
 import { paths } from '#web/config/paths.ts';
 import { useContractForm } from '#web/lib/use-contract-form.ts';
 import { useBlockDay } from '../api/block-day.ts';
@@ -83,58 +83,58 @@ export function DayExplained({ day, waiting, mayBlock, locale, onItsOwn = false 
 
 const blockForm = z.pick(blockDay, { reason: true });
 
+type BlockProps = Pick<Props, 'day' | 'locale'>;
+
 /** Closes a day for new orders, or opens it again; what stands on it stays. */
-function BlockOrOpen({ day, locale }: Pick<Props, 'day' | 'locale'>) {
-  const [asking, setAsking] = useState(false);
+function BlockOrOpen(props: BlockProps) {
+  const { closed } = props.day;
+  if (closed === null) {
+    return (
+      <Unfold label="Block this day">{(fold) => <BlockForm {...props} onFold={fold} />}</Unfold>
+    );
+  }
+  // Where its weekday is not one of the studio's there is nothing to open.
+  return closed.id === null ? null : <OpenAgain {...props} closureId={closed.id} />;
+}
+
+function OpenAgain({ day, locale, closureId }: BlockProps & { readonly closureId: string }) {
+  const open = useOpenDay();
+  const toast = useToast();
+  return (
+    <div className="grid gap-3">
+      {open.isError && <Failure error={open.error} />}
+      <Button
+        kind="secondary"
+        pending={open.isPending}
+        onClick={() =>
+          open.mutate(closureId, {
+            onSuccess: () =>
+              toast({ message: `${formatDay(day.date, { locale })} is open again.` }),
+          })
+        }
+      >
+        Open it again
+      </Button>
+    </div>
+  );
+}
+
+function BlockForm({ day, locale, onFold }: BlockProps & { readonly onFold: () => void }) {
   const { form, failure, submit } = useContractForm(blockForm, { reason: '' });
   const block = useBlockDay();
   const open = useOpenDay();
   const toast = useToast();
   const name = formatDay(day.date, { locale });
-  const closure = day.closed?.id ?? null;
-
-  if (closure !== null) {
-    return (
-      <div className="grid gap-3">
-        {open.isError && <Failure error={open.error} />}
-        <Button
-          kind="secondary"
-          pending={open.isPending}
-          onClick={() =>
-            open.mutate(closure, {
-              onSuccess: () => toast({ message: `${name} is open again.` }),
-            })
-          }
-        >
-          Open it again
-        </Button>
-      </div>
-    );
-  }
-  // Its weekday is not one of the studio's: there is nothing to close.
-  if (day.closed !== null) return null;
-  if (!asking) {
-    return (
-      <Button kind="secondary" aria-expanded={false} onClick={() => setAsking(true)}>
-        Block this day
-      </Button>
-    );
-  }
   return (
     <form
       noValidate
-      className="grid w-full max-w-md gap-3"
+      className="grid w-full gap-3 *:max-w-md"
       onSubmit={submit(async ({ reason }) => {
         const { id, standing } = await block.mutateAsync({ date: day.date, reason });
         toast({
           message: `${name} takes no new orders. ${standingWords(standing)}`,
-          onUndo: () =>
-            open.mutate(id, {
-              onSuccess: () => toast({ message: `${name} is open again.` }),
-            }),
+          onUndo: () => open.mutate(id),
         });
-        form.reset();
-        setAsking(false);
       })}
     >
       <FormProblems form={form} failure={failure} />
@@ -149,7 +149,7 @@ function BlockOrOpen({ day, locale }: Pick<Props, 'day' | 'locale'>) {
         <Button type="submit" pending={block.isPending}>
           Block it
         </Button>
-        <Button kind="quiet" onClick={() => setAsking(false)}>
+        <Button kind="quiet" onClick={onFold}>
           Leave it open
         </Button>
       </div>

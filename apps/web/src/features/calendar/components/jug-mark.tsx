@@ -24,8 +24,13 @@ export function LoadLines({
 }) {
   const load = loadOf(day);
   return (
-    <span className={classNames('grid text-sm leading-snug tabular-nums', className)}>
-      {load !== 'closed' && <span className="text-slate">{hoursWords(day)}</span>}
+    <span
+      className={classNames(
+        'grid text-[0.8125rem] leading-snug tabular-nums lg:text-sm',
+        className,
+      )}
+    >
+      {load !== 'closed' && <span className="whitespace-nowrap text-slate">{hoursWords(day)}</span>}
       <span
         className={
           load === 'overfull'

@@ -5,5 +5,5 @@ export type LaneAct = (number: number, act: (typeof laneActs)[number]) => void;
 export const laneActWords: Readonly<Record<(typeof laneActs)[number], string>> = {
   start: 'Start making it',
   ready: 'Mark ready',
-  collect: 'Collected',
+  collect: 'Hand over',
 };

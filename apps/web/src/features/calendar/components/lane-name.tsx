@@ -27,17 +27,19 @@ export function LaneName({ lane, onAct }: Props) {
           allergy at the table
         </p>
       )}
-      <StatusMark status={lane.status} className="text-sm" />
-      {act !== undefined && (
-        <button
-          type="button"
-          onClick={() => onAct(lane.number, act)}
-          className="link -mx-2 -mb-2 inline-flex min-h-11 items-center px-2 text-sm"
-        >
-          {laneActWords[act]}
-          <VisuallyHidden>, No. {lane.number}</VisuallyHidden>
-        </button>
-      )}
+      <div className="flex flex-wrap items-center gap-x-3">
+        <StatusMark status={lane.status} className="text-sm" />
+        {act !== undefined && (
+          <button
+            type="button"
+            onClick={() => onAct(lane.number, act)}
+            className="link -my-2.5 inline-flex min-h-11 items-center text-sm"
+          >
+            {laneActWords[act]}
+            <VisuallyHidden>, No. {lane.number}</VisuallyHidden>
+          </button>
+        )}
+      </div>
     </div>
   );
 }

@@ -41,6 +41,9 @@ type RequestProps = Pick<Props, 'locale' | 'onAct'> & { readonly request: Waitin
 
 function Request({ request, locale, onAct }: RequestProps) {
   const { number, pickup, advice, fits, can } = request;
+  // What stops it is settled on its page; confirming would only say so.
+  const stopped = advice?.level === 'stop';
+  const confirms = can.confirm && !stopped;
   const whose = <VisuallyHidden> No. {number}</VisuallyHidden>;
   return (
     <div className="grid gap-2">
@@ -62,9 +65,13 @@ function Request({ request, locale, onAct }: RequestProps) {
       {advice !== null && advice.level !== 'ok' && <AdviceNote advice={advice} small />}
       <FitLine fits={fits} />
       <div className="flex flex-wrap gap-2 pt-1">
-        {can.confirm && <Button onClick={() => onAct(number, 'confirm')}>Confirm{whose}</Button>}
-        <LinkButton to={paths.staffOrder(number)} kind={can.confirm ? 'quiet' : 'primary'}>
-          Open{whose}
+        {confirms && <Button onClick={() => onAct(number, 'confirm')}>Confirm{whose}</Button>}
+        <LinkButton
+          to={`${paths.staffOrder(number)}${stopped ? '#settle' : ''}`}
+          kind={confirms ? 'quiet' : 'primary'}
+        >
+          {stopped ? 'Open and settle' : 'Open'}
+          {whose}
         </LinkButton>
         {can.decline && (
           <Button kind="quiet" onClick={() => onAct(number, 'decline')}>

@@ -19,7 +19,7 @@ type Props = {
   readonly onAct: LaneAct;
 };
 
-const columns = 'grid grid-cols-[12.5rem_minmax(0,1fr)]';
+const columns = 'grid grid-cols-[9.5rem_minmax(0,1fr)] lg:grid-cols-[14rem_minmax(0,1fr)]';
 
 /** Seven days side by side under their jugs, and a string of beads per cake. */
 export function WeekGrid({ view, locale, onAct }: Props) {
@@ -58,7 +58,7 @@ export function WeekGrid({ view, locale, onAct }: Props) {
                 }}
                 onClick={() => setShown(day.date)}
                 className={classNames(
-                  'grid min-h-28 content-start gap-1.5 px-2.5 py-3 text-left -outline-offset-4',
+                  'grid min-h-28 content-start gap-1.5 px-2 py-3 lg:px-2.5 text-left -outline-offset-4',
                   day.date === shown && 'border-b-3 border-butter',
                 )}
               >
@@ -71,7 +71,7 @@ export function WeekGrid({ view, locale, onAct }: Props) {
                       {Number(day.date.slice(8))}
                     </span>
                   </span>
-                  <DayJug day={day} className="h-10" />
+                  <DayJug day={day} className="h-8 lg:h-10" />
                 </span>
                 <LoadLines day={day} />
               </button>
@@ -99,7 +99,7 @@ export function WeekGrid({ view, locale, onAct }: Props) {
         <ul>
           {ordered.map((lane) => (
             <li key={lane.number} className={classNames(columns, 'border-t border-seam')}>
-              <div className="px-5 py-3">
+              <div className="px-3 py-3 lg:px-5">
                 <LaneName lane={lane} onAct={onAct} />
               </div>
               <div className="relative flex items-center">

@@ -1,12 +1,13 @@
 import type { CalendarDay, CalendarView } from '#shared/contracts/staff.ts';
 import { formatDay } from '#shared/dates/format.ts';
 import { classNames } from '#web/lib/class-names.ts';
-import { pickupsOf, workOf } from '../days/work-of-day.ts';
+import { cakesOf, pickupsOf } from '../days/work-of-day.ts';
+import { CakeRow } from './cake-row.tsx';
 import { DayExplained } from './day-explained.tsx';
 import { DayJug, LoadLines } from './jug-mark.tsx';
 import type { LaneAct } from './lane-act.ts';
 import { LaneName } from './lane-name.tsx';
-import { PickupBox, WorkRow } from './work-row.tsx';
+import { PickupBox } from './work-row.tsx';
 
 type Props = {
   readonly view: CalendarView;
@@ -35,7 +36,7 @@ export function WeekList({ view, locale, onAct }: Props) {
 
 function OneDay({ day, view, locale, onAct }: Props & { readonly day: CalendarDay }) {
   const pickups = pickupsOf(view.lanes, day.date);
-  const work = workOf(view.lanes, day.date);
+  const cakes = cakesOf(view.lanes, day.date);
   return (
     <>
       <div className="flex items-center gap-3">
@@ -58,11 +59,11 @@ function OneDay({ day, view, locale, onAct }: Props & { readonly day: CalendarDa
           ))}
         </ul>
       )}
-      {work.length > 0 && (
-        <ul aria-label="Work">
-          {work.map(({ lane, task }) => (
-            <li key={`${lane.number} ${task.id}`}>
-              <WorkRow lane={lane} task={task} />
+      {cakes.length > 0 && (
+        <ul aria-label="Work" className="grid gap-3">
+          {cakes.map((cake) => (
+            <li key={cake.lane.number}>
+              <CakeRow cake={cake} />
             </li>
           ))}
         </ul>

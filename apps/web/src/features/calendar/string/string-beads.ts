@@ -28,6 +28,9 @@ export type BeadString = {
 /** Half of the pickup's box, and the widest room a bead takes, pixels. */
 export const pickupHalf = 29;
 const beadRoom = 17;
+const boxRoom = pickupHalf + 11;
+/** How much of its day work may take up before the pickup, however early that is. */
+const lastDayShare = 0.72;
 const labelGap = 5;
 
 type Draft = Omit<Bead, 'label' | 'side'>;
@@ -47,20 +50,22 @@ export function stringBeads(
     .filter((it) => it.kind !== 'handover')
     .toSorted((a, b) => (a.startAt < b.startAt ? -1 : a.startAt > b.startAt ? 1 : 0));
   const at = xOf(scale, lane.pickup.date, lane.pickup.start);
-  const pickup = at >= 0 && at <= scale.width ? keepInside(at, pickupHalf, scale.width) : null;
   const shown = work.filter((it) => {
     const x = xOf(scale, it.date, it.start);
     return x >= 0 && x <= scale.width;
   });
   const drafts = [...groupBy(shown, (it) => it.date)].flatMap(([date, tasks]) => {
     const [left, right] = reachOf(scale, date);
-    const isLast = pickup !== null && date === lane.pickup.date;
-    const end = isLast
-      ? Math.max(left, Math.min(right, pickup - pickupHalf - beadRoom / 2))
-      : right;
-    return layOut(tasks, scale, left, end);
+    // Work before the pickup leaves it room, but is not pressed into nothing for its sake.
+    const before = Math.max(at - boxRoom, left + (right - left) * lastDayShare);
+    return layOut(tasks, scale, left, date === lane.pickup.date ? Math.min(right, before) : right);
   });
-  const beads = placeLabels(drafts, pickup, scale.width, measure);
+  const last = drafts.findLast((it) => it.tasks.some((t) => t.date <= lane.pickup.date));
+  const pickup =
+    at >= 0 && at <= scale.width
+      ? keepInside(Math.max(at, (last?.x ?? -boxRoom) + boxRoom), pickupHalf, scale.width)
+      : null;
+  const beads = placeLabels(drafts, scale.width, measure);
   const first = work[0];
   const comesFromBefore = first !== undefined && xOf(scale, first.date, first.start) < 0;
   const goesOn = at > scale.width;
@@ -148,18 +153,16 @@ function labelOf(tasks: readonly PlannedTask[]): string {
 /** Alternates the labels' sides, moves on to the other side where one is taken, else leaves it out. */
 function placeLabels(
   drafts: readonly Draft[],
-  pickup: number | null,
   width: number,
   measure: (label: string) => number,
 ): Bead[] {
   const taken = { above: -Infinity, below: -Infinity };
-  const end = pickup === null ? width : pickup - pickupHalf;
   let next: 'above' | 'below' = 'above';
   return drafts.map((draft) => {
     const label = labelOf(draft.tasks);
     const half = measure(label) / 2;
     const fits = (side: 'above' | 'below') =>
-      draft.x - half >= taken[side] + labelGap && draft.x - half >= 0 && draft.x + half <= end;
+      draft.x - half >= taken[side] + labelGap && draft.x - half >= 0 && draft.x + half <= width;
     const other = next === 'above' ? 'below' : 'above';
     const side = fits(next) ? next : fits(other) ? other : null;
     if (side !== null) {

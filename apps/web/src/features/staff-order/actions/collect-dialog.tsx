@@ -3,6 +3,7 @@ import * as z from 'zod/mini';
 import type { Photo } from '#shared/contracts/photos.ts';
 import { collectOrder } from '#shared/contracts/staff.ts';
 import { Button } from '#web/components/ui/button.tsx';
+import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { FormErrorSummary } from '#web/components/ui/form-error-summary.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
@@ -71,14 +72,14 @@ export function CollectDialog({ order, onDone, onClose }: ActProps) {
         photo={photo}
         onPhoto={setPhoto}
       />
-      <div className="flex flex-wrap gap-3">
+      <DialogActions>
         <Button type="submit" pending={collect.isPending}>
           It is collected
         </Button>
         <Button kind="quiet" onClick={onClose}>
           Not yet
         </Button>
-      </div>
+      </DialogActions>
     </form>
   );
 }

@@ -7,6 +7,7 @@ import { PriceList } from '#web/components/order/price-list.tsx';
 import { statusWords } from '#web/components/order/status-mark.tsx';
 import { MailPreview } from '#web/components/mail-preview/mail-preview.tsx';
 import { Button } from '#web/components/ui/button.tsx';
+import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
@@ -38,48 +39,52 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
   return (
     <>
       <ActFailure error={confirm.error} />
-      <div className="grid gap-2">
-        <p className="font-semibold">{pickupWords(order.pickup, menu.studio.locale)}</p>
-        <FitLine fits={fits} />
-      </div>
-      {blockers.length > 0 && <Blocked order={order} blockers={blockers} onClose={onClose} />}
-      {blockers.length === 0 && !order.can.confirm && (
-        <Notice tone="butter" title="It cannot be confirmed just now" live="polite">
-          <p>
-            {order.status === 'asked' && !fits.fits
-              ? 'It has no place in the plan. Move the pickup to a day that fits first.'
-              : `No. ${order.number} is now: ${statusWords[order.status]}.`}
+      <div className="grid items-start gap-x-8 gap-y-5 md:grid-cols-[minmax(0,0.8fr)_minmax(0,1fr)]">
+        <div className="grid gap-5">
+          <div className="grid gap-2">
+            <p className="font-semibold">{pickupWords(order.pickup, menu.studio.locale)}</p>
+            <FitLine fits={fits} />
+          </div>
+          {blockers.length > 0 && <Blocked order={order} blockers={blockers} onClose={onClose} />}
+          {blockers.length === 0 && !order.can.confirm && (
+            <Notice tone="butter" title="It cannot be confirmed just now" live="polite">
+              <p>
+                {order.status === 'asked' && !fits.fits
+                  ? 'It has no place in the plan. Move the pickup to a day that fits first.'
+                  : `No. ${order.number} is now: ${statusWords[order.status]}.`}
+              </p>
+            </Notice>
+          )}
+          <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
+        </div>
+        <section aria-labelledby={heading} className="grid min-w-0 gap-3">
+          <h3 id={heading}>The e-mail that goes out</h3>
+          <TextArea
+            label="A word of yours in it"
+            optional
+            rows={2}
+            value={note}
+            maxLength={1000}
+            onChange={(event) => setNote(event.target.value)}
+            onBlur={() => setShownNote(note.trim())}
+          />
+          <dl className="grid grid-cols-[auto_1fr] gap-x-3 text-sm">
+            <dt className="text-slate">To</dt>
+            <dd className="min-w-0 break-words">{email.to}</dd>
+            <dt className="text-slate">Subject</dt>
+            <dd className="min-w-0">{email.subject}</dd>
+          </dl>
+          <MailPreview html={email.html} text={email.text} title={`The e-mail to ${email.to}`} />
+          <p role="status" className="text-sm text-slate empty:hidden">
+            {look.isFetching
+              ? 'Writing it again…'
+              : noteWaits
+                ? 'Your words appear in it once you leave the field.'
+                : ''}
           </p>
-        </Notice>
-      )}
-      <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
-      <section aria-labelledby={heading} className="grid min-w-0 gap-3">
-        <h3 id={heading}>The e-mail that goes out</h3>
-        <TextArea
-          label="A word of yours in it"
-          optional
-          rows={2}
-          value={note}
-          maxLength={1000}
-          onChange={(event) => setNote(event.target.value)}
-          onBlur={() => setShownNote(note.trim())}
-        />
-        <dl className="grid grid-cols-[auto_1fr] gap-x-3 text-sm">
-          <dt className="text-slate">To</dt>
-          <dd className="min-w-0 break-words">{email.to}</dd>
-          <dt className="text-slate">Subject</dt>
-          <dd className="min-w-0">{email.subject}</dd>
-        </dl>
-        <MailPreview html={email.html} text={email.text} title={`The e-mail to ${email.to}`} />
-        <p role="status" className="text-sm text-slate empty:hidden">
-          {look.isFetching
-            ? 'Writing it again…'
-            : noteWaits
-              ? 'Your words appear in it once you leave the field.'
-              : ''}
-        </p>
-      </section>
-      <div className="flex flex-wrap gap-3">
+        </section>
+      </div>
+      <DialogActions>
         {blocked ? (
           <Button kind="secondary" onClick={onClose}>
             Close
@@ -112,7 +117,7 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
             </Button>
           </>
         )}
-      </div>
+      </DialogActions>
     </>
   );
 }

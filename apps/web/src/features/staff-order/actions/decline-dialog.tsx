@@ -4,6 +4,7 @@ import { formatDay, formatList } from '#shared/dates/format.ts';
 import { addDays, today } from '#shared/dates/local-time.ts';
 import type { DayAnswer } from '#shared/contracts/dates.ts';
 import { Button } from '#web/components/ui/button.tsx';
+import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { FormErrorSummary } from '#web/components/ui/form-error-summary.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
@@ -50,14 +51,14 @@ export function DeclineDialog({ order, menu, onDone, onClose }: ActProps) {
         hint={<NearestDays order={order} menu={menu} />}
       />
       <p>This cannot be taken back. The place in the plan becomes free at once.</p>
-      <div className="flex flex-wrap gap-3">
+      <DialogActions>
         <Button type="submit" kind="danger" pending={decline.isPending}>
           Decline and tell them
         </Button>
         <Button kind="quiet" onClick={onClose}>
           Not yet
         </Button>
-      </div>
+      </DialogActions>
     </form>
   );
 }

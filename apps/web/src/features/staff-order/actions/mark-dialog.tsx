@@ -1,5 +1,6 @@
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { Button } from '#web/components/ui/button.tsx';
+import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
 import { useMarkUncollected } from '../api/mark-uncollected.ts';
 import { useReadyOrder } from '../api/ready-order.ts';
@@ -50,7 +51,7 @@ export function MarkDialog({ act, order, onDone, onClose }: ActProps & { readonl
     <>
       <ActFailure error={error} />
       <p>{words[act].says(customer)}</p>
-      <div className="flex flex-wrap gap-3">
+      <DialogActions>
         <Button
           pending={isPending}
           onClick={() =>
@@ -70,7 +71,7 @@ export function MarkDialog({ act, order, onDone, onClose }: ActProps & { readonl
         <Button kind="quiet" onClick={onClose}>
           Not yet
         </Button>
-      </div>
+      </DialogActions>
     </>
   );
 }

@@ -3,6 +3,7 @@ import * as z from 'zod/mini';
 import { moveOrder } from '#shared/contracts/staff.ts';
 import { formatDay, formatWindow } from '#shared/dates/format.ts';
 import { Button } from '#web/components/ui/button.tsx';
+import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { FormErrorSummary } from '#web/components/ui/form-error-summary.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
 import { TextArea } from '#web/components/ui/text-area.tsx';
@@ -79,7 +80,7 @@ export function MoveDialog({ order, menu, onDone, onClose }: ActProps) {
         rows={3}
         error={errorOf(errors, 'note')}
       />
-      <div className="flex flex-wrap items-center gap-3">
+      <DialogActions>
         <Button type="submit" pending={move.isPending}>
           Move it and tell them
         </Button>
@@ -91,7 +92,7 @@ export function MoveDialog({ order, menu, onDone, onClose }: ActProps) {
             ? ''
             : `To ${formatDay(chosen.date, { locale })}, ${formatWindow(chosen.start, order.pickup.minutes)}`}
         </p>
-      </div>
+      </DialogActions>
     </form>
   );
 }

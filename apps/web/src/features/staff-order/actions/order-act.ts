@@ -1,12 +1,12 @@
 /** What the staff can do to an order; each opens its own dialog. */
 export const orderActs = [
   'confirm',
-  'decline',
   'move',
   'start',
   'ready',
   'collect',
   'uncollected',
+  'decline',
 ] as const;
 export type OrderAct = (typeof orderActs)[number];
 
@@ -16,6 +16,6 @@ export const actWords: Readonly<Record<OrderAct, string>> = {
   move: 'Move the pickup',
   start: 'Start making it',
   ready: 'Mark ready',
-  collect: 'Collected',
+  collect: 'Hand over',
   uncollected: 'Not collected',
 };

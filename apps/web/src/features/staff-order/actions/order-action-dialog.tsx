@@ -27,7 +27,7 @@ const titles: Readonly<Record<OrderAct, (number: number) => string>> = {
   move: (number) => `Move the pickup of No. ${number}`,
   start: (number) => `Start making No. ${number}`,
   ready: (number) => `No. ${number} is ready`,
-  collect: (number) => `No. ${number} is collected`,
+  collect: (number) => `Hand over No. ${number}`,
   uncollected: (number) => `Nobody came for No. ${number}`,
 };
 
@@ -35,7 +35,7 @@ const titles: Readonly<Record<OrderAct, (number: number) => string>> = {
 export function OrderActionDialog({ number, act, menu, onClose }: Props) {
   const { data, isPending, error, refetch } = useStaffOrder(number);
   return (
-    <Dialog open onClose={onClose} title={titles[act](number)}>
+    <Dialog open onClose={onClose} title={titles[act](number)} wide={act === 'confirm'}>
       {isPending ? (
         <Pending what="Fetching the order…" />
       ) : data === undefined ? (

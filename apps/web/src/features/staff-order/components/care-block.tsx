@@ -3,7 +3,7 @@ import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { AdviceNote, byGravity } from '#web/components/order/advice-note.tsx';
 import { allergyWords } from '#web/components/order/allergy-words.ts';
 import { instantWords } from '#web/components/order/order-times.ts';
-import { AnswerAllergyForm, LiftStopForm } from './settle-forms.tsx';
+import { AnswerAllergy, LiftStop } from './settle-forms.tsx';
 
 type Props = { readonly order: StaffOrder; readonly menu: Menu };
 
@@ -31,49 +31,51 @@ export function CareBlock({ order, menu }: Props) {
       <h2 id="settle-title">
         {allergies.length > 0 ? 'Allergies at the table' : 'Settle this before you confirm'}
       </h2>
-      {allergies.length > 0 && (
-        <ul className="grid gap-4">
-          {allergies.map((it) => (
-            <li key={it.id} className="grid gap-2">
-              <p className="font-display text-lg font-semibold text-berry">
-                {allergyWords(it, menu.studio.labelRegion)}
-              </p>
-              {it.allergen !== null && it.text !== '' && <p>“{it.text}”</p>}
-              {it.answer !== null ? (
-                <p>
-                  <strong>Settled:</strong> {it.answer.text}{' '}
-                  <span className="text-sm text-slate">
-                    ({it.answer.by},{' '}
-                    {instantWords(it.answer.at, menu.studio.zone, menu.studio.locale)})
-                  </span>
-                </p>
-              ) : order.can.answerAllergy ? (
-                <AnswerAllergyForm order={order} allergy={it} />
-              ) : (
-                <p className="text-sm">Nobody has talked with them about it yet.</p>
-              )}
-            </li>
-          ))}
-        </ul>
-      )}
-      {blockers.length > 0 && (
-        <div className="grid gap-3">
-          {allergies.length > 0 && <h3>Settle this before you confirm</h3>}
+      <div className="grid items-start gap-x-10 gap-y-5 lg:grid-cols-2">
+        {allergies.length > 0 && (
           <ul className="grid gap-4">
-            {byGravity(blockers).map((it) => (
-              <li key={`${it.code} ${it.about}`} className="grid gap-2">
-                <AdviceNote advice={it} />
-                {order.can.liftStop && it.talk && <LiftStopForm order={order} blocker={it} />}
+            {allergies.map((it) => (
+              <li key={it.id} className="grid gap-2">
+                <p className="font-display text-lg font-semibold text-berry">
+                  {allergyWords(it, menu.studio.labelRegion)}
+                </p>
+                {it.allergen !== null && it.text !== '' && <p>“{it.text}”</p>}
+                {it.answer !== null ? (
+                  <p>
+                    <strong>Settled:</strong> {it.answer.text}{' '}
+                    <span className="text-sm text-slate">
+                      ({it.answer.by},{' '}
+                      {instantWords(it.answer.at, menu.studio.zone, menu.studio.locale)})
+                    </span>
+                  </p>
+                ) : order.can.answerAllergy ? (
+                  <AnswerAllergy order={order} allergy={it} />
+                ) : (
+                  <p className="text-sm">Nobody has talked with them about it yet.</p>
+                )}
               </li>
             ))}
           </ul>
-          {!order.can.liftStop && blockers.some((it) => it.talk) && (
-            <p className="text-sm">
-              Only the owner takes an order against a stop, with a written reason.
-            </p>
-          )}
-        </div>
-      )}
+        )}
+        {blockers.length > 0 && (
+          <div className="grid gap-3">
+            {allergies.length > 0 && <h3>Settle this before you confirm</h3>}
+            <ul className="grid gap-4">
+              {byGravity(blockers).map((it) => (
+                <li key={`${it.code} ${it.about}`} className="grid gap-2">
+                  <AdviceNote advice={it} />
+                  {order.can.liftStop && it.talk && <LiftStop order={order} blocker={it} />}
+                </li>
+              ))}
+            </ul>
+            {!order.can.liftStop && blockers.some((it) => it.talk) && (
+              <p className="text-sm">
+                Only the owner takes an order against a stop, with a written reason.
+              </p>
+            )}
+          </div>
+        )}
+      </div>
       {about.length > 0 && (
         <ul className="grid gap-3">
           {byGravity(about).map((it) => (

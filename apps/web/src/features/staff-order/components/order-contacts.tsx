@@ -88,12 +88,15 @@ function RenewLink({
         <Button
           pending={renew.isPending}
           onClick={() =>
-            renew.mutate(undefined, {
-              onSuccess: () => {
-                toast({ message: 'A new link is on its way; the old one is shut.' });
-                onClose();
+            renew.mutate(
+              { rowVersion: order.rowVersion },
+              {
+                onSuccess: () => {
+                  toast({ message: 'A new link is on its way; the old one is shut.' });
+                  onClose();
+                },
               },
-            })
+            )
           }
         >
           Send a new link

@@ -7,6 +7,7 @@ import { Button } from '#web/components/ui/button.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
+import { Unfold } from '#web/components/ui/unfold.tsx';
 import { PhotoChoice } from './photo-choice.tsx';
 
 const ours = ['finished', 'handover', 'fault'] as const;
@@ -14,19 +15,18 @@ type Ours = (typeof ours)[number];
 
 /** What the customer sent and what the studio took. */
 export function OrderPhotos({ order }: { readonly order: StaffOrder }) {
-  const [adding, setAdding] = useState(false);
   return (
     <div className="grid gap-5">
-      {order.photos.length === 0 && <p className="text-slate">There are none.</p>}
-      <PhotoGrid photos={order.photos} />
-      {order.can.addPhotos && !adding && (
-        <div data-print="no">
-          <Button kind="secondary" aria-expanded={false} onClick={() => setAdding(true)}>
-            Add a photo
-          </Button>
-        </div>
+      {order.photos.length === 0 ? (
+        <p className="text-slate">There are none.</p>
+      ) : (
+        <PhotoGrid photos={order.photos} />
       )}
-      {adding && <AddPhoto number={order.number} onDone={() => setAdding(false)} />}
+      {order.can.addPhotos && (
+        <Unfold label="Add a photo">
+          {(fold) => <AddPhoto number={order.number} onDone={fold} />}
+        </Unfold>
+      )}
     </div>
   );
 }

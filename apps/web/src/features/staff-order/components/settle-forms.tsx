@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import * as z from 'zod/mini';
 import type { Advice } from '#shared/contracts/estimates.ts';
 import {
@@ -11,6 +10,7 @@ import { Button } from '#web/components/ui/button.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
 import { TextArea } from '#web/components/ui/text-area.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
+import { Unfold } from '#web/components/ui/unfold.tsx';
 import { useContractForm } from '#web/lib/use-contract-form.ts';
 import { ActFailure } from '../actions/act-failure.tsx';
 import { useAnswerAllergy } from '../api/answer-allergy.ts';
@@ -22,20 +22,16 @@ const liftForm = z.omit(liftStop, { rowVersion: true, about: true });
 type AnswerProps = { readonly order: StaffOrder; readonly allergy: DeclaredAllergy };
 
 /** Records the talk about one declared allergy. */
-export function AnswerAllergyForm({ order, allergy }: AnswerProps) {
+export function AnswerAllergy(props: AnswerProps) {
+  return (
+    <Unfold label="Record the talk">{(fold) => <AnswerForm {...props} onFold={fold} />}</Unfold>
+  );
+}
+
+function AnswerForm({ order, allergy, onFold }: AnswerProps & { readonly onFold: () => void }) {
   const { form, failure, submit } = useContractForm(answerForm, { text: '' });
   const answer = useAnswerAllergy(order.number);
   const toast = useToast();
-  const [open, setOpen] = useState(false);
-  if (!open) {
-    return (
-      <div>
-        <Button kind="secondary" aria-expanded={false} onClick={() => setOpen(true)}>
-          Record the talk
-        </Button>
-      </div>
-    );
-  }
   return (
     <form
       noValidate
@@ -57,7 +53,7 @@ export function AnswerAllergyForm({ order, allergy }: AnswerProps) {
         <Button type="submit" pending={answer.isPending}>
           Note it
         </Button>
-        <Button kind="quiet" onClick={() => setOpen(false)}>
+        <Button kind="quiet" onClick={onFold}>
           Not yet
         </Button>
       </div>
@@ -68,20 +64,18 @@ export function AnswerAllergyForm({ order, allergy }: AnswerProps) {
 type LiftProps = { readonly order: StaffOrder; readonly blocker: Advice };
 
 /** The owner's written reason to take an order against a stop. */
-export function LiftStopForm({ order, blocker }: LiftProps) {
+export function LiftStop(props: LiftProps) {
+  return (
+    <Unfold label="Take it all the same" kind="danger">
+      {(fold) => <LiftForm {...props} onFold={fold} />}
+    </Unfold>
+  );
+}
+
+function LiftForm({ order, blocker, onFold }: LiftProps & { readonly onFold: () => void }) {
   const { form, failure, submit } = useContractForm(liftForm, { reason: '' });
   const lift = useLiftStop(order.number);
   const toast = useToast();
-  const [open, setOpen] = useState(false);
-  if (!open) {
-    return (
-      <div>
-        <Button kind="danger" aria-expanded={false} onClick={() => setOpen(true)}>
-          Take it all the same
-        </Button>
-      </div>
-    );
-  }
   return (
     <form
       noValidate
@@ -103,7 +97,7 @@ export function LiftStopForm({ order, blocker }: LiftProps) {
         <Button type="submit" kind="danger" pending={lift.isPending}>
           Take it, for this reason
         </Button>
-        <Button kind="quiet" onClick={() => setOpen(false)}>
+        <Button kind="quiet" onClick={onFold}>
           Not yet
         </Button>
       </div>

@@ -143,7 +143,7 @@ function Heading({ name, sort, query, end }: HeadingProps) {
       )}
     >
       {sort === undefined ? (
-        name
+        <span className="text-slate">{name}</span>
       ) : (
         <Link
           to={`?${writeOrdersSearch(sortedBy(query, sort))}`}

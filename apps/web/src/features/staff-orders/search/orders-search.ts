@@ -76,6 +76,12 @@ export function withStatus(query: ListOrdersQuery, status: OrderStatus): ListOrd
   return { ...query, status: next.length === 0 ? undefined : next, page: undefined };
 }
 
+/** What the server is asked: without a sort of one's own, the newest order comes first. */
+export function asAsked(query: ListOrdersQuery): ListOrdersQuery {
+  const sorted = query.sort === undefined ? ({ sort: 'number', order: 'desc' } as const) : {};
+  return { ...query, ...sorted, perPage: query.perPage ?? perPageDefault };
+}
+
 /** Whether anything narrows the list. */
 export function isNarrowed(query: ListOrdersQuery): boolean {
   return (

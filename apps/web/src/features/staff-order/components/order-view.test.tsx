@@ -1,0 +1,89 @@
+import { screen, within } from '@testing-library/react';
+import { describe, expect, it } from 'vitest';
+import { menuFixture } from '#shared/kitchen/testing/menu-fixture.ts';
+import { startApiServer } from '#web/testing/api-server.ts';
+import { renderAt } from '#web/testing/render-at.tsx';
+import { eggStop, nothingAllowed, staffOrderFixture } from '#web/testing/staff-order.ts';
+import { OrderView } from './order-view.tsx';
+
+startApiServer();
+
+function show(order = staffOrderFixture()) {
+  return renderAt('/staff/orders/2431', <OrderView order={order} menu={menuFixture} />);
+}
+
+const egg = {
+  id: 'a1',
+  allergen: 'egg',
+  species: null,
+  text: '',
+  severity: 'allergy',
+  guests: 1,
+  answer: null,
+};
+
+describe('the order’s page', () => {
+  it('offers nothing that the server does not allow', () => {
+    show(staffOrderFixture({ allergies: [egg], blockers: [eggStop] }));
+    const actions = screen.queryAllByRole('button');
+    expect(actions).toEqual([]);
+    expect(screen.getByText(/nothing left to do/)).toBeVisible();
+  });
+
+  it.each([
+    ['confirm', 'Confirm'],
+    ['decline', 'Decline'],
+    ['move', 'Move the pickup'],
+    ['start', 'Start making it'],
+    ['ready', 'Mark ready'],
+    ['collect', 'Hand over'],
+    ['uncollected', 'Not collected'],
+    ['write', 'Send the message'],
+    ['renewLink', 'Renew the private link'],
+    ['addPhotos', 'Add a photo'],
+    ['answerAllergy', 'Record the talk'],
+    ['liftStop', 'Take it all the same'],
+  ] as const)('offers %s alone where only that is allowed', (right, name) => {
+    show(
+      staffOrderFixture({
+        allergies: [egg],
+        blockers: [eggStop],
+        can: { ...nothingAllowed, [right]: true },
+      }),
+    );
+    expect(screen.getAllByRole('button').map((it) => it.textContent)).toEqual([name]);
+  });
+
+  it('puts the allergies before the cake, with what was settled', () => {
+    show(
+      staffOrderFixture({
+        allergies: [
+          {
+            ...egg,
+            answer: {
+              text: 'They bring a cake of their own.',
+              by: 'Ida Thorne',
+              at: '2027-06-10T14:00:00.000Z',
+            },
+          },
+        ],
+      }),
+    );
+    const headings = screen.getAllByRole('heading', { level: 2 }).map((it) => it.textContent);
+    expect(headings[0]).toBe('Allergies at the table');
+    const block = screen.getByRole('region', { name: 'Allergies at the table' });
+    expect(within(block).getByText('Egg: allergy, 1 guest')).toBeVisible();
+    expect(within(block).getByText(/They bring a cake of their own/)).toBeVisible();
+    expect(within(block).getByText(/Thursday 10 June, 10:00/)).toBeVisible();
+  });
+
+  it('unfolds the talk’s form into focus, and folds it up to where it was', async () => {
+    const { user } = show(
+      staffOrderFixture({ allergies: [egg], can: { ...nothingAllowed, answerAllergy: true } }),
+    );
+    await user.click(screen.getByRole('button', { name: 'Record the talk' }));
+    expect(screen.getByRole('textbox', { name: 'What was said and settled' })).toHaveFocus();
+    await user.click(screen.getByRole('button', { name: 'Not yet' }));
+    expect(screen.getByRole('button', { name: 'Record the talk' })).toHaveFocus();
+  });
+});
