@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { statusWords } from '#web/components/order/status-mark.tsx';
 import { Button } from '#web/components/ui/button.tsx';
@@ -48,19 +49,23 @@ export function OrderActionDialog({ number, act, menu, onClose }: Props) {
 }
 
 function Act({ act, ...props }: ActProps & { readonly act: OrderAct }) {
+  // Looked at once: the act's own success takes the right away while the dialog is still closing.
+  // Who comes second in the meantime is told so by the refusal.
+  const [offered] = useState(act === 'confirm' || props.order.can[act]);
+  if (!offered) return <MovedOn {...props} />;
   switch (act) {
     case 'confirm':
       return <ConfirmDialog {...props} />;
     case 'decline':
-      return props.order.can.decline ? <DeclineDialog {...props} /> : <MovedOn {...props} />;
+      return <DeclineDialog {...props} />;
     case 'move':
-      return props.order.can.move ? <MoveDialog {...props} /> : <MovedOn {...props} />;
+      return <MoveDialog {...props} />;
     case 'collect':
-      return props.order.can.collect ? <CollectDialog {...props} /> : <MovedOn {...props} />;
+      return <CollectDialog {...props} />;
     case 'start':
     case 'ready':
     case 'uncollected':
-      return props.order.can[act] ? <MarkDialog act={act} {...props} /> : <MovedOn {...props} />;
+      return <MarkDialog act={act} {...props} />;
   }
 }
 
