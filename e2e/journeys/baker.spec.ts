@@ -17,7 +17,8 @@ test('a baker confirms from the calendar and follows the cake to the door', asyn
   await signInAs(page, 'baker');
 
   await test.step('confirms after a last look at price and e-mail', async () => {
-    await expect(page.getByRole('heading', { level: 1, name: /^Calendar/ })).toBeVisible();
+    await expect(page).toHaveTitle(/^Calendar, /);
+    await expect(page.getByRole('region', { name: 'Waiting for you' })).toBeVisible();
     await lookOver(page);
     await page.getByRole('button', { name: `Confirm No. ${number}` }).click();
     const dialog = dialogOf(page, `Confirm No. ${number}`);
@@ -46,7 +47,7 @@ test('a baker confirms from the calendar and follows the cake to the door', asyn
   });
 
   await test.step('hands it over with who took it and a photo', async () => {
-    await page.getByRole('button', { name: 'Collected' }).click();
+    await page.getByRole('button', { name: 'Collected', exact: true }).click();
     const dialog = dialogOf(page, `No. ${number} is collected`);
     await dialog.getByLabel('Who takes it').fill('Tomas Adair');
     await dialog.getByLabel('How it looked').fill('Upright and cold');

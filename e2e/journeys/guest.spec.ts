@@ -100,7 +100,7 @@ test('a guest orders with two photos, keeps the day by the link and reads both e
     expect(confirmed.inReplyTo).toBe(received.messageId);
     const event = await eventIn(mailbox, confirmed);
     expect(event.startDate.toJSDate().toISOString()).toBe('2027-06-19T14:00:00.000Z');
-    expect(event.summary).toContain(String(number));
+    expect(event.description).toContain(`No. ${number}`);
     await elsewhere.reload();
     await expect(elsewhere.getByRole('link', { name: 'Add to calendar' })).toBeVisible();
     await lookOver(elsewhere);

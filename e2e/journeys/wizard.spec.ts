@@ -1,10 +1,9 @@
-import { expect, test } from '../fixtures/journey.ts';
+import { expect, moment, test } from '../fixtures/journey.ts';
 import {
   answerAll,
   answerCake,
   answerDay,
   answerSetting,
-  chooseCoat,
   goOnTo,
   onStep,
   send,
@@ -14,6 +13,8 @@ import {
 import { phonePhoto, textAsPhoto } from '../fixtures/pictures.ts';
 import { bakerBehindTheScene } from '../fixtures/staff.ts';
 import { lookAtNarrow, lookOver } from '../fixtures/watch.ts';
+
+const aMinuteLater = new Date(new Date(moment).getTime() + 60_000);
 
 test(
   'reload, back and forward, two tabs and a broken upload lose nothing',
@@ -70,6 +71,8 @@ test(
 
     await test.step('another tab is ahead', async () => {
       const other = await page.context().newPage();
+      // Whichever was kept later is newer, and the journey's clock stands still.
+      await page.context().clock.setFixedTime(aMinuteLater);
       await other.goto('/order/day');
       await other.getByLabel('Number of people').fill('24');
       await other.getByLabel('Number of people').blur();
@@ -143,9 +146,15 @@ test(
     await answerSetting(page);
 
     const beside = page.getByRole('region', { name: 'Your cake so far' });
-    await expect(beside.getByText(/contains? egg/i).first()).toBeVisible();
+    const conflict = beside.getByText(/^Egg is in Swiss meringue buttercream/);
+    await expect(conflict).toBeVisible();
     await lookOver(page);
-    await chooseCoat(page, 'American');
+    await beside
+      .getByRole('button', { name: /^American/ })
+      .first()
+      .click();
+    await expect(page.getByRole('radio', { name: 'American', exact: true })).toBeChecked();
+    await expect(conflict).toBeHidden();
     await goOnTo(page, 'look');
     await goOnTo(page, 'you');
     await page.getByLabel('Your name').fill(wish.name);
