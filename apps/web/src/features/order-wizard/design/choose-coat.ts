@@ -1,19 +1,19 @@
 import type { Cake, Coating } from '#shared/contracts/design.ts';
 import type { CoatRank } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import type { CoveringId, StyleId } from '#shared/contracts/vocabulary.ts';
+import { finishIds, type CoveringId, type StyleId } from '#shared/contracts/vocabulary.ts';
 
 /** What is chosen of a coat at once; finish and colour stay where they can. */
 export type CoatPick = { readonly covering: CoveringId; readonly style: StyleId | null };
 
-/** A coat as the pick says, with the finish and colour it had, or the covering's first finish. */
+/** A coat as the pick says, with the finish and colour it had, or the plainest finish it comes with. */
 export function coatOf(pick: CoatPick, before: Coating | null, menu: Menu): Coating {
   const finishes = menu.coverings.find((it) => it.id === pick.covering)?.finishes ?? [];
   const kept = finishes.find((it) => it === before?.finish);
   return {
     covering: pick.covering,
     style: pick.style,
-    finish: kept ?? finishes[0] ?? 'smooth',
+    finish: kept ?? finishIds.find((it) => finishes.includes(it)) ?? 'smooth',
     colour: before?.colour ?? null,
   };
 }

@@ -31,3 +31,13 @@ export function spellBack(text: string): SpelledSign[] {
     return { sign, said: capital ? `capital ${sign}` : sign };
   });
 }
+
+/** The signs word by word, each word ending with the space after it, so that none is torn apart. */
+export function spelledWords(signs: readonly SpelledSign[]): SpelledSign[][] {
+  const words: SpelledSign[][] = [[]];
+  for (const sign of signs) {
+    words.at(-1)?.push(sign);
+    if (sign.sign === ' ') words.push([]);
+  }
+  return words.filter((word) => word.length > 0);
+}

@@ -2,6 +2,7 @@ import type { Tier } from '#shared/contracts/design.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { tierName } from '../../design/tier-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
@@ -63,11 +64,8 @@ export function TierEditor({ at, of, tier, onChange, onMove, onRemove, onSameIns
           />
         </div>
       )}
-      <details className="group">
-        <summary className="link inline-flex min-h-11 items-center">
-          Change its shape, size or place
-        </summary>
-        <div className="grid gap-5 pt-2 pb-1">
+      <Fold label="Change its shape, size or place">
+        <div className="grid gap-5 pb-1">
           <TierMeasures at={at} tier={tier} onChange={onChange} />
           <div className="grid gap-1">
             <Checkbox
@@ -103,7 +101,7 @@ export function TierEditor({ at, of, tier, onChange, onMove, onRemove, onSameIns
             </Button>
           </div>
         </div>
-      </details>
+      </Fold>
       {onSameInside !== null && (
         <div>
           <Button kind="quiet" className="-ml-2" onClick={onSameInside}>

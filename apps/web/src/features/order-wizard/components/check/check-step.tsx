@@ -2,7 +2,9 @@ import { useQuery } from '@tanstack/react-query';
 import { useEffect } from 'react';
 import { Link } from 'react-router-dom';
 import { formatMoney } from '#shared/kitchen/money.ts';
+import { MadeWith } from '#web/components/order/made-with.tsx';
 import { Button } from '#web/components/ui/button.tsx';
+import { Section } from '#web/components/ui/section.tsx';
 import { PageTitle } from '#web/components/ui/page-title.tsx';
 import { paths } from '#web/config/paths.ts';
 import { estimateQuery } from '../../api/get-estimate.ts';
@@ -11,7 +13,6 @@ import { steps } from '../../steps/steps.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { BottomBar } from '../frame/bottom-bar.tsx';
 import { DateWatch } from '../frame/date-watch.tsx';
-import { AllergenSummary } from './allergen-summary.tsx';
 import { CheckAdvice } from './check-advice.tsx';
 import { CheckAnswers } from './check-answers.tsx';
 import { FinalPrice } from './final-price.tsx';
@@ -47,7 +48,15 @@ export function CheckStep() {
       <PageTitle title={steps.check.question} />
       {estimate !== null && <CheckAdvice advice={estimate.advice} />}
       <CheckAnswers />
-      {estimate !== null && <AllergenSummary estimate={estimate} />}
+      {estimate !== null && (
+        <Section title="Made with">
+          <MadeWith
+            offer={estimate}
+            region={menu.studio.labelRegion}
+            kitchenNotice={menu.studio.kitchenNotice}
+          />
+        </Section>
+      )}
       <FinalPrice
         estimate={estimate}
         pending={server.isPending && design !== null}

@@ -1,7 +1,7 @@
 import { useEffect, useState } from 'react';
 import type { Estimate } from '#shared/contracts/estimates.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
-import { DataList } from '#web/components/ui/data-list.tsx';
+import { PriceList } from '#web/components/order/price-list.tsx';
 
 type Props = {
   readonly estimate: Estimate;
@@ -16,29 +16,10 @@ export function EstimateLines({
   locale,
   totalLabel = 'Estimate, before the baker has looked',
 }: Props) {
-  const money = (amount: number) => formatMoney(amount, price.currency, locale);
-  const total = money(price.totalMinor);
+  const total = formatMoney(price.totalMinor, price.currency, locale);
   return (
     <div>
-      <DataList
-        ends
-        rows={[
-          ...price.lines.map((line, at) => ({
-            key: `${at} ${line.kind} ${line.label}`,
-            label: line.label,
-            value: money(line.amountMinor),
-          })),
-          { key: 'total', label: totalLabel, value: total, total: true },
-        ]}
-      />
-      {price.taxInclusive && price.taxMinor > 0 && (
-        <p className="pt-1 text-sm text-slate">Includes {money(price.taxMinor)} of tax.</p>
-      )}
-      {price.depositMinor > 0 && (
-        <p className="pt-1 text-sm text-slate">
-          A deposit of {money(price.depositMinor)} would be due once you and the baker agree.
-        </p>
-      )}
+      <PriceList price={price} totalLabel={totalLabel} locale={locale} />
       <Aloud text={`${totalLabel}: ${total}`} />
     </div>
   );

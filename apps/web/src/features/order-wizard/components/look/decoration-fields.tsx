@@ -3,6 +3,7 @@ import type { Decoration } from '#shared/contracts/menu.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { DecorationGlyph } from '#web/components/cake-drawing/decoration-glyph.tsx';
 import { Button } from '#web/components/ui/button.tsx';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { containsLine } from '../../design/contains.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
@@ -56,10 +57,10 @@ export function DecorationFields() {
       {look.decorations.length >= most ? (
         <p className="text-slate">Forty are the most one order takes.</p>
       ) : (
-        <details open={look.decorations.length === 0 || undefined}>
-          <summary className="link inline-flex min-h-11 items-center">
-            {look.decorations.length === 0 ? 'What we make' : 'Add another'}
-          </summary>
+        <Fold
+          label={look.decorations.length === 0 ? 'What we make' : 'Add another'}
+          open={look.decorations.length === 0}
+        >
           <ul className="grid divide-y divide-seam">
             {menu.decorations.map((it) => (
               <li key={it.id} className="flex items-center gap-4 py-3">
@@ -81,7 +82,7 @@ export function DecorationFields() {
               </li>
             ))}
           </ul>
-        </details>
+        </Fold>
       )}
     </section>
   );

@@ -1,5 +1,6 @@
 import { colourPicks } from '#shared/kitchen/colour.ts';
 import { ChipChoices } from '#web/components/ui/chips.tsx';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { colourName, photoColour } from '../../design/colour-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
@@ -22,11 +23,8 @@ export function PaletteFields() {
     if (palette.length <= mostColours) change({ look: { ...look, palette } });
   };
   return (
-    <details open={look.palette.length > 0 || undefined}>
-      <summary className="link inline-flex min-h-11 items-center">
-        Colours for what goes on it
-      </summary>
-      <div className="grid gap-4 pt-2">
+    <Fold label="Colours for what goes on it" open={look.palette.length > 0}>
+      <div className="grid gap-4">
         <ChipChoices
           name="look.palette"
           legend="As many as five"
@@ -52,6 +50,6 @@ export function PaletteFields() {
           }}
         />
       </div>
-    </details>
+    </Fold>
   );
 }

@@ -1,5 +1,5 @@
 import type { CoatRank } from '#shared/contracts/estimates.ts';
-import { coveringIds, type CoveringId } from '#shared/contracts/vocabulary.ts';
+import { coveringIds, finishIds, type CoveringId } from '#shared/contracts/vocabulary.ts';
 import { CoatSwatch } from '#web/components/coats/coat-swatch.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { Dots } from '#web/components/ui/dots.tsx';
@@ -9,7 +9,7 @@ import { coatOf, pickCovering, pickFromKey, pickKey } from '../../design/choose-
 import { containsLine } from '../../design/contains.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { finishWords } from './setting-words.ts';
+import { finishWords } from './finish-words.ts';
 import { Verdict } from './verdict.tsx';
 
 /** The covering, then the buttercreams ranked for the day, then how it is finished. */
@@ -63,7 +63,9 @@ export function CoatChoice() {
         <ChipChoice
           name="cake.coating.finish"
           legend="Finish"
-          chips={(onMenu?.finishes ?? []).map((it) => ({ value: it, label: finishWords[it] }))}
+          chips={finishIds
+            .filter((it) => onMenu?.finishes.includes(it))
+            .map((it) => ({ value: it, label: finishWords[it] }))}
           value={coating.finish}
           onValue={(finish) => change({ cake: { ...cake, coating: { ...coating, finish } } })}
         />

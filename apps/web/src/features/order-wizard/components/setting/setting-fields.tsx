@@ -2,12 +2,12 @@ import { place as places } from '#shared/contracts/vocabulary.ts';
 import { formatDuration } from '#shared/dates/format.ts';
 import { warmthOf } from '#shared/kitchen/heat.ts';
 import { formatTemperature, parseDuration, parseTemperature } from '#shared/kitchen/measures.ts';
+import { placeWords } from '#web/components/order/setting-words.ts';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { NumberField } from '#web/components/ui/number-field.tsx';
 import { useAnswer } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { placeWords } from './setting-words.ts';
 
 const parsedTemperature = (lead: 'F' | 'C') => (text: string) => parseTemperature(text, lead);
 

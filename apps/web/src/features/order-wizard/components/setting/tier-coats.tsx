@@ -1,11 +1,12 @@
 import type { Coating } from '#shared/contracts/design.ts';
 import type { CoatRank } from '#shared/contracts/estimates.ts';
 import { coatingName } from '#shared/kitchen/resolve-design.ts';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { coatOf, coatTier, pickFromKey, pickKey } from '../../design/choose-coat.ts';
 import { tierName } from '../../design/tier-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
-import { finishWords } from './setting-words.ts';
+import { finishWords } from './finish-words.ts';
 
 const levelWords = { ok: '', care: ' (with care)', stop: ' (not for your day)' } as const;
 
@@ -26,9 +27,8 @@ export function TierCoats() {
     change({ cake: coatTier(cake, at, coating) });
 
   return (
-    <details open={any || undefined}>
-      <summary className="link inline-flex min-h-11 items-center">Another coat on one tier</summary>
-      <ol className="grid gap-4 pt-2">
+    <Fold label="Another coat on one tier" open={any}>
+      <ol className="grid gap-4">
         {cake.tiers
           .map((tier, at) => {
             const finishes =
@@ -79,6 +79,6 @@ export function TierCoats() {
           })
           .toReversed()}
       </ol>
-    </details>
+    </Fold>
   );
 }

@@ -1,10 +1,9 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
-import { declaredName } from '../../../design/contains.ts';
+import { allergyWords } from '#web/components/order/allergy-words.ts';
 import { dietWords } from '../../../design/diet-words.ts';
 import type { OrderForm } from '../../../draft/empty-order.ts';
-import { severityWords } from '../../day/severity-words.ts';
 import type { CheckRow } from '../check-rows.tsx';
 
 /** Who eats and when, as it was told. */
@@ -32,7 +31,7 @@ export function dayRows({ day }: OrderForm, menu: Menu): CheckRow[] {
     },
     ...day.allergies.map((it, at) => ({
       label: at === 0 ? 'Allergies' : 'and',
-      value: `${capitalise(declaredName(it, region))}: ${severityWords[it.severity].toLowerCase()}, ${it.guests === 1 ? 'one guest' : `${it.guests} guests`}`,
+      value: allergyWords(it, region),
       field: `day.allergies.${at}.allergen`,
     })),
   ];

@@ -3,10 +3,11 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import { formatDuration } from '#shared/dates/format.ts';
 import { formatTemperature } from '#shared/kitchen/measures.ts';
 import { coatingName } from '#shared/kitchen/resolve-design.ts';
+import { placeWords } from '#web/components/order/setting-words.ts';
 import { tierName } from '../../../design/tier-name.ts';
 import { tidyOrder } from '../../../design/tidy-order.ts';
 import type { OrderForm } from '../../../draft/empty-order.ts';
-import { finishWords, placeWords } from '../../setting/setting-words.ts';
+import { finishWords } from '../../setting/finish-words.ts';
 import type { CheckRow } from '../check-rows.tsx';
 
 /** Where it stands and what goes over it. */
