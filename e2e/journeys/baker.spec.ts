@@ -47,8 +47,8 @@ test('a baker confirms from the calendar and follows the cake to the door', asyn
   });
 
   await test.step('hands it over with who took it and a photo', async () => {
-    await page.getByRole('button', { name: 'Collected', exact: true }).click();
-    const dialog = dialogOf(page, `No. ${number} is collected`);
+    await page.getByRole('button', { name: 'Hand over' }).click();
+    const dialog = dialogOf(page, `Hand over No. ${number}`);
     await dialog.getByLabel('Who takes it').fill('Tomas Adair');
     await dialog.getByLabel('How it looked').fill('Upright and cold');
     await dialog
@@ -60,7 +60,11 @@ test('a baker confirms from the calendar and follows the cake to the door', asyn
     const record = page.getByRole('region', { name: 'Handed over' });
     await expect(record.getByText('Tomas Adair')).toBeVisible();
     await expect(record.getByText('Ida Crane')).toBeVisible();
-    await expect(record.getByRole('img')).toBeVisible();
+    await record.getByRole('button', { name: /^See large: At handover/ }).click();
+    await expect(page.getByRole('dialog').getByRole('img')).toBeVisible();
+    await lookOver(page);
+    await page.keyboard.press('Escape');
+    await expect(page.getByRole('dialog')).toBeHidden();
     await mailbox.waitForMessage({ to: customer, subject: 'thank you' });
     await lookOver(page);
   });
