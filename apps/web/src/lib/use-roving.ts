@@ -46,6 +46,5 @@ export function useRoving(count: number, start: number, steps: Steps = alongRow)
   return itemAt;
 }
 
-export const alongRow: Steps = { ArrowRight: 1, ArrowLeft: -1 };
-export const alongColumn: Steps = { ArrowDown: 1, ArrowUp: -1 };
+const alongRow: Steps = { ArrowRight: 1, ArrowLeft: -1 };
 export const alongWeeks: Steps = { ArrowRight: 1, ArrowLeft: -1, ArrowDown: 7, ArrowUp: -7 };

@@ -23,38 +23,40 @@ export function MePage() {
   const signOut = useSignOut();
   const navigate = useNavigate();
   return (
-    <div className="page grid max-w-3xl gap-8 py-6">
-      <div className="grid gap-2">
-        <PageTitle title={user?.name ?? 'Your own sign-in'} />
-        {user !== null && (
-          <p className="text-slate">
-            {user.role}, {user.email}
-          </p>
-        )}
-        {signOut.isError && <Failure error={signOut.error} />}
-        <div>
-          <Button
-            kind="secondary"
-            pending={signOut.isPending}
-            onClick={() =>
-              signOut.mutate(undefined, { onSuccess: () => void navigate(paths.staffSignIn) })
-            }
-          >
-            Sign out
-          </Button>
+    <div className="page py-6">
+      <div className="grid max-w-3xl gap-8">
+        <div className="grid gap-2">
+          <PageTitle title={user?.name ?? 'Your own sign-in'} />
+          {user !== null && (
+            <p className="text-slate">
+              {user.role}, {user.email}
+            </p>
+          )}
+          {signOut.isError && <Failure error={signOut.error} />}
+          <div>
+            <Button
+              kind="secondary"
+              pending={signOut.isPending}
+              onClick={() =>
+                signOut.mutate(undefined, { onSuccess: () => void navigate(paths.staffSignIn) })
+              }
+            >
+              Sign out
+            </Button>
+          </div>
         </div>
+        <Section title="Second factor">
+          <Rim>
+            <OwnSecondFactor set={user?.secondFactor === 'done'} />
+          </Rim>
+        </Section>
+        <Section title="Where you are signed in">
+          <SessionList locale={locale} />
+        </Section>
+        <Section title="Password">
+          <ChangePasswordForm />
+        </Section>
       </div>
-      <Section title="Second factor">
-        <Rim>
-          <OwnSecondFactor set={user?.secondFactor === 'done'} />
-        </Rim>
-      </Section>
-      <Section title="Where you are signed in">
-        <SessionList locale={locale} />
-      </Section>
-      <Section title="Password">
-        <ChangePasswordForm />
-      </Section>
     </div>
   );
 }

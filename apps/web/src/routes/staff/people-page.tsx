@@ -44,7 +44,7 @@ export function PeoplePage() {
                   : 'Without one, a stolen password is enough to read customers’ addresses and allergies.'}
               </p>
             </Notice>
-            <Rim label="People">
+            <Rim label="People" className="overflow-hidden">
               <PeopleList people={data} zone={zone} locale={locale} />
             </Rim>
           </div>

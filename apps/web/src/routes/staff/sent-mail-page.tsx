@@ -13,20 +13,22 @@ export function SentMailPage() {
   const { data, error, isPending, refetch, isFetching } = useSentMail(useParams().id ?? '');
   const navigate = useNavigate();
   return (
-    <div className="page grid max-w-4xl gap-5 py-6">
-      <div>
-        <Button kind="quiet" className="-ml-2" onClick={() => void navigate(-1)}>
-          Back
-        </Button>
+    <div className="page py-6">
+      <div className="grid max-w-4xl gap-5">
+        <div>
+          <Button kind="quiet" className="-ml-2" onClick={() => void navigate(-1)}>
+            Back
+          </Button>
+        </div>
+        <PageTitle title={data?.subject ?? 'E-mail'} />
+        {isPending ? (
+          <Pending what="Fetching the e-mail…" />
+        ) : data === undefined ? (
+          <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
+        ) : (
+          <SentMail mail={data} zone={zone} locale={locale} />
+        )}
       </div>
-      <PageTitle title={data?.subject ?? 'E-mail'} />
-      {isPending ? (
-        <Pending what="Fetching the e-mail…" />
-      ) : data === undefined ? (
-        <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
-      ) : (
-        <SentMail mail={data} zone={zone} locale={locale} />
-      )}
     </div>
   );
 }

@@ -24,6 +24,7 @@ export function fillOf({ benchMinutes, plannedMinutes }: CalendarDay): number {
 
 /** "5.1 of 12 h"; a day without anybody at the bench has no figure. */
 export function hoursWords({ benchMinutes, plannedMinutes }: CalendarDay): string {
+  if (benchMinutes === 0 && plannedMinutes > 0) return `${formatHours(plannedMinutes)} h of work`;
   if (benchMinutes === 0 && plannedMinutes === 0) return '';
   return `${formatHours(plannedMinutes)} of ${formatHours(benchMinutes)} h`;
 }
@@ -32,6 +33,7 @@ export function hoursWords({ benchMinutes, plannedMinutes }: CalendarDay): strin
 export function loadWords(day: CalendarDay): string {
   switch (loadOf(day)) {
     case 'overfull':
+      if (day.benchMinutes === 0) return day.closed === null ? 'nobody there' : 'but closed';
       return `${formatDuration(day.plannedMinutes - day.benchMinutes)} too much`;
     case 'full':
       return 'full, and it fits';

@@ -26,6 +26,8 @@ describe('a day’s load', () => {
     expect(loadOf(closed)).toBe('closed');
     expect(loadOf({ ...closed, plannedMinutes: 60 })).toBe('overfull');
     expect(fillOf({ ...closed, plannedMinutes: 60 })).toBeGreaterThan(1);
+    expect(hoursWords({ ...closed, plannedMinutes: 60 })).toBe('1 h of work');
+    expect(loadWords({ ...closed, plannedMinutes: 60 })).toBe('but closed');
   });
 });
 

@@ -33,7 +33,9 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
     return <Failure error={look.error} onRetry={() => void look.refetch()} />;
   }
   const { price, email, blockers, fits, rowVersion } = look.data;
-  const blocked = blockers.length > 0 || !order.can.confirm;
+  // Once it is under way the order itself says no more confirming; that is no news.
+  const pressed = confirm.isPending || confirm.isSuccess;
+  const blocked = !pressed && (blockers.length > 0 || !order.can.confirm);
   const noteWaits = note.trim() !== shownNote;
 
   return (
@@ -46,7 +48,7 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
             <FitLine fits={fits} />
           </div>
           {blockers.length > 0 && <Blocked order={order} blockers={blockers} onClose={onClose} />}
-          {blockers.length === 0 && !order.can.confirm && (
+          {blocked && blockers.length === 0 && (
             <Notice tone="butter" title="It cannot be confirmed just now" live="polite">
               <p>
                 {order.status === 'asked' && !fits.fits

@@ -1,10 +1,10 @@
 /** What the staff can do to an order; each opens its own dialog. */
 export const orderActs = [
   'confirm',
-  'move',
   'start',
   'ready',
   'collect',
+  'move',
   'uncollected',
   'decline',
 ] as const;

@@ -3,6 +3,7 @@ import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { AdviceNote, byGravity } from '#web/components/order/advice-note.tsx';
 import { allergyWords } from '#web/components/order/allergy-words.ts';
 import { instantWords } from '#web/components/order/order-times.ts';
+import { classNames } from '#web/lib/class-names.ts';
 import { AnswerAllergy, LiftStop } from './settle-forms.tsx';
 
 type Props = { readonly order: StaffOrder; readonly menu: Menu };
@@ -31,7 +32,12 @@ export function CareBlock({ order, menu }: Props) {
       <h2 id="settle-title">
         {allergies.length > 0 ? 'Allergies at the table' : 'Settle this before you confirm'}
       </h2>
-      <div className="grid items-start gap-x-10 gap-y-5 lg:grid-cols-2">
+      <div
+        className={classNames(
+          'grid items-start gap-x-10 gap-y-5',
+          allergies.length > 0 && blockers.length > 0 && 'lg:grid-cols-2',
+        )}
+      >
         {allergies.length > 0 && (
           <ul className="grid gap-4">
             {allergies.map((it) => (

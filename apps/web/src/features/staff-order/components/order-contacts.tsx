@@ -13,6 +13,8 @@ const parts: Readonly<Record<StaffOrder['contacts'][number]['as'], string>> = {
   collects: 'Collects',
 };
 
+const places: readonly StaffOrder['contacts'][number]['as'][] = ['ordered', 'pays', 'collects'];
+
 const reach: Readonly<Record<string, string>> = {
   email: 'prefers e-mail',
   phone: 'prefers a call',
@@ -25,31 +27,33 @@ export function OrderContacts({ order }: { readonly order: StaffOrder }) {
   return (
     <div className="grid gap-3">
       <DataList
-        rows={order.contacts.map((it) => ({
-          key: it.as,
-          label: parts[it.as],
-          value: (
-            <span className="grid justify-items-start">
-              <strong>{it.name}</strong>
-              {it.email !== '' && (
-                <a href={`mailto:${it.email}`} className="link inline-block py-0.5 break-all">
-                  {it.email}
-                </a>
-              )}
-              {it.phone !== '' && (
-                <a
-                  href={`tel:${it.phone.replaceAll(/[^+\d]/g, '')}`}
-                  className="link inline-block py-0.5"
-                >
-                  {it.phone}
-                </a>
-              )}
-              {reach[it.reachBy] !== undefined && (
-                <span className="text-sm text-slate">{reach[it.reachBy]}</span>
-              )}
-            </span>
-          ),
-        }))}
+        rows={order.contacts
+          .toSorted((a, b) => places.indexOf(a.as) - places.indexOf(b.as))
+          .map((it) => ({
+            key: it.as,
+            label: parts[it.as],
+            value: (
+              <span className="grid justify-items-start">
+                <strong>{it.name}</strong>
+                {it.email !== '' && (
+                  <a href={`mailto:${it.email}`} className="link inline-block py-0.5 break-all">
+                    {it.email}
+                  </a>
+                )}
+                {it.phone !== '' && (
+                  <a
+                    href={`tel:${it.phone.replaceAll(/[^+\d]/g, '')}`}
+                    className="link inline-block py-0.5"
+                  >
+                    {it.phone}
+                  </a>
+                )}
+                {it.as === 'ordered' && reach[it.reachBy] !== undefined && (
+                  <span className="text-sm text-slate">{reach[it.reachBy]}</span>
+                )}
+              </span>
+            ),
+          }))}
       />
       <p className="text-sm text-slate">
         {order.showPhotos

@@ -59,7 +59,7 @@ export function OrderHead({ order, menu, onAct }: Props) {
               kind={
                 act === 'decline' || act === 'uncollected'
                   ? 'danger'
-                  : at === 0
+                  : at === 0 && act !== 'move'
                     ? 'primary'
                     : 'secondary'
               }

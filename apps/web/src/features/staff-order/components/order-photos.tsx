@@ -15,12 +15,14 @@ type Ours = (typeof ours)[number];
 
 /** What the customer sent and what the studio took. */
 export function OrderPhotos({ order }: { readonly order: StaffOrder }) {
+  // The one taken at the handover stands with its record.
+  const photos = order.photos.filter((it) => it.id !== order.handover?.photo?.id);
   return (
     <div className="grid gap-5">
-      {order.photos.length === 0 ? (
+      {photos.length === 0 ? (
         <p className="text-slate">There are none.</p>
       ) : (
-        <PhotoGrid photos={order.photos} />
+        <PhotoGrid photos={photos} />
       )}
       {order.can.addPhotos && (
         <Unfold label="Add a photo">

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import type { Advice } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
@@ -39,6 +40,14 @@ const made: Readonly<Record<OrderStatus, number>> = {
   uncollected: 1,
 };
 
+/** Said above, with the allergies they are about. */
+const aboutAllergies: readonly Advice['code'][] = [
+  'allergen',
+  'kitchen',
+  'allergen-unknown',
+  'allergy-text',
+];
+
 /** One order, everything in one place; what may be done is what the server says. */
 export function OrderView({ order, menu }: Props) {
   const [act, setAct] = useState<OrderAct | null>(null);
@@ -47,27 +56,30 @@ export function OrderView({ order, menu }: Props) {
   const said = new Set(order.blockers.map((it) => `${it.code} ${it.about}`));
   const advice = order.estimate.advice.filter(
     (it) =>
-      it.level !== 'ok' &&
-      !['allergen', 'kitchen', 'allergen-unknown'].includes(it.code) &&
-      !said.has(`${it.code} ${it.about}`),
+      it.level !== 'ok' && !aboutAllergies.includes(it.code) && !said.has(`${it.code} ${it.about}`),
   );
   return (
     <div className="grid gap-8">
       <OrderHead order={order} menu={menu} onAct={setAct} />
       <CareBlock order={order} menu={menu} />
-      <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-[minmax(20rem,0.8fr)_1fr]">
-        <Rim className="grid gap-5 p-5 sm:p-7">
-          <CakeDrawing cake={cake} look={look} menu={menu} made={made[order.status]} />
-          <PriceList
-            price={order.agreedPrice ?? order.estimate.price}
-            totalLabel={order.agreedPrice === null ? 'Offer, not confirmed yet' : 'Agreed'}
-            locale={locale}
-          />
-          {order.estimate.keepCool !== '' && (
-            <p className="text-sm text-slate">{order.estimate.keepCool}</p>
-          )}
-        </Rim>
-        <div className="grid gap-8">
+      <div className="grid items-start gap-x-8 gap-y-8 md:grid-cols-[minmax(18rem,0.8fr)_minmax(0,1fr)]">
+        <div className="grid min-w-0 gap-8">
+          <Rim className="grid gap-5 p-5 sm:p-7">
+            <CakeDrawing cake={cake} look={look} menu={menu} made={made[order.status]} />
+            <PriceList
+              price={order.agreedPrice ?? order.estimate.price}
+              totalLabel={order.agreedPrice === null ? 'Offer, not confirmed yet' : 'Agreed'}
+              locale={locale}
+            />
+            {order.estimate.keepCool !== '' && (
+              <p className="text-sm text-slate">{order.estimate.keepCool}</p>
+            )}
+          </Rim>
+          <Section title="Messages">
+            <OrderMessages order={order} menu={menu} />
+          </Section>
+        </div>
+        <div className="grid min-w-0 gap-8">
           {order.handover !== null && (
             <Section title="Handed over">
               <HandoverRecord handover={order.handover} menu={menu} />
@@ -95,17 +107,14 @@ export function OrderView({ order, menu }: Props) {
       <Section title="Photos">
         <OrderPhotos order={order} />
       </Section>
-      <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-2">
-        <Section title="Messages">
-          <OrderMessages order={order} menu={menu} />
-        </Section>
-        <Section title="People">
-          <OrderContacts order={order} />
-        </Section>
+      <div className="grid items-start gap-x-8 gap-y-8 md:grid-cols-[minmax(18rem,0.8fr)_minmax(0,1fr)]">
         <Section title="In the plan">
           <OrderPlan order={order} menu={menu} />
         </Section>
-        <div className="grid gap-8">
+        <div className="grid min-w-0 gap-8">
+          <Section title="People">
+            <OrderContacts order={order} />
+          </Section>
           <Section title="E-mails">
             <OrderMail order={order} menu={menu} />
           </Section>

@@ -3,6 +3,7 @@ import type { Photo } from '#shared/contracts/photos.ts';
 import { FieldError } from '#web/components/ui/field-frame.tsx';
 import { Button } from '#web/components/ui/button.tsx';
 import { Progress } from '#web/components/ui/progress.tsx';
+import { acceptedPhotos } from '#web/lib/accepted-photos.ts';
 import { describeFailure } from '#web/lib/describe-failure.ts';
 import { photoAddress, photoAlt } from '#web/components/photos/photo-address.ts';
 import { useAddOrderPhoto } from '../api/add-order-photo.ts';
@@ -17,9 +18,6 @@ type Props = {
   readonly photo: Photo | null;
   readonly onPhoto: (photo: Photo) => void;
 };
-
-/** What a phone's camera or a folder offers; the list lets phones turn HEIC into JPEG themselves. */
-const pictures = 'image/jpeg,image/png,image/webp,image/avif,image/gif';
 
 /** Takes one photo and sends it at once, with progress; a failed one can be sent again. */
 export function PhotoChoice({ number, kind, label, hint, note = '', photo, onPhoto }: Props) {
@@ -43,7 +41,7 @@ export function PhotoChoice({ number, kind, label, hint, note = '', photo, onPho
       <input
         id={id}
         type="file"
-        accept={pictures}
+        accept={acceptedPhotos}
         aria-describedby={`${id}-hint ${id}-error`}
         className="min-h-11 max-w-full text-sm file:mr-3 file:min-h-11 file:cursor-pointer file:rounded-action file:border-[1.5px] file:border-solid file:border-cobalt file:bg-enamel file:px-4 file:font-semibold file:text-cobalt"
         onChange={(event) => {
