@@ -1,5 +1,6 @@
 import type { Request } from 'express';
 import { User } from '#api/db/models/user.ts';
+import { grantedOrders } from '#api/modules/orders/granted-orders.queries.ts';
 import type { Actor } from '#api/platform/actor.ts';
 import './session-data.ts';
 
@@ -29,13 +30,16 @@ export async function accountOf(request: Request): Promise<User | null> {
 }
 
 async function findActor(request: Request): Promise<Actor> {
-  const { secondFactor, orderIds = [] } = request.session;
+  const { secondFactor, orders = [] } = request.session;
   const user = await accountOf(request);
   if (user === null || user.email === null) {
+    const orderIds = await grantedOrders(orders);
     return orderIds.length === 0 ? { kind: 'visitor' } : { kind: 'guest', orderIds };
   }
   const { id, name, email, role } = user;
-  if (role === 'customer') return { kind: 'customer', userId: id, name, email, orderIds };
+  if (role === 'customer') {
+    return { kind: 'customer', userId: id, name, email, orderIds: await grantedOrders(orders) };
+  }
   if (secondFactor === 'needed' || secondFactor === 'to-enrol') {
     return { kind: 'visitor', awaiting: 'second-factor' };
   }

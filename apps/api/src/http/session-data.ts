@@ -1,4 +1,5 @@
 import 'express-session';
+import type { OrderGrant } from '#api/platform/private-link.ts';
 
 declare module 'express-session' {
   /** What a session keeps, beside its cookie. */
@@ -9,8 +10,8 @@ declare module 'express-session' {
     staff?: boolean;
     /** Of staff: until it is `done` (or `none` is asked for) there are no rights. */
     secondFactor?: SecondFactorState;
-    /** Orders whose private link this browser has opened. */
-    orderIds?: string[];
+    /** Orders whose private link this browser has opened; good until the link is renewed. */
+    orders?: OrderGrant[];
     /** What the browser says it is, for the list of one's own sessions. */
     agent?: string;
     address?: string;

@@ -30,7 +30,7 @@ const touchEveryMs = 5 * minute;
 
 export function limitsOf(data: SessionData): Limits {
   if (data.userId === undefined) {
-    return data.orderIds === undefined ? sessionLimits.passing : sessionLimits.customer;
+    return data.orders === undefined ? sessionLimits.passing : sessionLimits.customer;
   }
   if (data.secondFactor === 'needed') return sessionLimits.halfway;
   return data.staff === true ? sessionLimits.staff : sessionLimits.customer;

@@ -2,6 +2,8 @@ import { promisify } from 'node:util';
 import type { Request, RequestHandler } from 'express';
 import session from 'express-session';
 import type { Deps } from '#api/modules/deps.ts';
+import { grantOf } from '#api/platform/private-link.ts';
+import type { LinkedOrder } from '#api/platform/private-link.ts';
 import { forgetActor } from './authenticate.ts';
 import type { SecondFactorState } from './session-data.ts';
 import { sessionLimits, SessionStore } from './session-store.ts';
@@ -47,24 +49,30 @@ export type SignedIn = {
  * nothing any more). Private links a customer opened as a guest are carried over; staff have none.
  */
 export async function startSession(request: Request, who: SignedIn): Promise<void> {
-  const orderIds = request.session.orderIds ?? [];
+  const { orders = [] } = request.session;
   await renew(request);
   request.session.userId = who.userId;
   request.session.staff = who.staff;
   request.session.secondFactor = who.secondFactor;
-  if (!who.staff && orderIds.length > 0) request.session.orderIds = orderIds;
+  if (!who.staff && orders.length > 0) request.session.orders = orders;
   await saveSession(request);
 }
 
+/** Of more private links than anybody holds, the latest count. */
+const mostOrders = 200;
+
 /** Adds an order this browser may see; the session is renewed since its rights grow. */
-export async function grantOrder(request: Request, orderId: string): Promise<void> {
-  const { userId, staff, secondFactor, orderIds = [] } = request.session;
-  if (orderIds.includes(orderId)) return;
+export async function grantOrder(request: Request, order: LinkedOrder): Promise<void> {
+  const { userId, staff, secondFactor, orders = [] } = request.session;
+  const grant = grantOf(order);
+  const others = orders.filter(({ id }) => id !== grant.id);
+  const had = orders.find(({ id }) => id === grant.id);
+  if (had !== undefined && had.renewedAt === grant.renewedAt) return;
   await renew(request);
   request.session.userId = userId;
   request.session.staff = staff;
   request.session.secondFactor = secondFactor;
-  request.session.orderIds = [...orderIds, orderId];
+  request.session.orders = [...others, grant].slice(-mostOrders);
   await saveSession(request);
 }
 

@@ -1,6 +1,14 @@
 import { deriveKey } from './ids.ts';
 
-type LinkedOrder = { readonly id: string; readonly keyRenewedAt: Date | null };
+export type LinkedOrder = { readonly id: string; readonly keyRenewedAt: Date | null };
+
+/** What a browser keeps of a private link it has opened: the order, and which link it was. */
+export type OrderGrant = { readonly id: string; readonly renewedAt: string | null };
+
+/** What opening the link as it is now grants; renewing it makes another. */
+export function grantOf({ id, keyRenewedAt }: LinkedOrder): OrderGrant {
+  return { id, renewedAt: keyRenewedAt?.toISOString() ?? null };
+}
 
 /**
  * The key of an order's private link. It is worked out from the order's row, so that a mail

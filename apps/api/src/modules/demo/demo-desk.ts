@@ -3,7 +3,7 @@ import path from 'node:path';
 import type { Design } from '#shared/contracts/design.ts';
 import type { PhotoClaim } from '#shared/contracts/photos.ts';
 import type { PhotoKind } from '#shared/contracts/vocabulary.ts';
-import { Order } from '#api/db/models/order.ts';
+import type { Order } from '#api/db/models/order.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { openPrivateLink } from '#api/modules/orders/open-private-link.command.ts';
 import { submitOrder } from '#api/modules/orders/submit-order.command.ts';
@@ -41,7 +41,7 @@ export async function sendDemoOrder(deps: Deps, wanted: Wanted): Promise<Order |
     photos.push(await sendPicture(deps, drawing, index));
   }
   const { day, ...form } = wanted.form;
-  const { orderId } = await submitOrder(deps, {
+  const { order } = await submitOrder(deps, {
     form: {
       ...form,
       day: { ...day, ...pickup },
@@ -54,7 +54,6 @@ export async function sendDemoOrder(deps: Deps, wanted: Wanted): Promise<Order |
     // Everybody from a place of their own: the limit of one place is not for the demo.
     network: form.you.email,
   });
-  const order = await Order.findByPk(orderId, { rejectOnEmpty: true });
   if (wanted.opensLink) {
     const key = privateKeyOf(deps.env.sessionSecret, order);
     await openPrivateLink(deps, { code: order.code, key });

@@ -45,13 +45,13 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
     },
     async ({ actor, body, idempotencyKey, request }) => {
       authorise(actor, maySubmitOrder(actor));
-      const { orderId, answer } = await submitOrderCommand(deps, {
+      const { order, answer } = await submitOrderCommand(deps, {
         form: body,
         idempotencyKey,
         actor,
         network: networkOf(request),
       });
-      if (answer.key !== null) await grantOrder(request, orderId);
+      if (answer.key !== null) await grantOrder(request, order);
       return answer;
     },
     limitByAddress(deps, 'submit-order'),

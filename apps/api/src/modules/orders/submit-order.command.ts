@@ -36,7 +36,7 @@ export type SubmitInput = {
   readonly network: string;
 };
 
-type Submitted = { readonly orderId: string; readonly answer: SubmittedOrder };
+type Submitted = { readonly order: Order; readonly answer: SubmittedOrder };
 
 /** How long the same key still answers the same order. */
 const keyDays = 30;
@@ -160,7 +160,7 @@ async function placeAndWrite(
       return {
         revisionId,
         itemId: cakeItemId,
-        value: { orderId, answer: { ...kept, key: keyFor(deps, actor, order) } },
+        value: { order, answer: { ...kept, key: keyFor(deps, actor, order) } },
       };
     },
   );
@@ -280,7 +280,7 @@ async function findSubmitted(
   const order = await Order.findByPk(row.orderId, { rejectOnEmpty: true });
   const kept = z.parse(keptAnswer, JSON.parse(row.response));
   return {
-    orderId: order.id,
+    order,
     answer: { ...kept, key: keyFor(deps, input.actor, order) },
   };
 }
@@ -289,10 +289,13 @@ function keyRow({ idempotencyKey }: SubmitInput) {
   return { scope: 'submit-order', key: idempotencyKey };
 }
 
-/** Guests get a key of their own; whoever is signed in finds the order in the account. */
+/**
+ * Guests get a key of their own; whoever is signed in finds the order in the account. Once the
+ * studio has renewed the link, sending the same again opens nothing: the new link does.
+ */
 function keyFor({ env }: Deps, actor: Actor, order: Order): string | null {
   const known = actor.kind === 'customer' || actor.kind === 'staff';
-  return known ? null : senderKeyOf(env.sessionSecret, order);
+  return known || order.keyRenewedAt !== null ? null : senderKeyOf(env.sessionSecret, order);
 }
 
 /** @throws `not-allowed` for whoever the table of moves does not let send orders */

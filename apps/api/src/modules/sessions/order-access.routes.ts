@@ -19,8 +19,7 @@ export function orderAccessRoutes(deps: Deps): FeatureRoutes {
       response: done,
     },
     async ({ body, request }) => {
-      const { orderId } = await openPrivateLink(deps, body);
-      await grantOrder(request, orderId);
+      await grantOrder(request, await openPrivateLink(deps, body));
       return itIsDone;
     },
     limitByAddress(deps, 'open-private-link'),

@@ -1,7 +1,7 @@
 import ICAL from 'ical.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { problem } from '#shared/contracts/common.ts';
-import { orderView } from '#shared/contracts/orders.ts';
+import { orderView, submittedOrder } from '#shared/contracts/orders.ts';
 import { confirmationLook, orderList, staffOrder } from '#shared/contracts/staff.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { Hold } from '#api/db/models/hold.ts';
@@ -12,7 +12,7 @@ import { expireHolds } from '#api/modules/plan/expire-holds.command.ts';
 import { hasPlace } from '#api/modules/plan/plan.queries.ts';
 import { newId } from '#api/platform/ids.ts';
 import { privateKeyOf } from '#api/platform/private-link.ts';
-import { orderForm, placeOrder } from '#api/testing/order-form.ts';
+import { orderForm, placeOrder, sendOrder } from '#api/testing/order-form.ts';
 import type { FormChanges } from '#api/testing/order-form.ts';
 import { addUser, setSecondFactorRequired, signInStaff } from '#api/testing/people.ts';
 import { seededStudio } from '#api/testing/studio.ts';
@@ -335,16 +335,25 @@ describe('messages and links', () => {
     );
   });
 
-  it('renews the private link: the old key opens nothing, the new one does', async () => {
-    const { number, code } = await ask();
+  it('renews the private link: the old key and who came by it see nothing any more', async () => {
+    const form = orderForm(nextFriday());
+    const sender = app.visitor();
+    const sent = await sendOrder(sender, form, 'before-renewing');
+    const { number, code } = submittedOrder.parse(sent.body);
     const order = await Order.findOne({ where: { code }, rejectOnEmpty: true });
     const old = privateKeyOf(app.env.sessionSecret, order);
     app.clock.advance({ minutes: 1 });
     expect((await move(counter, number, 'link', { rowVersion: 1 })).status).toBe(200);
     const fresh = privateKeyOf(app.env.sessionSecret, await order.reload());
-    const open = (key: string) => app.visitor().post('/api/order-access', { code, key });
+    const open = (key: string, by = app.visitor()) => by.post('/api/order-access', { code, key });
     expect((await open(old)).status).toBe(404);
-    expect((await open(fresh)).status).toBe(200);
+    expect((await sender.get(`/api/orders/${code}`)).status).toBe(404);
+    // Sending the same once more is still the same order, and no way in.
+    const again = await sendOrder(sender, form, 'before-renewing');
+    expect(submittedOrder.parse(again.body)).toMatchObject({ code, key: null });
+    expect((await sender.get(`/api/orders/${code}`)).status).toBe(404);
+    expect((await open(fresh, sender)).status).toBe(200);
+    expect((await sender.get(`/api/orders/${code}`)).status).toBe(200);
     expect(await kindsOf(code)).toContain('private-link-renewed');
   });
 });
