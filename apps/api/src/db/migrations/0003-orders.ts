@@ -354,6 +354,16 @@ CREATE INDEX handovers_by_user_id ON handovers (by_user_id);
 -- A settled quote never changes, nor do its lines once it has been sent.
 CREATE TRIGGER quotes_settled BEFORE UPDATE ON quotes
 WHEN OLD.state IN ('agreed', 'lapsed', 'withdrawn')
+  -- Blanking the note, which is written to a person, is all that erasing needs.
+  AND NOT (NEW.note = ''
+    AND NEW.id = OLD.id AND NEW.order_id = OLD.order_id AND NEW.revision_id = OLD.revision_id
+    AND NEW.n = OLD.n AND NEW.state = OLD.state AND NEW.terms_text = OLD.terms_text
+    AND NEW.total_minor = OLD.total_minor AND NEW.deposit_minor = OLD.deposit_minor
+    AND NEW.currency = OLD.currency AND NEW.expires_at IS OLD.expires_at
+    AND NEW.deposit_due_at IS OLD.deposit_due_at AND NEW.balance_due_on IS OLD.balance_due_on
+    AND NEW.sent_at IS OLD.sent_at AND NEW.agreed_at IS OLD.agreed_at
+    AND NEW.agreed_by IS OLD.agreed_by AND NEW.created_at = OLD.created_at
+    AND NEW.created_by_user_id IS OLD.created_by_user_id)
 BEGIN SELECT RAISE(ABORT, 'a settled quote is never changed'); END;
 CREATE TRIGGER quotes_no_delete BEFORE DELETE ON quotes WHEN OLD.state <> 'draft'
 BEGIN SELECT RAISE(ABORT, 'a sent quote is never deleted'); END;

@@ -1,14 +1,16 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import * as z from 'zod/mini';
 import { accountExport } from '#shared/contracts/accounts.ts';
+import { LiftedStop } from '#api/db/models/lifted-stop.ts';
 import { Message } from '#api/db/models/message.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
 import { Order } from '#api/db/models/order.ts';
+import { Quote } from '#api/db/models/quote.ts';
 import { User } from '#api/db/models/user.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import { makeOrder } from '#api/testing/factories.ts';
-import { lastLinkKey, signInCustomer } from '#api/testing/people.ts';
+import { addUser, lastLinkKey, signInCustomer } from '#api/testing/people.ts';
 import { seededStudio } from '#api/testing/studio.ts';
 import { startTestApp, type TestApp } from '#api/testing/test-app.ts';
 
@@ -96,6 +98,24 @@ describe('erasing', () => {
         actorKind: 'guest',
         data: {},
       });
+      await Quote.create({
+        orderId: order.id,
+        revisionId: order.currentRevisionId ?? '',
+        n: 1,
+        state: 'agreed',
+        note: 'Strained, for Leaving’s aunt',
+        totalMinor: 9000,
+        currency: 'USD',
+      });
+      await LiftedStop.create({
+        orderId: order.id,
+        revisionId: order.currentRevisionId ?? '',
+        code: 'allergy-text',
+        about: 'allergy-text:a private word on lupin',
+        reason: 'Leaving’s mother brings her own slice.',
+        liftedByUserId: (await addUser('owner')).id,
+        liftedAt: app.clock.now(),
+      });
     });
     const client = await signInCustomer(app, 'leaving@example.com');
     const user = await User.findOne({ where: { email: 'leaving@example.com' } });
@@ -113,8 +133,11 @@ describe('erasing', () => {
       await OrderContact.findAll({ where: { orderId: order.id } }),
       await Message.findAll({ where: { orderId: order.id } }),
       await Order.findByPk(order.id),
+      await Quote.findAll({ where: { orderId: order.id } }),
+      await LiftedStop.findAll({ where: { orderId: order.id } }),
     ]);
     expect(left).not.toMatch(/leaving|private word/i);
+    expect(left).toContain('9000');
     expect(await OrderEvent.count({ where: { orderId: order.id } })).toBe(1);
     expect((await app.visitor().post('/api/session/links/use', { token })).status).toBe(410);
     // The address may begin anew, with nothing of before.

@@ -6,6 +6,7 @@ import { Handover } from '#api/db/models/handover.ts';
 import { IdempotencyKey } from '#api/db/models/idempotency-key.ts';
 import { Identity } from '#api/db/models/identity.ts';
 import { ItemTier } from '#api/db/models/item-tier.ts';
+import { LiftedStop } from '#api/db/models/lifted-stop.ts';
 import { MailAttempt } from '#api/db/models/mail-attempt.ts';
 import { Message } from '#api/db/models/message.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
@@ -13,6 +14,7 @@ import { OrderItem } from '#api/db/models/order-item.ts';
 import { OrderRevision } from '#api/db/models/order-revision.ts';
 import { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
+import { Quote } from '#api/db/models/quote.ts';
 import { SentMail } from '#api/db/models/sent-mail.ts';
 import { Token } from '#api/db/models/token.ts';
 import type { User } from '#api/db/models/user.ts';
@@ -65,8 +67,20 @@ async function eraseOrders(orderId: readonly string[], now: Date): Promise<void>
   await Handover.update({ collectedBy: '', condition: '', erasedAt: now }, { where });
   await Photo.update({ note: '', removedAt: now }, { where: { ...where, removedAt: null } });
   await IdempotencyKey.destroy({ where });
+  await Quote.update({ note: '' }, { where });
+  // What a stop was about may be what a guest told in words; that it was lifted stays.
+  for (const stop of await LiftedStop.findAll({ where })) {
+    await stop.update({ about: `erased:${stop.id}`, reason: '' });
+  }
   await Order.update(
-    { endedReason: null, sentFromHash: null, privateKeyHash: null, showPhotos: false },
+    {
+      endedReason: null,
+      sentFromHash: null,
+      privateKeyHash: null,
+      // Browsers that opened the old link see nothing any more.
+      keyRenewedAt: now,
+      showPhotos: false,
+    },
     { where: { id: [...orderId] } },
   );
   for (const revision of await OrderRevision.findAll({ where })) await eraseRevision(revision, now);
