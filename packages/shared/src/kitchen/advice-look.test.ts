@@ -80,11 +80,19 @@ describe('words', () => {
     designWith({ cake: { tiers: [roundTier(6)] }, look: { words: [{ tier, text }] } });
 
   it('fit by the width of their tier', () => {
-    expect(wordsFit(inches(6), menuFixture)).toBe(13);
-    expect(about(saying('Happy birthday'), 'words:0')?.sentence).toBe(
-      '“Happy birthday” has 14 characters; that tier has room for 13.',
+    expect(wordsFit(inches(6), menuFixture)).toBe(19);
+    expect(about(saying('Happy birthday Wendy'), 'words:0')?.sentence).toBe(
+      '“Happy birthday Wendy” makes 20 characters; that tier has room for 19.',
     );
-    expect(about(saying('Happy 40th'), 'words:0')).toBeUndefined();
+    expect(about(saying('Happy birthday Bea'), 'words:0')).toBeUndefined();
+    const lines = ['Happy birthday', 'Wendy'].map((text) => ({ tier: 0, text }));
+    const twoLines = designWith({ cake: { tiers: [roundTier(6)] }, look: { words: lines } });
+    expect(about(twoLines, 'words:1')).toBeUndefined();
+    const three = designWith({
+      cake: { tiers: [roundTier(6)] },
+      look: { words: [...lines, { tier: 0, text: '!' }] },
+    });
+    expect(about(three, 'words:2')?.sentence).toContain('20 characters');
   });
 
   it('are counted as people count them', () => {

@@ -136,8 +136,10 @@ function finishAdvice(situation: Situation): Advice[] {
   });
 }
 
+/** What is written on one tier shares its room, however many lines it comes in. */
 function wordsAdvice({ design, tiers, menu }: ResolvedDesign): Advice[] {
   if (tiers.length === 0) return [];
+  const written = new Map<number, number>();
   return (design.look?.words ?? []).flatMap((words, index): Advice[] => {
     if (words.text.trim() === '') return [];
     const shared = { code: 'words-length', level: 'stop', step: 'look' } as const;
@@ -154,13 +156,14 @@ function wordsAdvice({ design, tiers, menu }: ResolvedDesign): Advice[] {
       ];
     }
     const fit = wordsFit(tier.block.widthMm, menu);
-    const length = countCharacters(words.text);
+    const length = (written.get(words.tier) ?? 0) + countCharacters(words.text);
+    written.set(words.tier, length);
     if (length <= fit) return [];
     return [
       note({
         ...shared,
         about,
-        sentence: `“${words.text}” has ${length} characters; that tier has room for ${fit}.`,
+        sentence: `“${words.text}” makes ${length} characters; that tier has room for ${fit}.`,
         instead: 'Shorten it, or put it on a wider tier.',
       }),
     ];

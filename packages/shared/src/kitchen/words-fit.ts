@@ -1,6 +1,6 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 
-/** Characters that can be piped across a tier of this width. */
+/** Characters that can be piped on a tier of this width, in two lines. */
 export function wordsFit(widthMm: number, menu: Menu): number {
   return Math.floor((widthMm * menu.wordsPer100Mm) / 100);
 }

@@ -32,7 +32,7 @@ CREATE TABLE studio (
   dessert_factor_ppm INTEGER NOT NULL DEFAULT 700000 CHECK (dessert_factor_ppm BETWEEN 0 AND 1000000),
   monthly_warmest_c TEXT NOT NULL CHECK (json_valid(monthly_warmest_c)),
   default_portion_size_id TEXT NOT NULL REFERENCES portion_sizes (id),
-  words_per_decimetre INTEGER NOT NULL DEFAULT 8 CHECK (words_per_decimetre >= 1),
+  words_per_decimetre INTEGER NOT NULL DEFAULT 13 CHECK (words_per_decimetre >= 1),
   offers_delivery INTEGER NOT NULL DEFAULT 0 CHECK (offers_delivery IN (0, 1)),
   offers_set_up INTEGER NOT NULL DEFAULT 0 CHECK (offers_set_up IN (0, 1)),
   require_second_factor INTEGER NOT NULL DEFAULT 1 CHECK (require_second_factor IN (0, 1)),

@@ -52,7 +52,7 @@ export class Studio extends Model<InferAttributes<Studio>, InferCreationAttribut
   /** Degrees C, January first. */
   declare monthlyWarmestC: number[];
   declare defaultPortionSizeId: string;
-  /** Characters that fit on a tier per 100 mm of its width. */
+  /** Characters that fit on a tier per 100 mm of its width, in two lines. */
   declare wordsPerDecimetre: CreationOptional<number>;
   declare offersDelivery: CreationOptional<boolean>;
   declare offersSetUp: CreationOptional<boolean>;
@@ -97,11 +97,11 @@ export function initStudio(sequelize: Sequelize): void {
       dessertFactorPpm: withDefault(integer(), 700000),
       monthlyWarmestC: json('monthlyWarmestC', monthlyFigures),
       defaultPortionSizeId: text(),
-      wordsPerDecimetre: withDefault(integer(), 8),
+      wordsPerDecimetre: withDefault(integer(), 13),
       offersDelivery: withDefault(flag('offersDelivery'), false),
       offersSetUp: withDefault(flag('offersSetUp'), false),
       requireSecondFactor: withDefault(flag('requireSecondFactor'), true),
-      maxPhotos: withDefault(integer(), 8),
+      maxPhotos: withDefault(integer(), 13),
       maxPhotoBytes: withDefault(integer(), 26214400),
       maxPhotoPixels: withDefault(integer(), 50000000),
       kitchen: json('kitchen', jsonObject),

@@ -39,9 +39,11 @@ export function fieldOfForm(path: readonly (string | number)[]): (string | numbe
  */
 export function refuseImpossible(form: SubmitOrder, menu: Menu, estimate: Estimate): void {
   const issues: Issue[] = [...coatIssues(form, menu), ...decorationIssues(form, menu)];
-  for (const advice of estimate.advice) {
-    if (advice.code === 'too-big' && !advice.talk) {
-      issues.push({ path: ['cake'], message: advice.sentence });
+  for (const { code, talk, about, sentence } of estimate.advice) {
+    if (code === 'too-big' && !talk) issues.push({ path: ['cake'], message: sentence });
+    // Nobody at the studio could settle this: only the customer knows how to shorten it.
+    if (code === 'words-length') {
+      issues.push({ path: ['look', 'words', ...wordsIndexOf(about), 'text'], message: sentence });
     }
   }
   const photoIds = form.photos.map(({ id }) => id);
@@ -49,6 +51,12 @@ export function refuseImpossible(form: SubmitOrder, menu: Menu, estimate: Estima
     issues.push({ path: ['photos'], message: 'The same photo is there twice.' });
   }
   if (issues.length > 0) throw new AppError('invalid-input', { issues });
+}
+
+/** Which of the words an advice `words:2` is about. */
+function wordsIndexOf(about: string): number[] {
+  const index = Number(/^words:(\d+)$/.exec(about)?.[1] ?? Number.NaN);
+  return Number.isInteger(index) ? [index] : [];
 }
 
 function coatIssues({ cake }: SubmitOrder, menu: Menu): Issue[] {

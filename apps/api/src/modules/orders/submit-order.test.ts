@@ -312,6 +312,13 @@ describe('sending an order', () => {
     ]);
   });
 
+  it('refuses words that do not fit their tier, at the words', async () => {
+    const words = [{ tier: 0, text: 'Happy ninety-ninth birthday, Wendy' }];
+    const answer = await sendOrder(app.visitor(), orderForm(date, { look: { words } }));
+    expect(answer.status).toBe(422);
+    expect(paths(answer.body)).toEqual(['look.words.0.text']);
+  });
+
   it('refuses every field left empty, each by its path', async () => {
     const answer = await sendOrder(app.visitor(), {});
     expect(answer.status).toBe(422);

@@ -117,6 +117,6 @@ export const menuFixture: Menu = {
       since: '2026-01-01',
     },
   ],
-  wordsPer100Mm: 9,
+  wordsPer100Mm: 13,
   maxPhotos: 8,
 };
