@@ -289,7 +289,7 @@ export const spongeFormulas: readonly SeedFormula[] = [
   },
   {
     id: 'cocoa-sponge',
-    name: 'Dark cocoa sponge, made without egg or milk',
+    name: 'Dark cocoa sponge',
     kind: 'sponge',
     lines: [
       { ingredient: 'cake-flour', grams: 1000 },
