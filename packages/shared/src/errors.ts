@@ -25,8 +25,8 @@ export const errorTitles = {
   'unreadable-photo': 'That file is not a picture we can read',
   'too-many-photos': 'There are too many photos',
   'too-many-requests': 'That was too often; please wait a little',
-  'unavailable': 'That part is out of reach just now',
-  'internal': 'Something went wrong on our side',
+  unavailable: 'That part is out of reach just now',
+  internal: 'Something went wrong on our side',
 } as const;
 
 export type ErrorCode = keyof typeof errorTitles;

@@ -10,11 +10,14 @@ export const datesRequest = z
     to: localDate,
   })
   .check(
-    z.refine((it) => it.from <= it.to, { message: 'The range ends before it starts.', path: ['to'] }),
-    z.refine(
-      (it) => Date.parse(it.to) - Date.parse(it.from) <= 200 * 86_400_000,
-      { message: 'Ask for at most 200 days at once.', path: ['to'] },
-    ),
+    z.refine((it) => it.from <= it.to, {
+      message: 'The range ends before it starts.',
+      path: ['to'],
+    }),
+    z.refine((it) => Date.parse(it.to) - Date.parse(it.from) <= 200 * 86_400_000, {
+      message: 'Ask for at most 200 days at once.',
+      path: ['to'],
+    }),
   );
 export type DatesRequest = z.infer<typeof datesRequest>;
 
@@ -22,7 +25,14 @@ export const dateAnswers = ['open', 'last-place', 'ask-us', 'checking', 'closed'
 export const dateAnswer = z.enum(dateAnswers);
 export type DateAnswer = z.infer<typeof dateAnswer>;
 
-export const dateReasonCodes = ['closed-day', 'too-soon', 'too-far', 'too-big', 'window-full', 'full'] as const;
+export const dateReasonCodes = [
+  'closed-day',
+  'too-soon',
+  'too-far',
+  'too-big',
+  'window-full',
+  'full',
+] as const;
 export const dateReason = z.object({
   code: z.enum(dateReasonCodes),
   sentence: z.string(),

@@ -33,11 +33,28 @@ export type Coating = z.infer<typeof coating>;
 export const tier = z
   .object({
     shape,
-    widthMm: z.int().check(z.minimum(100, 'At least 100 mm (4 in) across.'), z.maximum(400, 'At most 400 mm (16 in) across.')),
-    depthMm: z.int().check(z.minimum(100, 'At least 100 mm (4 in) deep.'), z.maximum(400, 'At most 400 mm (16 in) deep.')),
-    heightMm: z.int().check(z.minimum(75, 'At least 75 mm (3 in) high.'), z.maximum(180, 'At most 180 mm (7 in) high.')),
+    widthMm: z
+      .int()
+      .check(
+        z.minimum(100, 'At least 100 mm (4 in) across.'),
+        z.maximum(400, 'At most 400 mm (16 in) across.'),
+      ),
+    depthMm: z
+      .int()
+      .check(
+        z.minimum(100, 'At least 100 mm (4 in) deep.'),
+        z.maximum(400, 'At most 400 mm (16 in) deep.'),
+      ),
+    heightMm: z
+      .int()
+      .check(
+        z.minimum(75, 'At least 75 mm (3 in) high.'),
+        z.maximum(180, 'At most 180 mm (7 in) high.'),
+      ),
     /** Layers of sponge; fillings lie between them. */
-    layers: z.int().check(z.minimum(2, 'At least two layers.'), z.maximum(5, 'At most five layers.')),
+    layers: z
+      .int()
+      .check(z.minimum(2, 'At least two layers.'), z.maximum(5, 'At most five layers.')),
     real: z.boolean(),
     keepsake: z.boolean(),
     spongeId: z.nullable(slug),
@@ -87,10 +104,13 @@ export const cake = z
       message: 'Choose the size of the sheet.',
       path: ['sheet'],
     }),
-    z.refine((it) => it.kind !== 'tiered' || it.tiers.length === 0 || it.tiers.some((t) => t.real), {
-      message: 'At least one tier must be real cake.',
-      path: ['tiers'],
-    }),
+    z.refine(
+      (it) => it.kind !== 'tiered' || it.tiers.length === 0 || it.tiers.some((t) => t.real),
+      {
+        message: 'At least one tier must be real cake.',
+        path: ['tiers'],
+      },
+    ),
   );
 export type Cake = z.infer<typeof cake>;
 
@@ -138,7 +158,12 @@ export const setting = z.object({
   place,
   /** The warmest it will get, °C; null is "don't know". */
   warmestC: z.nullable(
-    z.number().check(z.minimum(-10, 'That is colder than any table we know.'), z.maximum(50, 'That is hotter than any table we know.')),
+    z
+      .number()
+      .check(
+        z.minimum(-10, 'That is colder than any table we know.'),
+        z.maximum(50, 'That is hotter than any table we know.'),
+      ),
   ),
   minutesOut: z.int().check(z.minimum(0), z.maximum(24 * 60, 'At most a day.')),
   driveMinutes: z.int().check(z.minimum(0), z.maximum(12 * 60, 'At most twelve hours.')),

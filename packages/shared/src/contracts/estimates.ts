@@ -143,10 +143,14 @@ export const estimate = z.object({
   /** Grams, the whole cake on its board as carried; 0 before it exists. */
   weightG: z.int(),
   /** Grams per part kind of the whole cake: what goes into it. */
-  amounts: z.object({ spongeG: z.int(), fillingG: z.int(), frostingG: z.int(), coveringG: z.int() }),
+  amounts: z.object({
+    spongeG: z.int(),
+    fillingG: z.int(),
+    frostingG: z.int(),
+    coveringG: z.int(),
+  }),
   /** Millimetres with the board and what stands on top. */
   heightMm: z.int(),
   keepCool: z.string(),
 });
 export type Estimate = z.infer<typeof estimate>;
-

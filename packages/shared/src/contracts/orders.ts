@@ -29,7 +29,9 @@ export const phoneNumber = line(40).check(
 export const day = z.object({
   ...guests.shape,
   date: z.nullable(localDate).check(z.refine((it) => it !== null, 'Choose a day.')),
-  windowStart: z.nullable(minuteOfDay).check(z.refine((it) => it !== null, 'Choose when you will collect.')),
+  windowStart: z
+    .nullable(minuteOfDay)
+    .check(z.refine((it) => it !== null, 'Choose when you will collect.')),
 });
 
 export const you = z
@@ -55,7 +57,9 @@ export const you = z
   );
 
 export const consents = z.object({
-  policies: z.boolean().check(z.refine((it) => it, 'Please read and agree to the policies to send your order.')),
+  policies: z
+    .boolean()
+    .check(z.refine((it) => it, 'Please read and agree to the policies to send your order.')),
   /** Needed only where an allergy is declared. */
   allergyData: z.boolean(),
   showPhotos: z.boolean(),
@@ -125,7 +129,13 @@ export const message = z.object({
 export type Message = z.infer<typeof message>;
 
 /** Coarse on purpose: a finer clock invites worry. */
-export const progressStages = ['received', 'agreed', 'in-the-kitchen', 'ready', 'collected'] as const;
+export const progressStages = [
+  'received',
+  'agreed',
+  'in-the-kitchen',
+  'ready',
+  'collected',
+] as const;
 export const progressStage = z.enum(progressStages);
 
 export const pickup = z.object({
@@ -160,7 +170,12 @@ export const orderView = z.object({
   /** Nearest open days, after a decline. */
   otherDates: z.array(localDate),
   showPhotos: z.boolean(),
-  can: z.object({ withdraw: z.boolean(), write: z.boolean(), addPhotos: z.boolean(), seeCalendarFile: z.boolean() }),
+  can: z.object({
+    withdraw: z.boolean(),
+    write: z.boolean(),
+    addPhotos: z.boolean(),
+    seeCalendarFile: z.boolean(),
+  }),
 });
 export type OrderView = z.infer<typeof orderView>;
 
@@ -168,10 +183,19 @@ export const withdrawOrder = z.object({ rowVersion, reason: prose(500) });
 export type WithdrawOrder = z.infer<typeof withdrawOrder>;
 
 export const writeMessage = z.object({
-  body: z.string().check(z.trim(), z.minLength(1, 'Write something first.'), z.maxLength(4000, 'At most 4,000 characters, please.')),
+  body: z
+    .string()
+    .check(
+      z.trim(),
+      z.minLength(1, 'Write something first.'),
+      z.maxLength(4000, 'At most 4,000 characters, please.'),
+    ),
 });
 export type WriteMessage = z.infer<typeof writeMessage>;
 
 /** `POST /api/order-access`: the key of the private link, for a cookie good for that order. */
-export const openPrivateLink = z.object({ code: z.string().check(z.maxLength(20)), key: z.string().check(z.maxLength(100)) });
+export const openPrivateLink = z.object({
+  code: z.string().check(z.maxLength(20)),
+  key: z.string().check(z.maxLength(100)),
+});
 export type OpenPrivateLink = z.infer<typeof openPrivateLink>;

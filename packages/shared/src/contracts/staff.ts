@@ -1,5 +1,15 @@
 import * as z from 'zod/mini';
-import { id, instant, line, localDate, minor, minuteOfDay, prose, requiredLine, rowVersion } from './common.ts';
+import {
+  id,
+  instant,
+  line,
+  localDate,
+  minor,
+  minuteOfDay,
+  prose,
+  requiredLine,
+  rowVersion,
+} from './common.ts';
 import { design } from './design.ts';
 import { advice, estimate, price } from './estimates.ts';
 import { message, pickup } from './orders.ts';
@@ -111,13 +121,29 @@ export const staffOrder = z.object({
   /** Whether the plan has (or can find) room for it. */
   fits: z.object({ fits: z.boolean(), sentence: z.string() }),
   tasks: z.array(plannedTask),
-  contacts: z.array(z.object({ as: z.enum(['ordered', 'pays', 'collects']), name: z.string(), email: z.string(), phone: z.string(), reachBy: z.string() })),
+  contacts: z.array(
+    z.object({
+      as: z.enum(['ordered', 'pays', 'collects']),
+      name: z.string(),
+      email: z.string(),
+      phone: z.string(),
+      reachBy: z.string(),
+    }),
+  ),
   messages: z.array(message),
   photos: z.array(photo),
   events: z.array(orderEvent),
   mail: z.array(sentMailRow),
   showPhotos: z.boolean(),
-  handover: z.nullable(z.object({ collectedBy: z.string(), at: instant, condition: z.string(), photo: z.nullable(photo), by: z.string() })),
+  handover: z.nullable(
+    z.object({
+      collectedBy: z.string(),
+      at: instant,
+      condition: z.string(),
+      photo: z.nullable(photo),
+      by: z.string(),
+    }),
+  ),
   /** What must be settled before it may be confirmed. */
   blockers: z.array(advice),
   can: z.object({
@@ -161,7 +187,12 @@ export const declineOrder = z.object({
 export type DeclineOrder = z.infer<typeof declineOrder>;
 
 /** `POST .../move`: another pickup; the customer is told. */
-export const moveOrder = z.object({ rowVersion, date: localDate, windowStart: minuteOfDay, note: prose(1000) });
+export const moveOrder = z.object({
+  rowVersion,
+  date: localDate,
+  windowStart: minuteOfDay,
+  note: prose(1000),
+});
 export type MoveOrder = z.infer<typeof moveOrder>;
 
 /** `POST .../start`, `.../ready`, `.../uncollected` */
@@ -178,22 +209,27 @@ export const collectOrder = z.object({
 export type CollectOrder = z.infer<typeof collectOrder>;
 
 /** `POST .../allergies/:id/answer`: the talk, recorded; it never removes what the cake contains. */
-export const answerAllergy = z.object({ rowVersion, text: requiredLine(1000, 'Write what was said and settled.') });
+export const answerAllergy = z.object({
+  rowVersion,
+  text: requiredLine(1000, 'Write what was said and settled.'),
+});
 export type AnswerAllergy = z.infer<typeof answerAllergy>;
 
 /** `POST .../lift-stop`: the owner's written reason, which stays and which the customer reads. */
-export const liftStop = z.object({ rowVersion, about: z.string().check(z.maxLength(300)), reason: requiredLine(1000, 'Write the reason; it stays with the order.') });
+export const liftStop = z.object({
+  rowVersion,
+  about: z.string().check(z.maxLength(300)),
+  reason: requiredLine(1000, 'Write the reason; it stays with the order.'),
+});
 export type LiftStop = z.infer<typeof liftStop>;
 
 /** `GET /api/staff/calendar?from&to` */
-export const calendarQuery = z
-  .object({ from: localDate, to: localDate })
-  .check(
-    z.refine((it) => it.from <= it.to && Date.parse(it.to) - Date.parse(it.from) <= 62 * 86_400_000, {
-      message: 'Ask for one to 62 days.',
-      path: ['to'],
-    }),
-  );
+export const calendarQuery = z.object({ from: localDate, to: localDate }).check(
+  z.refine((it) => it.from <= it.to && Date.parse(it.to) - Date.parse(it.from) <= 62 * 86_400_000, {
+    message: 'Ask for one to 62 days.',
+    path: ['to'],
+  }),
+);
 
 export const calendarDay = z.object({
   date: localDate,
@@ -246,7 +282,10 @@ export const calendarView = z.object({
 export type CalendarView = z.infer<typeof calendarView>;
 
 /** `POST /api/staff/closures`; `DELETE /api/staff/closures/:id` opens it again. */
-export const blockDay = z.object({ date: localDate, reason: requiredLine(120, 'Write why, for the team.') });
+export const blockDay = z.object({
+  date: localDate,
+  reason: requiredLine(120, 'Write why, for the team.'),
+});
 export type BlockDay = z.infer<typeof blockDay>;
 /** Orders whose pickup or work stands on that day; blocking never drops them. */
 export const blockedDay = z.object({ id, standing: z.array(z.int()) });

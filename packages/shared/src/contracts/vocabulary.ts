@@ -87,7 +87,14 @@ export const severities = ['avoids', 'intolerance', 'coeliac', 'allergy', 'anaph
 export const severity = z.enum(severities);
 export type Severity = z.infer<typeof severity>;
 
-export const dietIds = ['vegetarian', 'vegan', 'halal', 'kosher', 'no-alcohol', 'no-gelatine'] as const;
+export const dietIds = [
+  'vegetarian',
+  'vegan',
+  'halal',
+  'kosher',
+  'no-alcohol',
+  'no-gelatine',
+] as const;
 export const dietId = z.enum(dietIds);
 export type DietId = z.infer<typeof dietId>;
 
