@@ -42,7 +42,8 @@ export function sendFile<S extends z.ZodMiniType>(options: SendFile<S>): Promise
     const onAbort = () => {
       xhr.abort();
       stop();
-      reject(signal?.reason);
+      const reason: unknown = signal?.reason;
+      reject(reason instanceof Error ? reason : new NetworkProblem(reason));
     };
 
     xhr.upload.addEventListener('progress', (event) => {
