@@ -120,15 +120,14 @@ describe('going on', () => {
 
   it('says so before a choice loses the day, and takes the choice back when asked', async () => {
     bench.keepDraft(answered());
-    const { user } = bench.open('/order/look');
+    const { user, client } = bench.open('/order/look');
     const words = await screen.findByLabelText(/^Bottom tier/);
     // The day stands for the cake as it is.
-    await new Promise((resolve) => setTimeout(resolve, 700));
+    await waitFor(() => expect(client.getQueriesData({ queryKey: ['dates'] })).not.toEqual([]));
+    await waitFor(() => expect(client.isFetching()).toBe(0));
     bench.daysAre(fullDay);
     await user.type(words, 'Hi');
-    expect(
-      await screen.findByText(/cannot be ready for Saturday 19 June/, undefined, { timeout: 5000 }),
-    ).toBeVisible();
+    expect(await screen.findByText(/cannot be ready for Saturday 19 June/)).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Take the change back' }));
     await waitFor(() => expect(words).toHaveValue(''));
   });

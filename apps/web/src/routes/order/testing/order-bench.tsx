@@ -1,4 +1,4 @@
-import { configure } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { Suspense } from 'react';
 import { Route, Routes } from 'react-router-dom';
@@ -78,6 +78,8 @@ export function orderBench() {
   });
 
   afterEach(() => {
+    // A page that goes away keeps its draft: first it goes, then what it kept.
+    cleanup();
     localStorage.clear();
     sessionStorage.clear();
     vi.useRealTimers();
