@@ -174,6 +174,9 @@ export const confirmationLook = z.object({
 });
 export type ConfirmationLook = z.infer<typeof confirmationLook>;
 
+/** Its query: the word the baker adds, so that the e-mail is shown exactly as it will go. */
+export const confirmationQuery = z.object({ note: z.optional(prose(1000)) });
+
 /** `POST .../confirm` */
 export const confirmOrder = z.object({ rowVersion, note: z.optional(prose(1000)) });
 export type ConfirmOrder = z.infer<typeof confirmOrder>;

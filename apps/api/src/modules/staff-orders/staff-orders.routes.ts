@@ -2,6 +2,7 @@ import * as z from 'zod/mini';
 import { writeMessage } from '#shared/contracts/orders.ts';
 import {
   confirmationLook,
+  confirmationQuery,
   listOrdersQuery,
   markOrder,
   orderList,
@@ -72,15 +73,16 @@ export function staffOrdersRoutes(deps: Deps): FeatureRoutes {
       path: '/api/staff/orders/:number/confirmation',
       summary: 'A last look at price, e-mail, plan and what is open, before confirming.',
       params,
+      query: confirmationQuery,
       response: confirmationLook,
       refusals: ['not-found'],
     },
-    async ({ actor, params: { number } }) => {
+    async ({ actor, params: { number }, query }) => {
       authoriseStaff(actor, 'confirm');
       const order = await findOrderByNumber(Number(number));
       const revision = await loadCurrentRevision(order);
       const [email, blockers, fits] = await Promise.all([
-        previewConfirmation(deps, order.id, ''),
+        previewConfirmation(deps, order.id, query.note ?? ''),
         blockersOf(revision),
         loadFit({ order, revision }),
       ]);

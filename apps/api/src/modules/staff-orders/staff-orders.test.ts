@@ -76,9 +76,11 @@ describe('confirming', () => {
   it('makes the offer quote 1, agreed, keeps the place for good and tells the customer', async () => {
     const { number, code, guest } = await ask();
     const last = confirmationLook.parse(
-      (await baker.get(`/api/staff/orders/${number}/confirmation`)).body,
+      (await baker.get(`/api/staff/orders/${number}/confirmation?note=Looking%20forward!`)).body,
     );
     expect(last).toMatchObject({ rowVersion: 1, blockers: [], fits: { fits: true } });
+    expect(last.email.text).toContain('Looking forward!');
+    expect(last.email.html).toContain('Looking forward!');
     const answer = await move(baker, number, 'confirm', {
       rowVersion: 1,
       note: 'Looking forward!',
