@@ -19,7 +19,9 @@ export function CalendarHead({ place, today, locale, waiting }: Props) {
   const to = (date: string) => paths.staffCalendarAt(place.view, date);
   return (
     <div className="flex flex-wrap items-end gap-x-6 gap-y-1">
-      <PageTitle title={`Calendar, ${title}`}>{title}</PageTitle>
+      <PageTitle title={`Calendar, ${title}`} className="text-3xl">
+        {title}
+      </PageTitle>
       <nav aria-label="Other days" className="-mx-2 flex flex-wrap items-center sm:mx-0">
         <Step to={to(stepFrom(place, -1))}>earlier</Step>
         <Step to={to(stepFrom(place, 1))}>later</Step>

@@ -41,9 +41,9 @@ type RequestProps = Pick<Props, 'locale' | 'onAct'> & { readonly request: Waitin
 
 function Request({ request, locale, onAct }: RequestProps) {
   const { number, pickup, advice, fits, can } = request;
-  // What stops it is settled on its page; confirming would only say so.
+  // What stops it, or has no place, is settled on its page; confirming would only say so.
   const stopped = advice?.level === 'stop';
-  const confirms = can.confirm && !stopped;
+  const confirms = can.confirm && !stopped && fits.fits;
   const whose = <VisuallyHidden> No. {number}</VisuallyHidden>;
   return (
     <div className="grid gap-2">

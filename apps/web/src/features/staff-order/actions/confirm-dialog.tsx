@@ -46,6 +46,12 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
           <div className="grid gap-2">
             <p className="font-semibold">{pickupWords(order.pickup, menu.studio.locale)}</p>
             <FitLine fits={fits} />
+            {!fits.fits && (
+              <p className="text-sm text-slate">
+                Confirming asks the plan once more. Where it finds no place it says so, and nothing
+                is sent; then move the pickup to a day that fits.
+              </p>
+            )}
           </div>
           {blockers.length > 0 && <Blocked order={order} blockers={blockers} onClose={onClose} />}
           {blocked && blockers.length === 0 && (

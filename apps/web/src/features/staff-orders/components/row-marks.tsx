@@ -1,23 +1,26 @@
 import type { OrderRow } from '#shared/contracts/staff.ts';
+import { isLive } from '#shared/orders/transitions.ts';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
 
 /** What about an order wants to be known before it is opened. */
 export function RowMarks({ row }: { readonly row: OrderRow }) {
+  // What is over wants nothing any more but to be read.
+  const live = isLive(row.status);
   return (
     <span className="flex flex-wrap items-center gap-x-3 gap-y-0.5 text-sm">
-      {row.worst === 'stop' && (
+      {live && row.worst === 'stop' && (
         <span className="inline-flex items-center gap-1.5 font-semibold text-berry">
           <ToneGlyph tone="berry" className="size-4" />
           {row.allergies ? 'allergy, settle first' : 'settle first'}
         </span>
       )}
-      {row.worst !== 'stop' && row.allergies && (
+      {live && row.worst !== 'stop' && row.allergies && (
         <span className="inline-flex items-center gap-1.5 font-semibold text-berry">
           <ToneGlyph tone="berry" className="size-4" />
           allergy
         </span>
       )}
-      {row.worst === 'care' && (
+      {live && row.worst === 'care' && (
         <span className="inline-flex items-center gap-1.5">
           <ToneGlyph tone="butter" className="size-4" />
           with care
