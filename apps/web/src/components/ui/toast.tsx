@@ -81,7 +81,7 @@ export function ToastProvider({ children }: { readonly children: ReactNode }) {
       <div
         role="status"
         data-print="no"
-        className="fixed inset-x-4 bottom-4 z-20 mx-auto grid w-fit max-w-xl"
+        className="fixed inset-x-4 bottom-4 z-20 max-lg:[:root:has([data-foot])_&]:bottom-24 mx-auto grid w-fit max-w-xl"
         onPointerEnter={() => setHeld(true)}
         onPointerLeave={() => setHeld(false)}
         onFocus={() => setHeld(true)}

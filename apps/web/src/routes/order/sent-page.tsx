@@ -3,11 +3,5 @@ import { SentNotice } from '#web/features/order-wizard/components/sent-notice.ts
 
 /** The page after sending. */
 export function SentPage() {
-  const studio = useMenuQuery().data?.studio;
-  return (
-    <SentNotice
-      answerHours={studio?.answerHours ?? null}
-      guestHoldMinutes={studio?.guestHoldMinutes ?? null}
-    />
-  );
+  return <SentNotice studio={useMenuQuery().data?.studio ?? null} />;
 }

@@ -1,5 +1,7 @@
 import { type ReactNode, useState } from 'react';
+import type { StudioCard } from '#shared/contracts/menu.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
+import { instantWords } from '#web/components/order/order-times.ts';
 import { EmptyState } from '#web/components/ui/empty-state.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
@@ -9,13 +11,12 @@ import { paths } from '#web/config/paths.ts';
 import { recallSent, type SentOrder } from '../send/sent-order.ts';
 
 type Props = {
-  /** How long the studio takes to answer; null until the menu is known. */
-  readonly answerHours: number | null;
-  readonly guestHoldMinutes: number | null;
+  /** Null until the menu is known: the studio's times then go unsaid. */
+  readonly studio: StudioCard | null;
 };
 
 /** After sending: what has happened, what happens next and when. */
-export function SentNotice({ answerHours, guestHoldMinutes }: Props) {
+export function SentNotice({ studio }: Props) {
   const [order] = useState(recallSent);
   if (order === null) {
     return (
@@ -47,7 +48,7 @@ export function SentNotice({ answerHours, guestHoldMinutes }: Props) {
           </Notice>
         )}
         <ol className="grid gap-4">
-          <NextSteps order={order} answerHours={answerHours} guestHoldMinutes={guestHoldMinutes} />
+          <NextSteps order={order} studio={studio} />
         </ol>
         <div>
           <LinkButton to={`${paths.myOrder(order.code)}${link}`}>Open your order</LinkButton>
@@ -57,21 +58,18 @@ export function SentNotice({ answerHours, guestHoldMinutes }: Props) {
   );
 }
 
-function NextSteps({
-  order,
-  answerHours,
-  guestHoldMinutes,
-}: Props & { readonly order: SentOrder }) {
-  const within = answerHours === null ? 'soon' : `within ${answerHours} hours`;
+function NextSteps({ order, studio }: Props & { readonly order: SentOrder }) {
+  const within = studio === null ? 'soon' : `within ${studio.answerHours} hours`;
   const { hold } = order;
   return (
     <>
       {hold?.needsLink === true && (
         <Step at={1} title="Open the e-mail now">
-          We wrote to {order.email}. Your day is kept
-          {guestHoldMinutes !== null && ` for ${guestHoldMinutes} minutes`}, until{' '}
-          {clock(hold.expiresAt)}; opening the link in the e-mail keeps it until the baker has
-          answered.
+          We wrote to {order.email}.{' '}
+          {studio === null
+            ? 'Your day is kept for a short while; '
+            : `Your day is kept for ${studio.guestHoldMinutes} minutes, until ${instantWords(hold.expiresAt, studio.zone, studio.locale)}; `}
+          opening the link in the e-mail keeps it until the baker has answered.
         </Step>
       )}
       {hold !== null && !hold.needsLink && (
@@ -112,12 +110,4 @@ function Step({ at, title, children }: StepProps) {
       </div>
     </li>
   );
-}
-
-function clock(instant: string): string {
-  return new Date(instant).toLocaleTimeString([], {
-    hour: '2-digit',
-    minute: '2-digit',
-    hour12: false,
-  });
 }

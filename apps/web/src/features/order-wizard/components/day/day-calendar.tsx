@@ -76,7 +76,7 @@ export function DayCalendar({ design }: { readonly design: Design }) {
         The jug shows how full the kitchen is.{' '}
         {dates.likely
           ? `These days look good for a cake for ${design.guests.headCount}; we check again as you design it.`
-          : 'Every day you can press is one the bench can keep for this cake.'}
+          : 'Every day with a jug is one the bench can keep for this cake.'}
       </p>
       <NearestDays dates={dates} month={month} onMonth={setMonth} />
       <WindowChoice day={day.date === null ? null : (dates.days.get(day.date) ?? null)} />

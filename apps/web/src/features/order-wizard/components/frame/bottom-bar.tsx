@@ -25,6 +25,8 @@ export function BottomBar({ step, action, back }: Props) {
       {back && <div className="lg:hidden">{back}</div>}
       <div
         data-print="no"
+        // News at the foot of the screen keeps clear of it.
+        data-foot
         className="sticky bottom-0 z-10 -mx-[clamp(1rem,3.2vw,2.5rem)] flex items-center justify-between gap-4 border-t border-seam bg-enamel px-[clamp(1rem,3.2vw,2.5rem)] py-3 lg:static lg:mx-0 lg:justify-start lg:border-0 lg:p-0"
       >
         <div className="min-w-0 lg:hidden">
