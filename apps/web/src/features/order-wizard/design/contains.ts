@@ -20,7 +20,7 @@ export function containsLine(contents: Contents, region: LabelRegion): string {
     .map(([verb, names]) => `${verb} ${formatList(names)}`);
   if (contents.alcohol) known.push('made with alcohol');
   if (contents.gelatine) known.push('made with gelatine');
-  return known.length === 0 ? 'no listed allergen on its labels' : known.join('; ');
+  return known.length === 0 ? 'no allergen named on its labels' : known.join('; ');
 }
 
 /** A declaration in a few words: "egg", "hazelnut", or what was written. */
