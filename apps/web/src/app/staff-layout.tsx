@@ -37,11 +37,14 @@ export function StaffLayout() {
         >
           <ConnectionNotice />
           {session.isPending ? (
-            <PagePending />
+            <main id={mainId} tabIndex={-1}>
+              <PagePending />
+            </main>
           ) : session.isError ? (
-            <div className="page py-10">
+            <main id={mainId} tabIndex={-1} className="page grid gap-5 py-10">
+              <PageTitle title="Not just now" />
               <Failure error={session.error} onRetry={() => void session.refetch()} />
-            </div>
+            </main>
           ) : (
             <StaffDoor user={user} />
           )}

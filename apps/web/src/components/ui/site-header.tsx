@@ -24,6 +24,7 @@ export function SiteHeader({ name, homeTo, mark, nav, children }: Props) {
         <div className="page flex min-h-14 flex-wrap items-center gap-x-4 gap-y-1 py-1.5 sm:gap-x-6">
           <Link
             to={homeTo}
+            aria-label={name === '' ? 'First page' : undefined}
             className="inline-flex min-h-11 items-center gap-3 rounded-mark font-display text-lg leading-tight font-bold text-cobalt max-[23rem]:text-base sm:text-xl"
           >
             {mark}
