@@ -221,6 +221,8 @@ describe('for any studio, book and design', () => {
               { date: day.date, startMinute: window.start },
               'new',
             );
+            // What a window is told is what sending an order for it comes to.
+            expect(plan.answer === 'closed').toBe(window.answer === 'closed');
             // A window can also be open by an earlier window's plan, which `plan` verifies alike.
             if (plan.order === null) continue;
             expect(checkPlan(supply, [...standing, plan.order])).toEqual([]);

@@ -76,7 +76,7 @@ export function planWindow(
   const order = question.plan(window, null);
   if (order !== null)
     return { answer: 'open', reason: null, window, order, faults: question.faults };
-  const reason = question.shortageAt([window]);
+  const reason = question.shortageAt(window);
   return {
     answer: reason === null ? 'ask-us' : 'closed',
     reason,
@@ -138,15 +138,19 @@ class Question {
       plans.set(window, order);
       last = order;
     }
+    // A window is answered for itself, as sending an order for it would be.
+    const shortages = new Map(
+      free.filter((it) => !plans.has(it)).map((it) => [it, this.shortageAt(it)]),
+    );
+    const undecided = (it: Window): boolean => shortages.get(it) === null;
     if (last === null) {
-      const reason = this.shortageAt(free);
-      const answer = reason === null ? 'ask-us' : 'closed';
+      const reason = free.some(undecided) ? null : ([...shortages.values()].at(-1) ?? null);
       return {
         date,
-        answer,
+        answer: reason === null ? 'ask-us' : 'closed',
         reason,
         fill,
-        windows: windows.map((it) => told(it, free.includes(it) ? answer : 'closed')),
+        windows: windows.map((it) => told(it, undecided(it) ? 'ask-us' : 'closed')),
       };
     }
     const answer = this.takesAnother([...plans.values()]) ? 'open' : 'last-place';
@@ -156,7 +160,7 @@ class Question {
       reason: null,
       fill,
       windows: windows.map((it) =>
-        told(it, plans.has(it) ? answer : free.includes(it) ? 'ask-us' : 'closed'),
+        told(it, plans.has(it) ? answer : undecided(it) ? 'ask-us' : 'closed'),
       ),
     };
   }
@@ -199,20 +203,17 @@ class Question {
     return faults.length === 0 ? placement.order : null;
   }
 
-  /** Why no plan at all exists for any of these windows; null where one still may. */
-  shortageAt(windows: readonly Window[]): DateReason | null {
+  /** Why no plan at all exists for a window; null where one still may. */
+  shortageAt(window: Window): DateReason | null {
     const { supply, standing } = this.open;
-    let reason: DateReason | null = null;
-    for (const window of windows) {
-      const shortage = findShortage(supply, standing.orders, this.ready.demand, window);
-      if (shortage === null) return null;
-      reason = {
-        ...reasonOf('full', `${sentenceOf(shortage.resource)} up to ${formatDay(shortage.day)}.`),
-        resource: shortage.resource,
-        day: shortage.day,
-      };
-    }
-    return reason;
+    const shortage = findShortage(supply, standing.orders, this.ready.demand, window);
+    if (shortage === null) return null;
+    const { resource, day } = shortage;
+    return {
+      ...reasonOf('full', `${sentenceOf(resource)} up to ${formatDay(day)}.`),
+      resource,
+      day,
+    };
   }
 
   /** A hint: whether a second cake like it finds a place beside the first. */
