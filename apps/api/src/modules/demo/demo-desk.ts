@@ -13,7 +13,7 @@ import type { Actor } from '#api/platform/actor.ts';
 import { newId } from '#api/platform/ids.ts';
 import { privateKeyOf } from '#api/platform/private-link.ts';
 import { drawInspiration } from './demo-pictures.ts';
-import type { DemoForm } from './demo-forms.ts';
+import type { DemoForm } from './demo-parts.ts';
 
 const visitor: Actor = { kind: 'visitor' };
 

@@ -1,98 +1,17 @@
-import type { Coating, Tier } from '#shared/contracts/design.ts';
-import type { SubmitOrder } from '#shared/contracts/orders.ts';
+import type { DemoForm } from './demo-parts.ts';
+import {
+  agreed,
+  coat,
+  guestsOf,
+  indoors,
+  look,
+  person,
+  placed,
+  round,
+  tiered,
+} from './demo-parts.ts';
 
-/** A form without its day, which is chosen from those that are open. */
-export type DemoForm = Omit<SubmitOrder, 'photos' | 'seenTotalMinor' | 'askWithoutDate' | 'day'> & {
-  readonly day: Omit<SubmitOrder['day'], 'date' | 'windowStart'>;
-};
-
-type Guests = Partial<DemoForm['day']> & Pick<DemoForm['day'], 'headCount' | 'occasionId'>;
-
-const coat = (style: Coating['style'], changes: Partial<Coating> = {}): Coating => ({
-  covering: 'buttercream',
-  style,
-  finish: 'smooth',
-  colour: null,
-  ...changes,
-});
-
-const round = (
-  inches: number,
-  spongeId: string,
-  fillingId: string,
-  changes: Partial<Tier> = {},
-): Tier => ({
-  shape: 'round',
-  widthMm: Math.round(inches * 25.4),
-  depthMm: Math.round(inches * 25.4),
-  heightMm: 102,
-  layers: 3,
-  real: true,
-  keepsake: false,
-  spongeId,
-  fillingId,
-  coating: null,
-  ...changes,
-});
-
-const guestsOf = (guests: Guests): DemoForm['day'] => ({
-  otherDesserts: false,
-  portionSizeId: 'dessert',
-  allergies: [],
-  diets: [],
-  dietNote: '',
-  infants: false,
-  susceptible: false,
-  ...guests,
-});
-
-const tiered = (coating: Coating, ...tiers: Tier[]): SubmitOrder['cake'] => ({
-  kind: 'tiered',
-  tiers,
-  sheet: null,
-  coating,
-});
-
-const placed = (
-  decorationId: string,
-  tier: number | null,
-  quantity = 1,
-  colour: string | null = null,
-): SubmitOrder['look']['decorations'][number] => ({
-  decorationId,
-  tier,
-  quantity,
-  colour,
-  source: decorationId === 'fresh-flowers' ? 'florist' : 'studio',
-});
-
-const look = (changes: Partial<SubmitOrder['look']>): SubmitOrder['look'] => ({
-  palette: [],
-  words: [],
-  decorations: [],
-  note: '',
-  ...changes,
-});
-
-const person = (name: string, email: string, phone = ''): SubmitOrder['you'] => ({
-  name,
-  email,
-  phone,
-  reachBy: 'email',
-  otherCollects: false,
-  collectorName: '',
-  collectorPhone: '',
-});
-
-const indoors: SubmitOrder['setting'] = {
-  place: 'indoors',
-  warmestC: 21,
-  minutesOut: 60,
-  driveMinutes: 15,
-};
-const agreed: SubmitOrder['consents'] = { policies: true, allergyData: false, showPhotos: false };
-
-/** What the demo's customers ordered. All of them are invented. */
+/** Orders with a story: one in each state, and what is waiting. All people are invented. */
 export const demoForms = {
   firstBirthday: {
     day: guestsOf({

@@ -7,6 +7,14 @@ type Drawing = {
   readonly tiers: number;
 };
 
+/** Pictures the demo's people send and take. */
+export const drawings = {
+  barley: { ground: '#e7ecf8', cake: '#faf6ec', accent: '#f2b632', tiers: 3 },
+  meadow: { ground: '#e2f2e8', cake: '#ffffff', accent: '#2c7a4b', tiers: 2 },
+  rose: { ground: '#fbe6e9', cake: '#f6eeda', accent: '#d8455a', tiers: 1 },
+  sky: { ground: '#f2f5f9', cake: '#dbe9f4', accent: '#8fb4d8', tiers: 2 },
+} as const satisfies Record<string, Drawing>;
+
 /** A picture as a customer might send one: drawn here, since the demo has no photographs. */
 export async function drawInspiration({ ground, cake, accent, tiers }: Drawing): Promise<Buffer> {
   const blocks = Array.from({ length: tiers }, (_, index) => {

@@ -21,24 +21,21 @@ import { hashPassword } from '#api/platform/passwords.ts';
 import { DemoClock } from './demo-clock.ts';
 import { addStaffPicture, sendDemoOrder } from './demo-desk.ts';
 import type { Wanted } from './demo-desk.ts';
+import { everydayForms } from './demo-everyday-forms.ts';
 import { demoForms } from './demo-forms.ts';
-import type { DemoForm } from './demo-forms.ts';
+import type { DemoForm } from './demo-parts.ts';
 import { demoStaff } from './demo-people.ts';
+import { drawings } from './demo-pictures.ts';
+import { demoBook } from './demo-schedule.ts';
+import type { Promised } from './demo-schedule.ts';
 import { Timeline } from './timeline.ts';
 
 /** How long ago the demo's studio opened its book, days. */
 const openedDaysAgo = 20;
 
-const pictures = {
-  barley: { ground: '#e7ecf8', cake: '#faf6ec', accent: '#f2b632', tiers: 3 },
-  meadow: { ground: '#e2f2e8', cake: '#ffffff', accent: '#2c7a4b', tiers: 2 },
-  rose: { ground: '#fbe6e9', cake: '#f6eeda', accent: '#d8455a', tiers: 1 },
-  sky: { ground: '#f2f5f9', cake: '#dbe9f4', accent: '#8fb4d8', tiers: 2 },
-} as const;
-
 /**
  * Fills a data folder for the demo, once: the studio, its people with printed passwords, and a
- * dozen orders in every state, made by the real commands at the times they would have been made,
+ * fortnight's book with orders in every state, made by the real commands at the times they would have been made,
  * so that plan, prices and events are true. Their e-mails are not sent: whoever tries the demo
  * finds in the mailbox only what came of what they did.
  * @throws when the folder's database is open in this process
@@ -108,98 +105,51 @@ class DemoBook {
   }
 
   async write(): Promise<void> {
-    this.#promised(demoForms.firstBirthday, {
-      sent: -13,
-      from: -6,
-      to: -1,
-      prefer: 'last',
-      until: 'collected',
-      pictures: [pictures.rose],
-    });
-    this.#promised(demoForms.carrot, {
-      sent: -18,
-      from: 0,
-      to: 4,
-      prefer: 'first',
-      until: 'ready',
-    });
-    this.#promised(demoForms.retirement, {
-      sent: -9,
-      from: 1,
-      to: 7,
-      prefer: 'first',
-      until: 'making',
-    });
-    this.#promised(demoForms.graduation, {
-      sent: -8,
-      from: 3,
-      to: 12,
-      prefer: 'first',
-      until: 'confirmed',
-    });
-    this.#promised(demoForms.anniversary, {
-      sent: -7,
-      from: 6,
-      to: 16,
-      prefer: 'first',
-      until: 'confirmed',
-      pictures: [pictures.meadow],
-    });
-    this.#promised(demoForms.wedding, {
-      sent: -15,
-      from: 10,
-      to: 24,
-      prefer: 'first',
-      until: 'confirmed',
-      pictures: [pictures.barley, pictures.meadow],
-    });
+    for (const promised of demoBook) this.#promised(promised);
     this.#declined();
     this.#withdrawn();
     this.#waiting();
     await this.#timeline.run();
   }
 
-  /** An order that was confirmed the day after, and got as far as it says. */
-  #promised(
-    form: DemoForm,
-    plan: {
-      readonly sent: number;
-      readonly from: number;
-      readonly to: number;
-      readonly prefer: Wanted['prefer'];
-      readonly until: 'confirmed' | 'making' | 'ready' | 'collected';
-      readonly pictures?: Wanted['pictures'];
-    },
-  ): void {
-    this.#timeline.add(this.#at(plan.sent, 19 * 60 + 12), async () => {
-      const order = await this.#send(form, { ...plan, window: 0, opensLink: true });
+  /** An order that was confirmed the day after, and has got as far as its pickup lets it. */
+  #promised(promised: Promised): void {
+    const { form, sent } = promised;
+    this.#timeline.add(this.#at(sent, 19 * 60 + 12), async () => {
+      const order = await this.#send(form, { ...promised, opensLink: true });
       if (order === null) return;
-      this.#timeline.add(this.#at(plan.sent + 1, 8 * 60 + 25), () => this.#confirm(order));
-      if (form === demoForms.wedding) this.#talk(order, plan.sent + 2);
-      if (plan.until !== 'confirmed') this.#make(order, plan.until);
+      this.#timeline.add(this.#at(sent + 1, 8 * 60 + 25), () => this.#confirm(order));
+      if (form === demoForms.wedding) this.#talk(order, sent + 2);
+      this.#make(order, promised);
     });
   }
 
-  #make(order: Order, until: 'making' | 'ready' | 'collected'): void {
+  /** Begun the day before, ready an hour ahead, collected at its window; sooner where it says so. */
+  #make(order: Order, { form, already, picture }: Promised): void {
     const { noor, pia } = this.#staff;
     const pickupAt = order.pickupAt ?? this.#now;
-    const startedAt = earlier(hoursAfter(pickupAt, -26), hoursAfter(this.#now, -5));
-    this.#timeline.add(startedAt, () => this.#mark(order, 'start', noor));
-    if (until === 'making') return;
-    const readyAt = earlier(hoursAfter(pickupAt, -1), hoursAfter(this.#now, -1));
-    this.#timeline.add(readyAt, async () => {
+    const byNow = (at: Date, hours: number): Date =>
+      already === undefined ? at : earlier(at, hoursAfter(this.#now, -hours));
+    this.#timeline.add(byNow(hoursAfter(pickupAt, -26), 5), () => this.#mark(order, 'start', noor));
+    if (already === 'making') return;
+    this.#timeline.add(byNow(hoursAfter(pickupAt, -1), 1), async () => {
       await this.#mark(order, 'ready', noor);
-      await addStaffPicture(this.#deps, order, 'finished', noor, pictures.rose);
+      if (picture !== undefined) {
+        await addStaffPicture(this.#deps, order, 'finished', noor, drawings[picture]);
+      }
     });
-    if (until === 'ready') return;
-    this.#timeline.add(earlier(hoursAfter(pickupAt, 0.2), this.#now), async () => {
-      const photoId = await addStaffPicture(this.#deps, order, 'handover', pia, pictures.rose);
+    if (already === 'ready') return;
+    this.#timeline.add(hoursAfter(pickupAt, 0.2), async () => {
+      const photoId =
+        picture === undefined
+          ? null
+          : await addStaffPicture(this.#deps, order, 'handover', pia, drawings[picture]);
       await order.reload();
       await collectOrder(this.#deps, {
         order,
         actor: pia,
         rowVersion: order.rowVersion,
-        collectedBy: 'Mabel Osei',
+        collectedBy: form.you.otherCollects ? form.you.collectorName : form.you.name,
         condition: 'Perfect, boxed, with candle and care card.',
         photoId,
       });
@@ -271,7 +221,7 @@ class DemoBook {
     });
   }
 
-  /** Three requests nobody has answered: an allergy in the way, a simple one, one without a promise. */
+  /** Four requests nobody has answered: an allergy in the way, two simple ones, one without a promise. */
   #waiting(): void {
     this.#timeline.add(hoursAfter(this.#now, -7), async () => {
       await this.#send(demoForms.eggAllergy, {
@@ -280,7 +230,7 @@ class DemoBook {
         prefer: 'first',
         window: 0,
         opensLink: true,
-        pictures: [pictures.sky],
+        pictures: ['sky'],
       });
     });
     this.#timeline.add(hoursAfter(this.#now, -4), async () => {
@@ -289,6 +239,15 @@ class DemoBook {
         to: 24,
         prefer: 'first',
         window: 3,
+        opensLink: true,
+      });
+    });
+    this.#timeline.add(hoursAfter(this.#now, -3), async () => {
+      await this.#send(everydayForms.vance, {
+        from: 9,
+        to: 24,
+        prefer: 'first',
+        window: 2,
         opensLink: true,
       });
     });
@@ -306,7 +265,11 @@ class DemoBook {
 
   #send(
     form: DemoForm,
-    plan: Omit<Wanted, 'form' | 'from' | 'to'> & { readonly from: number; readonly to: number },
+    plan: Omit<Wanted, 'form' | 'from' | 'to' | 'pictures'> & {
+      readonly from: number;
+      readonly to: number;
+      readonly pictures?: readonly (keyof typeof drawings)[];
+    },
   ): Promise<Order | null> {
     const { from, to } = plan;
     return sendDemoOrder(this.#deps, {
@@ -314,7 +277,7 @@ class DemoBook {
       prefer: plan.prefer,
       window: plan.window,
       opensLink: plan.opensLink,
-      pictures: plan.pictures,
+      pictures: plan.pictures?.map((name) => drawings[name]),
       askUs: plan.askUs,
       from: addDays(this.#day, from),
       to: addDays(this.#day, to),
