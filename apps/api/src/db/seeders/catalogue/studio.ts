@@ -29,9 +29,10 @@ export const studio = {
     'Eating raw or undercooked egg may raise the risk of illness, above all for young children, older people, pregnant people and anyone whose defences are low.',
 } as const;
 
-/** What the owner adds to what the ingredients say, with the assessment it rests on. */
+/** What the owner says beyond the ingredients, with the assessment it rests on. */
 export const kitchenAllergens: readonly {
   readonly allergen: AllergenId;
+  /** Added to what the ingredients show; they name the kinds of nuts by themselves. */
   readonly handled: boolean;
   readonly assessment: string | null;
 }[] = [
@@ -42,7 +43,7 @@ export const kitchenAllergens: readonly {
   },
   {
     allergen: 'tree-nuts',
-    handled: true,
+    handled: false,
     assessment:
       'Ground nuts are weighed on the main bench; flour dust and nut dust cannot be kept apart within a day.',
   },
