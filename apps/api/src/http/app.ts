@@ -2,13 +2,13 @@ import { existsSync } from 'node:fs';
 import path from 'node:path';
 import compression from 'compression';
 import express, { type Express } from 'express';
-import { pinoHttp } from 'pino-http';
 import type { Deps } from '#api/modules/deps.ts';
 import { clientAssets, clientPage } from './client-files.ts';
 import { featureRoutes } from './features.ts';
 import { openApiRoutes } from './openapi.ts';
 import { guardOrigin } from './origin-guard.ts';
 import { handleError, noSuchRoute } from './problem.ts';
+import { logRequests } from './request-log.ts';
 import type { RouteContract } from './route.ts';
 import { securityHeaders } from './security-headers.ts';
 import { sessions } from './session.ts';
@@ -26,8 +26,8 @@ export type App = {
 };
 
 /**
- * The whole HTTP side, outermost first: log, headers, the client's files, guard, body, what is the
- * same for everybody, session, what is not, and at the end the page or a problem.
+ * The whole HTTP side, outermost first: log, headers, what lies prepared, the client's files, guard,
+ * body, what is the same for everybody, session, what is not, and at the end the page or a problem.
  */
 export function createApp(deps: Deps): App {
   const { env, logger } = deps;
@@ -40,31 +40,17 @@ export function createApp(deps: Deps): App {
   app.disable('x-powered-by');
   app.disable('etag');
   app.set('trust proxy', env.trustedProxies);
-  app.use(
-    pinoHttp({
-      logger,
-      // Paths only: queries hold names people search for, headers hold cookies.
-      serializers: {
-        req: (request: { id: unknown; method: string; url: string }) => ({
-          id: request.id,
-          method: request.method,
-          path: request.url.split('?')[0],
-        }),
-        res: (response: { statusCode: number }) => ({ status: response.statusCode }),
-      },
-      // The error itself was logged where it was caught.
-      customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'warn' : 'info'),
-    }),
-  );
+  app.use(logRequests(logger));
   app.use(securityHeaders({ secure: env.secureCookies }));
+  for (const feature of everyFeature) if (feature.stage === 'prepared') app.use(feature.router);
   const hasClient = existsSync(path.join(env.clientDir, 'index.html'));
   if (hasClient) app.use(clientAssets(env.clientDir));
   app.use(guardOrigin(env.origins));
   app.use(express.json({ limit: bodyLimit }));
   app.use(compression({ threshold: compressFrom }));
-  for (const feature of everyFeature) if (feature.anonymous) app.use(feature.router);
+  for (const feature of everyFeature) if (feature.stage === 'anonymous') app.use(feature.router);
   app.use('/api', sessions(deps));
-  for (const feature of everyFeature) if (!feature.anonymous) app.use(feature.router);
+  for (const feature of everyFeature) if (feature.stage === 'personal') app.use(feature.router);
   app.use('/api', noSuchRoute);
   if (hasClient) app.use(clientPage(env.clientDir));
   app.use(noSuchRoute);

@@ -103,7 +103,7 @@ export function describeApi(declared: readonly RouteContract[]): Json {
 
 /** `GET /api/openapi.json`, and the same for reading at `GET /api`. */
 export function openApiRoutes(declared: readonly RouteContract[]): FeatureRoutes {
-  const routes = createRoutes({ anonymous: true });
+  const routes = createRoutes('anonymous');
   // Made on first reading, and once: nothing in it changes while the program runs.
   let described: string | undefined;
   let page: string | undefined;

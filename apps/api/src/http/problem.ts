@@ -2,6 +2,7 @@ import type { ErrorRequestHandler, Request, Response } from 'express';
 import { type Problem } from '#shared/contracts/common.ts';
 import { type ErrorCode, errorTitles } from '#shared/errors.ts';
 import { AppError } from '#api/platform/app-error.ts';
+import { logOf } from './request-log.ts';
 
 /** The only place where a code becomes a status. */
 export const statusOf: Readonly<Record<ErrorCode, number>> = {
@@ -79,14 +80,14 @@ export function sendProblem(response: Response, error: AppError): void {
 /** For whatever no route took. */
 export function noSuchRoute(request: Request): never {
   throw new AppError('not-found', {
-    detail: `${request.method} ${request.path} is not part of this API.`,
+    detail: `${request.method} ${request.baseUrl}${request.path} is not part of this API.`,
   });
 }
 
 /** The last handler: refusals by code, unknown errors logged and answered 500; the process stays up. */
 export const handleError: ErrorRequestHandler = (error: unknown, request, response, next) => {
   const refusal = toAppError(error);
-  if (refusal.code === 'internal') request.log.error({ err: error }, 'request failed');
+  if (refusal.code === 'internal') logOf(request).error({ err: error }, 'request failed');
   if (response.headersSent) {
     // The answer is half out: nothing can be said any more, so the connection is cut.
     next(error);

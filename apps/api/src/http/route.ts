@@ -58,12 +58,18 @@ export type Handler<C extends RouteContract> = (
   context: RouteContext<C>,
 ) => Answer<C> | Promise<Answer<C>>;
 
+/**
+ * How much happens before a route is reached. `prepared`: nothing but the log and the headers, for
+ * GETs answered from kept bytes. `anonymous`: origin, body and compression too; the same for
+ * everybody, and nobody's cookie is looked at. `personal`: the session as well.
+ */
+export type Stage = 'prepared' | 'anonymous' | 'personal';
+
 /** A feature's routes: mounted by the app, listed on the OpenAPI page, tried role by role. */
 export type FeatureRoutes = {
   readonly router: Router;
   readonly declared: readonly RouteContract[];
-  /** Mounted before sessions: the same for everybody, and nobody's cookie is looked at. */
-  readonly anonymous: boolean;
+  readonly stage: Stage;
 };
 
 export type RouteBuilder = FeatureRoutes & {
@@ -74,22 +80,18 @@ export type RouteBuilder = FeatureRoutes & {
   ): void;
 };
 
-/**
- * Collects a feature's routes. `anonymous` ones never change by person: they are mounted before
- * sessions and their actor is always a visitor.
- */
-export function createRoutes(options: { anonymous?: boolean } = {}): RouteBuilder {
+/** Collects a feature's routes; before the `personal` stage the actor is always a visitor. */
+export function createRoutes(stage: Stage = 'personal'): RouteBuilder {
   const router = Router();
   const declared: RouteContract[] = [];
-  const anonymous = options.anonymous ?? false;
   return {
     router,
     declared,
-    anonymous,
+    stage,
     add(contract, handler, ...before) {
       declared.push(contract);
       router[contract.method](contract.path, ...before, async (request, response) => {
-        const actor: Actor = anonymous ? { kind: 'visitor' } : await actorOf(request);
+        const actor: Actor = stage === 'personal' ? await actorOf(request) : { kind: 'visitor' };
         const context = {
           actor,
           ...readRequest(contract, request),

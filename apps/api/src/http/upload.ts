@@ -3,6 +3,7 @@ import path from 'node:path';
 import type { Request, RequestHandler, Response } from 'express';
 import multer, { MulterError } from 'multer';
 import { AppError } from '#api/platform/app-error.ts';
+import { logOf } from './request-log.ts';
 
 export type UploadOptions = {
   /** Form field of the file. */
@@ -63,7 +64,7 @@ function removeAfter(request: Request, response: Response): void {
   response.once('close', () => {
     if (request.file === undefined) return;
     rm(request.file.path, { force: true }).catch((error: unknown) =>
-      request.log.warn({ err: error }, 'an upload was left behind'),
+      logOf(request).warn({ err: error }, 'an upload was left behind'),
     );
   });
 }

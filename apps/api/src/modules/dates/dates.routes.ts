@@ -7,7 +7,7 @@ import { answerDatesFor } from '#api/modules/plan/plan.queries.ts';
 
 /** Which days a design can be made for: the same for everybody, and nobody's orders are named. */
 export function datesRoutes(deps: Pick<Deps, 'clock'>): FeatureRoutes {
-  const routes = createRoutes({ anonymous: true });
+  const routes = createRoutes('anonymous');
   routes.add(
     {
       name: 'answer-dates',

@@ -7,7 +7,7 @@ import { estimateDesign } from './estimate-design.queries.ts';
 
 /** Estimates bind nobody and are the same for everybody. */
 export function estimatesRoutes({ clock }: Deps): FeatureRoutes {
-  const routes = createRoutes({ anonymous: true });
+  const routes = createRoutes('anonymous');
   routes.add(
     {
       name: 'estimate-design',

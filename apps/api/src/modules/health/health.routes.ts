@@ -6,7 +6,7 @@ import { checkReadiness } from './readiness.queries.ts';
 
 /** For whatever watches the program: is it there, and may it be sent people. */
 export function healthRoutes(deps: Deps): FeatureRoutes {
-  const routes = createRoutes({ anonymous: true });
+  const routes = createRoutes('anonymous');
 
   routes.add(
     {

@@ -5,7 +5,7 @@ import { preparedMenu } from './menu.queries.ts';
 
 /** What the studio makes, and what it says about it; the same for everybody. */
 export function menuRoutes(_deps: Deps): FeatureRoutes {
-  const routes = createRoutes({ anonymous: true });
+  const routes = createRoutes('prepared');
   routes.add(
     {
       name: 'read-menu',

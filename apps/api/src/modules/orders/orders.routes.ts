@@ -86,7 +86,7 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
     },
     async ({ actor, params: { code }, body }) => {
       const order = await findOwn(actor, code);
-      authorise(actor, actor.kind !== 'staff');
+      authoriseOn(actor, 'withdraw', order);
       await withdrawOrderCommand(deps, { order, actor, ...body });
       return presentOrder(await loadOrderPage(await order.reload()), actor);
     },

@@ -14,6 +14,7 @@ import { authorise, reveal } from '#api/modules/authorise.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { mayOrderAs } from '#api/modules/orders/may-order.queries.ts';
 import { findOrderByCode, findOrderByNumber } from '#api/modules/orders/orders.queries.ts';
+import { mayStaffDo } from '#api/modules/staff-orders/may-staff.queries.ts';
 import type { Actor } from '#api/platform/actor.ts';
 import { notFound } from '#api/platform/app-error.ts';
 import { hashKey } from '#api/platform/ids.ts';
@@ -106,7 +107,7 @@ export function photosRoutes(deps: Deps): FeatureRoutes {
       refusals: ['not-found', 'unreadable-photo', 'too-large', 'too-many-photos', 'unavailable'],
     },
     async ({ actor, params, request }) => {
-      authorise(actor, actor.kind === 'staff');
+      authorise(actor, mayStaffDo(actor, 'add-photos'));
       const order = await findOrderByNumber(Number(params.number));
       const { kind, note } = validate(staffFields, { ...request.body });
       const { photo: kept } = await useUpload(request, field, (file) =>
