@@ -101,7 +101,7 @@ export function initStudio(sequelize: Sequelize): void {
       offersDelivery: withDefault(flag('offersDelivery'), false),
       offersSetUp: withDefault(flag('offersSetUp'), false),
       requireSecondFactor: withDefault(flag('requireSecondFactor'), true),
-      maxPhotos: withDefault(integer(), 13),
+      maxPhotos: withDefault(integer(), 8),
       maxPhotoBytes: withDefault(integer(), 26214400),
       maxPhotoPixels: withDefault(integer(), 50000000),
       kitchen: json('kitchen', jsonObject),

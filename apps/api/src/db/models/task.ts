@@ -6,6 +6,7 @@ import type {
   NonAttribute,
   Sequelize,
 } from 'sequelize';
+import { taskKinds } from '#shared/contracts/vocabulary.ts';
 import {
   instant,
   integer,
@@ -19,22 +20,9 @@ import {
 import type { Assignment } from './assignment.ts';
 import type { Order } from './order.ts';
 
-export const planTaskKinds = [
-  'bake',
-  'custard',
-  'buttercream',
-  'filling',
-  'fill-and-crumb-coat',
-  'final-coat',
-  'cover',
-  'decorate',
-  'stack',
-  'box',
-  'handover',
-  'drive',
-  'set-up',
-] as const;
-export type PlanTaskKind = (typeof planTaskKinds)[number];
+/** What the bench does, and the two that belong to delivering. */
+const planTaskKinds = [...taskKinds, 'drive', 'set-up'] as const;
+type PlanTaskKind = (typeof planTaskKinds)[number];
 
 export const workStates = ['planned', 'started', 'finished', 'late', 'dropped'] as const;
 export type WorkState = (typeof workStates)[number];
@@ -79,7 +67,7 @@ export function initTask(sequelize: Sequelize): void {
       mixerMinutes: withDefault(integer(), 0),
       ovenMinutes: withDefault(integer(), 0),
       skillId: nullable(text()),
-    withinMinutes: nullable(integer()),
+      withinMinutes: nullable(integer()),
       state: withDefault(oneOf(workStates), 'planned'),
       minutesTaken: nullable(integer()),
       startedAt: nullable(instant('startedAt')),
