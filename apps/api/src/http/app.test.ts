@@ -72,8 +72,37 @@ describe('problems', () => {
   });
 
   it('answer an unknown address and a broken one', async () => {
-    expect((await app.visitor().get('/api/nothing')).body).toMatchObject({ code: 'not-found' });
+    expect((await app.visitor().get('/api/nothing')).body).toMatchObject({
+      code: 'not-found',
+      detail: 'GET /api/nothing is not part of this API.',
+    });
     expect((await app.visitor().get('/api/%E0%A4%A')).status).toBeLessThan(500);
+    expect((await app.visitor().send('HEAD', '/api/nothing', {})).status).toBe(404);
+    expect((await app.visitor().send('OPTIONS', '/api/nothing', {})).status).toBe(404);
+  });
+
+  it.each([
+    ['lists in lists', `${'['.repeat(50_000)}${']'.repeat(50_000)}`],
+    ['objects in objects', `${'{"email":'.repeat(20_000)}1${'}'.repeat(20_000)}`],
+    ['a name for every object’s prototype', '{"__proto__":{"email":"rosa@example.com"}}'],
+    ['U+0000 in a text', '{"email":"rosa@example.com","password":"a\\u0000b"}'],
+  ])('answer %s as input that is not right', async (_what, body) => {
+    const answer = await app.visitor().post('/api/session/password', body);
+    expect([answer.status, answer.body]).toMatchObject([422, { code: 'invalid-input' }]);
+  });
+
+  it('answer U+0000 in an address, where it would reach the database', async () => {
+    expect((await app.visitor().get('/api/orders/%00')).status).toBe(422);
+  });
+
+  it.each([
+    ['text/plain', 422],
+    ['application/x-www-form-urlencoded', 422],
+    ['application/json; charset=utf-16', 400],
+  ])('answer a body that says it is %s', async (type, status) => {
+    const headers = { 'Content-Type': type };
+    const answer = await app.visitor().post('/api/session/password', '{}', { headers });
+    expect(answer.status).toBe(status);
   });
 
   it('are never kept by a cache', async () => {

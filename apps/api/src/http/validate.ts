@@ -1,6 +1,6 @@
 import * as z from 'zod/mini';
 import { humanMessage } from '#shared/contracts/messages.ts';
-import { AppError, type Issue } from '#api/platform/app-error.ts';
+import { AppError, invalidField, type Issue } from '#api/platform/app-error.ts';
 
 /**
  * What the schema makes of the input; throws `invalid-input` with every issue's path otherwise.
@@ -10,8 +10,26 @@ export function validate<Schema extends z.ZodMiniType>(
   input: unknown,
 ): z.output<Schema> {
   const result = z.safeParse(schema, input, { error: humanMessage, reportInput: false });
-  if (result.success) return result.data;
+  if (result.success) {
+    const unkept = nulIn(result.data, []);
+    if (unkept === null) return result.data;
+    throw invalidField(unkept, 'That holds a sign we cannot keep.');
+  }
   throw new AppError('invalid-input', { issues: result.error.issues.map(toIssue) });
+}
+
+/** Where some text holds U+0000, which ends a statement of the database in the middle. */
+function nulIn(value: unknown, path: readonly (string | number)[]): (string | number)[] | null {
+  if (typeof value === 'string') return value.includes('\0') ? [...path] : null;
+  if (typeof value !== 'object' || value === null) return null;
+  const steps = Array.isArray(value)
+    ? value.map((it: unknown, index): [number, unknown] => [index, it])
+    : Object.entries(value);
+  for (const [step, inner] of steps) {
+    const found = nulIn(inner, [...path, step]);
+    if (found !== null) return found;
+  }
+  return null;
 }
 
 function toIssue(issue: z.core.$ZodIssue): Issue {

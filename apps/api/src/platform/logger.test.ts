@@ -37,6 +37,15 @@ describe('the log', () => {
     expect(text).not.toContain('ada@example.com');
   });
 
+  it('takes the rows of a database out of its errors', () => {
+    const parent = Object.assign(new Error('SQLITE_CONSTRAINT'), { sql: "VALUES ('Ada Tarn')" });
+    const error = Object.assign(new Error('not unique'), { parent, sql: parent.sql, code: 'E' });
+    const text = logged((logger) => logger.error({ err: error }, 'failed'));
+    expect(text).toContain('not unique');
+    expect(text).not.toContain('Ada Tarn');
+    expect(JSON.parse(text)).toMatchObject({ err: { type: 'Error', code: 'E' } });
+  });
+
   it('keeps what is needed to find a fault', () => {
     const text = logged((logger) =>
       logger.error({ orderId: '42', err: new Error('no') }, 'failed'),

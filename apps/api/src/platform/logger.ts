@@ -33,6 +33,20 @@ export function withoutAddresses(text: string): string {
   return text.replaceAll(address, '[address]');
 }
 
+/** What a log keeps of an error's own fields; a database's would tell the row it was given. */
+const errorFields = ['code', 'errno', 'syscall', 'command', 'responseCode', 'status'] as const;
+
+function describeError(error: Error): Record<string, unknown> {
+  const { type, message, stack, ...rest } = stdSerializers.err(error);
+  const kept = errorFields.flatMap((field) => (field in rest ? [[field, rest[field]]] : []));
+  return {
+    type,
+    message: withoutAddresses(message),
+    stack: withoutAddresses(stack),
+    ...Object.fromEntries(kept),
+  };
+}
+
 /** A structured log in lines of JSON that holds no secrets, cookies or addresses. */
 export function createLogger(level: LogLevel, destination?: DestinationStream): Logger {
   const options = {
@@ -40,14 +54,7 @@ export function createLogger(level: LogLevel, destination?: DestinationStream): 
     base: undefined,
     redact: { paths: redacted, censor: '[redacted]' },
     serializers: {
-      err(error: Error) {
-        const kept = stdSerializers.err(error);
-        return {
-          ...kept,
-          message: withoutAddresses(kept.message),
-          stack: withoutAddresses(kept.stack),
-        };
-      },
+      err: describeError,
     },
   };
   return destination === undefined ? pino(options) : pino(options, destination);

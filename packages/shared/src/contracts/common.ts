@@ -17,9 +17,12 @@ export const colourHex = z
   .string()
   .check(z.regex(/^#[0-9a-f]{6}$/i, 'Write a colour as # and six figures.'));
 
+/** No line breaks and no other control characters: what is kept as a line stays one. */
+const onOneLine = z.regex(/^\P{Cc}*$/u, 'On one line, please.');
+
 /** Text a person types on one line: trimmed, with an upper limit of characters. */
 export const line = (max: number, message = `At most ${max} characters, please.`) =>
-  z.string().check(z.trim(), z.maxLength(max, message));
+  z.string().check(z.trim(), z.maxLength(max, message), onOneLine);
 
 /** One line that must not be empty. */
 export const requiredLine = (max: number, missing: string) =>
@@ -29,6 +32,7 @@ export const requiredLine = (max: number, missing: string) =>
       z.trim(),
       z.minLength(1, missing),
       z.maxLength(max, `At most ${max} characters, please.`),
+      onOneLine,
     );
 
 /** Longer text, line breaks kept. */
