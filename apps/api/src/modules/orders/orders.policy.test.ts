@@ -26,7 +26,7 @@ const always = [...orderStatuses];
 /** Who, and in which states; everybody and everything else is refused. */
 const table: Record<OrderAction, { who: string[]; states: OrderStatus[] }> = {
   see: { who: [...holders, 'counter', 'owner'], states: always },
-  withdraw: { who: holders, states: ['asked', 'quoted', 'agreed'] },
+  withdraw: { who: holders, states: always },
   write: { who: holders, states: always },
   'add-photos': {
     who: holders,

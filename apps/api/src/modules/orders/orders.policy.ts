@@ -2,9 +2,12 @@ import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
 import { findTransition, isLive } from '#shared/orders/transitions.ts';
 import { holdsOrder } from '#api/platform/actor.ts';
 import type { Actor } from '#api/platform/actor.ts';
-import { canMove, orderActorOf } from './change-order-status.command.ts';
+import { orderActorOf } from './change-order-status.command.ts';
 
-/** What the people an order belongs to may do with it; staff have routes of their own. */
+/**
+ * What the people an order belongs to may do with it; staff have routes of their own. When it may
+ * still be withdrawn is the table of moves'.
+ */
 export type OrderAction = 'see' | 'withdraw' | 'write' | 'add-photos' | 'see-calendar-file';
 
 export type OrderResource = {
@@ -17,8 +20,8 @@ type Rule = (actor: Actor, order: OrderResource) => boolean;
 
 const rules: Readonly<Record<OrderAction, Rule>> = {
   see: (actor, order) => actor.kind === 'staff' || holdsOrder(actor, order),
-  withdraw: (actor, order) => holdsOrder(actor, order) && canMove(order, 'withdraw', actor),
-  write: (actor, order) => holdsOrder(actor, order),
+  withdraw: holdsOrder,
+  write: holdsOrder,
   'add-photos': (actor, order) => holdsOrder(actor, order) && isLive(order.status),
   'see-calendar-file': (actor, order) =>
     (actor.kind === 'staff' || holdsOrder(actor, order)) && hasPromise(order.status),

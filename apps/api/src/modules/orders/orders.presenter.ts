@@ -3,6 +3,7 @@ import type { Photo } from '#shared/contracts/photos.ts';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
 import type { Order } from '#api/db/models/order.ts';
 import type { Actor } from '#api/platform/actor.ts';
+import { canMove } from './change-order-status.command.ts';
 import { designOf } from './order-design.queries.ts';
 import { mayOrder } from './orders.policy.ts';
 import { pickupOf } from './pickup.queries.ts';
@@ -63,7 +64,7 @@ export function presentOrder(page: OrderPage, actor: Actor): OrderView {
     otherDates: page.otherDates,
     showPhotos: order.showPhotos,
     can: {
-      withdraw: may('withdraw'),
+      withdraw: may('withdraw') && canMove(order, 'withdraw', actor),
       write: may('write'),
       addPhotos: may('add-photos'),
       seeCalendarFile: may('see-calendar-file'),
