@@ -11,7 +11,7 @@ export function validate<Schema extends z.ZodMiniType>(
 ): z.output<Schema> {
   const result = z.safeParse(schema, input, { error: humanMessage, reportInput: false });
   if (result.success) {
-    const unkept = nulIn(result.data, []);
+    const unkept = nulIn(result.data);
     if (unkept === null) return result.data;
     throw invalidField(unkept, 'That holds a sign we cannot keep.');
   }
@@ -19,15 +19,13 @@ export function validate<Schema extends z.ZodMiniType>(
 }
 
 /** Where some text holds U+0000, which ends a statement of the database in the middle. */
-function nulIn(value: unknown, path: readonly (string | number)[]): (string | number)[] | null {
-  if (typeof value === 'string') return value.includes('\0') ? [...path] : null;
+function nulIn(value: unknown): (string | number)[] | null {
+  if (typeof value === 'string') return value.includes('\0') ? [] : null;
   if (typeof value !== 'object' || value === null) return null;
-  const steps = Array.isArray(value)
-    ? value.map((it: unknown, index): [number, unknown] => [index, it])
-    : Object.entries(value);
-  for (const [step, inner] of steps) {
-    const found = nulIn(inner, [...path, step]);
-    if (found !== null) return found;
+  for (const [step, inner] of Object.entries(value)) {
+    const found = nulIn(inner);
+    // Only what is found needs its path.
+    if (found !== null) return [Array.isArray(value) ? Number(step) : step, ...found];
   }
   return null;
 }

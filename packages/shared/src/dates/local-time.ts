@@ -55,7 +55,7 @@ function wallMs(instantMs: number, zone: string): number {
   return Date.UTC(read.year, read.month - 1, read.day, read.hour, read.minute, read.second);
 }
 
-/** Offsets at instants already asked for, by zone; a planner asks for the same days over and over. */
+/** Offsets in minutes already asked about, by zone; a planner asks for the same days over and over. */
 const offsets = new Map<string, Map<number, number>>();
 
 function offsetMs(instantMs: number, zone: string): number {
@@ -64,11 +64,13 @@ function offsetMs(instantMs: number, zone: string): number {
     known = new Map();
     offsets.set(zone, known);
   }
-  let offset = known.get(instantMs);
+  // Clocks have changed on whole minutes, by whole minutes, since 1972.
+  const minute = Math.floor(instantMs / minuteMs);
+  let offset = known.get(minute);
   if (offset === undefined) {
-    offset = wallMs(instantMs, zone) - Math.floor(instantMs / 1000) * 1000;
+    offset = wallMs(minute * minuteMs, zone) - minute * minuteMs;
     if (known.size >= 20_000) known.clear();
-    known.set(instantMs, offset);
+    known.set(minute, offset);
   }
   return offset;
 }
@@ -145,7 +147,8 @@ export function utcMinuteAt(date: LocalDate, minuteOfDay: number, zone: string):
 
 /** The local day and minute an instant falls on. */
 export function localAt(instant: Date, zone: string): { date: LocalDate; minute: number } {
-  const wall = wallMs(instant.getTime(), zone);
+  const ms = instant.getTime();
+  const wall = ms + offsetMs(ms, zone);
   const midnight = Math.floor(wall / dayMs) * dayMs;
   return { date: dateOfMs(midnight), minute: Math.floor((wall - midnight) / minuteMs) };
 }

@@ -1,5 +1,5 @@
 import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
-import type { Menu } from '#shared/contracts/menu.ts';
+import type { AllergenEntry, Menu } from '#shared/contracts/menu.ts';
 import { adviseOn } from './advice.ts';
 import { amountsOf, carriedWeightG, heightMm } from './amounts.ts';
 import { mergeAllergens } from './merge-allergens.ts';
@@ -12,12 +12,21 @@ import { resolveDesign } from './resolve-design.ts';
 import { tableOf } from './situation.ts';
 import { keepCoolText } from './time-out.ts';
 
+const handled = new WeakMap<Menu, readonly AllergenEntry[]>();
+
+/** What the kitchen handles, merged once for a menu. */
+function handledBy(menu: Menu): AllergenEntry[] {
+  const entries = handled.get(menu) ?? mergeAllergens([menu.studio.handles]);
+  handled.set(menu, entries);
+  return [...entries];
+}
+
 /**
  * Everything worked out about a design: portions, proposals, price, allergens, ranks, advice,
  * amounts. Pure; the same in the browser and on the server. `today` is the studio's local date.
  * Never throws on a design that passes the contract and names what the menu has; throws
- * `UnknownPart` (with the path inside the design) otherwise. Proposals are remembered per `menu`
- * object, so pass the same one again while it has not changed.
+ * `UnknownPart` (with the path inside the design) otherwise. What hangs on the menu alone is
+ * remembered per `menu` object, so pass the same one again while it has not changed.
  */
 export function evaluateDesign(request: EstimateRequest, menu: Menu, today: string): Estimate {
   const { design, date } = request;
@@ -34,7 +43,7 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
     proposals,
     price: priceDesign(resolved, terms),
     allergens: containedAllergens(parts),
-    handled: mergeAllergens([menu.studio.handles]),
+    handled: handledBy(menu),
     ranks: coats.map((it) => it.rank),
     advice: adviseOn({ ...table, coats }, portions, proposals),
     weightG: carriedWeightG(resolved, amounts),

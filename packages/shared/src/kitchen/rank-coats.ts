@@ -1,4 +1,4 @@
-import type { Contents } from '#shared/contracts/menu.ts';
+import type { Contents, Menu } from '#shared/contracts/menu.ts';
 import type { AdviceLevel } from '#shared/contracts/vocabulary.ts';
 import { allergenName } from './allergen-names.ts';
 import { clashesWith, dietClashes, isListed } from './clashes.ts';
@@ -6,13 +6,32 @@ import { byLevel, coatLimitC, fareOfCoat, sharper } from './heat.ts';
 import { formatTemperature } from './measures.ts';
 import type { Coat, RankedCoat, Table } from './situation.ts';
 
-/** Every coat the menu makes: each covering over each style, and those that need none. */
-function coatsOfMenu({ coverings, styles }: Table['resolved']['menu']): Coat[] {
-  return coverings.flatMap((covering): Coat[] =>
-    covering.id === 'ganache'
-      ? [{ covering, style: null }]
-      : styles.map((style) => ({ covering, style })),
-  );
+/** A coat of the menu with how much warmth it bears. */
+type MenuCoat = Coat & { readonly limitC: number; readonly limit: string };
+
+const known = new WeakMap<Menu, readonly MenuCoat[]>();
+
+/**
+ * Every coat the menu makes, each covering over each style and those that need none: by how much
+ * warmth they bear, then by how smooth they come out. Worked out once for a menu.
+ */
+function coatsOf(menu: Menu): readonly MenuCoat[] {
+  const before = known.get(menu);
+  if (before !== undefined) return before;
+  const lead = menu.studio.temperatureLead;
+  const coats = menu.coverings
+    .flatMap((covering): Coat[] =>
+      covering.id === 'ganache'
+        ? [{ covering, style: null }]
+        : menu.styles.map((style) => ({ covering, style })),
+    )
+    .map((coat) => {
+      const limitC = coatLimitC(coat);
+      return { ...coat, limitC, limit: formatTemperature(limitC, lead) };
+    })
+    .sort((a, b) => b.limitC - a.limitC || (b.style?.smoothness ?? 0) - (a.style?.smoothness ?? 0));
+  known.set(menu, coats);
+  return coats;
 }
 
 /**
@@ -20,23 +39,21 @@ function coatsOfMenu({ coverings, styles }: Table['resolved']['menu']): Coat[] {
  * have to spare, then by how smooth they come out.
  */
 export function rankCoats(table: Table): RankedCoat[] {
-  return coatsOfMenu(table.resolved.menu)
-    .map((coat) => ({ ...coat, limitC: coatLimitC(coat), ...judge(coat, table) }))
-    .sort(
-      (a, b) =>
-        byLevel(a.level, b.level) ||
-        b.limitC - a.limitC ||
-        (b.style?.smoothness ?? 0) - (a.style?.smoothness ?? 0),
-    )
-    .map(({ covering, style, level, sentence }) => ({
+  const ranked = coatsOf(table.resolved.menu).map((coat) => {
+    const { covering, style } = coat;
+    const { level, sentence } = judge(coat, table);
+    return {
       covering,
       style,
       rank: { covering: covering.id, style: style?.id ?? null, level, sentence },
-    }));
+    };
+  });
+  // Within a level the menu's own order stays.
+  return ranked.sort((a, b) => byLevel(a.rank.level, b.rank.level));
 }
 
-function judge(coat: Coat, table: Table): { level: AdviceLevel; sentence: string } {
-  const heat = judgeHeat(coatLimitC(coat), table);
+function judge(coat: MenuCoat, table: Table): { level: AdviceLevel; sentence: string } {
+  const heat = judgeHeat(coat, table);
   const guests = judgeGuests(coat, table);
   return guests === null
     ? heat
@@ -44,11 +61,10 @@ function judge(coat: Coat, table: Table): { level: AdviceLevel; sentence: string
 }
 
 function judgeHeat(
-  limitC: number,
+  { limitC, limit }: MenuCoat,
   { resolved, warmth }: Table,
 ): { level: AdviceLevel; sentence: string } {
   const { setting } = resolved.design;
-  const limit = formatTemperature(limitC, resolved.menu.studio.temperatureLead);
   if (setting === null || warmth === null) return { level: 'ok', sentence: `Holds to ${limit}.` };
   const level = fareOfCoat(limitC, setting, warmth);
   if (setting.place === 'sun') {
