@@ -10,6 +10,7 @@ import { defineConfig } from 'vitest/config';
 
 const root = import.meta.dirname;
 const apiSource = path.join(root, 'apps/api/src');
+const webSource = path.join(root, 'apps/web/src');
 
 /** Ports of `npm run dev`: the page is served on the first, the API listens on the second. */
 const webPort = Number(process.env.TIERWELL_WEB_PORT ?? 4100);
@@ -62,22 +63,50 @@ function precompress(): Plugin {
   };
 }
 
+type Modules = { getModuleInfo(id: string): { importedIds: readonly string[] } | null };
+
+/** Everything these sources load at once, without what they load later. */
+function loadedWith(sources: readonly string[], modules: Modules): ReadonlySet<string> {
+  const found = new Set<string>();
+  const add = (id: string) => {
+    if (found.has(id)) return;
+    found.add(id);
+    for (const imported of modules.getModuleInfo(id)?.importedIds ?? []) add(imported);
+  };
+  for (const source of sources) add(path.join(webSource, source));
+  return found;
+}
+
+const calendar = 'features/order-wizard/components/day/day-calendar.tsx';
+/** What a visitor on the way to an order loads first: the frame, the first step and its calendar. */
+const firstLoaded = ['main.tsx', 'routes/order/order-routes.tsx', calendar];
+/** Pages that read a little of what is the wizard's, and must not load the wizard for it. */
+const besideWizard = ['routes/home/home-page.tsx', 'routes/menu/menu-page.tsx'];
+
 /**
- * What most pages share travels together: left alone it becomes dozens of files of half a kilobyte,
- * each a request of its own and each compressed alone.
+ * The first load in a few files: left alone it becomes three dozen, most of half a kilobyte, each a
+ * request of its own and each compressed alone. Libraries are apart because they seldom change.
  */
-const clientGroups = [
-  {
-    name: 'parts',
-    test: /apps\/web\/src\/(?:components\/ui|lib|config)\/|packages\/shared\/src\/dates\//,
-    minShareCount: 5,
-  },
-  {
-    name: 'contracts',
-    test: /node_modules\/zod|packages\/shared\/src\/contracts\//,
-    minShareCount: 3,
-  },
-];
+function clientGroups() {
+  const wizard = /\/(?:features\/order-wizard|routes\/order)\//;
+  let first: ReadonlySet<string> | null = null;
+  let beside: ReadonlySet<string> | null = null;
+  const ownGroup = (id: string, modules: Modules): string | null => {
+    first ??= loadedWith(firstLoaded, modules);
+    beside ??= loadedWith(besideWizard, modules);
+    if (!first.has(id) || id.endsWith(calendar)) return null;
+    return wizard.test(id) && !beside.has(id) ? 'order' : 'app';
+  };
+  return [
+    {
+      name: 'libraries',
+      test: /node_modules\/(?:react|react-dom|scheduler|react-router|@tanstack\/(?:react-query|query-core)|zod)\//,
+      priority: 2,
+    },
+    { name: 'form', test: /node_modules\/react-hook-form\//, priority: 1 },
+    { name: ownGroup, test: /\/(?:apps\/web|packages\/shared)\/src\// },
+  ];
+}
 
 /** `vite build` makes the client, `vite build --ssr` the server; `npm run build` runs both. */
 export default defineConfig(({ isSsrBuild }) => ({
@@ -115,7 +144,9 @@ export default defineConfig(({ isSsrBuild }) => ({
         manifest: true,
         target: 'es2022',
         assetsInlineLimit: 0,
-        rolldownOptions: { output: { codeSplitting: { groups: clientGroups } } },
+        // Every browser this is built for preloads modules by itself.
+        modulePreload: { polyfill: false },
+        rolldownOptions: { output: { codeSplitting: { groups: clientGroups() } } },
       },
   test: {
     // Two at a time: the tests share two cores with real SQLite files and real servers.
