@@ -1,15 +1,13 @@
 import * as z from 'zod/mini';
 import { done, itIsDone } from '#shared/contracts/common.ts';
 import { blockDay, blockedDay, calendarQuery, calendarView } from '#shared/contracts/staff.ts';
-import { inTransaction } from '#api/db/transaction.ts';
 import { createRoutes } from '#api/http/route.ts';
 import type { FeatureRoutes } from '#api/http/route.ts';
-import { authorise } from '#api/modules/authorise.ts';
+import { authorise, requireStaff } from '#api/modules/authorise.ts';
 import type { Deps } from '#api/modules/deps.ts';
-import { blockDay as blockDayCommand, openDay } from '#api/modules/plan/block-day.command.ts';
+import { blockDay as blockDayCommand } from '#api/modules/plan/block-day.command.ts';
+import { openDay } from '#api/modules/plan/open-day.command.ts';
 import { mayStaffDo } from '#api/modules/staff-orders/may-staff.queries.ts';
-import { userIdOf } from '#api/platform/actor.ts';
-import { notFound } from '#api/platform/app-error.ts';
 import { presentCalendar } from './calendar.presenter.ts';
 import { loadCalendar } from './calendar.queries.ts';
 
@@ -45,7 +43,7 @@ export function calendarRoutes(_deps: Deps): FeatureRoutes {
     },
     async ({ actor, body }) => {
       authorise(actor, mayStaffDo(actor, 'block-days'));
-      return inTransaction(() => blockDayCommand({ ...body, userId: userIdOf(actor) }));
+      return blockDayCommand({ ...body, actor: requireStaff(actor) });
     },
   );
 
@@ -61,7 +59,7 @@ export function calendarRoutes(_deps: Deps): FeatureRoutes {
     },
     async ({ actor, params }) => {
       authorise(actor, mayStaffDo(actor, 'block-days'));
-      if (!(await inTransaction(() => openDay(params)))) throw notFound();
+      await openDay({ ...params, actor: requireStaff(actor) });
       return itIsDone;
     },
   );

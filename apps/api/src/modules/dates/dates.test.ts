@@ -3,13 +3,16 @@ import { problem } from '#shared/contracts/common.ts';
 import { datesResponse } from '#shared/contracts/dates.ts';
 import type { DatesResponse } from '#shared/contracts/dates.ts';
 import type { Design } from '#shared/contracts/design.ts';
+import { Audit } from '#api/db/models/audit.ts';
 import { Order } from '#api/db/models/order.ts';
 import { Studio } from '#api/db/models/studio.ts';
 import { inTransaction } from '#api/db/transaction.ts';
-import { blockDay, openDay } from '#api/modules/plan/block-day.command.ts';
+import { blockDay } from '#api/modules/plan/block-day.command.ts';
 import { loadCalendarDays } from '#api/modules/plan/calendar-days.queries.ts';
+import { openDay } from '#api/modules/plan/open-day.command.ts';
 import { plannedTasksOf } from '#api/modules/plan/planned-tasks.queries.ts';
 import { orderForm, placeOrder, roundTier } from '#api/testing/order-form.ts';
+import { addUser } from '#api/testing/people.ts';
 import { seededStudio } from '#api/testing/studio.ts';
 import { startTestApp } from '#api/testing/test-app.ts';
 import type { TestApp } from '#api/testing/test-app.ts';
@@ -136,13 +139,13 @@ describe('POST /api/dates', () => {
       app.visitor(),
       orderForm(day, { you: { email: 'block@example.com' } }),
     );
-    const block = await inTransaction(() =>
-      blockDay({ date: day, reason: 'The oven is serviced', userId: null }),
-    );
+    const { id: userId, name } = await addUser('baker');
+    const actor = { kind: 'staff', role: 'baker', userId, name, email: '' } as const;
+    const block = await blockDay({ date: day, reason: 'The oven is serviced', actor });
     expect(block.standing).toEqual([number]);
-    await expect(
-      inTransaction(() => blockDay({ date: day, reason: 'again', userId: null })),
-    ).rejects.toMatchObject({ code: 'wrong-state' });
+    await expect(blockDay({ date: day, reason: 'again', actor })).rejects.toMatchObject({
+      code: 'wrong-state',
+    });
     const closed = (await ask(design(), day)).days[0];
     expect(closed).toMatchObject({ answer: 'closed', reason: { code: 'closed-day' } });
     // The reason is for the team.
@@ -155,8 +158,13 @@ describe('POST /api/dates', () => {
       benchMinutes: 0,
       pickups: 1,
     });
-    expect(await inTransaction(() => openDay({ id: block.id }))).toBe(true);
-    expect(await inTransaction(() => openDay({ id: block.id }))).toBe(false);
+    await openDay({ id: block.id, actor });
+    await expect(openDay({ id: block.id, actor })).rejects.toMatchObject({ code: 'not-found' });
+    const noted = await Audit.findAll({ where: { subjectId: block.id }, order: [['at', 'ASC']] });
+    expect(noted.map((it) => [it.action, it.actorUserId])).toEqual([
+      ['block-day', userId],
+      ['open-day', userId],
+    ]);
     expect((await ask(design(), day)).days[0]?.answer).toBe('open');
   });
 

@@ -1,53 +1,43 @@
-import { QueryTypes } from 'sequelize';
+import { Op, QueryTypes } from 'sequelize';
 import * as z from 'zod/mini';
 import type { LocalDate } from '#shared/dates/local-time.ts';
-import { Op } from 'sequelize';
-import { changeOne } from '#api/db/change-one.ts';
-import { currentClock, currentDatabase } from '#api/db/current-database.ts';
+import { currentDatabase } from '#api/db/current-database.ts';
 import { Closure } from '#api/db/models/closure.ts';
 import { noteSettingsChange } from '#api/db/plan-versions.ts';
+import { inTransaction } from '#api/db/transaction.ts';
+import { noteAudit } from '#api/modules/note-audit.ts';
+import type { Staff } from '#api/platform/actor.ts';
 import { AppError } from '#api/platform/app-error.ts';
 
 /**
  * Closes a day for work and pickups. Nothing that stands is dropped: the numbers of the orders
- * with work or a pickup on that day are answered, so that somebody looks at them. Joins the
- * transaction of its cause.
+ * with work or a pickup on that day are answered, so that somebody looks at them.
  * @throws `wrong-state` when the day is closed already
  */
-export async function blockDay(block: {
+export function blockDay(block: {
   readonly date: LocalDate;
   readonly reason: string;
-  readonly userId: string | null;
+  readonly actor: Staff;
 }): Promise<{ readonly id: string; readonly standing: number[] }> {
-  const { date, reason, userId } = block;
-  const already = await Closure.findOne({
-    where: { reopenedAt: null, fromDate: { [Op.lte]: date }, toDate: { [Op.gte]: date } },
+  const { date, reason, actor } = block;
+  return inTransaction(async () => {
+    const already = await Closure.findOne({
+      where: { reopenedAt: null, fromDate: { [Op.lte]: date }, toDate: { [Op.gte]: date } },
+    });
+    if (already !== null) {
+      throw new AppError('wrong-state', { detail: 'That day is closed already.' });
+    }
+    const { id } = await Closure.create({
+      fromDate: date,
+      toDate: date,
+      kind: 'blocked',
+      reason,
+      createdByUserId: actor.userId,
+    });
+    await noteSettingsChange();
+    await noteAudit(actor, { action: 'block-day', subjectKind: 'closure', subjectId: id });
+    return { id, standing: await standingOn(date) };
   });
-  if (already !== null)
-    throw new AppError('wrong-state', { detail: 'That day is closed already.' });
-  const closure = await Closure.create({
-    fromDate: date,
-    toDate: date,
-    kind: 'blocked',
-    reason,
-    createdByUserId: userId,
-  });
-  await noteSettingsChange();
-  return { id: closure.id, standing: await standingOn(date) };
-}
-
-/**
- * Opens a closed day again; joins the transaction of its cause.
- * @returns false when it was open, or never closed
- */
-export async function openDay({ id }: { readonly id: string }): Promise<boolean> {
-  const opened = await changeOne(
-    Closure,
-    { reopenedAt: currentClock().now() },
-    { id, reopenedAt: null },
-  );
-  if (opened) await noteSettingsChange();
-  return opened;
 }
 
 const numberRow = z.object({ number: z.int() });
