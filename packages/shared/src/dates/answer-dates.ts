@@ -1,12 +1,13 @@
 import type { DateAnswer, DateReason, DayAnswer, PickupWindow } from '#shared/contracts/dates.ts';
 import { Book } from './book.ts';
 import { checkAddition, checkLaterWindow, gatherStanding } from './check-plan.ts';
-import type { Fault, Standing } from './check-plan.ts';
+import type { Standing } from './check-plan.ts';
 import { fitsSomewhere } from './cold.ts';
 import { formatDay, formatWeekday } from './format.ts';
 import { addDays, datesInRange } from './local-time.ts';
 import type { LocalDate } from './local-time.ts';
 import type { Demand, PlannedOrder, Supply, Window } from './model.ts';
+import type { Fault } from './plan-fault.ts';
 import { placeWork, readyDemand } from './place-work.ts';
 import type { ReadyDemand } from './place-work.ts';
 import { findShortage } from './relax-work.ts';

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { Book } from './book.ts';
 import { checkAddition, checkPlan, gatherStanding } from './check-plan.ts';
-import type { Fault } from './check-plan.ts';
+import type { Fault } from './plan-fault.ts';
 import type { PlannedOrder, Supply } from './model.ts';
 import { placeWork, readyDemand } from './place-work.ts';
 import { makeDemand, makeSupply } from './testing/small-studio.ts';

@@ -1,4 +1,4 @@
-import type { Fault } from '#shared/dates/check-plan.ts';
+import type { Fault } from '#shared/dates/plan-fault.ts';
 import { currentDatabase } from '#api/db/current-database.ts';
 
 /** A plan the checker refuses is a mistake of ours: it is never shown, and told in the log. */
