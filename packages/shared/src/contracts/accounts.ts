@@ -24,8 +24,10 @@ export const requestSignInLink = z.object({
 });
 export type RequestSignInLink = z.infer<typeof requestSignInLink>;
 
+const linkToken = z.string().check(z.minLength(1), z.maxLength(100));
+
 /** `POST /api/session/links/use`: spends the link; a button's press, since mail scanners open links. */
-export const spendLink = z.object({ token: z.string().check(z.minLength(1), z.maxLength(100)) });
+export const spendLink = z.object({ token: linkToken });
 export type SpendLink = z.infer<typeof spendLink>;
 
 /** What spending a link did: a sign-in says where to go on to, an action that it is done. */
@@ -71,7 +73,7 @@ export const acceptInvitation = z.object({
 export type AcceptInvitation = z.infer<typeof acceptInvitation>;
 
 /** `POST /api/session/links/look`: what a token is for, without spending it. */
-export const lookAtLink = spendLink;
+export const lookAtLink = z.object({ token: linkToken });
 export const linkLook = z.object({
   purpose: z.enum(['sign-in', 'invitation', 'password-reset', 'first-owner', 'confirm-action']),
   email: z.nullable(z.string()),

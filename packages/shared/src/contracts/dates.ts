@@ -19,7 +19,6 @@ export const datesRequest = z
       path: ['to'],
     }),
   );
-export type DatesRequest = z.infer<typeof datesRequest>;
 
 export const dateAnswers = ['open', 'last-place', 'ask-us', 'checking', 'closed'] as const;
 export const dateAnswer = z.enum(dateAnswers);

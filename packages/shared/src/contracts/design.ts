@@ -185,7 +185,6 @@ export const words = z.object({
   tier: z.int().check(z.minimum(0), z.maximum(5)),
   text: line(80),
 });
-export type Words = z.infer<typeof words>;
 
 export const look = z.object({
   palette: z.array(colourHex).check(z.maxLength(5, 'At most five colours.')),

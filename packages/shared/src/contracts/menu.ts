@@ -240,7 +240,6 @@ export const allergyRule = z.object({
   severity: z.string(),
   answer: z.enum(['take', 'talk', 'refuse']),
 });
-export type AllergyRule = z.infer<typeof allergyRule>;
 
 export const policyText = z.object({
   kind: z.enum(['privacy', 'terms', 'allergy', 'cancellation', 'photo']),

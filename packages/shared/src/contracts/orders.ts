@@ -198,4 +198,3 @@ export const openPrivateLink = z.object({
   code: z.string().check(z.maxLength(20)),
   key: z.string().check(z.maxLength(100)),
 });
-export type OpenPrivateLink = z.infer<typeof openPrivateLink>;

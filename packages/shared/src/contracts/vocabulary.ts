@@ -43,7 +43,6 @@ export const finishId = z.enum(finishIds);
 export type FinishId = z.infer<typeof finishId>;
 
 export const portionSizeId = z.enum(['coffee', 'dessert', 'party']);
-export type PortionSizeId = z.infer<typeof portionSizeId>;
 
 export const place = z.enum(['indoors', 'shade', 'sun']);
 export type Place = z.infer<typeof place>;
