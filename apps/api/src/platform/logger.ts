@@ -38,12 +38,13 @@ const errorFields = ['code', 'errno', 'syscall', 'command', 'responseCode', 'sta
 
 function describeError(error: Error): Record<string, unknown> {
   const { type, message, stack, ...rest } = stdSerializers.err(error);
-  const kept = errorFields.flatMap((field) => (field in rest ? [[field, rest[field]]] : []));
+  const fields = new Map<string, unknown>(Object.entries(rest));
+  const kept = errorFields.filter((field) => fields.has(field));
   return {
     type,
     message: withoutAddresses(message),
     stack: withoutAddresses(stack),
-    ...Object.fromEntries(kept),
+    ...Object.fromEntries(kept.map((field) => [field, fields.get(field)])),
   };
 }
 
@@ -53,9 +54,7 @@ export function createLogger(level: LogLevel, destination?: DestinationStream): 
     level,
     base: undefined,
     redact: { paths: redacted, censor: '[redacted]' },
-    serializers: {
-      err: describeError,
-    },
+    serializers: { err: describeError },
   };
   return destination === undefined ? pino(options) : pino(options, destination);
 }
