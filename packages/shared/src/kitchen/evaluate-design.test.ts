@@ -202,7 +202,7 @@ describe('a design in one line', () => {
       }),
     ],
     [
-      'Sheet, 13 x 18 in, 54 portions',
+      'Half sheet, 13 x 18 in, 54 portions',
       designWith({
         cake: {
           kind: 'sheet',

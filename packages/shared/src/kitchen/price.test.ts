@@ -141,7 +141,7 @@ describe('the lines', () => {
     // 457 x 330 mm cut 50 x 50 mm: 9 by 6; 54 x 3.20.
     expect(first).toMatchObject({
       kind: 'sheet',
-      label: 'Sheet, 13 x 18 in',
+      label: 'Half sheet, 13 x 18 in',
       quantity: 54,
       amountMinor: 17_280,
     });

@@ -188,7 +188,7 @@ function tierLine(
     reckoned.id === portionSize.id ? '' : `, by the ${reckoned.name.toLowerCase()} portion`;
   if (kind === 'sheet') {
     const name = menu.sheetSizes.find((it) => it.id === design.cake?.sheet?.sizeId)?.name ?? '';
-    const label = `Sheet, ${name}${by}`;
+    const label = `${name}${by}`;
     return lineOf('sheet', label, portions, portions * book.sheetPerPortionMinor, cake);
   }
   const lead = studio.lengthLead;

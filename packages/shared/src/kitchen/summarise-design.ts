@@ -19,7 +19,7 @@ export function summariseDesign(design: Design, menu: Menu): string {
 /** The cake without its portions: "Two tiers, 10 and 8 in". Throws `UnknownPart`. */
 export function summariseCake(cake: Cake, menu: Menu): string {
   if (cake.kind === 'sheet') {
-    return cake.sheet === null ? 'A sheet' : `Sheet, ${sheetSizeOf(cake.sheet, menu).name}`;
+    return cake.sheet === null ? 'A sheet' : sheetSizeOf(cake.sheet, menu).name;
   }
   const lead = menu.studio.lengthLead;
   const shapes = new Set(cake.tiers.map((it) => it.shape));

@@ -13,18 +13,14 @@ import { AddPhoto } from '#web/features/my-order/components/add-photo.tsx';
 import { AdviceList } from '#web/features/my-order/components/advice-list.tsx';
 import { ChosenList } from '#web/features/my-order/components/chosen-list.tsx';
 import { HoldNotice } from '#web/features/my-order/components/hold-notice.tsx';
-import { MadeWith } from '#web/features/my-order/components/made-with.tsx';
+import { pickupWords } from '#web/components/order/order-times.ts';
+import { MadeWith } from '#web/components/order/made-with.tsx';
 import { MessageThread } from '#web/features/my-order/components/message-thread.tsx';
 import { PhotoRow } from '#web/features/my-order/components/photo-row.tsx';
-import { PriceList } from '#web/features/my-order/components/price-list.tsx';
+import { PriceList } from '#web/components/order/price-list.tsx';
 import { StageRuler } from '#web/features/my-order/components/stage-ruler.tsx';
 import { WithdrawOrder } from '#web/features/my-order/components/withdraw-order.tsx';
-import {
-  orderHeadings,
-  pickupWords,
-  stageIndex,
-  stages,
-} from '#web/features/my-order/order-words.ts';
+import { orderHeadings, stageIndex, stages } from '#web/features/my-order/order-words.ts';
 
 type Props = { readonly order: OrderView; readonly menu: Menu };
 
@@ -72,7 +68,13 @@ export function OrderSheet({ order, menu }: Props) {
         )}
         <HoldNotice order={order} locale={locale} answerHours={studio.answerHours} />
         <Section title={order.agreedPrice === null ? 'The estimate' : 'The price'}>
-          <PriceList price={price} agreed={order.agreedPrice !== null} locale={locale} />
+          <PriceList
+            price={price}
+            totalLabel={
+              order.agreedPrice === null ? 'Estimate, before the baker has looked' : 'Agreed price'
+            }
+            locale={locale}
+          />
         </Section>
       </div>
 

@@ -56,9 +56,9 @@ export const menuFixture: Menu = {
     { shape: 'rectangle', widthMm: inches(12), depthMm: inches(8), heightsMm: [inches(4)] },
   ],
   sheetSizes: [
-    { id: 'quarter', name: '9 x 13 in', widthMm: 330, depthMm: 229, heightMm: 50 },
-    { id: 'half', name: '13 x 18 in', widthMm: 457, depthMm: 330, heightMm: 50 },
-    { id: 'full', name: '18 x 26 in', widthMm: 660, depthMm: 457, heightMm: 50 },
+    { id: 'quarter', name: 'Quarter sheet, 9 x 13 in', widthMm: 330, depthMm: 229, heightMm: 50 },
+    { id: 'half', name: 'Half sheet, 13 x 18 in', widthMm: 457, depthMm: 330, heightMm: 50 },
+    { id: 'full', name: 'Full sheet, 18 x 26 in', widthMm: 660, depthMm: 457, heightMm: 50 },
   ],
   sponges,
   fillings,

@@ -5,7 +5,7 @@ import { TaskGlyph } from '#web/components/order/task-glyph.tsx';
 import { classNames } from '#web/lib/class-names.ts';
 import { useRoving } from '#web/lib/use-roving.ts';
 import { labelWidth } from '../string/label-width.ts';
-import { type Bead, pickupHalf, stringBeads } from '../string/string-beads.ts';
+import { type Bead, endInset, pickupHalf, stringBeads } from '../string/string-beads.ts';
 import type { TimeScale } from '../string/time-scale.ts';
 
 type Props = {
@@ -22,11 +22,12 @@ const thread = 34;
  * bead to bead, and the one in focus says what it is.
  */
 export function BeadString({ lane, scale, locale }: Props) {
-  const string = stringBeads(lane, scale, labelWidth);
+  const { pickup } = lane;
+  const beyond = `pickup ${formatDay(pickup.date, { locale })}`;
+  const string = stringBeads(lane, scale, labelWidth, beyond);
   const itemAt = useRoving(string.beads.length, 0);
   const [looked, setLooked] = useState<string | null>(null);
   const shown = string.beads.find((it) => it.key === looked) ?? null;
-  const { pickup } = lane;
 
   return (
     <div className="relative min-h-[68px] pb-1">
@@ -104,8 +105,11 @@ export function BeadString({ lane, scale, locale }: Props) {
         </span>
       )}
       {string.goesOn && (
-        <span className="absolute right-3 text-[0.8125rem] text-slate" style={{ top: 42 }}>
-          pickup {formatDay(pickup.date, { locale })}
+        <span
+          className="absolute text-[0.8125rem] leading-none text-slate"
+          style={{ top: 52, right: endInset }}
+        >
+          {beyond}
         </span>
       )}
       <p

@@ -119,6 +119,26 @@ describe('a cake’s string', () => {
     });
   });
 
+  test('keeps labels clear of the name of a pickup beyond these days', () => {
+    const beyond = 'pickup Tuesday 22 June';
+    const string = stringBeads(
+      {
+        tasks: [
+          task('2027-06-19', 480, 'bake'),
+          task('2027-06-20', 540, 'buttercream'),
+          task('2027-06-20', 600, 'fill-and-crumb-coat'),
+        ],
+        pickup: pickup('2027-06-22', 600),
+      },
+      scale,
+      labelWidth,
+      beyond,
+    );
+    for (const { x, label } of string.beads.filter((it) => it.side === 'below')) {
+      expect(x + labelWidth(label) / 2).toBeLessThan(scale.width - labelWidth(beyond));
+    }
+  });
+
   test('work of one sort that lies close together is one bead', () => {
     const string = stringBeads(
       {

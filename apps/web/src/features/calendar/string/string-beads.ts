@@ -32,18 +32,22 @@ const boxRoom = pickupHalf + 11;
 /** How much of its day work may take up before the pickup, however early that is. */
 const lastDayShare = 0.72;
 const labelGap = 5;
+/** Between the name of a pickup beyond these days and the right edge, pixels. */
+export const endInset = 12;
 
 type Draft = Omit<Bead, 'label' | 'side'>;
 
 /**
  * Strings a cake's work along its days. Beads stay in the order of their work, within their own
  * day, and never cover one another; labels alternate above and below and never overlap. `measure`
- * gives a label's width in pixels.
+ * gives a label's width in pixels; `beyond` is what names a pickup after these days, below at the
+ * right edge.
  */
 export function stringBeads(
   lane: Pick<CalendarLane, 'tasks' | 'pickup'>,
   scale: TimeScale,
   measure: (label: string) => number,
+  beyond = '',
 ): BeadString {
   // The pickup's box is the handover's bead.
   const work = lane.tasks
@@ -65,10 +69,11 @@ export function stringBeads(
     at >= 0 && at <= scale.width
       ? keepInside(Math.max(at, (last?.x ?? -boxRoom) + boxRoom), pickupHalf, scale.width)
       : null;
-  const beads = placeLabels(drafts, scale.width, measure);
+  const goesOn = at > scale.width;
+  const below = goesOn && beyond !== '' ? scale.width - endInset - measure(beyond) : scale.width;
+  const beads = placeLabels(drafts, { above: scale.width, below }, measure);
   const first = work[0];
   const comesFromBefore = first !== undefined && xOf(scale, first.date, first.start) < 0;
-  const goesOn = at > scale.width;
   return {
     beads,
     from: comesFromBefore ? 0 : (beads[0]?.x ?? pickup ?? 0),
@@ -153,7 +158,7 @@ function labelOf(tasks: readonly PlannedTask[]): string {
 /** Alternates the labels' sides, moves on to the other side where one is taken, else leaves it out. */
 function placeLabels(
   drafts: readonly Draft[],
-  width: number,
+  ends: Readonly<Record<'above' | 'below', number>>,
   measure: (label: string) => number,
 ): Bead[] {
   const taken = { above: -Infinity, below: -Infinity };
@@ -162,7 +167,9 @@ function placeLabels(
     const label = labelOf(draft.tasks);
     const half = measure(label) / 2;
     const fits = (side: 'above' | 'below') =>
-      draft.x - half >= taken[side] + labelGap && draft.x - half >= 0 && draft.x + half <= width;
+      draft.x - half >= taken[side] + labelGap &&
+      draft.x - half >= 0 &&
+      draft.x + half <= ends[side];
     const other = next === 'above' ? 'below' : 'above';
     const side = fits(next) ? next : fits(other) ? other : null;
     if (side !== null) {

@@ -1,6 +1,6 @@
 import type { OrderView } from '#shared/contracts/orders.ts';
 import { Notice } from '#web/components/ui/notice.tsx';
-import { instantWords } from '../order-words.ts';
+import { instantWords } from '#web/components/order/order-times.ts';
 
 type Props = { readonly order: OrderView; readonly locale: string; readonly answerHours: number };
 
