@@ -216,6 +216,9 @@ const table: Readonly<Record<string, Line>> = {
   'confirm-order': line(bakers, onOrder('confirm')),
   'decline-order': line(bakers, onOrder('decline', { reason: 'We are full.', offerDates: false })),
   'move-order': line(bakers, onOrder('move', { date: day, windowStart: 600, note: '' })),
+  'answer-dates-to-move': line(bakers, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/dates?from=${day}&to=${day}`,
+  })),
   'start-order': line(bakers, onOrder('start')),
   'mark-order-ready': line(staff, onOrder('ready')),
   'collect-order': line(

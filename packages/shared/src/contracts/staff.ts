@@ -226,7 +226,10 @@ export const liftStop = z.object({
 });
 export type LiftStop = z.infer<typeof liftStop>;
 
-/** `GET /api/staff/calendar?from&to` */
+/**
+ * `GET /api/staff/calendar?from&to`, and `GET /api/staff/orders/:number/dates?from&to`: the days
+ * an order could move to, its own work set aside and without the limits that bind customers.
+ */
 export const calendarQuery = z.object({ from: localDate, to: localDate }).check(
   z.refine((it) => it.from <= it.to && Date.parse(it.to) - Date.parse(it.from) <= 62 * 86_400_000, {
     message: 'Ask for one to 62 days.',

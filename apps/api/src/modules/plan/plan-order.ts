@@ -4,13 +4,14 @@ import { checkAddition } from '#shared/dates/check-plan.ts';
 import type { DateReason } from '#shared/contracts/dates.ts';
 import type { Design } from '#shared/contracts/design.ts';
 import { fromUtcMinute } from '#shared/dates/local-time.ts';
-import type { Demand, PlannedOrder, Window } from '#shared/dates/model.ts';
+import type { PlannedOrder, Window } from '#shared/dates/model.ts';
 import type { WorkTimes } from '#shared/dates/work-times.ts';
 import { currentDatabase } from '#api/db/current-database.ts';
 import { readPlanVersions, takeNextPlanVersion } from '#api/db/plan-versions.ts';
 import { inTransaction, isInTransaction } from '#api/db/transaction.ts';
 import { freshMenu } from '#api/modules/menu/menu.queries.ts';
 import { AppError } from '#api/platform/app-error.ts';
+import { bookForStaff, demandForStaff, withoutOrder } from './as-staff.ts';
 import { demandOf } from './demand-of.ts';
 import { currentBook } from './kept-book.ts';
 import type { KeptBook } from './kept-book.ts';
@@ -30,7 +31,7 @@ export type Wish = {
   readonly orderId: string;
   readonly design: Design;
   readonly pickup: PickupChoice;
-  /** Notice, how far the book is open and places kept back bind customers, not the staff. */
+  /** Customers' limits do not bind the staff. */
   readonly asStaff: boolean;
   /** Times the order was planned with before, where they are not the studio's present ones. */
   readonly workTimes?: WorkTimes;
@@ -119,17 +120,18 @@ async function planAt(book: KeptBook, wish: Wish): Promise<Answered> {
   const { open, settings } = book;
   const times = { ...settings, workTimes: wish.workTimes ?? settings.workTimes };
   const { demand: full } = demandOf(wish.design, await freshMenu(), times);
-  const demand: Demand = wish.asStaff ? { ...full, noticeDays: 0 } : full;
+  const demand = wish.asStaff ? demandForStaff(full) : full;
   const choice = { date: wish.pickup.date, startMinute: wish.pickup.windowStart };
-  const standing = open.standing.orders.filter((it) => it.orderId !== wish.orderId);
   const had = open.standing.orders.find((it) => it.orderId === wish.orderId);
-  const supply = wish.asStaff
-    ? { ...open.supply, keptBack: 0, bookOpenUntil: '9999-12-31' }
-    : open.supply;
-  const own = had === undefined && !wish.asStaff ? open : openBook(supply, standing);
+  const own = wish.asStaff
+    ? bookForStaff(open, wish.orderId)
+    : had === undefined
+      ? open
+      : openBook(open.supply, withoutOrder(open, wish.orderId));
   if (wish.begun) {
     const window =
-      supply.windows.get(choice.date)?.find((it) => it.startMinute === choice.startMinute) ?? null;
+      own.supply.windows.get(choice.date)?.find((it) => it.startMinute === choice.startMinute) ??
+      null;
     if (window === null) return { answer: 'closed', reason: null, window, order: null, faults: [] };
     const moved = had === undefined ? null : { ...had, pickup: window, coldUntil: window.date };
     // Its own times were right when it was planned; only what the new pickup changes can be wrong.

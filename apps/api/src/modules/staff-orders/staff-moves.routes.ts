@@ -1,6 +1,8 @@
 import * as z from 'zod/mini';
+import { datesResponse } from '#shared/contracts/dates.ts';
 import {
   answerAllergy,
+  calendarQuery,
   collectOrder,
   confirmOrder,
   declineOrder,
@@ -15,7 +17,9 @@ import type { Order } from '#api/db/models/order.ts';
 import { createRoutes } from '#api/http/route.ts';
 import type { FeatureRoutes } from '#api/http/route.ts';
 import type { Deps } from '#api/modules/deps.ts';
+import { designOf } from '#api/modules/orders/order-design.queries.ts';
 import { findOrderByNumber, loadCurrentRevision } from '#api/modules/orders/orders.queries.ts';
+import { answerDatesToMove } from '#api/modules/plan/order-dates.queries.ts';
 import type { Actor, Staff } from '#api/platform/actor.ts';
 import type { ErrorCode } from '#shared/errors.ts';
 import { answerAllergy as answerAllergyCommand } from './answer-allergy.command.ts';
@@ -75,6 +79,26 @@ export function staffMovesRoutes(deps: Deps): FeatureRoutes {
       const moved = await load(actor, 'decline', params.number);
       await declineOrderCommand(deps, { ...moved, ...body });
       return show(moved);
+    },
+  );
+
+  routes.add(
+    {
+      name: 'answer-dates-to-move',
+      method: 'get',
+      path: '/api/staff/orders/:number/dates',
+      summary: 'The days it could move to, its own work set aside.',
+      params,
+      query: calendarQuery,
+      response: datesResponse,
+      refusals: ['not-found'],
+    },
+    async ({ actor, params, query }) => {
+      const { order, revision } = await load(actor, 'move', params.number);
+      const { id: orderId } = order;
+      const design = designOf(revision);
+      const { workTimeVersionId } = revision;
+      return answerDatesToMove({ orderId, design, workTimeVersionId }, query.from, query.to);
     },
   );
 

@@ -1,13 +1,17 @@
 import ICAL from 'ical.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { problem } from '#shared/contracts/common.ts';
+import { datesResponse } from '#shared/contracts/dates.ts';
 import { orderView, submittedOrder } from '#shared/contracts/orders.ts';
 import { confirmationLook, orderList, staffOrder } from '#shared/contracts/staff.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
+import { DayCap } from '#api/db/models/day-cap.ts';
 import { Hold } from '#api/db/models/hold.ts';
 import { Order } from '#api/db/models/order.ts';
 import { OutboxRow } from '#api/db/models/outbox-row.ts';
 import { Quote } from '#api/db/models/quote.ts';
+import { noteSettingsChange } from '#api/db/plan-versions.ts';
+import { inTransaction } from '#api/db/transaction.ts';
 import { expireHolds } from '#api/modules/plan/expire-holds.command.ts';
 import { hasPlace } from '#api/modules/plan/plan.queries.ts';
 import { newId } from '#api/platform/ids.ts';
@@ -277,6 +281,34 @@ describe('declining, withdrawing, moving', () => {
     const view = orderView.parse((await guest.get(`/api/orders/${code}`)).body);
     expect(view.pickup).toMatchObject({ date: next, startAt: `${next}T15:00:00.000Z` });
     expect(await kindsOf(code)).toEqual(['order-asked', 'order-confirmed', 'order-moved']);
+  });
+});
+
+describe('the days an order could move to', () => {
+  const datesFor = async (number: number, date: string) => {
+    const path = `/api/staff/orders/${number}/dates?from=${date}&to=${date}`;
+    return datesResponse.parse((await baker.get(path)).body).days[0];
+  };
+
+  it('leaves out its own work: a day that it fills alone is open to it', async () => {
+    const { number, date } = await confirmed();
+    await inTransaction(async () => {
+      await DayCap.create({ localDate: date, occasionId: 'birthday', maxOrders: 1 });
+      await noteSettingsChange();
+    });
+    const design = (await look(number)).design;
+    const asked = await app.visitor().post('/api/dates', { design, from: date, to: date });
+    expect(datesResponse.parse(asked.body).days[0]?.answer).toBe('closed');
+    expect((await datesFor(number, date))?.answer).not.toBe('closed');
+  });
+
+  it('does not hold the staff to the notice that customers give', async () => {
+    const { number } = await confirmed();
+    const soon = '2027-05-05';
+    const design = (await look(number)).design;
+    const asked = await app.visitor().post('/api/dates', { design, from: soon, to: soon });
+    expect(datesResponse.parse(asked.body).days[0]?.reason?.code).toBe('too-soon');
+    expect((await datesFor(number, soon))?.reason?.code).not.toBe('too-soon');
   });
 });
 

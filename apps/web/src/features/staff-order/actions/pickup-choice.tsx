@@ -12,7 +12,7 @@ import { Jug } from '#web/components/ui/jug.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
 import { classNames } from '#web/lib/class-names.ts';
-import { useOrderDates } from '../api/get-order-dates.ts';
+import { useDatesToMove } from '../api/get-dates-to-move.ts';
 
 export type Chosen = { readonly date: string; readonly start: number };
 
@@ -39,7 +39,7 @@ export function PickupChoice({ order, studio, chosen, error, onChosen }: Props) 
   const now = today(new Date(), studio.zone);
   const near = addDays(order.pickup.date, -4);
   const [from, setFrom] = useState(near < now ? now : near);
-  const dates = useOrderDates(order.number, order.design, from, addDays(from, shownDays - 1));
+  const dates = useDatesToMove(order.number, from, addDays(from, shownDays - 1));
   const days = dates.data?.days ?? [];
   const day = days.find((it) => it.date === chosen.date);
   const standing = chosen.date === order.pickup.date;

@@ -4,7 +4,7 @@ import type { Design } from '#shared/contracts/design.ts';
 import { request } from '#web/lib/http.ts';
 import { staffKeys } from '#web/lib/staff-keys.ts';
 
-/** Which days of a range this order's cake could be made for. */
+/** Which days of a range are open to a customer for this order's cake. */
 export function orderDatesQuery(number: number, design: Design, from: string, to: string) {
   return queryOptions({
     queryKey: [...staffKeys.order(number), 'dates', from, to, design],
