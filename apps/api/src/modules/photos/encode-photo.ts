@@ -14,6 +14,9 @@ const widest = 2048;
 const tallest = 8192;
 const paletteSize = 5;
 
+/** How every size is written. */
+export const encodings = { webp: { quality: 78, effort: 2 }, jpeg: { quality: 80 } } as const;
+
 sharp.cache(false);
 
 export type EncodedFile = {
@@ -102,8 +105,8 @@ async function toPixels(image: Sharp): Promise<Pixels> {
 async function encode(pixels: Pixels, size: number): Promise<EncodedFile[]> {
   const sized = fromPixels(pixels).resize({ width: size });
   const [webp, jpeg] = await Promise.all([
-    sized.clone().webp({ quality: 78, effort: 2 }).toBuffer({ resolveWithObject: true }),
-    sized.clone().jpeg({ quality: 80 }).toBuffer({ resolveWithObject: true }),
+    sized.clone().webp(encodings.webp).toBuffer({ resolveWithObject: true }),
+    sized.clone().jpeg(encodings.jpeg).toBuffer({ resolveWithObject: true }),
   ]);
   const { width, height } = webp.info;
   return [

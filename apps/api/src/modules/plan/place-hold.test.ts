@@ -12,14 +12,13 @@ import { Hold } from '#api/db/models/hold.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
 import { Order } from '#api/db/models/order.ts';
 import { OutboxRow } from '#api/db/models/outbox-row.ts';
-import { PickupWindow } from '#api/db/models/pickup-window.ts';
 import { PlanState } from '#api/db/models/plan-state.ts';
 import { Task } from '#api/db/models/task.ts';
-import { WeeklyPickupWindow } from '#api/db/models/weekly-pickup-window.ts';
 import { noteSettingsChange, readPlanVersions } from '#api/db/plan-versions.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import { designOf, loadRevision } from '#api/modules/orders/order-design.queries.ts';
 import { newId } from '#api/platform/ids.ts';
+import { leaveOneHandover } from '#api/testing/one-handover.ts';
 import { orderForm, roundTier } from '#api/testing/order-form.ts';
 import { seededStudio } from '#api/testing/studio.ts';
 import { startTestApp } from '#api/testing/test-app.ts';
@@ -74,19 +73,6 @@ async function send(sent: SubmitOrder): Promise<Order> {
   expect([answer.status, answer.text]).toEqual([201, answer.text]);
   const { code } = submittedOrder.parse(answer.body);
   return Order.findOne({ where: { code }, rejectOnEmpty: true });
-}
-
-/** Leaves a day one handover, at ten. */
-async function leaveOneHandover(day: string): Promise<void> {
-  const weekly = await WeeklyPickupWindow.findAll({ where: { weekday: weekdayOf(day) } });
-  await PickupWindow.bulkCreate(
-    weekly.map(({ startMinute, minutes }) => ({
-      localDate: day,
-      startMinute,
-      minutes,
-      handovers: startMinute === 600 ? 1 : 0,
-    })),
-  );
 }
 
 async function wishFor(order: Order, day: string, windowStart = 600) {
