@@ -89,7 +89,8 @@ function tierName({ index }: ResolvedTier, { design, tiers }: ResolvedDesign): s
   if (design.cake?.kind === 'sheet') return 'the sheet';
   if (tiers.length === 1) return 'the cake';
   if (index === 0) return 'the bottom tier';
-  return index === tiers.length - 1 ? 'the top tier' : `tier ${index + 1}`;
+  if (index === tiers.length - 1) return 'the top tier';
+  return tiers.length === 3 ? 'the middle tier' : `tier ${index + 1}`;
 }
 
 /** What a tier takes of the fridge, on its board. */

@@ -12,7 +12,7 @@ import {
   type ListedDeclaration,
 } from './clashes.ts';
 import { note } from './note.ts';
-import { capitalise } from './sentences.ts';
+import { capitalise, orList } from './sentences.ts';
 import type { Situation } from './situation.ts';
 import { waysWithout } from './ways-out.ts';
 
@@ -227,7 +227,7 @@ function wayWords({ ways, situation, declared }: Shared): string {
   if (ways.length === 0 && clashingParts(situation, declared)) {
     return 'Nothing on our menu makes this cake without it; write to us and we will say what we can do.';
   }
-  return ways.length === 0 ? '' : 'These are made without it.';
+  return ways.length === 0 ? '' : `Instead: ${orList(ways.map((it) => it.label))}.`;
 }
 
 const clashingParts = ({ parts }: Situation, declared: ListedDeclaration): boolean =>

@@ -69,7 +69,10 @@ describe('heat', () => {
 
   it('takes the studio’s figure for the month, and its warmest while there is no day', () => {
     const unknown = { ...indoors, warmestC: null };
-    expect(warmthOf(unknown, menuFixture.studio, '2027-01-16').celsius).toBe(4);
+    const outside = { ...unknown, place: 'shade' as const };
+    expect(warmthOf(outside, menuFixture.studio, '2027-01-16').celsius).toBe(4);
+    // Common practice, no source: rooms are kept at 22 °C or so, however cold the day.
+    expect(warmthOf(unknown, menuFixture.studio, '2027-01-16').celsius).toBe(22);
     expect(warmthOf(unknown, menuFixture.studio, '2027-06-19').celsius).toBe(28);
     expect(warmthOf(unknown, menuFixture.studio, null).celsius).toBe(31);
     const found = about(

@@ -6,6 +6,7 @@ import {
   fareInHeat,
   fareOfCoat,
   heatMarginC,
+  usualRoomC,
   whereWords,
   type Warmth,
 } from './heat.ts';
@@ -55,7 +56,9 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
   const lead = situation.resolved.menu.studio.temperatureLead;
   const limit = formatTemperature(limitC, lead);
   const shared = { level, step: 'setting' } as const;
-  const ways = level === 'ok' ? [] : heatWays(coat, limitC, situation, warmth);
+  // What would do by the figure we reckon with needs no other coat, only to be asked again.
+  const ways =
+    fareInHeat(limitC, warmth.celsius) === 'ok' ? [] : heatWays(coat, limitC, situation, warmth);
   if (!warmth.known) {
     return [
       note({
@@ -141,13 +144,11 @@ function heatWays(
   return [...better, ...indoorsWays(limitC, situation)];
 }
 
-/** A room no warmer than the coat likes; people keep rooms at 22 °C / 72 °F or so. */
-const coolRoomC = 22;
-
+/** A room no warmer than the coat likes. */
 function indoorsWays(limitC: number, { resolved, warmth }: Situation): Way[] {
   const { setting } = resolved.design;
   if (setting === null || warmth === null) return [];
-  const room = Math.min(coolRoomC, Math.floor(limitC - heatMarginC));
+  const room = Math.min(usualRoomC, Math.floor(limitC - heatMarginC));
   if (setting.place === 'indoors' && warmth.celsius <= room) return [];
   const label = `Inside until cutting, at ${formatTemperature(room, resolved.menu.studio.temperatureLead)} or cooler`;
   return [{ label, patch: { setting: { ...setting, place: 'indoors', warmestC: room } } }];

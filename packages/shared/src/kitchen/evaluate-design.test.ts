@@ -173,6 +173,17 @@ describe('the estimate of a whole cake', () => {
     expect(eggless.map((it) => it.style).sort()).toEqual(['american', 'russian']);
   });
 
+  it('ranks what only the warmth speaks against before what a guest cannot eat', () => {
+    const design = designWith({
+      guests: { allergies: [declares({ allergen: 'egg' })] },
+      setting: { warmestC: 40, place: 'shade' },
+    });
+    const { ranks } = evaluateDesign({ design, date: null }, menuFixture, today);
+    const buttercreams = ranks.filter((it) => it.covering === 'buttercream');
+    expect(new Set(buttercreams.map((it) => it.level))).toEqual(new Set(['stop']));
+    expect(buttercreams.slice(0, 2).map((it) => it.style)).toEqual(['american', 'russian']);
+  });
+
   it('takes a dummy for no sponge, and so for none of its allergens', () => {
     const dummy = { real: false, spongeId: null, fillingId: null };
     const design = designWith({

@@ -16,16 +16,21 @@ export type Warmth = {
 /** Without a figure of the studio's own for a month. */
 const unmeasuredC = 27;
 
+/** People keep rooms at 22 °C / 72 °F or so, however cold the day: common practice, no source. */
+export const usualRoomC = 22;
+
 /**
  * The warmest a setting will get. "Don't know" takes the studio's figure for the month of the
- * day; while no day is chosen, that of its warmest month.
+ * day, indoors no less than a heated room; while no day is chosen, that of its warmest month.
  */
 export function warmthOf(setting: Setting, studio: StudioCard, date: string | null): Warmth {
   if (setting.warmestC !== null) return { celsius: setting.warmestC, known: true, month: null };
   const figures = studio.monthlyWarmestC;
   if (date !== null) {
     const month = Number(date.slice(5, 7));
-    return { celsius: figures[month - 1] ?? unmeasuredC, known: false, month };
+    const outdoors = figures[month - 1] ?? unmeasuredC;
+    const celsius = setting.place === 'indoors' ? Math.max(outdoors, usualRoomC) : outdoors;
+    return { celsius, known: false, month };
   }
   const celsius = figures.length === 0 ? unmeasuredC : Math.max(...figures);
   return { celsius, known: false, month: null };

@@ -35,29 +35,24 @@ function coatsOf(menu: Menu): readonly MenuCoat[] {
 }
 
 /**
- * All coats, best first for the setting and the guests: by level, then by how much warmth they
- * have to spare, then by how smooth they come out.
+ * All coats, best first for the setting and the guests: by level, then those without what a guest
+ * cannot eat (a cooler place changes the warmth, nothing changes what is in it), then by how much
+ * warmth they have to spare, then by how smooth they come out.
  */
 export function rankCoats(table: Table): RankedCoat[] {
   const ranked = coatsOf(table.resolved.menu).map((coat) => {
     const { covering, style } = coat;
-    const { level, sentence } = judge(coat, table);
-    return {
-      covering,
-      style,
-      rank: { covering: covering.id, style: style?.id ?? null, level, sentence },
-    };
+    const heat = judgeHeat(coat, table);
+    const guests = judgeGuests(coat, table);
+    const level = sharper(heat.level, guests?.level ?? 'ok');
+    const sentence = guests === null ? heat.sentence : `${guests.sentence} ${heat.sentence}`;
+    const rank = { covering: covering.id, style: style?.id ?? null, level, sentence };
+    return { covering, style, rank, forGuests: guests?.level ?? 'ok' };
   });
-  // Within a level the menu's own order stays.
-  return ranked.sort((a, b) => byLevel(a.rank.level, b.rank.level));
-}
-
-function judge(coat: MenuCoat, table: Table): { level: AdviceLevel; sentence: string } {
-  const heat = judgeHeat(coat, table);
-  const guests = judgeGuests(coat, table);
-  return guests === null
-    ? heat
-    : { level: sharper(heat.level, guests.level), sentence: `${guests.sentence} ${heat.sentence}` };
+  // Where both are the same the menu's own order stays.
+  return ranked
+    .sort((a, b) => byLevel(a.rank.level, b.rank.level) || byLevel(a.forGuests, b.forGuests))
+    .map(({ covering, style, rank }) => ({ covering, style, rank }));
 }
 
 function judgeHeat(
