@@ -51,6 +51,7 @@ describe('units', () => {
 describe('what people read', () => {
   it.each([
     [254, 'in', '10 in / 25 cm'],
+    [305, 'in', '12 in / 30 cm'],
     [203, 'in', '8 in / 20 cm'],
     [127, 'cm', '13 cm / 5 in'],
     [75, 'cm', '7.5 cm / 3 in'],

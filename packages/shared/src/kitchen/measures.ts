@@ -27,7 +27,8 @@ export function inchFigure(mm: number): string {
 /** Centimetres: whole ones from 10 up, halves below. */
 export function cmFigure(mm: number): string {
   const cm = mm / 10;
-  return String(cm >= 10 ? Math.round(cm) : Math.round(cm * 2) / 2);
+  // Halves go down: 12 in are kept as 305 mm and are 30.48 cm.
+  return String(cm >= 10 ? Math.ceil(cm - 0.5) : Math.round(cm * 2) / 2);
 }
 
 /** A bare figure in the studio's leading unit, for lists like "10, 8 and 5 in". */
