@@ -1,3 +1,5 @@
+import { IncomingMessage, ServerResponse } from 'node:http';
+import { Socket } from 'node:net';
 import type { RequestHandler } from 'express';
 import helmet from 'helmet';
 
@@ -7,7 +9,7 @@ import helmet from 'helmet';
  * through because the preview of a sent e-mail carries its look in them.
  */
 export function securityHeaders(options: { secure: boolean }): RequestHandler {
-  return helmet({
+  const ask = helmet({
     contentSecurityPolicy: {
       useDefaults: false,
       directives: {
@@ -30,4 +32,14 @@ export function securityHeaders(options: { secure: boolean }): RequestHandler {
     referrerPolicy: { policy: 'same-origin' },
     crossOriginEmbedderPolicy: false,
   });
+  // They are the same for every answer, so helmet is asked once.
+  const model = new ServerResponse(new IncomingMessage(new Socket()));
+  ask(model.req, model, () => undefined);
+  const headers = Object.entries(model.getHeaders());
+  return (_request, response, next) => {
+    for (const [name, value] of headers) {
+      if (value !== undefined) response.setHeader(name, value);
+    }
+    next();
+  };
 }
