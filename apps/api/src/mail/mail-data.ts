@@ -1,5 +1,6 @@
 import type { LocalDate } from '#shared/dates/local-time.ts';
 import type { StaffRole } from '#shared/contracts/vocabulary.ts';
+import type { ChosenRow } from '#shared/kitchen/chosen-words.ts';
 import type { DrawnTier } from './content.ts';
 
 export type MailPickup = {
@@ -23,6 +24,8 @@ export type MailOrder = {
   readonly headCount: number;
   /** The cake in a line: "Three tiers, 10, 8 and 5 in, 71 portions". */
   readonly summary: string;
+  /** What was chosen, for reading over: inside, coat, words, what is put on. */
+  readonly chosen: readonly ChosenRow[];
   readonly tiers: readonly DrawnTier[];
   readonly price: MailPrice;
   /** In the words of the studio's region, worked out from the ingredients. */
@@ -30,6 +33,8 @@ export type MailOrder = {
   readonly mayContain: readonly string[];
   readonly handled: readonly string[];
   readonly keepCool: string;
+  /** What comes out of the cake or off it before it is eaten, in sentences. */
+  readonly beforeEating: readonly string[];
   readonly weightG: number;
   readonly heightMm: number;
 };

@@ -35,6 +35,7 @@ const orderOf = (typed: string): MailOrder => ({
   occasion: typed,
   headCount: 70,
   summary: 'Three tiers, 10, 8 and 5 in, 71 portions',
+  chosen: [{ label: 'Words on it', value: typed }],
   tiers: [{ widthMm: 254, heightMm: 102, colour: '#f3ead2' }],
   price: {
     currency: 'USD',
@@ -45,6 +46,7 @@ const orderOf = (typed: string): MailOrder => ({
   mayContain: ['soy'],
   handled: ['sesame'],
   keepCool: 'Keep it in the fridge, at 41 °F / 5 °C or colder.',
+  beforeEating: [typed],
   weightG: 5400,
   heightMm: 330,
 });

@@ -31,7 +31,7 @@ export function drawingOf(order: MailOrder): Block[] {
   return [{ kind: 'drawing', tiers: order.tiers, label: order.summary }];
 }
 
-/** What, for whom and when. */
+/** What, for whom and when, with every choice to read over. */
 export function orderFacts(order: MailOrder, house: House): Block {
   const { pickup, collector } = order;
   return facts(
@@ -40,6 +40,7 @@ export function orderFacts(order: MailOrder, house: House): Block {
     collector === null ? null : fact('Collected by', nameInText(collector)),
     fact('For', `${oneLine(order.occasion)}, ${order.headCount} ${people(order.headCount)}`),
     fact('Cake', order.summary),
+    ...order.chosen.map(({ label, value }) => fact(label, oneLine(value))),
   );
 }
 
@@ -74,14 +75,24 @@ export function contentsOf(order: MailOrder): Block[] {
   ];
 }
 
-/** How heavy, how high, how cold. */
+/** Some sentences, one below the other. */
+export function sentences(words: readonly string[]): Block {
+  return { kind: 'list', items: words.map((each) => ({ text: oneLine(each) })) };
+}
+
+/** How heavy, how high, how cold; and what must not be eaten. */
 export function keepingOf(order: MailOrder, { studio }: House): Block[] {
   const size =
     order.weightG === 0
       ? ''
       : `It weighs about ${formatWeight(order.weightG, studio.lengthLead)} and is about ${formatLength(order.heightMm, studio.lengthLead)} high, board included.`;
   const words = [order.keepCool, size].filter((each) => each !== '').join(' ');
-  return words === '' ? [] : [heading('Keeping it'), text(words)];
+  return [
+    ...(words === '' ? [] : [heading('Keeping it'), text(words)]),
+    ...(order.beforeEating.length === 0
+      ? []
+      : [heading('Before you cut and eat it'), sentences(order.beforeEating)]),
+  ];
 }
 
 export function openOrder(order: MailOrder, label = 'Open your order'): Block {

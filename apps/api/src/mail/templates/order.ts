@@ -14,6 +14,7 @@ import {
   orderBody,
   orderFacts,
   pricesOf,
+  sentences,
 } from './order-parts.ts';
 
 type OrderTemplates = Pick<
@@ -199,10 +200,6 @@ function placeKept(data: MailData['order-received'], house: House): Block[] {
 
 function fromUs(words: string, { studio }: House): Block[] {
   return words.trim() === '' ? [] : [{ kind: 'quote', by: studio.name, text: words }];
-}
-
-function sentences(words: readonly string[]): Block {
-  return { kind: 'list', items: words.map((each) => ({ text: oneLine(each) })) };
 }
 
 /** The first words of a message. */

@@ -2,6 +2,7 @@ import type { Advice, Estimate } from '#shared/contracts/estimates.ts';
 import type { AllergenEntry, Menu } from '#shared/contracts/menu.ts';
 import type { Design } from '#shared/contracts/design.ts';
 import { allergenLabel } from '#shared/kitchen/allergen-names.ts';
+import { chosenRows } from '#shared/kitchen/chosen-words.ts';
 import { coatColour } from '#shared/kitchen/coat-colour.ts';
 import { sheetSizeOf } from '#shared/kitchen/sizes.ts';
 import { Occasion } from '#api/db/models/occasion.ts';
@@ -48,10 +49,12 @@ export async function loadToldOrder(deps: Pick<Deps, 'env'>, orderId: string): P
     occasion: occasion.name,
     headCount: revision.headCount,
     summary: summariseRevision(revision, menu),
+    chosen: chosenRows(designOf(revision), menu),
     tiers: tiersOf(designOf(revision), menu),
     price: agreedPrice ?? estimate.price,
     ...contentsOf(estimate, house),
     keepCool: estimate.keepCool,
+    beforeEating: takenOut(estimate),
     weightG: estimate.weightG,
     heightMm: estimate.heightMm,
   };
@@ -129,6 +132,19 @@ const aboutTheCake: ReadonlySet<Advice['code']> = new Set([
 export function adviceToTell({ advice }: Estimate, level: Advice['level']): string[] {
   return advice
     .filter((it) => it.level === level && aboutTheCake.has(it.code))
+    .map(({ sentence, instead }) => `${sentence} ${instead}`.trim());
+}
+
+const takenOutOrOff: ReadonlySet<Advice['code']> = new Set([
+  'supports',
+  'inedible',
+  'small-parts',
+  'flowers',
+]);
+
+function takenOut({ advice }: Estimate): string[] {
+  return advice
+    .filter((it) => takenOutOrOff.has(it.code))
     .map(({ sentence, instead }) => `${sentence} ${instead}`.trim());
 }
 

@@ -1,5 +1,6 @@
-import type { Cake, Coating, Look, Tier } from '#shared/contracts/design.ts';
+import type { Cake, Look, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { coatWords, decorationWords, insideWords } from '#shared/kitchen/chosen-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { capitalise, countOf } from '#shared/kitchen/sentences.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
@@ -20,7 +21,7 @@ export function CakeChoices({ cake, look, menu, perTier }: Props) {
         name={summariseCake(cake, menu)}
         size={portionWords(perTier[0] ?? 0)}
         lines={[
-          insideWords(cake.sheet?.spongeId ?? null, cake.sheet?.fillingId ?? null, menu),
+          cake.sheet === null ? '' : insideWords(cake.sheet, menu),
           countOf(cake.sheet?.layers ?? 1, 'layer'),
           coatWords(cake.coating, menu),
           ...lookWords(0, look, menu),
@@ -47,7 +48,7 @@ export function CakeChoices({ cake, look, menu, perTier }: Props) {
               }
               lines={[
                 tier.real
-                  ? `${insideWords(tier.spongeId, tier.fillingId, menu)}, ${countOf(tier.layers, 'layer').toLowerCase()}`
+                  ? `${insideWords(tier, menu)}, ${countOf(tier.layers, 'layer').toLowerCase()}`
                   : '',
                 coatWords(tier.coating ?? cake.coating, menu),
                 ...lookWords(at, look, menu),
@@ -95,26 +96,6 @@ function portionWords(portions: number): string {
   return portions === 1 ? '1 portion' : `${portions} portions`;
 }
 
-function insideWords(spongeId: string | null, fillingId: string | null, menu: Menu): string {
-  const sponge = menu.sponges.find((it) => it.id === spongeId)?.name ?? spongeId ?? '';
-  const filling = menu.fillings.find((it) => it.id === fillingId)?.name ?? fillingId;
-  return filling === null ? sponge : `${sponge}, filled with ${filling.toLowerCase()}`;
-}
-
-function coatWords(coat: Coating | null, menu: Menu): string {
-  if (coat === null) return '';
-  const style = menu.styles.find((it) => it.id === coat.style)?.name ?? null;
-  const covering = menu.coverings.find((it) => it.id === coat.covering)?.name ?? coat.covering;
-  const what =
-    style === null
-      ? covering
-      : coat.covering === 'buttercream'
-        ? `${style} buttercream`
-        : `${covering} over ${style} buttercream`;
-  const tint = coat.colour === null ? '' : `, tinted ${coat.colour}`;
-  return `${capitalise(what)}, ${coat.finish}${tint}`;
-}
-
 /** Words and decorations on one tier. */
 function lookWords(tier: number, look: Look | null, menu: Menu): string[] {
   if (look === null) return [];
@@ -125,22 +106,4 @@ function lookWords(tier: number, look: Look | null, menu: Menu): string[] {
     .filter((it) => it.tier === tier)
     .map((it) => decorationWords(it, menu));
   return [...words, ...placed];
-}
-
-/** "Sugar flowers, 3, in #c04a62, from the florist". */
-export function decorationWords(placed: Look['decorations'][number], menu: Menu): string {
-  const name =
-    menu.decorations.find((it) => it.id === placed.decorationId)?.name ?? placed.decorationId;
-  return [
-    name,
-    placed.quantity > 1 ? String(placed.quantity) : '',
-    placed.colour === null ? '' : `in ${placed.colour}`,
-    placed.source === 'studio'
-      ? ''
-      : placed.source === 'customer'
-        ? 'brought by the customer'
-        : 'from a florist',
-  ]
-    .filter((it) => it !== '')
-    .join(', ');
 }

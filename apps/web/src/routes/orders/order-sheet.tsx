@@ -1,3 +1,4 @@
+import { Link } from 'react-router-dom';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { OrderView } from '#shared/contracts/orders.ts';
 import { formatDay } from '#shared/dates/format.ts';
@@ -29,7 +30,8 @@ export function OrderSheet({ order, menu }: Props) {
   const { studio } = menu;
   const { locale } = studio;
   const reached = stageIndex(order.stage);
-  const warned = order.offer.advice.filter((it) => it.level !== 'ok');
+  // What holds a cake up is no warning, but has to come out before it is eaten.
+  const warned = order.offer.advice.filter((it) => it.level !== 'ok' || it.code === 'supports');
   const price = order.agreedPrice ?? order.offer.price;
   return (
     <div className="page grid gap-x-12 gap-y-8 py-8 lg:grid-cols-[minmax(0,5fr)_minmax(0,6fr)]">
@@ -83,7 +85,9 @@ export function OrderSheet({ order, menu }: Props) {
           <>
             <Section title="When you have it">
               {order.offer.keepCool !== '' && <p className="measure">{order.offer.keepCool}</p>}
-              {warned.length > 0 && <AdviceList advice={warned} />}
+              {warned.length > 0 && (
+                <AdviceList advice={warned} agreed={order.agreedPrice !== null} />
+              )}
             </Section>
             <Section title="Made with">
               <MadeWith
@@ -106,13 +110,24 @@ export function OrderSheet({ order, menu }: Props) {
         <Section title="Messages">
           <MessageThread order={order} studio={studio.name} locale={locale} />
         </Section>
-        {order.can.withdraw && (
+        {order.can.withdraw ? (
           <Section title="Changed your mind?">
             <p className="measure">You can withdraw the order until it is confirmed.</p>
             <div>
               <WithdrawOrder order={order} />
             </div>
           </Section>
+        ) : (
+          order.status === 'confirmed' && (
+            <Section title="Something to change?">
+              <p className="measure">
+                Write to us above or ring {studio.phone} as early as you can.{' '}
+                <Link to={paths.policy('cancellation')} className="link">
+                  What a change or cancelling costs
+                </Link>
+              </p>
+            </Section>
+          )
         )}
       </div>
     </div>

@@ -2,6 +2,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { OrderView } from '#shared/contracts/orders.ts';
 import { formatDuration } from '#shared/dates/format.ts';
 import { allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
+import { chosenRows } from '#shared/kitchen/chosen-words.ts';
 import { formatTemperature } from '#shared/kitchen/measures.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { DataList, type DataRow } from '#web/components/ui/data-list.tsx';
@@ -12,9 +13,9 @@ const places = {
   sun: 'Outside, in the sun',
 } as const;
 
-/** What was asked for besides the cake's own drawing. */
+/** What was asked for, to be read over beside the drawing. */
 export function ChosenList({ order, menu }: { readonly order: OrderView; readonly menu: Menu }) {
-  const { guests, setting, look, extras } = order.design;
+  const { guests, setting, look } = order.design;
   const region = menu.studio.labelRegion;
   const rows: (DataRow | null)[] = [
     {
@@ -53,39 +54,7 @@ export function ChosenList({ order, menu }: { readonly order: OrderView; readonl
             `${formatDuration(setting.driveMinutes)} on the road`,
           ].join(', '),
         },
-    look === null || look.words.every((it) => it.text.trim() === '')
-      ? null
-      : {
-          key: 'words',
-          label: 'Words',
-          value: look.words.map((it) => `“${it.text.trim()}”`).join(', '),
-        },
-    look === null || look.decorations.length === 0
-      ? null
-      : {
-          key: 'decorations',
-          label: 'Decorations',
-          value: look.decorations
-            .map((it) => {
-              const name =
-                menu.decorations.find((known) => known.id === it.decorationId)?.name ??
-                it.decorationId;
-              return it.quantity > 1 ? `${it.quantity} x ${name}` : name;
-            })
-            .join(', '),
-        },
-    extras.length === 0
-      ? null
-      : {
-          key: 'extras',
-          label: 'Beside the cake',
-          value: extras
-            .map(
-              (it) =>
-                `${it.quantity} x ${menu.extras.find((known) => known.id === it.extraId)?.name ?? it.extraId}`,
-            )
-            .join(', '),
-        },
+    ...chosenRows(order.design, menu).map((it) => ({ key: it.label, ...it })),
     look === null || look.note === ''
       ? null
       : {

@@ -1,8 +1,9 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { formatList } from '#shared/dates/format.ts';
+import { decorationWords } from '#shared/kitchen/chosen-words.ts';
 import { formatLength, formatWeight } from '#shared/kitchen/measures.ts';
-import { CakeChoices, decorationWords } from '#web/components/order/cake-choices.tsx';
+import { CakeChoices } from '#web/components/order/cake-choices.tsx';
 import { settingWords } from '#web/components/order/setting-words.ts';
 import { Palette } from '#web/components/photos/palette.tsx';
 import { DataList, type DataRow } from '#web/components/ui/data-list.tsx';
@@ -61,7 +62,7 @@ export function OrderChoices({ order, menu }: { readonly order: StaffOrder; read
       value: extras
         .map(
           (it) =>
-            `${it.quantity} x ${menu.extras.find((known) => known.id === it.extraId)?.name ?? it.extraId}`,
+            `${it.quantity} × ${menu.extras.find((known) => known.id === it.extraId)?.name ?? it.extraId}`,
         )
         .join(', '),
     },

@@ -1,9 +1,9 @@
 import type { Tier } from '#shared/contracts/design.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { Fold } from '#web/components/ui/fold.tsx';
-import { tierName } from '../../design/tier-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { PartChoice } from './part-choice.tsx';

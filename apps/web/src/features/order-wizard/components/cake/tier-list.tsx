@@ -1,4 +1,5 @@
 import type { Tier } from '#shared/contracts/design.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import {
   addTier,
@@ -9,7 +10,6 @@ import {
   removeTier,
 } from '../../design/edit-cake.ts';
 import { firstInside } from '../../design/first-inside.ts';
-import { tierName } from '../../design/tier-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { TierEditor } from './tier-editor.tsx';
 

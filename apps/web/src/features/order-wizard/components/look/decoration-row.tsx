@@ -1,12 +1,12 @@
 import type { PlacedDecoration } from '#shared/contracts/design.ts';
 import { decorationSource } from '#shared/contracts/vocabulary.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { DecorationGlyph } from '#web/components/cake-drawing/decoration-glyph.tsx';
 import { Button } from '#web/components/ui/button.tsx';
 import { NumberField } from '#web/components/ui/number-field.tsx';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { colourName } from '../../design/colour-name.ts';
-import { tierName } from '../../design/tier-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { sourceWords } from './source-words.ts';

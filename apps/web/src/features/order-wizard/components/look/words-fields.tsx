@@ -1,6 +1,6 @@
 import { countCharacters, wordsFit } from '#shared/kitchen/words-fit.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { TextField } from '#web/components/ui/text-field.tsx';
-import { tierName } from '../../design/tier-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { Spelled } from './spelled.tsx';
 

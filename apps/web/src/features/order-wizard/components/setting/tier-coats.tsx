@@ -1,10 +1,10 @@
 import type { Coating } from '#shared/contracts/design.ts';
 import type { CoatRank } from '#shared/contracts/estimates.ts';
 import { coatingName } from '#shared/kitchen/resolve-design.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { Fold } from '#web/components/ui/fold.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { coatOf, coatTier, pickFromKey, pickKey } from '../../design/choose-coat.ts';
-import { tierName } from '../../design/tier-name.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { finishWords } from './finish-words.ts';
 

@@ -2,7 +2,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { countOf } from '#shared/kitchen/sentences.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
-import { tierName } from '../../../design/tier-name.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { tidyOrder } from '../../../design/tidy-order.ts';
 import type { OrderForm } from '../../../draft/empty-order.ts';
 import type { CheckRow } from '../check-rows.tsx';

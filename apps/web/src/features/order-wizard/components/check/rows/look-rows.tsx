@@ -1,6 +1,6 @@
 import type { Menu } from '#shared/contracts/menu.ts';
+import { tierName } from '#shared/kitchen/tier-name.ts';
 import { colourName } from '../../../design/colour-name.ts';
-import { tierName } from '../../../design/tier-name.ts';
 import { orderToSend } from '../../../design/tidy-order.ts';
 import type { KeptPicture } from '../../../draft/draft-record.ts';
 import type { OrderForm } from '../../../draft/empty-order.ts';
