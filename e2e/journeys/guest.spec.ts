@@ -61,7 +61,7 @@ test('a guest orders with two photos, keeps the day by the link and reads both e
 
   const number = await send(page);
   await test.step('is told what comes next', async () => {
-    await expect(page.getByText(/Your day is kept for 30 minutes, until 10:30/)).toBeVisible();
+    await expect(page.getByText(/Your day is kept for 30 minutes, until .*10:30/)).toBeVisible();
     await look();
     await page.getByRole('link', { name: 'Open your order' }).click();
     await expect(page.getByText(/Open the link in the e-mail/)).toBeVisible();

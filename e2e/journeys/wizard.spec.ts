@@ -137,7 +137,7 @@ test(
     await page.goto('/order');
     await page.getByRole('button', { name: 'Add an allergy' }).click();
     await page.getByLabel('What is it?').selectOption({ label: 'Egg' });
-    await page.getByLabel('How grave is it?').selectOption({ index: 3 });
+    await page.getByLabel('How serious is it?').selectOption({ index: 3 });
     await answerDay(page, wish);
     await lookOver(page);
     await goOnTo(page, 'cake');
