@@ -1,7 +1,7 @@
 import type { Advice } from '#shared/contracts/estimates.ts';
 import { severities, type LabelRegion, type Severity } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
-import { allergenName, speciesName } from './allergen-names.ts';
+import { allergenName, speciesName, spelledFor } from './allergen-names.ts';
 import {
   clashesWith,
   gravest,
@@ -215,7 +215,7 @@ function whose(shared: Shared): string {
   const { guests, severity } = shared.declared;
   const { one, many } = reactions[severity];
   const words = guests === 1 ? one : `${guests} ${many}`;
-  const ofRegion = regionOf(shared) === 'US' ? words.replace('coeliac', 'celiac') : words;
+  const ofRegion = spelledFor(regionOf(shared), words);
   return isPlural(nameOf(shared)) ? ofRegion.replace(/\bit$/, 'them') : ofRegion;
 }
 

@@ -142,3 +142,8 @@ export function declarableSpecies(allergen: AllergenId, region: Region): readonl
   if (allergen === 'tree-nuts') return region === 'US' ? usTreeNuts : euTreeNuts;
   return allergen === 'gluten-cereals' ? euCereals : [];
 }
+
+/** The disease as the region writes it: "celiac" in the US. */
+export function spelledFor(region: LabelRegion, text: string): string {
+  return region === 'US' ? text.replace(/([Cc])oeliac/g, '$1eliac') : text;
+}

@@ -223,7 +223,7 @@ describe('a design in one line', () => {
       }),
     ],
     [
-      'One rectangle tier, 12 x 8 in, 48 portions',
+      'One rectangle tier, 12 × 8 in, 48 portions',
       designWith({
         cake: { tiers: [roundTier(8, { shape: 'rectangle', widthMm: 305, depthMm: 203 })] },
       }),

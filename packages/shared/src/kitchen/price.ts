@@ -195,7 +195,7 @@ function tierLine(
   const across =
     widthMm === depthMm
       ? lengthFigure(widthMm, lead)
-      : `${lengthFigure(widthMm, lead)} x ${lengthFigure(depthMm, lead)}`;
+      : `${lengthFigure(widthMm, lead)} × ${lengthFigure(depthMm, lead)}`;
   const label = `${across} ${lead} ${shape} tier`;
   if (!tier.real) return lineOf('tier', `${label}, a dummy`, 1, book.dummyTierMinor, cake);
   const widest = Math.max(widthMm, depthMm);

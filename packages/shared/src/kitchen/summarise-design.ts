@@ -26,7 +26,7 @@ export function summariseCake(cake: Cake, menu: Menu): string {
   const sizes = cake.tiers.map((it) =>
     it.widthMm === it.depthMm
       ? lengthFigure(it.widthMm, lead)
-      : `${lengthFigure(it.widthMm, lead)} x ${lengthFigure(it.depthMm, lead)}`,
+      : `${lengthFigure(it.widthMm, lead)} × ${lengthFigure(it.depthMm, lead)}`,
   );
   const dummies = cake.tiers.filter((it) => !it.real).length;
   const [only] = shapes;

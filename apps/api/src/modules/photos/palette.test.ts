@@ -24,6 +24,19 @@ describe('the palette of a picture', () => {
     expect(paletteOf(new Uint8Array(), 5)).toEqual([]);
   });
 
+  it('tells a flat colour once, however noisy it is', () => {
+    const pixels = Uint8Array.from([
+      ...band('#e8b4b8', 400),
+      ...band('#e9b6b9', 300),
+      ...band('#e6b2b7', 300),
+      ...band('#9bb59a', 200),
+    ]);
+    const [pink, green, ...more] = paletteOf(pixels, 5);
+    expect(pink).toMatch(/^#e[6-9]b[2-6]b[7-9]$/);
+    expect(green).toBe('#9bb59a');
+    expect(more).toEqual([]);
+  });
+
   it('never has more than asked for, and only colours', () => {
     fc.assert(
       fc.property(fc.uint8Array({ maxLength: 900 }), (pixels) => {

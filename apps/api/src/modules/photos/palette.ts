@@ -1,7 +1,10 @@
 type Rgb = readonly [number, number, number];
 
+/** Closer than this, of 441 from black to white, two colours look like one on a chip. */
+const tellApart = 32;
+
 /**
- * So many colours that stand for a picture, the most frequent first: the box of colours that is
+ * At most so many colours that stand for a picture and can be told apart, the most frequent first: the box of colours that is
  * widest for its share is halved until there are enough (median cut).
  * @param pixels red, green and blue in turn, a byte each
  */
@@ -11,7 +14,8 @@ export function paletteOf(pixels: Uint8Array, count: number): string[] {
     colours.push([pixels[at] ?? 0, pixels[at + 1] ?? 0, pixels[at + 2] ?? 0]);
   }
   const boxes = [colours];
-  while (boxes.length < count) {
+  // Twice as many as wanted: some stand for one flat colour and the noise around it.
+  while (boxes.length < count * 2) {
     const widest = boxes.toSorted((a, b) => weightOf(b) - weightOf(a))[0];
     if (widest === undefined || weightOf(widest) === 0) break;
     boxes.splice(boxes.indexOf(widest), 1, ...halve(widest));
@@ -19,7 +23,17 @@ export function paletteOf(pixels: Uint8Array, count: number): string[] {
   return boxes
     .filter((box) => box.length > 0)
     .toSorted((a, b) => b.length - a.length)
+    .map(meanOf)
+    .reduce<Rgb[]>(
+      (kept, it) => (kept.some((known) => distance(known, it) < tellApart) ? kept : [...kept, it]),
+      [],
+    )
+    .slice(0, count)
     .map(hexOf);
+}
+
+function distance(a: Rgb, b: Rgb): number {
+  return Math.hypot(a[0] - b[0], a[1] - b[1], a[2] - b[2]);
 }
 
 /** Spread along the widest channel, times the root of how many pixels it stands for. */
@@ -57,15 +71,14 @@ function rangeOf(box: readonly Rgb[], channel: 0 | 1 | 2): number {
   return Math.max(0, high - low);
 }
 
-function hexOf(box: readonly Rgb[]): string {
-  const sums = box.reduce<[number, number, number]>(
+function meanOf(box: readonly Rgb[]): Rgb {
+  const sums = box.reduce<Rgb>(
     (sum, colour) => [sum[0] + colour[0], sum[1] + colour[1], sum[2] + colour[2]],
     [0, 0, 0],
   );
-  const hex = sums.map((sum) =>
-    Math.round(sum / box.length)
-      .toString(16)
-      .padStart(2, '0'),
-  );
-  return `#${hex.join('')}`;
+  return [sums[0] / box.length, sums[1] / box.length, sums[2] / box.length];
+}
+
+function hexOf(colour: Rgb): string {
+  return `#${colour.map((it) => Math.round(it).toString(16).padStart(2, '0')).join('')}`;
 }

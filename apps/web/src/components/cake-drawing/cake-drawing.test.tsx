@@ -63,7 +63,7 @@ describe('CakeDrawing', () => {
         menu={menuFixture}
       />,
     );
-    expect(screen.getByRole('img', { name: /^Sheet/ })).toHaveTextContent('from above');
+    expect(screen.getByRole('img', { name: /^Quarter sheet/ })).toHaveTextContent('from above');
   });
 
   it('leads with the studio’s unit', () => {

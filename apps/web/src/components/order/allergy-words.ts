@@ -1,6 +1,6 @@
 import type { LabelRegion, Severity } from '#shared/contracts/vocabulary.ts';
 import { allergenId } from '#shared/contracts/vocabulary.ts';
-import { allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
+import { allergenName, speciesName, spelledFor } from '#shared/kitchen/allergen-names.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 
 const severityWords: Readonly<Record<Severity, string>> = {
@@ -27,7 +27,7 @@ export function allergyWords(declared: Declared, region: LabelRegion): string {
     : declared.text;
   const how = isSeverity(declared.severity) ? severityWords[declared.severity] : declared.severity;
   const guests = `${declared.guests} ${declared.guests === 1 ? 'guest' : 'guests'}`;
-  return `${capitalise(name)}: ${how}, ${guests}`;
+  return `${capitalise(name)}: ${spelledFor(region, how)}, ${guests}`;
 }
 
 function isSeverity(word: string): word is Severity {

@@ -43,8 +43,8 @@ export function Checkbox({ label, hint, error, className, ...input }: Props) {
             />
           </svg>
         </span>
-        <label htmlFor={id} className="flex min-h-11 cursor-pointer items-center">
-          <span>{label}</span>
+        <label htmlFor={id} className="flex min-h-11 cursor-pointer items-center py-2">
+          <span className="leading-snug">{label}</span>
         </label>
         {hint && (
           <p id={`${id}-hint`} className="col-start-2 -mt-1 text-sm text-slate">

@@ -84,7 +84,10 @@ function RadioLine<V extends string>({ row, group, chosen, onChoose }: LineProps
       {row.picture && <span className="shrink-0">{row.picture}</span>}
       <span className="grid min-w-0 flex-1 gap-x-6 gap-y-1 sm:grid-cols-[1fr_auto] sm:items-center">
         <span className="grid gap-0.5">
-          <span id={`${id}-label`} className="font-display text-lg leading-snug font-semibold">
+          <span
+            id={`${id}-label`}
+            className="font-display text-lg leading-snug font-semibold text-balance"
+          >
             {row.label}
           </span>
           {row.description && <span className="text-sm text-slate">{row.description}</span>}

@@ -21,7 +21,7 @@ export function SiteHeader({ name, homeTo, mark, nav, children }: Props) {
   return (
     <SlotContext value={slot}>
       <header className="border-t-[5px] border-b border-t-cobalt border-b-cobalt print:border-t-2">
-        <div className="page flex min-h-14 flex-wrap items-center gap-x-4 gap-y-1 py-1.5 sm:gap-x-6">
+        <div className="page flex min-h-14 flex-wrap items-center has-[[data-slot]:not(:empty)]:flex-nowrap gap-x-4 gap-y-1 py-1.5 sm:gap-x-6">
           <Link
             to={homeTo}
             aria-label={name === '' ? 'First page' : undefined}
@@ -33,6 +33,7 @@ export function SiteHeader({ name, homeTo, mark, nav, children }: Props) {
           <div
             ref={setSlot}
             data-print="no"
+            data-slot
             className="peer ml-auto flex flex-wrap items-center justify-end gap-x-5 empty:hidden"
           />
           <div data-print="no" className="contents peer-[:not(:empty)]:hidden">

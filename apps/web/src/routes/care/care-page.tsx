@@ -1,7 +1,7 @@
 import { Link } from 'react-router-dom';
 import type { ReactNode } from 'react';
 import { formatList } from '#shared/dates/format.ts';
-import { allergenLabel } from '#shared/kitchen/allergen-names.ts';
+import { allergenLabel, spelledFor } from '#shared/kitchen/allergen-names.ts';
 import { formatBenchTemperature } from '#shared/kitchen/measures.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { Notice } from '#web/components/ui/notice.tsx';
@@ -91,8 +91,9 @@ export function CarePage() {
           <Notice tone="butter" title="Tell us before you design">
             <p>
               The order asks about allergies first. We tell you what every choice contains; whether
-              somebody may eat it is for them and their doctor to say. For a severe allergy or
-              coeliac disease a baker talks with you before anything is confirmed.
+              somebody may eat it is for them and their doctor to say. For a severe allergy or{' '}
+              {spelledFor(studio.labelRegion, 'coeliac disease')} a baker talks with you before
+              anything is confirmed.
             </p>
           </Notice>
         </Section>

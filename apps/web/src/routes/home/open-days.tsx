@@ -78,11 +78,11 @@ export function PickupHours({ dates, locale }: { readonly dates: Dates; readonly
   if (rows.length === 0) return null;
   return (
     <dl className="grid w-fit grid-cols-[auto_auto] gap-x-8 gap-y-1 tabular-nums">
-      {rows.map(({ sample, from, to }) => (
+      {rows.map(({ sample, spans }) => (
         <div key={sample} className="contents">
           <dt>{formatWeekday(sample, 'long', locale)}</dt>
           <dd>
-            {formatTime(from)} to {formatTime(to)}
+            {spans.map(({ from, to }) => `${formatTime(from)} to ${formatTime(to)}`).join(', ')}
           </dd>
         </div>
       ))}
@@ -90,27 +90,34 @@ export function PickupHours({ dates, locale }: { readonly dates: Dates; readonly
   );
 }
 
+type Span = { readonly from: number; readonly to: number };
+
 type Hours = {
   readonly sample: string;
   readonly weekday: number;
-  readonly from: number;
-  readonly to: number;
+  /** Windows that follow each other, joined; a midday pause stays one. */
+  readonly spans: readonly Span[];
 };
 
 function hoursByWeekday(days: readonly DayAnswer[]): Hours[] {
-  const found = new Map<number, Hours>();
+  const found = new Map<number, { sample: string; windows: Span[] }>();
   for (const { date, windows } of days) {
     if (windows.length === 0) continue;
-    const weekday = weekdayOf(date);
-    const from = Math.min(...windows.map((it) => it.start));
-    const to = Math.max(...windows.map((it) => it.start + it.minutes));
-    const known = found.get(weekday);
-    found.set(weekday, {
-      sample: known?.sample ?? date,
-      weekday,
-      from: Math.min(from, known?.from ?? from),
-      to: Math.max(to, known?.to ?? to),
-    });
+    const known = found.get(weekdayOf(date)) ?? { sample: date, windows: [] };
+    known.windows.push(...windows.map((it) => ({ from: it.start, to: it.start + it.minutes })));
+    found.set(weekdayOf(date), known);
   }
-  return [...found.values()].sort((a, b) => a.weekday - b.weekday);
+  return [...found]
+    .map(([weekday, { sample, windows }]) => ({ sample, weekday, spans: joined(windows) }))
+    .sort((a, b) => a.weekday - b.weekday);
+}
+
+function joined(windows: readonly Span[]): Span[] {
+  return windows
+    .toSorted((a, b) => a.from - b.from)
+    .reduce<Span[]>((spans, it) => {
+      const last = spans.at(-1);
+      if (last === undefined || it.from > last.to) return [...spans, it];
+      return [...spans.slice(0, -1), { from: last.from, to: Math.max(last.to, it.to) }];
+    }, []);
 }

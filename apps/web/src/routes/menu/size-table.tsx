@@ -32,7 +32,7 @@ export function SizeTable({ menu }: { readonly menu: Menu }) {
             <th key={it.id} scope="col" className="py-2 pl-2 sm:pl-4 text-right font-semibold">
               {it.name}
               <span className="block text-sm font-normal text-slate">
-                {formatLength(it.widthMm, lead)} x {formatLength(it.depthMm, lead)}
+                {formatLength(it.widthMm, lead)} × {formatLength(it.depthMm, lead)}
               </span>
             </th>
           ))}

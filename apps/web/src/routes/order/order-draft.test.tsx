@@ -25,6 +25,17 @@ describe('the draft of an order', () => {
     expect(await screen.findByLabelText('What is it?')).toHaveValue('egg');
   });
 
+  it('takes no allergy for granted: what it is has to be chosen', async () => {
+    const { user } = bench.open('/order/day');
+    await user.click(await screen.findByRole('button', { name: 'Add an allergy' }));
+    const which = await screen.findByLabelText('What is it?');
+    expect(which).toHaveValue('');
+    await user.click(screen.getByRole('button', { name: 'On to the cake' }));
+    await waitFor(() => expect(which).toHaveAccessibleDescription(/Tell us what it is/));
+    await user.selectOptions(which, 'Something else, in my words');
+    expect(await screen.findByLabelText('Your words')).toHaveValue('');
+  });
+
   it('opens where it was left, but never beyond what is missing', async () => {
     const values = answered();
     values.cake.coating = null;

@@ -31,7 +31,7 @@ You may have a copy of everything, have it put right, or have it erased: use you
     title: 'Allergies and what we handle',
     text: `We make everything in one kitchen that handles wheat, milk, egg, soy, almonds, hazelnuts, walnuts, pistachios and sesame every week. For each cake we list what is in it, worked out from the labels of what we buy, and what else is handled here. We never say more than that.
 
-Tell us about every allergy at the table, even if you think the cake avoids it. If your cake contains what somebody cannot eat, the order says so at once and shows what else you could choose. With coeliac disease or a severe allergy we talk with you before we take the order, and sometimes we will say no: please do not take it amiss.
+Tell us about every allergy at the table, even if you think the cake avoids it. If your cake contains what somebody cannot eat, the order says so at once and shows what else you could choose. With celiac disease or a severe allergy we talk with you before we take the order, and sometimes we will say no: please do not take it amiss.
 
 Makers change their recipes. If a label changes after you ordered, we work out your cake again and tell you before you collect it. What is right for your guest is for them and their doctor to decide.`,
   },

@@ -30,9 +30,9 @@ export const tierSizes = [
 
 /** Sheets, cut 50 by 50 mm. */
 export const sheetSizes = [
-  { id: 'quarter', name: 'Quarter sheet, 9 x 13 in', widthMm: 330, depthMm: 229, heightMm: 50 },
-  { id: 'half', name: 'Half sheet, 13 x 18 in', widthMm: 457, depthMm: 330, heightMm: 50 },
-  { id: 'full', name: 'Full sheet, 18 x 26 in', widthMm: 660, depthMm: 457, heightMm: 50 },
+  { id: 'quarter', name: 'Quarter sheet, 9 × 13 in', widthMm: 330, depthMm: 229, heightMm: 50 },
+  { id: 'half', name: 'Half sheet, 13 × 18 in', widthMm: 457, depthMm: 330, heightMm: 50 },
+  { id: 'full', name: 'Full sheet, 18 × 26 in', widthMm: 660, depthMm: 457, heightMm: 50 },
 ] as const;
 
 /** Footprints at full tier height; published tables disagree by 20 %, so they are a setting. */
@@ -49,15 +49,15 @@ export const portionSizes = [
     name: 'Dessert',
     widthMm: 25,
     depthMm: 50,
-    blurb: 'A slim slice, 1 x 2 in; usual at weddings.',
+    blurb: 'A slim slice, 1 × 2 in; usual at weddings.',
   },
-  { id: 'party', name: 'Party', widthMm: 38, depthMm: 50, blurb: 'A proper slice, 1.5 x 2 in.' },
+  { id: 'party', name: 'Party', widthMm: 38, depthMm: 50, blurb: 'A proper slice, 1½ × 2 in.' },
 ] as const;
 
 export const occasions = [
   { id: 'wedding', name: 'Wedding', noticeDays: 14 },
   { id: 'birthday', name: 'Birthday', noticeDays: 0 },
-  { id: 'child-birthday', name: "Child's birthday", noticeDays: 0 },
+  { id: 'child-birthday', name: 'Child’s birthday', noticeDays: 0 },
   { id: 'anniversary', name: 'Anniversary', noticeDays: 0 },
   { id: 'baby', name: 'Christening or new baby', noticeDays: 0 },
   { id: 'graduation', name: 'Graduation', noticeDays: 0 },

@@ -10,7 +10,7 @@ export function FeedsMeter() {
   const over = fed - wanted;
   const verdict =
     over < 0
-      ? `${-over} short: add a tier, take a larger one, or a cutting cake beside it.`
+      ? `${-over} short: ${design.cake.kind === 'sheet' ? 'take a larger sheet' : 'add a tier, take a larger one'}, or a cutting cake beside it.`
       : over === 0
         ? 'Just enough.'
         : `${over} over.`;

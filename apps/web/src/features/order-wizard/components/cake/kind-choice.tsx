@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { Proposal } from '#shared/contracts/estimates.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
+import { portionsOfSheet } from '#shared/kitchen/sizes.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
 import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
@@ -42,7 +43,8 @@ export function KindChoice() {
   const choose = (value: string) => {
     setOwn(value === ownRow);
     if (value === sheetRow) {
-      const size = menu.sheetSizes.find((it) => it.id === cake.sheet?.sizeId) ?? menu.sheetSizes[0];
+      const size =
+        menu.sheetSizes.find((it) => it.id === cake.sheet?.sizeId) ?? smallestThatFeeds();
       if (size !== undefined) change(takeSheet(values, size, inside));
       return;
     }
@@ -54,6 +56,15 @@ export function KindChoice() {
     const proposal = proposals.find((it) => it.id === value);
     if (proposal !== undefined) change(takeProposal(values, proposal.tiers));
   };
+
+  function smallestThatFeeds() {
+    const portion = menu.portionSizes.find((it) => it.id === day.portionSizeId);
+    const wanted = running.estimate?.portions.wanted ?? day.headCount;
+    return (
+      menu.sheetSizes.find((it) => portion && portionsOfSheet(it, portion) >= wanted) ??
+      menu.sheetSizes.at(-1)
+    );
+  }
 
   const rows: RadioRow<string>[] = proposals.map((it) => proposalRow(it));
   if (menu.sheetSizes.length > 0) {

@@ -54,7 +54,8 @@ export function PartChoice({ name, label, parts, value, none, error, onValue }: 
           <option key={it.id} value={it.id}>
             {it.name}
             {more(it)}
-            {against(it.contents).length > 0 && ` (against: ${formatList(against(it.contents))})`}
+            {against(it.contents).length > 0 &&
+              ` (does not suit: ${formatList(against(it.contents))})`}
           </option>
         ))}
       </Select>
@@ -66,7 +67,7 @@ export function PartChoice({ name, label, parts, value, none, error, onValue }: 
       {clashes.length > 0 && (
         <p className="flex gap-2 text-sm font-semibold text-berry">
           <ToneGlyph tone="berry" />
-          Speaks against it at your table: {formatList(clashes)}.
+          Does not suit your table: {formatList(clashes)}.
         </p>
       )}
     </div>

@@ -18,8 +18,9 @@ const AllergyRows = lazy(async () => ({
 
 const mostRows = 20;
 
+/** Nothing is chosen for anybody: a guest's allergy must never be one that was left standing. */
 const blank: Declaration = {
-  allergen: 'milk',
+  allergen: null,
   species: null,
   text: '',
   severity: 'allergy',

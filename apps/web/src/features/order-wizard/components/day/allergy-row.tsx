@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import type { Declaration } from '#shared/contracts/design.ts';
 import { severities, type AllergenId } from '#shared/contracts/vocabulary.ts';
 import {
@@ -5,6 +6,7 @@ import {
   declarableAllergens,
   declarableSpecies,
   speciesName,
+  spelledFor,
 } from '#shared/kitchen/allergen-names.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { Button } from '#web/components/ui/button.tsx';
@@ -24,18 +26,22 @@ type Props = {
   readonly onRemove: () => void;
 };
 
-/** One thing guests keep from: what, how grave, how many of them. */
+/** One thing guests keep from: what, how serious it is, how many of them. */
 export function AllergyRow({ at, row, onChange, onRemove }: Props) {
   const { menu } = useWizard();
   const region = menu.studio.labelRegion;
   const path = `day.allergies.${at}`;
   const textProblem = useProblemAt(`${path}.text`);
+  const [inWords, setInWords] = useState(row.text !== '');
+  const own = row.allergen === null && (inWords || row.text !== '');
+  const open = row.allergen === null && !own;
   const guestsProblem = useProblemAt(`${path}.guests`);
   const allergens = declarableAllergens(region);
   const species = row.allergen === null ? [] : declarableSpecies(row.allergen, region);
 
   const chooseAllergen = (value: string) => {
     const allergen: AllergenId | null = allergens.find((id) => id === value) ?? null;
+    setInWords(value === ownWords);
     onChange({ ...row, allergen, species: null });
   };
 
@@ -43,11 +49,14 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
     <li className="grid gap-4 border-l-2 border-cobalt pl-4">
       <div className="grid gap-4 sm:grid-cols-2">
         <Select
-          name={`${path}.allergen`}
+          // While nothing is chosen, what is missing is missing here.
+          name={open ? `${path}.text` : `${path}.allergen`}
           label="What is it?"
-          value={row.allergen ?? ownWords}
+          error={open ? textProblem : undefined}
+          value={open ? '' : (row.allergen ?? ownWords)}
           onChange={(event) => chooseAllergen(event.target.value)}
         >
+          {open && <option value="">Choose one</option>}
           {allergens.map((id) => (
             <option key={id} value={id}>
               {capitalise(allergenName(id, region))}
@@ -70,7 +79,7 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
             ))}
           </Select>
         )}
-        {row.allergen === null && (
+        {own && (
           <TextField
             name={`${path}.text`}
             label="Your words"
@@ -83,7 +92,7 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
         )}
         <Select
           name={`${path}.severity`}
-          label="How grave is it?"
+          label="How serious is it?"
           value={row.severity}
           onChange={(event) => {
             const severity = severities.find((it) => it === event.target.value);
@@ -92,7 +101,7 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
         >
           {severities.map((id) => (
             <option key={id} value={id}>
-              {severityWords[id]}
+              {spelledFor(region, severityWords[id])}
             </option>
           ))}
         </Select>

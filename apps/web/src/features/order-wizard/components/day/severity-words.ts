@@ -1,6 +1,6 @@
 import type { Severity } from '#shared/contracts/vocabulary.ts';
 
-/** How grave it is, in the words of the form. */
+/** How serious it is, in the words of the form. */
 export const severityWords: Readonly<Record<Severity, string>> = {
   avoids: 'Would rather not eat it',
   intolerance: 'Intolerance',

@@ -23,7 +23,7 @@ export function StepsDrawer({ step, signInTo }: Props) {
       <button
         type="button"
         aria-haspopup="dialog"
-        className="min-h-11 text-sm text-slate underline decoration-dotted underline-offset-4"
+        className="min-h-11 text-sm whitespace-nowrap text-slate underline decoration-dotted underline-offset-4"
         onClick={() => setOpen(true)}
       >
         {steps[step].name}, {stepIndex(step) + 1} of {orderSteps.length}

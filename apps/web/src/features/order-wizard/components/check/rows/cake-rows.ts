@@ -30,12 +30,17 @@ export function cakeRows(values: OrderForm, menu: Menu): CheckRow[] {
     });
   }
   const tiers = cake.tiers.map((tier, at): CheckRow => {
-    const height = `${formatLength(tier.heightMm, menu.studio.lengthLead)} high`;
+    const lead = menu.studio.lengthLead;
+    const across =
+      tier.widthMm === tier.depthMm
+        ? formatLength(tier.widthMm, lead)
+        : `${formatLength(tier.widthMm, lead)} by ${formatLength(tier.depthMm, lead)}`;
+    const measures = `${tier.shape}, ${across}, ${formatLength(tier.heightMm, lead)} high`;
     return {
       label: tierName(at, cake.tiers.length),
       value: tier.real
-        ? `${inside(tier.spongeId, tier.fillingId, tier.layers)}, ${height}${tier.keepsake ? ', kept back' : ''}`
-        : `For show only, ${height}`,
+        ? `${inside(tier.spongeId, tier.fillingId, tier.layers)}, ${measures}${tier.keepsake ? ', kept back' : ''}`
+        : `For show only, ${measures}`,
       field: `cake.tiers.${at}.spongeId`,
     };
   });
