@@ -63,7 +63,7 @@ async function readType(file: string): Promise<PhotoType> {
     await handle.close();
   }
   throw new AppError('unreadable-photo', {
-    detail: 'Send a picture: JPEG, PNG, WebP, AVIF, HEIC or GIF.',
+    detail: 'That is not a picture we can read. Send JPEG, PNG, WebP, AVIF, HEIC or GIF.',
   });
 }
 

@@ -25,7 +25,7 @@ export function DataList({
           className={classNames(
             ends
               ? 'flex items-baseline justify-between gap-6'
-              : 'grid gap-x-6 sm:grid-cols-[12rem_1fr]',
+              : 'grid gap-x-6 sm:grid-cols-[minmax(7rem,12rem)_minmax(0,2fr)]',
             'border-b py-2.5',
             row.total ? 'border-b-2 border-butter' : 'border-seam',
           )}

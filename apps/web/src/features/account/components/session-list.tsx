@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
+import { instantWords } from '#web/components/order/order-times.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { Failure } from '#web/components/ui/failure.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
@@ -14,7 +15,8 @@ export function SessionList({ locale }: { readonly locale: string }) {
   if (isPending) return <Pending what="Looking where you are signed in…" />;
   if (error) return <Failure error={error} onRetry={() => void refetch()} />;
   // The reader's own clock: these are moments of theirs, not the studio's.
-  const when = new Intl.DateTimeFormat(locale, { dateStyle: 'medium', timeStyle: 'short' });
+  const { timeZone } = Intl.DateTimeFormat().resolvedOptions();
+  const when = (instant: string) => instantWords(instant, timeZone, locale);
   return (
     <div className="grid gap-3">
       {end.isError && <Failure error={end.error} />}
@@ -30,8 +32,7 @@ export function SessionList({ locale }: { readonly locale: string }) {
                 {it.current && <span className="font-normal text-slate"> (this one)</span>}
               </p>
               <p className="text-sm text-slate tabular-nums">
-                since {when.format(new Date(it.createdAt))}, last used{' '}
-                {when.format(new Date(it.lastSeenAt))}
+                since {when(it.createdAt)}, last used {when(it.lastSeenAt)}
               </p>
             </div>
             {!it.current && (

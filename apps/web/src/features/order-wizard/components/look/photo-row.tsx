@@ -35,7 +35,7 @@ export function PhotoRow({ at, claim, last, onChange, onMove, onRemove }: Props)
           onChange={(event) => onChange({ ...claim, note: event.target.value })}
         />
         <div className="-ml-2 flex flex-wrap items-center gap-x-1">
-          <span className="px-2 text-sm font-semibold text-leaf">Here</span>
+          <span className="px-2 text-sm font-semibold text-leaf">Arrived</span>
           {at > 0 && (
             <Button kind="quiet" aria-label={`Move ${name} up`} onClick={() => onMove(-1)}>
               Up
