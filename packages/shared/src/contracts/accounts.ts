@@ -78,6 +78,8 @@ export const linkLook = z.object({
   purpose: z.enum(['sign-in', 'invitation', 'password-reset', 'first-owner', 'confirm-action']),
   email: z.nullable(z.string()),
   role: z.nullable(role),
+  /** With an invitation: whom the owner asked in, so that nobody is asked for it twice. */
+  name: z.nullable(z.string()),
 });
 
 /** `POST /api/account/password`: staff, signed in; ends their other sessions. */

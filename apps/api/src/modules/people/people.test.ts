@@ -37,7 +37,7 @@ describe('the first owner', () => {
     ].map((address) => address?.split('#')[1]);
     expect((await accept(older)).status).toBe(410);
     const look = await app.visitor().post('/api/session/links/look', { token: newer });
-    expect(look.body).toEqual({ purpose: 'first-owner', email: null, role: 'owner' });
+    expect(look.body).toEqual({ purpose: 'first-owner', email: null, role: 'owner', name: null });
     expect((await accept(newer)).body).toMatchObject({ issues: [{ path: ['email'] }] });
     const client = app.visitor();
     const answer = await accept(newer, { email: 'maren@oxbowlane.example' }, client);

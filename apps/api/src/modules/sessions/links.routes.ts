@@ -59,8 +59,8 @@ export function linksRoutes(deps: Deps): FeatureRoutes {
       refusals: ['link-spent'],
     },
     async ({ body }) => {
-      const { purpose, email, role } = await findLink(deps, body.token);
-      return { purpose, email, role };
+      const { purpose, email, role, data } = await findLink(deps, body.token);
+      return { purpose, email, role, name: typeof data['name'] === 'string' ? data['name'] : null };
     },
     spending,
   );

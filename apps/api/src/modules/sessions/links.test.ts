@@ -58,7 +58,12 @@ describe('a sign-in link', () => {
     const token = await keyFor('scanned@example.com');
     expect((await app.visitor().get(`/api/session/links/use?token=${token}`)).status).toBe(404);
     const look = await app.visitor().post('/api/session/links/look', { token });
-    expect(look.body).toEqual({ purpose: 'sign-in', email: 'scanned@example.com', role: null });
+    expect(look.body).toEqual({
+      purpose: 'sign-in',
+      email: 'scanned@example.com',
+      role: null,
+      name: null,
+    });
     expect((await app.visitor().post('/api/session/links/use', { token })).status).toBe(200);
   });
 

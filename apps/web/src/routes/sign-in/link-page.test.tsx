@@ -47,7 +47,7 @@ beforeEach(() => {
 
 describe('LinkPage', () => {
   it('spends a sign-in link by a press alone, then goes where it was meant to', async () => {
-    look({ purpose: 'sign-in', email: 'tess@example.com', role: 'customer' });
+    look({ purpose: 'sign-in', email: 'tess@example.com', role: 'customer', name: null });
     const { user } = open('/links/sign-in#token-1');
     const press = await screen.findByRole('button', { name: 'Sign me in' });
     expect(spent).toEqual([]);
@@ -77,19 +77,20 @@ describe('LinkPage', () => {
   });
 
   it('asks the first owner for an address, an invited baker not', async () => {
-    look({ purpose: 'invitation', email: 'new@oxbowlane.example', role: 'baker' });
+    look({ purpose: 'invitation', email: 'new@oxbowlane.example', role: 'baker', name: 'Wren' });
     const invited = open('/links/invitation#token-2');
     expect(await screen.findByLabelText('A password')).toBeVisible();
+    expect(screen.getByLabelText('Your name')).toHaveValue('Wren');
     expect(screen.queryByLabelText('Your e-mail address')).not.toBeInTheDocument();
     invited.unmount();
 
-    look({ purpose: 'first-owner', email: null, role: 'owner' });
+    look({ purpose: 'first-owner', email: null, role: 'owner', name: null });
     open('/links/first-owner#token-3');
     expect(await screen.findByLabelText('Your e-mail address')).toBeVisible();
   });
 
   it('puts the server’s issue on its field and keeps what was typed', async () => {
-    look({ purpose: 'password-reset', email: 'ida@oxbowlane.example', role: 'owner' });
+    look({ purpose: 'password-reset', email: 'ida@oxbowlane.example', role: 'owner', name: null });
     server.use(
       http.post('*/api/session/password-resets/use', () =>
         HttpResponse.json(

@@ -66,7 +66,7 @@ export function LinkPage() {
       );
     case 'invitation':
     case 'first-owner':
-      return <InvitationPage token={token} role={link.role} email={link.email} />;
+      return <InvitationPage token={token} {...link} />;
     case 'password-reset':
       return <ResetPage token={token} email={link.email} />;
   }
@@ -135,9 +135,10 @@ type InvitationProps = {
   readonly token: string;
   readonly role: string | null;
   readonly email: string | null;
+  readonly name: string | null;
 };
 
-function InvitationPage({ token, role, email }: InvitationProps) {
+function InvitationPage({ token, role, email, name }: InvitationProps) {
   const navigate = useNavigate();
   return (
     <NarrowPage
@@ -151,6 +152,7 @@ function InvitationPage({ token, role, email }: InvitationProps) {
       <NewAccountForm
         token={token}
         asksEmail={email === null}
+        name={name ?? ''}
         onEntered={(session) => void navigate(afterSignIn(session, null), { replace: true })}
       />
     </NarrowPage>

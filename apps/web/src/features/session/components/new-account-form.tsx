@@ -9,14 +9,16 @@ type Props = {
   readonly token: string;
   /** The first owner's link was sent to no address, so the form asks for one. */
   readonly asksEmail: boolean;
+  /** As the invitation has it; theirs to change. */
+  readonly name: string;
   readonly onEntered: (session: SessionView) => void;
 };
 
 /** A member of staff makes their account from an invitation. */
-export function NewAccountForm({ token, asksEmail, onEntered }: Props) {
+export function NewAccountForm({ token, asksEmail, name, onEntered }: Props) {
   const { form, failure, submit } = useContractForm(acceptInvitation, {
     token,
-    name: '',
+    name,
     password: '',
     ...(asksEmail ? { email: '' } : {}),
   });
