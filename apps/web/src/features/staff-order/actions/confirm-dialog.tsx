@@ -36,6 +36,12 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
   // Once it is under way the order itself says no more confirming; that is no news.
   const pressed = confirm.isPending || confirm.isSuccess;
   const blocked = !pressed && (blockers.length > 0 || !order.can.confirm);
+  // A stop that was lifted stays one to have in sight.
+  const lifted = order.estimate.advice.filter(
+    (it) =>
+      it.level === 'stop' &&
+      !blockers.some((other) => other.code === it.code && other.about === it.about),
+  );
   const noteWaits = note.trim() !== shownNote;
 
   return (
@@ -63,6 +69,9 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
               </p>
             </Notice>
           )}
+          {lifted.map((it) => (
+            <AdviceNote key={`${it.code} ${it.about}`} advice={{ ...it, instead: '' }} />
+          ))}
           <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
         </div>
         <section aria-labelledby={heading} className="grid min-w-0 gap-3">

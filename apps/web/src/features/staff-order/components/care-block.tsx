@@ -86,7 +86,8 @@ export function CareBlock({ order, menu }: Props) {
         <ul className="grid gap-3">
           {byGravity(about).map((it) => (
             <li key={`${it.code} ${it.about}`}>
-              <AdviceNote advice={it} />
+              {/* What else could have been chosen is past where a stop was lifted. */}
+              <AdviceNote advice={it.level === 'stop' ? { ...it, instead: '' } : it} />
             </li>
           ))}
         </ul>
