@@ -61,7 +61,10 @@ export async function killSenders(
       kill === kills
         ? (await SentMail.count({ where: { state: 'sent' } })) === total
         : (await arrived()) >= before + between;
-    while (child.exitCode === null && !(await enough())) await pause(4);
+    while (!(await enough())) {
+      if (child.exitCode !== null) throw new Error('A worker ended by itself.');
+      await pause(4);
+    }
     // Each time a little later: before the server's yes, at it, after our note of it.
     await pause((kill % moments) * 3);
     child.kill('SIGKILL');
