@@ -107,6 +107,26 @@ test(
       expect(mail.text).toContain('As we said on the telephone.');
     });
 
+    await test.step('finds, narrows and sorts the orders', async () => {
+      await page.goto('/staff/orders');
+      const rows = page.getByRole('table').getByRole('row');
+      // The head is a row too.
+      await expect(rows).toHaveCount(3);
+      await page.getByRole('searchbox', { name: 'Find' }).fill(String(moved.number));
+      await expect(rows).toHaveCount(2);
+      await expect(page).toHaveURL(new RegExp(`find=${moved.number}`));
+      await page.reload();
+      await expect(rows).toHaveCount(2);
+      await page.getByRole('searchbox', { name: 'Find' }).fill('');
+      await expect(rows).toHaveCount(3);
+      await page
+        .getByRole('search')
+        .getByText(/^declined/)
+        .click();
+      await expect(rows.nth(1)).toContainText(String(refused.number));
+      await expect(rows).toHaveCount(2);
+    });
+
     await test.step('blocks a day, and customers see it closed', async () => {
       await page.goto('/staff/calendar?view=day&date=2027-06-25');
       await page.getByRole('button', { name: 'Block this day' }).click();
