@@ -146,7 +146,10 @@ test(
     await answerSetting(page);
 
     const beside = page.getByRole('region', { name: 'Your cake so far' });
-    const conflict = beside.getByText(/^Egg is in Swiss meringue buttercream/);
+    // The words stand twice, once for screen readers alone: this is the paragraph that is seen.
+    const conflict = beside
+      .getByRole('paragraph')
+      .filter({ hasText: /^Egg is in Swiss meringue buttercream/ });
     await expect(conflict).toBeVisible();
     await lookOver(page);
     await beside
