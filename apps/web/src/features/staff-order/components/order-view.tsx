@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import type { Advice } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
@@ -22,7 +22,19 @@ import { OrderMessages } from './order-messages.tsx';
 import { OrderPhotos } from './order-photos.tsx';
 import { OrderPlan } from './order-plan.tsx';
 
-type Props = { readonly order: StaffOrder; readonly menu: Menu };
+/** What other features show of the order; the page puts them in, each with its own heading. */
+export type OrderParts = {
+  /** Under the price: what it costs to make, for the owner. */
+  readonly cost?: ReactNode;
+  /** How it is cut. */
+  readonly cutting?: ReactNode;
+  /** What goes into it, formula by formula; as wide as the page. */
+  readonly kitchen?: ReactNode;
+  /** What is printed for it. */
+  readonly cards?: ReactNode;
+};
+
+type Props = { readonly order: StaffOrder; readonly menu: Menu; readonly parts?: OrderParts };
 
 /** How much of the drawing is filled in by how far the cake is. */
 const made: Readonly<Record<OrderStatus, number>> = {
@@ -49,7 +61,7 @@ const aboutAllergies: readonly Advice['code'][] = [
 ];
 
 /** One order, everything in one place; what may be done is what the server says. */
-export function OrderView({ order, menu }: Props) {
+export function OrderView({ order, menu, parts = {} }: Props) {
   const [act, setAct] = useState<OrderAct | null>(null);
   const { cake, look } = order.design;
   const { locale, labelRegion, kitchenNotice } = menu.studio;
@@ -75,6 +87,7 @@ export function OrderView({ order, menu }: Props) {
               <p className="text-sm text-slate">{order.estimate.keepCool}</p>
             )}
           </Rim>
+          {parts.cost}
           <Section title="Messages">
             <OrderMessages order={order} menu={menu} />
           </Section>
@@ -102,8 +115,11 @@ export function OrderView({ order, menu }: Props) {
           <Section title="What is in it">
             <MadeWith offer={order.estimate} region={labelRegion} kitchenNotice={kitchenNotice} />
           </Section>
+          {parts.cards}
+          {parts.cutting}
         </div>
       </div>
+      {parts.kitchen}
       <Section title="Photos">
         <OrderPhotos order={order} />
       </Section>
