@@ -1,6 +1,5 @@
 import * as z from 'zod/mini';
-import { minor, slug } from '#shared/contracts/common.ts';
-import { priceBook } from '#shared/contracts/menu.ts';
+import { minor } from '#shared/contracts/common.ts';
 import { decorationSource } from '#shared/contracts/vocabulary.ts';
 
 /** Shapes of the JSON columns; each is checked on the way in and on the way out. */
@@ -52,23 +51,3 @@ export const mailAttachment = z.object({
 });
 export type MailAttachment = z.infer<typeof mailAttachment>;
 export const mailAttachments = z.array(mailAttachment);
-
-const pricesById = z.record(slug, minor);
-
-/**
- * Every price of the studio: what the public price book says, the surcharges and prices by
- * catalogue id (absent means none), and what only the owner sees.
- */
-export const priceBookContent = z.object({
-  ...z.omit(priceBook, { versionId: true }).shape,
-  /** Per portion. */
-  spongeSurcharges: pricesById,
-  fillingSurcharges: pricesById,
-  styleSurcharges: pricesById,
-  coveringSurcharges: pricesById,
-  decorationPrices: pricesById,
-  extraPrices: pricesById,
-  labourPerHourMinor: minor,
-  overheadPpm: z.int(),
-});
-export type PriceBookContent = z.infer<typeof priceBookContent>;

@@ -1,7 +1,7 @@
 import type { CreationAttributes } from 'sequelize';
 import type { Estimate } from '#shared/contracts/estimates.ts';
 import { currentClock } from '#api/db/current-database.ts';
-import type { PriceBookContent } from '#api/db/json-shapes.ts';
+import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { Occasion } from '#api/db/models/occasion.ts';
 import { Order } from '#api/db/models/order.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
@@ -57,9 +57,12 @@ const emptyPriceBook: PriceBookContent = {
   styleSurcharges: {},
   coveringSurcharges: {},
   decorationPrices: {},
+  decoratingPerHourMinor: 0,
+  materialsMarkupPpm: 0,
   extraPrices: {},
   labourPerHourMinor: 0,
   overheadPpm: 0,
+  packaging: [],
 };
 
 /** An account with a proven address. */

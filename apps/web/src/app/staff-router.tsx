@@ -3,6 +3,7 @@ import { paths } from '#web/config/paths.ts';
 import { lazyPage } from '#web/lib/lazy-page.ts';
 import { NotFoundPage } from '#web/routes/not-found-page.tsx';
 import { StaffLayout } from './staff-layout.tsx';
+import { StudioLayout } from './studio-layout.tsx';
 
 const CalendarPage = lazyPage(
   async () => (await import('#web/routes/staff/calendar-page.tsx')).CalendarPage,
@@ -31,7 +32,9 @@ export function StaffRouter() {
         <Route path="orders" element={<OrdersPage />} />
         <Route path="orders/:number" element={<StaffOrderPage />} />
         <Route path="mail/:id" element={<SentMailPage />} />
-        <Route path="studio" element={<PeoplePage />} />
+        <Route path="studio" element={<StudioLayout />}>
+          <Route index element={<PeoplePage />} />
+        </Route>
         <Route path="me" element={<MePage />} />
         <Route path="*" element={<NotFoundPage />} />
       </Route>

@@ -43,6 +43,7 @@ export const paths = {
   staffCalendarAt: (view: CalendarViewName, date: string) =>
     `/staff/calendar?view=${view}&date=${date}`,
   staffPeople: '/staff/studio',
+  staffPrices: '/staff/studio/prices',
   staffMe: '/staff/me',
   staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,
 } as const;

@@ -5,9 +5,9 @@ import type {
   InferCreationAttributes,
   Sequelize,
 } from 'sequelize';
+import { priceBookContent } from '#shared/contracts/prices.ts';
+import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { instant, integer, json, key, nullable, text, writtenAt } from '../columns.ts';
-import { priceBookContent } from '../json-shapes.ts';
-import type { PriceBookContent } from '../json-shapes.ts';
 
 /** Every price of the studio as it stood; never changed in place. */
 export class PriceBookVersion extends Model<

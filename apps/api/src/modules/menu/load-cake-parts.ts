@@ -2,8 +2,9 @@ import type { AllergenEntry, Contents, Menu } from '#shared/contracts/menu.ts';
 import { finishId } from '#shared/contracts/vocabulary.ts';
 import { deriveContents } from '#shared/kitchen/derive-contents.ts';
 import type { FormulaNode } from '#shared/kitchen/derive-contents.ts';
+import { decorationPrice } from '#shared/kitchen/decoration-price.ts';
 import { mergeAllergens } from '#shared/kitchen/merge-allergens.ts';
-import type { PriceBookContent } from '#api/db/json-shapes.ts';
+import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { ButtercreamStyle } from '#api/db/models/buttercream-style.ts';
 import { CoveringFinish } from '#api/db/models/covering-finish.ts';
 import { Covering } from '#api/db/models/covering.ts';
@@ -111,7 +112,7 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
       edge: row.edge,
       sources: row.sources,
       needs: row.detail,
-      priceMinor: prices.decorationPrices[row.id] ?? 0,
+      priceMinor: decorationPrice(row, prices),
       per: row.per,
       minutes: row.minutes,
       madeAhead: row.madeAhead,

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { Op } from 'sequelize';
 import type { Menu, PolicyText, PriceBook } from '#shared/contracts/menu.ts';
 import { portionSizeId } from '#shared/contracts/vocabulary.ts';
-import type { PriceBookContent } from '#api/db/json-shapes.ts';
+import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { AllergyRule } from '#api/db/models/allergy-rule.ts';
 import { Extra } from '#api/db/models/extra.ts';
 import { Occasion } from '#api/db/models/occasion.ts';

@@ -1,4 +1,4 @@
-import type { PriceBookContent } from '#api/db/json-shapes.ts';
+import type { PriceBookContent } from '#shared/contracts/prices.ts';
 
 /**
  * The first price book, US cents. Cakes are not taxed as bakery food sold cold to take away;
@@ -47,26 +47,10 @@ export const firstPriceBook: PriceBookContent = {
   },
   styleSurcharges: { swiss: 40, italian: 50, french: 50, german: 45, russian: 20 },
   coveringSurcharges: { fondant: 120, ganache: 80 },
-  // Minutes at 70 cents and materials with a third on top, to the nearest half dollar.
-  decorationPrices: {
-    'sugar-flower': 1500,
-    'sugar-leaves': 600,
-    'fresh-flowers': 2400,
-    'pressed-flowers': 2600,
-    'piped-border': 900,
-    'fine-lace': 3600,
-    pearls: 850,
-    sprinkles: 700,
-    'chocolate-drip': 1000,
-    'hand-lettering': 1550,
-    'edible-print': 1600,
-    'wafer-ruffles': 3100,
-    'fresh-fruit': 1550,
-    figure: 5700,
-    topper: 950,
-    ribbon: 650,
-    'gold-leaf': 2050,
-  },
+  // The rest are priced by their minutes and materials; bought flowers vary, so theirs is fixed.
+  decorationPrices: { 'fresh-flowers': 2400 },
+  decoratingPerHourMinor: 4200,
+  materialsMarkupPpm: 333_333,
   extraPrices: {
     candles: 450,
     'number-candle': 350,
@@ -78,4 +62,10 @@ export const firstPriceBook: PriceBookContent = {
   },
   labourPerHourMinor: 3200,
   overheadPpm: 180_000,
+  packaging: [
+    { upToMm: 160, boxMinor: 140, boardMinor: 60 },
+    { upToMm: 260, boxMinor: 260, boardMinor: 110 },
+    { upToMm: 400, boxMinor: 480, boardMinor: 240 },
+    { upToMm: 660, boxMinor: 720, boardMinor: 420 },
+  ],
 };
