@@ -235,6 +235,9 @@ const table: Readonly<Record<string, Line>> = {
     onOrder('lift-stop', { about: 'egg', reason: 'We talked.' }),
   ),
   'renew-link': line(staff, onOrder('link')),
+  'read-messages': line(staff, ({ order }) =>
+    post(`/api/staff/orders/${order.number}/messages/read`),
+  ),
   'write-staff-message': line(staff, onOrder('messages', { body: 'See you on Saturday.' })),
   'see-mail': line(staff, ({ mail }) => ({ path: `/api/staff/mail/${mail.id}` })),
   'send-mail-again': line(staff, ({ mail }) => post(`/api/staff/mail/${mail.id}/send-again`)),

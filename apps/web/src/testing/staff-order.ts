@@ -58,6 +58,7 @@ export function staffOrderFixture(changes: Partial<StaffOrder> = {}): StaffOrder
         reachBy: 'email',
       },
     ],
+    unread: 0,
     messages: [],
     photos: [],
     events: [],

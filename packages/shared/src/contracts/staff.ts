@@ -12,7 +12,7 @@ import {
 } from './common.ts';
 import { design } from './design.ts';
 import { advice, estimate, price } from './estimates.ts';
-import { message, pickup } from './orders.ts';
+import { liftedStop, message, pickup } from './orders.ts';
 import { photo } from './photos.ts';
 import { adviceLevel, orderStatus, taskKind } from './vocabulary.ts';
 
@@ -90,6 +90,28 @@ export const declaredAllergy = z.object({
 });
 export type DeclaredAllergy = z.infer<typeof declaredAllergy>;
 
+/**
+ * A stop that is still open, and what it waits for: an answer to what was told in words, a talk to
+ * be recorded, the owner's written reason, the customer's having read that reason, or nothing, where
+ * the owner's own table refuses it.
+ */
+export const blocker = z.object({
+  ...advice.shape,
+  waitsFor: z.enum(['answer', 'talk', 'reason', 'customer', 'nothing']),
+  /** The talk about it, where it is not about a declared allergy, which keeps its own. */
+  talked: z.nullable(z.object({ text: z.string(), by: z.string(), at: instant })),
+});
+export type Blocker = z.infer<typeof blocker>;
+
+/** A lifted stop as the staff read it, beside what the customer reads. */
+export const staffLiftedStop = z.object({
+  ...liftedStop.shape,
+  code: z.string(),
+  about: z.string(),
+  plain: z.string(),
+});
+export type StaffLiftedStop = z.infer<typeof staffLiftedStop>;
+
 export const sentMailRow = z.object({
   id,
   template: z.string(),
@@ -131,6 +153,8 @@ export const staffOrder = z.object({
     }),
   ),
   messages: z.array(message),
+  /** How many of the customer's messages nobody has opened. */
+  unread: z.int(),
   photos: z.array(photo),
   events: z.array(orderEvent),
   mail: z.array(sentMailRow),
@@ -145,7 +169,8 @@ export const staffOrder = z.object({
     }),
   ),
   /** What must be settled before it may be confirmed. */
-  blockers: z.array(advice),
+  blockers: z.array(blocker),
+  lifted: z.array(staffLiftedStop),
   can: z.object({
     confirm: z.boolean(),
     decline: z.boolean(),
@@ -156,6 +181,7 @@ export const staffOrder = z.object({
     uncollected: z.boolean(),
     write: z.boolean(),
     answerAllergy: z.boolean(),
+    recordTalk: z.boolean(),
     liftStop: z.boolean(),
     renewLink: z.boolean(),
     addPhotos: z.boolean(),
@@ -169,7 +195,7 @@ export const confirmationLook = z.object({
   rowVersion,
   price,
   email: z.object({ to: z.string(), subject: z.string(), text: z.string(), html: z.string() }),
-  blockers: z.array(advice),
+  blockers: z.array(blocker),
   fits: z.object({ fits: z.boolean(), sentence: z.string() }),
 });
 export type ConfirmationLook = z.infer<typeof confirmationLook>;
@@ -217,6 +243,14 @@ export const answerAllergy = z.object({
   text: requiredLine(1000, 'Write what was said and settled.'),
 });
 export type AnswerAllergy = z.infer<typeof answerAllergy>;
+
+/** `POST .../talks`: the talk about a stop that no declared allergy stands behind. */
+export const recordTalk = z.object({
+  rowVersion,
+  about: z.string().check(z.maxLength(300)),
+  text: requiredLine(1000, 'Write what was said and settled.'),
+});
+export type RecordTalk = z.infer<typeof recordTalk>;
 
 /** `POST .../lift-stop`: the owner's written reason, which stays and which the customer reads. */
 export const liftStop = z.object({

@@ -8,7 +8,7 @@ import { OrderEvent } from '#api/db/models/order-event.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { User } from '#api/db/models/user.ts';
 import { mailOfOrder } from '#api/modules/mail/sent-mail.queries.ts';
-import { messagesOf } from '#api/modules/messages/messages.queries.ts';
+import { messagesOf, unreadOf } from '#api/modules/messages/messages.queries.ts';
 import { designOf } from '#api/modules/orders/order-design.queries.ts';
 import { loadOrderRecord } from '#api/modules/orders/orders.queries.ts';
 import type { OrderRecord } from '#api/modules/orders/orders.queries.ts';
@@ -26,6 +26,8 @@ export type StaffOrderPage = OrderRecord & {
   readonly fits: Fit;
   readonly tasks: PlannedTask[];
   readonly messages: Message[];
+  /** Messages of the customer that nobody in the studio has opened. */
+  readonly unread: number;
   readonly photos: Photo[];
   readonly events: readonly OrderEvent[];
   readonly mail: SentMailRow[];
@@ -38,12 +40,13 @@ export type StaffOrderPage = OrderRecord & {
 export async function loadStaffOrderPage(order: Order): Promise<StaffOrderPage> {
   const record = await loadOrderRecord(order);
   const { revision } = record;
-  const [holds, fits, tasks, messages, photos, events, mail, handover, blockers] =
+  const [holds, fits, tasks, messages, unread, photos, events, mail, handover, blockers] =
     await Promise.all([
       activeHoldsOf([order.id]),
       loadFit(record),
       plannedTasksOf([order.id]),
       messagesOf(order.id),
+      unreadOf([order.id]),
       photosOf([order.id]),
       OrderEvent.findAll({ where: { orderId: order.id }, order: [['seq', 'ASC']] }),
       mailOfOrder(order.id),
@@ -56,6 +59,7 @@ export async function loadStaffOrderPage(order: Order): Promise<StaffOrderPage> 
     fits,
     tasks: tasks.get(order.id) ?? [],
     messages,
+    unread: unread.get(order.id) ?? 0,
     photos: photos.get(order.id) ?? [],
     events,
     mail,

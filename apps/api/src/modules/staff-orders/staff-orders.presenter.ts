@@ -35,6 +35,7 @@ export function presentStaffOrder(page: StaffOrderPage, actor: Actor): StaffOrde
       reachBy: contact.reachBy,
     })),
     messages: page.messages,
+    unread: page.unread,
     photos: page.photos,
     events: page.events.map((event) => ({
       seq: event.seq,

@@ -12,7 +12,7 @@ import { createRoutes } from '#api/http/route.ts';
 import type { FeatureRoutes } from '#api/http/route.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { previewConfirmation } from '#api/modules/mail/confirmed-mail.queries.ts';
-import { readMessages } from '#api/modules/messages/read-messages.command.ts';
+import { readMessages as readMessagesCommand } from '#api/modules/messages/read-messages.command.ts';
 import { writeMessage as writeMessageCommand } from '#api/modules/messages/write-message.command.ts';
 import { findOrderByNumber, loadCurrentRevision } from '#api/modules/orders/orders.queries.ts';
 import { authoriseStaff } from './authorise-staff.ts';
@@ -59,10 +59,25 @@ export function staffOrdersRoutes(deps: Deps): FeatureRoutes {
     async ({ actor, params: { number } }) => {
       authoriseStaff(actor, 'see-orders');
       const order = await findOrderByNumber(Number(number));
-      const page = await loadStaffOrderPage(order);
-      // Whoever has the page open has what the customer wrote before their eyes.
-      await readMessages(order.id);
-      return presentStaffOrder(page, actor);
+      return presentStaffOrder(await loadStaffOrderPage(order), actor);
+    },
+  );
+
+  routes.add(
+    {
+      name: 'read-messages',
+      method: 'post',
+      path: '/api/staff/orders/:number/messages/read',
+      summary: 'Note that the studio has opened what the customer wrote.',
+      params,
+      response: staffOrder,
+      refusals: ['not-found'],
+    },
+    async ({ actor, params: { number } }) => {
+      authoriseStaff(actor, 'see-orders');
+      const order = await findOrderByNumber(Number(number));
+      await readMessagesCommand(order.id);
+      return presentStaffOrder(await loadStaffOrderPage(order), actor);
     },
   );
 

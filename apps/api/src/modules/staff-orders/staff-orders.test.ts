@@ -356,6 +356,8 @@ describe('messages and links', () => {
       orderList.parse((await baker.get('/api/staff/orders?find=Wendeline')).body).rows[0]?.unread;
     expect(await unread()).toBe(1);
     await look(number);
+    expect(await unread()).toBe(1);
+    await baker.post(`/api/staff/orders/${number}/messages/read`, {});
     expect(await unread()).toBe(0);
     await baker.post(`/api/staff/orders/${number}/messages`, { body: 'Gladly.' });
     const view = orderView.parse((await guest.get(`/api/orders/${code}`)).body);

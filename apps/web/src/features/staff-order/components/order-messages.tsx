@@ -1,3 +1,4 @@
+import { useEffect } from 'react';
 import { writeMessage } from '#shared/contracts/orders.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
@@ -7,12 +8,18 @@ import { FormProblems, errorOf } from '#web/components/ui/form-problems.tsx';
 import { TextArea } from '#web/components/ui/text-area.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
 import { useContractForm } from '#web/lib/use-contract-form.ts';
+import { useReadMessages } from '../api/read-messages.ts';
 import { useWriteToCustomer } from '../api/write-to-customer.ts';
 
 type Props = { readonly order: StaffOrder; readonly menu: Menu };
 
 /** What was written both ways, and a place to write. */
 export function OrderMessages({ order, menu }: Props) {
+  const { mutate: read } = useReadMessages(order.number);
+  const unread = order.unread > 0;
+  useEffect(() => {
+    if (unread) read();
+  }, [unread, read]);
   return (
     <div className="grid gap-4">
       <MessagesList
