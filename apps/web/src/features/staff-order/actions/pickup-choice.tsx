@@ -24,6 +24,7 @@ type Props = {
   readonly onChosen: (chosen: Chosen) => void;
 };
 
+/** Two whole weeks, so that the same weekday stands above and below itself. */
 const shownDays = 14;
 
 const answerWords: Readonly<Record<DayAnswer['answer'], string>> = {
@@ -65,7 +66,7 @@ export function PickupChoice({ order, studio, chosen, error, onChosen }: Props) 
         ) : (
           <div
             className={classNames(
-              'grid grid-cols-[repeat(auto-fill,minmax(4.25rem,1fr))] gap-2',
+              'grid grid-cols-[repeat(auto-fill,minmax(4.25rem,1fr))] gap-2 sm:grid-cols-7',
               dates.isPlaceholderData && 'opacity-60',
             )}
           >

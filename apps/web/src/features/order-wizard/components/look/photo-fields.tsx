@@ -21,7 +21,9 @@ export function PhotoFields() {
   // Read when Undo is pressed: other pictures may have arrived by then.
   const { getValues } = useFormContext<OrderForm>();
   const id = useId();
-  const room = menu.maxPhotos - photos.length - onTheirWay.length;
+  // What was refused will never arrive, so it takes nobody's place.
+  const coming = onTheirWay.filter((it) => it.state !== 'refused').length;
+  const room = menu.maxPhotos - photos.length - coming;
 
   const add = (files: readonly File[]) => {
     queue.add(files.slice(0, Math.max(0, room)).map((file) => ({ file, name: file.name })));
