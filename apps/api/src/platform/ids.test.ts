@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { deriveKey, hashKey, newId, newKey, newOrderCode } from './ids.ts';
+import { deriveKey, hashKey, newCareCode, newId, newKey, newOrderCode } from './ids.ts';
 
 const many = <T>(make: () => T): T[] => Array.from({ length: 2000 }, make);
 
@@ -25,6 +25,14 @@ describe('newOrderCode', () => {
 
   it('uses all of them', () => {
     expect(new Set(many(newOrderCode).join('')).size).toBe(32);
+  });
+});
+
+describe('newCareCode', () => {
+  it('has sixteen characters of the same alphabet and never comes twice', () => {
+    const codes = many(newCareCode);
+    for (const code of codes) expect(code).toMatch(/^[0-9A-HJKMNP-TV-Z]{16}$/);
+    expect(new Set(codes).size).toBe(2000);
   });
 });
 

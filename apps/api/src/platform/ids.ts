@@ -24,7 +24,16 @@ export function newId(): string {
 
 /** Ten characters, 50 random bits: names an order in addresses and grants nothing. */
 export function newOrderCode(): string {
-  return Array.from(randomBytes(10), (byte) => base32.charAt(byte & 31)).join('');
+  return codeOf(10);
+}
+
+/** Sixteen characters, 80 random bits: opens the page about one cake and nothing else. */
+export function newCareCode(): string {
+  return codeOf(16);
+}
+
+function codeOf(length: number): string {
+  return Array.from(randomBytes(length), (byte) => base32.charAt(byte & 31)).join('');
 }
 
 /** A secret of 128 bits for a link or a claim. Only its hash is stored. */

@@ -4,6 +4,8 @@ import { orders } from './0003-orders.ts';
 import { plan } from './0004-plan.ts';
 import { people } from './0005-people.ts';
 import { moneyAndMail } from './0006-money-and-mail.ts';
+import { careCodes } from './0008-care-codes.ts';
+import { cuttingCakes } from './0009-cutting-cakes.ts';
 import type { Migration } from './migration.ts';
 
 /** Every migration in the order they run. Names are fixed once released; new ones go last. */
@@ -14,4 +16,6 @@ export const migrations: readonly Migration[] = [
   plan,
   people,
   moneyAndMail,
+  careCodes,
+  cuttingCakes,
 ];

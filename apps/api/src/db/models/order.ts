@@ -8,6 +8,7 @@ import type {
 } from 'sequelize';
 import { orderStatuses } from '#shared/contracts/vocabulary.ts';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
+import { newCareCode } from '#api/platform/ids.ts';
 import {
   flag,
   instant,
@@ -50,6 +51,10 @@ export class Order extends Model<InferAttributes<Order>, InferCreationAttributes
   declare number: number;
   /** In addresses; grants nothing. */
   declare code: string;
+  /** Opens the page about the cake alone: no name, price or contact. */
+  declare careCode: CreationOptional<string | null>;
+  /** What the owner has said may be printed as "not known"; anything else stops a label again. */
+  declare unknownConfirmed: string | null;
   declare status: OrderStatus;
   declare rowVersion: CreationOptional<number>;
   declare currentRevisionId: string | null;
@@ -106,6 +111,8 @@ export function initOrder(sequelize: Sequelize): void {
       id: key(),
       number: integer(),
       code: text(),
+      careCode: { ...nullable(text()), defaultValue: newCareCode },
+      unknownConfirmed: nullable(text()),
       status: oneOf(orderStatuses),
       rowVersion: withDefault(integer(), 1),
       currentRevisionId: nullable(text()),
