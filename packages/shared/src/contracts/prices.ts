@@ -33,6 +33,8 @@ export const priceBookContent = z.object({
   /** What an hour of anybody's work costs the studio. */
   labourPerHourMinor: minor,
   overheadPpm: z.int(),
+  /** The share of the net price the owner wants left: what a cake is measured against. */
+  targetMarginPpm: z._default(z.int(), 250_000),
   packaging: z._default(z.array(packagingBand), []),
 });
 export type PriceBookContent = z.infer<typeof priceBookContent>;

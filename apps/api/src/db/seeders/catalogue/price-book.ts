@@ -62,6 +62,7 @@ export const firstPriceBook: PriceBookContent = {
   },
   labourPerHourMinor: 3200,
   overheadPpm: 180_000,
+  targetMarginPpm: 250_000,
   packaging: [
     { upToMm: 160, boxMinor: 140, boardMinor: 60 },
     { upToMm: 260, boxMinor: 260, boardMinor: 110 },
