@@ -15,7 +15,7 @@ import { newId, newOrderCode } from '#api/platform/ids.ts';
 
 /** An estimate of nothing in particular, for rows that need one. */
 export const emptyEstimate: Estimate = {
-  portions: { wanted: 20, fed: 20, perTier: [20] },
+  portions: { wanted: 20, fed: 20, perTier: [20], perCuttingCake: [] },
   proposals: [],
   price: {
     currency: 'USD',
@@ -32,6 +32,7 @@ export const emptyEstimate: Estimate = {
   ranks: [],
   advice: [],
   weightG: 0,
+  pieces: [],
   amounts: { spongeG: 0, fillingG: 0, frostingG: 0, coveringG: 0 },
   heightMm: 0,
   keepCool: '',
@@ -62,6 +63,7 @@ const emptyPriceBook: PriceBookContent = {
   extraPrices: {},
   labourPerHourMinor: 0,
   overheadPpm: 0,
+  targetMarginPpm: 250_000,
   packaging: [],
 };
 

@@ -57,6 +57,7 @@ export function orderForm(date: string, changes: FormChanges = {}): SubmitOrder 
       tiers: [roundTier(8)],
       sheet: null,
       coating: { covering: 'buttercream', style: 'swiss', finish: 'smooth', colour: null },
+      cuttingCakes: [],
       ...changes.cake,
     },
     setting: {

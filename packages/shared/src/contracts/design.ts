@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { colourHex, line, prose, slug } from './common.ts';
+import { colourHex, line, minuteOfDay, prose, slug } from './common.ts';
 import {
   allergenId,
   coveringId,
@@ -87,6 +87,22 @@ export const sheet = z.object({
 });
 export type Sheet = z.infer<typeof sheet>;
 
+/**
+ * Plain sheets that stay in the kitchen and are cut there, to feed those whom the cake on show does
+ * not. They are coated in the cake's own buttercream or ganache, smooth and untinted.
+ */
+export const cuttingCake = z.object({
+  sizeId: slug,
+  /** How many of this kind. */
+  count: z
+    .int('Write a whole number.')
+    .check(z.minimum(1, 'At least one.'), z.maximum(100, 'At most 100 of one kind.')),
+  layers: z.int().check(z.minimum(1), z.maximum(3)),
+  spongeId: z.nullable(slug).check(z.refine((it) => it !== null, 'Choose a sponge.')),
+  fillingId: z.nullable(slug),
+});
+export type CuttingCake = z.infer<typeof cuttingCake>;
+
 /** The cake itself. Tiers are listed from the board upwards. */
 export const cake = z
   .object({
@@ -94,6 +110,10 @@ export const cake = z
     tiers: z.array(tier).check(z.maxLength(6, 'At most six tiers.')),
     sheet: z.nullable(sheet),
     coating: z.nullable(coating),
+    cuttingCakes: z._default(
+      z.array(cuttingCake).check(z.maxLength(6, 'At most six kinds of cutting cake.')),
+      [],
+    ),
   })
   .check(
     z.refine((it) => it.kind !== 'tiered' || it.tiers.length > 0, {
@@ -105,9 +125,13 @@ export const cake = z
       path: ['sheet'],
     }),
     z.refine(
-      (it) => it.kind !== 'tiered' || it.tiers.length === 0 || it.tiers.some((t) => t.real),
+      (it) =>
+        it.kind !== 'tiered' ||
+        it.tiers.length === 0 ||
+        it.tiers.some((t) => t.real) ||
+        it.cuttingCakes.length > 0,
       {
-        message: 'At least one tier must be real cake.',
+        message: 'At least one tier must be real cake, or a cutting cake must feed the guests.',
         path: ['tiers'],
       },
     ),
@@ -167,6 +191,8 @@ export const setting = z.object({
   ),
   minutesOut: z.int().check(z.minimum(0), z.maximum(24 * 60, 'At most a day.')),
   driveMinutes: z.int().check(z.minimum(0), z.maximum(12 * 60, 'At most twelve hours.')),
+  /** When it is cut, minutes since midnight where it stands; null while nobody knows. */
+  servedAt: z._default(z.nullable(minuteOfDay), null),
 });
 export type Setting = z.infer<typeof setting>;
 

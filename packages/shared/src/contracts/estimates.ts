@@ -2,7 +2,7 @@ import * as z from 'zod/mini';
 import { id, localDate, minor } from './common.ts';
 import { allergenEntry } from './menu.ts';
 import { adviceLevel, coveringId, styleId } from './vocabulary.ts';
-import { cake, design, look, setting, tier } from './design.ts';
+import { cake, cuttingCake, design, look, setting, sheet, tier } from './design.ts';
 
 /** `POST /api/estimates`: a design, and the day it is for if one is chosen (rush, season). */
 export const estimateRequest = z.object({
@@ -15,6 +15,7 @@ export const priceLine = z.object({
   kind: z.enum([
     'tier',
     'sheet',
+    'cutting-cake',
     'sponge',
     'filling',
     'frosting',
@@ -23,6 +24,7 @@ export const priceLine = z.object({
     'finish',
     'extra',
     'rush',
+    'delivery',
     'minimum',
     'discount',
     'tax',
@@ -91,10 +93,20 @@ export const advice = z.object({
   step: z.enum(['day', 'cake', 'setting', 'look']),
   /** What it is about: a tier, a part, an allergen; for keys and links. */
   about: z.string(),
+  /** To the customer, kindly. */
   sentence: z.string(),
+  /** The same to whoever bakes it, plainly; empty in what was worked out before it was said. */
+  plain: z._default(z.string(), ''),
   /** What to do instead; empty if there is nothing. */
   instead: z.string(),
-  ways: z.array(z.object({ label: z.string(), patch: designPatch })),
+  ways: z.array(
+    z.object({
+      label: z.string(),
+      /** What one press changes, part by part: "Vanilla sponge becomes Dark cocoa sponge". */
+      changes: z._default(z.array(z.string()), []),
+      patch: designPatch,
+    }),
+  ),
   /** A stop that the owner may lift with a written reason after talking. */
   talk: z.boolean(),
 });
@@ -106,7 +118,10 @@ export const proposal = z.object({
   /** "just enough", "some over". */
   blurb: z.string(),
   portions: z.int(),
+  /** The stack on show; empty where a sheet is proposed. */
   tiers: z.array(tier),
+  sheet: z._default(z.nullable(sheet), null),
+  cuttingCakes: z._default(z.array(cuttingCake), []),
   priceMinor: minor,
 });
 export type Proposal = z.infer<typeof proposal>;
@@ -127,12 +142,24 @@ export const containedAllergen = z.object({
 });
 export type ContainedAllergen = z.infer<typeof containedAllergen>;
 
+/** One tier, the sheet, or one of a kind of cutting cake, as somebody lifts it. */
+export const carriedPiece = z.object({
+  kind: z.enum(['tier', 'sheet', 'cutting-cake']),
+  /** From the board up, or into the cutting cakes. */
+  index: z.int(),
+  count: z.int(),
+  weightG: z.int(),
+});
+export type CarriedPiece = z.infer<typeof carriedPiece>;
+
 export const estimate = z.object({
   portions: z.object({
     wanted: z.int(),
     fed: z.int(),
     /** Per tier from the board up (a sheet has one entry); dummies and keepsakes are 0. */
     perTier: z.array(z.int()),
+    /** Per kind of cutting cake, all of its count together. */
+    perCuttingCake: z._default(z.array(z.int()), []),
   }),
   proposals: z.array(proposal),
   price,
@@ -140,8 +167,10 @@ export const estimate = z.object({
   handled: z.array(allergenEntry),
   ranks: z.array(coatRank),
   advice: z.array(advice),
-  /** Grams, the whole cake on its board as carried; 0 before it exists. */
+  /** Grams, the whole cake on its board as carried, without cutting cakes; 0 before it exists. */
   weightG: z.int(),
+  /** Grams of each piece as it is lifted: tiers on their cards from the board up, cutting cakes. */
+  pieces: z._default(z.array(carriedPiece), []),
   /** Grams per part kind of the whole cake: what goes into it. */
   amounts: z.object({
     spongeG: z.int(),

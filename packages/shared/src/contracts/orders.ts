@@ -106,7 +106,6 @@ export const submitOrder = z
     ),
   );
 export type SubmitOrder = z.infer<typeof submitOrder>;
-export type SubmitOrderInput = z.input<typeof submitOrder>;
 
 /** The answer to sending an order. */
 export const submittedOrder = z.object({
@@ -127,6 +126,25 @@ export const message = z.object({
   at: instant,
 });
 export type Message = z.infer<typeof message>;
+
+/**
+ * A stop the owner takes the order against, for a written reason that stays; nothing is confirmed
+ * before the customer has read and accepted it.
+ */
+export const liftedStop = z.object({
+  id,
+  /** What was stopped, as the customer was told. */
+  sentence: z.string(),
+  reason: z.string(),
+  by: z.string(),
+  at: instant,
+  acceptedAt: z.nullable(instant),
+});
+export type LiftedStop = z.infer<typeof liftedStop>;
+
+/** `POST /api/orders/:code/accept-lifted-stop` */
+export const acceptLiftedStop = z.object({ rowVersion, liftedStopId: id });
+export type AcceptLiftedStop = z.infer<typeof acceptLiftedStop>;
 
 /** Coarse on purpose: a finer clock invites worry. */
 export const progressStages = [
@@ -166,6 +184,7 @@ export const orderView = z.object({
   collector: z.nullable(z.object({ name: z.string(), phone: z.string() })),
   photos: z.array(photo),
   messages: z.array(message),
+  lifted: z.array(liftedStop),
   createdAt: instant,
   /** Nearest open days, after a decline. */
   otherDates: z.array(localDate),
@@ -175,6 +194,7 @@ export const orderView = z.object({
     write: z.boolean(),
     addPhotos: z.boolean(),
     seeCalendarFile: z.boolean(),
+    acceptLifted: z.boolean(),
   }),
 });
 export type OrderView = z.infer<typeof orderView>;

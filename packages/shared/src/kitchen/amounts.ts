@@ -1,5 +1,7 @@
-import { boardOf, areaMm2, doubleHeightMm, ledgesOf, perimeterMm, volumeMl } from './sizes.ts';
-import type { ResolvedDesign, ResolvedTier } from './resolve-design.ts';
+import type { CarriedPiece } from '#shared/contracts/estimates.ts';
+import { looseDecorationsG, pipedPerTier } from './piped.ts';
+import type { ResolvedBody, ResolvedDesign } from './resolve-design.ts';
+import { areaMm2, boardOf, doubleHeightMm, ledgesOf, perimeterMm, volumeMl } from './sizes.ts';
 
 /**
  * The studio's defaults. Thicknesses and the tenth for bowl and bag are from the kitchen's
@@ -23,19 +25,30 @@ export const amountRules = {
   dummyGPerMl: 0.03,
 } as const;
 
-/** Grams of one tier: what goes into it, and what of that is carried. */
-export type TierAmounts = {
+/** Grams of one tier, sheet or cutting cake: what is made for it, and what of that is carried. */
+export type BodyAmounts = {
+  /** Finished and levelled. */
   readonly spongeG: number;
+  /** What goes into its tins. */
+  readonly batterG: number;
   readonly fillingG: number;
-  /** Buttercream, bowl and bag included. */
+  /** Buttercream to make: coats, dam, borders and lettering, bowl and bag included. */
   readonly frostingG: number;
-  /** Fondant or ganache, bowl and bag included for ganache. */
+  /** What of it is on the cake. */
+  readonly frostingOnCakeG: number;
+  /** Fondant or ganache to make, bowl and bag included for ganache. */
   readonly coveringG: number;
+  readonly coveringOnCakeG: number;
+  /** With its cards, a dummy's foam too. */
   readonly carriedG: number;
 };
 
-export type CakeAmounts = Omit<TierAmounts, 'carriedG'> & {
-  readonly perTier: readonly TierAmounts[];
+type Sums = Omit<BodyAmounts, 'carriedG'>;
+
+export type CakeAmounts = Sums & {
+  readonly perTier: readonly BodyAmounts[];
+  /** Of one of each kind; the sums above count all of them. */
+  readonly perCuttingCake: readonly BodyAmounts[];
 };
 
 /**
@@ -50,13 +63,13 @@ export function batterG(
 }
 
 /** Millilitres of coat over sides and visible top, at a thickness. */
-function coatMl(tier: ResolvedTier, visibleTopMm2: number, thicknessMm: number): number {
+function coatMl(tier: ResolvedBody, visibleTopMm2: number, thicknessMm: number): number {
   const sideMm2 = perimeterMm(tier.block) * tier.block.heightMm;
   return ((sideMm2 + visibleTopMm2) * thicknessMm) / 1000;
 }
 
 /** Length times the bead's cross-section: a foot border, or foot and rim where it is piped. */
-function borderMl(tier: ResolvedTier): number {
+function borderMl(tier: ResolvedBody): number {
   const piped = tier.coating?.finish === 'piped';
   const bead = piped ? amountRules.pipedBeadMm : amountRules.footBeadMm;
   const lengthMm = perimeterMm(tier.block) * (piped ? 2 : 1);
@@ -65,7 +78,7 @@ function borderMl(tier: ResolvedTier): number {
 
 type Coats = { readonly frostingMl: number; readonly coveringMl: number };
 
-function coatsOf(tier: ResolvedTier, visibleTopMm2: number): Coats {
+function coatsOf(tier: ResolvedBody, visibleTopMm2: number): Coats {
   const { crumbCoatMm, finalCoatMm, underFondantMm } = amountRules;
   const coat = (thicknessMm: number) => coatMl(tier, visibleTopMm2, thicknessMm);
   if (tier.coating === null) return { frostingMl: 0, coveringMl: 0 };
@@ -82,10 +95,18 @@ function coatsOf(tier: ResolvedTier, visibleTopMm2: number): Coats {
   }
 }
 
-/** Grams of one tier, unrounded; `visibleTopMm2` is its whole top or the ledge left in sight. */
-export function amountsOfTier(tier: ResolvedTier, visibleTopMm2: number): TierAmounts {
-  const { block, sponge, filling, coating } = tier;
-  const gaps = tier.real && filling !== null ? Math.max(0, tier.layers - 1) : 0;
+/** What is laid or piped on a body beyond its coats. */
+type OnBody = {
+  /** Its whole top, or the ledge left in sight, square millimetres. */
+  readonly visibleTopMm2: number;
+  /** Piped decorations and lettering in its own buttercream, grams on the cake. */
+  readonly pipedG: number;
+};
+
+/** Grams of one body, unrounded. */
+export function amountsOfBody(body: ResolvedBody, { visibleTopMm2, pipedG }: OnBody): BodyAmounts {
+  const { block, sponge, filling, coating } = body;
+  const gaps = body.real && filling !== null ? Math.max(0, body.layers - 1) : 0;
   const thicknessMm = filling?.thicknessMm ?? 0;
   const gapMl = (gaps * areaMm2(block) * thicknessMm) / 1000;
   const damMl =
@@ -95,59 +116,98 @@ export function amountsOfTier(tier: ResolvedTier, visibleTopMm2: number): TierAm
   const spongeG = Math.max(0, volumeMl(block) - gapMl) * (sponge?.densityGPerMl ?? 0);
   const fillingG = (gapMl - damMl) * (filling?.densityGPerMl ?? 0);
 
-  const coats = coatsOf(tier, visibleTopMm2);
-  // Ganache has no buttercream beside it, so it makes its own dam.
-  const damOfCovering = coating !== null && coating.style === null;
-  const frostingG =
-    (coats.frostingMl + (damOfCovering ? 0 : damMl)) * (coating?.style?.densityGPerMl ?? 0);
-  const coveringG =
-    (coats.coveringMl + (damOfCovering ? damMl : 0)) * (coating?.covering.densityGPerMl ?? 0);
+  const coats = coatsOf(body, visibleTopMm2);
+  // Ganache has no buttercream beside it, so it makes its own dam, borders and letters.
+  const alone = coating !== null && coating.style === null;
+  const frostingOnCakeG = alone
+    ? 0
+    : (coats.frostingMl + damMl) * (coating?.style?.densityGPerMl ?? 0) + pipedG;
+  const coveringOnCakeG =
+    (coats.coveringMl + (alone ? damMl : 0)) * (coating?.covering.densityGPerMl ?? 0) +
+    (alone ? pipedG : 0);
   const spare = 1 + amountRules.bowlAndBagPpm / 1e6;
-  const dummyG = tier.real ? 0 : volumeMl(block) * amountRules.dummyGPerMl;
+  const dummyG = body.real ? 0 : volumeMl(block) * amountRules.dummyGPerMl;
   return {
     spongeG,
+    batterG: sponge === null ? 0 : batterG(spongeG, sponge),
     fillingG,
-    frostingG: frostingG * spare,
-    coveringG: coating?.covering.id === 'ganache' ? coveringG * spare : coveringG,
-    carriedG: spongeG + fillingG + frostingG + coveringG + dummyG + cardsG(tier),
+    frostingG: frostingOnCakeG * spare,
+    frostingOnCakeG,
+    coveringG: coating?.covering.id === 'ganache' ? coveringOnCakeG * spare : coveringOnCakeG,
+    coveringOnCakeG,
+    carriedG: spongeG + fillingG + frostingOnCakeG + coveringOnCakeG + dummyG + cardsG(body),
   };
 }
 
 /** The card under a tier, and the inner one of a tall tier; both are hidden and carried. */
-function cardsG({ block }: ResolvedTier): number {
-  const cards = block.heightMm > doubleHeightMm ? 2 : 1;
+function cardsG({ block, real }: ResolvedBody): number {
+  const cards = real && block.heightMm > doubleHeightMm ? 2 : 1;
   const ml = (areaMm2(block) * amountRules.cardThicknessMm) / 1000;
   return cards * ml * amountRules.cardGPerMl;
 }
 
-/** Grams of the whole cake, unrounded, and of each tier from the board up. */
+/** Grams of the whole cake and its cutting cakes, unrounded, and of each piece. */
 export function amountsOf(resolved: ResolvedDesign): CakeAmounts {
   const ledges = ledgesOf(resolved.tiers.map((it) => it.block));
+  const piped = pipedPerTier(resolved);
   const perTier = resolved.tiers.map((tier, index) =>
-    amountsOfTier(tier, ledges[index]?.areaMm2 ?? 0),
+    amountsOfBody(tier, {
+      visibleTopMm2: ledges[index]?.areaMm2 ?? 0,
+      pipedG: piped[index] ?? 0,
+    }),
   );
-  const sum = (kind: keyof TierAmounts) => perTier.reduce((total, it) => total + it[kind], 0);
+  const perCuttingCake = resolved.cuttingCakes.map((body) =>
+    amountsOfBody(body, { visibleTopMm2: areaMm2(body.block), pipedG: 0 }),
+  );
+  const sum = (kind: keyof Sums) =>
+    perTier.reduce((total, it) => total + it[kind], 0) +
+    perCuttingCake.reduce(
+      (total, it, index) => total + it[kind] * (resolved.cuttingCakes[index]?.count ?? 0),
+      0,
+    );
   return {
     spongeG: sum('spongeG'),
+    batterG: sum('batterG'),
     fillingG: sum('fillingG'),
     frostingG: sum('frostingG'),
+    frostingOnCakeG: sum('frostingOnCakeG'),
     coveringG: sum('coveringG'),
+    coveringOnCakeG: sum('coveringOnCakeG'),
     perTier,
+    perCuttingCake,
   };
 }
 
-/** The whole cake as it is carried: tiers, cards, board and decorations; 0 before it exists. */
+/**
+ * The cake on show as it is carried: tiers, cards, board and decorations, without its cutting
+ * cakes; 0 before it exists.
+ */
 export function carriedWeightG(resolved: ResolvedDesign, amounts: CakeAmounts): number {
-  const { design, menu, decorations } = resolved;
+  const { design, menu } = resolved;
   if (design.cake === null || resolved.tiers.length === 0) return 0;
   const board = boardOf(design.cake, menu);
   const boardG = board === null ? 0 : volumeMl(board) * amountRules.boardGPerMl;
   const tiersG = amounts.perTier.reduce((sum, it) => sum + it.carriedG, 0);
-  const decorationsG = decorations.reduce(
-    (sum, it) => sum + it.decoration.weightG * it.placed.quantity,
-    0,
-  );
-  return Math.round(tiersG + boardG + decorationsG);
+  return Math.round(tiersG + boardG + looseDecorationsG(resolved));
+}
+
+/** Each piece as somebody lifts it, whole grams; a tier before anything is put on it. */
+export function carriedPieces(resolved: ResolvedDesign, amounts: CakeAmounts): CarriedPiece[] {
+  const kind = resolved.design.cake?.kind === 'sheet' ? 'sheet' : 'tier';
+  return [
+    ...amounts.perTier.map(({ carriedG }, index): CarriedPiece => ({
+      kind,
+      index,
+      count: 1,
+      weightG: Math.round(carriedG),
+    })),
+    ...resolved.cuttingCakes.map(({ index, count }): CarriedPiece => ({
+      kind: 'cutting-cake',
+      index,
+      count,
+      weightG: Math.round(amounts.perCuttingCake[index]?.carriedG ?? 0),
+    })),
+  ];
 }
 
 /** How far above the cake a thing reaches that stands on top, mm (memory). */

@@ -1,7 +1,7 @@
 import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
 import type { AllergenEntry, Menu } from '#shared/contracts/menu.ts';
 import { adviseOn } from './advice.ts';
-import { amountsOf, carriedWeightG, heightMm } from './amounts.ts';
+import { amountsOf, carriedPieces, carriedWeightG, heightMm } from './amounts.ts';
 import { mergeAllergens } from './merge-allergens.ts';
 import { containedAllergens, partsOf } from './parts.ts';
 import { countPortions } from './portions.ts';
@@ -47,6 +47,7 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
     ranks: coats.map((it) => it.rank),
     advice: adviseOn({ ...table, coats }, portions, proposals),
     weightG: carriedWeightG(resolved, amounts),
+    pieces: carriedPieces(resolved, amounts),
     amounts: {
       spongeG: Math.round(amounts.spongeG),
       fillingG: Math.round(amounts.fillingG),

@@ -15,23 +15,24 @@ export type Part = {
   readonly unread: boolean;
 };
 
-/** Every part of the whole cake once, from the inside out. */
-export function partsOf({ tiers, decorations }: ResolvedDesign): Part[] {
+/** Every part of the whole cake and its cutting cakes once, from the inside out. */
+export function partsOf({ tiers, cuttingCakes, decorations }: ResolvedDesign): Part[] {
   const parts = new Map<string, Part>();
   const put = (part: Part) => {
     parts.set(`${part.kind}:${part.id}:${String(part.unread)}`, part);
   };
-  for (const { sponge } of tiers) {
+  const bodies = [...tiers, ...cuttingCakes];
+  for (const { sponge } of bodies) {
     if (sponge === null) continue;
     const name = named(sponge.name, 'sponge');
     put({ kind: 'sponge', id: sponge.id, name, contents: sponge.contents, unread: false });
   }
-  for (const { filling } of tiers) {
+  for (const { filling } of bodies) {
     if (filling === null) continue;
     const name = named(filling.name, 'filling');
     put({ kind: 'filling', id: filling.id, name, contents: filling.contents, unread: false });
   }
-  for (const { coating } of tiers) {
+  for (const { coating } of bodies) {
     if (coating === null) continue;
     const { covering, style } = coating;
     if (style !== null) {

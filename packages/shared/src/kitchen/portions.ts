@@ -24,16 +24,23 @@ export type PortionCount = {
   readonly wanted: number;
   readonly fed: number;
   readonly perTier: number[];
+  /** Per kind of cutting cake, all of its count together. */
+  readonly perCuttingCake: number[];
 };
 
 /** Portions wanted and served; nothing is served while there is no cake. Throws `UnknownPart`. */
 export function countPortions(design: Design, menu: Menu): PortionCount {
   const size = portionSizeOf(design.guests, menu);
   const perTier = portionsServed(design, menu, size);
+  const perCuttingCake = (design.cake?.cuttingCakes ?? []).map(
+    (it, index) =>
+      it.count * portionsOfSheet(sheetSizeOf(it, menu, ['cake', 'cuttingCakes', index]), size),
+  );
   return {
     wanted: portionsWanted(design.guests, menu),
-    fed: perTier.reduce((sum, it) => sum + it, 0),
+    fed: [...perTier, ...perCuttingCake].reduce((sum, it) => sum + it, 0),
     perTier,
+    perCuttingCake,
   };
 }
 

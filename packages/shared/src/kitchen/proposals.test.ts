@@ -73,7 +73,7 @@ describe('proposed cakes', () => {
   it('cost what they would cost if chosen', () => {
     const design = designWith({ cake: null });
     for (const { tiers, priceMinor } of propose(design)) {
-      const chosen = { kind: 'tiered' as const, tiers, sheet: null, coating: null };
+      const chosen = { kind: 'tiered' as const, tiers, sheet: null, coating: null, cuttingCakes: [] };
       const resolved = resolveDesign({ ...design, cake: chosen }, menu);
       expect(priceMinor).toBe(priceDesign(resolved, terms).totalMinor);
     }

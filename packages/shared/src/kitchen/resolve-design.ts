@@ -1,4 +1,4 @@
-import type { Coating, Design, PlacedDecoration } from '#shared/contracts/design.ts';
+import type { Cake, Coating, Design, PlacedDecoration } from '#shared/contracts/design.ts';
 import type {
   ButtercreamStyle,
   Covering,
@@ -7,12 +7,13 @@ import type {
   Filling,
   Menu,
   PortionSize,
+  SheetSize,
   Sponge,
 } from '#shared/contracts/menu.ts';
 import type { CoveringId, FinishId, StyleId } from '#shared/contracts/vocabulary.ts';
 import { portionSizeOf } from './portions.ts';
 import { named } from './sentences.ts';
-import { blocksOf, type Block } from './sizes.ts';
+import { blockOfSheet, blocksOf, type Block } from './sizes.ts';
 import { UnknownPart } from './unknown-part.ts';
 
 type Path = readonly (string | number)[];
@@ -25,9 +26,8 @@ export type ResolvedCoating = {
   readonly colour: string | null;
 };
 
-/** A tier (or the sheet) with everything it is made of; null where it is not chosen or not there. */
-export type ResolvedTier = {
-  readonly index: number;
+/** A block with everything it is made of; null where it is not chosen or not there. */
+export type ResolvedBody = {
   readonly block: Block;
   readonly layers: number;
   readonly real: boolean;
@@ -35,6 +35,16 @@ export type ResolvedTier = {
   readonly sponge: Sponge | null;
   readonly filling: Filling | null;
   readonly coating: ResolvedCoating | null;
+};
+
+/** A tier, or the sheet, by its place from the board up. */
+export type ResolvedTier = ResolvedBody & { readonly index: number };
+
+/** One kind of cutting cake, by its place in the design; the body is one of `count`. */
+export type ResolvedCuttingCake = ResolvedBody & {
+  readonly index: number;
+  readonly count: number;
+  readonly size: SheetSize;
 };
 
 export type ResolvedDecoration = {
@@ -48,6 +58,7 @@ export type ResolvedDesign = {
   readonly menu: Menu;
   readonly portionSize: PortionSize;
   readonly tiers: readonly ResolvedTier[];
+  readonly cuttingCakes: readonly ResolvedCuttingCake[];
   readonly decorations: readonly ResolvedDecoration[];
   readonly extras: readonly { readonly extra: ExtraItem; readonly quantity: number }[];
 };
@@ -62,6 +73,7 @@ export function resolveDesign(design: Design, menu: Menu): ResolvedDesign {
     menu,
     portionSize: portionSizeOf(design.guests, menu),
     tiers: resolveTiers(design, menu),
+    cuttingCakes: resolveCuttingCakes(design, menu),
     decorations: (design.look?.decorations ?? []).map((placed, index) => ({
       placed,
       decoration: find(menu.decorations, placed.decorationId, [
@@ -111,6 +123,39 @@ function resolveTiers({ cake }: Design, menu: Menu): ResolvedTier[] {
         tier.coating === null ? whole : resolveCoating(tier.coating, menu, [...path, 'coating']),
     };
   });
+}
+
+function resolveCuttingCakes({ cake }: Design, menu: Menu): ResolvedCuttingCake[] {
+  if (cake === null || cake.cuttingCakes.length === 0) return [];
+  const coating = resolveCoating(plainCoatOf(cake), menu, ['cake', 'coating']);
+  return cake.cuttingCakes.map((it, index) => {
+    const path = ['cake', 'cuttingCakes', index];
+    const size = find(menu.sheetSizes, it.sizeId, [...path, 'sizeId']);
+    return {
+      index,
+      count: it.count,
+      size,
+      block: blockOfSheet(size),
+      layers: it.layers,
+      real: true,
+      keepsake: false,
+      sponge: findOrNull(menu.sponges, it.spongeId, [...path, 'spongeId']),
+      filling: findOrNull(menu.fillings, it.fillingId, [...path, 'fillingId']),
+      coating,
+    };
+  });
+}
+
+/**
+ * What a cutting cake wears: the buttercream of the cake on show, smooth and untinted; ganache
+ * where that has no buttercream. Null while the cake has no coat.
+ */
+export function plainCoatOf({ coating }: Cake): Coating | null {
+  if (coating === null) return null;
+  const plain = { finish: 'smooth', colour: null } as const;
+  return coating.style === null
+    ? { covering: 'ganache', style: null, ...plain }
+    : { covering: 'buttercream', style: coating.style, ...plain };
 }
 
 function resolveCoating(coating: Coating | null, menu: Menu, path: Path): ResolvedCoating | null {

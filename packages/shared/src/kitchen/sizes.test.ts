@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { Cake } from '#shared/contracts/design.ts';
 import { inchesToMm, mlPerUsCup } from './measures.ts';
 import {
   areaMm2,
@@ -145,8 +146,8 @@ describe('the whole stack', () => {
 
   it('says where an unknown sheet was named', () => {
     const sheet = { sizeId: 'plate', layers: 1, spongeId: 'vanilla', fillingId: null };
-    const cake = { kind: 'sheet', tiers: [], sheet, coating: null } as const;
-    const attempt = () => blocksOf({ ...cake, tiers: [] }, menuFixture);
+    const cake: Cake = { kind: 'sheet', tiers: [], sheet, coating: null, cuttingCakes: [] };
+    const attempt = () => blocksOf(cake, menuFixture);
     expect(attempt).toThrow(UnknownPart);
     expect(attempt).toThrow(expect.objectContaining({ path: ['cake', 'sheet', 'sizeId'] }));
   });

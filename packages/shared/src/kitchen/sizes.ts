@@ -116,10 +116,17 @@ export function portionsPerTier(tiers: readonly Tier[], portion: Footprint): num
   return tiers.map((tier) => (tier.real && !tier.keepsake ? portionsOfBlock(tier, portion) : 0));
 }
 
-/** The studio's measures of a chosen sheet. Throws `UnknownPart`. */
-export function sheetSizeOf(sheet: Sheet, menu: Menu): SheetSize {
+/**
+ * The studio's measures of a chosen sheet or cutting cake; `path` leads to it in the design. Throws
+ * `UnknownPart`.
+ */
+export function sheetSizeOf(
+  sheet: Pick<Sheet, 'sizeId'>,
+  menu: Menu,
+  path: UnknownPart['path'] = ['cake', 'sheet'],
+): SheetSize {
   const size = menu.sheetSizes.find((it) => it.id === sheet.sizeId);
-  if (size === undefined) throw new UnknownPart(['cake', 'sheet', 'sizeId'], sheet.sizeId);
+  if (size === undefined) throw new UnknownPart([...path, 'sizeId'], sheet.sizeId);
   return size;
 }
 
@@ -134,8 +141,12 @@ export function blocksOf(cake: Cake, menu: Menu): Block[] {
     }));
   }
   if (cake.sheet === null) return [];
-  const { widthMm, depthMm, heightMm } = sheetSizeOf(cake.sheet, menu);
-  return [{ shape: 'rectangle', widthMm, depthMm, heightMm }];
+  return [blockOfSheet(sheetSizeOf(cake.sheet, menu))];
+}
+
+/** A sheet seen as a block of cake. */
+export function blockOfSheet({ widthMm, depthMm, heightMm }: SheetSize): Block {
+  return { shape: 'rectangle', widthMm, depthMm, heightMm };
 }
 
 /** The board the cake stands on; null while there is no cake. Throws `UnknownPart`. */

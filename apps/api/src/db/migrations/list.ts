@@ -6,6 +6,7 @@ import { people } from './0005-people.ts';
 import { moneyAndMail } from './0006-money-and-mail.ts';
 import { careCodes } from './0008-care-codes.ts';
 import { cuttingCakes } from './0009-cutting-cakes.ts';
+import { pantryDepth } from './0007-pantry-depth.ts';
 import type { Migration } from './migration.ts';
 
 /** Every migration in the order they run. Names are fixed once released; new ones go last. */

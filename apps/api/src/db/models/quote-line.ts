@@ -10,6 +10,7 @@ import { integer, key, nullable, oneOf, text, withDefault } from '../columns.ts'
 export const quoteLineKinds = [
   'tier',
   'sheet',
+  'cutting-cake',
   'sponge',
   'filling',
   'frosting',

@@ -206,6 +206,7 @@ describe('POST /api/dates', () => {
             tiers: [roundTier(8, { spongeId: 'mud' })],
             sheet: null,
             coating: design().cake?.coating ?? null,
+            cuttingCakes: [],
           },
         }),
         from: '2027-07-02',

@@ -46,6 +46,7 @@ const sheet = (
   tiers: [],
   sheet: { sizeId, layers: 2, spongeId, fillingId },
   coating,
+  cuttingCakes: [],
 });
 
 /** The rest of a busy book, in the order they are wanted. All people are invented. */

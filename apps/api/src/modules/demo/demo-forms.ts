@@ -38,6 +38,7 @@ export const demoForms = {
       tiers: [],
       sheet: { sizeId: 'half', layers: 2, spongeId: 'chocolate', fillingId: 'salted-caramel' },
       coating: coat('american', { finish: 'piped' }),
+      cuttingCakes: [],
     },
     setting: indoors,
     look: look({

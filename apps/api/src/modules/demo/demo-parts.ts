@@ -55,6 +55,7 @@ export const tiered = (coating: Coating, ...tiers: Tier[]): SubmitOrder['cake'] 
   tiers,
   sheet: null,
   coating,
+  cuttingCakes: [],
 });
 
 /** A decoration on a tier. */

@@ -1,4 +1,12 @@
-import type { Coating, Design, Look, Tier } from '#shared/contracts/design.ts';
+import type {
+  Cake,
+  Coating,
+  CuttingCake,
+  Design,
+  Look,
+  Sheet,
+  Tier,
+} from '#shared/contracts/design.ts';
 import {
   coveringId,
   dietId,
@@ -74,7 +82,13 @@ export function designOf(revision: OrderRevision): Design {
       infants: revision.infants,
       susceptible: revision.susceptibleGuests,
     },
-    cake: cakeItem === undefined ? null : cakeOf(cakeItem),
+    cake:
+      cakeItem === undefined
+        ? null
+        : cakeOf(
+            cakeItem,
+            items.filter((item) => item.kind === 'cutting'),
+          ),
     setting: {
       place: revision.settingPlace,
       warmestC: revision.settingWarmestC,
@@ -88,26 +102,37 @@ export function designOf(revision: OrderRevision): Design {
   };
 }
 
-function cakeOf(item: OrderItem): NonNullable<Design['cake']> {
+function cakeOf(item: OrderItem, cutting: readonly OrderItem[]): Cake {
   const rows = inOrder(item.tiers ?? []);
   const [first] = rows;
   // Where every tier has a coat of its own, any of them stands for the cake's.
   const shared = rows.find((row) => !row.ownCoating) ?? first;
   const coating = shared === undefined ? null : coatingOf(shared);
+  const cuttingCakes = cutting.map(cuttingCakeOf);
   if (item.kind === 'sheet') {
     return {
       kind: 'sheet',
       tiers: [],
-      sheet: {
-        sizeId: item.sheetSizeId ?? '',
-        layers: first?.layers ?? 1,
-        spongeId: first?.spongeId ?? null,
-        fillingId: first?.fillingId ?? null,
-      },
+      sheet: sheetOf(item),
       coating,
+      cuttingCakes,
     };
   }
-  return { kind: 'tiered', tiers: rows.map(tierOf), sheet: null, coating };
+  return { kind: 'tiered', tiers: rows.map(tierOf), sheet: null, coating, cuttingCakes };
+}
+
+function sheetOf(item: OrderItem): Sheet {
+  const [first] = inOrder(item.tiers ?? []);
+  return {
+    sizeId: item.sheetSizeId ?? '',
+    layers: first?.layers ?? 1,
+    spongeId: first?.spongeId ?? null,
+    fillingId: first?.fillingId ?? null,
+  };
+}
+
+function cuttingCakeOf(item: OrderItem): CuttingCake {
+  return { ...sheetOf(item), count: item.quantity };
 }
 
 function tierOf(row: ItemTier): Tier {

@@ -1,6 +1,8 @@
-import type { Cake, Coating, Design } from '#shared/contracts/design.ts';
+import type { Cake, Coating, Design, Sheet } from '#shared/contracts/design.ts';
 import type { Estimate } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { plainCoatOf } from '#shared/kitchen/resolve-design.ts';
+import { blockOfSheet } from '#shared/kitchen/sizes.ts';
 import { ButtercreamStyle } from '#api/db/models/buttercream-style.ts';
 import { Covering } from '#api/db/models/covering.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
@@ -66,10 +68,12 @@ export async function writeRevision(
     createdByUserId: revision.createdByUserId,
   });
   const cakeItemId = await writeCake(revisionId, design, menu);
+  const cuttingCakes = design.cake?.cuttingCakes ?? [];
+  if (design.cake !== null) await writeCuttingCakes(revisionId, design.cake, menu);
   await OrderItem.bulkCreate(
     design.extras.map(({ extraId, quantity }, index) => ({
       revisionId,
-      position: index + 1,
+      position: index + 1 + cuttingCakes.length,
       kind: 'extra' as const,
       quantity,
       extraId,
@@ -132,6 +136,28 @@ async function writeCake(revisionId: string, design: Design, menu: Menu): Promis
   return itemId;
 }
 
+/** Each kind of cutting cake is an item of its own, right after the cake, with one body. */
+async function writeCuttingCakes(revisionId: string, cake: Cake, menu: Menu): Promise<void> {
+  const coat = plainCoatOf(cake);
+  for (const [index, it] of cake.cuttingCakes.entries()) {
+    const { id: itemId } = await OrderItem.create({
+      revisionId,
+      position: index + 1,
+      kind: 'cutting',
+      quantity: it.count,
+      sheetSizeId: it.sizeId,
+    });
+    await ItemTier.bulkCreate(
+      bodiesOfSheet(it, menu).map((body) => ({
+        ...body,
+        ...coatingColumns(coat),
+        itemId,
+        position: 0,
+      })),
+    );
+  }
+}
+
 /** A sheet is kept as one tier of its size; the cake's coat is written on every tier. */
 function tiersOf(cake: Cake, menu: Menu) {
   if (cake.kind === 'tiered') {
@@ -141,24 +167,18 @@ function tiersOf(cake: Cake, menu: Menu) {
       ownCoating: coating !== null,
     }));
   }
-  const size = menu.sheetSizes.find(({ id }) => id === cake.sheet?.sizeId);
-  if (cake.sheet === null || size === undefined) return [];
-  const { layers, spongeId, fillingId } = cake.sheet;
-  return [
-    {
-      shape: 'rectangle' as const,
-      widthMm: size.widthMm,
-      depthMm: size.depthMm,
-      heightMm: size.heightMm,
-      layers,
-      real: true,
-      keepsake: false,
-      spongeId,
-      fillingId,
-      ...coatingColumns(cake.coating),
-      ownCoating: false,
-    },
-  ];
+  return bodiesOfSheet(cake.sheet, menu).map((body) => ({
+    ...body,
+    ...coatingColumns(cake.coating),
+    ownCoating: false,
+  }));
+}
+
+function bodiesOfSheet(sheet: Sheet | null, menu: Menu) {
+  const size = menu.sheetSizes.find(({ id }) => id === sheet?.sizeId);
+  if (sheet === null || size === undefined) return [];
+  const { layers, spongeId, fillingId } = sheet;
+  return [{ ...blockOfSheet(size), layers, real: true, keepsake: false, spongeId, fillingId }];
 }
 
 function coatingColumns(coating: Coating | null) {
@@ -177,10 +197,14 @@ async function formulaVersionsOf(design: Design): Promise<string[]> {
   const chosen = (
     pick: (it: { spongeId: string | null; fillingId: string | null }) => string | null,
   ) =>
-    [...cake.tiers, ...(cake.sheet === null ? [] : [cake.sheet])].flatMap((it) => pick(it) ?? []);
-  const coats = [cake.coating, ...cake.tiers.map((tier) => tier.coating)].filter(
-    (it) => it !== null,
-  );
+    [...cake.tiers, ...(cake.sheet === null ? [] : [cake.sheet]), ...cake.cuttingCakes].flatMap(
+      (it) => pick(it) ?? [],
+    );
+  const coats = [
+    cake.coating,
+    ...cake.tiers.map((tier) => tier.coating),
+    ...(cake.cuttingCakes.length === 0 ? [] : [plainCoatOf(cake)]),
+  ].filter((it) => it !== null);
   const rows = await Promise.all([
     Sponge.findAll({ where: { id: chosen((it) => it.spongeId) } }),
     Filling.findAll({ where: { id: chosen((it) => it.fillingId) } }),

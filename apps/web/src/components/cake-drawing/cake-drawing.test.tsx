@@ -10,7 +10,7 @@ const plain: Look = { palette: [], words: [], decorations: [], note: '' };
 const room = { x: 80, y: 40, width: 260, height: 300 };
 
 function tiered(...tiers: Cake['tiers']): Cake {
-  return { kind: 'tiered', tiers, sheet: null, coating: swissCoat };
+  return { kind: 'tiered', tiers, sheet: null, coating: swissCoat, cuttingCakes: [] };
 }
 
 describe('CakeDrawing', () => {
@@ -53,6 +53,7 @@ describe('CakeDrawing', () => {
           tiers: [],
           sheet: { sizeId: size?.id ?? '', layers: 2, spongeId: 'gone', fillingId: null },
           coating: null,
+          cuttingCakes: [],
         }}
         look={{
           ...plain,

@@ -79,7 +79,7 @@ export function sampleCakes(menu: Menu): readonly SampleCake[] {
       infants: false,
       susceptible: false,
     },
-    cake: { kind: 'tiered', tiers, sheet: null, coating },
+    cake: { kind: 'tiered', tiers, sheet: null, coating, cuttingCakes: [] },
     setting: { place: 'indoors', warmestC: 20, minutesOut: 60, driveMinutes: 20 },
     look: {
       palette: [],

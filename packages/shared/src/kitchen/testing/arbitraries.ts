@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import type { Cake, Coating, Declaration, Design, Tier } from '#shared/contracts/design.ts';
+import type { Cake, Coating, CuttingCake, Declaration, Design, Tier } from '#shared/contracts/design.ts';
 import {
   allergenIds,
   coveringIds,
@@ -55,12 +55,24 @@ export const arbitraryTier: fc.Arbitrary<Tier> = fc
     fillingId: it.real ? it.fillingId : null,
   }));
 
+const cuttingCakes: fc.Arbitrary<CuttingCake[]> = fc.array(
+  fc.record({
+    sizeId: idOf(menu.sheetSizes),
+    count: fc.integer({ min: 1, max: 30 }),
+    layers: fc.integer({ min: 1, max: 3 }),
+    spongeId: idOf(menu.sponges),
+    fillingId: fc.option(idOf(menu.fillings)),
+  }),
+  { maxLength: 2 },
+);
+
 const tieredCake: fc.Arbitrary<Cake> = fc
   .record({
     tiers: fc.array(arbitraryTier, { minLength: 1, maxLength: 6 }),
     coating: fc.option(arbitraryCoating),
+    cuttingCakes,
   })
-  .filter((it) => it.tiers.some((tier) => tier.real))
+  .filter((it) => it.tiers.some((tier) => tier.real) || it.cuttingCakes.length > 0)
   .map((it) => ({ kind: 'tiered', sheet: null, ...it }));
 
 const sheetCake: fc.Arbitrary<Cake> = fc
@@ -72,6 +84,7 @@ const sheetCake: fc.Arbitrary<Cake> = fc
       fillingId: fc.option(idOf(menu.fillings)),
     }),
     coating: fc.option(arbitraryCoating),
+    cuttingCakes,
   })
   .map((it) => ({ kind: 'sheet', tiers: [], ...it }));
 

@@ -57,6 +57,7 @@ export const designFixture: Design = {
     tiers: [roundTier(10), roundTier(8), roundTier(6)],
     sheet: null,
     coating: swissCoat,
+    cuttingCakes: [],
   },
   setting: indoors,
   look: { palette: [], words: [], decorations: [], note: '' },

@@ -95,6 +95,8 @@ export function restoreValues(stored: unknown): OrderForm {
   const values: Record<string, unknown> = structuredClone(
     Object.fromEntries(sections.map((name) => [name, name in known ? known[name] : empty[name]])),
   );
+  // A draft of before there were cutting cakes has none.
+  if (isObject(values['cake'])) values['cake']['cuttingCakes'] ??= [];
   // Numbers first: where the contract wants one and null was stored, the text was unreadable.
   for (const issue of submitOrder.safeParse(values).error?.issues ?? []) {
     const last = issue.path.at(-1);

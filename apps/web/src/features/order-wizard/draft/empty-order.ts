@@ -1,7 +1,7 @@
-import type { SubmitOrderInput } from '#shared/contracts/orders.ts';
+import type { SubmitOrder } from '#shared/contracts/orders.ts';
 
 /** The one form of the wizard; an unanswered number is NaN, everything else null or empty. */
-export type OrderForm = SubmitOrderInput;
+export type OrderForm = SubmitOrder;
 
 /** The form before anything is answered. */
 export function emptyOrder(): OrderForm {
@@ -19,7 +19,7 @@ export function emptyOrder(): OrderForm {
       date: null,
       windowStart: null,
     },
-    cake: { kind: 'tiered', tiers: [], sheet: null, coating: null },
+    cake: { kind: 'tiered', tiers: [], sheet: null, coating: null, cuttingCakes: [] },
     setting: { place: 'indoors', warmestC: null, minutesOut: 60, driveMinutes: 20 },
     look: { palette: [], words: [], decorations: [], note: '' },
     extras: [],

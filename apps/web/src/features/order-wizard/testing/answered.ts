@@ -30,6 +30,7 @@ export function answered(): OrderForm {
       ],
       sheet: null,
       coating: { covering: 'buttercream', style: 'swiss', finish: 'smooth', colour: null },
+      cuttingCakes: [],
     },
     you: { ...values.you, name: 'Mara Quill', email: 'mara@example.com' },
     consents: { ...values.consents, policies: true },
