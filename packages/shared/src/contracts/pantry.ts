@@ -45,7 +45,9 @@ export const eggPart = z.enum(['whole', 'white', 'yolk']);
 export type EggPart = z.infer<typeof eggPart>;
 
 const grams = (least: number, message: string) =>
-  z.number().check(z.minimum(least, message), z.maximum(1_000_000, 'At most a tonne, please.'));
+  z
+    .number(message)
+    .check(z.minimum(least, message), z.maximum(1_000_000, 'At most a tonne, please.'));
 
 /** What one measure of an ingredient weighs: a cup of powdered sugar, sifted. */
 export const ingredientMeasure = z.object({
@@ -74,15 +76,17 @@ export const ingredientDraft = z.object({
   pack: z.nullable(
     z.object({
       grams: grams(0.1, 'Write what the pack weighs.'),
-      priceMinor: minor.check(z.minimum(0, 'Write what the pack costs.')),
+      priceMinor: z.int('Write what the pack costs.').check(z.minimum(0, 'Write what it costs.')),
     }),
   ),
   densityGPerMl: z.nullable(
-    z.number().check(z.minimum(0.01, 'At least 0.01 g/mL.'), z.maximum(25, 'At most 25 g/mL.')),
+    z
+      .number('Write a density as a number.')
+      .check(z.minimum(0.01, 'At least 0.01 g/mL.'), z.maximum(25, 'At most 25 g/mL.')),
   ),
   /** What the kitchen weighs it to: 0.1 g for salt, 1 or 5 g for the rest. */
   roundingG: z
-    .number()
+    .number('Write what it is weighed to, in grams.')
     .check(z.minimum(0.001, 'At least 0.001 g.'), z.maximum(1000, 'At most 1,000 g.')),
   eggPart: z.nullable(eggPart),
   pasteurised: labelFact,
@@ -122,12 +126,13 @@ export const formulaLine = z.object({
 export type FormulaLine = z.infer<typeof formulaLine>;
 
 export const stepResources = ['bench', 'mixer', 'oven', 'cold'] as const;
+export type StepResource = (typeof stepResources)[number];
 
 const minutes = z
-  .int()
+  .int('Write whole minutes.')
   .check(z.minimum(0, 'Minutes cannot be negative.'), z.maximum(10_080, 'At most a week.'));
 const celsius = z
-  .number()
+  .number('Write a temperature.')
   .check(z.minimum(-40, 'At least -40 °C.'), z.maximum(300, 'At most 300 °C.'));
 
 export const formulaStep = z.object({
@@ -139,7 +144,11 @@ export const formulaStep = z.object({
   critical: z.nullable(
     z.object({
       limitC: celsius,
-      seconds: z.nullable(z.int().check(z.minimum(0), z.maximum(604_800))),
+      seconds: z.nullable(
+        z
+          .int('Write the time as “6 h” or “17 s”.')
+          .check(z.minimum(0, 'Not below nothing.'), z.maximum(604_800, 'At most a week.')),
+      ),
       note: line(200),
     }),
   ),
@@ -149,9 +158,13 @@ export const formulaStep = z.object({
 export type FormulaStep = z.infer<typeof formulaStep>;
 
 const hours = z.nullable(
-  z.int().check(z.minimum(0, 'Hours cannot be negative.'), z.maximum(17_520, 'At most two years.')),
+  z
+    .int('Write whole hours.')
+    .check(z.minimum(0, 'Hours cannot be negative.'), z.maximum(17_520, 'At most two years.')),
 );
-const ppm = z.int().check(z.minimum(0, 'Not below 0 %.'), z.maximum(1_000_000, 'Not over 100 %.'));
+const ppm = z
+  .int('Write a share in percent.')
+  .check(z.minimum(0, 'Not below 0 %.'), z.maximum(1_000_000, 'Not over 100 %.'));
 
 /** Everything of a formula version that a baker writes; saving it makes a version of its own. */
 export const formulaDraft = z
@@ -164,7 +177,7 @@ export const formulaDraft = z
     yieldPpm: ppm.check(z.minimum(1, 'Something must be left: more than 0 %.')),
     /** Of the finished sponge, filling or frosting. */
     densityGPerMl: z
-      .number()
+      .number('Write what a milliliter weighs, or weigh a level cup.')
       .check(z.minimum(0.01, 'At least 0.01 g/mL.'), z.maximum(25, 'At most 25 g/mL.')),
     /** Sponges: what baking takes; part of what the yield says, kept apart for the tins. */
     bakeLossPpm: ppm.check(z.maximum(900_000, 'At most 90 %.')),
@@ -267,8 +280,29 @@ export const saveFormula = z.object({
   basedOn: id,
   name: requiredLine(120, 'Give the formula a name.'),
   draft: formulaDraft,
+  /**
+   * Formulas that hold an older version of this one, straight or inside others: each gets a next
+   * version of its own with the newest inside. Nothing is carried into those left out.
+   */
+  carryInto: z.optional(z.array(id).check(z.maxLength(200))),
+  /**
+   * A substitution: open orders that are not ready yet and keep an older version take the new one.
+   * Left out, they are made with the version they were ordered with.
+   */
+  inOpenOrders: z.optional(z.boolean()),
 });
 export type SaveFormula = z.infer<typeof saveFormula>;
+
+/** What making a formula, or a version of one, did. */
+export const savedFormula = z.object({
+  formula,
+  version: formulaVersion,
+  /** New versions of the formulas it was carried into. */
+  carried: z.array(formulaVersion),
+  /** Orders that contain something else than the customer was told: numbers. */
+  touched: z.array(z.int()),
+});
+export type SavedFormula = z.infer<typeof savedFormula>;
 
 /** `POST /api/pantry/ingredients`, `PUT /api/pantry/ingredients/:id`. */
 export const saveIngredient = z.object({
@@ -285,3 +319,11 @@ export const savedIngredient = z.object({
   touched: z.array(z.int()),
 });
 export type SavedIngredient = z.infer<typeof savedIngredient>;
+
+/** What still uses a formula or an ingredient, with the refusal `still-used`: `facts.usedBy`. */
+export const usedBy = z.object({
+  kind: z.enum(['formula', 'sponge', 'filling', 'style', 'covering', 'decoration']),
+  id,
+  name: z.string(),
+});
+export type UsedBy = z.infer<typeof usedBy>;
