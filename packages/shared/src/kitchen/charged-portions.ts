@@ -1,5 +1,5 @@
 import type { Menu, PortionSize } from '#shared/contracts/menu.ts';
-import type { ResolvedTier } from './resolve-design.ts';
+import type { ResolvedBody } from './resolve-design.ts';
 import { portionsOfBlock, portionsOfSheet } from './sizes.ts';
 
 /**
@@ -13,13 +13,13 @@ export function pricePortion(menu: Menu): PortionSize {
 }
 
 /**
- * Portions of a tier that are paid for: a keepsake is cake although nobody eats it on the day, a
+ * Portions of a tier, a sheet or one cutting cake that are paid for: a keepsake is cake although nobody eats it on the day, a
  * dummy is not.
  */
-export function chargedPortions(tier: ResolvedTier, kind: 'tiered' | 'sheet', menu: Menu): number {
-  if (!tier.real) return 0;
+export function chargedPortions(body: ResolvedBody, kind: 'tiered' | 'sheet', menu: Menu): number {
+  if (!body.real) return 0;
   const portion = pricePortion(menu);
   return kind === 'tiered'
-    ? portionsOfBlock(tier.block, portion)
-    : portionsOfSheet({ id: '', name: '', ...tier.block }, portion);
+    ? portionsOfBlock(body.block, portion)
+    : portionsOfSheet({ id: '', name: '', ...body.block }, portion);
 }

@@ -1,9 +1,10 @@
+import { codes } from 'currency-codes';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Design } from '#shared/contracts/design.ts';
 import type { Price } from '#shared/contracts/estimates.ts';
 import type { Menu, PriceBook } from '#shared/contracts/menu.ts';
-import { depositOf, priceDesign, shareOf, type PriceTerms } from './price.ts';
+import { balanceDueOn, depositOf, priceDesign, type PriceTerms } from './price.ts';
 import { resolveDesign } from './resolve-design.ts';
 import { arbitraryDesign } from './testing/arbitraries.ts';
 import { coat, designWith, roundTier } from './testing/design-fixture.ts';
@@ -73,13 +74,11 @@ describe('a quote worked by hand', () => {
 });
 
 describe('the lines', () => {
-  const currencies = ['USD', 'JPY', 'KWD'] as const;
-
-  it('add up to the total exactly, in dollars, yen and dinars, tax inside or on top', () => {
+  it('add up to the total to the minor unit in every currency, tax inside or on top', () => {
     fc.assert(
       fc.property(
         arbitraryDesign,
-        fc.constantFrom(...currencies),
+        fc.constantFrom(...codes()),
         fc.boolean(),
         fc.constantFrom(1, 5, 50, 100),
         fc.integer({ min: 0, max: 300_000 }),
@@ -202,13 +201,29 @@ describe('minimum, discount and tax', () => {
     expect(plain.totalMinor - less.totalMinor).toBe(1100);
   });
 
-  it('leave tax out for an exempt buyer', () => {
-    const design = designWith({ extras: [{ extraId: 'knife', quantity: 3 }] });
-    expect(priceOf(design).taxMinor).toBe(160); // 8.875 % of 18.00 = 1.5975
-    expect(priceOf(design, { ...plenty, taxExempt: true }).taxMinor).toBe(0);
+  it('never takes off more than there is, and wants its reason', () => {
+    const discount = { reason: 'Ours to put right', amountMinor: 1_000_000 };
+    const menu = withBook({ taxes: [{ category: 'cake', name: 'Tax', ratePpm: 100_000 }] });
+    expect(priceOf(designWith({}), { ...plenty, discount }, menu)).toMatchObject({
+      totalMinor: 0,
+      taxMinor: 0,
+      depositMinor: 0,
+    });
+    const unsaid = { reason: ' ', amountMinor: 500 };
+    expect(() => priceOf(designWith({}), { ...plenty, discount: unsaid })).toThrow(RangeError);
   });
 
-  // By hand: 20 % inside 354.00 is 354.00 / 6 = 59.00.
+  it('leave tax out for an exempt buyer up to the last day of the certificate', () => {
+    const design = designWith({ extras: [{ extraId: 'knife', quantity: 3 }] });
+    const taxOf = (until: string, certificate = 'ST-5 0417') =>
+      priceOf(design, { ...plenty, exemption: { certificate, until } }).taxMinor;
+    expect(priceOf(design).taxMinor).toBe(160); // 8.875 % of 18.00 = 1.5975
+    expect(taxOf('2027-06-19')).toBe(0);
+    expect(taxOf('2027-06-18')).toBe(160);
+    expect(taxOf('2027-12-31', ' ')).toBe(160);
+  });
+
+  // By hand: 20 % inside 390.00 is 390.00 / 6 = 65.00.
   it('find the tax inside an inclusive total', () => {
     const menu = withBook({
       taxInclusive: true,
@@ -233,19 +248,19 @@ describe('minimum, discount and tax', () => {
   });
 });
 
-describe('shares', () => {
-  it('are exact to the minor unit, halves up', () => {
-    expect(shareOf(1000, 88_750, 'USD')).toBe(89); // 88.75
-    expect(shareOf(200, 88_750, 'USD')).toBe(18); // 17.75
-    expect(shareOf(50, 10_000, 'KWD')).toBe(1); // 0.5
-    expect(shareOf(900_000_000, 88_750, 'JPY')).toBe(79_875_000);
-  });
-
-  it('make a deposit with a floor, never more than the total', () => {
+describe('what is paid when', () => {
+  it('is a deposit with a floor, never more than the total', () => {
     const { priceBook } = menuFixture;
     expect(depositOf(100_000, priceBook)).toBe(30_000);
     expect(depositOf(10_000, priceBook)).toBe(5_000);
     expect(depositOf(4_000, priceBook)).toBe(4_000);
     expect(depositOf(0, priceBook)).toBe(0);
+  });
+
+  it('is the balance so many days before pickup, but never before it is agreed', () => {
+    expect(balanceDueOn('2027-06-19', 7, '2027-05-01')).toBe('2027-06-12');
+    expect(balanceDueOn('2027-03-03', 7, '2027-02-01')).toBe('2027-02-24');
+    expect(balanceDueOn('2027-06-19', 7, '2027-06-16')).toBe('2027-06-16');
+    expect(balanceDueOn('2027-06-19', 0, '2027-06-19')).toBe('2027-06-19');
   });
 });

@@ -1,85 +1,74 @@
-import { add, dinero, halfUp, multiply, toSnapshot, transformScale, type Dinero } from 'dinero.js';
 import type { Price, PriceLine } from '#shared/contracts/estimates.ts';
 import type { PriceBook } from '#shared/contracts/menu.ts';
-import { daysBetween } from '#shared/dates/local-time.ts';
+import { addDays, daysBetween } from '#shared/dates/local-time.ts';
 import { chargedPortions, pricePortion } from './charged-portions.ts';
 import { lengthFigure } from './measures.ts';
-import { minorDigits, splitByLargestRemainder } from './money.ts';
-import { coatingName, type ResolvedDesign, type ResolvedTier } from './resolve-design.ts';
+import { lineOf, sumOf } from './price-line.ts';
+import {
+  coatingName,
+  type ResolvedBody,
+  type ResolvedCuttingCake,
+  type ResolvedDesign,
+  type ResolvedTier,
+} from './resolve-design.ts';
 import { named } from './sentences.ts';
+import { roundToStep, shareOf } from './shares.ts';
+import {
+  includedTax,
+  isExempt,
+  taxCategories,
+  taxOnTop,
+  taxTakenOff,
+  type Exemption,
+} from './tax.ts';
 
-/**
- * Tax categories of the lines. A price book that does not list one taxes it as its first
- * category, so a studio with a single rate lists a single category.
- */
-export const taxCategories = { cake: 'cake', goods: 'goods' } as const;
+/** Taken off before tax, with the reason the customer reads: an amount, or a share of what stands. */
+export type Discount = { readonly reason: string } & (
+  { readonly amountMinor: number } | { readonly sharePpm: number }
+);
 
 export type PriceTerms = {
   /** Day the cake is for; null while it is not chosen (no rush is reckoned). */
   readonly date: string | null;
   readonly today: string;
-  /** Taken off before tax, with the reason the customer reads. */
-  readonly discount?: { readonly reason: string; readonly amountMinor: number };
-  /** A buyer whose exemption certificate is on file. */
-  readonly taxExempt?: boolean;
+  /** What bringing it comes to, where it is not collected. */
+  readonly deliveryMinor?: number;
+  readonly discount?: Discount;
+  readonly exemption?: Exemption;
 };
-
-/** Share of an amount in parts per million, halves up, in whole minor units. */
-export function shareOf(amountMinor: number, ppm: number, currency: string): number {
-  const exponent = minorDigits(currency);
-  const exact = multiply(money(amountMinor, currency), { amount: ppm, scale: 6 });
-  return amountOf(transformScale(exact, exponent, halfUp));
-}
-
-function money(amountMinor: number, currency: string): Dinero<number> {
-  return dinero({
-    amount: amountMinor,
-    currency: { code: currency, base: 10, exponent: minorDigits(currency) },
-  });
-}
-
-const amountOf = (it: Dinero<number>): number => toSnapshot(it).amount;
-
-function sumOf(lines: readonly PriceLine[], currency: string): number {
-  return amountOf(
-    lines.reduce((sum, it) => add(sum, money(it.amountMinor, currency)), money(0, currency)),
-  );
-}
 
 /**
  * The price of a design, line by line in the order of the quote; the lines add up to the total
- * exactly. A design without a cake has only its extras.
+ * exactly. A design without a cake has only its extras. Throws a `RangeError` on a discount
+ * without a reason.
  */
 export function priceDesign(resolved: ResolvedDesign, terms: PriceTerms): Price {
   const { priceBook: book } = resolved.menu;
-  const { currency } = book;
   const lines: PriceLine[] = cakeLines(resolved);
   lines.push(...rushLines(lines, book, terms));
+  lines.push(...deliveryLines(terms));
   lines.push(...extraLines(resolved));
   lines.push(...minimumLines(lines, book, resolved.design.cake !== null));
-  if (terms.discount !== undefined && terms.discount.amountMinor !== 0) {
-    const { reason, amountMinor } = terms.discount;
-    lines.push(lineOf('discount', reason, 1, -Math.abs(amountMinor), null));
+  lines.push(...discountLines(lines, book, terms));
+  const taxed = [...lines];
+  const exempt = isExempt(terms.exemption, terms.date ?? terms.today);
+  if (book.taxInclusive) {
+    if (exempt) lines.push(...taxTakenOff(taxed, book));
+  } else if (!exempt) {
+    lines.push(...taxOnTop(taxed, book));
   }
-  const exempt = terms.taxExempt === true;
-  const taxable = exempt ? new Map<string, number>() : taxableByCategory(lines, book);
-  const net = sumOf(lines, currency);
-  if (!book.taxInclusive) lines.push(...taxLines(taxable, book));
-  const beforeRounding = sumOf(lines, currency);
-  const rounding = roundTo(beforeRounding, book.roundToMinor) - beforeRounding;
+  const beforeRounding = sumOf(lines);
+  const rounding = roundToStep(beforeRounding, book.roundToMinor) - beforeRounding;
   if (rounding !== 0) lines.push(lineOf('rounding', 'Rounding', 1, rounding, null));
-  const totalMinor = sumOf(lines, currency);
+  const totalMinor = sumOf(lines);
+  const insideMinor = book.taxInclusive && !exempt ? includedTax(totalMinor, taxed, book) : 0;
+  const onTopMinor = book.taxInclusive ? 0 : sumOf(lines.filter((it) => it.kind === 'tax'));
   return {
-    currency,
+    currency: book.currency,
     priceBookVersionId: book.versionId,
     lines,
-    subtotalMinor: book.taxInclusive ? totalMinor : net,
-    taxMinor: book.taxInclusive
-      ? includedTax(totalMinor, taxable, book)
-      : sumOf(
-          lines.filter((it) => it.kind === 'tax'),
-          currency,
-        ),
+    subtotalMinor: book.taxInclusive ? totalMinor : sumOf(taxed),
+    taxMinor: insideMinor + onTopMinor,
     taxInclusive: book.taxInclusive,
     totalMinor,
     depositMinor: depositOf(totalMinor, book),
@@ -93,78 +82,70 @@ export function depositOf(totalMinor: number, book: PriceBook): number {
   return Math.min(totalMinor, Math.max(share, book.depositFloorMinor));
 }
 
-function lineOf(
-  kind: PriceLine['kind'],
-  label: string,
-  quantity: number,
-  amountMinor: number,
-  taxCategory: string | null,
-): PriceLine {
-  return { kind, label, quantity, amountMinor, taxCategory };
+/** The day the balance is due: so many days before pickup, but not before the day it is agreed. */
+export function balanceDueOn(pickupDate: string, dueDays: number, today: string): string {
+  const due = addDays(pickupDate, -dueDays);
+  return due < today ? today : due;
 }
 
 /** Everything that is cake: tiers, surcharges, decorations, words, finish. */
 function cakeLines(resolved: ResolvedDesign): PriceLine[] {
-  const { design, tiers, menu } = resolved;
+  const { design, tiers, cuttingCakes, menu } = resolved;
   if (design.cake === null) return [];
   const { kind } = design.cake;
-  const portioned = tiers.map((tier) => ({ tier, portions: chargedPortions(tier, kind, menu) }));
-  const cake = taxCategories.cake;
-  const surcharges = (
-    lineKind: 'sponge' | 'filling' | 'frosting' | 'finish',
-    of: (tier: ResolvedTier) => { label: string; perPortionMinor: number } | null,
-  ): PriceLine[] => {
-    const grouped = new Map<string, { portions: number; perPortionMinor: number }>();
-    for (const { tier, portions } of portioned) {
-      const surcharge = of(tier);
-      if (surcharge === null || surcharge.perPortionMinor === 0 || portions === 0) continue;
-      const known = grouped.get(surcharge.label);
-      grouped.set(surcharge.label, {
-        portions: portions + (known?.portions ?? 0),
-        perPortionMinor: surcharge.perPortionMinor,
-      });
-    }
-    return [...grouped].map(([label, it]) =>
-      lineOf(lineKind, label, it.portions, it.portions * it.perPortionMinor, cake),
-    );
-  };
+  const shown = tiers.map((body) => ({ body, portions: chargedPortions(body, kind, menu) }));
+  const cut = cuttingCakes.map((body) => ({
+    body,
+    portions: body.count * chargedPortions(body, 'sheet', menu),
+  }));
+  const surcharges = surchargesOn([...shown, ...cut]);
   return [
-    ...portioned.map(({ tier, portions }) => tierLine(tier, portions, kind, resolved)),
+    ...shown.map(({ body, portions }) => tierLine(body, portions, kind, resolved)),
+    ...cut.map(({ body, portions }) => cuttingCakeLine(body, portions, resolved)),
     ...surcharges('sponge', ({ sponge }) =>
-      sponge === null
-        ? null
-        : {
-            label: named(sponge.name, 'sponge'),
-            perPortionMinor: sponge.surchargePerPortionMinor,
-          },
+      sponge === null ? null : [named(sponge.name, 'sponge'), sponge.surchargePerPortionMinor],
     ),
     ...surcharges('filling', ({ filling }) =>
-      filling === null
-        ? null
-        : {
-            label: named(filling.name, 'filling'),
-            perPortionMinor: filling.surchargePerPortionMinor,
-          },
+      filling === null ? null : [named(filling.name, 'filling'), filling.surchargePerPortionMinor],
     ),
     ...surcharges('frosting', ({ coating }) =>
       coating === null
         ? null
-        : {
-            label: coatingName(coating),
-            perPortionMinor:
-              coating.covering.surchargePerPortionMinor +
+        : [
+            coatingName(coating),
+            coating.covering.surchargePerPortionMinor +
               (coating.style?.surchargePerPortionMinor ?? 0),
-          },
+          ],
     ),
     ...decorationLines(resolved),
     ...wordsLines(resolved),
     ...surcharges('finish', ({ coating }) => {
       const finish = menu.priceBook.finishes.find((it) => it.id === coating?.finish);
-      return finish === undefined
-        ? null
-        : { label: finishLabels[finish.id], perPortionMinor: finish.perPortionMinor };
+      return finish === undefined ? null : [finishLabels[finish.id], finish.perPortionMinor];
     }),
   ];
+}
+
+type Portioned = { readonly body: ResolvedBody; readonly portions: number };
+type Surcharge = readonly [label: string, perPortionMinor: number];
+
+/** A line for each surcharge of a kind, over the portions of everything that has it. */
+function surchargesOn(bodies: readonly Portioned[]) {
+  return (
+    kind: 'sponge' | 'filling' | 'frosting' | 'finish',
+    of: (body: ResolvedBody) => Surcharge | null,
+  ): PriceLine[] => {
+    const grouped = new Map<string, { portions: number; perPortionMinor: number }>();
+    for (const { body, portions } of bodies) {
+      const [label, perPortionMinor] = of(body) ?? ['', 0];
+      if (perPortionMinor === 0 || portions === 0) continue;
+      const before = grouped.get(label)?.portions ?? 0;
+      grouped.set(label, { portions: before + portions, perPortionMinor });
+    }
+    return [...grouped].map(([label, { portions, perPortionMinor }]) =>
+      lineOf(kind, label, portions, portions * perPortionMinor, taxCategories.cake),
+    );
+  };
 }
 
 const finishLabels = {
@@ -177,15 +158,13 @@ function tierLine(
   tier: ResolvedTier,
   portions: number,
   kind: 'tiered' | 'sheet',
-  { menu, design, portionSize }: ResolvedDesign,
+  resolved: ResolvedDesign,
 ): PriceLine {
+  const { menu, design } = resolved;
   const { priceBook: book, studio } = menu;
   const { widthMm, depthMm, shape } = tier.block;
   const cake = taxCategories.cake;
-  const reckoned = pricePortion(menu);
-  // The guests' own count is another number, so the line says what its number counts.
-  const by =
-    reckoned.id === portionSize.id ? '' : `, by the ${reckoned.name.toLowerCase()} portion`;
+  const by = reckonedBy(resolved);
   if (kind === 'sheet') {
     const name = menu.sheetSizes.find((it) => it.id === design.cake?.sheet?.sizeId)?.name ?? '';
     const label = `${name}${by}`;
@@ -203,6 +182,23 @@ function tierLine(
   const amount = portions * (band?.perPortionMinor ?? 0);
   const kept = tier.keepsake ? ', to keep' : '';
   return lineOf('tier', `${label}${kept}${by}`, portions, amount, cake);
+}
+
+function cuttingCakeLine(
+  { size, count }: ResolvedCuttingCake,
+  portions: number,
+  resolved: ResolvedDesign,
+): PriceLine {
+  const times = count === 1 ? '' : `${count} × `;
+  const label = `Cutting cake, ${times}${size.name}${reckonedBy(resolved)}`;
+  const amount = portions * resolved.menu.priceBook.sheetPerPortionMinor;
+  return lineOf('cutting-cake', label, portions, amount, taxCategories.cake);
+}
+
+/** The guests' own count is another number, so the line says what its number counts. */
+function reckonedBy({ menu, portionSize }: ResolvedDesign): string {
+  const reckoned = pricePortion(menu);
+  return reckoned.id === portionSize.id ? '' : `, by the ${reckoned.name.toLowerCase()} portion`;
 }
 
 function decorationLines({ decorations, tiers }: ResolvedDesign): PriceLine[] {
@@ -236,10 +232,16 @@ function rushLines(
     .filter((it) => notice < it.underDays)
     .toSorted((a, b) => a.underDays - b.underDays)[0];
   if (band === undefined) return [];
-  const amount = shareOf(sumOf(lines, book.currency), band.addPpm, book.currency);
+  const amount = shareOf(sumOf(lines), band.addPpm, book.currency);
   if (amount === 0) return [];
   const label = `Short notice (under ${band.underDays} days)`;
   return [lineOf('rush', label, 1, amount, taxCategories.cake)];
+}
+
+function deliveryLines({ deliveryMinor = 0 }: PriceTerms): PriceLine[] {
+  return deliveryMinor === 0
+    ? []
+    : [lineOf('delivery', 'Delivery', 1, deliveryMinor, taxCategories.delivery)];
 }
 
 function extraLines({ extras }: ResolvedDesign): PriceLine[] {
@@ -250,62 +252,25 @@ function extraLines({ extras }: ResolvedDesign): PriceLine[] {
 }
 
 function minimumLines(lines: readonly PriceLine[], book: PriceBook, hasCake: boolean): PriceLine[] {
-  const missing = book.minimumMinor - sumOf(lines, book.currency);
+  const missing = book.minimumMinor - sumOf(lines);
   if (!hasCake || missing <= 0) return [];
   return [lineOf('minimum', 'Up to our smallest order', 1, missing, taxCategories.cake)];
 }
 
-/** The category a line is taxed in: its own if the book lists it, else the book's first. */
-function categoryIn(book: PriceBook, category: string): string | null {
-  const own = book.taxes.find((it) => it.category === category) ?? book.taxes[0];
-  return own?.category ?? null;
-}
-
-/** Taxable amounts by category; lines of no category (a discount) lie on all in proportion. */
-function taxableByCategory(lines: readonly PriceLine[], book: PriceBook): Map<string, number> {
-  const sums = new Map<string, number>();
-  let shared = 0;
-  for (const line of lines) {
-    const category = line.taxCategory === null ? null : categoryIn(book, line.taxCategory);
-    if (category === null) shared += line.amountMinor;
-    else sums.set(category, (sums.get(category) ?? 0) + line.amountMinor);
-  }
-  const shares = splitByLargestRemainder(shared, [...sums.values()]);
-  return new Map([...sums].map(([category, sum], i) => [category, sum + (shares[i] ?? 0)]));
-}
-
-function taxLines(taxable: ReadonlyMap<string, number>, book: PriceBook): PriceLine[] {
-  return book.taxes.flatMap((tax) => {
-    const base = Math.max(0, taxable.get(tax.category) ?? 0);
-    const amount = shareOf(base, tax.ratePpm, book.currency);
-    const label = `${tax.name} ${String(tax.ratePpm / 10_000)} %`;
-    return amount === 0 ? [] : [lineOf('tax', label, 1, amount, tax.category)];
-  });
-}
-
-/**
- * Tax inside an inclusive total: the total goes to the categories in proportion, and each share
- * is split 100 : rate, both by largest remainder.
- */
-function includedTax(
-  totalMinor: number,
-  taxable: ReadonlyMap<string, number>,
+/** A discount takes off what there is at the most. */
+function discountLines(
+  lines: readonly PriceLine[],
   book: PriceBook,
-): number {
-  const shares = splitByLargestRemainder(
-    Math.max(0, totalMinor),
-    [...taxable.values()].map((it) => Math.max(0, it)),
-  );
-  return [...taxable.keys()].reduce((sum, category, index) => {
-    const rate = book.taxes.find((it) => it.category === category)?.ratePpm ?? 0;
-    const [, tax = 0] = splitByLargestRemainder(shares[index] ?? 0, [1_000_000, rate]);
-    return sum + tax;
-  }, 0);
-}
-
-/** To the nearest multiple of the step, halves up. */
-function roundTo(amountMinor: number, stepMinor: number): number {
-  return stepMinor > 1
-    ? Math.floor((2 * amountMinor + stepMinor) / (2 * stepMinor)) * stepMinor
-    : amountMinor;
+  { discount }: PriceTerms,
+): PriceLine[] {
+  if (discount === undefined) return [];
+  const reason = discount.reason.trim();
+  if (reason === '') throw new RangeError('A discount needs its reason.');
+  const standing = Math.max(0, sumOf(lines));
+  const wanted =
+    'amountMinor' in discount
+      ? Math.abs(discount.amountMinor)
+      : shareOf(standing, discount.sharePpm, book.currency);
+  const amount = Math.min(standing, wanted);
+  return amount === 0 ? [] : [lineOf('discount', reason, 1, -amount, null)];
 }

@@ -17,7 +17,8 @@ import { hasPlace } from '#api/modules/plan/plan.queries.ts';
 import { replanOrder } from '#api/modules/plan/replan-order.command.ts';
 import type { Staff } from '#api/platform/actor.ts';
 import { AppError } from '#api/platform/app-error.ts';
-import { addDays } from '#shared/dates/local-time.ts';
+import { today } from '#shared/dates/local-time.ts';
+import { balanceDueOn } from '#shared/kitchen/price.ts';
 import { blockersOf, factsOf } from './blockers.queries.ts';
 import { cakeItemOf, pickupChoiceOf } from './planned-order.ts';
 
@@ -103,7 +104,9 @@ async function writeAgreedQuote(input: {
     depositMinor: order.terms.depositMinor,
     currency: price.currency,
     balanceDueOn:
-      order.pickupDate === null ? null : addDays(order.pickupDate, -order.terms.balanceDueDays),
+      order.pickupDate === null
+        ? null
+        : balanceDueOn(order.pickupDate, order.terms.balanceDueDays, today(now, order.zone)),
     createdByUserId: actor.userId,
   });
   await QuoteLine.bulkCreate(
