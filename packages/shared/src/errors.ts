@@ -13,6 +13,7 @@ export const errorTitles = {
   'not-found': 'There is nothing here',
   'wrong-state': 'The order has moved on',
   'changed-meanwhile': 'Somebody changed this meanwhile',
+  'still-used': 'Something still uses this',
   'date-gone': 'That date has just gone',
   'price-changed': 'The price has changed meanwhile',
   'advice-stop': 'Something about this cake must be settled first',

@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
 import { minor } from '#shared/contracts/common.ts';
+import { advice } from '#shared/contracts/estimates.ts';
 import { decorationSource } from '#shared/contracts/vocabulary.ts';
 
 /** Shapes of the JSON columns; each is checked on the way in and on the way out. */
@@ -10,6 +11,8 @@ export const intList = z.array(z.int());
 export const monthlyFigures = z.array(z.number()).check(z.length(12));
 
 export const textList = z.array(z.string());
+
+export const adviceList = z.array(advice);
 
 export const sourceList = z.array(decorationSource);
 

@@ -16,6 +16,7 @@ export const statusOf: Readonly<Record<ErrorCode, number>> = {
   'not-found': 404,
   'wrong-state': 409,
   'changed-meanwhile': 409,
+  'still-used': 409,
   'date-gone': 409,
   'price-changed': 409,
   'advice-stop': 409,

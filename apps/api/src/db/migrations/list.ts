@@ -4,9 +4,9 @@ import { orders } from './0003-orders.ts';
 import { plan } from './0004-plan.ts';
 import { people } from './0005-people.ts';
 import { moneyAndMail } from './0006-money-and-mail.ts';
+import { pantryDepth } from './0007-pantry-depth.ts';
 import { careCodes } from './0008-care-codes.ts';
 import { cuttingCakes } from './0009-cutting-cakes.ts';
-import { pantryDepth } from './0007-pantry-depth.ts';
 import type { Migration } from './migration.ts';
 
 /** Every migration in the order they run. Names are fixed once released; new ones go last. */
@@ -17,6 +17,7 @@ export const migrations: readonly Migration[] = [
   plan,
   people,
   moneyAndMail,
+  pantryDepth,
   careCodes,
   cuttingCakes,
 ];

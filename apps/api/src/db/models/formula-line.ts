@@ -6,7 +6,7 @@ import type {
   NonAttribute,
   Sequelize,
 } from 'sequelize';
-import { integer, key, nullable, text } from '../columns.ts';
+import { integer, key, nullable, text, withDefault } from '../columns.ts';
 import type { FormulaVersion } from './formula-version.ts';
 import type { Ingredient } from './ingredient.ts';
 
@@ -22,7 +22,8 @@ export class FormulaLine extends Model<
   declare formulaVersionId: string | null;
   declare weightMg: number;
   declare asTyped: string | null;
-  declare stage: string | null;
+  /** The step it goes in at, from 0. */
+  declare step: CreationOptional<number>;
 
   declare ingredient?: NonAttribute<Ingredient | null>;
   declare formulaVersion?: NonAttribute<FormulaVersion | null>;
@@ -38,7 +39,7 @@ export function initFormulaLine(sequelize: Sequelize): void {
       formulaVersionId: nullable(text()),
       weightMg: integer(),
       asTyped: nullable(text()),
-      stage: nullable(text()),
+      step: withDefault(integer(), 0),
     },
     { sequelize, tableName: 'formula_lines' },
   );

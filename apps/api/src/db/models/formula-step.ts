@@ -5,10 +5,9 @@ import type {
   InferCreationAttributes,
   Sequelize,
 } from 'sequelize';
+import { stepResources } from '#shared/contracts/pantry.ts';
+import type { StepResource } from '#shared/contracts/pantry.ts';
 import { integer, key, nullable, oneOf, real, text, withDefault } from '../columns.ts';
-
-export const stepResources = ['bench', 'mixer', 'oven', 'cold'] as const;
-export type StepResource = (typeof stepResources)[number];
 
 /** One step of a formula, with what it takes and what must be measured. */
 export class FormulaStep extends Model<

@@ -6,11 +6,10 @@ import type {
   NonAttribute,
   Sequelize,
 } from 'sequelize';
+import { formulaKinds } from '#shared/contracts/pantry.ts';
+import type { FormulaKind } from '#shared/contracts/pantry.ts';
 import { instant, nullable, oneOf, text, writtenAt } from '../columns.ts';
 import type { FormulaVersion } from './formula-version.ts';
-
-export const formulaKinds = ['sponge', 'filling', 'buttercream', 'custard', 'other'] as const;
-export type FormulaKind = (typeof formulaKinds)[number];
 
 /** A recipe by weight; what it says is in its versions. */
 export class Formula extends Model<InferAttributes<Formula>, InferCreationAttributes<Formula>> {

@@ -5,18 +5,9 @@ import type {
   InferCreationAttributes,
   Sequelize,
 } from 'sequelize';
+import { householdMeasures } from '#shared/contracts/pantry.ts';
+import type { HouseholdMeasure } from '#shared/contracts/pantry.ts';
 import { integer, key, nullable, oneOf, text } from '../columns.ts';
-
-export const measures = [
-  'cup',
-  'tablespoon',
-  'teaspoon',
-  'stick',
-  'can',
-  'piece',
-  'pinch',
-] as const;
-export type Measure = (typeof measures)[number];
 
 /** Weight of a household measure of a product; each stored, since measures do not multiply through. */
 export class IngredientMeasure extends Model<
@@ -25,7 +16,7 @@ export class IngredientMeasure extends Model<
 > {
   declare id: CreationOptional<string>;
   declare ingredientId: string;
-  declare measure: Measure;
+  declare measure: HouseholdMeasure;
   /** Packed, sifted. */
   declare qualifier: string | null;
   declare weightMg: number;
@@ -37,7 +28,7 @@ export function initIngredientMeasure(sequelize: Sequelize): void {
     {
       id: key(),
       ingredientId: text(),
-      measure: oneOf(measures),
+      measure: oneOf(householdMeasures),
       qualifier: nullable(text()),
       weightMg: integer(),
       source: nullable(text()),

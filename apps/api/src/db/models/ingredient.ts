@@ -6,36 +6,12 @@ import type {
   NonAttribute,
   Sequelize,
 } from 'sequelize';
+import { eggPart, ingredientFamily, labelFact } from '#shared/contracts/pantry.ts';
+import type { EggPart, IngredientFamily } from '#shared/contracts/pantry.ts';
+import type { LabelFact } from '#shared/kitchen/derive-contents.ts';
 import { instant, integer, nullable, oneOf, text, withDefault, writtenAt } from '../columns.ts';
 import type { IngredientAllergen } from './ingredient-allergen.ts';
 import type { IngredientMeasure } from './ingredient-measure.ts';
-
-export const ingredientFamilies = [
-  'flour',
-  'sugar',
-  'butter',
-  'fat',
-  'egg',
-  'dairy',
-  'raising',
-  'starch',
-  'fruit',
-  'nut',
-  'chocolate',
-  'flavour',
-  'colour',
-  'gelling',
-  'salt',
-  'liquid',
-  'other',
-] as const;
-export type IngredientFamily = (typeof ingredientFamilies)[number];
-
-export const eggParts = ['whole', 'white', 'yolk'] as const;
-export type EggPart = (typeof eggParts)[number];
-
-export const triStates = ['yes', 'no', 'unknown'] as const;
-export type TriState = (typeof triStates)[number];
 
 /** A product as bought. What its label does not settle is unknown, never none. */
 export class Ingredient extends Model<
@@ -57,13 +33,13 @@ export class Ingredient extends Model<
   /** Kitchen-sensible step when a formula is scaled. */
   declare roundingMg: CreationOptional<number>;
   declare eggPart: EggPart | null;
-  declare pasteurised: CreationOptional<TriState>;
-  declare gelatine: CreationOptional<TriState>;
-  declare alcohol: CreationOptional<TriState>;
-  declare cochineal: CreationOptional<TriState>;
+  declare pasteurised: CreationOptional<LabelFact>;
+  declare gelatine: CreationOptional<LabelFact>;
+  declare alcohol: CreationOptional<LabelFact>;
+  declare cochineal: CreationOptional<LabelFact>;
   /** Of meat, fish or slaughter. */
-  declare animalOrigin: CreationOptional<TriState>;
-  declare honey: CreationOptional<TriState>;
+  declare animalOrigin: CreationOptional<LabelFact>;
+  declare honey: CreationOptional<LabelFact>;
   declare handledNote: string | null;
   declare createdAt: CreationOptional<Date>;
   declare archivedAt: Date | null;
@@ -81,18 +57,18 @@ export function initIngredient(sequelize: Sequelize): void {
       labelName: text(),
       labelContents: nullable(text()),
       labelCheckedOn: nullable(text()),
-      family: oneOf(ingredientFamilies),
+      family: oneOf(ingredientFamily.options),
       packMg: nullable(integer()),
       packPriceMinor: nullable(integer()),
       densityMgPerMl: nullable(integer()),
       roundingMg: withDefault(integer(), 1000),
-      eggPart: nullable(oneOf(eggParts)),
-      pasteurised: withDefault(oneOf(triStates), 'unknown'),
-      gelatine: withDefault(oneOf(triStates), 'unknown'),
-      alcohol: withDefault(oneOf(triStates), 'unknown'),
-      cochineal: withDefault(oneOf(triStates), 'unknown'),
-      animalOrigin: withDefault(oneOf(triStates), 'unknown'),
-      honey: withDefault(oneOf(triStates), 'unknown'),
+      eggPart: nullable(oneOf(eggPart.options)),
+      pasteurised: withDefault(oneOf(labelFact.options), 'unknown'),
+      gelatine: withDefault(oneOf(labelFact.options), 'unknown'),
+      alcohol: withDefault(oneOf(labelFact.options), 'unknown'),
+      cochineal: withDefault(oneOf(labelFact.options), 'unknown'),
+      animalOrigin: withDefault(oneOf(labelFact.options), 'unknown'),
+      honey: withDefault(oneOf(labelFact.options), 'unknown'),
       handledNote: nullable(text()),
       createdAt: writtenAt('createdAt'),
       archivedAt: nullable(instant('archivedAt')),

@@ -11,6 +11,7 @@ import { initButtercreamStyle } from './buttercream-style.ts';
 import { initClosure } from './closure.ts';
 import { initColdPlace } from './cold-place.ts';
 import { initConsent } from './consent.ts';
+import { initContentChange } from './content-change.ts';
 import { initCovering } from './covering.ts';
 import { initCoveringFinish } from './covering-finish.ts';
 import { initDayCap } from './day-cap.ts';
@@ -98,6 +99,7 @@ const initialisers = [
   initClosure,
   initColdPlace,
   initConsent,
+  initContentChange,
   initCovering,
   initCoveringFinish,
   initDayCap,

@@ -98,7 +98,7 @@ async function createFormula(
       ingredientId: 'ingredient' in line ? line.ingredient : null,
       formulaVersionId: 'formula' in line ? (versions.get(line.formula) ?? null) : null,
       weightMg: mg(line.grams),
-      stage: line.step === undefined ? null : String(line.step),
+      step: line.step ?? 0,
     })),
   );
   await FormulaStep.bulkCreate(

@@ -1,8 +1,11 @@
 import type { AllergenEntry, Contents, Menu } from '#shared/contracts/menu.ts';
+import type { FormulaVersion } from '#shared/contracts/pantry.ts';
 import { finishId } from '#shared/contracts/vocabulary.ts';
+import { decorationPrice } from '#shared/kitchen/decoration-price.ts';
 import { deriveContents } from '#shared/kitchen/derive-contents.ts';
 import type { FormulaNode } from '#shared/kitchen/derive-contents.ts';
-import { decorationPrice } from '#shared/kitchen/decoration-price.ts';
+import { ingredientIdsIn } from '#shared/kitchen/kitchen-book.ts';
+import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { mergeAllergens } from '#shared/kitchen/merge-allergens.ts';
 import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { ButtercreamStyle } from '#api/db/models/buttercream-style.ts';
@@ -11,17 +14,44 @@ import { Covering } from '#api/db/models/covering.ts';
 import { DecorationIngredient } from '#api/db/models/decoration-ingredient.ts';
 import { Decoration } from '#api/db/models/decoration.ts';
 import { Filling } from '#api/db/models/filling.ts';
-import type { FormulaVersion } from '#api/db/models/formula-version.ts';
 import { KitchenAllergen } from '#api/db/models/kitchen-allergen.ts';
 import { Sponge } from '#api/db/models/sponge.ts';
-import { ingredientIdsOf, loadPantry } from './formula-tree.ts';
-import type { Pantry } from './formula-tree.ts';
-import { offered } from './offered.ts';
+import { inOrder, offered } from './offered.ts';
 
-type CakeParts = Pick<Menu, 'sponges' | 'fillings' | 'styles' | 'coverings' | 'decorations'> & {
-  /** Union over what is in use plus what the owner adds. */
-  handles: AllergenEntry[];
+export type CakeParts = Pick<Menu, 'sponges' | 'fillings' | 'styles' | 'coverings' | 'decorations'>;
+
+/** What the catalogue says of the parts of a cake, before a formula is looked at. */
+export type CakeRows = {
+  readonly sponges: readonly Sponge[];
+  readonly fillings: readonly Filling[];
+  readonly styles: readonly ButtercreamStyle[];
+  readonly coverings: readonly Covering[];
+  readonly finishes: readonly CoveringFinish[];
+  readonly decorations: readonly Decoration[];
+  /** What the owner adds to what the kitchen handles. */
+  readonly owners: readonly KitchenAllergen[];
 };
+
+/** Which version of a formula to read; undefined for the current one. */
+export type VersionOf = (formulaId: string) => string | undefined;
+
+/** The parts on offer; with those that are not any more, where old orders are read. */
+export async function loadCakeRows({ archivedToo = false } = {}): Promise<CakeRows> {
+  const which = archivedToo ? { order: inOrder } : offered;
+  const [sponges, fillings, styles, coverings, finishes, decorations, owners] = await Promise.all([
+    Sponge.findAll(which),
+    Filling.findAll(which),
+    ButtercreamStyle.findAll(which),
+    Covering.findAll(which),
+    CoveringFinish.findAll(),
+    Decoration.findAll({
+      ...which,
+      include: [{ model: DecorationIngredient, as: 'ingredients' }],
+    }),
+    KitchenAllergen.findAll(),
+  ]);
+  return { sponges, fillings, styles, coverings, finishes, decorations, owners };
+}
 
 const nothing: Contents = {
   allergens: [],
@@ -35,26 +65,16 @@ const nothing: Contents = {
 };
 
 /** Parts of a cake as the public sees them, each with what its formulas say is in it. */
-export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts> {
-  const [pantry, sponges, fillings, styles, coverings, finishes, decorations, owners] =
-    await Promise.all([
-      loadPantry(),
-      Sponge.findAll(offered),
-      Filling.findAll(offered),
-      ButtercreamStyle.findAll(offered),
-      Covering.findAll(offered),
-      CoveringFinish.findAll(),
-      Decoration.findAll({
-        ...offered,
-        include: [{ model: DecorationIngredient, as: 'ingredients' }],
-      }),
-      KitchenAllergen.findAll(),
-    ]);
-  const used = new Set<string>();
-  const read = (formulaId: string) => readFormula(pantry, formulaId, used);
+export function cakePartsOf(
+  rows: CakeRows,
+  book: KitchenBook,
+  prices: PriceBookContent,
+  versionOf: VersionOf = () => undefined,
+): CakeParts {
+  const read = (formulaId: string) => readFormula(book, formulaId, versionOf);
 
-  const parts: Omit<CakeParts, 'handles'> = {
-    sponges: sponges.map((row) => {
+  const parts: CakeParts = {
+    sponges: rows.sponges.map((row) => {
       const { version, contents } = read(row.formulaId);
       return {
         id: row.id,
@@ -62,13 +82,13 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
         blurb: row.blurb,
         colour: row.colourHex,
         contents,
-        densityGPerMl: version.densityMgPerMl / 1000,
+        densityGPerMl: version.densityGPerMl,
         bakeLossPpm: version.bakeLossPpm,
         levellingPpm: row.levellingPpm,
         surchargePerPortionMinor: prices.spongeSurcharges[row.id] ?? 0,
       };
     }),
-    fillings: fillings.map((row) => {
+    fillings: rows.fillings.map((row) => {
       const { version, contents } = read(row.formulaId);
       return {
         id: row.id,
@@ -76,14 +96,14 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
         blurb: row.blurb,
         colour: row.colourHex,
         contents,
-        densityGPerMl: version.densityMgPerMl / 1000,
+        densityGPerMl: version.densityGPerMl,
         thicknessMm: row.thicknessUm / 1000,
         soft: row.soft,
         holdsToC: limitOf(version),
         surchargePerPortionMinor: prices.fillingSurcharges[row.id] ?? 0,
       };
     }),
-    styles: styles.map((row) => {
+    styles: rows.styles.map((row) => {
       const { version, contents } = read(row.formulaId);
       return {
         id: row.id,
@@ -93,18 +113,18 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
         bestFor: row.bestFor,
         sweetness: row.sweetness,
         smoothness: row.smoothness,
-        colour: version.baseColourHex ?? '#ffffff',
+        colour: version.baseColour ?? '#ffffff',
         holdsToC: limitOf(version),
         detail: row.detail,
         crusts: row.crusts,
         refrigerate: version.refrigerate,
         contents,
-        densityGPerMl: version.densityMgPerMl / 1000,
+        densityGPerMl: version.densityGPerMl,
         surchargePerPortionMinor: prices.styleSurcharges[row.id] ?? 0,
       };
     }),
     coverings: [],
-    decorations: decorations.map((row) => ({
+    decorations: rows.decorations.map((row) => ({
       id: row.id,
       name: row.name,
       blurb: row.blurb,
@@ -121,10 +141,10 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
       weightG: Math.round(row.weightMg / 1000),
       caution: row.caution,
       smallParts: row.smallParts,
-      contents: decorationContents(row, pantry, used),
+      contents: decorationContents(row, book, versionOf),
     })),
   };
-  parts.coverings = coverings.map((row) => {
+  parts.coverings = rows.coverings.map((row) => {
     const formula = row.formulaId === null ? null : read(row.formulaId);
     return {
       id: row.id,
@@ -138,32 +158,36 @@ export async function loadCakeParts(prices: PriceBookContent): Promise<CakeParts
           ? Math.max(...parts.styles.map((it) => it.holdsToC))
           : limitOf(formula.version)),
       detail: row.detail,
-      finishes: finishes
+      finishes: rows.finishes
         .filter((it) => it.coveringId === row.id)
         .map((it) => finishId.parse(it.finishId)),
       contents: formula?.contents ?? nothing,
       densityGPerMl:
         formula === null
           ? Math.max(...parts.styles.map((it) => it.densityGPerMl))
-          : formula.version.densityMgPerMl / 1000,
+          : formula.version.densityGPerMl,
       thicknessMm: (row.finalCoatUm === 0 ? row.crumbCoatUm : row.finalCoatUm) / 1000,
       surchargePerPortionMinor: prices.coveringSurcharges[row.id] ?? 0,
     };
   });
-  return { ...parts, handles: handledAllergens(pantry, used, owners) };
+  return parts;
+}
+
+function versionIdOf(book: KitchenBook, formulaId: string, versionOf: VersionOf): string {
+  const versionId = versionOf(formulaId) ?? book.currentVersionIds.get(formulaId);
+  if (versionId === undefined) throw new Error(`The formula ${formulaId} has no current version.`);
+  return versionId;
 }
 
 function readFormula(
-  pantry: Pantry,
+  book: KitchenBook,
   formulaId: string,
-  used: Set<string>,
+  versionOf: VersionOf,
 ): { version: FormulaVersion; contents: Contents } {
-  const versionId = pantry.currentVersionIds.get(formulaId);
-  const version = versionId === undefined ? undefined : pantry.versions.get(versionId);
-  if (version === undefined) throw new Error(`The formula ${formulaId} has no current version.`);
-  const node = pantry.formulaNode(version.id);
-  for (const id of ingredientIdsOf(node)) used.add(id);
-  return { version, contents: deriveContents(node) };
+  const versionId = versionIdOf(book, formulaId, versionOf);
+  const version = book.versions.get(versionId);
+  if (version === undefined) throw new Error(`The pantry has no version ${versionId}.`);
+  return { version, contents: book.contents(versionId) };
 }
 
 /** A formula that does not say counts as holding nowhere warm. */
@@ -171,41 +195,47 @@ function limitOf(version: FormulaVersion): number {
   return version.holdsToC ?? 20;
 }
 
-function decorationContents(row: Decoration, pantry: Pantry, used: Set<string>): Contents {
-  const lines: FormulaNode['lines'] = (row.ingredients ?? []).flatMap((line) => {
-    const part = pantry.ingredients.get(line.ingredientId);
+function decorationContents(row: Decoration, book: KitchenBook, versionOf: VersionOf): Contents {
+  return deriveContents(decorationNode(row, book, versionOf));
+}
+
+/** A decoration as if it were a formula: of bought goods, of a formula, of both or of no food. */
+function decorationNode(row: Decoration, book: KitchenBook, versionOf: VersionOf): FormulaNode {
+  const bought: FormulaNode['lines'] = (row.ingredients ?? []).flatMap((line) => {
+    const part = book.ingredients.get(line.ingredientId);
     return part === undefined ? [] : [{ weightMg: line.weightMg, part, joinsAtStep: 0 }];
   });
-  const versionId =
-    row.formulaId === null ? undefined : pantry.currentVersionIds.get(row.formulaId);
   const made: FormulaNode['lines'] =
-    versionId === undefined
+    row.formulaId === null
       ? []
-      : [{ weightMg: row.weightMg, part: pantry.formulaNode(versionId), joinsAtStep: 0 }];
-  const node: FormulaNode = {
-    kind: 'formula',
-    id: row.id,
-    name: row.name,
-    lines: [...lines, ...made],
-    steps: [],
-  };
-  for (const id of ingredientIdsOf(node)) used.add(id);
-  return deriveContents(node);
+      : [
+          {
+            weightMg: row.weightMg,
+            part: book.node(versionIdOf(book, row.formulaId, versionOf)),
+            joinsAtStep: 0,
+          },
+        ];
+  return { kind: 'formula', id: row.id, name: row.name, lines: [...bought, ...made], steps: [] };
 }
 
 /**
  * "Also handled in this kitchen": the union over ingredients in use plus what the owner adds.
  * What is handled is handled: a maker's "may contain" stays on the part it belongs to.
  */
-function handledAllergens(
-  pantry: Pantry,
-  used: ReadonlySet<string>,
-  owners: readonly KitchenAllergen[],
-): AllergenEntry[] {
+export function handledAllergens(rows: CakeRows, book: KitchenBook): AllergenEntry[] {
+  const current: VersionOf = () => undefined;
+  const made = [...rows.sponges, ...rows.fillings, ...rows.styles, ...rows.coverings]
+    .filter(({ archivedAt }) => archivedAt === null)
+    .flatMap(({ formulaId }) => formulaId ?? [])
+    .map((formulaId) => book.node(versionIdOf(book, formulaId, current)));
+  const put = rows.decorations
+    .filter(({ archivedAt }) => archivedAt === null)
+    .map((row) => decorationNode(row, book, current));
+  const used = new Set([...made, ...put].flatMap((node) => [...ingredientIdsIn(node)]));
   const bought = [...used].flatMap((id) =>
-    (pantry.ingredients.get(id)?.allergens ?? []).filter((it) => it.state === 'contains'),
+    (book.ingredients.get(id)?.allergens ?? []).filter((it) => it.state === 'contains'),
   );
-  const added = owners
+  const added = rows.owners
     .filter((it) => it.handled)
     .map((it): AllergenEntry => ({ allergen: it.allergen, species: [], state: 'contains' }));
   return mergeAllergens([bought, added]);

@@ -12,13 +12,34 @@ import { PriceBookVersion } from '#api/db/models/price-book-version.ts';
 import { SheetSize } from '#api/db/models/sheet-size.ts';
 import { Studio } from '#api/db/models/studio.ts';
 import { TierSize } from '#api/db/models/tier-size.ts';
+import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { localAt } from '#shared/dates/local-time.ts';
-import { loadCakeParts } from './load-cake-parts.ts';
-import { offered } from './offered.ts';
+import { currentPantry } from '#api/modules/pantry/load-pantry.queries.ts';
+import { cakePartsOf, handledAllergens, loadCakeRows } from './load-cake-parts.ts';
+import type { CakeParts, CakeRows, VersionOf } from './load-cake-parts.ts';
+import { inOrder, offered } from './offered.ts';
 import { presentStudioCard } from './studio-card.ts';
+
+/** Everything a menu is made of but the pantry, as it stands at an instant. */
+export type MenuGround = {
+  readonly rows: CakeRows;
+  readonly prices: PriceBookContent;
+  readonly studio: Studio;
+  readonly rest: Omit<Menu, 'version' | 'studio' | keyof CakeParts>;
+};
 
 /** The menu as it stands at this instant. */
 export async function loadMenu(now: Date): Promise<Menu> {
+  const [ground, pantry] = await Promise.all([loadMenuGround(now), currentPantry()]);
+  const content = menuContent(ground, kitchenBook(pantry));
+  const hash = createHash('sha256').update(JSON.stringify(content)).digest('base64url');
+  return { version: hash.slice(0, 16), ...content };
+}
+
+/** What a menu is made of; with what is not offered any more, where old orders are read. */
+export async function loadMenuGround(now: Date, { archivedToo = false } = {}): Promise<MenuGround> {
+  const which = archivedToo ? { order: inOrder } : offered;
   const [studio, book] = await Promise.all([
     Studio.findByPk(1, { rejectOnEmpty: true }),
     PriceBookVersion.findOne({
@@ -27,56 +48,74 @@ export async function loadMenu(now: Date): Promise<Menu> {
       rejectOnEmpty: true,
     }),
   ]);
-  const [cakeParts, portionSizes, occasions, tierSizes, sheetSizes, extras, rules, policies] =
+  const [rows, portionSizes, occasions, tierSizes, sheetSizes, extras, rules, policies] =
     await Promise.all([
-      loadCakeParts(book.content),
-      PortionSize.findAll(offered),
-      Occasion.findAll(offered),
-      TierSize.findAll(offered),
-      SheetSize.findAll(offered),
-      Extra.findAll(offered),
+      loadCakeRows({ archivedToo }),
+      PortionSize.findAll(which),
+      Occasion.findAll(which),
+      TierSize.findAll(which),
+      SheetSize.findAll(which),
+      Extra.findAll(which),
       AllergyRule.findAll(),
       loadPolicies(now, studio.zone),
     ]);
-  const { handles, ...parts } = cakeParts;
-  const content: Omit<Menu, 'version'> = {
-    studio: presentStudioCard(studio, handles),
-    portionSizes: portionSizes.map(({ id, name, widthMm, depthMm, blurb }) => ({
-      id: portionSizeIdOf(id),
-      name,
-      widthMm,
-      depthMm,
-      blurb,
-    })),
-    occasions: occasions.map(({ id, name }) => ({ id, name })),
-    tierSizes: tierSizes.map(({ shape, widthMm, depthMm, heightsMm }) => ({
-      shape,
-      widthMm,
-      depthMm,
-      heightsMm,
-    })),
-    sheetSizes: sheetSizes.map(({ id, name, widthMm, depthMm, heightMm }) => ({
-      id,
-      name,
-      widthMm,
-      depthMm,
-      heightMm,
-    })),
-    ...parts,
-    extras: extras.map(({ id, name, blurb }) => ({
-      id,
-      name,
-      blurb,
-      priceMinor: book.content.extraPrices[id] ?? 0,
-    })),
-    priceBook: publicPriceBook(book.id, book.content),
-    allergyRules: rules.map(({ allergen, severity, answer }) => ({ allergen, severity, answer })),
-    policies,
-    wordsPer100Mm: studio.wordsPerDecimetre,
-    maxPhotos: studio.maxPhotos,
+  return {
+    rows,
+    prices: book.content,
+    studio,
+    rest: {
+      portionSizes: portionSizes.map(({ id, name, widthMm, depthMm, blurb }) => ({
+        id: portionSizeIdOf(id),
+        name,
+        widthMm,
+        depthMm,
+        blurb,
+      })),
+      occasions: occasions.map(({ id, name }) => ({ id, name })),
+      tierSizes: tierSizes.map(({ shape, widthMm, depthMm, heightsMm }) => ({
+        shape,
+        widthMm,
+        depthMm,
+        heightsMm,
+      })),
+      sheetSizes: sheetSizes.map(({ id, name, widthMm, depthMm, heightMm }) => ({
+        id,
+        name,
+        widthMm,
+        depthMm,
+        heightMm,
+      })),
+      extras: extras.map(({ id, name, blurb }) => ({
+        id,
+        name,
+        blurb,
+        priceMinor: book.content.extraPrices[id] ?? 0,
+      })),
+      priceBook: publicPriceBook(book.id, book.content),
+      allergyRules: rules.map(({ allergen, severity, answer }) => ({ allergen, severity, answer })),
+      policies,
+      wordsPer100Mm: studio.wordsPerDecimetre,
+      maxPhotos: studio.maxPhotos,
+    },
   };
-  const hash = createHash('sha256').update(JSON.stringify(content)).digest('base64url');
-  return { version: hash.slice(0, 16), ...content };
+}
+
+/** A menu over a pantry; by other versions of its formulas than today's, where an order keeps them. */
+export function menuContent(
+  { rows, prices, studio, rest }: MenuGround,
+  book: KitchenBook,
+  versionOf?: VersionOf,
+): Omit<Menu, 'version'> {
+  const { portionSizes, occasions, tierSizes, sheetSizes, ...others } = rest;
+  return {
+    studio: presentStudioCard(studio, handledAllergens(rows, book)),
+    portionSizes,
+    occasions,
+    tierSizes,
+    sheetSizes,
+    ...cakePartsOf(rows, book, prices, versionOf),
+    ...others,
+  };
 }
 
 /** Only what the price of a cake needs; what the owner alone sees stays out. */

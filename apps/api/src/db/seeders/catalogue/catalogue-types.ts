@@ -1,4 +1,4 @@
-import type { IngredientFamily } from '#api/db/models/ingredient.ts';
+import type { IngredientFamily } from '#shared/contracts/pantry.ts';
 import type {
   AllergenId,
   AllergenState,
