@@ -58,10 +58,15 @@ const benchPairs: readonly (readonly [celsius: number, fahrenheit: number])[] = 
   [115, 240],
 ];
 
+/** °F by the bench's own pairs: 115 °C is its 240 °F, 71 °C its 160 °F; else by arithmetic. */
+export function benchFahrenheit(celsius: number): number {
+  const pair = benchPairs.find(([c]) => c === Math.round(celsius));
+  return pair === undefined ? celsiusToFahrenheit(celsius) : pair[1];
+}
+
 /** As `formatTemperature`, with the bench's own pairs: 240 °F is 115 °C, 160 °F is 71 °C. */
 export function formatBenchTemperature(celsius: number, lead: TemperatureLead): string {
-  const pair = benchPairs.find(([c]) => c === Math.round(celsius));
-  return pair === undefined ? formatTemperature(celsius, lead) : bothScales(pair[0], pair[1], lead);
+  return bothScales(Math.round(celsius), Math.round(benchFahrenheit(celsius)), lead);
 }
 
 function bothScales(celsius: number, fahrenheit: number, lead: TemperatureLead): string {
