@@ -45,6 +45,8 @@ export type FormulaNode = {
   readonly kind: 'formula';
   readonly id: string;
   readonly name: string;
+  /** What is left of what goes in, parts per million; all of it where it is not told. */
+  readonly yieldPpm?: number;
   readonly lines: readonly FormulaLine[];
   readonly steps: readonly FormulaStep[];
 };
