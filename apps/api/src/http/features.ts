@@ -1,12 +1,14 @@
 import { estimatesRoutes } from '#api/modules/estimates/estimates.routes.ts';
 import { ordersRoutes } from '#api/modules/orders/orders.routes.ts';
 import { photosRoutes } from '#api/modules/photos/photos.routes.ts';
+import { allergyTableRoutes } from '#api/modules/allergy-table/allergy-table.routes.ts';
 import { accountsRoutes } from '#api/modules/accounts/accounts.routes.ts';
 import { datesRoutes } from '#api/modules/dates/dates.routes.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { healthRoutes } from '#api/modules/health/health.routes.ts';
 import { menuRoutes } from '#api/modules/menu/menu.routes.ts';
 import { peopleRoutes } from '#api/modules/people/people.routes.ts';
+import { pricesRoutes } from '#api/modules/prices/prices.routes.ts';
 import { googleRoutes } from '#api/modules/sessions/google.routes.ts';
 import { linksRoutes } from '#api/modules/sessions/links.routes.ts';
 import { orderAccessRoutes } from '#api/modules/sessions/order-access.routes.ts';
@@ -37,6 +39,8 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     orderAccessRoutes(deps),
     accountsRoutes(deps),
     peopleRoutes(deps),
+    allergyTableRoutes(deps),
+    pricesRoutes(deps),
     healthRoutes(deps),
   ];
 }

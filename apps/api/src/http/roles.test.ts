@@ -4,6 +4,7 @@ import * as z from 'zod/mini';
 import { idempotencyHeader } from '#shared/contracts/headers.ts';
 import { photo as photoView } from '#shared/contracts/photos.ts';
 import { Closure } from '#api/db/models/closure.ts';
+import { firstPriceBook } from '#api/db/seeders/catalogue/price-book.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
@@ -186,6 +187,13 @@ const table: Readonly<Record<string, Line>> = {
   'withdraw-order': line(itsCustomer, ({ order }) =>
     post(`/api/orders/${order.code}/withdraw`, { rowVersion: order.rowVersion, reason: '' }),
   ),
+  // Nothing was lifted on this order, which its customer alone is told.
+  'accept-lifted-stop': line([404, 404, 404, 404, 403, 403, 403], ({ order }) =>
+    post(`/api/orders/${order.code}/accept-lifted-stop`, {
+      rowVersion: order.rowVersion,
+      liftedStopId: newId(),
+    }),
+  ),
   'write-message': line(itsCustomer, ({ order }) =>
     post(`/api/orders/${order.code}/messages`, { body: 'With less sugar, please.' }),
   ),
@@ -229,6 +237,11 @@ const table: Readonly<Record<string, Line>> = {
   'answer-allergy': line(bakers, (scene) =>
     onOrder(`allergies/${scene.allergy.id}/answer`, { text: 'We talked.' })(scene),
   ),
+  // No stop stands on this order, which bakers and the owner alone are told.
+  'record-talk': line(
+    [401, 401, 403, 403, 403, 404, 404],
+    onOrder('talks', { about: 'heat', text: 'We talked.' }),
+  ),
   // No stop stands on this order, which the owner alone is told.
   'lift-stop': line(
     [401, 401, 403, 403, 403, 403, 404],
@@ -263,6 +276,27 @@ const table: Readonly<Record<string, Line>> = {
     put(`/api/staff/people/${person.id}/role`, { role: 'counter' }),
   ),
   'end-role': line(owners, ({ person }) => remove(`/api/staff/people/${person.id}`)),
+
+  // What the studio takes, talks over and refuses.
+  'see-allergy-table': line(owners, '/api/staff/allergy-table'),
+  // Made from a table that is not the present one, which the owner alone is told.
+  'save-allergy-table': line(owners, () =>
+    put('/api/staff/allergy-table', {
+      version: 'another',
+      rules: [],
+      kitchen: [],
+      kitchenNotice: 'One kitchen.',
+      homeKitchenText: '',
+      eggAdvisory: 'Raw egg can make people ill.',
+    }),
+  ),
+
+  // What things cost.
+  'see-prices': line(owners, '/api/staff/prices'),
+  // Made from a book that is not the newest, which the owner alone is told.
+  'save-prices': line(owners, () =>
+    put('/api/staff/prices', { madeFrom: 0, content: firstPriceBook }),
+  ),
 };
 
 const emails: Partial<Record<ActorName, string>> = {

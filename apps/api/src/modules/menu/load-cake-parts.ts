@@ -16,7 +16,7 @@ import { Decoration } from '#api/db/models/decoration.ts';
 import { Filling } from '#api/db/models/filling.ts';
 import { KitchenAllergen } from '#api/db/models/kitchen-allergen.ts';
 import { Sponge } from '#api/db/models/sponge.ts';
-import { inOrder, offered } from './offered.ts';
+import { inOrder, offered } from '#api/db/offered.ts';
 
 export type CakeParts = Pick<Menu, 'sponges' | 'fillings' | 'styles' | 'coverings' | 'decorations'>;
 

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { Op } from 'sequelize';
-import type { Menu, PolicyText, PriceBook } from '#shared/contracts/menu.ts';
+import type { Menu, PolicyText } from '#shared/contracts/menu.ts';
 import { portionSizeId } from '#shared/contracts/vocabulary.ts';
 import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import { AllergyRule } from '#api/db/models/allergy-rule.ts';
@@ -14,11 +14,12 @@ import { Studio } from '#api/db/models/studio.ts';
 import { TierSize } from '#api/db/models/tier-size.ts';
 import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import { publicPriceBook } from '#shared/kitchen/price-book.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import { currentPantry } from '#api/modules/pantry/load-pantry.queries.ts';
 import { cakePartsOf, handledAllergens, loadCakeRows } from './load-cake-parts.ts';
 import type { CakeParts, CakeRows, VersionOf } from './load-cake-parts.ts';
-import { inOrder, offered } from './offered.ts';
+import { inOrder, offered } from '#api/db/offered.ts';
 import { presentStudioCard } from './studio-card.ts';
 
 /** Everything a menu is made of but the pantry, as it stands at an instant. */
@@ -85,10 +86,11 @@ export async function loadMenuGround(now: Date, { archivedToo = false } = {}): P
         depthMm,
         heightMm,
       })),
-      extras: extras.map(({ id, name, blurb }) => ({
+      extras: extras.map(({ id, name, blurb, taxCategory }) => ({
         id,
         name,
         blurb,
+        taxCategory,
         priceMinor: book.content.extraPrices[id] ?? 0,
       })),
       priceBook: publicPriceBook(book.id, book.content),
@@ -115,27 +117,6 @@ export function menuContent(
     sheetSizes,
     ...cakePartsOf(rows, book, prices, versionOf),
     ...others,
-  };
-}
-
-/** Only what the price of a cake needs; what the owner alone sees stays out. */
-function publicPriceBook(versionId: string, content: PriceBookContent): PriceBook {
-  return {
-    versionId,
-    currency: content.currency,
-    tierBands: content.tierBands,
-    sheetPerPortionMinor: content.sheetPerPortionMinor,
-    dummyTierMinor: content.dummyTierMinor,
-    finishes: content.finishes,
-    wordsMinor: content.wordsMinor,
-    minimumMinor: content.minimumMinor,
-    rush: content.rush,
-    taxInclusive: content.taxInclusive,
-    taxes: content.taxes,
-    roundToMinor: content.roundToMinor,
-    depositPpm: content.depositPpm,
-    depositFloorMinor: content.depositFloorMinor,
-    balanceDueDays: content.balanceDueDays,
   };
 }
 
