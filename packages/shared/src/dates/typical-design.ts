@@ -1,7 +1,8 @@
-import type { Coating, Design, PlacedDecoration } from '#shared/contracts/design.ts';
+import type { Cake, Coating, Design, PlacedDecoration } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { portionsWanted } from '#shared/kitchen/portions.ts';
 import { proposeStacks, tiersOf } from '#shared/kitchen/proposals.ts';
+import { cuttingCakeOf, proposeShows } from '#shared/kitchen/propose-cutting.ts';
 
 /** A design that can be planned, and whether it is the customer's own or a likely one. */
 export type PlannableDesign = { readonly design: Design; readonly likely: boolean };
@@ -23,9 +24,7 @@ export function typicalDesign(design: Design, menu: Menu): PlannableDesign {
   const whole = chosen
     ? { ...cake, coating: cake.coating ?? typicalCoating(menu) }
     : {
-        kind: 'tiered' as const,
-        tiers: typicalTiers(design, menu),
-        sheet: null,
+        ...typicalCake(design, menu),
         coating: cake?.coating ?? typicalCoating(menu),
       };
   return {
@@ -34,20 +33,28 @@ export function typicalDesign(design: Design, menu: Menu): PlannableDesign {
   };
 }
 
-function typicalTiers({ guests }: Design, menu: Menu) {
+function typicalCake({ guests }: Design, menu: Menu): Omit<Cake, 'coating'> {
   const portion =
     menu.portionSizes.find((it) => it.id === guests.portionSizeId) ?? menu.portionSizes[0];
   const inside = { spongeId: menu.sponges[0]?.id ?? null, fillingId: menu.fillings[0]?.id ?? null };
-  if (portion === undefined) return [];
+  const none: Omit<Cake, 'coating'> = { kind: 'tiered', tiers: [], sheet: null, cuttingCakes: [] };
+  if (portion === undefined) return none;
   const wanted = portionsWanted(guests, menu);
-  // Beyond what the studio can stack, the largest stack stands for the show and sheets feed the rest.
-  for (let portions = wanted; portions > 0; portions = Math.floor(portions * 0.8)) {
-    const [most] = proposeStacks(portions, menu, portion).toSorted(
-      (a, b) => b.sizes.length - a.sizes.length,
-    );
-    if (most !== undefined) return tiersOf(most, inside);
-  }
-  return [];
+  const [most] = proposeStacks(wanted, menu, portion).toSorted(
+    (a, b) => b.sizes.length - a.sizes.length,
+  );
+  if (most !== undefined) return { ...none, tiers: tiersOf(most, inside) };
+  // Beyond what the studio stacks, a grand show and cutting cakes for the rest.
+  const [show] = proposeShows(wanted, menu, portion, { keepTop: false, alone: false }).toSorted(
+    (a, b) => b.stack.sizes.length - a.stack.sizes.length,
+  );
+  if (show === undefined) return none;
+  const { stack, cut } = show;
+  return {
+    ...none,
+    tiers: tiersOf(stack, inside),
+    cuttingCakes: [cuttingCakeOf(cut.size, cut.count, inside)],
+  };
 }
 
 function typicalCoating(menu: Menu): Coating {

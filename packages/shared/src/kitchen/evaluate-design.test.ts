@@ -144,7 +144,12 @@ describe('the estimate of a whole cake', () => {
   const estimate = evaluateDesign({ design: designFixture, date: null }, menuFixture, today);
 
   it('counts its portions from the board up', () => {
-    expect(estimate.portions).toEqual({ wanted: 70, fed: 77, perTier: [39, 25, 13] });
+    expect(estimate.portions).toEqual({
+      wanted: 70,
+      fed: 77,
+      perTier: [39, 25, 13],
+      perCuttingCake: [],
+    });
   });
 
   it('says what is in it and in which parts, and what else is handled', () => {

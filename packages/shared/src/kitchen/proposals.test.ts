@@ -1,13 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { tier as tierContract } from '#shared/contracts/design.ts';
-import { portionsWanted } from './portions.ts';
+import { cake as cakeContract, tier as tierContract } from '#shared/contracts/design.ts';
+import { countPortions, portionsWanted } from './portions.ts';
 import { priceDesign } from './price.ts';
-import { proposeCakes } from './propose-cakes.ts';
+import { cakeOfProposal, proposeCakes } from './propose-cakes.ts';
 import { proposeStacks, tiersOf, usualLayers } from './proposals.ts';
 import { resolveDesign } from './resolve-design.ts';
 import { portionsPerTier, smallestStepMm } from './sizes.ts';
-import { declares, designWith } from './testing/design-fixture.ts';
+import { declares, designWith, roundTier, swissCoat } from './testing/design-fixture.ts';
 import { menuFixture as menu } from './testing/menu-fixture.ts';
 
 const anySize = fc.constantFrom(...menu.portionSizes);
@@ -72,10 +72,10 @@ describe('proposed stacks', () => {
 describe('proposed cakes', () => {
   it('cost what they would cost if chosen', () => {
     const design = designWith({ cake: null });
-    for (const { tiers, priceMinor } of propose(design)) {
-      const chosen = { kind: 'tiered' as const, tiers, sheet: null, coating: null, cuttingCakes: [] };
+    for (const proposal of propose(design)) {
+      const chosen = cakeOfProposal(proposal, null);
       const resolved = resolveDesign({ ...design, cake: chosen }, menu);
-      expect(priceMinor).toBe(priceDesign(resolved, terms).totalMinor);
+      expect(proposal.priceMinor).toBe(priceDesign(resolved, terms).totalMinor);
     }
   });
 
@@ -102,3 +102,76 @@ describe('proposed cakes', () => {
 function fail(): never {
   throw new Error('The fixture has three portion sizes.');
 }
+
+describe('proposals with cutting cakes', () => {
+  const proposed = (headCount: number, portionSizeId: 'coffee' | 'dessert' | 'party' = 'dessert') =>
+    propose(designWith({ cake: null, guests: { headCount, portionSizeId } }));
+
+  it('feed every head count the form takes, and say truly how many', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 1, max: 2000 }), anySize, (headCount, { id }) => {
+        const proposals = proposed(headCount, id);
+        expect(proposals.length).toBeGreaterThan(0);
+        for (const it of proposals) {
+          const cake = cakeOfProposal(it, swissCoat);
+          expect(cakeContract.safeParse(cake).success).toBe(true);
+          const design = designWith({ cake, guests: { headCount, portionSizeId: id } });
+          expect(countPortions(design, menu).fed).toBe(it.portions);
+          expect(it.portions).toBeGreaterThanOrEqual(headCount);
+        }
+      }),
+      { numRuns: 200 },
+    );
+  });
+
+  it('waste little: within a fifth of what is wanted, or the smallest tin', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 1, max: 2000 }), anySize, (headCount, { id }) => {
+        const [first] = proposed(headCount, id).filter((it) => it.sheet === null);
+        // The smallest tin feeds twelve in coffee portions.
+        expect(first?.portions).toBeLessThanOrEqual(Math.max(headCount * 1.2, headCount + 12));
+      }),
+      { numRuns: 200 },
+    );
+  });
+
+  it('ask for no fewer portions as the table grows, but for the rounding of tins', () => {
+    for (const portion of menu.portionSizes) {
+      let before = 0;
+      for (let wanted = 1; wanted <= 280; wanted += 1) {
+        const just = proposeStacks(wanted, menu, portion).find((it) => it.blurb === 'Just enough');
+        expect(just?.portions).toBeGreaterThanOrEqual(before - 2);
+        before = just?.portions ?? before;
+      }
+    }
+  });
+
+  it('show a cake of three tiers or more, and cut the rest in the kitchen', () => {
+    const show = proposed(150).find((it) => it.cuttingCakes.length > 0 && it.sheet === null);
+    expect(show?.tiers.length).toBeGreaterThanOrEqual(3);
+    expect(show?.cuttingCakes[0]).toMatchObject({ spongeId: 'vanilla', layers: 2 });
+    // Beyond what stacks: nothing else is left, in two heights.
+    const [grand, small] = proposed(1200).filter((it) => it.sheet === null);
+    expect([grand?.tiers.length, small?.tiers.length].toSorted()).toEqual([3, 5]);
+  });
+
+  it('offer a sheet where it is sensible, with more in the kitchen where one is too small', () => {
+    const sheet = (headCount: number) => proposed(headCount).find((it) => it.sheet !== null);
+    expect(sheet(6)).toBeUndefined();
+    expect(sheet(50)).toMatchObject({ sheet: { sizeId: 'half' }, cuttingCakes: [], portions: 54 });
+    // A full sheet feeds 117.
+    expect(sheet(200)?.sheet?.sizeId).toBe('full');
+    expect(sheet(200)?.cuttingCakes).toHaveLength(1);
+  });
+
+  it('keep the top tier back where it was kept back, and feed everybody from the others', () => {
+    const tiers = [roundTier(10), roundTier(8), roundTier(6, { keepsake: true })];
+    const proposals = propose(designWith({ cake: { tiers } })).filter((it) => it.sheet === null);
+    for (const it of proposals) {
+      expect(it.tiers.at(-1)?.keepsake).toBe(true);
+      expect(it.name).toMatch(/the top one kept back/);
+      expect(it.portions).toBeGreaterThanOrEqual(70);
+    }
+    expect(proposals.length).toBeGreaterThan(1);
+  });
+});

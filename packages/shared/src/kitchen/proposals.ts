@@ -9,6 +9,8 @@ import { doubleHeightMm, portionsOfBlock, smallestStepMm } from './sizes.ts';
 export type Stack = {
   readonly sizes: readonly TierSize[];
   readonly heightMm: number;
+  /** The top tier is kept back and feeds nobody on the day. */
+  readonly keepTop: boolean;
   readonly portions: number;
 };
 
@@ -33,28 +35,32 @@ const roundingMm = 1;
 
 const stacksByMenu = new WeakMap<Menu, Map<string, readonly Stack[]>>();
 
-/** Every sensible stack of the studio's round sizes (square where it bakes no round ones). */
-function stacksOf(menu: Menu, portion: PortionSize): readonly Stack[] {
+/**
+ * Every sensible stack of the studio's round sizes (square where it bakes no round ones), fewest
+ * portions first.
+ */
+export function stacksOf(menu: Menu, portion: PortionSize, keepTop: boolean): readonly Stack[] {
   let byPortion = stacksByMenu.get(menu);
   if (byPortion === undefined) {
     byPortion = new Map();
     stacksByMenu.set(menu, byPortion);
   }
-  let stacks = byPortion.get(portion.id);
+  const key = `${portion.id}:${String(keepTop)}`;
+  let stacks = byPortion.get(key);
   if (stacks === undefined) {
-    stacks = enumerate(menu, portion);
-    byPortion.set(portion.id, stacks);
+    stacks = enumerate(menu, portion, keepTop);
+    byPortion.set(key, stacks);
   }
   return stacks;
 }
 
-function enumerate(menu: Menu, portion: PortionSize): Stack[] {
+function enumerate(menu: Menu, portion: PortionSize, keepTop: boolean): Stack[] {
   const round = menu.tierSizes.filter((it) => it.shape === 'round');
   const shapes = round.length > 0 ? round : menu.tierSizes.filter((it) => it.shape === 'square');
   const widestFirst = shapes.toSorted((a, b) => b.widthMm - a.widthMm);
   const stacks: Stack[] = [];
   const grow = (sizes: readonly TierSize[], from: number) => {
-    if (sizes.length > 0) stacks.push(...atHeights(sizes, portion));
+    if (sizes.length > (keepTop ? 1 : 0)) stacks.push(...atHeights(sizes, portion, keepTop));
     if (sizes.length === mostTiers) return;
     const top = sizes.at(-1);
     for (const [index, next] of widestFirst.entries()) {
@@ -71,7 +77,7 @@ function enumerate(menu: Menu, portion: PortionSize): Stack[] {
 }
 
 /** A stack at the usual height, and again with double tiers for tables that need more. */
-function atHeights(sizes: readonly TierSize[], portion: PortionSize): Stack[] {
+function atHeights(sizes: readonly TierSize[], portion: PortionSize, keepTop: boolean): Stack[] {
   const common = (sizes[0]?.heightsMm ?? []).filter((height) =>
     sizes.every((it) => it.heightsMm.includes(height)),
   );
@@ -92,17 +98,17 @@ function atHeights(sizes: readonly TierSize[], portion: PortionSize): Stack[] {
           {
             sizes,
             heightMm,
-            portions: sizes.reduce(
-              (sum, it) => sum + portionsOfBlock({ ...it, heightMm }, portion),
-              0,
-            ),
+            keepTop,
+            portions: sizes
+              .slice(0, keepTop ? -1 : undefined)
+              .reduce((sum, it) => sum + portionsOfBlock({ ...it, heightMm }, portion), 0),
           },
         ],
   );
 }
 
 /** How many tiers look right for a table (memory). */
-function usualTiers(wanted: number): number {
+export function usualTiers(wanted: number): number {
   if (wanted <= 28) return 1;
   if (wanted <= 60) return 2;
   if (wanted <= 120) return 3;
@@ -112,10 +118,16 @@ function usualTiers(wanted: number): number {
 /**
  * Two or three stacks that feed a number of portions: the one that wastes least, one with some
  * over, and one of another number of tiers. Least waste first; usual heights before
- * double ones. Empty where the studio bakes nothing large enough. The same menu and number always give the same answer.
+ * double ones. Empty where the studio bakes nothing large enough. With `keepTop` the top tier is a
+ * keepsake and the others feed everybody. The same menu and number always give the same answer.
  */
-export function proposeStacks(wanted: number, menu: Menu, portion: PortionSize): ProposedStack[] {
-  const enough = stacksOf(menu, portion).filter((it) => it.portions >= wanted);
+export function proposeStacks(
+  wanted: number,
+  menu: Menu,
+  portion: PortionSize,
+  keepTop = false,
+): ProposedStack[] {
+  const enough = stacksOf(menu, portion, keepTop).filter((it) => it.portions >= wanted);
   const single = enough.filter((it) => it.heightMm <= doubleHeightMm);
   const usable = single.length > 0 ? single : enough;
   const tiers = usualTiers(wanted);
@@ -152,14 +164,21 @@ const otherWord = (other: Stack, just: Stack): string =>
   other.sizes.length > just.sizes.length ? 'Taller' : 'Lower and wider';
 
 function describe(stack: Stack, blurb: string, menu: Menu): ProposedStack {
+  return { ...stack, id: idOfStack(stack), name: nameOfStack(stack, menu), blurb };
+}
+
+/** The same for the same tiers, whatever they feed. */
+export function idOfStack({ sizes, heightMm, keepTop }: Stack): string {
+  const tins = sizes.map((it) => `${it.shape}-${it.widthMm}`).join('+');
+  return `${tins}x${heightMm}${keepTop ? '-kept' : ''}`;
+}
+
+/** "Three tiers, 10, 8 and 6 in", the top kept back where it is. */
+export function nameOfStack({ sizes, keepTop }: Stack, menu: Menu): string {
   const lead = menu.studio.lengthLead;
-  const figures = stack.sizes.map((it) => lengthFigure(it.widthMm, lead));
-  return {
-    ...stack,
-    id: `${stack.sizes.map((it) => `${it.shape}-${it.widthMm}`).join('+')}x${stack.heightMm}`,
-    name: `${countOf(stack.sizes.length, 'tier')}, ${formatList(figures)} ${lead}`,
-    blurb,
-  };
+  const figures = sizes.map((it) => lengthFigure(it.widthMm, lead));
+  const kept = keepTop ? ', the top one kept back' : '';
+  return `${countOf(sizes.length, 'tier')}, ${formatList(figures)} ${lead}${kept}`;
 }
 
 /** Layers of sponge for a height: one for about every 35 mm, an even number when cut double. */
@@ -173,14 +192,14 @@ export function tiersOf(
   stack: Stack,
   inside: { readonly spongeId: string | null; readonly fillingId: string | null },
 ): Tier[] {
-  return stack.sizes.map(({ shape, widthMm, depthMm }) => ({
+  return stack.sizes.map(({ shape, widthMm, depthMm }, index) => ({
     shape,
     widthMm,
     depthMm,
     heightMm: stack.heightMm,
     layers: usualLayers(stack.heightMm),
     real: true,
-    keepsake: false,
+    keepsake: stack.keepTop && index === stack.sizes.length - 1,
     spongeId: inside.spongeId,
     fillingId: inside.fillingId,
     coating: null,

@@ -1,9 +1,10 @@
-import type { Cake } from '#shared/contracts/design.ts';
+import type { Cake, Coating } from '#shared/contracts/design.ts';
 import type { Proposal } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { portionsWanted } from './portions.ts';
 import { priceDesign, type PriceTerms } from './price.ts';
 import { proposeStacks, tiersOf } from './proposals.ts';
-import { portionsWanted } from './portions.ts';
+import { cuttingCakeOf, proposeSheet, proposeShows, sheetOf } from './propose-cutting.ts';
 import { resolveDesign, type ResolvedDesign } from './resolve-design.ts';
 import { guestsClash } from './situation.ts';
 
@@ -12,16 +13,28 @@ const remembered = new WeakMap<Menu, Map<string, readonly Proposal[]>>();
 const mostRemembered = 64;
 
 /**
- * Two or three cakes for the head count, priced as cakes alone (no decorations, no extras). They
- * take the sponge, filling and coat already chosen, else the first of the menu that no guest's
- * allergy or diet speaks against.
+ * Two or three cakes for the head count and a sheet where that is sensible, priced as cakes alone
+ * (no decorations, no extras). Large tables are offered a cake on show with cutting cakes in the
+ * kitchen; tables no stack feeds are offered nothing else. They take the sponge, filling and coat
+ * already chosen, else the first of the menu that no guest's allergy or diet speaks against; a top
+ * tier that is kept back stays kept back.
  */
 export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Proposal[] {
   const { design, menu, portionSize } = resolved;
   const wanted = portionsWanted(design.guests, menu);
   const inside = insideOf(resolved);
   const coating = design.cake?.coating ?? null;
-  const key = JSON.stringify([wanted, portionSize.id, inside, coating, terms.date, terms.today]);
+  const top = resolved.tiers.length > 1 ? resolved.tiers.at(-1) : undefined;
+  const keepTop = design.cake?.kind === 'tiered' && top?.keepsake === true;
+  const key = JSON.stringify([
+    wanted,
+    portionSize.id,
+    inside,
+    coating,
+    keepTop,
+    terms.date,
+    terms.today,
+  ]);
   let known = remembered.get(menu);
   if (known === undefined) {
     known = new Map();
@@ -29,13 +42,10 @@ export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Propo
   }
   const before = known.get(key);
   if (before !== undefined) return [...before];
-  const proposals = proposeStacks(wanted, menu, portionSize).map((stack) => {
-    const tiers = tiersOf(stack, inside);
-    const cake: Cake = { kind: 'tiered', tiers, sheet: null, coating };
+  const proposals = unpriced(resolved, inside, keepTop).map((it): Proposal => {
+    const cake = cakeOfProposal(it, coating);
     const alone = resolveDesign({ ...design, cake, look: null, extras: [] }, menu);
-    const { totalMinor } = priceDesign(alone, terms);
-    const { id, name, blurb, portions } = stack;
-    return { id, name, blurb, portions, tiers, priceMinor: totalMinor };
+    return { ...it, priceMinor: priceDesign(alone, terms).totalMinor };
   });
   const oldest = known.keys().next();
   if (known.size >= mostRemembered && oldest.done !== true) known.delete(oldest.value);
@@ -43,12 +53,70 @@ export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Propo
   return [...proposals];
 }
 
-function insideOf(resolved: ResolvedDesign): {
-  readonly spongeId: string | null;
-  readonly fillingId: string | null;
-} {
-  const { menu, tiers } = resolved;
-  const chosen = tiers.find((it) => it.real);
+/** The cake a proposal stands for, under a coat. */
+export function cakeOfProposal(
+  { tiers, sheet, cuttingCakes }: Pick<Proposal, 'tiers' | 'sheet' | 'cuttingCakes'>,
+  coating: Coating | null,
+): Cake {
+  return { kind: sheet === null ? 'tiered' : 'sheet', tiers, sheet, coating, cuttingCakes };
+}
+
+type Inside = { readonly spongeId: string | null; readonly fillingId: string | null };
+
+function unpriced(
+  { design, menu, portionSize }: ResolvedDesign,
+  inside: Inside,
+  keepTop: boolean,
+): Omit<Proposal, 'priceMinor'>[] {
+  const wanted = portionsWanted(design.guests, menu);
+  const stacks = proposeStacks(wanted, menu, portionSize, keepTop);
+  const alone = stacks.length > 0;
+  const shows = proposeShows(wanted, menu, portionSize, { keepTop, alone });
+  const sheet = proposeSheet(wanted, menu, portionSize);
+  // Beside a show cake two stacks are choice enough: a third of another height steps back.
+  const beside =
+    shows.length === 0
+      ? stacks
+      : stacks.filter((it) => it.blurb === 'Just enough' || it.blurb === 'Some over');
+  return [
+    ...beside.map((it) => ({
+      id: it.id,
+      name: it.name,
+      blurb: it.blurb,
+      portions: it.portions,
+      tiers: tiersOf(it, inside),
+      sheet: null,
+      cuttingCakes: [],
+    })),
+    ...shows.map(({ id, name, blurb, portions, stack, cut }) => ({
+      id,
+      name,
+      blurb,
+      portions,
+      tiers: tiersOf(stack, inside),
+      sheet: null,
+      cuttingCakes: [cuttingCakeOf(cut.size, cut.count, inside)],
+    })),
+    ...(sheet === null
+      ? []
+      : [
+          {
+            id: sheet.id,
+            name: sheet.name,
+            blurb: sheet.blurb,
+            portions: sheet.portions,
+            tiers: [],
+            sheet: sheetOf(sheet.size, inside),
+            cuttingCakes:
+              sheet.cut === null ? [] : [cuttingCakeOf(sheet.cut.size, sheet.cut.count, inside)],
+          },
+        ]),
+  ];
+}
+
+function insideOf(resolved: ResolvedDesign): Inside {
+  const { menu, tiers, cuttingCakes } = resolved;
+  const chosen = [...tiers, ...cuttingCakes].find((it) => it.real);
   if (chosen !== undefined && chosen.sponge !== null && chosen.filling !== null) {
     return { spongeId: chosen.sponge.id, fillingId: chosen.filling.id };
   }

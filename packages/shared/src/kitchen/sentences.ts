@@ -11,6 +11,11 @@ export function countOf(count: number, one: string, many = `${one}s`): string {
   return `${counts[count] ?? String(count)} ${count === 1 ? one : many}`;
 }
 
+/** "one cutting cake", "three cutting cakes". */
+export function cuttingWords(count: number): string {
+  return countOf(count, 'cutting cake').toLowerCase();
+}
+
 /** The first letter in upper case, the rest as it is. */
 export function capitalise(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,9 +1,9 @@
 import type { Cake, Design } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { lengthFigure } from './measures.ts';
+import { countOf, cuttingWords } from './sentences.ts';
 import { countPortions } from './portions.ts';
 import { formatList } from '#shared/dates/format.ts';
-import { countOf } from './sentences.ts';
 import { sheetSizeOf } from './sizes.ts';
 
 /**
@@ -16,8 +16,17 @@ export function summariseDesign(design: Design, menu: Menu): string {
   return `${summariseCake(design.cake, menu)}, ${fed} ${fed === 1 ? 'portion' : 'portions'}`;
 }
 
-/** The cake without its portions: "Two tiers, 10 and 8 in". Throws `UnknownPart`. */
+/**
+ * The cake without its portions: "Two tiers, 10 and 8 in, with three cutting cakes". Throws
+ * `UnknownPart`.
+ */
 export function summariseCake(cake: Cake, menu: Menu): string {
+  const cutting = cake.cuttingCakes.reduce((sum, it) => sum + it.count, 0);
+  const shown = summariseShown(cake, menu);
+  return cutting === 0 ? shown : `${shown}, with ${cuttingWords(cutting)}`;
+}
+
+function summariseShown(cake: Cake, menu: Menu): string {
   if (cake.kind === 'sheet') {
     return cake.sheet === null ? 'A sheet' : sheetSizeOf(cake.sheet, menu).name;
   }
