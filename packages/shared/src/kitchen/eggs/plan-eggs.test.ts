@@ -2,7 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { EggPart } from '#shared/contracts/pantry.ts';
 import { addDays } from '#shared/dates/local-time.ts';
-import { eggSizes, eggsFor, eggWeightsMg, ouncesADozen } from './egg-sizes.ts';
+import { eggSizes, eggsFor, eggWeightsMg } from './egg-sizes.ts';
+import { dozenOunces } from './egg-weights.ts';
 import { eggKeeping, planEggs, type EggNeed } from './plan-eggs.ts';
 import { cartonKeeping, planCartons } from './plan-cartons.ts';
 
@@ -22,7 +23,7 @@ describe('an egg', () => {
   });
 
   it('follows the weight classes of USDA AMS 56: 30, 27, 24, 21 oz a dozen', () => {
-    expect(eggSizes.map((it) => ouncesADozen[it])).toEqual([30, 27, 24, 21]);
+    expect(eggSizes.map((it) => dozenOunces[it])).toEqual([30, 27, 24, 21]);
     for (const size of eggSizes) {
       const { whole, white, yolk } = eggWeightsMg(size);
       expect(white + yolk).toBe(whole);

@@ -1,7 +1,8 @@
 import type { EggPart } from '#shared/contracts/pantry.ts';
 import { addDays, type LocalDate } from '#shared/dates/local-time.ts';
 import { coverDays, type CoverPart } from './cover-days.ts';
-import { eggWeightsMg, type EggSize } from './egg-sizes.ts';
+import { eggWeightsMg } from './egg-sizes.ts';
+import type { EggClass } from './egg-weights.ts';
 
 /** A weight of shell egg wanted on a day. */
 export type EggNeed = {
@@ -70,7 +71,7 @@ type Lot = { readonly crackedOn: LocalDate; readonly useBy: LocalDate; left: num
  */
 export function planEggs(
   needs: readonly EggNeed[],
-  size: EggSize = 'large',
+  size: EggClass = 'large',
   keeping: EggKeeping = eggKeeping,
 ): EggPlan {
   const wanted = needs.filter((it) => it.grams > 0);
@@ -161,7 +162,12 @@ function take(
 }
 
 /** Eggs of the day that whole-egg needs take up with white and yolk both. */
-function wholeEggs(uses: readonly EggUse[], date: LocalDate, crack: number, size: EggSize): number {
+function wholeEggs(
+  uses: readonly EggUse[],
+  date: LocalDate,
+  crack: number,
+  size: EggClass,
+): number {
   const fresh = uses
     .filter((it) => it.need.part === 'whole')
     .flatMap((it) => it.from.filter((from) => from.crackedOn === date));
