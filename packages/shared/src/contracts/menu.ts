@@ -65,6 +65,8 @@ export const studioCard = z.object({
   dessertFactorPpm: z.int(),
   kitchenNotice: z.string(),
   homeKitchenText: z.string(),
+  /** The advisory for egg that is neither pasteurised nor cooked to its limit; local code decides. */
+  eggAdvisory: z._default(z.string(), ''),
   /** What the kitchen handles: union over active ingredients plus the owner's additions. */
   handles: z.array(allergenEntry),
 });
@@ -190,6 +192,8 @@ export const decoration = z.object({
   per: z.enum(['piece', 'tier', 'cake']),
   minutes: z.int(),
   madeAhead: z.boolean(),
+  /** How long it keeps once made; null where the studio has not said. */
+  keepsDays: z._default(z.nullable(z.int()), null),
   skill: z.nullable(z.string()),
   noticeDays: z.int(),
   weightG: z.int(),
@@ -234,12 +238,16 @@ export const priceBook = z.object({
 });
 export type PriceBook = z.infer<typeof priceBook>;
 
+export const allergyAnswer = z.enum(['take', 'talk', 'refuse']);
+export type AllergyAnswer = z.infer<typeof allergyAnswer>;
+
 /** The owner's word per allergen and severity when the cake contains it. */
 export const allergyRule = z.object({
   allergen: z.nullable(allergenId),
   severity: z.string(),
-  answer: z.enum(['take', 'talk', 'refuse']),
+  answer: allergyAnswer,
 });
+export type AllergyRule = z.infer<typeof allergyRule>;
 
 export const policyText = z.object({
   kind: z.enum(['privacy', 'terms', 'allergy', 'cancellation', 'photo']),

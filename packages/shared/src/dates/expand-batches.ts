@@ -1,6 +1,7 @@
 import type { ButtercreamStyle } from '#shared/contracts/menu.ts';
 import type { TaskKind } from '#shared/contracts/vocabulary.ts';
 import { groupBy } from '#shared/group-by.ts';
+import { tinsOf } from '#shared/kitchen/tins.ts';
 import { batchMinutes, sum, type Expansion, type Layer } from './expansion.ts';
 import type { BatchSource, Work } from './model.ts';
 
@@ -49,12 +50,14 @@ export function bakeSponges(plan: Expansion, layers: readonly Layer[]): Batches 
   const { bake: times } = plan.times;
   const { bowlG, deckMm2, decks } = plan.equipment;
   const keys = new Map<string, string[]>();
-  for (const [sponge, of] of groupBy(layers, (it) => it.tier.sponge)) {
+  for (const [sponge, of] of groupBy(layers, (it) => it.body.sponge)) {
     if (sponge === null) continue;
     const grams = Math.max(1, sum(of.map((it) => it.batterG)));
-    // Two layers bake in one tin and are split, so a tier needs a tin for every two of them.
     const tinsMm2 = sum(
-      of.map(({ tier: { block, layers: n } }) => Math.ceil(n / 2) * block.widthMm * block.depthMm),
+      of.map(({ body, count }) => {
+        const { widthMm, depthMm } = body.block;
+        return count * (tinsOf(body)?.count ?? 0) * widthMm * depthMm;
+      }),
     );
     const loads = Math.max(1, Math.ceil(tinsMm2 / deckMm2));
     const mixBowls = Math.max(1, Math.ceil(grams / bowlG));
@@ -85,7 +88,7 @@ export function bakeSponges(plan: Expansion, layers: readonly Layer[]): Batches 
 
 export function makeFillings(plan: Expansion, layers: readonly Layer[]): Batches {
   const keys = new Map<string, string[]>();
-  for (const [filling, of] of groupBy(layers, (it) => (it.fillingG > 0 ? it.tier.filling : null))) {
+  for (const [filling, of] of groupBy(layers, (it) => (it.fillingG > 0 ? it.body.filling : null))) {
     if (filling === null) continue;
     const grams = sum(of.map((it) => it.fillingG));
     keys.set(
@@ -115,11 +118,11 @@ export type Frostings = {
 /** Buttercreams by style (custard base first where the style has one), and ganache. */
 export function mixFrostings(plan: Expansion, layers: readonly Layer[]): Frostings {
   const byStyle = new Map<string, string[]>();
-  for (const [style, of] of groupBy(layers, (it) => it.tier.coating?.style ?? null)) {
+  for (const [style, of] of groupBy(layers, (it) => it.body.coating?.style ?? null)) {
     if (style === null) continue;
     byStyle.set(style.id, mixStyle(plan, style, Math.max(1, sum(of.map((it) => it.frostingG)))));
   }
-  const underGanache = layers.filter((it) => it.tier.coating?.covering.id === 'ganache');
+  const underGanache = layers.filter((it) => it.body.coating?.covering.id === 'ganache');
   const grams = sum(underGanache.map((it) => it.coveringG + it.frostingG));
   const ganache =
     underGanache.length === 0

@@ -7,13 +7,14 @@ import type { Batches, Frostings } from './expand-batches.ts';
 import {
   byArea,
   coatedMm2,
+  hoursADay,
   minutesAnHour,
   type Expansion,
   type Layer,
   type NewWork,
 } from './expansion.ts';
 
-/** Fill, coat or cover one tier; answers the key of what finishes its outside. */
+/** Fill, coat or cover one tier, or cutting cakes of one kind; answers the key of what finishes its outside. */
 export function coatTier(
   plan: Expansion,
   layer: Layer,
@@ -21,29 +22,30 @@ export function coatTier(
   made: { readonly sponges: Batches; readonly fillings: Batches; readonly frostings: Frostings },
 ): string {
   const { gaps, keeps, fillAndCrumbCoat: times } = plan.times;
-  const { tier } = layer;
-  const coated = coatedMm2(tier.block);
+  const { body, count } = layer;
+  const coated = coatedMm2(body.block);
   const frosting = frostingOf(coating, made.frostings);
   const filled = plan.addParts(
     {
-      key: `fill:${layer.index}`,
+      key: `fill:${layer.key}`,
       kind: 'fill-and-crumb-coat',
-      label: tier.real ? `Fill and crumb coat ${layer.name}` : `Coat the dummy of ${layer.name}`,
-      tier: layer.index,
+      label: body.real ? `Fill and crumb coat ${layer.name}` : `Coat the dummy of ${layer.name}`,
+      tier: layer.tier,
       minutes:
-        times.perTier +
-        (tier.real ? tier.layers * times.perLayer : 0) +
-        byArea(coated, times.perDm2Tenths),
+        count *
+        (times.perTier +
+          (body.real ? body.layers * times.perLayer : 0) +
+          byArea(coated, times.perDm2Tenths)),
       within: plan.finishedWithin,
     },
     true,
   );
-  if (tier.real) {
-    const large = Math.max(tier.block.widthMm, tier.block.depthMm) >= gaps.largeMm;
+  if (body.real) {
+    const large = Math.max(body.block.widthMm, body.block.depthMm) >= gaps.largeMm;
     const cooling = large ? gaps.largeBakeToFill : gaps.bakeToFill;
-    for (const key of batchesOf(made.sponges, tier.sponge))
+    for (const key of batchesOf(made.sponges, body.sponge))
       plan.link(key, filled.first, cooling, keeps.spongeHours);
-    for (const key of batchesOf(made.fillings, tier.filling)) {
+    for (const key of batchesOf(made.fillings, body.filling)) {
       plan.link(key, filled.first, gaps.fillingToFill, keeps.fillingHours);
     }
   }
@@ -72,21 +74,23 @@ function outsideOf(
   if (coating.covering.id === 'fondant') {
     const { cover } = plan.times;
     return {
-      key: `cover:${layer.index}`,
+      key: `cover:${layer.key}`,
       kind: 'cover',
       label: `Cover ${layer.name} with fondant`,
-      tier: layer.index,
-      minutes: cover.perTier + byArea(coated, cover.perDm2Tenths),
+      tier: layer.tier,
+      minutes: layer.count * (cover.perTier + byArea(coated, cover.perDm2Tenths)),
     };
   }
   const { finalCoat } = plan.times;
   const adds = { smooth: 0, textured: finalCoat.texturedAdd, piped: finalCoat.pipedAdd };
   return {
-    key: `coat:${layer.index}`,
+    key: `coat:${layer.key}`,
     kind: 'final-coat',
     label: `Final coat on ${layer.name}`,
-    tier: layer.index,
-    minutes: finalCoat.perTier + byArea(coated, finalCoat.perDm2Tenths) + adds[coating.finish],
+    tier: layer.tier,
+    minutes:
+      layer.count *
+      (finalCoat.perTier + byArea(coated, finalCoat.perDm2Tenths) + adds[coating.finish]),
   };
 }
 
@@ -150,8 +154,8 @@ function addDecoration(
   tiers: number,
   onCake: AddOnCake,
 ): void {
-  const { keeps, setOn } = plan.times;
-  const { name: label, skill } = decoration;
+  const { gaps, keeps, setOn } = plan.times;
+  const { name: label, skill, keepsDays } = decoration;
   const onEveryTier = decoration.per === 'tier' && placed.tier === null ? tiers : 1;
   const minutes = decoration.minutes * (decoration.per === 'piece' ? placed.quantity : onEveryTier);
   const { tier } = placed;
@@ -168,16 +172,29 @@ function addDecoration(
   });
   if (placed.source !== 'studio' || minutes === 0) return;
   const ahead = plan.addParts({ key, kind: 'decorate', label, minutes, tier, skill }, false);
-  for (const part of ahead.all) plan.link(part, set, 0, keeps.madeAheadHours);
+  const keptHours = Math.min(
+    keeps.madeAheadHours,
+    keepsDays === null ? keeps.madeAheadHours : keepsDays * hoursADay,
+  );
+  // What keeps no longer than it dries is put on as it is.
+  const dries = gaps.dryBeforeSettingOn < keptHours * minutesAnHour ? gaps.dryBeforeSettingOn : 0;
+  for (const part of ahead.all) plan.link(part, set, dries, keptHours);
 }
 
-export function boxCake(plan: Expansion, tiers: number, dressed: Standing): void {
-  const { box: times } = plan.times;
+/** Boxes what is finished: the cake on show and each cutting cake by itself. */
+export function boxCake(
+  plan: Expansion,
+  pieces: number,
+  dressed: Standing,
+  cutting: readonly string[],
+): void {
+  const { box: times, gaps } = plan.times;
   const key = plan.add({
     key: 'box',
     kind: 'box',
     label: 'Box and clean down',
-    minutes: times.fixed + tiers * times.perTier,
+    minutes: times.fixed + pieces * times.perTier,
   });
   for (const before of dressed.keys) plan.link(before, key, dressed.gap, null);
+  for (const coated of cutting) plan.link(coated, key, gaps.finalCoatToDecorate, null);
 }

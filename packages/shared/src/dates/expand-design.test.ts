@@ -145,14 +145,15 @@ describe('a design at the bench', () => {
       equipment,
       noticeDays: 4,
     });
-    // 180 minutes of flowers in two parts, whenever there is time in the two months before.
+    // 180 minutes of flowers in two parts, whenever there is time in the two months before, and a
+    // day to dry before they go on.
     expect([find(demand, 'decorate:0/1').minutes, find(demand, 'decorate:0/2').minutes]).toEqual([
       90, 90,
     ]);
     expect(demand.links).toContainEqual({
       before: 'decorate:0/2',
       after: 'decorate:0/on',
-      gap: 0,
+      gap: 24 * 60,
       keeps: 60 * 24 * 60,
     });
     expect(find(demand, 'decorate:0/1')).toMatchObject({ skill: 'sugar-flowers', within: null });
@@ -163,6 +164,85 @@ describe('a design at the bench', () => {
     expect(gap(demand, 'words:0', 'box')).toBe(0);
     // The notice of the flowers is longer than the cake's.
     expect(demand.noticeDays).toBe(7);
+  });
+
+  it('dries what is made ahead for as long as the studio says, within what it keeps', () => {
+    const linkOf = (keepsDays: number | null, dryBeforeSettingOn: number) => {
+      const { links } = expandDesign({
+        resolved: resolveDesign(
+          designWith({
+            cake: { tiers: [roundTier(8)] },
+            look: {
+              decorations: [
+                {
+                  decorationId: 'sugar-flower',
+                  tier: null,
+                  quantity: 2,
+                  colour: null,
+                  source: 'studio',
+                },
+              ],
+            },
+          }),
+          {
+            ...menuFixture,
+            decorations: menuFixture.decorations.map((it) =>
+              it.id === 'sugar-flower' ? { ...it, madeAhead: true, keepsDays } : it,
+            ),
+          },
+        ),
+        workTimes: { ...defaultWorkTimes, gaps: { ...defaultWorkTimes.gaps, dryBeforeSettingOn } },
+        equipment,
+        noticeDays: 4,
+      });
+      return links.find((it) => it.before === 'decorate:0');
+    };
+    expect(linkOf(null, 48 * 60)).toMatchObject({ gap: 48 * 60, keeps: 60 * 24 * 60 });
+    expect(linkOf(14, 24 * 60)).toMatchObject({ gap: 24 * 60, keeps: 14 * 24 * 60 });
+    // Nothing waits longer than it keeps.
+    expect(linkOf(1, 24 * 60)).toMatchObject({ gap: 0, keeps: 24 * 60 });
+  });
+
+  it('bakes, fills and coats cutting cakes by themselves, and boxes each', () => {
+    const cut = { sizeId: 'half', layers: 2, spongeId: 'almond', fillingId: 'raspberry' };
+    const alone = expand(designWith({}));
+    const one = expand(designWith({ cake: { cuttingCakes: [{ ...cut, count: 1 }] } }));
+    const three = expand(designWith({ cake: { cuttingCakes: [{ ...cut, count: 3 }] } }));
+    expect(keys(one).filter((it) => !keys(alone).includes(it))).toEqual([
+      'bake:almond',
+      'fill:cutting-0',
+      'coat:cutting-0',
+    ]);
+    expect(find(one, 'fill:cutting-0')).toMatchObject({
+      label: 'Fill and crumb coat the cutting cake',
+      tier: null,
+    });
+    expect(gap(one, 'coat:cutting-0', 'box')).toBe(20);
+    expect(one.links.some((it) => it.before === 'coat:cutting-0' && it.after === 'stack')).toBe(
+      false,
+    );
+    const grams = (demand: Demand) => find(demand, 'bake:almond').batch?.grams ?? 0;
+    const baked = three.work.filter((it) => it.batch?.source.id === 'almond');
+    const together = baked.reduce((sum, it) => sum + (it.batch?.grams ?? 0), 0);
+    expect(Math.abs(together - 3 * grams(one))).toBeLessThanOrEqual(3);
+    expect(three.boxes).toHaveLength(3 + 3);
+    expect(find(three, 'box').minutes - find(alone, 'box').minutes).toBe(3 * 4);
+  });
+
+  it('plans a dummy on show with the cake that is cut in the kitchen', () => {
+    const dummy = { real: false, spongeId: null, fillingId: null };
+    const demand = expand(
+      designWith({
+        cake: {
+          tiers: [roundTier(10, dummy), roundTier(8, dummy)],
+          cuttingCakes: [
+            { sizeId: 'half', count: 1, layers: 2, spongeId: 'vanilla', fillingId: 'raspberry' },
+          ],
+        },
+      }),
+    );
+    const waiting = demand.links.filter((it) => it.before === 'bake:vanilla').map((it) => it.after);
+    expect(waiting).toEqual(['fill:cutting-0']);
   });
 
   it('knows what it contains and what its work is kept apart from', () => {

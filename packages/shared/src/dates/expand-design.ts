@@ -1,11 +1,11 @@
 import type { AllergenId, Severity } from '#shared/contracts/vocabulary.ts';
-import { amountsOf, batterG } from '#shared/kitchen/amounts.ts';
+import { amountsOf, type BodyAmounts } from '#shared/kitchen/amounts.ts';
 import { containedAllergens, partsOf } from '#shared/kitchen/parts.ts';
 import type { ResolvedDesign, ResolvedTier } from '#shared/kitchen/resolve-design.ts';
 import type { Block } from '#shared/kitchen/sizes.ts';
 import { bakeSponges, makeFillings, mixFrostings } from './expand-batches.ts';
 import { boxCake, coatTier, decorateCake, stackTiers } from './expand-coats.ts';
-import { Expansion, type Equipment, type Layer } from './expansion.ts';
+import { Expansion, sum, type Equipment, type Layer } from './expansion.ts';
 import type { Box, Demand } from './model.ts';
 import type { WorkTimes } from './work-times.ts';
 
@@ -33,19 +33,23 @@ export const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylax
  */
 export function expandDesign({ resolved, workTimes, equipment, noticeDays }: ExpandInput): Demand {
   const plan = new Expansion(workTimes, equipment);
-  const layers = layersOf(resolved);
-  const real = layers.filter((it) => it.tier.real);
+  const shown = shownLayers(resolved);
+  const cutting = cuttingLayers(resolved);
+  const layers = [...shown, ...cutting];
+  const real = layers.filter((it) => it.body.real);
   const sponges = bakeSponges(plan, real);
   const fillings = makeFillings(plan, real);
   const frostings = mixFrostings(plan, layers);
-  const coats = layers.map((layer) => {
-    if (layer.tier.coating === null) throw new Error('A cake without a coating cannot be planned.');
-    return coatTier(plan, layer, layer.tier.coating, { sponges, fillings, frostings });
-  });
+  const coat = (layer: Layer) => {
+    if (layer.body.coating === null) throw new Error('A cake without a coating cannot be planned.');
+    return coatTier(plan, layer, layer.body.coating, { sponges, fillings, frostings });
+  };
+  const coats = shown.map(coat);
   if (coats.length === 0) throw new Error('A design without a cake cannot be planned.');
-  const standing = stackTiers(plan, layers, coats);
+  const cut = cutting.map(coat);
+  const standing = stackTiers(plan, shown, coats);
   const dressed = decorateCake(plan, resolved, standing);
-  boxCake(plan, layers.length, dressed);
+  boxCake(plan, sum(layers.map((it) => it.count)), dressed, cut);
   const contains = containedAllergens(partsOf(resolved))
     .filter((it) => it.state === 'contains')
     .map((it) => it.allergen);
@@ -54,7 +58,9 @@ export function expandDesign({ resolved, workTimes, equipment, noticeDays }: Exp
     noticeDays: Math.max(noticeDays, ...resolved.decorations.map((it) => it.decoration.noticeDays)),
     work: plan.work,
     links: plan.links,
-    boxes: layers.map((layer) => boxOf(layer.tier.block)),
+    boxes: layers.flatMap(({ body, count }) =>
+      Array.from({ length: count }, () => boxOf(body.block)),
+    ),
     contains,
     apart: apartFrom(resolved, contains),
   };
@@ -68,21 +74,38 @@ function apartFrom({ design }: ResolvedDesign, contains: readonly AllergenId[]):
   return [...new Set(declared)].filter((it) => !contains.includes(it));
 }
 
-function layersOf(resolved: ResolvedDesign): Layer[] {
-  const amounts = amountsOf(resolved);
-  return resolved.tiers.map((tier, index) => {
-    const grams = amounts.perTier[index];
-    const { sponge } = tier;
-    return {
-      tier,
-      index,
-      name: tierName(tier, resolved),
-      batterG: sponge === null ? 0 : Math.ceil(batterG(grams?.spongeG ?? 0, sponge)),
-      fillingG: Math.ceil(grams?.fillingG ?? 0),
-      frostingG: Math.ceil(grams?.frostingG ?? 0),
-      coveringG: Math.ceil(grams?.coveringG ?? 0),
-    };
-  });
+function shownLayers(resolved: ResolvedDesign): Layer[] {
+  const { perTier } = amountsOf(resolved);
+  return resolved.tiers.map((body, index) => ({
+    body,
+    tier: index,
+    key: String(index),
+    count: 1,
+    name: tierName(body, resolved),
+    ...gramsOf(perTier[index], 1),
+  }));
+}
+
+function cuttingLayers(resolved: ResolvedDesign): Layer[] {
+  const { perCuttingCake } = amountsOf(resolved);
+  return resolved.cuttingCakes.map((body, index) => ({
+    body,
+    tier: null,
+    key: `cutting-${index}`,
+    count: body.count,
+    name: body.count === 1 ? 'the cutting cake' : `${body.count} cutting cakes`,
+    ...gramsOf(perCuttingCake[index], body.count),
+  }));
+}
+
+function gramsOf(amounts: BodyAmounts | undefined, count: number) {
+  const whole = (grams: number | undefined) => Math.ceil((grams ?? 0) * count);
+  return {
+    batterG: whole(amounts?.batterG),
+    fillingG: whole(amounts?.fillingG),
+    frostingG: whole(amounts?.frostingG),
+    coveringG: whole(amounts?.coveringG),
+  };
 }
 
 function tierName({ index }: ResolvedTier, { design, tiers }: ResolvedDesign): string {

@@ -1,4 +1,4 @@
-import type { ResolvedTier } from '#shared/kitchen/resolve-design.ts';
+import type { ResolvedBody } from '#shared/kitchen/resolve-design.ts';
 import { areaMm2, perimeterMm, type Block } from '#shared/kitchen/sizes.ts';
 import type { Link, Work } from './model.ts';
 import type { ByWeight, WorkTimes } from './work-times.ts';
@@ -12,10 +12,18 @@ export type Equipment = {
   readonly deckMm2: number;
 };
 
-/** One tier (or the sheet) as the bench sees it; grams are whole and rounded up. */
+/**
+ * One tier, the sheet or one kind of cutting cake as the bench sees it; grams are of all of them,
+ * whole and rounded up.
+ */
 export type Layer = {
-  readonly tier: ResolvedTier;
-  readonly index: number;
+  readonly body: ResolvedBody;
+  /** Its place from the board up; null for cutting cakes, which stand by themselves. */
+  readonly tier: number | null;
+  /** Tells its work apart within the order. */
+  readonly key: string;
+  /** How many are made alike. */
+  readonly count: number;
   readonly name: string;
   readonly batterG: number;
   readonly fillingG: number;
@@ -29,6 +37,7 @@ export type NewWork = Partial<Work> & Pick<Work, 'key' | 'kind' | 'label' | 'min
 type Parts = { readonly first: string; readonly last: string; readonly all: readonly string[] };
 
 export const minutesAnHour = 60;
+export const hoursADay = 24;
 
 /** Collects work and links; one key is one piece of work. */
 export class Expansion {

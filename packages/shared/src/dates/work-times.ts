@@ -7,6 +7,9 @@ import { styleId } from '#shared/contracts/vocabulary.ts';
  */
 
 const minutes = z.int().check(z.minimum(0), z.maximum(24 * 60));
+/** A day (trade memory, no source); versions kept before this was a setting read it too. */
+const dryingMinutes = 24 * 60;
+
 const hours = z.int().check(z.minimum(0), z.maximum(24 * 365));
 
 /** Minutes of one bowl or load, and minutes by weight. */
@@ -58,6 +61,8 @@ export const workTimes = z.object({
     fillToFinalCoat: minutes,
     finalCoatToDecorate: minutes,
     finalCoatToStack: minutes,
+    /** Sugar flowers, figures and plaques dry so long before they go on. */
+    dryBeforeSettingOn: z._default(minutes, dryingMinutes),
   }),
   keeps: z.object({
     spongeHours: hours,
@@ -106,6 +111,7 @@ export const defaultWorkTimes: WorkTimes = {
     fillToFinalCoat: 30,
     finalCoatToDecorate: 20,
     finalCoatToStack: 120,
+    dryBeforeSettingOn: dryingMinutes,
   },
   keeps: {
     spongeHours: 72,

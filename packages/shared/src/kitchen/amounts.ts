@@ -119,9 +119,9 @@ export function amountsOfBody(body: ResolvedBody, { visibleTopMm2, pipedG }: OnB
   const coats = coatsOf(body, visibleTopMm2);
   // Ganache has no buttercream beside it, so it makes its own dam, borders and letters.
   const alone = coating !== null && coating.style === null;
-  const frostingOnCakeG = alone
-    ? 0
-    : (coats.frostingMl + damMl) * (coating?.style?.densityGPerMl ?? 0) + pipedG;
+  const style = coating?.style ?? null;
+  const frostingOnCakeG =
+    style === null ? 0 : (coats.frostingMl + damMl) * style.densityGPerMl + pipedG;
   const coveringOnCakeG =
     (coats.coveringMl + (alone ? damMl : 0)) * (coating?.covering.densityGPerMl ?? 0) +
     (alone ? pipedG : 0);

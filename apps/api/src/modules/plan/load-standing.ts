@@ -44,7 +44,9 @@ export async function loadStanding(supply: Supply): Promise<PlannedOrder[]> {
         links: (linksBy.get(order.id) ?? [])
           .filter((it) => keys.has(it.before) && keys.has(it.after))
           .map(({ before, after, gap, keeps }): Link => ({ before, after, gap, keeps })),
-        boxes: (tiersBy.get(order.id) ?? []).map(boxOf),
+        boxes: (tiersBy.get(order.id) ?? []).flatMap((it) =>
+          Array.from({ length: it.quantity }, () => boxOf(it)),
+        ),
         contains,
         apart: (allergiesBy.get(order.id) ?? [])
           .map((it) => it.allergen)
@@ -116,7 +118,8 @@ const fillsSql = `
   GROUP BY t.order_id`;
 
 const tiersSql = `
-  SELECT o.id AS orderId, it.width_mm AS widthMm, it.depth_mm AS depthMm, it.height_mm AS heightMm
+  SELECT o.id AS orderId, it.width_mm AS widthMm, it.depth_mm AS depthMm, it.height_mm AS heightMm,
+    i.quantity
   FROM orders o JOIN order_items i ON i.revision_id = o.current_revision_id
     JOIN item_tiers it ON it.item_id = i.id
   WHERE o.id IN (${standing})`;
@@ -172,6 +175,8 @@ const tierRow = z.object({
   widthMm: z.int(),
   depthMm: z.int(),
   heightMm: z.int(),
+  /** Cutting cakes of one kind are one item. */
+  quantity: z.int(),
 });
 
 const allergyRow = z.object({ orderId: z.string(), allergen: allergenId });

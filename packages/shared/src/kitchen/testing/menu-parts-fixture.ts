@@ -266,6 +266,7 @@ const decoration = (
   per: 'cake',
   minutes: 15,
   madeAhead: false,
+  keepsDays: null,
   skill: null,
   noticeDays: 0,
   weightG: 20,
