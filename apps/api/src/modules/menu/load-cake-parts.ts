@@ -136,6 +136,7 @@ export function cakePartsOf(
       per: row.per,
       minutes: row.minutes,
       madeAhead: row.madeAhead,
+      keepsDays: row.keepsDays,
       skill: row.skillId,
       noticeDays: row.noticeDays,
       weightG: Math.round(row.weightMg / 1000),
