@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { id, localDate, minor } from './common.ts';
+import { id, localDate, minor, minuteOfDay } from './common.ts';
 import { allergenEntry } from './menu.ts';
 import { adviceLevel, coveringId, styleId } from './vocabulary.ts';
 import { cake, cuttingCake, design, look, setting, sheet, tier } from './design.ts';
@@ -8,6 +8,8 @@ import { cake, cuttingCake, design, look, setting, sheet, tier } from './design.
 export const estimateRequest = z.object({
   design,
   date: z.nullable(localDate),
+  /** When it is collected, where that is chosen: minutes since midnight. */
+  collectAt: z.optional(z.nullable(minuteOfDay)),
 });
 export type EstimateRequest = z.infer<typeof estimateRequest>;
 

@@ -1,26 +1,30 @@
-import type { Advice } from '#shared/contracts/estimates.ts';
-import { severities, type LabelRegion, type Severity } from '#shared/contracts/vocabulary.ts';
+import type { AllergyAnswer } from '#shared/contracts/menu.ts';
+import type { LabelRegion, Severity } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { allergenName, speciesName, spelledFor } from './allergen-names.ts';
 import {
+  byGravity,
   clashesWith,
   gravest,
   isAbout,
   isListed,
   mayContainLevel,
+  speciesOf,
   stateFor,
+  subjectOf,
   type ListedDeclaration,
 } from './clashes.ts';
-import { note } from './note.ts';
+import { note, type Noted } from './note.ts';
+import { strictestAnswer } from './owners-answer.ts';
 import { capitalise, orList } from './sentences.ts';
 import type { Situation } from './situation.ts';
-import { waysWithout } from './ways-out.ts';
+import { waysWithout } from './whole-cakes.ts';
 
 /**
  * What the guests' allergies mean for this cake and this kitchen. What is in it is said, never
  * what is not; a thing told in words waits for a baker.
  */
-export function allergenAdvice(situation: Situation): Advice[] {
+export function allergenAdvice(situation: Situation): Noted[] {
   const { allergies } = situation.resolved.design.guests;
   const told = allergies.filter((it) => !isListed(it)).map((it) => it.text.trim());
   return [
@@ -29,41 +33,44 @@ export function allergenAdvice(situation: Situation): Advice[] {
   ];
 }
 
+/** A thing that guests keep from: the gravest declaration of it, with all that were made. */
+type Thing = ListedDeclaration & { readonly all: readonly ListedDeclaration[] };
+
 /** Two guests with the same allergy are one subject, as grave as the graver of them. */
-function onePerThing(declarations: readonly ListedDeclaration[]): ListedDeclaration[] {
-  const things = new Map<string, ListedDeclaration>();
+function onePerThing(declarations: readonly ListedDeclaration[]): Thing[] {
+  const things = new Map<string, Thing>();
   for (const declared of declarations) {
-    const key = `${declared.allergen}:${declared.species ?? ''}`;
+    const key = subjectOf(declared);
     const known = things.get(key);
-    things.set(
-      key,
-      known === undefined
-        ? declared
-        : {
-            ...known,
-            guests: known.guests + declared.guests,
-            severity: graver(known.severity, declared.severity),
-          },
-    );
+    const all = [...(known?.all ?? []), declared];
+    things.set(key, {
+      ...declared,
+      species: speciesOf(declared),
+      guests: (known?.guests ?? 0) + declared.guests,
+      severity: known === undefined ? declared.severity : graver(known.severity, declared.severity),
+      all,
+    });
   }
   return [...things.values()];
 }
 
 const graver = (a: Severity, b: Severity): Severity =>
-  severities.indexOf(a) >= severities.indexOf(b) ? a : b;
+  byGravity.indexOf(a) >= byGravity.indexOf(b) ? a : b;
 
-function toldInWords(text: string): Advice {
+function toldInWords(text: string): Noted {
   return note({
     code: 'allergy-text',
     level: 'stop',
     step: 'day',
     about: `allergy-text:${text}`,
     sentence: `You told us about “${text}”. A baker reads it and answers you before anything is confirmed.`,
+    plain: `Told in words: “${text}”. Read every label for it, answer the customer and record the talk.`,
+    instead: 'There is nothing you need to change before then.',
     talk: true,
   });
 }
 
-function adviceFor(declared: ListedDeclaration, situation: Situation): Advice[] {
+function adviceFor(declared: Thing, situation: Situation): Noted[] {
   const { parts, resolved } = situation;
   const inState = (state: 'contains' | 'unknown' | 'may-contain') =>
     parts
@@ -87,33 +94,32 @@ function adviceFor(declared: ListedDeclaration, situation: Situation): Advice[] 
   const handled = resolved.menu.studio.handles.some(
     (it) => it.state !== 'not-declared' && isAbout(it, declared),
   );
-  // Where it is in the cake, that it is also in the kitchen is news only to the gravely allergic.
-  const tellKitchen = handled && (contained.length === 0 || gravest.includes(declared.severity));
-  return tellKitchen ? [...found, kitchenAdvice(shared)] : found;
+  return handled ? [...found, kitchenAdvice(shared)] : found;
 }
 
 type Shared = {
-  readonly declared: ListedDeclaration;
+  readonly declared: Thing;
   readonly situation: Situation;
-  readonly ways: Advice['ways'];
+  readonly ways: Noted['ways'];
 };
 
-function containedAdvice(parts: readonly string[], shared: Shared): Advice {
-  const { declared, ways } = shared;
-  const answer = ownersAnswer(shared);
+function containedAdvice(parts: readonly string[], shared: Shared): Noted {
+  const { declared, situation, ways } = shared;
+  const answer = strictestAnswer(declared.all, situation.resolved.menu.allergyRules);
   return note({
     code: 'allergen',
     level: 'stop',
     step: stepOf(shared),
     about: aboutOf('allergen', declared),
     sentence: `${capitalise(nameOf(shared))} ${isPlural(nameOf(shared)) ? 'are' : 'is'} in ${formatList(parts)}; ${whose(shared)}.`,
+    plain: `Contains ${nameOf(shared)}: ${formatList(parts)}. ${told(shared)}. ${tableWords[answer]}`,
     instead: [wayWords(shared), answerWords[answer]].filter((it) => it !== '').join(' '),
     ways,
     talk: answer !== 'refuse',
   });
 }
 
-function unknownAdvice(parts: readonly string[], shared: Shared): Advice {
+function unknownAdvice(parts: readonly string[], shared: Shared): Noted {
   const { declared, ways } = shared;
   return note({
     code: 'allergen-unknown',
@@ -121,13 +127,14 @@ function unknownAdvice(parts: readonly string[], shared: Shared): Advice {
     step: stepOf(shared),
     about: aboutOf('allergen-unknown', declared),
     sentence: `We do not know yet about ${nameOf(shared)} in ${formatList(parts)}; ${whose(shared)}.`,
+    plain: `Not known: ${nameOf(shared)} in ${formatList(parts)}. Read the label or ask the maker before you talk. ${told(shared)}.`,
     instead: `We have to read the label first. ${wayWords(shared)}`.trim(),
     ways,
     talk: true,
   });
 }
 
-function warnedAdvice(parts: readonly string[], shared: Shared): Advice {
+function warnedAdvice(parts: readonly string[], shared: Shared): Noted {
   const { declared, ways } = shared;
   const level = mayContainLevel(declared.severity);
   return note({
@@ -136,14 +143,18 @@ function warnedAdvice(parts: readonly string[], shared: Shared): Advice {
     step: stepOf(shared),
     about: aboutOf('may-contain', declared),
     sentence: `A maker's label says there may be ${nameOf(shared)} in ${formatList(parts)}; ${whose(shared)}.`,
-    instead: wayWords(shared),
+    plain: `Maker's warning, may contain ${nameOf(shared)}: ${formatList(parts)}. ${told(shared)}.`,
+    instead:
+      ways.length === 0 && level === 'care'
+        ? 'Tell your guest, and let them decide.'
+        : wayWords(shared),
     ways,
     talk: level === 'stop',
   });
 }
 
 /** Another nut than the one named: not a stop, but never passed over either. */
-function nearMiss(declared: ListedDeclaration, { parts, resolved }: Situation): Advice[] {
+function nearMiss(declared: ListedDeclaration, { parts, resolved }: Situation): Noted[] {
   if (declared.species === null) return [];
   const others = parts.flatMap(({ contents }) =>
     contents.allergens.filter(
@@ -166,7 +177,7 @@ function nearMiss(declared: ListedDeclaration, { parts, resolved }: Situation): 
   ];
 }
 
-function kitchenAdvice(shared: Shared): Advice {
+function kitchenAdvice(shared: Shared): Noted {
   const { declared } = shared;
   const grave = gravest.includes(declared.severity);
   return note({
@@ -175,18 +186,19 @@ function kitchenAdvice(shared: Shared): Advice {
     step: 'day',
     about: aboutOf('kitchen', declared),
     sentence: `We handle ${nameOf(shared)} in this kitchen, so traces can get into any cake we make; ${whose(shared)}.`,
+    plain: `Handled in this kitchen: ${nameOf(shared)}. ${told(shared)}.${grave ? ' Talk with them and record it; only the owner takes it after that.' : ''}`,
     instead: grave
-      ? 'We talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
+      ? 'No choice of cake changes that, so there is nothing to choose instead: we talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
       : 'Tell your guest, and let them decide.',
     talk: grave,
   });
 }
 
-const aboutOf = (what: string, { allergen, species }: ListedDeclaration): string =>
-  species === null ? `${what}:${allergen}` : `${what}:${allergen}:${species}`;
+const aboutOf = (what: string, declared: ListedDeclaration): string =>
+  `${what}:${subjectOf(declared)}`;
 
 /** Before there is a cake it belongs to the day; else to where most of it is chosen. */
-const stepOf = ({ situation }: Shared): Advice['step'] =>
+const stepOf = ({ situation }: Shared): Noted['step'] =>
   situation.parts.length > 0 && situation.parts.every((it) => it.kind === 'decoration')
     ? 'look'
     : 'cake';
@@ -233,21 +245,31 @@ function wayWords({ ways, situation, declared }: Shared): string {
 const clashingParts = ({ parts }: Situation, declared: ListedDeclaration): boolean =>
   parts.some((it) => it.unread || clashesWith(it.contents, declared));
 
-type Answer = 'take' | 'talk' | 'refuse';
-
-/** The owner's word: the allergen's own rule, else the one for all, else a talk. */
-function ownersAnswer({ declared, situation }: Shared): Answer {
-  const rules = situation.resolved.menu.allergyRules.filter(
-    (it) => it.severity === declared.severity,
-  );
-  const rule =
-    rules.find((it) => it.allergen === declared.allergen) ??
-    rules.find((it) => it.allergen === null);
-  return rule?.answer ?? 'talk';
-}
-
-const answerWords: Record<Answer, string> = {
+/** To the customer. */
+const answerWords: Record<AllergyAnswer, string> = {
   take: 'If your guest will not eat from this cake, tell us so.',
   talk: 'As it is, we talk with you before we take it.',
   refuse: 'As it is, we cannot take this order.',
 };
+
+/** To whoever bakes it: what the owner's table says of it. */
+const tableWords: Record<AllergyAnswer, string> = {
+  take: 'The owner’s table: take.',
+  talk: 'The owner’s table: take after talking.',
+  refuse: 'The owner’s table: refuse.',
+};
+
+const severityFacts: Record<Severity, string> = {
+  avoids: 'avoided',
+  intolerance: 'intolerance',
+  coeliac: 'coeliac disease',
+  allergy: 'allergy',
+  anaphylaxis: 'anaphylaxis',
+};
+
+/** "Declared: anaphylaxis, 2 guests". */
+function told(shared: Shared): string {
+  const { severity, guests } = shared.declared;
+  const how = spelledFor(regionOf(shared), severityFacts[severity]);
+  return `Declared: ${how}, ${guests} ${guests === 1 ? 'guest' : 'guests'}`;
+}

@@ -1,11 +1,10 @@
-import type { Advice } from '#shared/contracts/estimates.ts';
 import type { DietId } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { dietClashes } from './clashes.ts';
-import { note } from './note.ts';
+import { note, type Noted } from './note.ts';
 import { capitalise } from './sentences.ts';
 import type { Situation } from './situation.ts';
-import { waysWithout } from './ways-out.ts';
+import { waysWithout } from './whole-cakes.ts';
 
 const dietWords: Record<DietId, string> = {
   vegetarian: 'vegetarian',
@@ -25,9 +24,9 @@ const isSubstance = (diet: DietId): diet is keyof typeof substances => diet in s
 const certified: readonly DietId[] = ['halal', 'kosher'];
 
 /** What of the whole cake does not go with the guests' diets, and what would. */
-export function dietAdvice(situation: Situation): Advice[] {
+export function dietAdvice(situation: Situation): Noted[] {
   const { parts, resolved } = situation;
-  return resolved.design.guests.diets.flatMap((diet): Advice[] => {
+  return resolved.design.guests.diets.flatMap((diet): Noted[] => {
     const clashing = parts.flatMap((part) => {
       const what = part.unread ? ['a label we have not read'] : dietClashes(part.contents, diet);
       if (what.length === 0) return [];
@@ -55,7 +54,13 @@ export function dietAdvice(situation: Situation): Advice[] {
       ];
     }
     return certified.includes(diet) && parts.length > 0
-      ? [note({ ...shared, sentence: askUs })]
+      ? [
+          note({
+            ...shared,
+            sentence: askUs,
+            instead: 'Write to us before you send the order, or in its note.',
+          }),
+        ]
       : [];
   });
 }

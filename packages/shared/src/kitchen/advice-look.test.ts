@@ -202,9 +202,26 @@ describe('the cake itself', () => {
     expect(about(designWith({ guests: { headCount: 20 } }), 'portions')?.level).toBe('ok');
   });
 
-  it('says when no stack is large enough', () => {
+  it('offers to keep the cake and to cut more in the kitchen', () => {
+    const design = designWith({ guests: { headCount: 120 } });
+    const [first] = about(design, 'portions')?.ways ?? [];
+    expect(first?.label).toBe('This cake, with two cutting cakes in the kitchen');
+    expect(first?.patch.cake?.tiers).toEqual(design.cake?.tiers);
+    // 120 less 77 is 43; a quarter sheet cut 50 by 50 mm feeds 24.
+    expect(first?.patch.cake?.cuttingCakes).toMatchObject([{ sizeId: 'quarter', count: 2 }]);
+  });
+
+  it('says when nothing the studio bakes is large enough', () => {
     const design = designWith({ cake: null, guests: { headCount: 2000 } });
-    expect(about(design, 'portions')?.sentence).toBe('No cake we can stack feeds 2000.');
+    expect(about(design, 'portions')).toBeUndefined();
+    const { advice } = evaluateDesign(
+      { design, date: null },
+      { ...menuFixture, sheetSizes: [] },
+      '2027-05-01',
+    );
+    expect(advice.find((it) => it.about === 'portions')?.sentence).toBe(
+      'Nothing we bake feeds 2000.',
+    );
   });
 
   it('keeps to the tins there are and to tiers that stand', () => {
@@ -216,5 +233,28 @@ describe('the cake itself', () => {
     expect(about(upsideDown, 'step:0')?.level).toBe('stop');
     const narrow = designWith({ cake: { tiers: [roundTier(7), roundTier(6)] } });
     expect(about(narrow, 'step:0')?.level).toBe('care');
+  });
+});
+
+describe('glitter', () => {
+  // US FDA, "Avoid Potentially Unsafe Non-Edible Products Used to Decorate Foods".
+  it('is for eating only where it says so', () => {
+    const wished = designWith({ look: { note: 'Gold luster dust on the roses, please' } });
+    expect(about(wished, 'glitter')?.sentence).toContain('“non-toxic” is not for eating');
+    expect(about(designWith({}), 'glitter')).toBeUndefined();
+  });
+});
+
+describe('raw egg', () => {
+  const french = (guests: { susceptible: boolean }) =>
+    about(designWith({ guests, cake: { coating: coat({ style: 'french' }) } }), 'egg');
+
+  // FDA Food Code 2022, 3-603.11 (consumer advisory) and 3-801.11 (highly susceptible people).
+  it('comes with the advisory, and is not for those who fall ill more easily', () => {
+    expect(french({ susceptible: false })).toMatchObject({ level: 'care' });
+    expect(french({ susceptible: false })?.sentence).toContain('may raise the risk of illness');
+    expect(french({ susceptible: false })?.plain).toContain('3-603.11');
+    expect(french({ susceptible: true })).toMatchObject({ level: 'stop', talk: true });
+    expect(french({ susceptible: true })?.plain).toContain('160 °F / 71 °C');
   });
 });

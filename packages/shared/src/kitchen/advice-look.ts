@@ -1,10 +1,9 @@
 import type { Coating } from '#shared/contracts/design.ts';
-import type { Advice } from '#shared/contracts/estimates.ts';
-import type { Detail } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { coatKey, distinctCoats } from './advice-setting.ts';
 import { isDeepColour } from './deep-colour.ts';
-import { note } from './note.ts';
+import { detailOf, fineness } from './detail.ts';
+import { note, type Noted, type WayOut } from './note.ts';
 import {
   coatingName,
   type ResolvedCoating,
@@ -17,7 +16,7 @@ import { otherCoats } from './ways-out.ts';
 import { countCharacters, wordsFit } from './words-fit.ts';
 
 /** What fine work, words, flowers, wires and deep colours ask for. */
-export function lookAdvice(situation: Situation): Advice[] {
+export function lookAdvice(situation: Situation): Noted[] {
   const { resolved } = situation;
   return [
     ...detailAdvice(situation),
@@ -25,21 +24,13 @@ export function lookAdvice(situation: Situation): Advice[] {
     ...wordsAdvice(resolved),
     ...inedibleAdvice(resolved),
     ...smallPartsAdvice(resolved),
+    ...glitterAdvice(resolved),
     ...flowerAdvice(resolved),
     ...deepColourAdvice(resolved),
   ];
 }
 
-const fineness: Record<Detail, number> = { none: 0, soft: 1, fine: 2 };
-
-/** How much detail a coat holds: the covering's own where that is outermost, else the style's. */
-function detailOf({ covering, style }: ResolvedCoating): Detail {
-  return style === null || covering.id === 'fondant' || covering.id === 'ganache'
-    ? covering.detail
-    : style.detail;
-}
-
-function detailAdvice(situation: Situation): Advice[] {
+function detailAdvice(situation: Situation): Noted[] {
   const { tiers, decorations } = situation.resolved;
   const tooFine = new Map<string, { coat: ResolvedCoating; wants: ResolvedDecoration[] }>();
   for (const wanted of decorations) {
@@ -53,34 +44,54 @@ function detailAdvice(situation: Situation): Advice[] {
   }
   return [...tooFine].map(([key, { coat, wants }]) => {
     const needed = Math.max(...wants.map((it) => fineness[it.decoration.needs]));
-    const ways = otherCoats(situation, coat, (it) => fineness[detailOfChoice(it)] >= needed);
+    const ways = otherCoats(situation, coat, (it) => fineness[detailOf(it)] >= needed);
     const names = [...new Set(wants.map((it) => it.decoration.name))];
+    const wanted = new Set(wants.map((it) => it.decoration.id));
+    const { look } = situation.resolved.design;
+    const plainer: WayOut[] =
+      ways.length > 0 || look === null
+        ? []
+        : [
+            {
+              label: `Leave out ${formatList(names)}`,
+              patch: {
+                look: {
+                  ...look,
+                  decorations: look.decorations.filter((it) => !wanted.has(it.decorationId)),
+                },
+              },
+            },
+          ];
     return note({
       code: 'detail',
       level: 'stop',
       step: 'look',
       about: `detail:${key}`,
       sentence: `${coatingName(coat)} is too soft for ${formatList(names)}.`,
+      plain: `${coatingName(coat)} holds ${detailWords[detailOf(coat)]}; asked for: ${formatList(names)}.`,
       instead:
         ways.length === 0
           ? 'Leave it out, or ask us for something plainer.'
           : `${orList(ways.map((it) => it.label))} would hold it.`,
-      ways,
+      ways: [...ways, ...plainer],
       talk: true,
     });
   });
 }
 
-const detailOfChoice = (choice: Pick<ResolvedCoating, 'covering' | 'style'>): Detail =>
-  detailOf({ ...choice, finish: 'smooth', colour: null });
+const detailWords = {
+  none: 'no detail',
+  soft: 'soft piping, no fine detail',
+  fine: 'fine detail',
+} as const;
 
 /** Styles up to this on the scale of five are hard to get smooth. */
 const hardToSmooth = 2;
 
-function finishAdvice(situation: Situation): Advice[] {
+function finishAdvice(situation: Situation): Noted[] {
   const { resolved } = situation;
   const { cake } = resolved.design;
-  return distinctCoats(resolved.tiers).flatMap((coat): Advice[] => {
+  return distinctCoats(resolved.tiers).flatMap((coat): Noted[] => {
     const { covering, style, finish } = coat;
     const [first] = covering.finishes;
     if (cake !== null && first !== undefined && !covering.finishes.includes(finish)) {
@@ -137,10 +148,10 @@ function finishAdvice(situation: Situation): Advice[] {
 }
 
 /** What is written on one tier shares its room, however many lines it comes in. */
-function wordsAdvice({ design, tiers, menu }: ResolvedDesign): Advice[] {
+function wordsAdvice({ design, tiers, menu }: ResolvedDesign): Noted[] {
   if (tiers.length === 0) return [];
   const written = new Map<number, number>();
-  return (design.look?.words ?? []).flatMap((words, index): Advice[] => {
+  return (design.look?.words ?? []).flatMap((words, index): Noted[] => {
     if (words.text.trim() === '') return [];
     const shared = { code: 'words-length', level: 'stop', step: 'look' } as const;
     const about = `words:${index}`;
@@ -173,7 +184,7 @@ function wordsAdvice({ design, tiers, menu }: ResolvedDesign): Advice[] {
 const namesOf = (decorations: readonly ResolvedDecoration[]): string =>
   formatList([...new Set(decorations.map((it) => it.decoration.name))]);
 
-function inedibleAdvice({ decorations }: ResolvedDesign): Advice[] {
+function inedibleAdvice({ decorations }: ResolvedDesign): Noted[] {
   const taken = decorations.filter((it) => it.decoration.edge === 'remove-before-eating');
   const touching = decorations.filter((it) => it.decoration.edge === 'food-contact-only');
   const cautions = [...new Set([...taken, ...touching].map((it) => it.decoration.caution))]
@@ -207,7 +218,7 @@ function inedibleAdvice({ decorations }: ResolvedDesign): Advice[] {
   ];
 }
 
-function smallPartsAdvice({ decorations, design }: ResolvedDesign): Advice[] {
+function smallPartsAdvice({ decorations, design }: ResolvedDesign): Noted[] {
   const small = decorations.filter((it) => it.decoration.smallParts);
   if (small.length === 0) return [];
   const young = design.guests.infants || design.guests.susceptible;
@@ -246,7 +257,7 @@ export const poisonousFlowers = [
   'calla',
 ] as const;
 
-function flowerAdvice({ decorations }: ResolvedDesign): Advice[] {
+function flowerAdvice({ decorations }: ResolvedDesign): Noted[] {
   const brought = decorations.filter(
     ({ decoration, placed }) =>
       placed.source !== 'studio' && (decoration.glyph === 'flower' || decoration.glyph === 'leaf'),
@@ -264,7 +275,34 @@ function flowerAdvice({ decorations }: ResolvedDesign): Advice[] {
   ];
 }
 
-function deepColourAdvice({ design, tiers, decorations }: ResolvedDesign): Advice[] {
+/** Glyphs of what is strewn or brushed on. */
+const strewn: readonly string[] = ['sprinkle', 'pearl'];
+
+/**
+ * "Non-toxic" glitter and dusts are not for eating: what is must say edible and list what is in it
+ * (US FDA, "Avoid Potentially Unsafe Non-Edible Products Used to Decorate Foods").
+ */
+function glitterAdvice({ design, decorations }: ResolvedDesign): Noted[] {
+  const brought = decorations.some(
+    ({ placed, decoration }) => placed.source !== 'studio' && strewn.includes(decoration.glyph),
+  );
+  const named = /\b(?:glitter|lust(?:er|re)|dust)\b/i.test(design.look?.note ?? '');
+  if (!brought && !named) return [];
+  return [
+    note({
+      code: 'inedible',
+      level: 'care',
+      step: 'look',
+      about: 'glitter',
+      sentence:
+        'A packet that says “non-toxic” is not for eating: glitter and dusts must say “edible” and list what is in them.',
+      plain: 'Glitter or dust: put on only what says edible and lists its ingredients.',
+      instead: 'Bring us the packet, or take ours.',
+    }),
+  ];
+}
+
+function deepColourAdvice({ design, tiers, decorations }: ResolvedDesign): Noted[] {
   const colours = [
     ...tiers.map((it) => it.coating?.colour ?? null),
     ...(design.look?.palette ?? []),

@@ -7,7 +7,13 @@ import { fareInHeat, warmthOf } from './heat.ts';
 import { coat, designWith, indoors, roundTier } from './testing/design-fixture.ts';
 import { menuFixture } from './testing/menu-fixture.ts';
 import { styles } from './testing/menu-parts-fixture.ts';
-import { coldHoldingC, fsis, keepCoolText, minutesAllowed } from './time-out.ts';
+import {
+  coldHoldingC,
+  fsis,
+  keepCoolText,
+  minutesAllowed,
+  type KeepCoolInput,
+} from './time-out.ts';
 
 const evaluate = (design: Design, date: string | null = '2027-06-19'): Estimate =>
   evaluateDesign({ design, date }, menuFixture, '2027-05-01');
@@ -44,6 +50,28 @@ describe('heat', () => {
       const then = evaluate({ ...design, ...way.patch });
       expect(then.advice.filter((it) => it.code === 'heat' && it.level === 'stop')).toEqual([]);
     }
+  });
+
+  it('offers a dummy on show with cutting cakes kept cold', () => {
+    const design = inStyle('swiss', 34, 'shade');
+    const ways = about(evaluate(design), 'heat:buttercream-swiss')?.ways ?? [];
+    const show = ways.find((it) => it.label.startsWith('A dummy'));
+    expect(show?.label).toBe(
+      'A dummy in Fondant over Swiss meringue on show, and cutting cakes kept cold',
+    );
+    expect(show?.changes[0]).toBe('The cake on show is a dummy: nobody eats from it.');
+    const then = evaluate({ ...design, ...show?.patch });
+    expect(then.advice.filter((it) => it.level === 'stop')).toEqual([]);
+    expect(then.portions.fed).toBeGreaterThanOrEqual(70);
+    expect(about(then, 'dummies')?.sentence).toContain('nothing of it is cut or eaten');
+  });
+
+  it('may stand out all afternoon as a dummy', () => {
+    const design = designWith({ setting: { minutesOut: 300, warmestC: 20 } });
+    const show = about(evaluate(design), 'time-out')?.ways.find((it) =>
+      it.label.startsWith('A dummy'),
+    );
+    expect(about(evaluate({ ...design, ...show?.patch }), 'time-out')).toBeUndefined();
   });
 
   // Common practice, no source: French and German suffer most in warmth, Italian least.
@@ -122,7 +150,12 @@ describe('time out of the fridge', () => {
   it('is two hours in all, one above 90 °F', () => {
     expect(minutesAllowed(32)).toBe(120);
     expect(minutesAllowed(33)).toBe(60);
+    // 90 °F is 32.2 °C and not above 90 °F.
+    expect([minutesAllowed((90 - 32) * (5 / 9)), minutesAllowed((91 - 32) * (5 / 9))]).toEqual([
+      120, 60,
+    ]);
     expect([fsis.coldC, fsis.hotC]).toEqual([4, 60]);
+    expect([fsis.coldF, fsis.hotF, fsis.hotDayF]).toEqual([40, 140, 90]);
   });
 
   const out = (minutesOut: number, driveMinutes: number, warmestC = 20) =>
@@ -134,7 +167,7 @@ describe('time out of the fridge', () => {
     expect(out(90, 31)).toMatchObject({
       level: 'stop',
       sentence:
-        '2 h 01 out of the fridge, the drive included, is too long: it may be out for 2 h in all.',
+        '2 h 01 out of the fridge, the drive and setting up included, is too long: between 40 and 140 °F (4 and 60 °C) it may be out for 2 h in all (USDA FSIS).',
     });
     expect(out(45, 20, 34)?.level).toBe('stop');
   });
@@ -156,12 +189,51 @@ describe('time out of the fridge', () => {
   // FDA Food Code 2022, 3-501.16: 41 °F (5 °C); UK, 8 °C.
   it('keeps cold by the region', () => {
     expect([coldHoldingC('US'), coldHoldingC('EU'), coldHoldingC('UK')]).toEqual([5, 5, 8]);
-    expect(keepCoolText({ ...indoors, driveMinutes: 45, minutesOut: 90 }, 20, 'UK', 'C')).toBe(
-      'Keep it in the fridge, at 8 °C / 46 °F or colder, until 1 h 15 before you cut it. It may be out for 2 h in all, the drive included. A large tier eats best after about an hour in the room.',
+    const text = (input: Partial<KeepCoolInput>) =>
+      keepCoolText({
+        setting: indoors,
+        warmestC: 20,
+        studio: menuFixture.studio,
+        widestMm: 200,
+        collectAt: null,
+        perishable: true,
+        ...input,
+      });
+    const uk = { labelRegion: 'UK', temperatureLead: 'C' } as const;
+    expect(text({ setting: { ...indoors, driveMinutes: 45, minutesOut: 90 }, studio: uk })).toBe(
+      'Keep it in the fridge, at 8 °C / 46 °F or colder, until 1 h 15 before you cut it. Between 4 and 60 °C (40 and 140 °F) it may be out for 2 h in all (USDA FSIS), the drive and setting up included.',
     );
-    expect(keepCoolText(null, null, 'US', 'F')).toContain('41 °F / 5 °C');
-    expect(keepCoolText({ ...indoors, minutesOut: 0 }, 20, 'US', 'F')).toContain(
-      'until you cut it',
+    expect(text({ setting: null, warmestC: null })).toContain('41 °F / 5 °C');
+    expect(text({ setting: { ...indoors, minutesOut: 0 } })).toContain('until you cut it');
+    // Memory: one to three hours for a tier of 9 in or more to soften all through.
+    expect(text({ widestMm: 254 })).toContain('takes 1 to 3 h to soften');
+    expect(text({ widestMm: 254 })).toContain('the limit comes first');
+    expect(text({ perishable: false })).not.toContain('fridge');
+  });
+
+  it('says the hour to leave it in the fridge until where serving is known', () => {
+    const served = { ...indoors, minutesOut: 90, driveMinutes: 45, servedAt: 16 * 60 };
+    const text = (collectAt: number | null, warmestC = 20) =>
+      keepCoolText({
+        setting: served,
+        warmestC,
+        studio: menuFixture.studio,
+        widestMm: 200,
+        collectAt,
+        perishable: true,
+      });
+    // Two hours less the drive of 45 min: out at 14:45. Above 90 °F one hour: 15 min, out at 15:45.
+    expect(text(10 * 60)).toContain('until 14:45; you cut it at 16:00.');
+    expect(text(10 * 60, 34)).toContain('until 15:45; you cut it at 16:00.');
+    expect(text(10 * 60, 34)).toContain('Above 90 °F / 32 °C it may be out for 1 h in all');
+    expect(text(14 * 60 + 30)).toContain('Straight from us to the table: it is there at 15:15');
+    const late = evaluateDesign(
+      { design: designWith({ setting: served }), date: null, collectAt: 16 * 60 },
+      menuFixture,
+      '2027-05-01',
+    );
+    expect(about(late, 'arrival')?.sentence).toBe(
+      'You cut it at 16:00, but it cannot be there before 16:45.',
     );
   });
 });

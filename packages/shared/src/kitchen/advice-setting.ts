@@ -1,32 +1,23 @@
-import type { Advice } from '#shared/contracts/estimates.ts';
 import type { AdviceLevel } from '#shared/contracts/vocabulary.ts';
-import { formatDuration, formatMonth } from '#shared/dates/format.ts';
-import {
-  coatLimitC,
-  fareInHeat,
-  fareOfCoat,
-  heatMarginC,
-  usualRoomC,
-  whereWords,
-  type Warmth,
-} from './heat.ts';
+import { formatMonth } from '#shared/dates/format.ts';
+import { timeAdvice } from './advice-time.ts';
+import { coatLimitC, fareInHeat, fareOfCoat, whereWords, type Warmth } from './heat.ts';
 import { formatTemperature } from './measures.ts';
-import { note } from './note.ts';
+import { note, type Noted, type WayOut } from './note.ts';
 import { coatingName, type ResolvedCoating, type ResolvedTier } from './resolve-design.ts';
 import { named, orList } from './sentences.ts';
+import { showWays } from './show-cake.ts';
 import type { Situation } from './situation.ts';
-import { fsis, minutesAllowed } from './time-out.ts';
-import { otherCoats, otherFillings, type Way } from './ways-out.ts';
+import { heatWays, indoorsWays, otherFillings } from './ways-out.ts';
 
 /** What the place, its warmth and the hours mean for coats, fillings and food safety. */
-export function settingAdvice(situation: Situation): Advice[] {
+export function settingAdvice(situation: Situation): Noted[] {
   const { resolved, warmth } = situation;
   if (resolved.design.setting === null || warmth === null) return [];
   return [
     ...distinctCoats(resolved.tiers).flatMap((it) => coatAdvice(it, situation, warmth)),
     ...fillingAdvice(situation, warmth),
     ...timeAdvice(situation, warmth),
-    ...driveAdvice(situation),
   ];
 }
 
@@ -47,7 +38,7 @@ export const coatKey = ({ covering, style }: ResolvedCoating): string =>
 const outside = (coat: ResolvedCoating): string =>
   coat.covering.id === 'buttercream' && coat.style !== null ? coat.style.name : coatingName(coat);
 
-function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth): Advice[] {
+function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth): Noted[] {
   const { setting } = situation.resolved.design;
   if (setting === null) return [];
   const limitC = coatLimitC(coat);
@@ -55,17 +46,19 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
   if (setting.place === 'sun') return [sunAdvice(coat, limitC, situation, warmth)];
   const lead = situation.resolved.menu.studio.temperatureLead;
   const limit = formatTemperature(limitC, lead);
+  const expected = formatTemperature(warmth.celsius, lead);
   const shared = { level, step: 'setting' } as const;
   // What would do by the figure we reckon with needs no other coat, only to be asked again.
-  const ways =
-    fareInHeat(limitC, warmth.celsius) === 'ok' ? [] : heatWays(coat, limitC, situation, warmth);
+  const fare = fareInHeat(limitC, warmth.celsius);
+  const ways = fare === 'ok' ? [] : waysFrom(coat, limitC, situation, fare);
   if (!warmth.known) {
     return [
       note({
         ...shared,
         code: 'heat-unknown',
         about: `heat-unknown:${coatKey(coat)}`,
-        sentence: `You do not know yet how warm it will be; ${reckoned(warmth, situation)} ${formatTemperature(warmth.celsius, lead)}. ${outside(coat)} holds to ${limit}.`,
+        sentence: `You do not know yet how warm it will be; ${reckoned(warmth, situation)} ${expected}. ${outside(coat)} holds to ${limit}.`,
+        plain: `Warmth not known, reckoned ${expected}; ${outside(coat)} holds to ${limit}. Ask again three days before.`,
         instead: `We ask you again three days before. ${standUp(ways)}`.trim(),
         ways,
         talk: level === 'stop',
@@ -77,7 +70,6 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
     const sentence = `${outside(coat)} stands up well there; it holds to ${limit}.`;
     return [note({ ...shared, code: 'heat', about, sentence })];
   }
-  const expected = formatTemperature(warmth.celsius, lead);
   return [
     note({
       ...shared,
@@ -87,6 +79,7 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
         level === 'stop'
           ? `Too warm ${whereWords[setting.place]} for ${outside(coat)}; it holds to ${limit}.`
           : `${outside(coat)} holds to ${limit}, and you expect ${expected}: that is close.`,
+      plain: `${outside(coat)} holds to ${limit}; expected ${expected} ${whereWords[setting.place]}.`,
       instead: [
         standUp(ways),
         level === 'stop'
@@ -106,9 +99,9 @@ function sunAdvice(
   limitC: number,
   situation: Situation,
   warmth: Warmth,
-): Advice {
+): Noted {
   const { setting } = situation.resolved.design;
-  const shade: Way[] =
+  const shade: WayOut[] =
     setting === null || fareInHeat(limitC, warmth.celsius) === 'stop'
       ? []
       : [{ label: 'In the shade', patch: { setting: { ...setting, place: 'shade' } } }];
@@ -118,6 +111,7 @@ function sunAdvice(
     step: 'setting',
     about: `sun:${coatKey(coat)}`,
     sentence: `Direct sun melts ${outside(coat)}, however mild the day.`,
+    plain: `Stands in direct sun: no coat holds there, ${outside(coat)} neither.`,
     instead: 'Stand it in the shade, or keep it inside until you cut it.',
     ways: [...shade, ...indoorsWays(limitC, situation)],
     talk: true,
@@ -130,40 +124,29 @@ function reckoned(warmth: Warmth, { date }: Situation): string {
     : `for ${formatMonth(date).split(' ')[0] ?? ''} we reckon with`;
 }
 
-function heatWays(
+/** Another coat, a cooler place, and where it would be a stop also a dummy on show. */
+function waysFrom(
   coat: ResolvedCoating,
   limitC: number,
   situation: Situation,
-  warmth: Warmth,
-): Way[] {
-  const better = otherCoats(
-    situation,
-    coat,
-    (it) => coatLimitC(it) > limitC && fareInHeat(coatLimitC(it), warmth.celsius) !== 'stop',
-  );
-  return [...better, ...indoorsWays(limitC, situation)];
-}
-
-/** A room no warmer than the coat likes. */
-function indoorsWays(limitC: number, { resolved, warmth }: Situation): Way[] {
-  const { setting } = resolved.design;
-  if (setting === null || warmth === null) return [];
-  const room = Math.min(usualRoomC, Math.floor(limitC - heatMarginC));
-  if (setting.place === 'indoors' && warmth.celsius <= room) return [];
-  const label = `Inside until cutting, at ${formatTemperature(room, resolved.menu.studio.temperatureLead)} or cooler`;
-  return [{ label, patch: { setting: { ...setting, place: 'indoors', warmestC: room } } }];
+  fare: AdviceLevel,
+): WayOut[] {
+  const ways = heatWays(coat, limitC, situation);
+  return fare === 'stop' ? [...ways, ...showWays(situation)] : ways;
 }
 
 /** "Italian meringue buttercream or Fondant over Swiss meringue would stand up." */
-function standUp(ways: readonly Way[]): string {
-  const coats = ways.filter((it) => it.patch.cake !== undefined).map((it) => it.label);
+function standUp(ways: readonly WayOut[]): string {
+  const coats = ways
+    .filter((it) => it.patch.cake !== undefined && it.patch.cake.tiers.every((tier) => tier.real))
+    .map((it) => it.label);
   return coats.length === 0 ? '' : `${orList(coats)} would stand up.`;
 }
 
-function fillingAdvice(situation: Situation, warmth: Warmth): Advice[] {
+function fillingAdvice(situation: Situation, warmth: Warmth): Noted[] {
   const { tiers, menu } = situation.resolved;
   const seen = new Set<string>();
-  return tiers.flatMap((tier): Advice[] => {
+  return tiers.flatMap((tier): Noted[] => {
     const { filling } = tier;
     if (filling === null || warmth.celsius <= filling.holdsToC) return [];
     const bears = filling.soft && tier.index < tiers.length - 1;
@@ -171,7 +154,8 @@ function fillingAdvice(situation: Situation, warmth: Warmth): Advice[] {
     if (seen.has(about)) return [];
     seen.add(about);
     const name = named(filling.name, 'filling');
-    const limit = formatTemperature(filling.holdsToC, menu.studio.temperatureLead);
+    const lead = menu.studio.temperatureLead;
+    const limit = formatTemperature(filling.holdsToC, lead);
     const ways = otherFillings(
       situation,
       filling,
@@ -187,86 +171,11 @@ function fillingAdvice(situation: Situation, warmth: Warmth): Advice[] {
         sentence: bears
           ? `${name} is soft and holds to ${limit}; under another tier it would slide on a day that warm.`
           : `${name} softens above ${limit}, so slices will be less neat.`,
+        plain: `${name} holds to ${limit}, reckoned ${formatTemperature(warmth.celsius, lead)}${bears ? ', and carries a tier' : ''}.`,
         instead: ways.length === 0 ? 'Keep it colder until you cut it.' : 'These are firmer.',
-        ways,
+        ways: bears ? [...ways, ...indoorsWays(filling.holdsToC, situation)] : ways,
         talk: bears,
       }),
     ];
   });
-}
-
-/** Whether anything on the cake has to be kept cold: the owner's flag, by default yes. */
-function perishable({ tiers }: Situation['resolved']): boolean {
-  return tiers.some(
-    ({ filling, coating }) =>
-      filling !== null || coating === null || coating.style?.refrigerate !== false,
-  );
-}
-
-function timeAdvice(situation: Situation, warmth: Warmth): Advice[] {
-  const { design, menu, tiers } = situation.resolved;
-  const { setting } = design;
-  if (setting === null || tiers.length === 0 || !perishable(situation.resolved)) return [];
-  const allowed = minutesAllowed(warmth.celsius);
-  const out = setting.minutesOut + setting.driveMinutes;
-  // Within a quarter of the limit a late speech is enough to pass it.
-  if (out <= allowed * 0.75) return [];
-  const level: AdviceLevel = out > allowed ? 'stop' : 'care';
-  const hotDay = warmth.celsius > fsis.hotDayC;
-  const lead = menu.studio.temperatureLead;
-  const rule = hotDay
-    ? `above ${formatTemperature(fsis.hotDayC, lead)} it may be out for ${formatDuration(allowed)} in all`
-    : `it may be out for ${formatDuration(allowed)} in all`;
-  const before = Math.floor((allowed - setting.driveMinutes) / 15) * 15;
-  const shorter: Way[] =
-    level === 'stop' && before > 0
-      ? [
-          {
-            label: `Out of the fridge ${formatDuration(before)} before cutting`,
-            patch: { setting: { ...setting, minutesOut: before } },
-          },
-        ]
-      : [];
-  return [
-    note({
-      code: 'time-out',
-      level,
-      step: 'setting',
-      about: 'time-out',
-      sentence:
-        level === 'stop'
-          ? `${formatDuration(out)} out of the fridge, the drive included, is too long: ${rule}.`
-          : `${formatDuration(out)} out of the fridge, the drive included, is close: ${rule}.`,
-      instead:
-        level === 'care'
-          ? 'Keep an eye on the clock.'
-          : shorter.length > 0
-            ? 'Leave it in the fridge for longer.'
-            : 'Carry it in a cold box and put it in a fridge when you arrive.',
-      ways: shorter,
-      talk: level === 'stop',
-    }),
-  ];
-}
-
-/** Longer drives than this ask for a word about the car (memory). */
-const longDriveMinutes = 45;
-
-function driveAdvice({ resolved }: Situation): Advice[] {
-  const { design, tiers } = resolved;
-  if (design.setting === null || tiers.length === 0) return [];
-  const { driveMinutes } = design.setting;
-  if (driveMinutes < longDriveMinutes) return [];
-  const stacked = tiers.length > 1;
-  return [
-    note({
-      code: 'drive',
-      level: 'care',
-      step: 'setting',
-      about: 'drive',
-      sentence: `${formatDuration(driveMinutes)} is a long drive for ${stacked ? 'a stacked cake' : 'a cake'}.`,
-      instead:
-        'Cool the car first, stand the box level on the floor, not on a seat, and take corners gently.',
-    }),
-  ];
 }

@@ -5,6 +5,7 @@ import { dietAdvice } from './advice-diets.ts';
 import { eatingAdvice } from './advice-eating.ts';
 import { lookAdvice } from './advice-look.ts';
 import { settingAdvice } from './advice-setting.ts';
+import { changesOf } from './changes.ts';
 import { byLevel } from './heat.ts';
 import type { PortionCount } from './portions.ts';
 import type { Situation } from './situation.ts';
@@ -18,6 +19,7 @@ export function adviseOn(
   portions: PortionCount,
   proposals: readonly Proposal[],
 ): Advice[] {
+  const { design, menu } = situation.resolved;
   return [
     ...allergenAdvice(situation),
     ...eatingAdvice(situation),
@@ -25,5 +27,14 @@ export function adviseOn(
     ...settingAdvice(situation),
     ...cakeAdvice(situation.resolved, portions, proposals),
     ...lookAdvice(situation),
-  ].sort((a, b) => byLevel(b.level, a.level));
+  ]
+    .sort((a, b) => byLevel(b.level, a.level))
+    .map((it) => ({
+      ...it,
+      ways: it.ways.map(({ label, patch }) => ({
+        label,
+        changes: changesOf(design, patch, menu),
+        patch,
+      })),
+    }));
 }

@@ -15,17 +15,43 @@ export function isListed(declaration: Declaration): declaration is ListedDeclara
 export const gravest: readonly Severity[] = ['coeliac', 'anaphylaxis'];
 const grave: readonly Severity[] = ['allergy', ...gravest];
 
+/** From the lightest to what asks for the most care. */
+export const byGravity: readonly Severity[] = [
+  'avoids',
+  'intolerance',
+  'allergy',
+  'coeliac',
+  'anaphylaxis',
+];
+
+/** The species a declaration is about; for coeliac disease every gluten cereal is. */
+export function speciesOf({
+  allergen,
+  species,
+  severity,
+}: Pick<ListedDeclaration, 'allergen' | 'species' | 'severity'>): string | null {
+  return severity === 'coeliac' && allergen === 'gluten-cereals' ? null : species;
+}
+
+/** How advice names what a declaration is about: "egg", "tree-nuts:pecan". */
+export function subjectOf(
+  declaration: Pick<ListedDeclaration, 'allergen' | 'species' | 'severity'>,
+): string {
+  const species = speciesOf(declaration);
+  return species === null ? declaration.allergen : `${declaration.allergen}:${species}`;
+}
+
 /**
  * Whether an entry is about what was declared. An entry that names no species may be any; for
  * coeliac disease every gluten cereal is.
  */
 export function isAbout(
   entry: Pick<AllergenEntry, 'allergen' | 'species'>,
-  { allergen, species, severity }: ListedDeclaration,
+  declaration: ListedDeclaration,
 ): boolean {
-  if (entry.allergen !== allergen) return false;
+  if (entry.allergen !== declaration.allergen) return false;
+  const species = speciesOf(declaration);
   if (species === null || entry.species.length === 0) return true;
-  if (severity === 'coeliac' && allergen === 'gluten-cereals') return true;
   return entry.species.some((it) => sameSpecies(it, species));
 }
 
@@ -74,7 +100,7 @@ const shellfish = ['crustaceans', 'molluscs'] as const;
 const spokenAgainst: Record<DietId, readonly Substance[]> = {
   vegan: ['milk', 'egg', 'honey', ...slaughter, 'fish', ...shellfish],
   vegetarian: [...slaughter, 'fish', ...shellfish],
-  halal: ['alcohol', 'gelatine', 'something of animal origin'],
+  halal: ['alcohol', 'gelatine', 'something of animal origin', 'cochineal'],
   kosher: [...slaughter, ...shellfish],
   'no-alcohol': ['alcohol'],
   'no-gelatine': ['gelatine'],

@@ -1,6 +1,7 @@
 import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
 import type { AllergenEntry, Menu } from '#shared/contracts/menu.ts';
 import { adviseOn } from './advice.ts';
+import { isPerishable } from './advice-time.ts';
 import { amountsOf, carriedPieces, carriedWeightG, heightMm } from './amounts.ts';
 import { mergeAllergens } from './merge-allergens.ts';
 import { containedAllergens, partsOf } from './parts.ts';
@@ -8,7 +9,7 @@ import { countPortions } from './portions.ts';
 import { priceDesign } from './price.ts';
 import { proposeCakes } from './propose-cakes.ts';
 import { rankCoats } from './rank-coats.ts';
-import { resolveDesign } from './resolve-design.ts';
+import { resolveDesign, type ResolvedDesign } from './resolve-design.ts';
 import { tableOf } from './situation.ts';
 import { keepCoolText } from './time-out.ts';
 
@@ -29,13 +30,13 @@ function handledBy(menu: Menu): AllergenEntry[] {
  * remembered per `menu` object, so pass the same one again while it has not changed.
  */
 export function evaluateDesign(request: EstimateRequest, menu: Menu, today: string): Estimate {
-  const { design, date } = request;
+  const { design, date, collectAt = null } = request;
   const resolved = resolveDesign(design, menu);
   const terms = { date, today };
   const portions = countPortions(design, menu);
   const proposals = proposeCakes(resolved, terms);
   const parts = partsOf(resolved);
-  const table = tableOf(resolved, parts, date);
+  const table = tableOf(resolved, parts, { date, collectAt });
   const coats = rankCoats(table);
   const amounts = amountsOf(resolved);
   return {
@@ -55,11 +56,17 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
       coveringG: Math.round(amounts.coveringG),
     },
     heightMm: heightMm(resolved),
-    keepCool: keepCoolText(
-      design.setting,
-      table.warmth?.celsius ?? null,
-      menu.studio.labelRegion,
-      menu.studio.temperatureLead,
-    ),
+    keepCool: keepCoolText({
+      setting: design.setting,
+      warmestC: table.warmth?.celsius ?? null,
+      studio: menu.studio,
+      widestMm: widestEatenMm(resolved),
+      collectAt,
+      perishable: resolved.tiers.length === 0 || isPerishable(resolved),
+    }),
   };
+}
+
+function widestEatenMm({ tiers }: ResolvedDesign): number {
+  return Math.max(0, ...tiers.filter((it) => it.real).map((it) => it.block.widthMm));
 }

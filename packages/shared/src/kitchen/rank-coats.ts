@@ -47,12 +47,12 @@ export function rankCoats(table: Table): RankedCoat[] {
     const level = sharper(heat.level, guests?.level ?? 'ok');
     const sentence = guests === null ? heat.sentence : `${guests.sentence} ${heat.sentence}`;
     const rank = { covering: covering.id, style: style?.id ?? null, level, sentence };
-    return { covering, style, rank, forGuests: guests?.level ?? 'ok' };
+    return { covering, style, rank, heat: heat.level, forGuests: guests?.level ?? 'ok' };
   });
   // Where both are the same the menu's own order stays.
   return ranked
     .sort((a, b) => byLevel(a.rank.level, b.rank.level) || byLevel(a.forGuests, b.forGuests))
-    .map(({ covering, style, rank }) => ({ covering, style, rank }));
+    .map(({ covering, style, rank, heat }) => ({ covering, style, rank, heat }));
 }
 
 function judgeHeat(

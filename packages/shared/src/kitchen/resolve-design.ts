@@ -150,12 +150,19 @@ function resolveCuttingCakes({ cake }: Design, menu: Menu): ResolvedCuttingCake[
  * What a cutting cake wears: the buttercream of the cake on show, smooth and untinted; ganache
  * where that has no buttercream. Null while the cake has no coat.
  */
-export function plainCoatOf({ coating }: Cake): Coating | null {
+export function plainCoatOf(cake: Cake): Coating | null {
+  const coating = wornCoat(cake);
   if (coating === null) return null;
   const plain = { finish: 'smooth', colour: null } as const;
   return coating.style === null
     ? { covering: 'ganache', style: null, ...plain }
     : { covering: 'buttercream', style: coating.style, ...plain };
+}
+
+/** The coat that is seen: where every tier has one of its own, nobody wears the cake's. */
+export function wornCoat({ kind, tiers, coating }: Cake): Coating | null {
+  const own = kind === 'tiered' && tiers.every((it) => it.coating !== null);
+  return (own ? tiers[0]?.coating : null) ?? coating;
 }
 
 function resolveCoating(coating: Coating | null, menu: Menu, path: Path): ResolvedCoating | null {

@@ -1,17 +1,15 @@
-import type { Cake, Coating } from '#shared/contracts/design.ts';
-import type { Advice } from '#shared/contracts/estimates.ts';
-import type { Contents, Filling, Sponge } from '#shared/contracts/menu.ts';
-import { formatList } from '#shared/dates/format.ts';
+import type { Cake, Coating, Setting } from '#shared/contracts/design.ts';
+import type { Filling } from '#shared/contracts/menu.ts';
+import { detailOf, fineness, finestOn } from './detail.ts';
+import { coatLimitC, fareInHeat, heatMarginC, usualRoomC } from './heat.ts';
+import { formatTemperature } from './measures.ts';
+import type { WayOut } from './note.ts';
 import { coatingName, type ResolvedCoating } from './resolve-design.ts';
 import { named } from './sentences.ts';
-import type { Coat, Situation } from './situation.ts';
-
-export type Way = Advice['ways'][number];
-
-type Clashes = (contents: Contents) => boolean;
+import type { Coat, RankedCoat, Situation } from './situation.ts';
 
 /** How many ways are offered at once; more would be a menu again. */
-const mostWays = 3;
+export const mostWays = 3;
 
 /** The same coat in another covering or style; the finish stays where the new one has it. */
 function recoat(old: Coating, { covering, style }: Coat): Coating {
@@ -25,7 +23,7 @@ function recoat(old: Coating, { covering, style }: Coat): Coating {
   };
 }
 
-const sameCoat = (a: Coating, b: Coat | ResolvedCoating): boolean =>
+export const sameCoat = (a: Coating, b: Coat | ResolvedCoating): boolean =>
   a.covering === b.covering.id && a.style === (b.style?.id ?? null);
 
 /** A cake whose offending coats, the whole cake's or single tiers', are replaced by one other. */
@@ -38,19 +36,37 @@ export function withCoat(cake: Cake, offends: (coating: Coating) => boolean, cho
   };
 }
 
-/** Ways to another coat than `coat`: the best ranked that are not themselves a stop. */
+/**
+ * Whether guests lose nothing by it: whatever of theirs speaks against a coat or a filling speaks
+ * against the cake as it is, in the same way.
+ */
+export function addsNoClash(situation: Situation): (it: Coat | Filling) => boolean {
+  const { parts, guestClashes } = situation;
+  const before = new Set(parts.flatMap((it) => guestClashes(it.contents)));
+  return (it) =>
+    contentsOf(it).every((contents) => guestClashes(contents).every((clash) => before.has(clash)));
+}
+
+const contentsOf = (it: Coat | Filling) => {
+  if (!('covering' in it)) return [it.contents];
+  return it.style === null ? [it.covering.contents] : [it.covering.contents, it.style.contents];
+};
+
+/** Ways to another coat than `coat`: the best ranked that stand up there and suit the guests. */
 export function otherCoats(
   situation: Situation,
   coat: ResolvedCoating,
   suits: (choice: Coat) => boolean = () => true,
-): Way[] {
-  const { resolved, coats } = situation;
+): WayOut[] {
+  const { resolved } = situation;
   const { cake } = resolved.design;
   if (cake === null) return [];
-  const offered = coats.filter(
+  const noWorse = addsNoClash(situation);
+  const offered = byWorkOn(situation, coat).filter(
     (it) =>
-      it.rank.level !== 'stop' &&
+      it.heat !== 'stop' &&
       !(it.covering.id === coat.covering.id && it.style?.id === coat.style?.id) &&
+      noWorse(it) &&
       suits(it),
   );
   // Another style of the same covering changes least; then one choice of every other covering.
@@ -67,146 +83,84 @@ export function otherCoats(
   }));
 }
 
-/**
- * Whole cakes that do without what clashes: every offending sponge, filling and coat replaced and
- * every offending decoration left out, in one press. First those that suit all guests at once;
- * empty where the menu has no such cake.
- */
-export function waysWithout(situation: Situation, clashes: Clashes): Way[] {
-  const guests = situation.clashesWithGuests;
-  const forAll = waysFor(situation, (it) => clashes(it) || guests(it));
-  return forAll.length > 0 ? forAll : waysFor(situation, clashes);
-}
-
-function waysFor(situation: Situation, clashes: Clashes): Way[] {
-  const { resolved, parts } = situation;
-  const { menu, design } = resolved;
-  const { cake, look } = design;
-  if (cake === null) return [];
-  const offending = parts.filter((it) => it.unread || clashes(it.contents));
-  const kinds = new Set(offending.map((it) => it.kind));
-  const badIds = (kind: 'sponge' | 'filling') =>
-    new Set(offending.filter((it) => it.kind === kind).map((it) => it.id));
-  const badSponges = badIds('sponge');
-  const badFillings = badIds('filling');
-  const badDecorations = new Set(
-    offending.filter((it) => it.kind === 'decoration').map((it) => it.id),
+/** Coats that hold what stands on this one come first; a way out should not lead into another. */
+function byWorkOn({ resolved, coats }: Situation, coat: ResolvedCoating): readonly RankedCoat[] {
+  const under = resolved.tiers.filter(
+    ({ coating }) =>
+      coating?.covering.id === coat.covering.id && coating.style?.id === coat.style?.id,
   );
-
-  const sponges = menu.sponges.filter((it) => !clashes(it.contents));
-  const fillings = menu.fillings.filter((it) => !clashes(it.contents));
-  const coats = coatsWithout(situation, clashes);
-  const badCoat = (it: Coating) => !coats.some((choice) => sameCoat(it, choice));
-  const needsCoat = kinds.has('buttercream') || kinds.has('covering');
-
-  const pick = <Item>(items: readonly Item[], nth: number) =>
-    items[Math.min(nth, items.length - 1)];
-  const ways = new Map<string, Way>();
-  for (let nth = 0; nth < mostWays; nth += 1) {
-    const sponge = kinds.has('sponge') ? pick(sponges, nth) : null;
-    const filling = kinds.has('filling') ? pick(fillings, nth) : null;
-    const coat = needsCoat ? pick(coats, nth) : null;
-    if (sponge === undefined || filling === undefined || coat === undefined) return [];
-    const names = [
-      ...(sponge === null ? [] : [named(sponge.name, 'sponge')]),
-      ...(filling === null ? [] : [named(filling.name, 'filling')]),
-      ...(coat === null ? [] : [coatingName(coat)]),
-    ];
-    const left = offending.filter((it) => it.kind === 'decoration').map((it) => it.name);
-    const without = left.length === 0 ? '' : `without ${formatList(left)}`;
-    const label = [formatList(names), without].filter((it) => it !== '').join(', ');
-    if (label === '') return [];
-    ways.set(label, {
-      label: names.length === 0 ? `Leave out ${formatList(left)}` : label,
-      patch: {
-        ...(names.length === 0
-          ? {}
-          : { cake: remade(cake, { sponge, filling, coat, badSponges, badFillings, badCoat }) }),
-        ...(look === null || badDecorations.size === 0
-          ? {}
-          : {
-              look: {
-                ...look,
-                decorations: look.decorations.filter((it) => !badDecorations.has(it.decorationId)),
-              },
-            }),
-      },
-    });
-  }
-  return [...ways.values()];
+  const finest = finestOn(resolved, under);
+  const holds = (it: Coat) => fineness[detailOf(it)] >= finest;
+  return [...coats.filter(holds), ...coats.filter((it) => !holds(it))];
 }
 
-/** Coats whose covering and style both do without; those that hold in the setting come first. */
-function coatsWithout({ resolved, warmth, coats }: Situation, clashes: Clashes): Coat[] {
-  const current = resolved.tiers.find((it) => it.coating !== null)?.coating?.covering.id;
-  const clean = coats.filter(
-    (it) => !clashes(it.covering.contents) && !(it.style !== null && clashes(it.style.contents)),
+/** A room no warmer than a coat likes, kept to until the cake is cut. */
+export function roomFor(limitC: number): number {
+  return Math.min(usualRoomC, Math.floor(limitC - heatMarginC));
+}
+
+/** The setting moved indoors, into a room this cool; null where it stands in such a one already. */
+export function movedIndoors({ resolved, warmth }: Situation, limitC: number): Setting | null {
+  const { setting } = resolved.design;
+  if (setting === null || warmth === null) return null;
+  const warmestC = roomFor(limitC);
+  if (setting.place === 'indoors' && warmth.known && warmth.celsius <= warmestC) return null;
+  return { ...setting, place: 'indoors', warmestC };
+}
+
+/** Inside until it is cut, in a room no warmer than the coat likes. */
+export function indoorsWays(limitC: number, situation: Situation): WayOut[] {
+  const setting = movedIndoors(situation, limitC);
+  if (setting === null || setting.warmestC === null) return [];
+  const { temperatureLead } = situation.resolved.menu.studio;
+  const label = `Inside until cutting, at ${formatTemperature(setting.warmestC, temperatureLead)} or cooler`;
+  return [{ label, patch: { setting } }];
+}
+
+/** Ways for a coat that is too warm where it stands: another that holds, or a cooler place. */
+export function heatWays(coat: ResolvedCoating, limitC: number, situation: Situation): WayOut[] {
+  const { warmth } = situation;
+  if (warmth === null) return [];
+  const better = otherCoats(
+    situation,
+    coat,
+    (it) => coatLimitC(it) > limitC && fareInHeat(coatLimitC(it), warmth.celsius) !== 'stop',
   );
-  const holding = warmth === null ? clean : clean.filter((it) => it.rank.level !== 'stop');
-  const usable = holding.length > 0 ? holding : clean;
-  return [
-    ...usable.filter((it) => it.covering.id === current),
-    ...usable.filter((it) => it.covering.id !== current),
-  ];
+  return [...better, ...indoorsWays(limitC, situation)];
 }
 
-function remade(
-  cake: Cake,
-  change: {
-    readonly sponge: Sponge | null;
-    readonly filling: Filling | null;
-    readonly coat: Coat | null;
-    readonly badSponges: ReadonlySet<string>;
-    readonly badFillings: ReadonlySet<string>;
-    readonly badCoat: (coating: Coating) => boolean;
-  },
-): Cake {
-  const { sponge, filling, coat, badSponges, badFillings, badCoat } = change;
-  const refill = <Inside extends { spongeId: string | null; fillingId: string | null }>(
-    it: Inside,
-  ): Inside => ({
-    ...it,
-    spongeId:
-      sponge !== null && it.spongeId !== null && badSponges.has(it.spongeId)
-        ? sponge.id
-        : it.spongeId,
-    fillingId:
-      filling !== null && it.fillingId !== null && badFillings.has(it.fillingId)
-        ? filling.id
-        : it.fillingId,
-  });
-  const changed: Cake = {
-    ...cake,
-    tiers: cake.tiers.map(refill),
-    sheet: cake.sheet === null ? null : refill(cake.sheet),
-  };
-  return coat === null ? changed : withCoat(changed, badCoat, coat);
-}
-
-/** Ways to another filling for the tiers that `offends` points at. */
+/** Ways to another filling wherever in the cake this one is. */
 export function otherFillings(
   situation: Situation,
   filling: Filling,
   suits: (filling: Filling) => boolean,
-): Way[] {
+): WayOut[] {
   const { design, menu } = situation.resolved;
   const { cake } = design;
   if (cake === null) return [];
-  const guests = situation.clashesWithGuests;
+  const noWorse = addsNoClash(situation);
   return menu.fillings
-    .filter((it) => it.id !== filling.id && suits(it) && !guests(it.contents))
+    .filter((it) => it.id !== filling.id && suits(it) && noWorse(it))
     .slice(0, mostWays)
     .map((choice) => ({
       label: named(choice.name, 'filling'),
       patch: {
-        cake: remade(cake, {
-          sponge: null,
-          filling: choice,
-          coat: null,
-          badSponges: new Set(),
-          badFillings: new Set([filling.id]),
-          badCoat: () => false,
-        }),
+        cake: withInside(cake, (it) => ({
+          ...it,
+          fillingId: it.fillingId === filling.id ? choice.id : it.fillingId,
+        })),
       },
     }));
+}
+
+type Inside = { readonly spongeId: string | null; readonly fillingId: string | null };
+
+/** The cake with what is inside it changed: tiers, the sheet and the cutting cakes alike. */
+export function withInside(cake: Cake, change: (it: Inside, of: 'tier' | 'sheet') => Inside): Cake {
+  return {
+    ...cake,
+    tiers: cake.tiers.map((it) => ({ ...it, ...change(it, 'tier') })),
+    sheet: cake.sheet === null ? null : { ...cake.sheet, ...change(cake.sheet, 'sheet') },
+    cuttingCakes: cake.cuttingCakes.map((it) => ({ ...it, ...change(it, 'sheet') })),
+  };
 }

@@ -1,5 +1,12 @@
 import fc from 'fast-check';
-import type { Cake, Coating, CuttingCake, Declaration, Design, Tier } from '#shared/contracts/design.ts';
+import type {
+  Cake,
+  Coating,
+  CuttingCake,
+  Declaration,
+  Design,
+  Tier,
+} from '#shared/contracts/design.ts';
 import {
   allergenIds,
   coveringIds,
@@ -122,6 +129,7 @@ export const arbitraryDesign: fc.Arbitrary<Design> = fc.record({
       warmestC: fc.option(fc.double({ min: -10, max: 50, noNaN: true })),
       minutesOut: fc.integer({ min: 0, max: 1440 }),
       driveMinutes: fc.integer({ min: 0, max: 720 }),
+      servedAt: fc.option(fc.integer({ min: 0, max: 1440 })),
     }),
     { freq: 5 },
   ),

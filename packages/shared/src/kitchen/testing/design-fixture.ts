@@ -33,6 +33,7 @@ export const indoors: Setting = {
   warmestC: 20,
   minutesOut: 60,
   driveMinutes: 15,
+  servedAt: null,
 };
 
 export function declares(change: Partial<Declaration>): Declaration {

@@ -39,6 +39,7 @@ export const menuFixture: Menu = {
     dessertFactorPpm: 700_000,
     kitchenNotice: 'Everything here is made in one kitchen.',
     homeKitchenText: 'Made at 14 Oxbow Lane, Alder Falls.',
+    eggAdvisory: 'Eating raw or undercooked egg may raise the risk of illness.',
     handles: [wheat, egg, milk, soy, entry('tree-nuts', ['almond', 'hazelnut']), entry('sesame')],
   },
   portionSizes: [
