@@ -65,6 +65,7 @@ export function orderForm(date: string, changes: FormChanges = {}): SubmitOrder 
       warmestC: 21,
       minutesOut: 60,
       driveMinutes: 15,
+      servedAt: null,
       ...changes.setting,
     },
     look: { palette: [], words: [], decorations: [], note: '', ...changes.look },

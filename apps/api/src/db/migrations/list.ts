@@ -7,6 +7,7 @@ import { moneyAndMail } from './0006-money-and-mail.ts';
 import { pantryDepth } from './0007-pantry-depth.ts';
 import { careCodes } from './0008-care-codes.ts';
 import { cuttingCakes } from './0009-cutting-cakes.ts';
+import { talksAndServing } from './0010-talks-and-serving.ts';
 import type { Migration } from './migration.ts';
 
 /** Every migration in the order they run. Names are fixed once released; new ones go last. */
@@ -20,4 +21,5 @@ export const migrations: readonly Migration[] = [
   pantryDepth,
   careCodes,
   cuttingCakes,
+  talksAndServing,
 ];

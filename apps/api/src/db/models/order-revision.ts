@@ -57,6 +57,8 @@ export class OrderRevision extends Model<
   declare settingWarmestC: number | null;
   declare settingMinutesOut: number;
   declare settingDriveMinutes: number;
+  /** When it is cut, minutes since midnight where it stands; null while nobody knows. */
+  declare settingServedMinute: number | null;
   declare fulfilment: CreationOptional<Fulfilment>;
   declare addressStreet: string | null;
   declare addressTown: string | null;
@@ -108,6 +110,7 @@ export function initOrderRevision(sequelize: Sequelize): void {
       settingWarmestC: nullable(real()),
       settingMinutesOut: integer(),
       settingDriveMinutes: integer(),
+      settingServedMinute: nullable(integer()),
       fulfilment: withDefault(oneOf(fulfilments), 'collect'),
       addressStreet: nullable(text()),
       addressTown: nullable(text()),

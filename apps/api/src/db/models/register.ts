@@ -74,6 +74,7 @@ import { initShiftPerson } from './shift-person.ts';
 import { initSignInFailure } from './sign-in-failure.ts';
 import { initSkill } from './skill.ts';
 import { initSponge } from './sponge.ts';
+import { initStopTalk } from './stop-talk.ts';
 import { initStudio } from './studio.ts';
 import { initTask } from './task.ts';
 import { initTaskLink } from './task-link.ts';
@@ -162,6 +163,7 @@ const initialisers = [
   initSignInFailure,
   initSkill,
   initSponge,
+  initStopTalk,
   initStudio,
   initTask,
   initTaskLink,

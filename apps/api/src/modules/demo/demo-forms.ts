@@ -57,7 +57,7 @@ export const demoForms = {
       round(10, 'lemon', 'raspberry'),
       round(7, 'vanilla', 'raspberry'),
     ),
-    setting: { place: 'shade', warmestC: 24, minutesOut: 90, driveMinutes: 20 },
+    setting: { place: 'shade', warmestC: 24, minutesOut: 90, driveMinutes: 20, servedAt: null },
     look: look({
       palette: ['#2c7a4b', '#ffffff'],
       decorations: [placed('pressed-flowers', 0), placed('fine-lace', 1)],
@@ -74,7 +74,7 @@ export const demoForms = {
       round(8, 'vanilla', 'passion-fruit'),
       round(5, 'honey', 'lemon-curd'),
     ),
-    setting: { place: 'shade', warmestC: 25, minutesOut: 90, driveMinutes: 25 },
+    setting: { place: 'shade', warmestC: 25, minutesOut: 90, driveMinutes: 25, servedAt: null },
     look: look({
       palette: ['#faf6ec', '#f2b632', '#2c7a4b'],
       decorations: [
@@ -124,7 +124,7 @@ export const demoForms = {
       round(9, 'orange-chiffon', 'vanilla-cream'),
       round(6, 'orange-chiffon', 'vanilla-cream'),
     ),
-    setting: { place: 'sun', warmestC: 29, minutesOut: 150, driveMinutes: 40 },
+    setting: { place: 'sun', warmestC: 29, minutesOut: 150, driveMinutes: 40, servedAt: null },
     look: look({ decorations: [placed('fresh-fruit', 0)] }),
     extras: [],
     you: person('Odile Fenn', 'odile.fenn@example.com', '607 555 0183'),

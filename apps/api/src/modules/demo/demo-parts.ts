@@ -98,6 +98,7 @@ export const indoors: SubmitOrder['setting'] = {
   warmestC: 21,
   minutesOut: 60,
   driveMinutes: 15,
+  servedAt: null,
 };
 /** What everybody agrees to, and nothing more. */
 export const agreed: SubmitOrder['consents'] = {

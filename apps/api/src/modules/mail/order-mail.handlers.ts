@@ -140,9 +140,11 @@ export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
     },
 
     async 'stop-lifted'({ orderId, liftedStopId }, context) {
-      const { reason } = await LiftedStop.findByPk(liftedStopId, { rejectOnEmpty: true });
+      const { acceptedAt } = await LiftedStop.findByPk(liftedStopId, { rejectOnEmpty: true });
+      // Read and accepted on the page meanwhile: there is nothing to ask any more.
+      if (acceptedAt !== null) return;
       const told = await loadToldOrder(deps, orderId);
-      await toCustomer(told, context, 'stop-lifted', { order: told.forCustomer, reason });
+      await toCustomer(told, context, 'stop-lifted', { order: told.forCustomer });
     },
 
     async 'private-link-renewed'({ orderId }, context) {

@@ -25,6 +25,7 @@ export function presentStudioCard(studio: Studio, handles: AllergenEntry[]): Stu
     dessertFactorPpm: studio.dessertFactorPpm,
     kitchenNotice: studio.kitchenNotice,
     homeKitchenText: studio.homeKitchenText,
+    eggAdvisory: studio.eggAdvisory,
     handles,
   };
 }

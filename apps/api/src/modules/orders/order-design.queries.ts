@@ -94,6 +94,7 @@ export function designOf(revision: OrderRevision): Design {
       warmestC: revision.settingWarmestC,
       minutesOut: revision.settingMinutesOut,
       driveMinutes: revision.settingDriveMinutes,
+      servedAt: revision.settingServedMinute,
     },
     look: cakeItem === undefined ? null : lookOf(cakeItem, revision.note),
     extras: items.flatMap((item) =>

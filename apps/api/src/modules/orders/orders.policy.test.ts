@@ -28,6 +28,7 @@ const table: Record<OrderAction, { who: string[]; states: OrderStatus[] }> = {
   see: { who: [...holders, 'counter', 'owner'], states: always },
   withdraw: { who: holders, states: always },
   write: { who: holders, states: always },
+  'accept-lifted-stop': { who: holders, states: always },
   'add-photos': {
     who: holders,
     states: ['asked', 'quoted', 'agreed', 'confirmed', 'making', 'ready'],
@@ -39,14 +40,18 @@ const table: Record<OrderAction, { who: string[]; states: OrderStatus[] }> = {
 };
 
 describe.each(Object.entries(actors))('%s', (name, actor) => {
-  it.each(['see', 'withdraw', 'write', 'add-photos', 'see-calendar-file'] as const)(
-    'may %s exactly as the table says',
-    (action) => {
-      const { who, states } = table[action];
-      const allowed = orderStatuses.filter((status) => mayOrder(actor, action, order(status)));
-      expect(allowed).toEqual(
-        who.includes(name) ? orderStatuses.filter((it) => states.includes(it)) : [],
-      );
-    },
-  );
+  it.each([
+    'see',
+    'withdraw',
+    'write',
+    'accept-lifted-stop',
+    'add-photos',
+    'see-calendar-file',
+  ] as const)('may %s exactly as the table says', (action) => {
+    const { who, states } = table[action];
+    const allowed = orderStatuses.filter((status) => mayOrder(actor, action, order(status)));
+    expect(allowed).toEqual(
+      who.includes(name) ? orderStatuses.filter((it) => states.includes(it)) : [],
+    );
+  });
 });

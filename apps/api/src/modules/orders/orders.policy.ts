@@ -8,7 +8,8 @@ import { orderActorOf } from './change-order-status.command.ts';
  * What the people an order belongs to may do with it; staff have routes of their own. When it may
  * still be withdrawn is the table of moves'.
  */
-export type OrderAction = 'see' | 'withdraw' | 'write' | 'add-photos' | 'see-calendar-file';
+export type OrderAction =
+  'see' | 'withdraw' | 'write' | 'add-photos' | 'see-calendar-file' | 'accept-lifted-stop';
 
 export type OrderResource = {
   readonly id: string;
@@ -22,6 +23,8 @@ const rules: Readonly<Record<OrderAction, Rule>> = {
   see: (actor, order) => actor.kind === 'staff' || holdsOrder(actor, order),
   withdraw: holdsOrder,
   write: holdsOrder,
+  // What it is about is theirs to accept, and nobody else's.
+  'accept-lifted-stop': holdsOrder,
   'add-photos': (actor, order) => holdsOrder(actor, order) && isLive(order.status),
   'see-calendar-file': (actor, order) =>
     (actor.kind === 'staff' || holdsOrder(actor, order)) && hasPromise(order.status),

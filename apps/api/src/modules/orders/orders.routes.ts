@@ -1,6 +1,7 @@
 import * as z from 'zod/mini';
 
 import {
+  acceptLiftedStop,
   orderView,
   submitOrder,
   submittedOrder,
@@ -16,6 +17,7 @@ import { grantOrder } from '#api/http/session.ts';
 import { writeMessage as writeMessageCommand } from '#api/modules/messages/write-message.command.ts';
 import type { Actor } from '#api/platform/actor.ts';
 import type { Order } from '#api/db/models/order.ts';
+import { acceptLiftedStop as acceptLiftedStopCommand } from './accept-lifted-stop.command.ts';
 import { calendarFileOf } from './calendar-file.queries.ts';
 import { loadOrderPage } from './order-page.queries.ts';
 import { mayOrder, maySubmitOrder } from './orders.policy.ts';
@@ -88,6 +90,25 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
       const order = await findOwn(actor, code);
       authoriseOn(actor, 'withdraw', order);
       await withdrawOrderCommand(deps, { order, actor, ...body });
+      return presentOrder(await loadOrderPage(await order.reload()), actor);
+    },
+  );
+
+  routes.add(
+    {
+      name: 'accept-lifted-stop',
+      method: 'post',
+      path: '/api/orders/:code/accept-lifted-stop',
+      summary: 'Accept, having read it, why the studio takes the order against a stop.',
+      params,
+      body: acceptLiftedStop,
+      response: orderView,
+      refusals: ['not-found', 'wrong-state', 'changed-meanwhile', 'not-allowed'],
+    },
+    async ({ actor, params: { code }, body }) => {
+      const order = await findOwn(actor, code);
+      authoriseOn(actor, 'accept-lifted-stop', order);
+      await acceptLiftedStopCommand(deps, { order, actor, ...body });
       return presentOrder(await loadOrderPage(await order.reload()), actor);
     },
   );

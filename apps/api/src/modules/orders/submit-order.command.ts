@@ -80,7 +80,7 @@ async function prepare({ clock }: Deps, form: SubmitOrder): Promise<Omit<Prepare
   const menu = await freshMenu();
   const { date } = form.day;
   const estimate = estimateDesign(
-    { design: designOfForm(form), date },
+    { design: designOfForm(form), date, collectAt: form.day.windowStart },
     { menu, now: clock.now(), fieldOf: fieldOfForm },
   );
   refuseImpossible(form, menu, estimate);

@@ -58,6 +58,7 @@ export async function writeRevision(
     settingWarmestC: setting.warmestC,
     settingMinutesOut: setting.minutesOut,
     settingDriveMinutes: setting.driveMinutes,
+    settingServedMinute: setting.servedAt,
     note: design.look?.note ?? '',
     estimate,
     priceBookVersionId: menu.priceBook.versionId,

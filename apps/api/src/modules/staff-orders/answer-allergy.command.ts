@@ -1,10 +1,9 @@
-import { changeOne } from '#api/db/change-one.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
-import { Order } from '#api/db/models/order.ts';
+import type { Order } from '#api/db/models/order.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import type { Deps } from '#api/modules/deps.ts';
-import { changedMeanwhile } from '#api/modules/orders/change-order-status.command.ts';
 import { noteOrderEvent } from '#api/modules/orders/note-order-event.command.ts';
+import { touchOrder } from '#api/modules/orders/touch-order.command.ts';
 import type { Staff } from '#api/platform/actor.ts';
 import { AppError, notFound } from '#api/platform/app-error.ts';
 
@@ -45,14 +44,4 @@ export async function answerAllergy(
       data: { allergyId },
     });
   });
-}
-
-/** Counts a change of an order that leaves its state. @throws `changed-meanwhile` */
-export async function touchOrder(order: Order, rowVersion: number): Promise<void> {
-  const touched = await changeOne(
-    Order,
-    { rowVersion: rowVersion + 1 },
-    { id: order.id, rowVersion, status: order.status },
-  );
-  if (!touched) throw changedMeanwhile(await order.reload());
 }

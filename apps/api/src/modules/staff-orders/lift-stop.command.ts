@@ -1,20 +1,31 @@
+import type { Blocker } from '#shared/contracts/staff.ts';
 import { LiftedStop } from '#api/db/models/lifted-stop.ts';
-import { Message } from '#api/db/models/message.ts';
 import type { OrderRevision } from '#api/db/models/order-revision.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { noteOrderEvent } from '#api/modules/orders/note-order-event.command.ts';
+import { touchOrder } from '#api/modules/orders/touch-order.command.ts';
 import { enqueue } from '#api/outbox/enqueue.ts';
 import type { Staff } from '#api/platform/actor.ts';
 import { AppError, notFound } from '#api/platform/app-error.ts';
-import { touchOrder } from './answer-allergy.command.ts';
 import { blockersOf } from './blockers.queries.ts';
 
+/** Why a stop is not for a reason yet, or at all, by what it waits for. */
+const refusals: Readonly<Record<Exclude<Blocker['waitsFor'], 'reason'>, string>> = {
+  talk: 'Talk with the customer first and record the talk; then you may take it, with your reason.',
+  answer: 'This was told in words: answer it and record the talk. That settles it.',
+  customer: 'You have taken it already; the customer has still to read and accept your reason.',
+  nothing:
+    'The studio’s own table refuses this. Decline the order, have the cake changed, or change the table first.',
+};
+
 /**
- * The owner takes an order against a `stop`, after talking. The written reason stays with the
- * order, and the customer reads it on the order's page and by e-mail.
- * @throws `not-found` when no such stop is open, `not-allowed` for one that nobody may lift
+ * The owner takes an order against a `stop`, after a talk that was recorded. The written reason
+ * stays with the order beside the stop; the customer is asked by e-mail to read and accept it on
+ * the order's page, and nothing is confirmed before.
+ * @throws `not-found` when no such stop is open, `not-allowed` for one that nobody may lift,
+ * `wrong-state` before the talk
  */
 export async function liftStop(
   { clock }: Pick<Deps, 'clock'>,
@@ -29,12 +40,11 @@ export async function liftStop(
 ): Promise<void> {
   const { order, revision, actor, rowVersion, about, reason } = input;
   await inTransaction(async () => {
-    const stop = (await blockersOf(revision)).find((advice) => advice.about === about);
+    const stop = (await blockersOf(revision)).find((it) => it.about === about);
     if (stop === undefined) throw notFound('That is not open any more.');
-    if (!stop.talk) {
-      throw new AppError('not-allowed', {
-        detail: 'The studio’s own rules refuse this. Decline the order, or change the cake.',
-      });
+    if (stop.waitsFor !== 'reason') {
+      const code = stop.waitsFor === 'nothing' ? 'not-allowed' : 'wrong-state';
+      throw new AppError(code, { detail: refusals[stop.waitsFor] });
     }
     const lifted = await LiftedStop.create({
       orderId: order.id,
@@ -46,13 +56,6 @@ export async function liftStop(
       liftedAt: clock.now(),
     });
     await touchOrder(order, rowVersion);
-    await Message.create({
-      orderId: order.id,
-      sender: 'studio',
-      authorUserId: actor.userId,
-      authorName: actor.name,
-      body: `${stop.sentence}\n\n${reason}`,
-    });
     await noteOrderEvent({
       orderId: order.id,
       kind: 'stop-lifted',

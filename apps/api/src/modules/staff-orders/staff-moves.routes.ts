@@ -9,6 +9,7 @@ import {
   liftStop,
   markOrder,
   moveOrder,
+  recordTalk,
   staffOrder,
 } from '#shared/contracts/staff.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
@@ -31,6 +32,7 @@ import { liftStop as liftStopCommand } from './lift-stop.command.ts';
 import { markOrder as markOrderCommand } from './mark-order.command.ts';
 import { moveOrder as moveOrderCommand } from './move-order.command.ts';
 import { orderNumber } from './order-number.ts';
+import { recordTalk as recordTalkCommand } from './record-talk.command.ts';
 import { loadStaffOrderPage } from './staff-order.queries.ts';
 import type { StaffOrderAction } from './staff-orders.policy.ts';
 import { presentStaffOrder } from './staff-orders.presenter.ts';
@@ -207,6 +209,24 @@ export function staffMovesRoutes(deps: Deps): FeatureRoutes {
     async ({ actor, params, body }) => {
       const moved = await load(actor, 'answer-allergy', params.number);
       await answerAllergyCommand(deps, { ...moved, ...body, allergyId: params.id });
+      return show(moved);
+    },
+  );
+
+  routes.add(
+    {
+      name: 'record-talk',
+      method: 'post',
+      path: '/api/staff/orders/:number/talks',
+      summary: 'Record the talk about a stop that no declared allergy stands behind.',
+      params,
+      body: recordTalk,
+      response: staffOrder,
+      refusals: usual,
+    },
+    async ({ actor, params, body }) => {
+      const moved = await load(actor, 'record-talk', params.number);
+      await recordTalkCommand(deps, { ...moved, ...body });
       return show(moved);
     },
   );

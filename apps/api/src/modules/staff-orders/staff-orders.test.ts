@@ -5,6 +5,7 @@ import { datesResponse } from '#shared/contracts/dates.ts';
 import { orderView, submittedOrder } from '#shared/contracts/orders.ts';
 import { confirmationLook, orderList, staffOrder } from '#shared/contracts/staff.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
+import { AllergyRule } from '#api/db/models/allergy-rule.ts';
 import { DayCap } from '#api/db/models/day-cap.ts';
 import { Hold } from '#api/db/models/hold.ts';
 import { Order } from '#api/db/models/order.ts';
@@ -140,7 +141,7 @@ describe('confirming', () => {
   });
 
   it('waits for what must be settled first', async () => {
-    const { number } = await ask({
+    const { number, code, guest } = await ask({
       day: {
         allergies: [
           { allergen: 'egg', species: null, text: '', severity: 'allergy', guests: 1 },
@@ -153,10 +154,13 @@ describe('confirming', () => {
     expect(stopped.status).toBe(409);
     expect(codeOf(stopped)).toBe('advice-stop');
     const before = await look(number);
-    expect(before.blockers.map(({ code }) => code).toSorted()).toEqual([
-      'allergen',
-      'allergy-text',
+    expect(before.blockers.map((it) => [it.code, it.waitsFor]).toSorted()).toEqual([
+      ['allergen', 'talk'],
+      ['allergy-text', 'answer'],
     ]);
+    expect(before.blockers.find((it) => it.code === 'allergen')?.plain).toContain(
+      'The owner’s table: take after talking.',
+    );
 
     // A baker answers what was told in words; only the owner lifts what the cake contains.
     const kiwi = before.allergies.find(({ text }) => text === 'kiwi')?.id ?? '';
@@ -169,13 +173,79 @@ describe('confirming', () => {
     });
     const about = before.blockers.find(({ code }) => code === 'allergen')?.about ?? '';
     const reason = 'The guest brings her own dessert.';
-    expect((await move(baker, number, 'lift-stop', { rowVersion: 2, about, reason })).status).toBe(
-      403,
+    const lift = (by: TestClient, rowVersion: number) =>
+      move(by, number, 'lift-stop', { rowVersion, about, reason });
+    expect((await lift(baker, 2)).status).toBe(403);
+
+    // Nobody takes it before the talk about it is recorded.
+    const early = await lift(owner, 2);
+    expect(codeOf(early)).toBe('wrong-state');
+    expect(problem.parse(early.body).detail).toContain('Talk with the customer first');
+    const egg = before.allergies.find(({ allergen }) => allergen === 'egg')?.id ?? '';
+    await move(baker, number, `allergies/${egg}/answer`, {
+      rowVersion: 2,
+      text: 'Spoke with the guest: she brings her own dessert.',
+    });
+    const lifted = staffOrder.parse((await lift(owner, 3)).body);
+    expect(lifted).toMatchObject({
+      rowVersion: 4,
+      blockers: [{ about, waitsFor: 'customer' }],
+      lifted: [{ about, reason, by: 'Ida Thorne', acceptedAt: null }],
+    });
+    expect(lifted.messages).toEqual([]);
+    expect(await kindsOf(code)).toEqual(['order-asked', 'stop-lifted']);
+
+    // It stands beside the stop on the customer's page, and nothing is confirmed before they accept.
+    expect(codeOf(await move(baker, number, 'confirm', { rowVersion: 4 }))).toBe('advice-stop');
+    const seen = orderView.parse((await guest.get(`/api/orders/${code}`)).body);
+    expect(seen).toMatchObject({
+      can: { acceptLifted: true },
+      lifted: [{ reason, by: 'Ida Thorne', acceptedAt: null }],
+    });
+    expect(seen.lifted[0]?.sentence).toContain('Egg is in');
+    const accepting = { rowVersion: 4, liftedStopId: seen.lifted[0]?.id ?? '' };
+    const path = `/api/orders/${code}/accept-lifted-stop`;
+    expect((await app.visitor().post(path, accepting)).status).toBe(404);
+    expect((await owner.post(path, accepting)).status).toBe(403);
+    const accepted = orderView.parse((await guest.post(path, accepting)).body);
+    expect(accepted).toMatchObject({ rowVersion: 5, can: { acceptLifted: false } });
+    expect(accepted.lifted[0]?.acceptedAt).not.toBeNull();
+    // Pressed twice, it is accepted once.
+    expect(orderView.parse((await guest.post(path, accepting)).body).rowVersion).toBe(5);
+    expect((await look(number)).events.map(({ kind }) => kind).slice(-3)).toEqual([
+      'allergy-answered',
+      'stop-lifted',
+      'lifted-stop-accepted',
+    ]);
+    expect((await move(baker, number, 'confirm', { rowVersion: 5 })).status).toBe(200);
+  });
+
+  it('keeps a talk about heat as well, and lifts that stop only after it', async () => {
+    const { number, code, guest } = await ask({ setting: { place: 'sun', warmestC: 20 } });
+    const [sun] = (await look(number)).blockers;
+    expect(sun).toMatchObject({ code: 'sun', waitsFor: 'talk', talked: null });
+    const about = sun?.about ?? '';
+    const talk = { rowVersion: 1, about, text: 'They put up an awning.' };
+    expect((await move(counter, number, 'talks', talk)).status).toBe(403);
+    expect(
+      (await move(baker, number, 'talks', { rowVersion: 1, about: 'egg', text: 'x' })).status,
+    ).toBe(404);
+    const talked = staffOrder.parse((await move(baker, number, 'talks', talk)).body);
+    expect(talked.blockers).toMatchObject([
+      { about, waitsFor: 'reason', talked: { text: talk.text, by: 'Noor Haddad' } },
+    ]);
+    expect(codeOf(await move(baker, number, 'talks', { ...talk, rowVersion: 2 }))).toBe(
+      'wrong-state',
     );
-    const lifted = await move(owner, number, 'lift-stop', { rowVersion: 2, about, reason });
-    expect(staffOrder.parse(lifted.body)).toMatchObject({ blockers: [], rowVersion: 3 });
-    expect(staffOrder.parse(lifted.body).messages.at(-1)?.body).toContain(reason);
-    expect((await move(baker, number, 'confirm', { rowVersion: 3 })).status).toBe(200);
+    const reason = 'An awning stands over it.';
+    await move(owner, number, 'lift-stop', { rowVersion: 2, about, reason });
+    const [lifted] = orderView.parse((await guest.get(`/api/orders/${code}`)).body).lifted;
+    expect(lifted).toMatchObject({ reason });
+    await guest.post(`/api/orders/${code}/accept-lifted-stop`, {
+      rowVersion: 3,
+      liftedStopId: lifted?.id ?? '',
+    });
+    expect((await look(number)).blockers).toEqual([]);
   });
 
   it('never lifts what the studio’s own rules refuse', async () => {
@@ -188,10 +258,19 @@ describe('confirming', () => {
       consents: { allergyData: true },
     });
     const { blockers } = await look(number);
-    const about = blockers.find(({ talk }) => !talk)?.about;
-    expect(about).toBeDefined();
+    const about = blockers.find(({ waitsFor }) => waitsFor === 'nothing')?.about;
+    expect(about).toBe('allergen:milk');
     const answer = await move(owner, number, 'lift-stop', { rowVersion: 1, about, reason: 'x' });
     expect(codeOf(answer)).toBe('not-allowed');
+
+    // The owner's table counts as it is now: once it says talk, a talk opens the way.
+    const where = { allergen: null, severity: 'anaphylaxis' };
+    await inTransaction(() => AllergyRule.update({ answer: 'talk' }, { where }));
+    expect((await look(number)).blockers.find((it) => it.about === about)).toMatchObject({
+      waitsFor: 'talk',
+      talk: true,
+    });
+    await inTransaction(() => AllergyRule.update({ answer: 'refuse' }, { where }));
   });
 
   it('finds a place first for a request whose hold has run out', async () => {
