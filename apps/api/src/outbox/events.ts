@@ -16,6 +16,9 @@ export type EventPayloads = {
   'hold-ran-out': { orderId: string };
   'stop-lifted': { orderId: string; liftedStopId: string };
   'private-link-renewed': { orderId: string };
+  /** Orders contain something else since one save; the studio is told once for all of them. */
+  'contents-changed': { saveId: string };
+  'contents-to-tell': { orderId: string; contentChangeId: string };
   'message-written': { orderId: string; messageId: string };
   'sign-in-link-asked': { tokenId: string };
   /** Staff never sign in by a link; the mail says how they do. */
@@ -33,6 +36,8 @@ const ofOrder = z.object({ orderId: id });
 const ofToken = z.object({ tokenId: id });
 const ofUser = z.object({ userId: id });
 const ofMessage = z.object({ orderId: id, messageId: id });
+const ofSave = z.object({ saveId: id });
+const ofContentChange = z.object({ orderId: id, contentChangeId: id });
 const ofLiftedStop = z.object({ orderId: id, liftedStopId: id });
 const ofMail = z.object({ sentMailId: z.int() });
 const ofMailAgain = z.object({ sentMailId: z.int(), byUserId: id });
@@ -50,6 +55,8 @@ const parsers: Parsers = {
   'hold-ran-out': (payload) => ofOrder.parse(payload),
   'stop-lifted': (payload) => ofLiftedStop.parse(payload),
   'private-link-renewed': (payload) => ofOrder.parse(payload),
+  'contents-changed': (payload) => ofSave.parse(payload),
+  'contents-to-tell': (payload) => ofContentChange.parse(payload),
   'message-written': (payload) => ofMessage.parse(payload),
   'sign-in-link-asked': (payload) => ofToken.parse(payload),
   'sign-in-link-refused': (payload) => ofUser.parse(payload),

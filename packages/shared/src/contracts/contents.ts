@@ -1,10 +1,11 @@
 import * as z from 'zod/mini';
 import { id, instant, requiredLine, rowVersion } from './common.ts';
+import { containedAllergen } from './estimates.ts';
 import { allergenEntry } from './menu.ts';
 
 /** What a whole order contains, and what is handled near it; what is unknown counts as there. */
 export const orderContents = z.object({
-  allergens: z.array(allergenEntry),
+  allergens: z.array(containedAllergen),
   /** Also handled in the kitchen. */
   handled: z.array(allergenEntry),
   gelatine: z.boolean(),

@@ -9,7 +9,13 @@ import {
   type OrderFacts,
 } from './transitions.ts';
 
-const clear: OrderFacts = { depositDue: false, planned: true, blocked: false, balanceDue: false };
+const clear: OrderFacts = {
+  depositDue: false,
+  planned: true,
+  blocked: false,
+  balanceDue: false,
+  contentsOpen: false,
+};
 const actors = ['guest', 'customer', 'counter', 'baker', 'owner', 'system'] as const;
 const actions = [...new Set(orderTransitions.map((it) => it.action))];
 
@@ -70,6 +76,14 @@ describe('an order’s life', () => {
 });
 
 describe('what is in the way', () => {
+  it('keeps a cake here until its customer knows what has changed in it', () => {
+    const facts = { contentsOpen: true };
+    expect(lead('making', 'ready', 'counter', facts)).toBeNull();
+    expect(lead('confirmed', 'ready', 'owner', facts)).toBeNull();
+    expect(lead('ready', 'collect', 'baker', facts)).toBeNull();
+    expect(lead('confirmed', 'start', 'baker', facts)).toBe('making');
+  });
+
   it.each([{ planned: false }, { blocked: true }])(
     '%j keeps an order from being confirmed',
     (facts) => {

@@ -35,9 +35,15 @@ export type OrderFacts = {
   readonly blocked: boolean;
   /** Money is owed and the terms do not allow handing over first. */
   readonly balanceDue: boolean;
+  /**
+   * Something in it has changed that its customer does not know of yet, or that is against what
+   * guests told and no baker has seen to.
+   */
+  readonly contentsOpen: boolean;
 };
 
-export type OrderGuard = 'planned-and-clear' | 'deposit-due' | 'no-deposit-due' | 'nothing-owed';
+export type OrderGuard =
+  'planned-and-clear' | 'deposit-due' | 'no-deposit-due' | 'nothing-owed' | 'contents-told';
 
 export type OrderEmail =
   | 'order-received'
@@ -170,7 +176,7 @@ export const orderTransitions: readonly OrderTransition[] = [
     from: ['confirmed', 'making'],
     action: 'ready',
     actors: counters,
-    guards: [],
+    guards: ['contents-told'],
     to: 'ready',
     emails: ['ready'],
   },
@@ -178,7 +184,7 @@ export const orderTransitions: readonly OrderTransition[] = [
     from: ['ready'],
     action: 'collect',
     actors: counters,
-    guards: ['nothing-owed'],
+    guards: ['nothing-owed', 'contents-told'],
     to: 'collected',
     emails: ['thank-you'],
   },
@@ -206,6 +212,7 @@ const guardHolds: Record<OrderGuard, (facts: OrderFacts) => boolean> = {
   'deposit-due': (facts) => facts.depositDue,
   'no-deposit-due': (facts) => !facts.depositDue,
   'nothing-owed': (facts) => !facts.balanceDue,
+  'contents-told': (facts) => !facts.contentsOpen,
 };
 
 /** The transition an actor may make, or null; guards are looked at only when facts are given. */

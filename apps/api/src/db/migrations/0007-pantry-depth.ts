@@ -38,6 +38,7 @@ CREATE TABLE content_changes (
   order_id TEXT NOT NULL REFERENCES orders (id),
   revision_id TEXT NOT NULL REFERENCES order_revisions (id),
   n INTEGER NOT NULL CHECK (n >= 1),
+  save_id TEXT NOT NULL,
   ingredient_id TEXT REFERENCES ingredients (id),
   formula_version_id TEXT REFERENCES formula_versions (id),
   told TEXT NOT NULL CHECK (json_valid(told)),
@@ -59,6 +60,7 @@ CREATE TABLE content_changes (
   CHECK ((acknowledged_at IS NULL) = (acknowledged_by_user_id IS NULL)),
   CHECK ((told_at IS NULL) = (told_by_user_id IS NULL))
 ) STRICT;
+CREATE INDEX content_changes_save_id ON content_changes (save_id);
 CREATE INDEX content_changes_revision_id ON content_changes (revision_id);
 CREATE INDEX content_changes_ingredient_id ON content_changes (ingredient_id) WHERE ingredient_id IS NOT NULL;
 CREATE INDEX content_changes_formula_version_id ON content_changes (formula_version_id) WHERE formula_version_id IS NOT NULL;

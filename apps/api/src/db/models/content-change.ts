@@ -34,6 +34,8 @@ export class ContentChange extends Model<
   declare revisionId: string;
   /** Counts an order's changes. */
   declare n: number;
+  /** The same for all orders that one save has changed. */
+  declare saveId: string;
   /** What changed: the label of a product, or the version of a formula that took another's place. */
   declare ingredientId: string | null;
   declare formulaVersionId: string | null;
@@ -67,6 +69,7 @@ export function initContentChange(sequelize: Sequelize): void {
       orderId: text(),
       revisionId: text(),
       n: integer(),
+      saveId: text(),
       ingredientId: nullable(text()),
       formulaVersionId: nullable(text()),
       told: json('told', orderContents),

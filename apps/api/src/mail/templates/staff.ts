@@ -1,10 +1,10 @@
-import { button, fact, facts, notice, text } from '../content.ts';
+import { button, fact, facts, heading, notice, text } from '../content.ts';
 import type { Block } from '../content.ts';
 import type { House } from '../house.ts';
 import type { MailData } from '../mail-data.ts';
-import { oneLine } from '../plain.ts';
+import { nameInText, oneLine } from '../plain.ts';
 import type { Templates } from '../render-mail.ts';
-import { momentText, orderDay } from '../when.ts';
+import { momentText, orderDay, pickupText } from '../when.ts';
 import {
   contentsOf,
   drawingOf,
@@ -12,11 +12,17 @@ import {
   orderBody,
   orderFacts,
   pricesOf,
+  sentences,
 } from './order-parts.ts';
 
 type StaffTemplates = Pick<
   Templates,
-  'new-order' | 'withdrawn-notice' | 'hold-ran-out-notice' | 'customer-message' | 'mail-given-up'
+  | 'new-order'
+  | 'withdrawn-notice'
+  | 'hold-ran-out-notice'
+  | 'customer-message'
+  | 'ingredient-changed-notice'
+  | 'mail-given-up'
 >;
 
 /** Mails to the studio about its orders and its mail. */
@@ -65,6 +71,34 @@ export const staffTemplates: StaffTemplates = {
       preview: order.summary,
       blocks: [{ kind: 'quote', by, text: body }, openOrder(order, 'Answer on the order’s page')],
     }),
+
+  'ingredient-changed-notice': ({ cause, by, orders }, house) => ({
+    title: 'What is in some cakes has changed',
+    preview: oneLine(cause),
+    fill: {
+      by: nameInText(by),
+      orders:
+        orders.length === 1 ? `order No. ${orders[0]?.number ?? ''}` : `${orders.length} orders`,
+    },
+    blocks: [
+      facts(fact('Changed', oneLine(cause)), fact('By', nameInText(by))),
+      ...orders.flatMap(({ number, link, pickup, changes, clashes }) => [
+        heading(`No. ${number}`),
+        ...(pickup === null ? [] : [text(pickupText(pickup, house))]),
+        ...(clashes
+          ? [
+              notice(
+                'stop',
+                'It is against something guests told',
+                'What it is stands on the order’s page and not in this e-mail.',
+              ),
+            ]
+          : []),
+        sentences(changes),
+        button(`Open No. ${number}`, link),
+      ]),
+    ],
+  }),
 
   'mail-given-up': ({ subject, to, reason, orderNumber, link }) => ({
     title: 'An e-mail could not be delivered',

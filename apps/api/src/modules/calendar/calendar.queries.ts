@@ -9,6 +9,7 @@ import { Studio } from '#api/db/models/studio.ts';
 import { loadCalendarDays } from '#api/modules/plan/calendar-days.queries.ts';
 import { plannedTasksOf } from '#api/modules/plan/planned-tasks.queries.ts';
 import { blockersOf } from '#api/modules/staff-orders/blockers.queries.ts';
+import { estimateNow } from '#api/modules/contents/content-changes.queries.ts';
 import { loadOrderCards } from '#api/modules/staff-orders/order-cards.queries.ts';
 import type { OrderCard } from '#api/modules/staff-orders/order-cards.queries.ts';
 import { loadFit } from '#api/modules/staff-orders/staff-order.queries.ts';
@@ -87,5 +88,6 @@ async function loadWaiting(): Promise<Calendar['waiting']> {
 /** What has to be settled first, else what needs care. */
 async function sharpestAdvice({ revision }: OrderCard): Promise<Advice | null> {
   const [blocker] = await blockersOf(revision);
-  return blocker ?? revision.estimate.advice.find(({ level }) => level === 'care') ?? null;
+  const { advice } = await estimateNow(revision);
+  return blocker ?? advice.find(({ level }) => level === 'care') ?? null;
 }

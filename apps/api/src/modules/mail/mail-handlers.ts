@@ -1,6 +1,7 @@
 import type { Deps } from '#api/modules/deps.ts';
 import type { EventHandlers } from '#api/outbox/events.ts';
 import { accountMailHandlers } from './account-mail.handlers.ts';
+import { contentsMailHandlers } from './contents-mail.handlers.ts';
 import { mailMailHandlers } from './mail-mail.handlers.ts';
 import { orderMailHandlers } from './order-mail.handlers.ts';
 
@@ -14,6 +15,7 @@ export type MailDeps = Pick<Deps, 'clock' | 'env'>;
 export function createMailHandlers(deps: MailDeps): EventHandlers {
   return {
     ...orderMailHandlers(deps),
+    ...contentsMailHandlers(deps),
     ...accountMailHandlers(deps),
     ...mailMailHandlers(deps),
   };

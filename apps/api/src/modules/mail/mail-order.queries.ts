@@ -36,8 +36,7 @@ export async function loadToldOrder(deps: Pick<Deps, 'env'>, orderId: string): P
     menuOfAllTimes(),
     Occasion.findByPk(order.occasionId, { rejectOnEmpty: true }),
   ]);
-  const { revision, contacts, agreedPrice } = record;
-  const { estimate } = revision;
+  const { revision, contacts, agreedPrice, estimate } = record;
   const { sessionSecret, publicUrl } = deps.env;
   const ordered = contacts.find(({ role }) => role === 'ordered');
   const told: MailOrder = {
@@ -45,7 +44,7 @@ export async function loadToldOrder(deps: Pick<Deps, 'env'>, orderId: string): P
     link: privateLink(publicUrl, order.code, privateKeyOf(sessionSecret, order)),
     name: ordered?.name ?? '',
     collector: contacts.find(({ role }) => role === 'collects')?.name ?? null,
-    pickup: pickupOf(order),
+    pickup: mailPickupOf(order),
     occasion: occasion.name,
     headCount: revision.headCount,
     summary: summariseRevision(revision, menu),
@@ -67,7 +66,12 @@ export async function loadToldOrder(deps: Pick<Deps, 'env'>, orderId: string): P
   };
 }
 
-function pickupOf({ pickupDate, windowStartMinute, windowMinutes }: Order): MailPickup | null {
+/** The pickup an order has, as a mail tells it; null while it has no day. */
+export function mailPickupOf({
+  pickupDate,
+  windowStartMinute,
+  windowMinutes,
+}: Order): MailPickup | null {
   if (pickupDate === null || windowStartMinute === null || windowMinutes === null) return null;
   return { date: pickupDate, start: windowStartMinute, minutes: windowMinutes };
 }

@@ -1,6 +1,7 @@
 import { Op } from 'sequelize';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
 import { isLive } from '#shared/orders/transitions.ts';
+import { ContentChange } from '#api/db/models/content-change.ts';
 import { Order } from '#api/db/models/order.ts';
 import { SentMail } from '#api/db/models/sent-mail.ts';
 import { Token } from '#api/db/models/token.ts';
@@ -34,6 +35,7 @@ const freshness: Readonly<Record<MailTemplate, Freshness>> = {
   'hold-ran-out': { while: asked, withoutPlace: true },
   'stop-lifted': { while: isLive },
   'private-link-renewed': { newestOnly: true },
+  'ingredient-changed': { while: isLive },
   message: {},
   ready: { while: (status) => status === 'ready' },
   'thank-you': {},
@@ -43,6 +45,7 @@ const freshness: Readonly<Record<MailTemplate, Freshness>> = {
   'withdrawn-notice': {},
   'hold-ran-out-notice': { while: asked, withoutPlace: true },
   'customer-message': {},
+  'ingredient-changed-notice': {},
   'staff-invitation': {},
   'password-reset': {},
   'sign-in-link-refused': {},
@@ -66,6 +69,9 @@ async function ofToken(tokenId: string, now: Date): Promise<string | null> {
 async function ofOrder(mail: SentMail, orderId: string, rule: Freshness): Promise<string | null> {
   const { status } = await Order.findByPk(orderId, { rejectOnEmpty: true });
   if (rule.while?.(status) === false) return `The order is ${status} now.`;
+  if (mail.template === 'ingredient-changed' && (await wasTakenBack(mail))) {
+    return 'It was put right.';
+  }
   if (rule.newestOnly === true && (await hasLater(mail, orderId))) return 'A later one says it.';
   if (rule.withoutPlace === true && (await hasPlace(orderId)))
     return 'The order has a place again.';
@@ -75,4 +81,10 @@ async function ofOrder(mail: SentMail, orderId: string, rule: Freshness): Promis
 async function hasLater({ id, template }: SentMail, orderId: string): Promise<boolean> {
   const where = { orderId, template, resendOfId: null, id: { [Op.gt]: id } };
   return (await SentMail.findOne({ where })) !== null;
+}
+
+/** Changed contents that were put right before anybody was told, by the key of the mail. */
+async function wasTakenBack({ uniqueKey }: SentMail): Promise<boolean> {
+  const change = await ContentChange.findByPk(uniqueKey.split(':')[1]);
+  return change !== null && change.endedAt !== null;
 }

@@ -1,4 +1,4 @@
-import type { Price } from '#shared/contracts/estimates.ts';
+import type { Estimate, Price } from '#shared/contracts/estimates.ts';
 import { price } from '#shared/contracts/estimates.ts';
 import type { OrderRevision } from '#api/db/models/order-revision.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
@@ -6,6 +6,7 @@ import { OrderEvent } from '#api/db/models/order-event.ts';
 import { Order } from '#api/db/models/order.ts';
 import { QuoteLine } from '#api/db/models/quote-line.ts';
 import { Quote } from '#api/db/models/quote.ts';
+import { estimateNow } from '#api/modules/contents/content-changes.queries.ts';
 import { notFound } from '#api/platform/app-error.ts';
 import { loadRevision } from './order-design.queries.ts';
 
@@ -30,6 +31,8 @@ export function resourceOf(order: Order) {
 export type OrderRecord = {
   readonly order: Order;
   readonly revision: OrderRevision;
+  /** What was offered, with what the order contains by today's labels. */
+  readonly estimate: Estimate;
   readonly contacts: readonly OrderContact[];
   readonly agreedPrice: Price | null;
 };
@@ -41,12 +44,13 @@ export async function loadCurrentRevision(order: Order): Promise<OrderRevision> 
 }
 
 export async function loadOrderRecord(order: Order): Promise<OrderRecord> {
-  const [revision, contacts, agreedPrice] = await Promise.all([
-    loadCurrentRevision(order),
+  const revision = await loadCurrentRevision(order);
+  const [estimate, contacts, agreedPrice] = await Promise.all([
+    estimateNow(revision),
     OrderContact.findAll({ where: { orderId: order.id } }),
     agreedPriceOf(order.id),
   ]);
-  return { order, revision, contacts, agreedPrice };
+  return { order, revision, estimate, contacts, agreedPrice };
 }
 
 /** The price of the quote that was agreed last, or null. */

@@ -3,6 +3,7 @@ import type { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import type { Deps } from '#api/modules/deps.ts';
+import { refuseOpenContents } from '#api/modules/contents/refuse-open-contents.queries.ts';
 import { changeOrderStatus } from '#api/modules/orders/change-order-status.command.ts';
 import type { Staff } from '#api/platform/actor.ts';
 import { invalidField } from '#api/platform/app-error.ts';
@@ -23,13 +24,14 @@ export async function collectOrder(
   const { order, actor, rowVersion, collectedBy, condition, photoId } = input;
   const now = clock.now();
   await inTransaction(async () => {
+    await refuseOpenContents(order);
     if (photoId !== null) await refuseForeignPhoto(photoId, order.id);
     await changeOrderStatus({
       order,
       rowVersion,
       action: 'collect',
       actor,
-      // Blockers were settled before it was confirmed; here only money counts.
+      // Blockers were settled before it was confirmed; here money counts, and what has changed.
       facts: await factsOf(order, []),
       values: { endedAt: now },
     });

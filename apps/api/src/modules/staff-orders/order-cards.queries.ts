@@ -9,6 +9,7 @@ import { Order } from '#api/db/models/order.ts';
 import { unreadOf } from '#api/modules/messages/messages.queries.ts';
 import { loadRevisions } from '#api/modules/orders/order-design.queries.ts';
 import { menuOfAllTimes, summariseRevision } from '#api/modules/orders/order-summary.queries.ts';
+import { estimatesNow } from '#api/modules/contents/content-changes.queries.ts';
 import { pickupOf } from '#api/modules/orders/pickup.queries.ts';
 import { activeHoldsOf } from '#api/modules/plan/plan.queries.ts';
 
@@ -55,6 +56,9 @@ export async function loadOrderRows(ids: readonly string[]): Promise<OrderRow[]>
     unreadOf(ids),
     LiftedStop.findAll({ where: { orderId: { [Op.in]: [...ids] } } }),
   ]);
+  const revisions = cards.map(({ revision }) => revision);
+  const now = await estimatesNow(revisions);
+  const estimates = new Map(revisions.map(({ id }, index) => [id, now[index]]));
   return cards.map(({ order, revision, customer, summary, allergies }) => {
     const hold = holds.get(order.id);
     return {
@@ -68,7 +72,7 @@ export async function loadOrderRows(ids: readonly string[]): Promise<OrderRow[]>
       currency: revision.currency,
       allergies,
       worst: worstOf(
-        revision.estimate.advice,
+        estimates.get(revision.id)?.advice ?? [],
         lifted.filter((it) => it.revisionId === revision.id),
       ),
       hold: hold === undefined ? null : { expiresAt: hold.expiresAt.toISOString() },

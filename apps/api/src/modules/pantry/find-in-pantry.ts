@@ -1,0 +1,33 @@
+import type { Formula, FormulaVersion, Ingredient } from '#shared/contracts/pantry.ts';
+import { invalidField, notFound } from '#api/platform/app-error.ts';
+import type { WholePantry } from './load-pantry.queries.ts';
+
+/** @throws `not-found` */
+export function formulaIn(pantry: WholePantry, id: string): Formula {
+  const formula = pantry.formulas.find((it) => it.id === id);
+  if (formula === undefined) throw notFound();
+  return formula;
+}
+
+/** @throws `not-found` */
+export function versionIn(pantry: WholePantry, id: string): FormulaVersion {
+  const version = pantry.versions.find((it) => it.id === id);
+  if (version === undefined) throw notFound();
+  return version;
+}
+
+/** @throws `not-found` */
+export function ingredientIn(pantry: WholePantry, id: string): Ingredient {
+  const ingredient = pantry.ingredients.find((it) => it.id === id);
+  if (ingredient === undefined) throw notFound();
+  return ingredient;
+}
+
+/** Two formulas of one name could not be told apart at the bench. @throws `invalid-input` */
+export function refuseTakenName({ formulas }: WholePantry, name: string, own?: string): void {
+  const plain = (words: string) => words.trim().toLowerCase();
+  const taken = formulas.some(
+    (it) => it.id !== own && it.archivedAt === null && plain(it.name) === plain(name),
+  );
+  if (taken) throw invalidField(['name'], 'Another formula has this name already.');
+}
