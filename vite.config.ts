@@ -63,6 +63,21 @@ function precompress(): Plugin {
   };
 }
 
+/** The fonts of printed cards lie beside the built server, as they lie beside their source. */
+function printedFonts(): Plugin {
+  const folder = path.join(apiSource, 'modules/cards/pdf/fonts');
+  return {
+    name: 'tierwell:printed-fonts',
+    async buildStart() {
+      const names = (await readdir(folder)).filter((name) => name.endsWith('.ttf'));
+      for (const name of names) {
+        const source = await readFile(path.join(folder, name));
+        this.emitFile({ type: 'asset', fileName: `fonts/${name}`, source });
+      }
+    },
+  };
+}
+
 type Modules = { getModuleInfo(id: string): { importedIds: readonly string[] } | null };
 
 /** Everything these sources load at once, without what they load later. */
@@ -113,7 +128,7 @@ export default defineConfig(({ isSsrBuild }) => ({
   root,
   publicDir: 'apps/web/public',
   appType: 'spa',
-  plugins: isSsrBuild ? [] : [react(), tailwindcss(), precompress()],
+  plugins: isSsrBuild ? [printedFonts()] : [react(), tailwindcss(), precompress()],
   server: {
     host: '127.0.0.1',
     port: webPort,
