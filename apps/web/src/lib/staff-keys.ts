@@ -7,6 +7,8 @@ export const staffKeys = {
   calendar: ['staff', 'calendar'],
   mail: ['staff', 'mail'],
   people: ['staff', 'people'],
+  prices: ['staff', 'prices'],
+  pantry: ['staff', 'pantry'],
 } as const;
 
 /** After anything done to an order: its page, the list and the calendar are asked for again. */

@@ -12,7 +12,7 @@ import { Section } from '#web/components/ui/section.tsx';
 import { paths } from '#web/config/paths.ts';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
 import { OpenDays, PickupHours, useOpenDays } from './open-days.tsx';
-import { type SampleCake, sampleCakes } from './sample-cakes.ts';
+import { type SampleCake, sampleCakes } from '#web/components/sample-cakes/sample-cakes.ts';
 import { figuresOf } from './price-of-sample.ts';
 import { StepRuler } from './step-ruler.tsx';
 

@@ -80,7 +80,7 @@ export function sampleCakes(menu: Menu): readonly SampleCake[] {
       susceptible: false,
     },
     cake: { kind: 'tiered', tiers, sheet: null, coating, cuttingCakes: [] },
-    setting: { place: 'indoors', warmestC: 20, minutesOut: 60, driveMinutes: 20 },
+    setting: { place: 'indoors', warmestC: 20, minutesOut: 60, driveMinutes: 20, servedAt: null },
     look: {
       palette: [],
       words: words === '' ? [] : [{ tier: 0, text: words }],
