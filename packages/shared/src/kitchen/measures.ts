@@ -84,13 +84,23 @@ export function formatWeight(grams: number, lead: LengthLead): string {
   return lead === 'in' ? `${customary} / ${metric}` : `${metric} / ${customary}`;
 }
 
-const vulgar: Readonly<Record<string, number>> = {
+/** Fractions that are one letter, by what they are worth. */
+export const vulgarFractions: Readonly<Record<string, number>> = {
   '¼': 0.25,
   '½': 0.5,
   '¾': 0.75,
   '⅓': 1 / 3,
   '⅔': 2 / 3,
   '⅛': 0.125,
+  '⅜': 0.375,
+  '⅝': 0.625,
+  '⅞': 0.875,
+  '⅕': 0.2,
+  '⅖': 0.4,
+  '⅗': 0.6,
+  '⅘': 0.8,
+  '⅙': 1 / 6,
+  '⅚': 5 / 6,
 };
 
 type Typed = { readonly value: number; readonly unit: string };
@@ -109,7 +119,8 @@ function readFigure(text: string): Typed | null {
   else if (plain === undefined && glyph === undefined) return null;
   else
     value =
-      Number((plain ?? '0').replace(',', '.')) + (glyph === undefined ? 0 : (vulgar[glyph] ?? 0));
+      Number((plain ?? '0').replace(',', '.')) +
+      (glyph === undefined ? 0 : (vulgarFractions[glyph] ?? 0));
   if (!Number.isFinite(value)) return null;
   return { value: sign === '-' || sign === '−' ? -value : value, unit: unit.trim().toLowerCase() };
 }

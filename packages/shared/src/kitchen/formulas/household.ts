@@ -1,16 +1,15 @@
 import type { HouseholdMeasure, Ingredient, IngredientMeasure } from '#shared/contracts/pantry.ts';
-import { gPerOunce, gPerPound, mlPerUsCup } from '#shared/kitchen/measures.ts';
+import { gPerOunce, mlPerUsCup } from '#shared/kitchen/measures.ts';
 
-/** Exact by definition: 16 tablespoons or 48 teaspoons to the US cup, 8 fluid ounces. */
+/** Exact by definition: 16 tablespoons or 48 teaspoons of volume to the US cup. */
 export const mlPerMeasure = {
   cup: mlPerUsCup,
   tablespoon: mlPerUsCup / 16,
   teaspoon: mlPerUsCup / 48,
 } as const;
-export type VolumeMeasure = keyof typeof mlPerMeasure;
+type VolumeMeasure = keyof typeof mlPerMeasure;
 
-export const isVolume = (measure: HouseholdMeasure): measure is VolumeMeasure =>
-  measure in mlPerMeasure;
+export const isVolume = (measure: string): measure is VolumeMeasure => measure in mlPerMeasure;
 
 /** What one measure weighs; `reckoned` where it comes from a density and not from a scale. */
 export type MeasureWeight = { readonly grams: number; readonly reckoned: boolean };
@@ -55,21 +54,188 @@ export function gramsPerMl(ingredient: Ingredient): number | null {
   return null;
 }
 
-export type HouseholdUnits = 'us' | 'metric';
+/** Fractions that household measures are marked with, smallest first. */
+const marks: readonly (readonly [value: number, text: string])[] = [
+  [0, ''],
+  [1 / 4, '¼'],
+  [1 / 3, '⅓'],
+  [1 / 2, '½'],
+  [2 / 3, '⅔'],
+  [3 / 4, '¾'],
+  [1, ''],
+];
 
-/** An ingredient's grams in household measures beside the grams; null where none is sensible. */
+type Marked = { readonly value: number; readonly text: string };
+
+/** Spoons are sold by halves and quarters, and half a stick is cut by eye. */
+const finestMark: Partial<Record<HouseholdMeasure, number>> = {
+  teaspoon: 1 / 4,
+  tablespoon: 1 / 2,
+  stick: 1 / 2,
+};
+
+/** The nearest of whole, ¼, ⅓, ½, ⅔ and ¾, or of multiples of `finest`; never nothing. */
+function nearestMark(count: number, finest: number | null = null): Marked {
+  const whole = Math.floor(count);
+  const usable = marks.filter(([value]) => finest === null || Number.isInteger(value / finest));
+  let best: readonly [number, string] = [0, ''];
+  for (const mark of usable) {
+    if (whole + mark[0] === 0) continue;
+    const closer = Math.abs(whole + mark[0] - count) < Math.abs(whole + best[0] - count);
+    if (whole + best[0] === 0 || closer) best = mark;
+  }
+  const value = whole + best[0];
+  const shown = best[0] === 1 ? whole + 1 : whole;
+  return { value, text: `${shown === 0 ? '' : shown}${best[1]}` };
+}
+
+const words: Readonly<Record<HouseholdMeasure, readonly [one: string, more: string]>> = {
+  cup: ['cup', 'cups'],
+  tablespoon: ['tbsp', 'tbsp'],
+  teaspoon: ['tsp', 'tsp'],
+  stick: ['stick', 'sticks'],
+  can: ['can', 'cans'],
+  piece: ['piece', 'pieces'],
+  pinch: ['pinch', 'pinches'],
+};
+const eggWords = {
+  whole: ['egg', 'eggs'],
+  white: ['white', 'whites'],
+  yolk: ['yolk', 'yolks'],
+} as const;
+
+function say(ingredient: Ingredient, measure: HouseholdMeasure, { value, text }: Marked): string {
+  const [one, more] =
+    measure === 'piece' && ingredient.eggPart !== null
+      ? eggWords[ingredient.eggPart]
+      : words[measure];
+  return `${text} ${value > 1 ? more : one}`;
+}
+
+/** How many of a measure grams are, in its marks: `1¼ cups`; null where its weight is not known. */
+export function inMeasure(
+  ingredient: Ingredient,
+  measure: HouseholdMeasure,
+  grams: number,
+  qualifier: string | null = null,
+): Household | null {
+  const weight = weightOfMeasure(ingredient, measure, qualifier);
+  if (weight === null || !(grams > 0)) return null;
+  const count = grams / weight.grams;
+  const counted = measure === 'piece' || measure === 'can' || measure === 'pinch';
+  const rounded = Math.max(1, Math.round(count));
+  const mark = counted
+    ? { value: rounded, text: String(rounded) }
+    : nearestMark(count, finestMark[measure] ?? null);
+  return {
+    text: say(ingredient, measure, mark),
+    count: mark.value,
+    grams: mark.value * weight.grams,
+    offPpm: Math.round((mark.value / count - 1) * 1e6),
+    reckoned: weight.reckoned,
+  };
+}
+
+export type Household = {
+  readonly text: string;
+  readonly count: number;
+  /** What the words weigh; differs from the grams asked for by `offPpm`. */
+  readonly grams: number;
+  readonly offPpm: number;
+  readonly reckoned: boolean;
+};
+
+/**
+ * What somebody still counts out: more, and the scale is quicker. Household words further from the
+ * grams than `mostOffPpm` are not said, further than `aboutPpm` with "about" (all memory).
+ */
+const sense = {
+  most: { piece: 200, stick: 12, can: 24, cup: 40, tablespoon: 8, teaspoon: 12, pinch: 2 },
+  aboutPpm: 20_000,
+  mostOffPpm: 60_000,
+} as const;
+
+const largestFirst = ['piece', 'stick', 'can', 'cup', 'tablespoon', 'teaspoon', 'pinch'] as const;
+
+/** Cups and spoons together, each by its own weight: `1 cup + 2 tbsp`. */
+function cupAndSpoons(ingredient: Ingredient, grams: number): Household | null {
+  const cup = weightOfMeasure(ingredient, 'cup');
+  const spoon = weightOfMeasure(ingredient, 'tablespoon');
+  if (cup === null || spoon === null || grams < cup.grams / 4) return null;
+  const quarters = Math.floor((grams / cup.grams) * 4 + 1e-9) / 4;
+  const spoons = Math.round((grams - quarters * cup.grams) / spoon.grams);
+  if (spoons < 1 || spoons > 3) return null;
+  const cups = nearestMark(quarters);
+  const spooned = { value: spoons, text: String(spoons) };
+  const total = quarters * cup.grams + spoons * spoon.grams;
+  return {
+    text: `${say(ingredient, 'cup', cups)} + ${say(ingredient, 'tablespoon', spooned)}`,
+    count: quarters,
+    grams: total,
+    offPpm: Math.round((total / grams - 1) * 1e6),
+    reckoned: cup.reckoned || spoon.reckoned,
+  };
+}
+
+/** The largest measure that comes close enough, else the one that comes closest. */
+export function householdOf(ingredient: Ingredient, grams: number): Household | null {
+  if (!(grams > 0) || !Number.isFinite(grams)) return null;
+  const options = largestFirst.flatMap((measure) => {
+    const found = inMeasure(ingredient, measure, grams);
+    return found === null || found.count > sense.most[measure] ? [] : [found];
+  });
+  const both = cupAndSpoons(ingredient, grams);
+  const all = both === null || both.count > sense.most.cup ? options : [...options, both];
+  const close = all.find((it) => Math.abs(it.offPpm) <= sense.aboutPpm);
+  if (close !== undefined) return close;
+  const [nearest] = all.toSorted((a, b) => Math.abs(a.offPpm) - Math.abs(b.offPpm));
+  if (nearest === undefined || Math.abs(nearest.offPpm) > sense.mostOffPpm) return null;
+  return nearest;
+}
+
+export type HouseholdUnits = 'us' | 'metric';
+const pourable: readonly string[] = ['dairy', 'liquid', 'fat', 'flavour'];
+
+/**
+ * An ingredient's grams in measures beside the grams: US household measures by its own weights
+ * (`2½ cups`, `5 sticks`, `12 yolks`), or millilitres of what is poured. `about` where the words
+ * are more than 2 % off or reckoned by a density; null where nothing sensible can be said.
+ */
 export function formatHousehold(
   ingredient: Ingredient,
   grams: number,
-  _units: HouseholdUnits = 'us',
+  units: HouseholdUnits = 'us',
 ): string | null {
-  const cup = weightOfMeasure(ingredient, 'cup');
-  return cup === null || !(grams > 0) ? null : `${(grams / cup.grams).toFixed(2)} cups`;
+  if (units === 'metric') {
+    const perMl = pourable.includes(ingredient.family) ? gramsPerMl(ingredient) : null;
+    const pieces = inMeasure(ingredient, 'piece', grams);
+    if (pieces !== null && Math.abs(pieces.offPpm) <= sense.mostOffPpm) return worded(pieces);
+    const ml = perMl === null || !(grams > 0) ? 0 : Math.round(grams / perMl);
+    return ml === 0 ? null : `about ${ml} mL`;
+  }
+  const found = householdOf(ingredient, grams);
+  return found === null ? null : worded(found);
 }
 
-/** `1 lb 4¼ oz`, to the quarter ounce. */
+function worded({ text, offPpm, reckoned }: Household): string {
+  return reckoned || Math.abs(offPpm) > sense.aboutPpm ? `about ${text}` : text;
+}
+
+/** `1 lb 4¼ oz`, to the quarter ounce; grams not negative. */
 export function formatPounds(grams: number): string {
   const quarters = Math.round((grams / gPerOunce) * 4);
-  const pounds = Math.floor(quarters / (gPerPound / gPerOunce) / 4);
-  return `${pounds} lb ${quarters / 4 - pounds * 16} oz`;
+  const pounds = Math.floor(quarters / 64);
+  const ounces = (quarters - pounds * 64) / 4;
+  const rest = ounces === 0 ? '' : `${nearestMark(ounces, 1 / 4).text} oz`;
+  if (pounds === 0) return rest === '' ? '0 oz' : rest;
+  return rest === '' ? `${pounds} lb` : `${pounds} lb ${rest}`;
 }
+
+/** `850 g`, `0.4 g`, `1.25 kg`: as the bench reads a scale. Grams not negative. */
+export function formatGrams(grams: number): string {
+  if (grams >= 10_000) return `${trim(grams / 1000, 1)} kg`;
+  if (grams >= 1000) return `${trim(grams / 1000, 3)} kg`;
+  return `${trim(grams, grams < 1 ? 2 : grams < 20 ? 1 : 0)} g`;
+}
+
+const trim = (value: number, digits: number) => String(Number(value.toFixed(digits)));

@@ -15,20 +15,22 @@ export type ExactUnit =
   | 'gallon';
 export type AmountUnit = HouseholdMeasure | ExactUnit;
 
-/** One amount of a line as it was typed: `1 1/2 cups`, `8-10 oz`, `1 14-oz can`. */
-export type ReadAmount = {
-  readonly typed: string;
+/** One measure of an amount: `1 1/2 cups`, `8-10 oz`, `1 14-oz can`. */
+export type AmountPart = {
   readonly unit: AmountUnit;
   /** Equal unless a range was typed. */
   readonly least: number;
   readonly most: number;
   /** What is taken: the middle of a range. */
   readonly count: number;
-  /** `sifted`, `packed`; null where nothing was said. */
+  /** `sifted`, `packed`; of eggs their size; null where nothing was said. */
   readonly qualifier: string | null;
   /** Grams of one, where the line says it itself (a 14-oz can). */
   readonly statedG: number | null;
 };
+
+/** One amount of a line as it was typed; several parts where they add up (`1 cup plus 2 tbsp`). */
+export type ReadAmount = { readonly typed: string; readonly parts: readonly AmountPart[] };
 
 /** An amount with its weight, once it is known what it is an amount of. */
 export type WeighedAmount = ReadAmount & {
@@ -38,7 +40,7 @@ export type WeighedAmount = ReadAmount & {
   readonly reckoned: boolean;
 };
 
-/** Two amounts of one line that disagree, or agree only within what a kitchen shrugs at. */
+/** Two amounts of one line that disagree by more than their kind allows. */
 export type ProofFinding = {
   /** What was typed, the measure or pack first, the weight second. */
   readonly measure: string;
