@@ -112,6 +112,7 @@ function StaffPlaces({ user }: { readonly user: User }) {
       <nav aria-label="Places" className="-mx-2 flex sm:mx-0 sm:gap-x-3">
         <Place to={paths.staffOrders}>Orders</Place>
         <Place to={paths.staffCalendar}>Calendar</Place>
+        {user.role !== 'counter' && <Place to={paths.staffPantry}>Pantry</Place>}
         {user.role === 'owner' && <Place to={paths.staffPeople}>Studio</Place>}
       </nav>
       <Link

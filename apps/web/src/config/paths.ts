@@ -44,6 +44,18 @@ export const paths = {
     `/staff/calendar?view=${view}&date=${date}`,
   staffPeople: '/staff/studio',
   staffPrices: '/staff/studio/prices',
+  staffPantry: '/staff/pantry',
+  staffFormulas: '/staff/pantry/formulas',
+  staffFormula: (id: string) => `/staff/pantry/formulas/${encodeURIComponent(id)}`,
+  staffFormulaEdit: (id: string) => `/staff/pantry/formulas/${encodeURIComponent(id)}/edit`,
+  staffFormulaNew: '/staff/pantry/formulas/new',
+  staffFormulaCopy: (versionId: string) =>
+    `/staff/pantry/formulas/new?from=${encodeURIComponent(versionId)}`,
+  staffIngredients: '/staff/pantry/ingredients',
+  staffIngredient: (id: string) => `/staff/pantry/ingredients/${encodeURIComponent(id)}`,
+  staffIngredientNew: '/staff/pantry/ingredients/new',
+  staffEggs: '/staff/pantry/eggs',
+  staffShopping: '/staff/pantry/shopping',
   staffMe: '/staff/me',
   staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,
 } as const;

@@ -1,0 +1,107 @@
+import * as z from 'zod/mini';
+import {
+  type FormulaDraft,
+  type FormulaVersion,
+  createFormula,
+  formulaDraft,
+  formulaStep,
+} from '#shared/contracts/pantry.ts';
+import { type VersionChange, compareVersions } from '#shared/kitchen/formulas/compare-versions.ts';
+import {
+  type EvaluatedFormula,
+  evaluateFormula,
+} from '#shared/kitchen/formulas/evaluate-formula.ts';
+import type { TemperatureLead } from '#shared/kitchen/measures.ts';
+import type { FieldProblem } from '#web/lib/forms.ts';
+import { checkDraft } from '../forms/check-draft.ts';
+import { percentBase } from '../formulas/percent-choice.ts';
+import type { Shelf } from '../shelf.ts';
+import { type EditorForm, asVersion } from './editor-form.ts';
+import { onTheForm, rowName, typedFormula } from './typed-formula.ts';
+
+type Ground = {
+  readonly shelf: Shelf;
+  /** Null for a new formula. */
+  readonly formulaId: string | null;
+  /** What the differences are told against. */
+  readonly against: FormulaVersion | null;
+  readonly percentOf: string | null;
+  readonly lead: TemperatureLead;
+};
+
+/** Everything that follows from what is typed. */
+export type Inspected = {
+  /** Of the lines that could be read. */
+  readonly seen: EvaluatedFormula;
+  /** Each row's percent of what goes in, by the row's key. */
+  readonly shares: ReadonlyMap<number, number>;
+  /** Each row's percent of what was chosen to count as 100 %. */
+  readonly percents: ReadonlyMap<number, number>;
+  /** Rows whose weight is not known yet. */
+  readonly unread: number;
+  /** All that keeps it from being saved. */
+  readonly problems: readonly FieldProblem[];
+  /** What would be saved; null while there are problems. */
+  readonly draft: FormulaDraft | null;
+  readonly changes: readonly VersionChange[] | null;
+};
+
+/** Reads, checks, evaluates and compares what is typed; quick enough for every keystroke. */
+export function inspectForm(form: EditorForm, ground: Ground): Inspected {
+  const { shelf, formulaId, against, percentOf, lead } = ground;
+  const typed = typedFormula(form, shelf.index, lead);
+  const checked = checkDraft(formulaDraft, { ...typed.rest, lines: typed.lines });
+  const name = checkDraft(createFormula.shape.name, form.fields.name);
+  const steps = checkDraft(z.array(formulaStep), typed.rest['steps']);
+  const yieldPpm = Number(typed.rest['yieldPpm']);
+  const densityGPerMl = Number(typed.rest['densityGPerMl']);
+  const seen = evaluateFormula(
+    {
+      draft: {
+        lines: [...typed.lines],
+        steps: steps.ok ? steps.value : [],
+        yieldPpm: yieldPpm > 0 && yieldPpm <= 1_000_000 ? yieldPpm : 1_000_000,
+        densityGPerMl,
+      },
+      formulaId,
+      name: form.fields.name,
+      percentOf: percentOf === null ? null : percentBase(percentOf),
+    },
+    shelf.index,
+  );
+  const faults = seen.problems.map(({ line, message }) => {
+    const key = line === null ? undefined : typed.keys[line];
+    return { name: key === undefined ? 'lines' : rowName(key), message };
+  });
+  const problems = once([
+    ...(name.ok ? [] : [{ name: 'name', message: name.problems[0]?.message ?? '' }]),
+    ...typed.unread,
+    ...faults,
+    ...(checked.ok ? [] : onTheForm(checked.problems, typed.keys)),
+  ]);
+  const draft = problems.length === 0 && checked.ok ? checked.value : null;
+  return {
+    seen,
+    shares: byKey(
+      typed.keys,
+      seen.totals.shares.map((it) => it * 100),
+    ),
+    percents: byKey(typed.keys, seen.percents?.lines ?? []),
+    unread: typed.unread.length,
+    problems,
+    draft,
+    changes:
+      against === null || draft === null
+        ? null
+        : compareVersions(against, asVersion(draft, against.formulaId), shelf.index),
+  };
+}
+
+function byKey(keys: readonly number[], values: readonly number[]): ReadonlyMap<number, number> {
+  return new Map(keys.flatMap((key, at) => [[key, values[at] ?? 0] as const]));
+}
+
+function once(problems: readonly FieldProblem[]): readonly FieldProblem[] {
+  const seen = new Set<string>();
+  return problems.filter(({ name }) => !seen.has(name) && seen.add(name));
+}
