@@ -13,6 +13,8 @@ import { googleRoutes } from '#api/modules/sessions/google.routes.ts';
 import { linksRoutes } from '#api/modules/sessions/links.routes.ts';
 import { orderAccessRoutes } from '#api/modules/sessions/order-access.routes.ts';
 import { secondFactorRoutes } from '#api/modules/sessions/second-factor.routes.ts';
+import { pantryRoutes } from '#api/modules/pantry/pantry.routes.ts';
+import { staffContentsRoutes } from '#api/modules/staff-orders/staff-contents.routes.ts';
 import { staffMailRoutes } from '#api/modules/staff-orders/staff-mail.routes.ts';
 import { staffMovesRoutes } from '#api/modules/staff-orders/staff-moves.routes.ts';
 import { staffOrdersRoutes } from '#api/modules/staff-orders/staff-orders.routes.ts';
@@ -30,6 +32,8 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     staffOrdersRoutes(deps),
     staffMovesRoutes(deps),
     staffMailRoutes(deps),
+    staffContentsRoutes(deps),
+    pantryRoutes(deps),
     calendarRoutes(deps),
     datesRoutes(deps),
     sessionsRoutes(deps),

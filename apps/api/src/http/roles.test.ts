@@ -17,6 +17,7 @@ import { hashKey, newId } from '#api/platform/ids.ts';
 import { createLogger } from '#api/platform/logger.ts';
 import { privateKeyOf } from '#api/platform/private-link.ts';
 import { makeOrder } from '#api/testing/factories.ts';
+import { formulaDraftOf, ingredientDraftOf } from '#api/testing/pantry-drafts.ts';
 import { orderForm } from '#api/testing/order-form.ts';
 import {
   addUser,
@@ -113,6 +114,8 @@ const day = '2027-06-12';
 const form = orderForm(day);
 const { date: _date, windowStart: _windowStart, ...guests } = form.day;
 const { cake, setting, look } = form;
+const jam = formulaDraftOf({ raspberries: 1000, 'granulated-sugar': 700 });
+const plums = ingredientDraftOf({ name: 'Plums', labelName: 'plums', family: 'fruit' });
 const design = { guests, cake, setting, look, extras: [] };
 
 /** A form with a file that is no picture: refused once it has been looked at. */
@@ -247,6 +250,15 @@ const table: Readonly<Record<string, Line>> = {
     [401, 401, 403, 403, 403, 403, 404],
     onOrder('lift-stop', { about: 'egg', reason: 'We talked.' }),
   ),
+  // Nothing has changed in this order, which the staff alone are told.
+  'acknowledge-contents': line(
+    [401, 401, 403, 403, 403, 404, 404],
+    onOrder('contents/none/acknowledge', { note: '' }),
+  ),
+  'tell-contents': line(
+    [401, 401, 403, 403, 404, 404, 404],
+    onOrder('contents/none/told', { how: 'By phone.' }),
+  ),
   'renew-link': line(staff, onOrder('link')),
   'read-messages': line(staff, ({ order }) =>
     post(`/api/staff/orders/${order.number}/messages/read`),
@@ -290,6 +302,29 @@ const table: Readonly<Record<string, Line>> = {
       eggAdvisory: 'Raw egg can make people ill.',
     }),
   ),
+
+  // Formulas and ingredients: refused for what they ask, once it is known who asks.
+  'load-pantry': line(bakers, '/api/pantry'),
+  'create-formula': line(bakers, () =>
+    post('/api/pantry/formulas', { kind: 'filling', name: `Jam ${newId()}`, draft: jam }),
+  ),
+  'save-formula': line(bakers, () =>
+    post('/api/pantry/formulas/raspberry-jam/versions', {
+      basedOn: 'another',
+      name: 'Raspberry jam',
+      draft: jam,
+    }),
+  ),
+  'archive-formula': line(bakers, () => post('/api/pantry/formulas/raspberry-jam/archive')),
+  'restore-formula': line(bakers, () => post('/api/pantry/formulas/raspberry-jam/restore')),
+  'create-ingredient': line(bakers, () =>
+    post('/api/pantry/ingredients', { basedOn: null, draft: plums }),
+  ),
+  'save-ingredient': line(bakers, () =>
+    put('/api/pantry/ingredients/raspberries', { basedOn: null, draft: plums }),
+  ),
+  'archive-ingredient': line(bakers, () => post('/api/pantry/ingredients/raspberries/archive')),
+  'restore-ingredient': line(bakers, () => post('/api/pantry/ingredients/raspberries/restore')),
 
   // What things cost.
   'see-prices': line(owners, '/api/staff/prices'),

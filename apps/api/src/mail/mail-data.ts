@@ -45,6 +45,17 @@ export type MailPrice = {
   readonly totalMinor: number;
 };
 
+/** An order that contains something else now, as the studio is told of it. */
+type ChangedOrder = {
+  readonly number: number;
+  /** The staff's page of the order. */
+  readonly link: string;
+  readonly pickup: MailPickup | null;
+  readonly changes: readonly string[];
+  /** It is against something guests told; what that is stands on the order's page. */
+  readonly clashes: boolean;
+};
+
 type Hold = { readonly expiresAt: Date; readonly needsLink: boolean };
 type OfOrder = { readonly order: MailOrder };
 type Written = { readonly by: string; readonly body: string };
@@ -76,8 +87,10 @@ export type MailData = {
     readonly calendar: boolean;
   };
   'hold-ran-out': OfOrder;
-  'stop-lifted': OfOrder & { readonly reason: string };
+  'stop-lifted': OfOrder;
   'private-link-renewed': OfOrder;
+  /** What is in the cake now, in sentences about the cake alone. */
+  'ingredient-changed': OfOrder & { readonly changes: readonly string[] };
   message: OfOrder & Written;
   ready: OfOrder & { readonly openings: readonly string[] };
   'thank-you': OfOrder;
@@ -95,6 +108,12 @@ export type MailData = {
   'withdrawn-notice': OfOrder & { readonly reason: string };
   'hold-ran-out-notice': OfOrder;
   'customer-message': OfOrder & Written;
+  'ingredient-changed-notice': {
+    /** What was changed: "The label of Dark chocolate buttons". */
+    readonly cause: string;
+    readonly by: string;
+    readonly orders: readonly ChangedOrder[];
+  };
   'staff-invitation': OfLink & {
     readonly name: string;
     readonly role: StaffRole;

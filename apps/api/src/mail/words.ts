@@ -50,15 +50,21 @@ export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
   },
   'stop-lifted': {
     subject: 'Order No. {number}: please read this about your cake',
-    lead: 'Hello {name},\n\nOur program had stopped your order over something at your table. The owner has looked at it and takes it on, for the reason below.',
+    lead: 'Hello {name},\n\nSomething about your order had to be settled first. The owner has looked at it and takes it on, for a reason that is yours to read.',
     closing:
-      'Please read it with care. What is in the cake has not changed. If this is not what you talked about with us, answer this e-mail or ring us before anything is made.',
+      'Please read it with care. What is in the cake has not changed. If it is not what you talked about with us, do not accept it: answer this e-mail or ring us.',
   },
   'private-link-renewed': {
     subject: 'Order No. {number}: a new link to your order',
     lead: 'Hello {name},\n\nHere is a new private link to your order. The links in earlier e-mails do not open it any more.',
     closing:
       'Whoever has the link can read your order and write to us about it, so keep it to yourself.',
+  },
+  'ingredient-changed': {
+    subject: 'Order No. {number}: something in your cake has changed',
+    lead: 'Hello {name},\n\nSomething we make your cake with has changed, and with it what is in your cake. Please read this before {day}, and tell whoever it matters to.',
+    closing:
+      'If this does not suit somebody at your table, write to us from your order’s page, answer this e-mail or ring us: we look for a way with you. Ask a doctor what is right for somebody with an allergy.',
   },
   message: {
     subject: 'Order No. {number}: a message from {studio}',
@@ -104,6 +110,11 @@ export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
     subject: 'Order No. {number}: {name} has written',
     lead: '{name} has written about the order for {day}:',
     closing: 'Answer on the order’s page, so that everybody here can read it there.',
+  },
+  'ingredient-changed-notice': {
+    subject: 'What is in {orders} has changed',
+    lead: '{by} has changed something in the pantry, and with it what open orders contain. Their customers are told by e-mail in a few minutes, unless it is put right before. No cake among them is marked ready or handed over until its customer knows.',
+    closing: 'Open each order and say that you have seen to it.',
   },
   'staff-invitation': {
     subject: 'Come and work with {studio}',

@@ -1,5 +1,4 @@
-import type { Advice } from '#shared/contracts/estimates.ts';
-import type { ConfirmationLook, StaffOrder } from '#shared/contracts/staff.ts';
+import type { Blocker, ConfirmationLook, StaffOrder } from '#shared/contracts/staff.ts';
 import { evaluateDesign } from '#shared/kitchen/evaluate-design.ts';
 import { designFixture } from '#shared/kitchen/testing/design-fixture.ts';
 import { menuFixture } from '#shared/kitchen/testing/menu-fixture.ts';
@@ -15,10 +14,13 @@ export const nothingAllowed: StaffOrder['can'] = {
   uncollected: false,
   write: false,
   answerAllergy: false,
+  recordTalk: false,
   liftStop: false,
   renewLink: false,
   addPhotos: false,
   sendMailAgain: false,
+  acknowledgeContents: false,
+  tellContents: false,
 };
 
 const pickup = {
@@ -66,20 +68,24 @@ export function staffOrderFixture(changes: Partial<StaffOrder> = {}): StaffOrder
     showPhotos: false,
     handover: null,
     blockers: [],
+    lifted: [],
     can: nothingAllowed,
     ...changes,
   };
 }
 
-export const eggStop: Advice = {
+export const eggStop: Blocker = {
   code: 'allergen',
   level: 'stop',
   step: 'cake',
-  about: 'egg',
+  about: 'allergen:egg',
   sentence: 'Egg is in the sponge and in the buttercream; one guest is allergic to it.',
+  plain: 'Contains egg: sponge and buttercream. Declared: allergy, 1 guest.',
   instead: 'Talk with them first.',
   ways: [],
   talk: true,
+  waitsFor: 'reason',
+  talked: null,
 };
 
 /** The last look at that order. */

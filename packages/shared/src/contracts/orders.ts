@@ -11,6 +11,7 @@ import {
   requiredLine,
   rowVersion,
 } from './common.ts';
+import { contentChangeView } from './contents.ts';
 import { cake, design, extra, guests, look, setting } from './design.ts';
 import { estimate, price } from './estimates.ts';
 import { photo, photoClaim } from './photos.ts';
@@ -182,6 +183,8 @@ export const orderView = z.object({
   agreedPrice: z.nullable(price),
   orderedBy: z.object({ name: z.string(), email: z.string(), phone: z.string() }),
   collector: z.nullable(z.object({ name: z.string(), phone: z.string() })),
+  /** What is in the cake now and was not when it was ordered, oldest first. */
+  contentChanges: z._default(z.array(contentChangeView), []),
   photos: z.array(photo),
   messages: z.array(message),
   lifted: z.array(liftedStop),

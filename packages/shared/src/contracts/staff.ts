@@ -10,6 +10,7 @@ import {
   requiredLine,
   rowVersion,
 } from './common.ts';
+import { staffContentChange } from './contents.ts';
 import { design } from './design.ts';
 import { advice, estimate, price } from './estimates.ts';
 import { liftedStop, message, pickup } from './orders.ts';
@@ -155,6 +156,8 @@ export const staffOrder = z.object({
   messages: z.array(message),
   /** How many of the customer's messages nobody has opened. */
   unread: z.int(),
+  /** What is in the cake now and was not when it was ordered, oldest first. */
+  contentChanges: z._default(z.array(staffContentChange), []),
   photos: z.array(photo),
   events: z.array(orderEvent),
   mail: z.array(sentMailRow),
@@ -186,6 +189,8 @@ export const staffOrder = z.object({
     renewLink: z.boolean(),
     addPhotos: z.boolean(),
     sendMailAgain: z.boolean(),
+    acknowledgeContents: z._default(z.boolean(), false),
+    tellContents: z._default(z.boolean(), false),
   }),
 });
 export type StaffOrder = z.infer<typeof staffOrder>;

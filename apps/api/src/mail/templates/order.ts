@@ -27,6 +27,7 @@ type OrderTemplates = Pick<
   | 'hold-ran-out'
   | 'stop-lifted'
   | 'private-link-renewed'
+  | 'ingredient-changed'
   | 'message'
   | 'ready'
   | 'thank-you'
@@ -123,14 +124,18 @@ export const orderTemplates: OrderTemplates = {
       blocks: [facts(fact('Cake', order.summary)), openOrder(order)],
     }),
 
-  'stop-lifted': ({ order, reason }, house) =>
+  'stop-lifted': ({ order }, house) =>
     orderBody(order, house, {
-      title: 'About what is in your cake',
-      preview: 'Please read this before your cake is made',
+      title: 'Please read this about your cake',
+      preview: 'We confirm your order once you have read it',
       blocks: [
-        { kind: 'quote', by: house.studio.name, text: reason },
-        ...contentsOf(order),
-        openOrder(order),
+        facts(fact('Cake', order.summary), fact('For', orderDay(order, house))),
+        notice(
+          'now',
+          'It waits for you',
+          'What it is about, and why we take it, is on your order’s page only. Nothing is confirmed before you have read and accepted it there.',
+        ),
+        openOrder(order, 'Read it'),
       ],
     }),
 
@@ -139,6 +144,17 @@ export const orderTemplates: OrderTemplates = {
       title: 'A new link to your order',
       preview: `Your order for ${orderDay(order, house)}`,
       blocks: [openOrder(order)],
+    }),
+
+  'ingredient-changed': ({ order, changes }, house) =>
+    orderBody(order, house, {
+      title: 'Something in your cake has changed',
+      preview: oneLine(changes[0] ?? ''),
+      blocks: [
+        ...changes.map((each) => notice('now', 'New', oneLine(each))),
+        ...contentsOf(order),
+        openOrder(order),
+      ],
     }),
 
   message: ({ order, by, body }, house) =>

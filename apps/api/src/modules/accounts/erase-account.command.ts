@@ -1,5 +1,6 @@
 import { Op } from 'sequelize';
 import { Consent } from '#api/db/models/consent.ts';
+import { ContentChange } from '#api/db/models/content-change.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import { DeclaredDiet } from '#api/db/models/declared-diet.ts';
 import { Handover } from '#api/db/models/handover.ts';
@@ -16,6 +17,7 @@ import { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
 import { Quote } from '#api/db/models/quote.ts';
 import { SentMail } from '#api/db/models/sent-mail.ts';
+import { StopTalk } from '#api/db/models/stop-talk.ts';
 import { Token } from '#api/db/models/token.ts';
 import type { User } from '#api/db/models/user.ts';
 import { inTransaction } from '#api/db/transaction.ts';
@@ -72,6 +74,9 @@ async function eraseOrders(orderId: readonly string[], now: Date): Promise<void>
   for (const stop of await LiftedStop.findAll({ where })) {
     await stop.update({ about: `erased:${stop.id}`, reason: '' });
   }
+  for (const talk of await StopTalk.findAll({ where })) {
+    await talk.update({ about: `erased:${talk.id}`, text: '' });
+  }
   await Order.update(
     {
       endedReason: null,
@@ -111,6 +116,7 @@ async function eraseRevision(revision: OrderRevision, now: Date): Promise<void> 
     // Advice repeats what guests cannot eat; the price and what the cake contains stay.
     estimate: { ...revision.estimate, advice: [] },
   });
+  await ContentChange.update({ advice: [], acknowledgedNote: '', toldHow: '' }, { where });
 }
 
 async function eraseMail(user: User, orderId: string[], now: Date): Promise<void> {

@@ -20,7 +20,13 @@ export type OrderEventKind =
   | 'message-written'
   | 'photo-added'
   | 'allergy-answered'
+  | 'stop-talked'
   | 'stop-lifted'
+  | 'lifted-stop-accepted'
+  | 'contents-changed'
+  | 'contents-put-right'
+  | 'contents-acknowledged'
+  | 'contents-told'
   | 'mail-sent-again';
 
 export type NewOrderEvent = {

@@ -1,6 +1,8 @@
-import type { Message, OrderView, Pickup } from '#shared/contracts/orders.ts';
+import type { ContentChangeView } from '#shared/contracts/contents.ts';
+import type { LiftedStop, Message, OrderView, Pickup } from '#shared/contracts/orders.ts';
 import type { Photo } from '#shared/contracts/photos.ts';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
+import { isLive } from '#shared/orders/transitions.ts';
 import type { Order } from '#api/db/models/order.ts';
 import type { Actor } from '#api/platform/actor.ts';
 import { canMove } from './change-order-status.command.ts';
@@ -14,6 +16,8 @@ export type OrderPage = OrderRecord & {
   readonly hold: { readonly expiresAt: Date; readonly needsLink: boolean } | null;
   readonly photos: Photo[];
   readonly messages: Message[];
+  readonly lifted: readonly LiftedStop[];
+  readonly contentChanges: ContentChangeView[];
   readonly otherDates: string[];
 };
 
@@ -50,7 +54,7 @@ export function presentOrder(page: OrderPage, actor: Actor): OrderView {
     pickup: pickupOf(order, revision),
     hold: presentHold(page.hold),
     design: designOf(revision),
-    offer: revision.estimate,
+    offer: page.estimate,
     agreedPrice: page.agreedPrice,
     orderedBy: {
       name: ordered?.name ?? '',
@@ -60,6 +64,8 @@ export function presentOrder(page: OrderPage, actor: Actor): OrderView {
     collector: collects === undefined ? null : { name: collects.name, phone: collects.phone ?? '' },
     photos: page.photos.filter(({ kind }) => kind !== 'fault'),
     messages: page.messages,
+    lifted: page.lifted.map(presentLifted),
+    contentChanges: page.contentChanges,
     createdAt: order.createdAt.toISOString(),
     otherDates: page.otherDates,
     showPhotos: order.showPhotos,
@@ -68,8 +74,17 @@ export function presentOrder(page: OrderPage, actor: Actor): OrderView {
       write: may('write'),
       addPhotos: may('add-photos'),
       seeCalendarFile: may('see-calendar-file'),
+      acceptLifted:
+        may('accept-lifted-stop') &&
+        isLive(order.status) &&
+        page.lifted.some(({ acceptedAt }) => acceptedAt === null),
     },
   };
+}
+
+/** What the customer reads; the staff's own words stay with the staff. */
+function presentLifted({ id, sentence, reason, by, at, acceptedAt }: LiftedStop): LiftedStop {
+  return { id, sentence, reason, by, at, acceptedAt };
 }
 
 export function presentHold(

@@ -18,7 +18,13 @@ const sentences: Record<OrderEventKind, string> = {
   'message-written': 'Wrote a message.',
   'photo-added': 'Added a photo.',
   'allergy-answered': 'Answered an allergy.',
+  'stop-talked': 'Recorded a talk about a stop.',
   'stop-lifted': 'Lifted a stop, with a reason.',
+  'lifted-stop-accepted': 'Read and accepted the reason for a lifted stop.',
+  'contents-changed': 'Changed what is in it, by a label or a formula.',
+  'contents-put-right': 'Put right what had changed in it.',
+  'contents-acknowledged': 'Saw to what has changed in it.',
+  'contents-told': 'Told the customer what has changed in it.',
   'mail-sent-again': 'Sent an e-mail again.',
 };
 

@@ -1,15 +1,22 @@
-import type { Advice } from '#shared/contracts/estimates.ts';
+import type { StaffContentChange } from '#shared/contracts/contents.ts';
 import type { Message } from '#shared/contracts/orders.ts';
 import type { Photo } from '#shared/contracts/photos.ts';
-import type { PlannedTask, SentMailRow } from '#shared/contracts/staff.ts';
+import type {
+  Blocker,
+  PlannedTask,
+  SentMailRow,
+  StaffLiftedStop,
+} from '#shared/contracts/staff.ts';
 import { isLive } from '#shared/orders/transitions.ts';
 import { Handover } from '#api/db/models/handover.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { User } from '#api/db/models/user.ts';
+import { staffContentChanges } from '#api/modules/contents/content-changes.queries.ts';
 import { mailOfOrder } from '#api/modules/mail/sent-mail.queries.ts';
 import { messagesOf, unreadOf } from '#api/modules/messages/messages.queries.ts';
 import { designOf } from '#api/modules/orders/order-design.queries.ts';
+import { liftedStopsOf } from '#api/modules/orders/lifted-stops.queries.ts';
 import { loadOrderRecord } from '#api/modules/orders/orders.queries.ts';
 import type { OrderRecord } from '#api/modules/orders/orders.queries.ts';
 import { photosOf } from '#api/modules/photos/photos.queries.ts';
@@ -32,7 +39,9 @@ export type StaffOrderPage = OrderRecord & {
   readonly events: readonly OrderEvent[];
   readonly mail: SentMailRow[];
   readonly handover: Handover | null;
-  readonly blockers: Advice[];
+  readonly blockers: Blocker[];
+  readonly lifted: StaffLiftedStop[];
+  readonly contentChanges: StaffContentChange[];
   /** Names of the members of staff who answered something or did something, by id. */
   readonly names: ReadonlyMap<string, string>;
 };
@@ -40,7 +49,7 @@ export type StaffOrderPage = OrderRecord & {
 export async function loadStaffOrderPage(order: Order): Promise<StaffOrderPage> {
   const record = await loadOrderRecord(order);
   const { revision } = record;
-  const [holds, fits, tasks, messages, unread, photos, events, mail, handover, blockers] =
+  const [holds, fits, tasks, messages, unread, photos, events, mail, handover, blockers, lifted] =
     await Promise.all([
       activeHoldsOf([order.id]),
       loadFit(record),
@@ -52,6 +61,7 @@ export async function loadStaffOrderPage(order: Order): Promise<StaffOrderPage> 
       mailOfOrder(order.id),
       Handover.findOne({ where: { orderId: order.id }, order: [['at', 'DESC']] }),
       blockersOf(revision),
+      liftedStopsOf(revision),
     ]);
   return {
     ...record,
@@ -64,13 +74,20 @@ export async function loadStaffOrderPage(order: Order): Promise<StaffOrderPage> 
     events,
     mail,
     handover,
-    blockers: order.status === 'asked' ? blockers : [],
+    blockers: isUnconfirmed(order.status) ? blockers : [],
+    lifted,
+    contentChanges: await staffContentChanges(revision),
     names: await namesOf([
       ...events.map(({ actorUserId }) => actorUserId),
       ...(revision.allergies ?? []).map(({ answeredByUserId }) => answeredByUserId),
       handover?.byUserId ?? null,
     ]),
   };
+}
+
+/** Before it is confirmed, what is open is still to be settled. */
+function isUnconfirmed(status: Order['status']): boolean {
+  return status === 'asked' || status === 'quoted' || status === 'agreed';
 }
 
 /** Whether the plan has room; an order that has ended needs none. */

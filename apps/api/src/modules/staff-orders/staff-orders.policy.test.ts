@@ -24,9 +24,12 @@ const table: Record<StaffOrderAction, readonly [boolean, boolean, boolean]> = {
   uncollected: [true, true, true],
   write: [true, true, true],
   'answer-allergy': [false, true, true],
+  'record-talk': [false, true, true],
   'lift-stop': [false, false, true],
   'renew-link': [true, true, true],
   'add-photos': [true, true, true],
+  'acknowledge-contents': [false, true, true],
+  'tell-contents': [true, true, true],
   'send-mail-again': [true, true, true],
   'block-days': [false, true, true],
 };

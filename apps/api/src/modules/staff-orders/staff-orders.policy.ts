@@ -16,10 +16,13 @@ export type StaffOrderAction =
   | 'uncollected'
   | 'write'
   | 'answer-allergy'
+  | 'record-talk'
   | 'lift-stop'
   | 'renew-link'
   | 'add-photos'
   | 'send-mail-again'
+  | 'acknowledge-contents'
+  | 'tell-contents'
   | 'block-days';
 
 const everyone: readonly StaffRole[] = ['counter', 'baker', 'owner'];
@@ -37,10 +40,13 @@ const allowed: Readonly<Record<StaffOrderAction, readonly StaffRole[]>> = {
   uncollected: everyone,
   write: everyone,
   'answer-allergy': bakers,
+  'record-talk': bakers,
   'lift-stop': owners,
   'renew-link': everyone,
   'add-photos': everyone,
   'send-mail-again': everyone,
+  'acknowledge-contents': bakers,
+  'tell-contents': everyone,
   'block-days': bakers,
 };
 

@@ -1,4 +1,5 @@
 import type { DeclaredAllergy, StaffOrder } from '#shared/contracts/staff.ts';
+import { isLive } from '#shared/orders/transitions.ts';
 import type { OrderEvent } from '#api/db/models/order-event.ts';
 import { canMove } from '#api/modules/orders/change-order-status.command.ts';
 import { designOf } from '#api/modules/orders/order-design.queries.ts';
@@ -18,7 +19,7 @@ export function presentStaffOrder(page: StaffOrderPage, actor: Actor): StaffOrde
     rowVersion: order.rowVersion,
     pickup: pickupOf(order, revision),
     design: designOf(revision),
-    estimate: revision.estimate,
+    estimate: page.estimate,
     agreedPrice: page.agreedPrice,
     allergies: allergiesOf(page),
     hold:
@@ -48,6 +49,8 @@ export function presentStaffOrder(page: StaffOrderPage, actor: Actor): StaffOrde
     showPhotos: order.showPhotos,
     handover: handoverOf(page),
     blockers: page.blockers,
+    lifted: page.lifted,
+    contentChanges: page.contentChanges,
     can: rightsOf(page, actor),
   };
 }
@@ -93,7 +96,9 @@ function actorName(event: OrderEvent, { names, contacts }: StaffOrderPage): stri
   return names.get(event.actorUserId ?? '') ?? 'Somebody who has left';
 }
 
-function rightsOf({ order, revision }: StaffOrderPage, actor: Actor): StaffOrder['can'] {
+function rightsOf(page: StaffOrderPage, actor: Actor): StaffOrder['can'] {
+  const { order, revision, contentChanges } = page;
+  const isOpen = isLive(order.status);
   const open = (revision.allergies ?? []).some(
     ({ answer, erasedAt }) => answer === null && erasedAt === null,
   );
@@ -107,9 +112,18 @@ function rightsOf({ order, revision }: StaffOrderPage, actor: Actor): StaffOrder
     uncollected: mayStaff(actor, 'uncollected') && canMove(order, 'uncollected', actor),
     write: mayStaff(actor, 'write'),
     answerAllergy: mayStaff(actor, 'answer-allergy') && open,
+    recordTalk: mayStaff(actor, 'record-talk') && canMove(order, 'confirm', actor),
     liftStop: mayStaff(actor, 'lift-stop') && canMove(order, 'confirm', actor),
     renewLink: mayStaff(actor, 'renew-link'),
     addPhotos: mayStaff(actor, 'add-photos'),
     sendMailAgain: mayStaff(actor, 'send-mail-again'),
+    acknowledgeContents:
+      mayStaff(actor, 'acknowledge-contents') &&
+      isOpen &&
+      contentChanges.some(({ acknowledged }) => acknowledged === null),
+    tellContents:
+      mayStaff(actor, 'tell-contents') &&
+      isOpen &&
+      contentChanges.some(({ told }) => told === null),
   };
 }
