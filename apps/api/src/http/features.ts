@@ -6,6 +6,7 @@ import { accountsRoutes } from '#api/modules/accounts/accounts.routes.ts';
 import { datesRoutes } from '#api/modules/dates/dates.routes.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { healthRoutes } from '#api/modules/health/health.routes.ts';
+import { kitchenRoutes } from '#api/modules/kitchen/kitchen.routes.ts';
 import { menuRoutes } from '#api/modules/menu/menu.routes.ts';
 import { peopleRoutes } from '#api/modules/people/people.routes.ts';
 import { pricesRoutes } from '#api/modules/prices/prices.routes.ts';
@@ -34,6 +35,7 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     staffMailRoutes(deps),
     staffContentsRoutes(deps),
     pantryRoutes(deps),
+    kitchenRoutes(deps),
     calendarRoutes(deps),
     datesRoutes(deps),
     sessionsRoutes(deps),

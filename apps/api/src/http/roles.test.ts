@@ -266,6 +266,14 @@ const table: Readonly<Record<string, Line>> = {
   'write-staff-message': line(staff, onOrder('messages', { body: 'See you on Saturday.' })),
   'see-mail': line(staff, ({ mail }) => ({ path: `/api/staff/mail/${mail.id}` })),
   'send-mail-again': line(staff, ({ mail }) => post(`/api/staff/mail/${mail.id}/send-again`)),
+  'see-kitchen-sheet': line(bakers, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/kitchen`,
+  })),
+  'see-order-cost': line(owners, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/cost`,
+  })),
+  'plan-eggs': line(bakers, `/api/staff/eggs?from=${day}&to=${day}`),
+  'plan-shopping': line(bakers, `/api/staff/shopping?from=${day}&to=${day}`),
   'see-calendar': line(staff, `/api/staff/calendar?from=${day}&to=${day}`),
   'block-day': line(bakers, () =>
     post('/api/staff/closures', { date: '2027-12-25', reason: 'Holiday' }),

@@ -20,7 +20,7 @@ function needing(grams: Readonly<Record<string, number>>): KitchenNeeds {
     ingredients: Object.entries(grams).map(([id, g]) => {
       const ingredient = index.ingredients.get(id);
       if (ingredient === undefined) throw new Error(id);
-      return { ingredient, grams: g, forDecorationsG: id === 'gum-paste' ? g : 0 };
+      return { ingredient, grams: g, forDecorationsG: id === 'gum-paste' ? g : 0, asItIsG: 0 };
     }),
   };
 }

@@ -3,7 +3,7 @@ import { addDays } from '#shared/dates/local-time.ts';
 import { indexPantry } from '../formulas/pantry-index.ts';
 import { smallPantry } from '../needs/testing/small-pantry.ts';
 import { leftoverUses } from './egg-uses.ts';
-import { jointEggPlan, type EggTask } from './joint-plan.ts';
+import { eggsAlone, jointEggPlan, type EggTask } from './joint-plan.ts';
 
 const index = indexPantry(smallPantry);
 const monday = '2027-06-07';
@@ -68,5 +68,10 @@ describe('the joint plan', () => {
         whipped: true,
       },
     ]);
+  });
+
+  it('says what one order alone would crack', () => {
+    const needs = [task('white', monday, 330, 'swiss'), task('egg', monday, 100, 'sponge')];
+    expect(eggsAlone(needs)).toEqual({ crack: 12, leftWhiteG: 0, leftYolkG: 170 });
   });
 });

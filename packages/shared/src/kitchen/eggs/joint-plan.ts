@@ -6,7 +6,7 @@ import { shellEggG } from '../formulas/round-grams.ts';
 import { leftoverDays, leftoverUses, type LeftoverDay, type LeftoverUse } from './egg-uses.ts';
 import type { EggClass } from './egg-weights.ts';
 import { planCartons, type CartonPlan } from './plan-cartons.ts';
-import { eggKeeping, planEggs, type EggKeeping, type EggNeed, type EggPlan } from './plan-eggs.ts';
+import { eggKeeping, planEggs, type EggKeeping, type EggPlan } from './plan-eggs.ts';
 
 /** Egg that one making of a formula takes on a day, for one or more orders. */
 export type EggTask = {
@@ -20,7 +20,7 @@ export type EggTask = {
 };
 
 export type JointEggPlan = {
-  readonly shell: EggPlan;
+  readonly shell: EggPlan<EggTask>;
   /** By the day they were cracked on. */
   readonly leftovers: readonly (LeftoverDay & { readonly uses: readonly LeftoverUse[] })[];
   readonly cartons: readonly {
@@ -64,7 +64,7 @@ export function jointEggPlan(
 ): JointEggPlan {
   const cracked = tasks.filter((it) => shellEggG(it.ingredient) !== null);
   const poured = tasks.filter((it) => shellEggG(it.ingredient) === null);
-  const shell = planEggs(needsOf(cracked), size, keeping);
+  const shell = planEggs(cracked, size, keeping);
   return {
     shell,
     leftovers: leftoverDays(shell.leftovers).map((day) => ({
@@ -86,15 +86,6 @@ export function jointEggPlan(
   };
 }
 
-function needsOf(tasks: readonly EggTask[]): EggNeed[] {
-  return tasks.map(({ date, part, grams, formulaName }) => ({
-    date,
-    part,
-    grams,
-    label: formulaName,
-  }));
-}
-
 /** Formulas that crack for one part alone, where the studio buys that part in a carton. */
 function instead(
   cracked: readonly EggTask[],
@@ -111,7 +102,7 @@ function instead(
     const carton = cartonOf(part, index);
     if (carton === undefined || carton.pack === null) return [];
     const rest = cracked.filter((it) => it.formulaId !== first.formulaId);
-    const fewer = eggs - planEggs(needsOf(rest), size, keeping).eggs;
+    const fewer = eggs - planEggs(rest, size, keeping).eggs;
     const sharing = poured.filter((it) => it.ingredient.id === carton.id);
     const { grams: packG } = carton.pack;
     const before = planCartons(sharing, packG).cartons;
@@ -137,4 +128,22 @@ function cartonOf(part: EggPart, index: PantryIndex): Ingredient | undefined {
     if (poured && it.pasteurised === 'yes' && it.archivedAt === null) return it;
   }
   return undefined;
+}
+
+/** Every need on the same day, whichever it is. */
+const oneDay = '2000-01-01';
+
+/** Shell eggs for one order by itself: how many to crack, and the grams that are left of them. */
+export function eggsAlone(
+  needs: readonly { readonly ingredient: Ingredient; readonly grams: number }[],
+): { readonly crack: number; readonly leftWhiteG: number; readonly leftYolkG: number } {
+  const plan = planEggs(
+    needs.flatMap(({ ingredient, grams }) =>
+      ingredient.eggPart === null || shellEggG(ingredient) === null
+        ? []
+        : { date: oneDay, part: ingredient.eggPart, grams },
+    ),
+  );
+  const [left] = leftoverDays(plan.leftovers);
+  return { crack: plan.eggs, leftWhiteG: left?.whiteG ?? 0, leftYolkG: left?.yolkG ?? 0 };
 }

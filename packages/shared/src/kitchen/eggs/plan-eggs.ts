@@ -9,8 +9,6 @@ export type EggNeed = {
   readonly date: LocalDate;
   readonly part: EggPart;
   readonly grams: number;
-  /** What it is for, as the bench reads it. */
-  readonly label: string;
 };
 
 /** Days a loose part keeps chilled after the day it was cracked. */
@@ -29,15 +27,18 @@ export type EggSource = {
   readonly grams: number;
 };
 
-export type EggUse = { readonly need: EggNeed; readonly from: readonly EggSource[] };
+export type EggUse<Need extends EggNeed = EggNeed> = {
+  readonly need: Need;
+  readonly from: readonly EggSource[];
+};
 
-export type EggDay = {
+export type EggDay<Need extends EggNeed = EggNeed> = {
   readonly date: LocalDate;
   /** Eggs to crack on this day. */
   readonly crack: number;
   /** Of those, how many may go in whole; the rest are separated. */
   readonly whole: number;
-  readonly uses: readonly EggUse[];
+  readonly uses: readonly EggUse<Need>[];
 };
 
 /** What nothing takes any more of the eggs cracked on a day. */
@@ -48,9 +49,9 @@ export type EggLeftover = {
   readonly grams: number;
 };
 
-export type EggPlan = {
+export type EggPlan<Need extends EggNeed = EggNeed> = {
   readonly eggs: number;
-  readonly days: readonly EggDay[];
+  readonly days: readonly EggDay<Need>[];
   readonly leftovers: readonly EggLeftover[];
 };
 
@@ -69,11 +70,11 @@ type Lot = { readonly crackedOn: LocalDate; readonly useBy: LocalDate; left: num
  * used first, and nothing is used after its day.
  * Needs of no weight are passed over.
  */
-export function planEggs(
-  needs: readonly EggNeed[],
+export function planEggs<Need extends EggNeed>(
+  needs: readonly Need[],
   size: EggClass = 'large',
   keeping: EggKeeping = eggKeeping,
-): EggPlan {
+): EggPlan<Need> {
   const wanted = needs.filter((it) => it.grams > 0);
   const egg = eggWeightsMg(size);
   const demandsOf = (part: 'white' | 'yolk') =>
@@ -85,7 +86,7 @@ export function planEggs(
   const cracked = coverDays(parts);
   const dates = [...new Set(wanted.map((it) => it.date))].toSorted();
   const lots: Record<'white' | 'yolk', Lot[]> = { white: [], yolk: [] };
-  const days = dates.map((date): EggDay => {
+  const days = dates.map((date): EggDay<Need> => {
     const crack = cracked.get(date) ?? 0;
     for (const [part, keepsDays] of [
       ['white', keeping.whiteDays],
@@ -102,7 +103,7 @@ export function planEggs(
     const uses = wanted
       .filter((need) => need.date === date)
       .toSorted((a, b) => Number(a.part === 'whole') - Number(b.part === 'whole'))
-      .map((need): EggUse => {
+      .map((need): EggUse<Need> => {
         const units = unitsOf(need);
         return {
           need,

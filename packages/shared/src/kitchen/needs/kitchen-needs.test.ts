@@ -5,6 +5,7 @@ import { partWeights } from '../part-weights.ts';
 import { resolveDesign } from '../resolve-design.ts';
 import { coat, designWith, roundTier } from '../testing/design-fixture.ts';
 import { menuFixture } from '../testing/menu-fixture.ts';
+import { datedNeeds } from './dated-needs.ts';
 import { needsOf, type NeedsInput } from './kitchen-needs.ts';
 import { shoppingList } from './shopping.ts';
 import { smallPantry, smallParts } from './testing/small-pantry.ts';
@@ -77,7 +78,7 @@ describe('what a cake takes', () => {
   it('names what no formula tells of, and goes on with the rest', () => {
     const parts = { ...smallParts, fillings: {} };
     const without = needs(oneTier(), { parts });
-    expect(without.unknown).toMatchObject([{ name: 'Raspberry jam', why: 'no-formula' }]);
+    expect(without.unknown).toMatchObject([{ name: 'Raspberry jam filling', why: 'no-formula' }]);
     expect(grams(without, 'flour')).toBeGreaterThan(0);
   });
 
@@ -121,6 +122,42 @@ describe('what a cake takes', () => {
       }),
       { numRuns: 8 },
     );
+  });
+});
+
+describe('needs by day', () => {
+  const german = needs({ cake: { tiers: [roundTier(8)], coating: coat({ style: 'german' }) } });
+  const dated = datedNeeds(
+    german,
+    (id) =>
+      id === 'german'
+        ? [
+            { date: '2027-06-08', share: 0.75 },
+            { date: '2027-06-09', share: 0.25 },
+          ]
+        : [],
+    '2027-06-07',
+  );
+  const on = (formulaId: string) => [
+    ...new Set(dated.filter((it) => it.formula?.id === formulaId).map((it) => it.date)),
+  ];
+
+  it('follow the plan, part by part', () => {
+    expect(on('german')).toEqual(['2027-06-08', '2027-06-09']);
+  });
+
+  it('go with the formula they are inside, and else on the day that is told', () => {
+    expect(on('custard')).toEqual(['2027-06-08', '2027-06-09']);
+    expect(on('vanilla-sponge')).toEqual(['2027-06-07']);
+  });
+
+  it('come to the same weights in all', () => {
+    for (const { ingredient, grams: g } of german.ingredients) {
+      const sum = dated
+        .filter((it) => it.ingredient.id === ingredient.id)
+        .reduce((total, it) => total + it.grams, 0);
+      expect(sum).toBeCloseTo(g, 6);
+    }
   });
 });
 

@@ -7,6 +7,7 @@ import { scaleFormula, type ScaledFormula } from '../formulas/scale-formula.ts';
 import { partWeights, type WeighedPart } from '../part-weights.ts';
 import { isPiped, timesOf } from '../piped.ts';
 import type { ResolvedDesign } from '../resolve-design.ts';
+import { partName } from './part-name.ts';
 
 export type NeedsInput = {
   readonly resolved: ResolvedDesign;
@@ -37,6 +38,8 @@ export type IngredientNeed = {
   readonly grams: number;
   /** How much of it is in decorations, whose materials the owner prices as a whole. */
   readonly forDecorationsG: number;
+  /** How much of it goes on as it is, in no formula. */
+  readonly asItIsG: number;
 };
 
 /** Something the cake has that no formula tells of; its weight is missing from the rest. */
@@ -56,7 +59,9 @@ export type KitchenNeeds = {
   readonly unknown: readonly UnknownNeed[];
 };
 
-type Buy = (ingredientId: string, grams: number, part: WeighedPart) => void;
+type Buy = (ingredientId: string, weights: Partial<Weights> & Pick<Weights, 'grams'>) => void;
+
+type Weights = Omit<IngredientNeed, 'ingredient'>;
 
 type Wanted = { readonly version: FormulaVersion; outG: number; readonly for: Set<string> };
 
@@ -76,17 +81,19 @@ export function needsOf(input: NeedsInput): KitchenNeeds {
       known.for.add(what);
     }
   };
-  const bought = new Map<string, { grams: number; forDecorationsG: number }>();
-  const buy: Buy = (id, grams, { part }) => {
-    const known = bought.get(id) ?? { grams: 0, forDecorationsG: 0 };
-    known.grams += grams;
-    if (part === 'decoration') known.forDecorationsG += grams;
-    bought.set(id, known);
+  const bought = new Map<string, Weights>();
+  const buy: Buy = (id, { grams, forDecorationsG = 0, asItIsG = 0 }) => {
+    const known = bought.get(id) ?? { grams: 0, forDecorationsG: 0, asItIsG: 0 };
+    bought.set(id, {
+      grams: known.grams + grams,
+      forDecorationsG: known.forDecorationsG + forDecorationsG,
+      asItIsG: known.asItIsG + asItIsG,
+    });
   };
 
   for (const part of partWeights(resolved).parts) {
     if (part.toMakeG <= 0) continue;
-    const name = nameOf(part, resolved);
+    const name = partName(part, resolved.menu);
     if (part.part === 'decoration') {
       buyDecoration(part, input, buy);
       const made = input.parts.decorations[part.id];
@@ -105,7 +112,9 @@ export function needsOf(input: NeedsInput): KitchenNeeds {
         want(inside.version, inside.outG, versionName(index, version));
       }
       want(version, outG, name);
-      for (const [id, grams] of exploded.ingredients) buy(id, grams, part);
+      for (const [id, grams] of exploded.ingredients) {
+        buy(id, { grams, forDecorationsG: part.part === 'decoration' ? grams : 0 });
+      }
     } catch (error) {
       if (!(error instanceof FormulaFault)) throw error;
       unknown.push({ name, grams: part.toMakeG, why: 'unsound', message: error.message });
@@ -170,25 +179,14 @@ function formulaIdOf({ part, id }: WeighedPart, parts: PartFormulas): string | n
 }
 
 /** Ingredients of a decoration are listed for one of it. */
-function buyDecoration(part: WeighedPart, { resolved, parts }: NeedsInput, buy: Buy): void {
-  const { id } = part;
+function buyDecoration({ id }: WeighedPart, { resolved, parts }: NeedsInput, buy: Buy): void {
   const times = resolved.decorations
     .filter(
       (it) => it.decoration.id === id && it.placed.source === 'studio' && !isPiped(it.decoration),
     )
     .reduce((sum, it) => sum + timesOf(it, resolved.tiers.length), 0);
-  for (const { ingredientId, grams } of parts.decorations[id]?.ingredients ?? []) {
-    buy(ingredientId, grams * times, part);
+  for (const it of parts.decorations[id]?.ingredients ?? []) {
+    const grams = it.grams * times;
+    buy(it.ingredientId, { grams, forDecorationsG: grams, asItIsG: grams });
   }
-}
-
-function nameOf({ part, id }: WeighedPart, { menu }: ResolvedDesign): string {
-  const named: readonly { readonly id: string; readonly name: string }[] = {
-    sponge: menu.sponges,
-    filling: menu.fillings,
-    style: menu.styles,
-    covering: menu.coverings,
-    decoration: menu.decorations,
-  }[part];
-  return named.find((it) => it.id === id)?.name ?? id;
 }

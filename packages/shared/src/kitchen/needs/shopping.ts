@@ -1,7 +1,6 @@
 import type { Ingredient } from '#shared/contracts/pantry.ts';
 import { atPackPrice } from '../cost/at-pack-price.ts';
 import { shellEggG } from '../formulas/round-grams.ts';
-import type { IngredientNeed } from './kitchen-needs.ts';
 
 /** One thing to buy; null where its pack is not known. */
 export type ShoppingLine = {
@@ -33,22 +32,15 @@ export type EggsToBuy = {
   readonly cartons: ReadonlyMap<string, number>;
 };
 
+/** A weight of something bought. */
+export type Bought = { readonly ingredient: Ingredient; readonly grams: number };
+
 /** The same ingredient of several orders is one need. */
-export function addNeeds(needs: readonly IngredientNeed[]): IngredientNeed[] {
-  const sums = new Map<string, IngredientNeed>();
-  for (const need of needs) {
-    const { id } = need.ingredient;
-    const known = sums.get(id);
-    sums.set(
-      id,
-      known === undefined
-        ? need
-        : {
-            ingredient: known.ingredient,
-            grams: known.grams + need.grams,
-            forDecorationsG: known.forDecorationsG + need.forDecorationsG,
-          },
-    );
+function together(needs: readonly Bought[]): Bought[] {
+  const sums = new Map<string, Bought>();
+  for (const { ingredient, grams } of needs) {
+    const known = sums.get(ingredient.id)?.grams ?? 0;
+    sums.set(ingredient.id, { ingredient, grams: known + grams });
   }
   return [...sums.values()];
 }
@@ -58,13 +50,13 @@ export function addNeeds(needs: readonly IngredientNeed[]): IngredientNeed[] {
  * part of them is used: `shelf` is where the studio's shell egg is found, among all ingredients.
  */
 export function shoppingList(
-  needs: readonly IngredientNeed[],
+  needs: readonly Bought[],
   eggs: EggsToBuy,
   shelf: readonly Ingredient[],
 ): ShoppingList {
-  const together = addNeeds(needs);
-  const shell = together.filter((it) => shellEggG(it.ingredient) !== null);
-  const rest = together.filter((it) => shellEggG(it.ingredient) === null);
+  const wanted = together(needs);
+  const shell = wanted.filter((it) => shellEggG(it.ingredient) !== null);
+  const rest = wanted.filter((it) => shellEggG(it.ingredient) === null);
   const lines = rest.map((it) => lineOf(it, eggs.cartons.get(it.ingredient.id)));
   const first = shell[0];
   if (first !== undefined && eggs.shell > 0) {
@@ -93,7 +85,7 @@ function shellEgg(shelf: readonly Ingredient[]): Ingredient | undefined {
   );
 }
 
-function lineOf({ ingredient, grams }: IngredientNeed, cartons: number | undefined): ShoppingLine {
+function lineOf({ ingredient, grams }: Bought, cartons: number | undefined): ShoppingLine {
   const { pack } = ingredient;
   if (pack === null) return unknown(ingredient, grams, null);
   // A hair over is not another pack: nobody weighs it.
@@ -109,7 +101,7 @@ function lineOf({ ingredient, grams }: IngredientNeed, cartons: number | undefin
   };
 }
 
-function eggLine(egg: Ingredient, needs: readonly IngredientNeed[], count: number): ShoppingLine {
+function eggLine(egg: Ingredient, needs: readonly Bought[], count: number): ShoppingLine {
   const grams = needs.reduce((sum, it) => sum + it.grams, 0);
   const { pack } = egg;
   const eachG = shellEggG(egg);
