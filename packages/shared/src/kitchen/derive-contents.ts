@@ -74,9 +74,16 @@ export function cooksEgg(step: FormulaStep): boolean {
 type Gathered = {
   readonly allergens: readonly AllergenEntry[];
   readonly statement: string;
+  /** Statements of the ingredients alone, by their part of the whole. */
+  readonly dispersed: ReadonlyMap<string, number>;
   readonly facts: Record<'gelatine' | 'alcohol' | 'cochineal' | 'honey' | 'animalOrigin', boolean>;
   readonly rawEgg: boolean;
+  /** Ids of the formulas in it, its own included. */
+  readonly formulaIds: ReadonlySet<string>;
 };
+
+/** Nodes never change, so what was gathered of one holds wherever else it is used. */
+const gatheredBefore = new WeakMap<FormulaNode, Gathered>();
 
 /**
  * What a part of a cake has in it, gathered from its ingredients through all its formulas.
@@ -94,6 +101,10 @@ export function deriveContents(formula: FormulaNode): Contents {
 }
 
 function gatherFormula(formula: FormulaNode, above: readonly string[]): Gathered {
+  const before = gatheredBefore.get(formula);
+  const again = before && above.find((id) => before.formulaIds.has(id));
+  if (again !== undefined) throw new FormulaCycle([...above, formula.id, again]);
+  if (before !== undefined) return before;
   if (above.includes(formula.id)) throw new FormulaCycle([...above, formula.id]);
   const path = [...above, formula.id];
   const gathered = formula.lines.map((line) => ({
@@ -102,9 +113,11 @@ function gatherFormula(formula: FormulaNode, above: readonly string[]): Gathered
       line.part.kind === 'formula' ? gatherFormula(line.part, path) : gatherIngredient(line.part),
   }));
   const lastHeat = formula.steps.findLastIndex(cooksEgg);
-  return {
+  const dispersed = disperse(gathered);
+  const now: Gathered = {
     allergens: mergeAllergens(gathered.map((it) => it.inside.allergens)),
-    statement: statementOf(gathered),
+    statement: statementOf(gathered, dispersed),
+    dispersed,
     facts: {
       gelatine: gathered.some((it) => it.inside.facts.gelatine),
       alcohol: gathered.some((it) => it.inside.facts.alcohol),
@@ -113,14 +126,19 @@ function gatherFormula(formula: FormulaNode, above: readonly string[]): Gathered
       animalOrigin: gathered.some((it) => it.inside.facts.animalOrigin),
     },
     rawEgg: gathered.some((it) => it.inside.rawEgg && it.line.joinsAtStep > lastHeat),
+    formulaIds: new Set([formula.id, ...gathered.flatMap((it) => [...it.inside.formulaIds])]),
   };
+  gatheredBefore.set(formula, now);
+  return now;
 }
 
 function gatherIngredient(ingredient: IngredientNode): Gathered {
+  const statement =
+    ingredient.madeOf === '' ? ingredient.name : `${ingredient.name} (${ingredient.madeOf})`;
   return {
     allergens: ingredient.allergens,
-    statement:
-      ingredient.madeOf === '' ? ingredient.name : `${ingredient.name} (${ingredient.madeOf})`,
+    statement,
+    dispersed: new Map([[statement, 1]]),
     facts: {
       gelatine: ingredient.gelatine !== 'no',
       alcohol: ingredient.alcohol !== 'no',
@@ -129,15 +147,23 @@ function gatherIngredient(ingredient: IngredientNode): Gathered {
       animalOrigin: ingredient.animalOrigin !== 'no',
     },
     rawEgg: ingredient.egg === 'raw',
+    formulaIds: new Set(),
   };
 }
 
+type GatheredLine = { readonly line: FormulaLine; readonly inside: Gathered };
+
+/** Nobody reads a statement longer than this, and nested doubles would make it endless. */
+const longestStatement = 4000;
+
 /**
  * Descending by weight as used, by common name (21 CFR 101.4(a)(1)), compounds in parentheses; an
- * ingredient in two lines of one formula is named once with their weights together.
+ * ingredient in two lines of one formula is named once with their weights together. One that
+ * would be endless names what the compounds are made of without them (21 CFR 101.4(b)(2)(ii)).
  */
 function statementOf(
-  gathered: readonly { readonly line: FormulaLine; readonly inside: Gathered }[],
+  gathered: readonly GatheredLine[],
+  dispersed: ReadonlyMap<string, number>,
 ): string {
   const weights = new Map<string, number>();
   for (const { line, inside } of gathered) {
@@ -147,8 +173,26 @@ function statementOf(
         : inside.statement;
     weights.set(text, (weights.get(text) ?? 0) + line.weightMg);
   }
+  const statement = heaviestFirst(weights);
+  return statement.length > longestStatement ? heaviestFirst(dispersed) : statement;
+}
+
+function heaviestFirst(weights: ReadonlyMap<string, number>): string {
   return [...weights]
     .sort(([, a], [, b]) => b - a)
     .map(([text]) => text)
     .join(', ');
+}
+
+/** Each ingredient's part of what goes in, through all formulas. */
+function disperse(gathered: readonly GatheredLine[]): ReadonlyMap<string, number> {
+  const total = gathered.reduce((sum, it) => sum + it.line.weightMg, 0);
+  const parts = new Map<string, number>();
+  for (const { line, inside } of gathered) {
+    for (const [text, part] of inside.dispersed) {
+      const share = total > 0 ? (part * line.weightMg) / total : 0;
+      parts.set(text, (parts.get(text) ?? 0) + share);
+    }
+  }
+  return parts;
 }
