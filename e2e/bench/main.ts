@@ -1,3 +1,4 @@
+import { evaluate } from './evaluate.ts';
 import { firstLoad } from './first-load.ts';
 import { fuzz } from './fuzz.ts';
 import { killedWorkers } from './kills.ts';
@@ -11,7 +12,16 @@ import { estimates, menu } from './routes.ts';
  * runs those parts alone. Ends with 1 when a target is missed.
  */
 
-const parts: readonly Part[] = [menu, estimates, firstLoad, photos, killedWorkers, fuzz, races];
+const parts: readonly Part[] = [
+  evaluate,
+  menu,
+  estimates,
+  firstLoad,
+  photos,
+  killedWorkers,
+  fuzz,
+  races,
+];
 
 const asked = process.argv.slice(2);
 const unknown = asked.filter((name) => parts.every((part) => part.name !== name));

@@ -23,6 +23,7 @@ const staffPages = [
   '/staff/orders',
   '/staff/orders/2401',
   '/staff/studio',
+  '/staff/studio/prices',
   '/staff/me',
 ];
 
