@@ -1,4 +1,4 @@
-import type { Coating, Design, Look } from '#shared/contracts/design.ts';
+import type { Coating, CuttingCake, Design, Look } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { colourPicks } from './colour.ts';
@@ -81,6 +81,10 @@ export function chosenRows({ cake, look, extras }: Design, menu: Menu): ChosenRo
     { label: 'Inside', value: together(parts.map(({ name, inside }) => [name, inside])) },
     { label: 'Over it', value: together(parts.map(({ name, coat }) => [name, coat])) },
     {
+      label: 'In the kitchen',
+      value: cake.cuttingCakes.map((it) => cutWords(it, menu)).join('; '),
+    },
+    {
       label: 'Words on it',
       value: words.map((it) => `“${it.text.trim()}”${on(it.tier)}`).join('; '),
     },
@@ -105,6 +109,13 @@ function sheetInside(sheet: NonNullable<Design['cake']>['sheet'], menu: Menu): s
   return sheet === null
     ? ''
     : `${insideWords(sheet, menu)}, ${countOf(sheet.layers, 'layer').toLowerCase()}`;
+}
+
+/** "2 × Half sheet, 13 × 18 in, to cut: vanilla, filled with raspberry jam, two layers". */
+export function cutWords(cut: CuttingCake, menu: Menu): string {
+  const name = menu.sheetSizes.find((it) => it.id === cut.sizeId)?.name ?? cut.sizeId;
+  const times = cut.count === 1 ? '' : `${cut.count} × `;
+  return `${times}${name}, to cut: ${sheetInside(cut, menu)}`;
 }
 
 /** One value where all are alike; else each with its tier's name. */

@@ -44,7 +44,7 @@ const shareOfWidth = 0.7;
  * Boards and dowels of a stacked cake, and the inner board of each tall tier with the dowels under
  * it. Foam bears what stands on it: a dummy has no dowels and no inner board.
  */
-export function supportsOf(tiers: readonly ResolvedTier[]): Supports {
+export function supportsOf(tiers: readonly Pick<ResolvedTier, 'block' | 'real'>[]): Supports {
   const perTier = tiers.map(({ block, real }, tier): TierSupports => {
     const { shape, widthMm, depthMm, heightMm } = block;
     const tall = real && heightMm > doubleHeightMm;

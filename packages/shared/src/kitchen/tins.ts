@@ -24,7 +24,13 @@ const highestInOneTinMm = 76;
  * Tins of a body: two layers are baked together and split where that is no higher than a tin of 3
  * in, else each has a tin. Null without sponge.
  */
-export function tinsOf({ block, layers, sponge, filling, real }: ResolvedBody): Tins | null {
+export function tinsOf({
+  block,
+  layers,
+  sponge,
+  filling,
+  real,
+}: Omit<ResolvedBody, 'coating' | 'keepsake'>): Tins | null {
   if (sponge === null || !real) return null;
   const gaps = filling === null ? 0 : layers - 1;
   const spongeMm = Math.max(0, block.heightMm - gaps * (filling?.thicknessMm ?? 0));

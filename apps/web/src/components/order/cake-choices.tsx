@@ -1,7 +1,8 @@
 import type { Cake, Look, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import { coatWords, decorationWords, insideWords } from '#shared/kitchen/chosen-words.ts';
+import { coatWords, cutWords, decorationWords, insideWords } from '#shared/kitchen/chosen-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
+import { plainCoatOf } from '#shared/kitchen/resolve-design.ts';
 import { capitalise, countOf } from '#shared/kitchen/sentences.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
 
@@ -11,14 +12,24 @@ type Props = {
   readonly menu: Menu;
   /** Portions per tier from the board up, as estimated. */
   readonly perTier: readonly number[];
+  readonly perCuttingCake: readonly number[];
 };
 
 /** The cake as chosen, tier by tier from the top down, as it stands in the drawing. */
-export function CakeChoices({ cake, look, menu, perTier }: Props) {
-  if (cake.kind === 'sheet') {
-    return (
+export function CakeChoices({ cake, look, menu, perTier, perCuttingCake }: Props) {
+  const cutting = cake.cuttingCakes.map((it, at) => (
+    <li key={`cutting ${at}`} className="py-3">
       <Part
-        name={summariseCake(cake, menu)}
+        name="In the kitchen"
+        size={portionWords(perCuttingCake[at] ?? 0)}
+        lines={[cutWords(it, menu), coatWords(plainCoatOf(cake), menu)]}
+      />
+    </li>
+  ));
+  if (cake.kind === 'sheet') {
+    const shown = (
+      <Part
+        name={summariseCake({ ...cake, cuttingCakes: [] }, menu)}
         size={portionWords(perTier[0] ?? 0)}
         lines={[
           cake.sheet === null ? '' : insideWords(cake.sheet, menu),
@@ -27,6 +38,13 @@ export function CakeChoices({ cake, look, menu, perTier }: Props) {
           ...lookWords(0, look, menu),
         ]}
       />
+    );
+    if (cutting.length === 0) return shown;
+    return (
+      <ol className="divide-y divide-seam border-y border-seam">
+        <li className="py-3">{shown}</li>
+        {cutting}
+      </ol>
     );
   }
   const lead = menu.studio.lengthLead;
@@ -56,6 +74,7 @@ export function CakeChoices({ cake, look, menu, perTier }: Props) {
             />
           </li>
         ))}
+      {cutting}
     </ol>
   );
 }

@@ -1,8 +1,8 @@
 import type { Design } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { pieceName } from '../piece-name.ts';
 import { portionSizeOf } from '../portions.ts';
 import { blockOfSheet, sheetFootprint, sheetSizeOf, type Block, type Footprint } from '../sizes.ts';
-import { tierName } from '../tier-name.ts';
 import { cutBlock, type BlockCut } from './cut-block.ts';
 import { cuttingSteps } from './cutting-steps.ts';
 
@@ -53,7 +53,7 @@ export function cuttingPlanOf(design: Design, menu: Menu): CuttingPlan | null {
         {
           kind: 'tier',
           index,
-          name: tierName(index, cake.tiers.length),
+          name: pieceName({ kind: 'tier', index }, cake, menu),
           count: 1,
           left: real ? (keepsake ? 'keepsake' : null) : 'dummy',
         },
@@ -79,7 +79,7 @@ export function cuttingPlanOf(design: Design, menu: Menu): CuttingPlan | null {
         {
           kind: 'cutting-cake',
           index,
-          name: `Cutting cake: ${size.name}`,
+          name: pieceName({ kind: 'cutting-cake', index }, cake, menu),
           count: it.count,
           left: null,
         },

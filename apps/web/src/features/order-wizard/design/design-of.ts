@@ -4,6 +4,9 @@ import type { OrderForm } from '../draft/empty-order.ts';
 import { stepIndex } from '../steps/steps.ts';
 import { orderToSend } from './tidy-order.ts';
 
+/** As many cutting cakes of one kind as the contract takes. */
+const mostOfOneKind = 100;
+
 /** A number that can be worked with, or the one to use until it can be read. */
 function known(value: number, otherwise: number): number {
   return Number.isFinite(value) ? Math.round(value) : otherwise;
@@ -30,7 +33,15 @@ export function designOf(values: OrderForm, reached: OrderStep): Design | null {
         .filter((it) => it.allergen !== null || it.text.trim() !== '')
         .map((it) => ({ ...it, guests: Math.max(1, known(it.guests, 1)) })),
     },
-    cake: hasCake ? order.cake : null,
+    cake: hasCake
+      ? {
+          ...order.cake,
+          cuttingCakes: order.cake.cuttingCakes.map((it) => ({
+            ...it,
+            count: Math.min(mostOfOneKind, Math.max(1, known(it.count, 1))),
+          })),
+        }
+      : null,
     setting: asked
       ? {
           ...order.setting,
@@ -40,6 +51,10 @@ export function designOf(values: OrderForm, reached: OrderStep): Design | null {
               : order.setting.warmestC,
           minutesOut: known(order.setting.minutesOut, 0),
           driveMinutes: known(order.setting.driveMinutes, 0),
+          servedAt:
+            order.setting.servedAt === null || Number.isNaN(order.setting.servedAt)
+              ? null
+              : order.setting.servedAt,
         }
       : null,
     look: {

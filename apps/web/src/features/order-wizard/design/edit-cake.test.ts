@@ -57,13 +57,27 @@ describe('changing the cake', () => {
     const values = decorated();
     const [first] = values.cake.tiers;
     if (first === undefined) throw new Error('no tier');
-    const proposed = [{ ...small(first), spongeId: 'plain' }];
+    const proposed = { tiers: [{ ...small(first), spongeId: 'plain' }], cuttingCakes: [] };
     const { cake, look } = takeProposal(values, proposed);
     expect(cake.tiers[0]).toMatchObject({ widthMm: 200, spongeId: 'vanilla' });
     expect(look.words).toEqual([{ tier: 0, text: 'Happy birthday Jo' }]);
     expect(look.decorations).toHaveLength(2);
     expect(isProposal(cake, proposed)).toBe(true);
     expect(isProposal(values.cake, proposed)).toBe(false);
+  });
+
+  it('takes a show cake with its cutting cakes, which have the inside that was chosen', () => {
+    const values = answered();
+    const cut = { sizeId: 'half', count: 2, layers: 2, spongeId: 'plain', fillingId: 'plain' };
+    const proposed = { tiers: values.cake.tiers, cuttingCakes: [cut] };
+    const { cake } = takeProposal(values, proposed);
+    expect(cake.cuttingCakes).toEqual([{ ...cut, spongeId: 'vanilla', fillingId: 'raspberry' }]);
+    expect(isProposal(cake, proposed)).toBe(true);
+    expect(isProposal(values.cake, proposed)).toBe(false);
+    // A cake by itself has none again.
+    expect(takeProposal({ ...values, cake }, { ...proposed, cuttingCakes: [] }).cake).toMatchObject(
+      { cuttingCakes: [] },
+    );
   });
 
   it('keeps a tier sound: a dummy has nothing inside, a real one gets it back', () => {
@@ -82,6 +96,17 @@ describe('changing the cake', () => {
     if (first === undefined) throw new Error('no tier');
     const cooler = { ...values.setting, place: 'indoors' as const, minutesOut: 30 };
     expect(applyPatch(values, { setting: cooler })).toEqual({ ...values, setting: cooler });
+    const marzipan = {
+      ...values.look,
+      decorations: [
+        { decorationId: 'marzipan', tier: 0, quantity: 1, colour: null, source: 'studio' as const },
+      ],
+    };
+    const plain = applyPatch(
+      { ...values, look: marzipan },
+      { look: { ...marzipan, decorations: [], words: [] } },
+    );
+    expect(plain.look).toEqual({ ...values.look, decorations: [] });
     const patched = applyPatch(values, { cake: { ...values.cake, tiers: [small(first)] } });
     expect(patched.cake.tiers).toHaveLength(1);
     expect(patched.look.words).toEqual([{ tier: 0, text: 'Happy birthday Jo' }]);

@@ -1,6 +1,7 @@
-import type { Cake, Look, Sheet, Tier } from '#shared/contracts/design.ts';
-import type { DesignPatch } from '#shared/contracts/estimates.ts';
+import type { Cake, CuttingCake, Look, Sheet, Tier } from '#shared/contracts/design.ts';
+import type { DesignPatch, Proposal } from '#shared/contracts/estimates.ts';
 import type { Menu, SheetSize } from '#shared/contracts/menu.ts';
+import { cuttingCakeOf, usualSheetLayers } from '#shared/kitchen/propose-cutting.ts';
 import { smallestStepMm } from '#shared/kitchen/sizes.ts';
 import type { OrderForm } from '../draft/empty-order.ts';
 import type { Inside } from './first-inside.ts';
@@ -37,16 +38,23 @@ function joinWords(look: Look): Look {
   return { ...look, words: [...joined].map(([tier, text]) => ({ tier, text })) };
 }
 
+/** What a proposal says of the cake. */
+type Proposed = Pick<Proposal, 'tiers' | 'cuttingCakes'>;
+
 /**
- * Takes a proposed stack. Sponges and fillings already chosen stay, from the board up; words and
- * decorations of tiers it does not have move to its top.
+ * Takes a proposed stack and its cutting cakes. Sponges and fillings already chosen stay, from the
+ * board up; words and decorations of tiers it does not have move to its top.
  */
-export function takeProposal({ cake, look }: CakeAndLook, tiers: readonly Tier[]): CakeAndLook {
+export function takeProposal(
+  { cake, look }: CakeAndLook,
+  { tiers, cuttingCakes }: Proposed,
+): CakeAndLook {
   const top = Math.max(0, tiers.length - 1);
   return {
     cake: {
       ...cake,
       kind: 'tiered',
+      cuttingCakes: cuttingCakes.map((it) => withInsideOf(cake, it)),
       tiers: tiers.map((tier, at) => {
         const before = cake.tiers[at] ?? cake.tiers.at(-1);
         if (before === undefined || !tier.real) return tier;
@@ -61,11 +69,26 @@ export function takeProposal({ cake, look }: CakeAndLook, tiers: readonly Tier[]
   };
 }
 
+/** Everybody eats the same: a cutting cake takes the inside that was chosen for the cake. */
+function withInsideOf(cake: Cake, cutting: CuttingCake): CuttingCake {
+  const chosen = cake.cuttingCakes[0] ?? cake.tiers.find((it) => it.real);
+  return {
+    ...cutting,
+    spongeId: chosen?.spongeId ?? cutting.spongeId,
+    fillingId: chosen?.fillingId ?? cutting.fillingId,
+  };
+}
+
 /** Whether the cake is the proposal, but for what is inside it. */
-export function isProposal(cake: Cake, tiers: readonly Tier[]): boolean {
+export function isProposal(cake: Cake, { tiers, cuttingCakes }: Proposed): boolean {
   return (
     cake.kind === 'tiered' &&
     cake.tiers.length === tiers.length &&
+    cake.cuttingCakes.length === cuttingCakes.length &&
+    cuttingCakes.every((it, at) => {
+      const own = cake.cuttingCakes[at];
+      return own !== undefined && own.sizeId === it.sizeId && own.count === it.count;
+    }) &&
     tiers.every((tier, at) => {
       const own = cake.tiers[at];
       return (
@@ -165,7 +188,7 @@ export function takeSheet(
       kind: 'sheet',
       sheet: {
         sizeId: size.id,
-        layers: before?.layers ?? (size.heightMm >= 60 ? 2 : 1),
+        layers: before?.layers ?? usualSheetLayers(size),
         spongeId: before?.spongeId ?? tier?.spongeId ?? inside.spongeId,
         fillingId: before ? before.fillingId : (tier?.fillingId ?? null),
       },
@@ -174,9 +197,25 @@ export function takeSheet(
   };
 }
 
+/** Adds cutting cakes of one size, with the inside of the cake on show. */
+export function addCuttingCakes(
+  { cake, look }: CakeAndLook,
+  cut: { readonly size: SheetSize; readonly count: number },
+  inside: Inside,
+): CakeAndLook {
+  const { size, count } = cut;
+  const added = withInsideOf(cake, cuttingCakeOf(size, count, inside));
+  return { cake: { ...cake, cuttingCakes: [...cake.cuttingCakes, added] }, look };
+}
+
 /** Applies a piece of advice in one press: only the parts it names change. */
 export function applyPatch(values: OrderForm, patch: DesignPatch): OrderForm {
   const cake = patch.cake ?? values.cake;
+  // Of the look a way out leaves out decorations; words somebody is just typing stay.
+  const look =
+    patch.look === undefined
+      ? values.look
+      : { ...values.look, decorations: patch.look.decorations };
   const top = Math.max(0, cake.tiers.length - 1);
   return {
     ...values,
@@ -187,9 +226,7 @@ export function applyPatch(values: OrderForm, patch: DesignPatch): OrderForm {
       sheet: cake.kind === 'tiered' ? values.cake.sheet : cake.sheet,
     },
     look:
-      cake.kind === 'tiered'
-        ? joinWords(followTiers(values.look, (tier) => Math.min(tier, top)))
-        : values.look,
+      cake.kind === 'tiered' ? joinWords(followTiers(look, (tier) => Math.min(tier, top))) : look,
     setting: patch.setting ?? values.setting,
   };
 }

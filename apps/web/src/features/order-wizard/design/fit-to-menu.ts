@@ -57,6 +57,13 @@ export function fitToMenu(values: OrderForm, menu: Menu): Fitted {
                 : null,
             },
       coating: coat(values.cake.coating),
+      cuttingCakes: values.cake.cuttingCakes
+        .filter((it) => has(menu.sheetSizes, it.sizeId, 'the size of a cutting cake'))
+        .map((it) => ({
+          ...it,
+          spongeId: has(menu.sponges, it.spongeId, 'a sponge you chose') ? it.spongeId : null,
+          fillingId: has(menu.fillings, it.fillingId, 'a filling you chose') ? it.fillingId : null,
+        })),
     },
     look: {
       ...values.look,

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { draftKeptDays, readDraft, restoreValues, writeDraft } from './draft-record.ts';
+import { answered } from '../testing/answered.ts';
 import { emptyOrder } from './empty-order.ts';
 
 const savedAt = Date.parse('2027-05-03T10:42:00Z');
@@ -41,6 +42,13 @@ describe('a kept draft', () => {
     const back = restoreValues(values);
     expect(back.setting).toEqual(emptyOrder().setting);
     expect(back.day.occasionId).toBe('wedding');
+  });
+
+  it('of before there were cutting cakes has none', () => {
+    const { cuttingCakes, ...cake } = answered().cake;
+    const back = restoreValues({ ...answered(), cake });
+    expect(back.cake).toEqual({ ...cake, cuttingCakes });
+    expect(back.cake.tiers).toHaveLength(2);
   });
 
   it('ignores other versions, broken text and drafts that are too old', () => {

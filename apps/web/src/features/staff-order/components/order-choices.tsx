@@ -2,7 +2,6 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { decorationWords } from '#shared/kitchen/chosen-words.ts';
-import { formatLength, formatWeight } from '#shared/kitchen/measures.ts';
 import { CakeChoices } from '#web/components/order/cake-choices.tsx';
 import { settingWords } from '#web/components/order/setting-words.ts';
 import { Palette } from '#web/components/photos/palette.tsx';
@@ -13,7 +12,6 @@ export function OrderChoices({ order, menu }: { readonly order: StaffOrder; read
   const { guests, cake, setting, look, extras } = order.design;
   const { estimate } = order;
   const whole = look?.decorations.filter((it) => it.tier === null) ?? [];
-  const lead = menu.studio.lengthLead;
   const rows: (DataRow | false)[] = [
     whole.length > 0 && {
       key: 'whole',
@@ -71,16 +69,17 @@ export function OrderChoices({ order, menu }: { readonly order: StaffOrder; read
       label: 'Portions',
       value: `${estimate.portions.fed} of ${estimate.portions.wanted} wanted, ${menu.portionSizes.find((it) => it.id === guests.portionSizeId)?.name.toLowerCase() ?? guests.portionSizeId}`,
     },
-    estimate.weightG > 0 && {
-      key: 'weight',
-      label: 'As carried',
-      value: `${formatWeight(estimate.weightG, lead)}, ${formatLength(estimate.heightMm, lead)} high`,
-    },
   ];
   return (
     <div className="grid gap-4">
       {cake !== null && (
-        <CakeChoices cake={cake} look={look} menu={menu} perTier={estimate.portions.perTier} />
+        <CakeChoices
+          cake={cake}
+          look={look}
+          menu={menu}
+          perTier={estimate.portions.perTier}
+          perCuttingCake={estimate.portions.perCuttingCake}
+        />
       )}
       <DataList rows={rows.filter((it) => it !== false)} />
     </div>

@@ -1,5 +1,7 @@
 import { useWizard } from '../../wizard/wizard-context.ts';
+import { SuitableCakes } from '../frame/suitable-cakes.tsx';
 import { StepPage } from '../frame/step-page.tsx';
+import { CuttingFields } from './cutting-fields.tsx';
 import { FeedsMeter } from './feeds-meter.tsx';
 import { KindChoice } from './kind-choice.tsx';
 import { SheetFields } from './sheet-fields.tsx';
@@ -13,7 +15,9 @@ export function CakeStep() {
     <StepPage step="cake">
       <KindChoice />
       <FeedsMeter />
+      <SuitableCakes />
       {cake.kind === 'sheet' ? <SheetFields /> : <TierList />}
+      <CuttingFields />
     </StepPage>
   );
 }

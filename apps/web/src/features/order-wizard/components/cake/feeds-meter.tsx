@@ -10,7 +10,7 @@ export function FeedsMeter() {
   const over = fed - wanted;
   const verdict =
     over < 0
-      ? `${-over} short: ${design.cake.kind === 'sheet' ? 'take a larger sheet' : 'add a tier, take a larger one'}, or a cutting cake beside it.`
+      ? `${-over} short: ${design.cake.kind === 'sheet' ? 'take a larger sheet' : 'add a tier, take a larger one'}, or cutting cakes from the kitchen.`
       : over === 0
         ? 'Just enough.'
         : `${over} over.`;

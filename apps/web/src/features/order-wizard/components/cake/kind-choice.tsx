@@ -1,6 +1,8 @@
 import { useState } from 'react';
 import type { Proposal } from '#shared/contracts/estimates.ts';
+import type { Menu } from '#shared/contracts/menu.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
+import { cakeOfProposal } from '#shared/kitchen/propose-cakes.ts';
 import { portionsOfSheet } from '#shared/kitchen/sizes.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
 import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
@@ -33,7 +35,9 @@ export function KindChoice() {
     );
   }
 
-  const matching = proposals.find((it) => isProposal(cake, it.tiers));
+  const stacks = proposals.filter((it) => it.sheet === null);
+  const flat = proposals.find((it) => it.sheet !== null);
+  const matching = stacks.find((it) => isProposal(cake, it));
   const chosen = () => {
     if (cake.kind === 'sheet') return sheetRow;
     if (cake.tiers.length === 0) return null;
@@ -44,8 +48,13 @@ export function KindChoice() {
     setOwn(value === ownRow);
     if (value === sheetRow) {
       const size =
-        menu.sheetSizes.find((it) => it.id === cake.sheet?.sizeId) ?? smallestThatFeeds();
-      if (size !== undefined) change(takeSheet(values, size, inside));
+        menu.sheetSizes.find((it) => it.id === (cake.sheet?.sizeId ?? flat?.sheet?.sizeId)) ??
+        smallestThatFeeds();
+      if (size === undefined) return;
+      const { cake: sheet, look } = takeSheet(values, size, inside);
+      // Cutting cakes that went with a stack would feed too many beside a sheet.
+      const cuttingCakes = size.id === flat?.sheet?.sizeId ? flat.cuttingCakes : [];
+      change({ cake: { ...sheet, cuttingCakes }, look });
       return;
     }
     if (value === ownRow) {
@@ -53,8 +62,8 @@ export function KindChoice() {
       change(first === null ? { cake: { ...cake, kind: 'tiered' } } : addTier(values, first));
       return;
     }
-    const proposal = proposals.find((it) => it.id === value);
-    if (proposal !== undefined) change(takeProposal(values, proposal.tiers));
+    const proposal = stacks.find((it) => it.id === value);
+    if (proposal !== undefined) change(takeProposal(values, proposal));
   };
 
   function smallestThatFeeds() {
@@ -66,12 +75,16 @@ export function KindChoice() {
     );
   }
 
-  const rows: RadioRow<string>[] = proposals.map((it) => proposalRow(it));
+  const rows: RadioRow<string>[] = stacks.map((it) => proposalRow(it));
   if (menu.sheetSizes.length > 0) {
     rows.push({
       value: sheetRow,
       label: 'A sheet',
-      description: 'One flat cake cut in squares: the most cake for the money.',
+      description:
+        flat === undefined
+          ? 'One flat cake cut in squares: the most cake for the money.'
+          : `Flat, cut in squares: the most cake for the money. ${summariseCake(cakeOfProposal(flat, null), menu)}: ${flat.portions} portions`,
+      verdict: flat && <Price proposal={flat} menu={menu} />,
     });
   }
   rows.push({
@@ -81,8 +94,7 @@ export function KindChoice() {
   });
 
   function proposalRow(proposal: Proposal): RadioRow<string> {
-    const { studio } = menu;
-    const drawn = { kind: 'tiered' as const, tiers: proposal.tiers, sheet: null, coating: null };
+    const drawn = cakeOfProposal(proposal, null);
     return {
       value: proposal.id,
       label: summariseCake(drawn, menu),
@@ -92,11 +104,7 @@ export function KindChoice() {
           <CakeDrawing cake={drawn} look={null} menu={menu} size="small" />
         </span>
       ),
-      verdict: (
-        <span className="font-display text-lg tabular-nums">
-          {formatMoney(proposal.priceMinor, menu.priceBook.currency, studio.locale)}
-        </span>
-      ),
+      verdict: <Price proposal={proposal} menu={menu} />,
     };
   }
 
@@ -111,5 +119,13 @@ export function KindChoice() {
       value={chosen()}
       onValue={choose}
     />
+  );
+}
+
+function Price({ proposal, menu }: { readonly proposal: Proposal; readonly menu: Menu }) {
+  return (
+    <span className="font-display text-lg tabular-nums">
+      {formatMoney(proposal.priceMinor, menu.priceBook.currency, menu.studio.locale)}
+    </span>
   );
 }

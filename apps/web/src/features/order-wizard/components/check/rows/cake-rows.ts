@@ -1,4 +1,5 @@
 import type { Menu } from '#shared/contracts/menu.ts';
+import { cutWords } from '#shared/kitchen/chosen-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { countOf } from '#shared/kitchen/sentences.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
@@ -44,5 +45,10 @@ export function cakeRows(values: OrderForm, menu: Menu): CheckRow[] {
       field: `cake.tiers.${at}.spongeId`,
     };
   });
-  return [...rows, ...tiers.toReversed()];
+  const cutting = cake.cuttingCakes.map((it, at): CheckRow => ({
+    label: 'In the kitchen',
+    value: cutWords(it, menu),
+    field: `cake.cuttingCakes.${at}.count`,
+  }));
+  return [...rows, ...tiers.toReversed(), ...cutting];
 }
