@@ -62,6 +62,7 @@ export function staffOrderFixture(changes: Partial<StaffOrder> = {}): StaffOrder
     ],
     unread: 0,
     messages: [],
+    contentChanges: [],
     photos: [],
     events: [],
     mail: [],

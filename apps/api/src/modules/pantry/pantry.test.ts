@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { problem } from '#shared/contracts/common.ts';
+import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import { estimate as estimateView } from '#shared/contracts/estimates.ts';
 import {
   formula as formulaView,
@@ -384,7 +385,11 @@ describe('an ingredient', () => {
           draft: ingredientDraftOf(changes),
         }),
       );
-    const nuts = { allergen: 'tree-nuts', species: ['almond'], state: 'contains' } as const;
+    const nuts: AllergenEntry = {
+      allergen: 'tree-nuts',
+      species: ['almond'],
+      state: 'contains',
+    };
     expect(await issues({ allergens: [nuts, { ...nuts, state: 'unknown' }] })).toEqual([
       'draft.allergens.1: This one is there already.',
     ]);
