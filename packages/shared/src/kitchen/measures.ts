@@ -54,6 +54,7 @@ export function formatTemperature(celsius: number, lead: TemperatureLead): strin
  */
 const benchPairs: readonly (readonly [celsius: number, fahrenheit: number])[] = [
   [4, 40],
+  [27, 80],
   [71, 160],
   [115, 240],
 ];

@@ -7,6 +7,7 @@ import {
   stepResources,
 } from '#shared/contracts/pantry.ts';
 import { type PantryIndex, resolvePart } from '#shared/kitchen/formulas/pantry-index.ts';
+import { formatLine } from '#shared/kitchen/formulas/read-formula-text.ts';
 import { celsiusToFahrenheit, type TemperatureLead } from '#shared/kitchen/measures.ts';
 import { limitTime } from '../formulas/formula-words.ts';
 import { shelfText } from '../forms/read-kitchen.ts';
@@ -32,7 +33,8 @@ const stepRow = z.object({
   resource: z.enum(stepResources),
   /** Null where nothing is measured. */
   limit: z.nullable(z.object({ temperature: z.string(), time: z.string(), note: z.string() })),
-  syrup: z.string(),
+  /** Null where no syrup is boiled. */
+  syrup: z.nullable(z.string()),
 });
 export type StepRow = z.infer<typeof stepRow>;
 
@@ -98,7 +100,7 @@ export function blankStep(key: number, text = ''): StepRow {
     waitingMinutes: '0',
     resource: 'bench',
     limit: null,
-    syrup: '',
+    syrup: null,
   };
 }
 
@@ -128,7 +130,7 @@ export function formOfVersion(
     },
     lines: lines.map(({ part, grams, asTyped, step }, key) => ({
       key,
-      text: asTyped ?? plainLine(grams, resolvePart(index, part).name),
+      text: asTyped ?? formatLine(grams, resolvePart(index, part).name),
       step,
       stored: { part, grams },
       picked: null,
@@ -147,15 +149,10 @@ export function formOfVersion(
               time: step.critical.seconds === null ? '' : limitTime(step.critical.seconds),
               note: step.critical.note,
             },
-      syrup: step.syrupTargetC === null ? '' : degreesText(step.syrupTargetC, lead),
+      syrup: step.syrupTargetC === null ? null : degreesText(step.syrupTargetC, lead),
     })),
     nextKey: lines.length + steps.length,
   };
-}
-
-/** A line without a measure: "340 g Whole milk". */
-export function plainLine(grams: number, name: string): string {
-  return `${grams} g ${name}`;
 }
 
 /** One scale is enough to type in; a hundredth of a degree keeps what was kept. */

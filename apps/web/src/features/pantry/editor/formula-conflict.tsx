@@ -4,6 +4,7 @@ import { Button } from '#web/components/ui/button.tsx';
 import { DialogActions } from '#web/components/ui/dialog-actions.tsx';
 import { Dialog } from '#web/components/ui/dialog.tsx';
 import { ChangeList } from '../formulas/change-list.tsx';
+import { type House, compareWords } from '../house.ts';
 import type { Shelf } from '../shelf.ts';
 import { asVersion } from './editor-form.ts';
 
@@ -12,13 +13,16 @@ type Props = {
   readonly theirs: FormulaVersion;
   readonly mine: FormulaDraft;
   readonly shelf: Shelf;
+  readonly house: House;
   readonly onMine: () => void;
   readonly onTheirs: () => void;
   readonly onClose: () => void;
 };
 
 /** Somebody saved a version meanwhile: what each of the two did, and nothing lost either way. */
-export function FormulaConflict({ base, theirs, mine, shelf, onMine, onTheirs, onClose }: Props) {
+export function FormulaConflict(props: Props) {
+  const { base, theirs, mine, shelf, house, onMine, onTheirs, onClose } = props;
+  const words = compareWords(house);
   const by = theirs.createdBy === '' ? 'Somebody' : theirs.createdBy;
   return (
     <Dialog open wide onClose={onClose} title="Somebody changed this meanwhile">
@@ -27,12 +31,12 @@ export function FormulaConflict({ base, theirs, mine, shelf, onMine, onTheirs, o
           <h3>
             {by} saved version {theirs.n}
           </h3>
-          <ChangeList changes={compareVersions(base, theirs, shelf.index)} />
+          <ChangeList changes={compareVersions(base, theirs, shelf.index, words)} />
         </section>
         <section className="grid content-start gap-2">
           <h3>What you have written</h3>
           <ChangeList
-            changes={compareVersions(base, asVersion(mine, base.formulaId), shelf.index)}
+            changes={compareVersions(base, asVersion(mine, base.formulaId), shelf.index, words)}
           />
         </section>
       </div>

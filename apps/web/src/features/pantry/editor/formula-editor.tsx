@@ -22,7 +22,7 @@ import type { FieldProblem } from '#web/lib/forms.ts';
 import { ApiProblem } from '#web/lib/http.ts';
 import { useCreateFormula } from '../api/create-formula.ts';
 import { useSaveFormula } from '../api/save-formula.ts';
-import { kindWords } from '../formulas/formula-words.ts';
+import { gramsText, kindWords } from '../formulas/formula-words.ts';
 import { problemAt, serverProblems } from '../forms/check-draft.ts';
 import { KeptOffer } from '../forms/kept-offer.tsx';
 import { LeaveGuard } from '../forms/leave-guard.tsx';
@@ -100,7 +100,7 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
       formulaId: kept?.formula.id ?? null,
       against: null,
       percentOf: null,
-      lead,
+      house,
     });
     if (now.draft === null) return;
     const { name, kind } = form.fields;
@@ -132,6 +132,7 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
           theirs={theirs}
           mine={inspected.draft}
           shelf={shelf}
+          house={house}
           onMine={() => {
             setBase(theirs);
             setTheirs(null);
@@ -252,6 +253,9 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
           <Button type="submit" pending={save.isPending || create.isPending}>
             {base === null ? 'Save the formula' : `Save version ${base.n + 1}`}
           </Button>
+          <p className="font-display text-lg font-semibold tabular-nums lg:hidden">
+            {gramsText(inspected.seen.totals.outG, house.locale)}
+          </p>
           {unsaved && (
             <p className="text-sm text-slate">
               {draft.kept ? 'Not saved yet; kept on this device.' : 'Not saved yet.'}

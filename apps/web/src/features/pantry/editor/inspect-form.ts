@@ -11,10 +11,10 @@ import {
   type EvaluatedFormula,
   evaluateFormula,
 } from '#shared/kitchen/formulas/evaluate-formula.ts';
-import type { TemperatureLead } from '#shared/kitchen/measures.ts';
 import type { FieldProblem } from '#web/lib/forms.ts';
 import { checkDraft } from '../forms/check-draft.ts';
 import { percentBase } from '../formulas/percent-choice.ts';
+import { type House, compareWords } from '../house.ts';
 import type { Shelf } from '../shelf.ts';
 import { type EditorForm, asVersion } from './editor-form.ts';
 import { onTheForm, rowName, typedFormula } from './typed-formula.ts';
@@ -26,7 +26,7 @@ type Ground = {
   /** What the differences are told against. */
   readonly against: FormulaVersion | null;
   readonly percentOf: string | null;
-  readonly lead: TemperatureLead;
+  readonly house: Pick<House, 'temperatureLead' | 'labelRegion'>;
 };
 
 /** Everything that follows from what is typed. */
@@ -48,8 +48,8 @@ export type Inspected = {
 
 /** Reads, checks, evaluates and compares what is typed; quick enough for every keystroke. */
 export function inspectForm(form: EditorForm, ground: Ground): Inspected {
-  const { shelf, formulaId, against, percentOf, lead } = ground;
-  const typed = typedFormula(form, shelf.index, lead);
+  const { shelf, formulaId, against, percentOf, house } = ground;
+  const typed = typedFormula(form, shelf.index, house.temperatureLead);
   const checked = checkDraft(formulaDraft, { ...typed.rest, lines: typed.lines });
   const name = checkDraft(createFormula.shape.name, form.fields.name);
   const steps = checkDraft(z.array(formulaStep), typed.rest['steps']);
@@ -93,7 +93,12 @@ export function inspectForm(form: EditorForm, ground: Ground): Inspected {
     changes:
       against === null || draft === null
         ? null
-        : compareVersions(against, asVersion(draft, against.formulaId), shelf.index),
+        : compareVersions(
+            against,
+            asVersion(draft, against.formulaId),
+            shelf.index,
+            compareWords(house),
+          ),
   };
 }
 

@@ -74,7 +74,7 @@ export const LineList = memo(function LineList(props: Props) {
         {lines.map((row, at) => (
           <li
             key={row.key}
-            className="grid grid-cols-[1.5rem_minmax(0,1fr)_auto] items-center gap-x-2 gap-y-1 border-b border-seam py-2 sm:grid-cols-[1.75rem_minmax(0,1fr)_4rem_auto_auto]"
+            className="grid grid-cols-[1.25rem_minmax(0,1fr)_auto] items-center gap-x-2 gap-y-1 border-b border-seam py-2 sm:grid-cols-[1.75rem_minmax(0,1fr)_4rem_auto_auto]"
           >
             <span className="text-right text-sm text-slate tabular-nums" aria-hidden="true">
               {at + 1}
@@ -89,7 +89,7 @@ export const LineList = memo(function LineList(props: Props) {
               dispatch={dispatch}
               wishes={wishes}
             />
-            <span className="text-right text-sm text-slate tabular-nums sm:col-start-3 sm:row-start-1">
+            <span className="text-right text-sm text-slate tabular-nums max-sm:col-start-2 max-sm:row-start-3 max-sm:pr-2 sm:col-start-3 sm:row-start-1">
               {percents.has(row.key) && percentText(percents.get(row.key) ?? 0, locale)}
             </span>
           </li>

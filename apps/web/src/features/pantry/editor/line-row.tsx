@@ -72,7 +72,7 @@ export const LineFields = memo(function LineFields(props: Props) {
         aria-invalid={wrong !== undefined && wrong !== null ? true : undefined}
         aria-describedby={`${id}-read`}
         value={row.text}
-        className={controlClasses(wrong ?? undefined, 'min-w-0')}
+        className={controlClasses(wrong ?? undefined, 'min-w-0 max-sm:col-span-2')}
         onChange={(event) =>
           dispatch({
             type: 'text',
@@ -86,7 +86,7 @@ export const LineFields = memo(function LineFields(props: Props) {
       />
       <div
         id={`${id}-read`}
-        className="col-span-full col-start-2 grid min-w-0 gap-1 sm:row-start-2 sm:pl-3"
+        className="col-span-full col-start-2 row-start-2 grid min-w-0 gap-1 pl-3"
       >
         {reading.problem === null && reading.grams !== null && (
           <p className="text-sm text-slate">
@@ -97,12 +97,14 @@ export const LineFields = memo(function LineFields(props: Props) {
         <FieldError id={`${id}-error`} message={wrong ?? undefined} />
         <LineRemark row={row} reading={reading} dispatch={dispatch} />
       </div>
-      <RowButtons
-        what={`line ${at + 1}`}
-        onUp={() => wishes.onMove(row.key, at, -1)}
-        onDown={() => wishes.onMove(row.key, at, 1)}
-        onRemove={() => wishes.onRemove(row, at)}
-      />
+      <span className="max-sm:col-start-3 max-sm:row-start-3 sm:col-start-5 sm:row-start-1">
+        <RowButtons
+          what={`line ${at + 1}`}
+          onUp={() => wishes.onMove(row.key, at, -1)}
+          onDown={() => wishes.onMove(row.key, at, 1)}
+          onRemove={() => wishes.onRemove(row, at)}
+        />
+      </span>
       {steps > 1 && (
         <StepSelect
           at={at}

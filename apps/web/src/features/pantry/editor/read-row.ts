@@ -1,8 +1,8 @@
 import type { FormulaPart } from '#shared/contracts/pantry.ts';
 import { type PantryIndex, resolvePart } from '#shared/kitchen/formulas/pantry-index.ts';
-import { readFormulaLine } from '#shared/kitchen/formulas/read-formula-text.ts';
+import { formatLine, readFormulaLine } from '#shared/kitchen/formulas/read-formula-text.ts';
 import type { PartCandidate, ProofFinding } from '#shared/kitchen/formulas/typed-line.ts';
-import { type LineRow, plainLine } from './editor-form.ts';
+import type { LineRow } from './editor-form.ts';
 
 /** What a row is taken for. */
 export type RowReading = {
@@ -117,6 +117,6 @@ export function settledText(
   const grams = Math.round(take === 'measure' ? finding.measureG : finding.writtenG);
   if (take === 'measure') return `${finding.measure} ${what}, ${grams} g`;
   return finding.measureFor === null
-    ? plainLine(grams, what)
+    ? formatLine(grams, what)
     : `${finding.measureFor} ${what}, ${grams} g`;
 }

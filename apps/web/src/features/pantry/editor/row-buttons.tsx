@@ -11,7 +11,7 @@ type Props = {
 /** Up, down and away, for a row of a list. */
 export function RowButtons({ what, onUp, onDown, onRemove }: Props) {
   return (
-    <span className="flex shrink-0 max-sm:col-start-2 max-sm:row-start-3 max-sm:justify-self-end sm:col-start-5 sm:row-start-1">
+    <span className="flex shrink-0">
       <RowButton label={`Move ${what} up`} path="M3 9.5L8 4.5l5 5" onPress={onUp} />
       <RowButton label={`Move ${what} down`} path="M3 6.5l5 5 5-5" onPress={onDown} />
       <RowButton label={`Take ${what} away`} path="M4 4l8 8M12 4l-8 8" onPress={onRemove} />

@@ -53,11 +53,11 @@ function OneStep({ step, at, lead, problems, dispatch }: StepProps) {
     dispatch({ type: 'step', key: step.key, patch: change });
   return (
     <>
-      <div className="flex items-start gap-3">
-        <span className="mt-7 grid size-9 shrink-0 place-items-center rounded-action border-[1.5px] border-ink font-display font-semibold tabular-nums">
+      <div className="grid grid-cols-[auto_minmax(0,1fr)] items-center gap-x-3 gap-y-2 sm:grid-cols-[auto_minmax(0,1fr)_auto] sm:items-start">
+        <span className="grid sm:mt-7 size-9 shrink-0 place-items-center rounded-action border-[1.5px] border-ink font-display font-semibold tabular-nums">
           {at + 1}
         </span>
-        <div className="min-w-0 grow">
+        <div className="min-w-0 max-sm:col-span-2 max-sm:row-start-2">
           <TextArea
             label={`Step ${at + 1}`}
             name={name('text')}
@@ -67,7 +67,7 @@ function OneStep({ step, at, lead, problems, dispatch }: StepProps) {
             onChange={(event) => patch({ text: event.target.value.replaceAll('\n', ' ') })}
           />
         </div>
-        <span className="mt-7">
+        <span className="justify-self-end sm:mt-7">
           <RowButtons
             what={`step ${at + 1}`}
             onUp={() => dispatch({ type: 'move-step', key: step.key, by: -1 })}
@@ -113,17 +113,26 @@ function OneStep({ step, at, lead, problems, dispatch }: StepProps) {
               </option>
             ))}
           </Select>
+        </div>
+        <Checkbox
+          label="A syrup is boiled"
+          checked={step.syrup !== null}
+          onChange={(event) => patch({ syrup: event.target.checked ? '' : null })}
+        />
+        {step.syrup !== null && (
           <AmountField
-            label="Syrup boiled to"
-            optional
-            hint={bothScales(step.syrup, lead) ?? 'At sea level.'}
+            label="Boiled to, at sea level"
+            hint={
+              bothScales(step.syrup, lead) ??
+              '240 F, 115 C; the bench is told the mark at your altitude.'
+            }
             name={name('syrupTargetC')}
             inputMode="text"
             value={step.syrup}
             error={error('syrupTargetC')}
             onText={(syrup) => patch({ syrup })}
           />
-        </div>
+        )}
         <Checkbox
           label="The mix itself is measured, and logged"
           checked={step.limit !== null}

@@ -1,10 +1,11 @@
 import type { FormulaLine } from '#shared/contracts/pantry.ts';
 import type { PantryIndex } from '#shared/kitchen/formulas/pantry-index.ts';
+import { formatLine } from '#shared/kitchen/formulas/read-formula-text.ts';
 import type { TemperatureLead } from '#shared/kitchen/measures.ts';
 import type { FieldProblem } from '#web/lib/forms.ts';
 import { numberOf, ppmOf } from '../forms/read-amounts.ts';
 import { degreesOf, hoursOf, minutesOf, secondsOf } from '../forms/read-kitchen.ts';
-import { type EditorForm, type StepRow, plainLine } from './editor-form.ts';
+import type { EditorForm, StepRow } from './editor-form.ts';
 import { type RowReading, readRow } from './read-row.ts';
 
 /** The form read: what the contract is asked about, and which row each of its lines came from. */
@@ -50,7 +51,7 @@ export function typedFormula(
 /** The text is kept where it says more than the weight and the name do. */
 function keptText(text: string, { name, grams }: RowReading): string | null {
   const typed = text.trim();
-  return grams !== null && typed === plainLine(grams, name) ? null : typed;
+  return grams !== null && typed === formatLine(grams, name) ? null : typed;
 }
 
 function restOf({ fields, steps }: EditorForm, lead: TemperatureLead): TypedFormula['rest'] {
@@ -84,7 +85,8 @@ function stepOf(step: StepRow, lead: TemperatureLead) {
             seconds: secondsOf(step.limit.time),
             note: step.limit.note,
           },
-    syrupTargetC: degreesOf(step.syrup, lead),
+    // A syrup without its mark is asked for one: NaN is no temperature.
+    syrupTargetC: step.syrup === null ? null : (degreesOf(step.syrup, lead) ?? Number.NaN),
   };
 }
 

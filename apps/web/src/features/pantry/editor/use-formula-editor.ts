@@ -47,9 +47,9 @@ export function useFormulaEditor({ kept, from, shelf, house }: Options) {
         formulaId: kept?.formula.id ?? null,
         against: base ?? from,
         percentOf,
-        lead,
+        house,
       }),
-    [typed, shelf, kept, base, from, percentOf, lead],
+    [typed, shelf, kept, base, from, percentOf, house],
   );
   const choices = useMemo(
     () => percentChoices({ lines: [...typedFormula(typed, shelf.index, lead).lines] }, shelf.index),

@@ -24,15 +24,17 @@ type Props = {
   readonly version: FormulaVersion;
   readonly shelf: Shelf;
   readonly menu: Menu;
+  /** Grams asked for by the address: what another formula takes of this one. */
+  readonly makeG: string | null;
 };
 
 /** The formula as it is worked with: how much, what to weigh, what to do; printed for the bench. */
-export function FormulaBench({ formula, version, shelf, menu }: Props) {
+export function FormulaBench({ formula, version, shelf, menu, makeG }: Props) {
   const { pantry, index } = shelf;
   const { locale, temperatureLead, lengthLead } = menu.studio;
   const [asked, setAsked] = useState<MakeAsked>(() => ({
-    by: 'written',
-    weight: '',
+    by: makeG === null ? 'written' : 'weight',
+    weight: makeG === null ? '' : `${makeG} g`,
     tiers: '3',
     size: Math.max(
       0,

@@ -1,5 +1,8 @@
 import type { FormulaKind, FormulaStep, PartFormulas } from '#shared/contracts/pantry.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
+import { formatDay, formatTime } from '#shared/dates/format.ts';
+import { localAt } from '#shared/dates/local-time.ts';
+import type { House } from '../house.ts';
 
 export const kindWords: Readonly<Record<FormulaKind, string>> = {
   sponge: 'Sponge',
@@ -18,10 +21,20 @@ export const resourceWords: Readonly<Record<FormulaStep['resource'], string>> = 
 
 /** Hours as shelf lives are said: "36 h", "5 days", "2 days 12 h". */
 export function shelfLife(hours: number): string {
+  if (hours === 0) return 'not at all';
   const days = Math.floor(hours / 24);
   const rest = hours % 24;
   if (hours < 48) return `${hours} h`;
   return rest === 0 ? `${days} days` : `${days} days ${rest} h`;
+}
+
+/** The day a version was made: "11 November 2026, 10:05". */
+export function versionDate(
+  instant: string,
+  { zone, locale }: Pick<House, 'zone' | 'locale'>,
+): string {
+  const { date, minute } = localAt(new Date(instant), zone);
+  return `${formatDay(date, { locale, weekday: false, year: true })}, ${formatTime(minute)}`;
 }
 
 /** What a critical limit allows of time: "17 s", "40 min", "6 h". */

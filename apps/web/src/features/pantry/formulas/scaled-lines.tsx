@@ -22,8 +22,14 @@ export function ScaledLines({ scaled, percents, index, locale }: Props) {
       {scaled.lines.map((line) => (
         <li
           key={line.line}
-          className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-5 gap-y-0.5 border-b border-seam py-2.5 sm:grid-cols-[minmax(0,1fr)_8rem_7.5rem] print:grid-cols-[minmax(0,1fr)_8rem_7.5rem] print:py-1.5"
+          className="grid grid-cols-[6.5rem_minmax(0,1fr)] items-baseline gap-x-4 gap-y-0.5 border-b border-seam py-2.5 sm:grid-cols-[7rem_minmax(0,1fr)_9rem] print:grid-cols-[7rem_minmax(0,1fr)_9rem] print:py-1.5"
         >
+          <span className="text-right tabular-nums">
+            <span className="font-display text-xl font-semibold whitespace-nowrap">
+              {gramsText(line.roundedG, locale)}
+            </span>
+            <Drift line={line} locale={locale} />
+          </span>
           <span className="min-w-0">
             <PartName line={line} index={index} />
             {line.eggs !== null && (
@@ -32,16 +38,10 @@ export function ScaledLines({ scaled, percents, index, locale }: Props) {
               </span>
             )}
           </span>
-          <span className="text-sm text-slate tabular-nums max-sm:col-start-1 max-sm:row-start-2 sm:text-right print:row-start-auto">
+          <span className="text-sm text-slate tabular-nums empty:hidden max-sm:col-start-2 sm:text-right print:col-start-auto print:text-right">
             {percents === null
               ? householdOf(line)
               : percentText(percents.lines[line.line] ?? 0, locale)}
-          </span>
-          <span className="text-right tabular-nums max-sm:col-start-2 max-sm:row-start-1">
-            <span className="font-display text-lg font-semibold whitespace-nowrap">
-              {gramsText(line.roundedG, locale)}
-            </span>
-            <Drift line={line} locale={locale} />
           </span>
         </li>
       ))}
@@ -56,7 +56,8 @@ function householdOf(line: ScaledLine): string {
 
 type NameProps = { readonly line: ScaledLine; readonly index: PantryIndex };
 
-function PartName({ line: { part }, index }: NameProps) {
+function PartName({ line, index }: NameProps) {
+  const { part } = line;
   if (part.kind === 'missing') {
     return (
       <span className="inline-flex items-center gap-1.5 font-semibold text-berry">
@@ -76,7 +77,10 @@ function PartName({ line: { part }, index }: NameProps) {
     part.formula === null ? undefined : index.versions.get(part.formula.currentVersionId);
   return (
     <>
-      <Link to={paths.staffFormula(part.version.formulaId)} className="link">
+      <Link
+        to={`${paths.staffFormula(part.version.formulaId)}?make=${Math.ceil(line.roundedG)}${part.version.id === newest?.id ? '' : `&version=${part.version.n}`}`}
+        className="link"
+      >
         {part.name}
       </Link>
       <span className="text-sm text-slate">

@@ -2,14 +2,14 @@ import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import type { FormulaVersion } from '#shared/contracts/pantry.ts';
 import { compareVersions } from '#shared/kitchen/formulas/compare-versions.ts';
-import { instantWords } from '#web/components/order/order-times.ts';
 import { Section } from '#web/components/ui/section.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { paths } from '#web/config/paths.ts';
 import { classNames } from '#web/lib/class-names.ts';
-import type { House } from '../house.ts';
+import { type House, compareWords } from '../house.ts';
 import type { KeptFormula, Shelf } from '../shelf.ts';
 import { ChangeList } from './change-list.tsx';
+import { versionDate } from './formula-words.ts';
 
 type Props = {
   readonly kept: KeptFormula;
@@ -39,7 +39,7 @@ export function VersionHistory({ kept, shown, shelf, house }: Props) {
           >
             <span className="min-w-24 font-display font-semibold tabular-nums">Version {it.n}</span>
             <span className="min-w-0 grow text-sm text-slate">
-              {instantWords(it.createdAt, house.zone, house.locale)}
+              {versionDate(it.createdAt, house)}
               {it.createdBy !== '' && `, ${it.createdBy}`}
               {it.id === current.id && ', the one in use'}
             </span>
@@ -70,7 +70,9 @@ export function VersionHistory({ kept, shown, shelf, house }: Props) {
             <VersionSelect label="to" value={to} versions={versions} onValue={setTo} />
           </div>
           {before !== undefined && after !== undefined && (
-            <ChangeList changes={compareVersions(before, after, shelf.index)} />
+            <ChangeList
+              changes={compareVersions(before, after, shelf.index, compareWords(house))}
+            />
           )}
         </>
       )}

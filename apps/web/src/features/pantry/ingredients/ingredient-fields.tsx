@@ -60,7 +60,7 @@ export function IngredientFields(props: Props) {
 function OnTheShelf({ form, currency, problems, onForm }: Props) {
   return (
     <Section title="On the shelf">
-      <div className="grid gap-4 sm:grid-cols-2">
+      <div className="grid items-end gap-4 sm:grid-cols-2">
         <TextField
           label="Name"
           name="name"
@@ -143,7 +143,6 @@ function OnTheLabel({ form, today, readAgain, problems, onForm }: Props) {
       <div className="flex flex-wrap items-end gap-3">
         <TextField
           label="Label read on"
-          hint="Empty while nobody has: everything it does not name is then unknown."
           type="date"
           name="labelCheckedOn"
           max={today}
@@ -158,6 +157,9 @@ function OnTheLabel({ form, today, readAgain, problems, onForm }: Props) {
           </Button>
         )}
       </div>
+      <p className="measure -mt-2 text-sm text-slate">
+        Empty while nobody has: everything it does not name is then unknown.
+      </p>
       {readAgain && (
         <Notice tone="butter" live="polite" title="You changed what the label says">
           <p>Set the day it was read as well, so that others can tell how fresh this is.</p>

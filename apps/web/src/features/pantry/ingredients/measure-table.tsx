@@ -26,7 +26,7 @@ export function MeasureTable({ rows, problems, onRows }: Props) {
           {rows.map((row, at) => (
             <li
               key={row.key}
-              className="grid items-end gap-x-3 gap-y-2 py-3 sm:grid-cols-[8.5rem_minmax(0,1fr)_7rem_minmax(0,1.4fr)_auto]"
+              className="grid grid-cols-2 items-end gap-x-3 gap-y-2 py-3 sm:grid-cols-[8.5rem_minmax(0,1fr)_7rem_minmax(0,1.4fr)_auto]"
             >
               <Select
                 label="One"

@@ -3,7 +3,6 @@ import { useLocation, useParams, useSearchParams } from 'react-router-dom';
 import * as z from 'zod/mini';
 import type { Pantry } from '#shared/contracts/pantry.ts';
 import { evaluateFormula } from '#shared/kitchen/formulas/evaluate-formula.ts';
-import { instantWords } from '#web/components/order/order-times.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
@@ -20,7 +19,7 @@ import { TitleRow } from '#web/features/pantry/components/title-row.tsx';
 import { FormulaBench } from '#web/features/pantry/formulas/formula-bench.tsx';
 import { FormulaDab } from '#web/features/pantry/formulas/formula-dab.tsx';
 import { FormulaFacts } from '#web/features/pantry/formulas/formula-facts.tsx';
-import { kindWords } from '#web/features/pantry/formulas/formula-words.ts';
+import { kindWords, versionDate } from '#web/features/pantry/formulas/formula-words.ts';
 import { VersionHistory } from '#web/features/pantry/formulas/version-history.tsx';
 import { type KeptFormula, shelfOf } from '#web/features/pantry/shelf.ts';
 
@@ -69,7 +68,7 @@ function OneFormula({ kept, pantry }: Props) {
     [version, formula, shelf],
   );
   const archived = formula.archivedAt !== null;
-  const { zone, locale, name } = menu.studio;
+  const { name } = menu.studio;
   return (
     <>
       <BackLink to={paths.staffFormulas}>All formulas</BackLink>
@@ -82,7 +81,7 @@ function OneFormula({ kept, pantry }: Props) {
             </div>
             <p className="text-slate">
               {kindWords[formula.kind]}, version {version.n} of{' '}
-              {instantWords(version.createdAt, zone, locale)}
+              {versionDate(version.createdAt, menu.studio)}
               {version.createdBy !== '' && `, by ${version.createdBy}`}
               <span className="hidden print:inline">, {name}</span>
             </p>
@@ -133,14 +132,15 @@ function OneFormula({ kept, pantry }: Props) {
       <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_24rem] print:block">
         <div className="grid min-w-0 gap-10">
           <FormulaBench
-            key={version.id}
+            key={`bench ${version.id} ${params.get('make') ?? ''}`}
             formula={formula}
             version={version}
             shelf={shelf}
             menu={menu}
+            makeG={params.get('make')}
           />
           <VersionHistory
-            key={current.id}
+            key={`versions ${current.id}`}
             kept={kept}
             shown={version}
             shelf={shelf}
