@@ -8,7 +8,9 @@ import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import { Hold } from '#api/db/models/hold.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
+import { OrderItem } from '#api/db/models/order-item.ts';
 import { Order } from '#api/db/models/order.ts';
+import { Task } from '#api/db/models/task.ts';
 import { OutboxRow } from '#api/db/models/outbox-row.ts';
 import { hasPlace } from '#api/modules/plan/plan.queries.ts';
 import { AppError } from '#api/platform/app-error.ts';
@@ -153,6 +155,54 @@ describe('sending an order', () => {
       can: { withdraw: true, write: true, addPhotos: true, seeCalendarFile: false },
     });
     expect(view.pickup.startAt).toBe(`${date}T14:00:00.000Z`);
+  });
+
+  it('keeps cutting cakes as items of their own, and plans and prices them', async () => {
+    const cut = { sizeId: 'quarter', layers: 2, spongeId: 'lemon', fillingId: 'lemon-curd' };
+    const form = orderForm(date, {
+      day: { headCount: 60 },
+      cake: { tiers: [roundTier(8)], cuttingCakes: [{ ...cut, count: 2 }] },
+      extras: [{ extraId: 'candles', quantity: 1 }],
+      ...fromNewAddress(),
+    });
+    const guest = app.visitor();
+    const { code } = await placeOrder(guest, form);
+    const { design, offer } = orderView.parse((await guest.get(`/api/orders/${code}`)).body);
+    expect(design.cake).toEqual(form.cake);
+    expect(design.extras).toEqual(form.extras);
+    // A quarter sheet of 330 by 229 mm gives 6 by 4.
+    expect(offer.portions).toMatchObject({ fed: 25 + 48, perCuttingCake: [48] });
+    expect(offer.price.lines.filter((it) => it.kind === 'cutting-cake')).toHaveLength(1);
+    const order = await Order.findOne({ where: { code }, rejectOnEmpty: true });
+    const items = await OrderItem.findAll({
+      where: { revisionId: order.currentRevisionId },
+      order: [['position', 'ASC']],
+    });
+    expect(items.map(({ kind, quantity, sheetSizeId }) => [kind, quantity, sheetSizeId])).toEqual([
+      ['tiered', 1, null],
+      ['cutting', 2, 'quarter'],
+      ['extra', 1, null],
+    ]);
+    const tasks = await Task.findAll({ where: { orderId: order.id } });
+    expect(tasks.map(({ label }) => label)).toContain('Fill and crumb coat 2 cutting cakes');
+  });
+
+  it('takes a form of before there were cutting cakes, and refuses a sheet it does not bake', async () => {
+    const form = orderForm(date, fromNewAddress());
+    const { cuttingCakes: _none, ...cake } = form.cake;
+    const answer = await sendOrder(app.visitor(), { ...form, cake });
+    expect(answer.status).toBe(201);
+    const unknown = orderForm(date, {
+      cake: {
+        cuttingCakes: [
+          { sizeId: 'cartwheel', count: 1, layers: 2, spongeId: 'lemon', fillingId: null },
+        ],
+      },
+      ...fromNewAddress(),
+    });
+    const refusal = await sendOrder(app.visitor(), unknown);
+    expect(refusal.status).toBe(422);
+    expect(paths(refusal.body)).toContain('cake.cuttingCakes.0.sizeId');
   });
 
   it('keeps no key, and none in the outbox; the e-mailed one can be worked out again', async () => {
