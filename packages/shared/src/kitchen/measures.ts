@@ -65,6 +65,12 @@ export function benchFahrenheit(celsius: number): number {
   return pair === undefined ? celsiusToFahrenheit(celsius) : pair[1];
 }
 
+/** °C by the bench's own pairs, the other way round: its 160 °F is 71 °C and not 71.1. */
+export function benchCelsius(fahrenheit: number): number {
+  const pair = benchPairs.find(([, f]) => f === fahrenheit);
+  return pair === undefined ? fahrenheitToCelsius(fahrenheit) : pair[0];
+}
+
 /** As `formatTemperature`, with the bench's own pairs: 240 °F is 115 °C, 160 °F is 71 °C. */
 export function formatBenchTemperature(celsius: number, lead: TemperatureLead): string {
   return bothScales(Math.round(celsius), Math.round(benchFahrenheit(celsius)), lead);

@@ -8,7 +8,7 @@ import {
 } from '#shared/contracts/pantry.ts';
 import { type PantryIndex, resolvePart } from '#shared/kitchen/formulas/pantry-index.ts';
 import { formatLine } from '#shared/kitchen/formulas/read-formula-text.ts';
-import { celsiusToFahrenheit, type TemperatureLead } from '#shared/kitchen/measures.ts';
+import { benchFahrenheit, type TemperatureLead } from '#shared/kitchen/measures.ts';
 import { limitTime } from '../formulas/formula-words.ts';
 import { shelfText } from '../forms/read-kitchen.ts';
 import { ppmText } from '../forms/read-amounts.ts';
@@ -157,7 +157,7 @@ export function formOfVersion(
 
 /** One scale is enough to type in; a hundredth of a degree keeps what was kept. */
 function degreesText(celsius: number, lead: TemperatureLead): string {
-  const value = lead === 'F' ? celsiusToFahrenheit(celsius) : celsius;
+  const value = lead === 'F' ? benchFahrenheit(celsius) : celsius;
   return `${Math.round(value * 100) / 100} °${lead}`;
 }
 

@@ -79,7 +79,7 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
   };
   const onRefused = (error: unknown) => {
     const { keys } = typedFormula(form, shelf.index, lead);
-    const placed = onTheForm(serverProblems(error), keys);
+    const placed = onTheForm(serverProblems(error), form, keys);
     setRefused(placed);
     if (error instanceof ApiProblem && error.code === 'changed-meanwhile') {
       const current = formulaVersion.safeParse(error.facts['current']);

@@ -17,7 +17,7 @@ import { percentBase } from '../formulas/percent-choice.ts';
 import { type House, compareWords } from '../house.ts';
 import type { Shelf } from '../shelf.ts';
 import { type EditorForm, asVersion } from './editor-form.ts';
-import { onTheForm, rowName, typedFormula } from './typed-formula.ts';
+import { onTheForm, typedFormula } from './typed-formula.ts';
 
 type Ground = {
   readonly shelf: Shelf;
@@ -69,15 +69,19 @@ export function inspectForm(form: EditorForm, ground: Ground): Inspected {
     },
     shelf.index,
   );
-  const faults = seen.problems.map(({ line, message }) => {
-    const key = line === null ? undefined : typed.keys[line];
-    return { name: key === undefined ? 'lines' : rowName(key), message };
-  });
+  const faults = onTheForm(
+    seen.problems.map(({ line, message }) => ({
+      name: line === null ? 'lines' : `lines.${line}`,
+      message,
+    })),
+    form,
+    typed.keys,
+  );
   const problems = once([
     ...(name.ok ? [] : [{ name: 'name', message: name.problems[0]?.message ?? '' }]),
     ...typed.unread,
     ...faults,
-    ...(checked.ok ? [] : onTheForm(checked.problems, typed.keys)),
+    ...(checked.ok ? [] : onTheForm(checked.problems, form, typed.keys)),
   ]);
   const draft = problems.length === 0 && checked.ok ? checked.value : null;
   return {

@@ -55,7 +55,7 @@ export const LiveAside = memo(function LiveAside(props: Props) {
             unread === 1 ? 'One line is not counted yet' : `${unread} lines are not counted yet`
           }
         >
-          <p className="text-sm">It is kept as you typed it and marked where it stands.</p>
+          <p className="text-sm">Kept as typed, and marked in the list.</p>
         </Notice>
       )}
       <Cautions seen={seen} shelf={shelf} />

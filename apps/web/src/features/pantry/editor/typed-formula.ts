@@ -90,14 +90,20 @@ function stepOf(step: StepRow, lead: TemperatureLead) {
   };
 }
 
-/** Names of the contract's fields as the form has them: lines by their row's key. */
+/**
+ * Problems of the contract's fields as the form has them: lines by their row's key, and counted
+ * with the rows that could not be read.
+ */
 export function onTheForm(
   problems: readonly FieldProblem[],
+  form: EditorForm,
   keys: readonly number[],
 ): readonly FieldProblem[] {
   return problems.map(({ name, message }) => {
     const line = /^lines\.(\d+)/.exec(name)?.[1];
     const key = line === undefined ? undefined : keys[Number(line)];
-    return key === undefined ? { name, message } : { name: rowName(key), message };
+    if (key === undefined) return { name, message };
+    const at = form.lines.findIndex((it) => it.key === key);
+    return { name: rowName(key), message: message.replace(/^Line \d+/, `Line ${at + 1}`) };
   });
 }

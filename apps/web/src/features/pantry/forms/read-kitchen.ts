@@ -1,8 +1,4 @@
-import {
-  fahrenheitToCelsius,
-  parseDuration,
-  type TemperatureLead,
-} from '#shared/kitchen/measures.ts';
+import { benchCelsius, parseDuration, type TemperatureLead } from '#shared/kitchen/measures.ts';
 import { readNumber } from '#web/lib/read-number.ts';
 
 /**
@@ -15,7 +11,7 @@ export function degreesOf(text: string, lead: TemperatureLead): number | null {
   const letters = text.replaceAll(/[^a-z]/gi, '').toUpperCase();
   const scale = letters === '' ? lead : letters.charAt(0);
   if (value === null || (scale !== 'F' && scale !== 'C')) return Number.NaN;
-  const celsius = scale === 'F' ? fahrenheitToCelsius(value) : value;
+  const celsius = scale === 'F' ? benchCelsius(value) : value;
   return Math.round(celsius * 100) / 100;
 }
 
