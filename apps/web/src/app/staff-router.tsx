@@ -39,8 +39,20 @@ const IngredientsPage = lazyPage(
 const IngredientPage = lazyPage(
   async () => (await import('#web/routes/staff/pantry/ingredient-page.tsx')).IngredientPage,
 );
+const EggsPage = lazyPage(
+  async () => (await import('#web/routes/staff/pantry/eggs-page.tsx')).EggsPage,
+);
+const ShoppingPage = lazyPage(
+  async () => (await import('#web/routes/staff/pantry/shopping-page.tsx')).ShoppingPage,
+);
+const KitchenSheetPage = lazyPage(
+  async () => (await import('#web/routes/staff/kitchen-sheet-page.tsx')).KitchenSheetPage,
+);
 const PricesPage = lazyPage(
   async () => (await import('#web/routes/staff/prices-page.tsx')).PricesPage,
+);
+const AllergiesPage = lazyPage(
+  async () => (await import('#web/routes/staff/allergies-page.tsx')).AllergiesPage,
 );
 const MePage = lazyPage(async () => (await import('#web/routes/staff/me-page.tsx')).MePage);
 
@@ -53,6 +65,7 @@ export function StaffRouter() {
         <Route path="calendar" element={<CalendarPage />} />
         <Route path="orders" element={<OrdersPage />} />
         <Route path="orders/:number" element={<StaffOrderPage />} />
+        <Route path="orders/:number/kitchen" element={<KitchenSheetPage />} />
         <Route path="mail/:id" element={<SentMailPage />} />
         <Route path="pantry" element={<PantryLayout />}>
           <Route index element={<Navigate to={paths.staffFormulas} replace />} />
@@ -63,10 +76,13 @@ export function StaffRouter() {
           <Route path="ingredients" element={<IngredientsPage />} />
           <Route path="ingredients/new" element={<IngredientPage />} />
           <Route path="ingredients/:id" element={<IngredientPage />} />
+          <Route path="eggs" element={<EggsPage />} />
+          <Route path="shopping" element={<ShoppingPage />} />
         </Route>
         <Route path="studio" element={<StudioLayout />}>
           <Route index element={<PeoplePage />} />
           <Route path="prices" element={<PricesPage />} />
+          <Route path="allergies" element={<AllergiesPage />} />
         </Route>
         <Route path="me" element={<MePage />} />
         <Route path="*" element={<NotFoundPage />} />

@@ -8,6 +8,7 @@ import { SubPlaces } from './sub-places.tsx';
 const places = [
   { to: paths.staffPeople, name: 'People', end: true },
   { to: paths.staffPrices, name: 'Prices' },
+  { to: paths.staffAllergies, name: 'Allergies' },
 ] as const;
 
 /** The Studio's own places, above each of its pages. */

@@ -39,6 +39,7 @@ export const paths = {
   staff: '/staff',
   staffOrders: '/staff/orders',
   staffOrder: (number: number) => `/staff/orders/${number}`,
+  staffKitchenSheet: (number: number) => `/staff/orders/${number}/kitchen`,
   staffCalendar: '/staff/calendar',
   staffCalendarAt: (view: CalendarViewName, date: string) =>
     `/staff/calendar?view=${view}&date=${date}`,
@@ -56,6 +57,7 @@ export const paths = {
   staffIngredientNew: '/staff/pantry/ingredients/new',
   staffEggs: '/staff/pantry/eggs',
   staffShopping: '/staff/pantry/shopping',
+  staffAllergies: '/staff/studio/allergies',
   staffMe: '/staff/me',
   staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,
 } as const;

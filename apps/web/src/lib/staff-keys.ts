@@ -8,7 +8,10 @@ export const staffKeys = {
   mail: ['staff', 'mail'],
   people: ['staff', 'people'],
   prices: ['staff', 'prices'],
+  allergyTable: ['staff', 'allergy-table'],
   pantry: ['staff', 'pantry'],
+  eggs: ['staff', 'pantry', 'eggs'],
+  shopping: ['staff', 'pantry', 'shopping'],
 } as const;
 
 /** After anything done to an order: its page, the list and the calendar are asked for again. */

@@ -3,7 +3,7 @@ import type { Contents, Filling, Sponge } from '#shared/contracts/menu.ts';
 import type { AdviceLevel } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { detailOf, fineness, finestOn } from './detail.ts';
-import { byLevel, coatLimitC } from './heat.ts';
+import { coatLimitC } from './heat.ts';
 import type { WayOut } from './note.ts';
 import type { Part } from './parts.ts';
 import { coatingName } from './resolve-design.ts';
@@ -247,10 +247,4 @@ function remade(
     );
   };
   return withCoat(changed, badCoat, coat);
-}
-
-/** The sharper of how a coat and a filling fare on the day, to tell whole cakes apart. */
-export function fareOfWhole(coat: RankedCoat, filling: Filling, situation: Situation): AdviceLevel {
-  const inside = fareOfFilling(filling, situation);
-  return byLevel(coat.heat, inside) >= 0 ? coat.heat : inside;
 }

@@ -1,4 +1,6 @@
+import type { Advice } from '#shared/contracts/estimates.ts';
 import type { CalendarView } from '#shared/contracts/staff.ts';
+import { isAboutGuests } from '#shared/kitchen/about-guests.ts';
 import { canMove } from '#api/modules/orders/change-order-status.command.ts';
 import { pickupOf } from '#api/modules/orders/pickup.queries.ts';
 import { mayStaffDo } from '#api/modules/staff-orders/may-staff.queries.ts';
@@ -31,7 +33,7 @@ export function presentCalendar(calendar: Calendar, actor: Actor): CalendarView 
       customer,
       summary,
       pickup: pickupOf(order, revision),
-      advice,
+      advice: overviewOf(advice, actor),
       fits,
       totalMinor: revision.totalMinor,
       currency: revision.currency,
@@ -45,4 +47,16 @@ export function presentCalendar(calendar: Calendar, actor: Actor): CalendarView 
     })),
     can: { blockDays: mayStaffDo(actor, 'block-days') },
   };
+}
+
+/**
+ * The calendar hangs where everybody passes: whoever does not settle what guests told reads only
+ * that there is something.
+ */
+function overviewOf(advice: Advice | null, actor: Actor): Advice | null {
+  if (advice === null || !isAboutGuests(advice) || mayStaffDo(actor, 'answer-allergy')) {
+    return advice;
+  }
+  const sentence = 'Something about who will eat it is to be settled first.';
+  return { ...advice, about: 'guests', sentence, plain: sentence, instead: '', ways: [] };
 }

@@ -11,7 +11,9 @@ export const adviceTones: Readonly<Record<Advice['level'], Tone>> = {
 const rank: Readonly<Record<Advice['level'], number>> = { stop: 0, care: 1, ok: 2 };
 
 /** The gravest first. */
-export function byGravity(advice: readonly Advice[]): readonly Advice[] {
+export function byGravity<Told extends Pick<Advice, 'level'>>(
+  advice: readonly Told[],
+): readonly Told[] {
   return advice.toSorted((a, b) => rank[a.level] - rank[b.level]);
 }
 

@@ -1,6 +1,6 @@
 import type { Setting } from '#shared/contracts/design.ts';
 import type { StudioCard } from '#shared/contracts/menu.ts';
-import { formatDuration } from '#shared/dates/format.ts';
+import { formatDuration, formatTime } from '#shared/dates/format.ts';
 import { formatTemperature } from '#shared/kitchen/measures.ts';
 
 export const placeWords = {
@@ -18,5 +18,6 @@ export function settingWords(setting: Setting, studio: StudioCard): string {
       : `up to ${formatTemperature(setting.warmestC, studio.temperatureLead)}`,
     `${formatDuration(setting.minutesOut)} out before cutting`,
     `${formatDuration(setting.driveMinutes)} on the road`,
+    ...(setting.servedAt === null ? [] : [`cut at ${formatTime(setting.servedAt)}`]),
   ].join(', ');
 }

@@ -33,12 +33,20 @@ const order: OrderView = {
   agreedPrice: null,
   orderedBy: { name: 'Tess Marchetti', email: 'tess@example.com', phone: '' },
   collector: null,
+  contentChanges: [],
   photos: [],
   messages: [],
+  lifted: [],
   createdAt: '2027-05-01T14:12:00.000Z',
   otherDates: [],
   showPhotos: false,
-  can: { withdraw: true, write: true, addPhotos: false, seeCalendarFile: false },
+  can: {
+    withdraw: true,
+    write: true,
+    addPhotos: false,
+    seeCalendarFile: false,
+    acceptLifted: false,
+  },
 };
 
 const problem = (status: number, code: string) =>
@@ -129,5 +137,43 @@ describe('MyOrderPage', () => {
     await waitFor(() =>
       expect(screen.getByLabelText('Write to the studio')).toHaveValue('May we have candles?'),
     );
+  });
+
+  it('shows why a stop was lifted beside the stop, and takes it as accepted once it was read', async () => {
+    const lifted = {
+      id: 'l1',
+      sentence: 'Egg is in Vanilla sponge; one guest is allergic to it.',
+      reason: 'She brings her own dessert.',
+      by: 'Ida Thorne',
+      at: '2027-05-02T14:00:00.000Z',
+      acceptedAt: null,
+    };
+    const waiting: OrderView = {
+      ...order,
+      lifted: [lifted],
+      can: { ...order.can, acceptLifted: true },
+    };
+    const sent: unknown[] = [];
+    server.use(
+      http.get('*/api/orders/K7Q2M9XD', () => HttpResponse.json(waiting)),
+      http.post('*/api/orders/K7Q2M9XD/accept-lifted-stop', async ({ request }) => {
+        sent.push(await request.json());
+        return HttpResponse.json({
+          ...order,
+          rowVersion: 2,
+          lifted: [{ ...lifted, acceptedAt: '2027-05-03T14:00:00.000Z' }],
+        });
+      }),
+    );
+    const { user } = open('/orders/K7Q2M9XD');
+    const block = await screen.findByRole('region', { name: 'Please read this before we confirm' });
+    expect(block).toHaveTextContent(`${lifted.sentence}${lifted.reason}`);
+    const press = screen.getByRole('button', { name: 'I accept this' });
+    await user.click(press);
+    expect(screen.getByText('Tick this once you have read both.')).toBeVisible();
+    await user.click(screen.getByRole('checkbox', { name: /I have read/ }));
+    await user.click(press);
+    expect(await screen.findByText(/You read and accepted it/)).toBeVisible();
+    expect(sent).toEqual([{ rowVersion: 1, liftedStopId: 'l1' }]);
   });
 });

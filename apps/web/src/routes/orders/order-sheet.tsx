@@ -3,6 +3,9 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { OrderView } from '#shared/contracts/orders.ts';
 import { formatDay } from '#shared/dates/format.ts';
 import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
+import { CuttingPlan } from '#web/components/cutting-plan/cutting-plan.tsx';
+import { CarriedWeight } from '#web/components/order/carried-weight.tsx';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
 import { PageTitle } from '#web/components/ui/page-title.tsx';
@@ -13,6 +16,8 @@ import { paths } from '#web/config/paths.ts';
 import { AddPhoto } from '#web/features/my-order/components/add-photo.tsx';
 import { AdviceList } from '#web/features/my-order/components/advice-list.tsx';
 import { ChosenList } from '#web/features/my-order/components/chosen-list.tsx';
+import { LiftedStops } from '#web/features/my-order/components/lifted-stops.tsx';
+import { ContentChanges } from '#web/features/my-order/components/content-changes.tsx';
 import { HoldNotice } from '#web/features/my-order/components/hold-notice.tsx';
 import { pickupWords } from '#web/components/order/order-times.ts';
 import { MadeWith } from '#web/components/order/made-with.tsx';
@@ -31,7 +36,12 @@ export function OrderSheet({ order, menu }: Props) {
   const { locale } = studio;
   const reached = stageIndex(order.stage);
   // What holds a cake up is no warning, but has to come out before it is eaten.
-  const warned = order.offer.advice.filter((it) => it.level !== 'ok' || it.code === 'supports');
+  const warned = order.offer.advice.filter(
+    (it) =>
+      (it.level !== 'ok' || it.code === 'supports') &&
+      // What was lifted stands above, with its reason.
+      !order.lifted.some((lifted) => lifted.sentence === it.sentence),
+  );
   const price = order.agreedPrice ?? order.offer.price;
   return (
     <div className="page grid gap-x-12 gap-y-8 py-8 lg:grid-cols-[minmax(0,5fr)_minmax(0,6fr)]">
@@ -42,6 +52,12 @@ export function OrderSheet({ order, menu }: Props) {
         <PageTitle title={orderHeadings[order.status]} />
         <Collect order={order} menu={menu} />
       </header>
+      {order.ending === null && <ContentChanges order={order} studio={studio} />}
+      {order.lifted.length > 0 && order.ending === null && (
+        <div className="lg:col-span-2">
+          <LiftedStops order={order} studio={studio} />
+        </div>
+      )}
 
       <div className="grid content-start gap-5">
         {reached >= 0 && <StageRuler reached={reached} />}
@@ -89,6 +105,14 @@ export function OrderSheet({ order, menu }: Props) {
                 <AdviceList advice={warned} agreed={order.agreedPrice !== null} />
               )}
             </Section>
+            {order.design.cake !== null && (
+              <Section title="Carrying and cutting it">
+                <CarriedWeight estimate={order.offer} cake={order.design.cake} menu={menu} />
+                <Fold label={`How to cut it into ${order.offer.portions.fed} portions`}>
+                  <CuttingPlan design={order.design} menu={menu} />
+                </Fold>
+              </Section>
+            )}
             <Section title="Made with">
               <MadeWith
                 offer={order.offer}

@@ -218,7 +218,7 @@ describe('what waits', () => {
     await user.click(await screen.findByRole('button', { name: /^Confirm ?No\. 2431/ }));
     expect(await screen.findByRole('dialog', { name: 'Confirm No. 2431' })).toBeVisible();
     expect(screen.queryByRole('button', { name: /^Confirm ?No\. 2432/ })).toBeNull();
-    expect(screen.getByText(eggStop.sentence)).toBeInTheDocument();
+    expect(screen.getByText(eggStop.plain)).toBeInTheDocument();
     expect(screen.getByText('Open and settle')).toHaveAttribute(
       'href',
       '/staff/orders/2432#settle',

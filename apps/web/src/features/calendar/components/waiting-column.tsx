@@ -3,6 +3,7 @@ import type { WaitingRequest } from '#shared/contracts/staff.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { AdviceNote } from '#web/components/order/advice-note.tsx';
+import { plainly } from '#web/components/order/plainly.ts';
 import { FitLine } from '#web/components/order/fit-line.tsx';
 import { Button } from '#web/components/ui/button.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
@@ -62,7 +63,9 @@ function Request({ request, locale, onAct }: RequestProps) {
           {formatMoney(request.totalMinor, request.currency, locale)}
         </span>
       </p>
-      {advice !== null && advice.level !== 'ok' && <AdviceNote advice={advice} small />}
+      {advice !== null && advice.level !== 'ok' && (
+        <AdviceNote advice={{ ...plainly(advice), instead: '' }} small />
+      )}
       <FitLine fits={fits} />
       <div className="flex flex-wrap gap-2 pt-1">
         {confirms && <Button onClick={() => onAct(number, 'confirm')}>Confirm{whose}</Button>}

@@ -1,17 +1,10 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { OrderView } from '#shared/contracts/orders.ts';
-import { formatDuration } from '#shared/dates/format.ts';
 import { allergenName, speciesName } from '#shared/kitchen/allergen-names.ts';
 import { chosenRows } from '#shared/kitchen/chosen-words.ts';
-import { formatTemperature } from '#shared/kitchen/measures.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
+import { settingWords } from '#web/components/order/setting-words.ts';
 import { DataList, type DataRow } from '#web/components/ui/data-list.tsx';
-
-const places = {
-  indoors: 'Indoors',
-  shade: 'Outside, in shade',
-  sun: 'Outside, in the sun',
-} as const;
 
 /** What was asked for, to be read over beside the drawing. */
 export function ChosenList({ order, menu }: { readonly order: OrderView; readonly menu: Menu }) {
@@ -45,14 +38,7 @@ export function ChosenList({ order, menu }: { readonly order: OrderView; readonl
       : {
           key: 'setting',
           label: 'Where it stands',
-          value: [
-            places[setting.place],
-            setting.warmestC === null
-              ? 'warmth not known'
-              : `up to ${formatTemperature(setting.warmestC, menu.studio.temperatureLead)}`,
-            `${formatDuration(setting.minutesOut)} out before cutting`,
-            `${formatDuration(setting.driveMinutes)} on the road`,
-          ].join(', '),
+          value: settingWords(setting, menu.studio),
         },
     ...chosenRows(order.design, menu).map((it) => ({ key: it.label, ...it })),
     look === null || look.note === ''

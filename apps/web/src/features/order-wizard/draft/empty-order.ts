@@ -20,7 +20,7 @@ export function emptyOrder(): OrderForm {
       windowStart: null,
     },
     cake: { kind: 'tiered', tiers: [], sheet: null, coating: null, cuttingCakes: [] },
-    setting: { place: 'indoors', warmestC: null, minutesOut: 60, driveMinutes: 20 },
+    setting: { place: 'indoors', warmestC: null, minutesOut: 60, driveMinutes: 20, servedAt: null },
     look: { palette: [], words: [], decorations: [], note: '' },
     extras: [],
     photos: [],

@@ -17,6 +17,7 @@ const unreadable: Readonly<Record<string, string>> = {
   'setting.warmestC': 'Write a temperature like 77 °F or 25 °C, or choose “I don’t know”.',
   'setting.minutesOut': 'Write a time like 45 min or 1 h 30 min.',
   'setting.driveMinutes': 'Write a time like 25 min, or 0 if it is next door.',
+  'setting.servedAt': 'Write a time like 16:00 or 4 pm, or leave it empty.',
   'look.decorations.*.quantity': 'Write how many, as a whole number.',
   'extras.*.quantity': 'Write how many, as a whole number.',
   'cake.tiers.*.heightMm': 'Choose how high this tier is.',

@@ -3,6 +3,7 @@ import type { Design } from '#shared/contracts/design.ts';
 import type { Estimate, EstimateRequest } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
+import type { OrderForm } from '../draft/empty-order.ts';
 
 type Evaluate = (request: EstimateRequest, menu: Menu, today: string) => Estimate;
 
@@ -20,7 +21,7 @@ const loadRules = () => import('#shared/kitchen/evaluate-design.ts');
 /** The estimate of the design, worked out in the browser as the customer chooses. */
 export function useEstimate(
   design: Design | null,
-  date: LocalDate | null,
+  { date, windowStart }: Pick<OrderForm['day'], 'date' | 'windowStart'>,
   today: LocalDate,
   menu: Menu,
   wanted: boolean,
@@ -50,12 +51,12 @@ export function useEstimate(
   const estimate = useMemo(() => {
     if (evaluate === null || unhurried === null || !wanted) return null;
     try {
-      return evaluate.run({ design: unhurried, date }, menu, today);
+      return evaluate.run({ design: unhurried, date, collectAt: windowStart }, menu, today);
     } catch {
       // The menu changed under the draft; it is fitted to the new one in the same moment.
       return null;
     }
-  }, [evaluate, unhurried, date, menu, today, wanted]);
+  }, [evaluate, unhurried, date, windowStart, menu, today, wanted]);
 
   return { estimate, failed, retry };
 }

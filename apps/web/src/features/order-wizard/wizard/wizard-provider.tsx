@@ -205,7 +205,7 @@ export function WizardProvider({ menu, customer, children }: Props) {
 
   const design = useStable(useMemo(() => designOf(values, aside.reached), [values, aside.reached]));
   const wanted = aside.reached !== 'day';
-  const running = useEstimate(design, values.day.date, today, menu, wanted);
+  const running = useEstimate(design, values.day, today, menu, wanted);
 
   const wizard = useMemo<Wizard>(
     () => ({

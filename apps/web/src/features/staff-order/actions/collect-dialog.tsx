@@ -11,6 +11,7 @@ import { useToast } from '#web/components/ui/toast.tsx';
 import { listFieldProblems } from '#web/lib/forms.ts';
 import { useContractForm } from '#web/lib/use-contract-form.ts';
 import { useCollectOrder } from '../api/collect-order.ts';
+import { SayAtHandover } from '../components/say-at-handover.tsx';
 import { PhotoChoice } from '../components/photo-choice.tsx';
 import { ActFailure } from './act-failure.tsx';
 import type { ActProps } from './act-props.ts';
@@ -18,7 +19,7 @@ import type { ActProps } from './act-props.ts';
 const collectForm = z.omit(collectOrder, { rowVersion: true, photoId: true });
 
 /** The handover: who took it, in what condition, with a photo if there is one. */
-export function CollectDialog({ order, onDone, onClose }: ActProps) {
+export function CollectDialog({ order, menu, onDone, onClose }: ActProps) {
   const expected =
     order.contacts.find((it) => it.as === 'collects')?.name ??
     order.contacts.find((it) => it.as === 'ordered')?.name ??
@@ -49,6 +50,7 @@ export function CollectDialog({ order, onDone, onClose }: ActProps) {
     >
       <FormErrorSummary problems={listFieldProblems(errors)} attempt={submitCount} />
       <ActFailure error={failure} />
+      <SayAtHandover order={order} menu={menu} />
       <TextField
         {...form.register('collectedBy')}
         label="Who takes it"

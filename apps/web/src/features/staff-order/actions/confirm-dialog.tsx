@@ -1,7 +1,9 @@
 import { useId, useState } from 'react';
 import { Link } from 'react-router-dom';
+import type { Advice } from '#shared/contracts/estimates.ts';
 import { FitLine } from '#web/components/order/fit-line.tsx';
 import { AdviceNote } from '#web/components/order/advice-note.tsx';
+import { plainly } from '#web/components/order/plainly.ts';
 import { pickupWords } from '#web/components/order/order-times.ts';
 import { PriceList } from '#web/components/order/price-list.tsx';
 import { statusWords } from '#web/components/order/status-mark.tsx';
@@ -36,12 +38,14 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
   // Once it is under way the order itself says no more confirming; that is no news.
   const pressed = confirm.isPending || confirm.isSuccess;
   const blocked = !pressed && (blockers.length > 0 || !order.can.confirm);
-  // A stop that was lifted stays one to have in sight.
-  const lifted = order.estimate.advice.filter(
+  // A stop that was lifted, or answered, stays one to have in sight.
+  const settled = order.estimate.advice.filter(
     (it) =>
       it.level === 'stop' &&
       !blockers.some((other) => other.code === it.code && other.about === it.about),
   );
+  const reasonFor = (it: Advice) =>
+    order.lifted.find((other) => other.code === it.code && other.about === it.about)?.reason ?? '';
   const noteWaits = note.trim() !== shownNote;
 
   return (
@@ -69,8 +73,11 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
               </p>
             </Notice>
           )}
-          {lifted.map((it) => (
-            <AdviceNote key={`${it.code} ${it.about}`} advice={{ ...it, instead: '' }} />
+          {settled.map((it) => (
+            <AdviceNote
+              key={`${it.code} ${it.about}`}
+              advice={{ ...plainly(it), instead: reasonFor(it) }}
+            />
           ))}
           <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
         </div>
@@ -154,7 +161,15 @@ function Blocked({ order, blockers, onClose }: BlockedProps) {
       <ul className="grid gap-3">
         {blockers.map((it) => (
           <li key={`${it.code} ${it.about}`}>
-            <AdviceNote advice={it} />
+            <AdviceNote
+              advice={{
+                ...plainly(it),
+                instead:
+                  it.waitsFor === 'customer'
+                    ? 'You have given your reason; the customer has still to read and accept it.'
+                    : '',
+              }}
+            />
           </li>
         ))}
       </ul>

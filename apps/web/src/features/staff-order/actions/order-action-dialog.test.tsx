@@ -79,7 +79,7 @@ describe('confirming', () => {
     looks(confirmationFixture({ blockers: [eggStop] }));
     open('confirm');
     const blocked = await screen.findByRole('alert');
-    expect(within(blocked).getByText(eggStop.sentence)).toBeVisible();
+    expect(within(blocked).getByText(eggStop.plain)).toBeVisible();
     expect(within(blocked).getByRole('link')).toHaveAttribute('href', '/staff/orders/2431#settle');
     expect(screen.queryByRole('button', { name: 'Confirm and send it' })).toBeNull();
   });

@@ -3,8 +3,11 @@ import type { StaffOrder } from '#shared/contracts/staff.ts';
 import { AdviceNote, byGravity } from '#web/components/order/advice-note.tsx';
 import { allergyWords } from '#web/components/order/allergy-words.ts';
 import { instantWords } from '#web/components/order/order-times.ts';
+import { plainly } from '#web/components/order/plainly.ts';
 import { classNames } from '#web/lib/class-names.ts';
-import { AnswerAllergy, LiftStop } from './settle-forms.tsx';
+import { LiftedStops } from './lifted-stops.tsx';
+import { OpenStops } from './open-stops.tsx';
+import { AnswerAllergy } from './settle-forms.tsx';
 
 type Props = { readonly order: StaffOrder; readonly menu: Menu };
 
@@ -13,14 +16,16 @@ type Props = { readonly order: StaffOrder; readonly menu: Menu };
  * what must be settled before the order may be confirmed.
  */
 export function CareBlock({ order, menu }: Props) {
-  const { allergies, blockers } = order;
-  if (allergies.length === 0 && blockers.length === 0) return null;
-  const blocking = new Set(blockers.map((it) => `${it.code} ${it.about}`));
+  const { allergies, blockers, lifted } = order;
+  if (allergies.length === 0 && blockers.length === 0 && lifted.length === 0) return null;
+  const open = blockers.filter((it) => it.waitsFor !== 'customer');
+  const stops = open.length > 0 || lifted.length > 0;
+  const said = new Set([...blockers, ...lifted].map((it) => `${it.code} ${it.about}`));
   const about = order.estimate.advice.filter(
     (it) =>
       it.level !== 'ok' &&
       (it.code === 'allergen' || it.code === 'kitchen' || it.code === 'allergen-unknown') &&
-      !blocking.has(`${it.code} ${it.about}`),
+      !said.has(`${it.code} ${it.about}`),
   );
   return (
     <section
@@ -30,12 +35,12 @@ export function CareBlock({ order, menu }: Props) {
       className="grid gap-5 rounded-action border-2 border-berry bg-berry-tint px-4 py-4 sm:px-6"
     >
       <h2 id="settle-title">
-        {allergies.length > 0 ? 'Allergies at the table' : 'Settle this before you confirm'}
+        {allergies.length > 0 ? 'Allergies at the table' : stopsTitle(open.length > 0)}
       </h2>
       <div
         className={classNames(
           'grid items-start gap-x-10 gap-y-5',
-          allergies.length > 0 && blockers.length > 0 && 'lg:grid-cols-2',
+          allergies.length > 0 && stops && 'lg:grid-cols-2',
         )}
       >
         {allergies.length > 0 && (
@@ -63,21 +68,19 @@ export function CareBlock({ order, menu }: Props) {
             ))}
           </ul>
         )}
-        {blockers.length > 0 && (
-          <div className="grid gap-3">
-            {allergies.length > 0 && <h3>Settle this before you confirm</h3>}
-            <ul className="grid gap-4">
-              {byGravity(blockers).map((it) => (
-                <li key={`${it.code} ${it.about}`} className="grid gap-2">
-                  <AdviceNote advice={it} />
-                  {order.can.liftStop && it.talk && <LiftStop order={order} blocker={it} />}
-                </li>
-              ))}
-            </ul>
-            {!order.can.liftStop && blockers.some((it) => it.talk) && (
-              <p className="text-sm">
-                Only the owner takes an order against a stop, with a written reason.
-              </p>
+        {stops && (
+          <div className="grid gap-5">
+            {open.length > 0 && (
+              <div className="grid gap-3">
+                {allergies.length > 0 && <h3>{stopsTitle(true)}</h3>}
+                <OpenStops order={order} studio={menu.studio} />
+              </div>
+            )}
+            {lifted.length > 0 && (
+              <div className="grid gap-3">
+                {(allergies.length > 0 || open.length > 0) && <h3>{stopsTitle(false)}</h3>}
+                <LiftedStops lifted={lifted} studio={menu.studio} />
+              </div>
             )}
           </div>
         )}
@@ -86,8 +89,7 @@ export function CareBlock({ order, menu }: Props) {
         <ul className="grid gap-3">
           {byGravity(about).map((it) => (
             <li key={`${it.code} ${it.about}`}>
-              {/* What else could have been chosen is past where a stop was lifted. */}
-              <AdviceNote advice={it.level === 'stop' ? { ...it, instead: '' } : it} />
+              <AdviceNote advice={plainly(it)} />
             </li>
           ))}
         </ul>
@@ -95,3 +97,6 @@ export function CareBlock({ order, menu }: Props) {
     </section>
   );
 }
+
+const stopsTitle = (open: boolean): string =>
+  open ? 'Settle this before you confirm' : 'Taken against a stop';

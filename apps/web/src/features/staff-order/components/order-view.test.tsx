@@ -54,6 +54,55 @@ describe('the order’s page', () => {
     expect(screen.getAllByRole('button').map((it) => it.textContent)).toEqual([name]);
   });
 
+  it('offers to record a talk about heat to whoever may, and says where an allergy’s is kept', () => {
+    const can = { ...nothingAllowed, recordTalk: true, liftStop: true };
+    const sun = {
+      ...eggStop,
+      code: 'sun',
+      about: 'sun:buttercream-swiss',
+      waitsFor: 'talk',
+    } as const;
+    show(
+      staffOrderFixture({
+        can,
+        allergies: [egg],
+        blockers: [
+          { ...eggStop, waitsFor: 'talk' },
+          { ...sun, plain: 'Stands in direct sun.' },
+          { ...eggStop, about: 'allergen:milk', plain: 'Contains milk.', waitsFor: 'nothing' },
+        ],
+      }),
+    );
+    expect(screen.getAllByRole('button').map((it) => it.textContent)).toEqual(['Record the talk']);
+    expect(screen.getByText(/record it at the allergy/)).toBeVisible();
+    expect(screen.getByText(/No reason lifts this/)).toBeVisible();
+  });
+
+  it('shows a lifted stop with its reason, and whether the customer has accepted it', () => {
+    const lifted = {
+      id: 'l1',
+      code: 'allergen',
+      about: eggStop.about,
+      sentence: eggStop.sentence,
+      plain: eggStop.plain,
+      reason: 'She brings her own dessert.',
+      by: 'Ida Thorne',
+      at: '2027-06-10T14:00:00.000Z',
+      acceptedAt: null,
+    };
+    show(
+      staffOrderFixture({
+        allergies: [egg],
+        blockers: [{ ...eggStop, waitsFor: 'customer' }],
+        lifted: [lifted],
+      }),
+    );
+    const block = screen.getByRole('region', { name: 'Allergies at the table' });
+    expect(within(block).getAllByText(eggStop.plain)).toHaveLength(1);
+    expect(within(block).getByText(/She brings her own dessert/)).toBeVisible();
+    expect(within(block).getByText(/has not read and accepted it yet/)).toBeVisible();
+  });
+
   it('puts the allergies before the cake, with what was settled', () => {
     show(
       staffOrderFixture({

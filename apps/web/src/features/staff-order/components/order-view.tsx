@@ -4,14 +4,18 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
 import { CakeDrawing } from '#web/components/cake-drawing/cake-drawing.tsx';
+import { CuttingPlan } from '#web/components/cutting-plan/cutting-plan.tsx';
 import { AdviceNote, byGravity } from '#web/components/order/advice-note.tsx';
 import { MadeWith } from '#web/components/order/made-with.tsx';
+import { plainly } from '#web/components/order/plainly.ts';
 import { PriceList } from '#web/components/order/price-list.tsx';
+import { Fold } from '#web/components/ui/fold.tsx';
 import { Rim } from '#web/components/ui/rim.tsx';
 import { Section } from '#web/components/ui/section.tsx';
 import { OrderActionDialog } from '../actions/order-action-dialog.tsx';
 import type { OrderAct } from '../actions/order-act.ts';
 import { CareBlock } from './care-block.tsx';
+import { ContentChanges } from './content-changes.tsx';
 import { HandoverRecord } from './handover-record.tsx';
 import { OrderChoices } from './order-choices.tsx';
 import { OrderContacts } from './order-contacts.tsx';
@@ -21,13 +25,12 @@ import { OrderMail } from './order-mail.tsx';
 import { OrderMessages } from './order-messages.tsx';
 import { OrderPhotos } from './order-photos.tsx';
 import { OrderPlan } from './order-plan.tsx';
+import { OrderStructure } from './order-structure.tsx';
 
 /** What other features show of the order; the page puts them in, each with its own heading. */
 export type OrderParts = {
   /** Under the price: what it costs to make, for the owner. */
   readonly cost?: ReactNode;
-  /** How it is cut. */
-  readonly cutting?: ReactNode;
   /** What goes into it, formula by formula; as wide as the page. */
   readonly kitchen?: ReactNode;
   /** What is printed for it. */
@@ -65,7 +68,7 @@ export function OrderView({ order, menu, parts = {} }: Props) {
   const [act, setAct] = useState<OrderAct | null>(null);
   const { cake, look } = order.design;
   const { locale, labelRegion, kitchenNotice } = menu.studio;
-  const said = new Set(order.blockers.map((it) => `${it.code} ${it.about}`));
+  const said = new Set([...order.blockers, ...order.lifted].map((it) => `${it.code} ${it.about}`));
   const advice = order.estimate.advice.filter(
     (it) =>
       it.level !== 'ok' && !aboutAllergies.includes(it.code) && !said.has(`${it.code} ${it.about}`),
@@ -74,6 +77,7 @@ export function OrderView({ order, menu, parts = {} }: Props) {
     <div className="grid gap-8">
       <OrderHead order={order} menu={menu} onAct={setAct} />
       <CareBlock order={order} menu={menu} />
+      <ContentChanges order={order} studio={menu.studio} />
       <div className="grid items-start gap-x-8 gap-y-8 md:grid-cols-[minmax(18rem,0.8fr)_minmax(0,1fr)]">
         <div className="grid min-w-0 gap-8">
           <Rim className="grid gap-5 p-5 sm:p-7">
@@ -106,7 +110,7 @@ export function OrderView({ order, menu, parts = {} }: Props) {
               <ul className="grid gap-3">
                 {byGravity(advice).map((it) => (
                   <li key={`${it.code} ${it.about}`}>
-                    <AdviceNote advice={it} />
+                    <AdviceNote advice={plainly(it)} />
                   </li>
                 ))}
               </ul>
@@ -116,7 +120,18 @@ export function OrderView({ order, menu, parts = {} }: Props) {
             <MadeWith offer={order.estimate} region={labelRegion} kitchenNotice={kitchenNotice} />
           </Section>
           {parts.cards}
-          {parts.cutting}
+          {cake !== null && (
+            <Section title="Before boxing">
+              <OrderStructure order={order} menu={menu} />
+            </Section>
+          )}
+          {cake !== null && (
+            <Section title="Cutting">
+              <Fold label={`How ${order.estimate.portions.fed} portions are cut`}>
+                <CuttingPlan design={order.design} menu={menu} />
+              </Fold>
+            </Section>
+          )}
         </div>
       </div>
       {parts.kitchen}

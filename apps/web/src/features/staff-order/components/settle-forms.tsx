@@ -1,10 +1,11 @@
 import * as z from 'zod/mini';
-import type { Advice } from '#shared/contracts/estimates.ts';
 import {
+  type Blocker,
   type DeclaredAllergy,
   type StaffOrder,
   answerAllergy,
   liftStop,
+  recordTalk,
 } from '#shared/contracts/staff.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
@@ -15,8 +16,10 @@ import { useContractForm } from '#web/lib/use-contract-form.ts';
 import { ActFailure } from '../actions/act-failure.tsx';
 import { useAnswerAllergy } from '../api/answer-allergy.ts';
 import { useLiftStop } from '../api/lift-stop.ts';
+import { useRecordTalk } from '../api/record-talk.ts';
 
 const answerForm = z.omit(answerAllergy, { rowVersion: true });
+const talkForm = z.omit(recordTalk, { rowVersion: true, about: true });
 const liftForm = z.omit(liftStop, { rowVersion: true, about: true });
 
 type AnswerProps = { readonly order: StaffOrder; readonly allergy: DeclaredAllergy };
@@ -61,10 +64,48 @@ function AnswerForm({ order, allergy, onFold }: AnswerProps & { readonly onFold:
   );
 }
 
-type LiftProps = { readonly order: StaffOrder; readonly blocker: Advice };
+type StopProps = { readonly order: StaffOrder; readonly blocker: Blocker };
+
+/** Records the talk about a stop that no declared allergy stands behind. */
+export function RecordTalk(props: StopProps) {
+  return <Unfold label="Record the talk">{(fold) => <TalkForm {...props} onFold={fold} />}</Unfold>;
+}
+
+function TalkForm({ order, blocker, onFold }: StopProps & { readonly onFold: () => void }) {
+  const { form, failure, submit } = useContractForm(talkForm, { text: '' });
+  const record = useRecordTalk(order.number);
+  const toast = useToast();
+  return (
+    <form
+      noValidate
+      className="grid gap-3"
+      onSubmit={submit(async ({ text }) => {
+        await record.mutateAsync({ text, about: blocker.about, rowVersion: order.rowVersion });
+        toast({ message: 'The talk is noted with the order.' });
+      })}
+    >
+      <ActFailure error={failure} />
+      <TextArea
+        {...form.register('text')}
+        label="What was said and settled"
+        hint="With whom, and what they decided. The stop stays until the owner takes it."
+        rows={3}
+        error={errorOf(form.formState.errors, 'text')}
+      />
+      <div className="flex flex-wrap gap-3">
+        <Button type="submit" pending={record.isPending}>
+          Note it
+        </Button>
+        <Button kind="quiet" onClick={onFold}>
+          Not yet
+        </Button>
+      </div>
+    </form>
+  );
+}
 
 /** The owner's written reason to take an order against a stop. */
-export function LiftStop(props: LiftProps) {
+export function LiftStop(props: StopProps) {
   return (
     <Unfold label="Take it all the same" kind="danger">
       {(fold) => <LiftForm {...props} onFold={fold} />}
@@ -72,7 +113,7 @@ export function LiftStop(props: LiftProps) {
   );
 }
 
-function LiftForm({ order, blocker, onFold }: LiftProps & { readonly onFold: () => void }) {
+function LiftForm({ order, blocker, onFold }: StopProps & { readonly onFold: () => void }) {
   const { form, failure, submit } = useContractForm(liftForm, { reason: '' });
   const lift = useLiftStop(order.number);
   const toast = useToast();
@@ -82,14 +123,14 @@ function LiftForm({ order, blocker, onFold }: LiftProps & { readonly onFold: () 
       className="grid gap-3"
       onSubmit={submit(async ({ reason }) => {
         await lift.mutateAsync({ reason, about: blocker.about, rowVersion: order.rowVersion });
-        toast({ message: 'Your reason is noted; the customer reads it.' });
+        toast({ message: 'Your reason is noted. The customer is asked by e-mail to read it.' });
       })}
     >
       <ActFailure error={failure} />
       <TextArea
         {...form.register('reason')}
         label="Why you take it all the same"
-        hint="It stays with the order for good, and the customer reads and accepts it."
+        hint="It stays with the order for good. The customer reads it and has to accept it before anything is confirmed."
         rows={3}
         error={errorOf(form.formState.errors, 'reason')}
       />

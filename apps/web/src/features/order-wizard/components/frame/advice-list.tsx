@@ -52,17 +52,14 @@ export function AdviceItem({ step, advice, onLeave }: ItemProps) {
       {advice.level !== 'ok' && (
         <div className="ml-5.5 flex flex-wrap gap-x-2 text-sm">
           {advice.ways.map((way) => (
-            <Button
+            <WayOut
               key={way.label}
-              kind="quiet"
-              className="text-sm"
-              onClick={() => {
+              way={way}
+              onTake={() => {
                 const { cake, look, setting } = applyPatch(values, way.patch);
                 change({ cake, look, setting }, `Changed: ${way.label}.`);
               }}
-            >
-              {way.label}
-            </Button>
+            />
           ))}
           {advice.step !== step && (
             <Link
@@ -77,5 +74,20 @@ export function AdviceItem({ step, advice, onLeave }: ItemProps) {
         </div>
       )}
     </li>
+  );
+}
+
+type WayProps = { readonly way: Advice['ways'][number]; readonly onTake: () => void };
+
+/** A way out as one press, and under it what it changes where its name does not say all. */
+function WayOut({ way, onTake }: WayProps) {
+  const more = way.changes.length > 1;
+  return (
+    <div className={more ? 'grid w-full justify-items-start' : undefined}>
+      <Button kind="quiet" className="text-left text-sm" onClick={onTake}>
+        {way.label}
+      </Button>
+      {more && <p className="-mt-1.5 px-2 pb-1 text-slate">{way.changes.join(' ')}</p>}
+    </div>
   );
 }

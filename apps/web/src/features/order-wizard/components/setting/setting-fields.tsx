@@ -1,5 +1,6 @@
 import { place as places } from '#shared/contracts/vocabulary.ts';
-import { formatDuration } from '#shared/dates/format.ts';
+import { formatDuration, formatTime } from '#shared/dates/format.ts';
+import { parseTime } from '#shared/dates/parse-time.ts';
 import { warmthOf } from '#shared/kitchen/heat.ts';
 import { formatTemperature, parseDuration, parseTemperature } from '#shared/kitchen/measures.ts';
 import { placeWords } from '#web/components/order/setting-words.ts';
@@ -18,6 +19,7 @@ export function SettingFields() {
   const warmest = useAnswer('setting.warmestC');
   const minutesOut = useAnswer('setting.minutesOut');
   const drive = useAnswer('setting.driveMinutes');
+  const served = useAnswer('setting.servedAt');
   const lead = menu.studio.temperatureLead;
   const reckoned = warmthOf({ ...values.setting, warmestC: null }, menu.studio, values.day.date);
   return (
@@ -30,7 +32,7 @@ export function SettingFields() {
         value={place.value}
         onValue={place.onValue}
       />
-      <div className="grid gap-6 sm:grid-cols-3">
+      <div className="grid gap-6 sm:grid-cols-2">
         <NumberField
           name={warmest.name}
           label="Warmest"
@@ -46,7 +48,7 @@ export function SettingFields() {
         <NumberField
           name={minutesOut.name}
           label="Out before cutting"
-          hint="Like 45 min or 1 h 30."
+          hint="Setting up included. Like 45 min or 1 h 30."
           inputMode="text"
           read={parseDuration}
           write={formatDuration}
@@ -66,6 +68,19 @@ export function SettingFields() {
           className="font-display text-lg font-semibold tabular-nums"
           value={drive.value}
           onValue={(value) => drive.onValue(value ?? Number.NaN)}
+        />
+        <NumberField
+          name={served.name}
+          label="Cut at"
+          hint="Like 16:00. Then we can say how long it stays in the fridge."
+          optional
+          inputMode="text"
+          read={parseTime}
+          write={formatTime}
+          error={served.error}
+          className="font-display text-lg font-semibold tabular-nums"
+          value={served.value}
+          onValue={served.onValue}
         />
       </div>
       <Checkbox

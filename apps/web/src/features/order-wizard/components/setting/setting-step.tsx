@@ -1,3 +1,4 @@
+import { SuitableCakes } from '../frame/suitable-cakes.tsx';
 import { StepPage } from '../frame/step-page.tsx';
 import { CoatChoice } from './coat-choice.tsx';
 import { SettingFields } from './setting-fields.tsx';
@@ -8,6 +9,7 @@ export function SettingStep() {
   return (
     <StepPage step="setting">
       <SettingFields />
+      <SuitableCakes />
       <CoatChoice />
       <TierCoats />
     </StepPage>

@@ -1,6 +1,6 @@
 import type { Coating } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import { formatDuration } from '#shared/dates/format.ts';
+import { formatDuration, formatTime } from '#shared/dates/format.ts';
 import { formatTemperature } from '#shared/kitchen/measures.ts';
 import { coatingName } from '#shared/kitchen/resolve-design.ts';
 import { tierName } from '#shared/kitchen/tier-name.ts';
@@ -36,6 +36,9 @@ export function settingRows(values: OrderForm, menu: Menu): CheckRow[] {
       field: 'setting.minutesOut',
     },
     { label: 'Drive', value: formatDuration(setting.driveMinutes), field: 'setting.driveMinutes' },
+    ...(setting.servedAt === null
+      ? []
+      : [{ label: 'Cut at', value: formatTime(setting.servedAt), field: 'setting.servedAt' }]),
     { label: 'Over it', value: nameOf(cake.coating), field: 'cake.coating' },
   ];
   cake.tiers.forEach((tier, at) => {
