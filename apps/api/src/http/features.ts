@@ -6,6 +6,7 @@ import { accountsRoutes } from '#api/modules/accounts/accounts.routes.ts';
 import { datesRoutes } from '#api/modules/dates/dates.routes.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { healthRoutes } from '#api/modules/health/health.routes.ts';
+import { cardsRoutes, careRoutes } from '#api/modules/cards/cards.routes.ts';
 import { kitchenRoutes } from '#api/modules/kitchen/kitchen.routes.ts';
 import { menuRoutes } from '#api/modules/menu/menu.routes.ts';
 import { peopleRoutes } from '#api/modules/people/people.routes.ts';
@@ -36,6 +37,8 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     staffContentsRoutes(deps),
     pantryRoutes(deps),
     kitchenRoutes(deps),
+    cardsRoutes(deps),
+    careRoutes(deps),
     calendarRoutes(deps),
     datesRoutes(deps),
     sessionsRoutes(deps),

@@ -25,6 +25,10 @@ const limits = {
   'answer-dates': { windowMs: minuteMs, limit: 120 },
   'submit-order': { windowMs: 60 * minuteMs, limit: 30 },
   'upload-photo': { windowMs: 60 * minuteMs, limit: 120 },
+  /** A whole party may scan one care card from one network. */
+  'see-cake-care': { windowMs: 15 * minuteMs, limit: 400 },
+  /** Setting a page takes some work. */
+  'print-card': { windowMs: 15 * minuteMs, limit: 60 },
   'write-message': { windowMs: 15 * minuteMs, limit: 60 },
 } as const;
 export type LimitName = keyof typeof limits;

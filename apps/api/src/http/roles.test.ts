@@ -205,6 +205,24 @@ const table: Readonly<Record<string, Line>> = {
     path: `/api/orders/${order.code}/calendar.ics`,
   })),
 
+  // Labels and care cards. The order is not confirmed, so its care card is nobody's yet.
+  'see-labels': line(staff, ({ order }) => ({ path: `/api/staff/orders/${order.number}/labels` })),
+  'print-labels': line(staff, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/labels.pdf?paper=a4`,
+  })),
+  'confirm-unknown': line(owners, ({ order }) =>
+    post(`/api/staff/orders/${order.number}/labels/confirm-unknown`, { sentences: [] }),
+  ),
+  'print-care-card': line(staff, ({ order }) => ({
+    path: `/api/staff/orders/${order.number}/care-card.pdf`,
+  })),
+  'see-care-card': line([404, 404, 404, 404, 404, 404, 404], ({ order }) => ({
+    path: `/api/orders/${order.code}/care-card.pdf`,
+  })),
+  'see-cake-care': line([404, 404, 404, 404, 404, 404, 404], ({ order }) => ({
+    path: `/api/care/${order.careCode ?? ''}`,
+  })),
+
   // Pictures.
   'upload-photo': line(everybody, () => post('/api/photos', notAPicture())),
   'add-order-photo': line(itsCustomer, ({ order }) =>
