@@ -1,6 +1,7 @@
 import type { Advice, Estimate } from '#shared/contracts/estimates.ts';
 import type { AllergenEntry, Menu } from '#shared/contracts/menu.ts';
 import type { Design } from '#shared/contracts/design.ts';
+import { isAboutGuests } from '#shared/kitchen/about-guests.ts';
 import { allergenLabel } from '#shared/kitchen/allergen-names.ts';
 import { chosenRows } from '#shared/kitchen/chosen-words.ts';
 import { coatColour } from '#shared/kitchen/coat-colour.ts';
@@ -110,32 +111,10 @@ function contentsOf(
   };
 }
 
-/**
- * Advice that is about the table and the cake. Everything else is about who will eat, which is
- * health data: a mail may say that there is some, not what it is.
- */
-const aboutTheCake: ReadonlySet<Advice['code']> = new Set([
-  'heat',
-  'heat-unknown',
-  'sun',
-  'time-out',
-  'drive',
-  'detail',
-  'soft-filling',
-  'supports',
-  'inedible',
-  'small-parts',
-  'flowers',
-  'deep-colour',
-  'portions',
-  'words-length',
-  'too-big',
-]);
-
 /** The advice of a level that a mail may tell, each in its sentences. */
 export function adviceToTell({ advice }: Estimate, level: Advice['level']): string[] {
   return advice
-    .filter((it) => it.level === level && aboutTheCake.has(it.code))
+    .filter((it) => it.level === level && !isAboutGuests(it))
     .map(({ sentence, instead }) => `${sentence} ${instead}`.trim());
 }
 
@@ -154,5 +133,5 @@ function takenOut({ advice }: Estimate): string[] {
 
 /** Whether there is advice about the guests, which stays on the order's page. */
 export function hasGuestAdvice({ advice }: Estimate): boolean {
-  return advice.some((it) => it.level !== 'ok' && !aboutTheCake.has(it.code));
+  return advice.some((it) => it.level !== 'ok' && isAboutGuests(it));
 }
