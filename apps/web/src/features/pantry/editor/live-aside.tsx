@@ -9,6 +9,7 @@ import { AllergenLine } from '../components/allergen-line.tsx';
 import { ChangeList } from '../formulas/change-list.tsx';
 import { Cautions } from '../formulas/formula-facts.tsx';
 import { gramsText } from '../formulas/formula-words.ts';
+import { figure } from '../figures.ts';
 import type { Shelf } from '../shelf.ts';
 import type { Inspected } from './inspect-form.ts';
 
@@ -44,8 +45,7 @@ export const LiveAside = memo(function LiveAside(props: Props) {
         <p className="text-sm text-slate">
           comes out of {gramsText(seen.totals.inG, locale)},{' '}
           {formatWeight(seen.totals.outG, lengthLead)}
-          {seen.totals.outMl !== null &&
-            `, ${(seen.totals.outMl / 1000).toLocaleString(locale, { maximumFractionDigits: 1 })} L`}
+          {seen.totals.outMl !== null && `, ${figure(seen.totals.outMl / 1000, locale, 1)} L`}
         </p>
       </div>
       {unread > 0 && (

@@ -10,6 +10,7 @@ import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { Notice } from '#web/components/ui/notice.tsx';
 import { Rim } from '#web/components/ui/rim.tsx';
 import { Select } from '#web/components/ui/select.tsx';
+import { figure } from '../figures.ts';
 import type { Shelf } from '../shelf.ts';
 import { gramsText } from './formula-words.ts';
 import { MakeFields } from './make-fields.tsx';
@@ -145,6 +146,7 @@ export function FormulaBench({ formula, version, shelf, menu, makeG }: Props) {
           scaled={scaled}
           altitudeM={pantry.altitudeM}
           lead={temperatureLead}
+          lengthLead={lengthLead}
           locale={locale}
         />
       </div>
@@ -181,15 +183,10 @@ function Amounts({
       </p>
       <p>
         <span className="block font-display text-xl font-semibold tabular-nums">
-          {scaled.driftG.toLocaleString(locale, {
-            maximumFractionDigits: 1,
-            signDisplay: 'exceptZero',
-          })}{' '}
-          g
+          {figure(scaled.driftG, locale, 1, 'exceptZero')} g
         </span>
         <span className="text-sm text-slate">
-          by rounding,{' '}
-          {drift.toLocaleString(locale, { maximumFractionDigits: 2, signDisplay: 'exceptZero' })} %
+          by rounding, {figure(drift, locale, 2, 'exceptZero')} %
         </span>
       </p>
     </div>

@@ -2,6 +2,7 @@ import type { FormulaKind, FormulaStep, PartFormulas } from '#shared/contracts/p
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
 import { localAt } from '#shared/dates/local-time.ts';
+import { figure } from '../figures.ts';
 import type { House } from '../house.ts';
 
 export const kindWords: Readonly<Record<FormulaKind, string>> = {
@@ -69,10 +70,10 @@ export function onTheMenu(formulaId: string, parts: PartFormulas, menu: Menu): r
 /** Grams as a scale shows them: tenths under 10 g, whole above, thousands parted. */
 export function gramsText(grams: number, locale: string): string {
   const digits = grams < 1 ? 2 : grams < 10 ? 1 : 0;
-  return `${grams.toLocaleString(locale, { maximumFractionDigits: digits })} g`;
+  return `${figure(grams, locale, digits)} g`;
 }
 
 export function percentText(percent: number, locale: string): string {
   const digits = percent < 10 ? 1 : 0;
-  return `${percent.toLocaleString(locale, { maximumFractionDigits: digits })} %`;
+  return `${figure(percent, locale, digits)} %`;
 }

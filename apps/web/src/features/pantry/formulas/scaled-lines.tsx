@@ -5,6 +5,7 @@ import type { PercentView } from '#shared/kitchen/formulas/percents.ts';
 import type { ScaledFormula, ScaledLine } from '#shared/kitchen/formulas/scale-formula.ts';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
 import { paths } from '#web/config/paths.ts';
+import { figure } from '../figures.ts';
 import { gramsText, percentText } from './formula-words.ts';
 
 type Props = {
@@ -97,9 +98,6 @@ const toldFromPpm = 1000;
 
 function Drift({ line, locale }: { readonly line: ScaledLine; readonly locale: string }) {
   if (Math.abs(line.driftPpm) < toldFromPpm) return null;
-  const percent = (line.driftPpm / 10_000).toLocaleString(locale, {
-    maximumFractionDigits: 1,
-    signDisplay: 'exceptZero',
-  });
+  const percent = figure(line.driftPpm / 10_000, locale, 1, 'exceptZero');
   return <span className="block text-sm text-slate print:hidden">{percent} %</span>;
 }

@@ -1,9 +1,15 @@
 import type { FormulaVersion } from '#shared/contracts/pantry.ts';
 import { formatDuration } from '#shared/dates/format.ts';
 import { formatSyrupTarget } from '#shared/kitchen/formulas/syrup.ts';
-import { formatBenchTemperature, type TemperatureLead } from '#shared/kitchen/measures.ts';
+import {
+  type LengthLead,
+  type TemperatureLead,
+  formatBenchTemperature,
+  mmToInches,
+} from '#shared/kitchen/measures.ts';
 import type { ScaledFormula } from '#shared/kitchen/formulas/scale-formula.ts';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
+import { figure } from '../figures.ts';
 import { gramsText, limitTime, resourceWords } from './formula-words.ts';
 
 type Props = {
@@ -11,11 +17,12 @@ type Props = {
   readonly scaled: ScaledFormula | null;
   readonly altitudeM: number;
   readonly lead: TemperatureLead;
+  readonly lengthLead: LengthLead;
   readonly locale: string;
 };
 
 /** What is done, in order: what goes in, what is measured, how long it takes. */
-export function StepList({ version, scaled, altitudeM, lead, locale }: Props) {
+export function StepList({ version, scaled, altitudeM, lead, lengthLead, locale }: Props) {
   if (version.steps.length === 0) {
     return <p className="text-slate">No steps are written for it yet.</p>;
   }
@@ -36,7 +43,7 @@ export function StepList({ version, scaled, altitudeM, lead, locale }: Props) {
                   {altitudeM > 0 && (
                     <span className="text-slate">
                       {' '}
-                      here, {altitudeM.toLocaleString(locale)} m up; at sea level{' '}
+                      here, {heightText(altitudeM, lengthLead, locale)} up; at sea level{' '}
                       {formatBenchTemperature(step.syrupTargetC, lead)}
                     </span>
                   )}
@@ -66,6 +73,13 @@ export function StepList({ version, scaled, altitudeM, lead, locale }: Props) {
       ))}
     </ol>
   );
+}
+
+/** The studio's height above the sea; 1 ft is 12 in. */
+function heightText(metres: number, lead: LengthLead, locale: string): string {
+  return lead === 'cm'
+    ? `${figure(metres, locale, 0)} m`
+    : `${figure(mmToInches(metres * 1000) / 12, locale, 0)} ft`;
 }
 
 /** Above this a limit is heat to be held; under it, cold to be reached in time. */
