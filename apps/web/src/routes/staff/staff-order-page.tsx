@@ -4,7 +4,10 @@ import { Failure } from '#web/components/ui/failure.tsx';
 import { PageTitle } from '#web/components/ui/page-title.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
 import { paths } from '#web/config/paths.ts';
+import { CostSection } from '#web/features/kitchen-sheet/components/cost-section.tsx';
+import { KitchenSection } from '#web/features/kitchen-sheet/components/kitchen-section.tsx';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
+import { useSession } from '#web/features/session/api/get-session.ts';
 import { useStaffOrder } from '#web/features/staff-order/api/get-staff-order.ts';
 import { OrderView } from '#web/features/staff-order/components/order-view.tsx';
 import { ApiProblem } from '#web/lib/http.ts';
@@ -23,6 +26,8 @@ export function StaffOrderPage() {
 function OneOrder({ number }: { readonly number: number }) {
   const menu = useMenu();
   const { data, error, isPending, refetch, isFetching } = useStaffOrder(number);
+  const role = useSession().data?.user?.role;
+  const { locale } = menu.studio;
   useFragment(data !== undefined);
   return (
     <div className="page grid gap-4 py-6">
@@ -32,7 +37,16 @@ function OneOrder({ number }: { readonly number: number }) {
         </Link>
       </p>
       {data !== undefined ? (
-        <OrderView order={data} menu={menu} />
+        <OrderView
+          order={data}
+          menu={menu}
+          parts={{
+            cost: role === 'owner' && <CostSection number={number} locale={locale} />,
+            kitchen: (role === 'baker' || role === 'owner') && (
+              <KitchenSection number={number} locale={locale} />
+            ),
+          }}
+        />
       ) : (
         <>
           <PageTitle title={`No. ${number}`} />

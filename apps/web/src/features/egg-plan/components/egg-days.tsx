@@ -1,0 +1,93 @@
+import type { EggDayView, EggUseView } from '#shared/contracts/kitchen-sheet.ts';
+import { formatDay, formatWeekday } from '#shared/dates/format.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
+import { EggGlyph } from './egg-glyph.tsx';
+import { OrderLinks } from './whose-orders.tsx';
+
+type Props = { readonly days: readonly EggDayView[]; readonly locale: string };
+
+/** Day by day: eggs to crack, and what each part goes into. */
+export function EggDays({ days, locale }: Props) {
+  return (
+    <ol>
+      {days.map((day) => (
+        <li
+          key={day.date}
+          className="grid gap-x-8 gap-y-2 border-b border-seam px-5 py-4 break-inside-avoid last:border-b-0 sm:grid-cols-[13rem_minmax(0,1fr)] sm:px-7 print:grid-cols-[12rem_minmax(0,1fr)]"
+        >
+          <div className="grid content-start gap-0.5">
+            <h3>{formatDay(day.date, { locale })}</h3>
+            {day.crack === 0 ? (
+              <p className="text-slate">Crack none: what is left does.</p>
+            ) : (
+              <>
+                <p className="flex items-center gap-1.5">
+                  <EggGlyph part="whole" />
+                  <span>
+                    Crack{' '}
+                    <strong className="font-display text-2xl tabular-nums">{day.crack}</strong>
+                  </span>
+                </p>
+                <p className="text-sm text-slate">{separateWords(day)}</p>
+              </>
+            )}
+          </div>
+          <ul className="grid content-start">
+            {day.uses.map((use) => (
+              <Use key={`${use.formula} ${use.part}`} use={use} date={day.date} locale={locale} />
+            ))}
+          </ul>
+        </li>
+      ))}
+    </ol>
+  );
+}
+
+function separateWords({ crack, whole }: EggDayView): string {
+  const apart = crack - whole;
+  if (whole === 0) return apart === 1 ? 'Separate it.' : 'Separate them all.';
+  if (apart === 0) return 'They go in whole.';
+  return `${whole} ${whole === 1 ? 'goes' : 'go'} in whole, ${apart} separated.`;
+}
+
+const partWords = { whole: 'whole egg', white: 'whites', yolk: 'yolks' } as const;
+
+function Use({
+  use,
+  date,
+  locale,
+}: {
+  readonly use: EggUseView;
+  readonly date: string;
+  readonly locale: string;
+}) {
+  const older = use.from.filter((it) => it.crackedOn < date && it.grams >= 0.5);
+  return (
+    <li className="grid grid-cols-[5.5rem_1.5rem_minmax(0,1fr)] items-baseline gap-x-3 py-1">
+      <span className="text-right font-semibold whitespace-nowrap tabular-nums">
+        {gramsText(use.grams, locale)}
+      </span>
+      <span className="self-center">
+        <EggGlyph part={use.part} />
+      </span>
+      <span className="min-w-0">
+        {partWords[use.part]} for {use.formula},{' '}
+        <span className="text-sm text-slate">
+          <OrderLinks numbers={use.orders} />
+        </span>
+        {older.length > 0 && (
+          <span className="block text-sm text-slate">
+            Take first{' '}
+            {older
+              .map(
+                (it) =>
+                  `${gramsText(it.grams, locale)} of ${partWords[it.part]} from ${formatWeekday(it.crackedOn, 'long', locale)}`,
+              )
+              .join(', ')}
+            .
+          </span>
+        )}
+      </span>
+    </li>
+  );
+}
