@@ -39,6 +39,26 @@ describe('CakeDrawing', () => {
     expect(drawing).toHaveTextContent('keepsake');
   });
 
+  it('shows cutting cakes small beside the cake on show', () => {
+    const cut = {
+      sizeId: 'half',
+      count: 3,
+      layers: 2,
+      spongeId: 'vanilla',
+      fillingId: 'raspberry',
+    };
+    render(
+      <CakeDrawing
+        cake={{ ...tiered(roundTier(10)), cuttingCakes: [cut] }}
+        look={null}
+        menu={menuFixture}
+      />,
+    );
+    const drawing = screen.getByRole('img', { name: /with three cutting cakes, drawn to scale$/ });
+    expect(drawing).toHaveTextContent('in the kitchen, to cut3 ×');
+    expect(drawing).toHaveAccessibleDescription(/In the kitchen: 3 × Half sheet.*to cut: Vanilla/);
+  });
+
   it('says that there is no cake yet', () => {
     render(<CakeDrawing cake={null} look={null} menu={menuFixture} />);
     expect(screen.getByRole('img', { name: 'An empty board' })).toBeInTheDocument();

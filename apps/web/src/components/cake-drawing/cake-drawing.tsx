@@ -6,6 +6,7 @@ import { classNames } from '#web/lib/class-names.ts';
 import { describeCake } from './describe-cake.ts';
 import { decorationsPerTier, reachAbove } from './decorated.tsx';
 import { type Room, type Shown, type ViewProps, layOutTiers, measureGap } from './layout.ts';
+import { KitchenRow, kitchenRowHeight } from './kitchen-row.tsx';
 import { SheetView } from './sheet-view.tsx';
 import { TieredView } from './tiered-view.tsx';
 
@@ -45,6 +46,7 @@ export function CakeDrawing({
   const highest = there ? highestPoint(cake, look, menu, view.room) : view.room.y;
   const above = size === 'full' ? measureGap + 28 : 6;
   const headroom = trimmed ? Math.max(0, highest - above) : 0;
+  const kitchen = there ? kitchenRowHeight(cake, size === 'full') : 0;
   const floor = view.room.y + view.room.height;
   const level = highest + (floor - highest) * (1 - made);
   const draw = (show: Shown) =>
@@ -60,7 +62,7 @@ export function CakeDrawing({
     );
   return (
     <svg
-      viewBox={`0 ${headroom} ${view.width} ${view.height - headroom}`}
+      viewBox={`0 ${headroom} ${view.width} ${view.height - headroom + kitchen}`}
       role="img"
       aria-labelledby={`${id}-title`}
       aria-describedby={`${id}-words`}
@@ -100,6 +102,15 @@ export function CakeDrawing({
       {made < 1 && <g opacity="0.45">{draw('cake')}</g>}
       <g clipPath={made < 1 ? `url(#${id}-made)` : undefined}>{draw('cake')}</g>
       {size === 'full' && draw('measures')}
+      {there && kitchen > 0 && (
+        <KitchenRow
+          cake={cake}
+          menu={menu}
+          middle={view.width / 2}
+          top={view.height}
+          named={size === 'full'}
+        />
+      )}
     </svg>
   );
 }

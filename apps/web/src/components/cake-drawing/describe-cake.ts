@@ -1,6 +1,7 @@
 import type { Cake, Coating, Look, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
+import { cutWords } from '#shared/kitchen/chosen-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { countOf } from '#shared/kitchen/sentences.ts';
 
@@ -21,6 +22,7 @@ export function describeCake(cake: Cake, look: Look | null, menu: Menu): string 
       );
     }
   }
+  for (const it of cake.cuttingCakes) sentences.push(`In the kitchen: ${cutWords(it, menu)}.`);
   return sentences.join(' ');
 }
 
