@@ -131,13 +131,19 @@ export const everydayForms = {
   ),
   haddow: everyday(
     'Morag Haddow',
-    [72, 'wedding'],
-    tiered(
-      coat('swiss'),
-      round(12, 'vanilla', 'raspberry'),
-      round(9, 'lemon', 'raspberry'),
-      round(6, 'vanilla', 'raspberry'),
-    ),
+    [150, 'wedding'],
+    {
+      ...tiered(
+        coat('swiss'),
+        round(12, 'vanilla', 'raspberry'),
+        round(9, 'lemon', 'raspberry'),
+        round(6, 'vanilla', 'raspberry'),
+      ),
+      // The cake on show feeds 101; the rest is cut in the kitchen.
+      cuttingCakes: [
+        { sizeId: 'half', count: 1, layers: 2, spongeId: 'lemon', fillingId: 'raspberry' },
+      ],
+    },
     [placed('sugar-flower', 0, 6), placed('sugar-leaves', 1, 8), placed('ribbon', 2)],
   ),
   rossi: everyday(
