@@ -1,3 +1,4 @@
+import { currentClock } from '#api/db/current-database.ts';
 import { FormulaLine } from '#api/db/models/formula-line.ts';
 import { FormulaStep } from '#api/db/models/formula-step.ts';
 import { FormulaVersion } from '#api/db/models/formula-version.ts';
@@ -47,7 +48,8 @@ async function createIngredient(seed: SeedIngredient, today: string): Promise<vo
     cochineal: has('cochineal'),
     animalOrigin: has('animal-origin'),
     honey: has('honey'),
-    roundingMg: seed.family === 'salt' ? 100 : 1000,
+    roundingMg: mg(seed.roundingG ?? 1),
+    densityMgPerMl: seed.densityGPerMl === undefined ? null : mg(seed.densityGPerMl),
   });
   await IngredientAllergen.bulkCreate(
     seed.allergens.flatMap(({ allergen, species, state }) =>
@@ -60,12 +62,12 @@ async function createIngredient(seed: SeedIngredient, today: string): Promise<vo
     ),
   );
   await IngredientMeasure.bulkCreate(
-    (seed.measures ?? []).map(({ measure, qualifier, grams }) => ({
+    (seed.measures ?? []).map(({ measure, qualifier, grams, source }) => ({
       ingredientId: seed.id,
       measure,
       qualifier: qualifier ?? null,
       weightMg: mg(grams),
-      source: 'USDA SR28',
+      source: source ?? (seed.ndb === undefined ? null : `USDA SR28, ${seed.ndb}`),
     })),
   );
 }
@@ -75,9 +77,31 @@ async function createFormula(
   versions: ReadonlyMap<string, string>,
 ): Promise<string> {
   await Formula.create({ id: seed.id, kind: seed.kind, name: seed.name });
+  const stages = [...(seed.earlier ?? []).map((older) => ({ ...seed, ...older })), seed];
+  let newest = '';
+  for (const [index, stage] of stages.entries()) {
+    const age = (stages.length - 1 - index) * daysBetweenVersions;
+    newest = await createVersion(stage, { n: index + 1, age, versions });
+  }
+  return newest;
+}
+
+/** How long each older version is said to have been in use. */
+const daysBetweenVersions = 120;
+
+type Versioned = {
+  readonly n: number;
+  /** Days ago. */
+  readonly age: number;
+  readonly versions: ReadonlyMap<string, string>;
+};
+
+async function createVersion(seed: SeedFormula, { n, age, versions }: Versioned): Promise<string> {
   const version = await FormulaVersion.create({
     formulaId: seed.id,
-    n: 1,
+    n,
+    createdAt: new Date(currentClock().now().getTime() - age * 86_400_000),
+    note: seed.note ?? '',
     yieldPpm: seed.yieldPpm,
     densityMgPerMl: mg(seed.densityGPerMl),
     bakeLossPpm: seed.bakeLossPpm ?? 0,
@@ -98,6 +122,7 @@ async function createFormula(
       ingredientId: 'ingredient' in line ? line.ingredient : null,
       formulaVersionId: 'formula' in line ? (versions.get(line.formula) ?? null) : null,
       weightMg: mg(line.grams),
+      asTyped: line.typed ?? null,
       step: line.step ?? 0,
     })),
   );

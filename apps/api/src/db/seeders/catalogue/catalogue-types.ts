@@ -1,4 +1,4 @@
-import type { IngredientFamily } from '#shared/contracts/pantry.ts';
+import type { EggPart, HouseholdMeasure, IngredientFamily } from '#shared/contracts/pantry.ts';
 import type {
   AllergenId,
   AllergenState,
@@ -33,19 +33,29 @@ export type SeedIngredient = {
   readonly packPriceMinor: number;
   readonly allergens: readonly SeedAllergen[];
   readonly traits?: readonly SeedTrait[];
-  readonly egg?: { readonly part: 'whole' | 'white' | 'yolk'; readonly pasteurised: boolean };
-  /** Household weights in grams, USDA SR28 where it lists one. */
+  readonly egg?: { readonly part: EggPart; readonly pasteurised: boolean };
+  /** What the kitchen weighs it to, grams; 1 where it is not told. */
+  readonly roundingG?: number;
+  /** Liquids, so that a recipe may give them by volume. */
+  readonly densityGPerMl?: number;
+  /** Number of the food in USDA SR28, where its household weights are from. */
+  readonly ndb?: string;
   readonly measures?: readonly {
-    readonly measure: 'cup' | 'tablespoon' | 'teaspoon' | 'stick' | 'can' | 'piece' | 'pinch';
+    readonly measure: HouseholdMeasure;
     readonly qualifier?: string;
     readonly grams: number;
+    /** Only where it is not the food's table. */
+    readonly source?: string;
   }[];
 };
 
 /** `step` is the one it goes in at, from 0, where it is not the first: heat before it does not reach it. */
-export type SeedLine = { readonly grams: number; readonly step?: number } & (
-  { readonly ingredient: string } | { readonly formula: string }
-);
+export type SeedLine = {
+  readonly grams: number;
+  readonly step?: number;
+  /** As the baker typed it. */
+  readonly typed?: string;
+} & ({ readonly ingredient: string } | { readonly formula: string });
 
 export type SeedStep = {
   readonly text: string;
@@ -77,6 +87,12 @@ export type SeedFormula = {
   readonly colour: string;
   readonly refrigerate: boolean;
   readonly steps: readonly SeedStep[];
+  /** What was changed in this version, for who reads the older one. */
+  readonly note?: string;
+  /** Versions from before, oldest first: what was otherwise in them. */
+  readonly earlier?: readonly Partial<
+    Pick<SeedFormula, 'lines' | 'steps' | 'yieldPpm' | 'densityGPerMl' | 'chilledHours' | 'note'>
+  >[];
 };
 
 export type SeedSponge = {

@@ -15,6 +15,13 @@ export const emailTexts: readonly {
     closing: 'Have the order’s number with you: No. {number}. We wish you a lovely day.',
   },
   {
+    template: 'ingredient-changed',
+    subject: 'Order No. {number}: please read what has changed in your cake',
+    lead: 'Hello {name},\n\nOne of the things we bake with is not what it was when you ordered, so what is in your cake for {day} has changed. Please read it, and tell whoever at your table it matters to.',
+    closing:
+      'If it does not suit somebody, ring us or answer this e-mail before we bake: there is nearly always another way. Ask a doctor what is right for somebody with an allergy.',
+  },
+  {
     template: 'thank-you',
     subject: 'Order No. {number}: thank you from the lane',
     lead: 'Hello {name},\n\nYour cake has left our counter. Thank you for letting us make it.',

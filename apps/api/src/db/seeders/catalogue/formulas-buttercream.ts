@@ -1,4 +1,5 @@
 import type { SeedFormula } from './catalogue-types.ts';
+import { chill, coolToRoom } from './cooling.ts';
 
 /**
  * The six house buttercreams, for 1,000 g of their first ingredient, and the custard that the
@@ -222,14 +223,11 @@ export const buttercreamFormulas: readonly SeedFormula[] = [
       {
         text: 'Into shallow trays, covered at the surface, and into the fridge.',
         activeMinutes: 4,
-        waitingMinutes: 120,
+        waitingMinutes: 90,
         resource: 'cold',
-        critical: {
-          note: '135 to 70 °F within 2 h, and 41 °F (5 °C) within 6 h in all.',
-          limitC: 5,
-          seconds: 21600,
-        },
+        critical: coolToRoom,
       },
+      { ...chill, text: 'Leave it in the fridge until it is cold through.' },
     ],
   },
   {

@@ -1,4 +1,5 @@
 import type { SeedFormula } from './catalogue-types.ts';
+import { chill, coolToRoom } from './cooling.ts';
 
 /** Fillings, the coats that are not buttercream, ours; densities and limits are trade memory. */
 export const fillingFormulas: readonly SeedFormula[] = [
@@ -83,19 +84,20 @@ export const fillingFormulas: readonly SeedFormula[] = [
         activeMinutes: 14,
         waitingMinutes: 0,
         resource: 'bench',
-        critical: { note: 'At least 160 °F (71 °C) on the probe.', limitC: 71 },
-      },
-      {
-        text: 'Strain; butter in pieces; cover at the surface; chill.',
-        activeMinutes: 6,
-        waitingMinutes: 120,
-        resource: 'cold',
         critical: {
-          note: '135 to 70 °F within 2 h, and 41 °F (5 °C) within 6 h in all.',
-          limitC: 5,
-          seconds: 21600,
+          note: 'Pooled eggs: 155 °F (68 °C) for 17 s on the probe (Food Code 3-401.11).',
+          limitC: 68,
+          seconds: 17,
         },
       },
+      {
+        text: 'Strain; butter in pieces; shallow trays, covered at the surface, into the fridge.',
+        activeMinutes: 6,
+        waitingMinutes: 90,
+        resource: 'cold',
+        critical: coolToRoom,
+      },
+      { ...chill, text: 'Leave it in the fridge until it is cold through.' },
     ],
   },
   {
@@ -105,7 +107,7 @@ export const fillingFormulas: readonly SeedFormula[] = [
     lines: [
       { ingredient: 'whole-milk', grams: 1000 },
       { ingredient: 'granulated-sugar', grams: 220 },
-      { ingredient: 'egg-whole', grams: 300 },
+      { ingredient: 'egg-yolk', grams: 240 },
       { ingredient: 'cornstarch', grams: 90 },
       { ingredient: 'butter', grams: 120, step: 1 },
       { ingredient: 'vanilla', grams: 20, step: 1 },
@@ -128,16 +130,13 @@ export const fillingFormulas: readonly SeedFormula[] = [
         critical: { note: 'At least 160 °F (71 °C) all through.', limitC: 71 },
       },
       {
-        text: 'Butter and vanilla in; shallow trays; cover at the surface; chill.',
+        text: 'Butter and vanilla in; shallow trays, covered at the surface, into the fridge.',
         activeMinutes: 5,
-        waitingMinutes: 120,
+        waitingMinutes: 90,
         resource: 'cold',
-        critical: {
-          note: '135 to 70 °F within 2 h, and 41 °F (5 °C) within 6 h in all.',
-          limitC: 5,
-          seconds: 21600,
-        },
+        critical: coolToRoom,
       },
+      { ...chill, text: 'Leave it in the fridge until it is cold through.' },
     ],
   },
   {
@@ -145,10 +144,10 @@ export const fillingFormulas: readonly SeedFormula[] = [
     name: 'Salted caramel',
     kind: 'filling',
     lines: [
-      { ingredient: 'granulated-sugar', grams: 800 },
-      { ingredient: 'heavy-cream', grams: 560 },
-      { ingredient: 'butter', grams: 320 },
-      { ingredient: 'salt', grams: 12 },
+      { ingredient: 'granulated-sugar', grams: 800, typed: '4 cups granulated sugar, 800 g' },
+      { ingredient: 'heavy-cream', grams: 560, typed: '2 1/3 cups heavy cream, 560 g' },
+      { ingredient: 'butter', grams: 320, step: 1, typed: '320 g butter' },
+      { ingredient: 'salt', grams: 12, step: 1, typed: '2 tsp salt, 12 g' },
     ],
     yieldPpm: 880_000,
     densityGPerMl: 1.2,

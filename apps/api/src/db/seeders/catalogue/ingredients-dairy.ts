@@ -2,8 +2,9 @@ import type { SeedIngredient } from './catalogue-types.ts';
 
 /**
  * Butter, milk and eggs as this kitchen buys them; makers are invented. Household weights are
- * USDA SR28 (butter 01001, whole milk 01077, heavy cream 01053, condensed milk 01095, cream cheese
- * 01017, eggs 01123 to 01125).
+ * USDA SR28 under the number beside each; those of egg by the cup and of dairy by the tablespoon
+ * are that table from memory. Densities of liquids are their cup over 236.5882365 mL. A dozen of
+ * shell eggs is paid for once: its price is shared by weight, whites and yolks.
  */
 export const dairyAndEggs: readonly SeedIngredient[] = [
   {
@@ -13,6 +14,8 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     name: 'Unsalted butter, 82 % fat',
     commonName: 'butter',
     madeOf: 'cream',
+    roundingG: 5,
+    ndb: '01001',
     packG: 454,
     packPriceMinor: 545,
     allergens: [{ allergen: 'milk', state: 'contains' }],
@@ -28,10 +31,16 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Millbrook Creamery',
     name: 'Heavy cream, 36 % fat',
     commonName: 'cream',
+    roundingG: 5,
+    densityGPerMl: 1.006,
+    ndb: '01053',
     packG: 952,
     packPriceMinor: 620,
     allergens: [{ allergen: 'milk', state: 'contains' }],
-    measures: [{ measure: 'cup', grams: 238 }],
+    measures: [
+      { measure: 'cup', grams: 238 },
+      { measure: 'tablespoon', grams: 15 },
+    ],
   },
   {
     id: 'whole-milk',
@@ -39,10 +48,16 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Millbrook Creamery',
     name: 'Whole milk',
     commonName: 'milk',
+    roundingG: 5,
+    densityGPerMl: 1.031,
+    ndb: '01077',
     packG: 3904,
     packPriceMinor: 479,
     allergens: [{ allergen: 'milk', state: 'contains' }],
-    measures: [{ measure: 'cup', grams: 244 }],
+    measures: [
+      { measure: 'cup', grams: 244 },
+      { measure: 'tablespoon', grams: 15 },
+    ],
   },
   {
     id: 'condensed-milk',
@@ -51,12 +66,13 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     name: 'Sweetened condensed milk',
     commonName: 'sweetened condensed milk',
     madeOf: 'milk, sugar',
+    ndb: '01095',
     packG: 397,
     packPriceMinor: 315,
     allergens: [{ allergen: 'milk', state: 'contains' }],
     measures: [
       { measure: 'cup', grams: 306 },
-      { measure: 'can', grams: 397 },
+      { measure: 'can', grams: 397, source: 'Its label, 14 oz' },
     ],
   },
   {
@@ -66,10 +82,15 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     name: 'Cream cheese',
     commonName: 'cream cheese',
     madeOf: 'milk, cream, salt, cultures',
+    roundingG: 5,
+    ndb: '01017',
     packG: 1360,
     packPriceMinor: 1180,
     allergens: [{ allergen: 'milk', state: 'contains' }],
-    measures: [{ measure: 'cup', grams: 232 }],
+    measures: [
+      { measure: 'cup', grams: 232 },
+      { measure: 'tablespoon', grams: 14.5 },
+    ],
   },
   {
     id: 'egg-whole',
@@ -77,11 +98,15 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Cope Hill Farm',
     name: 'Large eggs, a dozen',
     commonName: 'egg',
+    ndb: '01123',
     packG: 600,
     packPriceMinor: 525,
     allergens: [{ allergen: 'egg', state: 'contains' }],
     egg: { part: 'whole', pasteurised: false },
-    measures: [{ measure: 'piece', grams: 50 }],
+    measures: [
+      { measure: 'piece', grams: 50 },
+      { measure: 'cup', grams: 243 },
+    ],
   },
   {
     id: 'egg-white',
@@ -89,11 +114,31 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Cope Hill Farm',
     name: 'Large eggs, the whites',
     commonName: 'egg white',
+    ndb: '01124',
     packG: 396,
     packPriceMinor: 347,
     allergens: [{ allergen: 'egg', state: 'contains' }],
     egg: { part: 'white', pasteurised: false },
-    measures: [{ measure: 'piece', grams: 33 }],
+    measures: [
+      { measure: 'piece', grams: 33 },
+      { measure: 'cup', grams: 243 },
+    ],
+  },
+  {
+    id: 'egg-yolk',
+    family: 'egg',
+    brand: 'Cope Hill Farm',
+    name: 'Large eggs, the yolks',
+    commonName: 'egg yolk',
+    ndb: '01125',
+    packG: 204,
+    packPriceMinor: 178,
+    allergens: [{ allergen: 'egg', state: 'contains' }],
+    egg: { part: 'yolk', pasteurised: false },
+    measures: [
+      { measure: 'piece', grams: 17 },
+      { measure: 'cup', grams: 243 },
+    ],
   },
   {
     id: 'egg-white-carton',
@@ -101,10 +146,12 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Henley & Roe',
     name: 'Pasteurised egg whites',
     commonName: 'egg white',
+    ndb: '01124',
     packG: 946,
     packPriceMinor: 790,
     allergens: [{ allergen: 'egg', state: 'contains' }],
     egg: { part: 'white', pasteurised: true },
+    measures: [{ measure: 'cup', grams: 243 }],
   },
   {
     id: 'egg-yolk-carton',
@@ -112,9 +159,11 @@ export const dairyAndEggs: readonly SeedIngredient[] = [
     brand: 'Henley & Roe',
     name: 'Pasteurised egg yolks',
     commonName: 'egg yolk',
+    ndb: '01125',
     packG: 946,
     packPriceMinor: 1240,
     allergens: [{ allergen: 'egg', state: 'contains' }],
     egg: { part: 'yolk', pasteurised: true },
+    measures: [{ measure: 'cup', grams: 243 }],
   },
 ];

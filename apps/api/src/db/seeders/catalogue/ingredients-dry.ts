@@ -1,9 +1,9 @@
 import type { SeedIngredient } from './catalogue-types.ts';
 
 /**
- * Flours, sugars, starches and raising agents. Household weights are USDA SR28 (granulated sugar
- * 19335, powdered 19336, brown 19334, flour 20081, cornstarch 20027, cocoa 19165, salt 02047,
- * baking powder 18369).
+ * Flours, sugars, starches and raising agents. Household weights are USDA SR28 under the number
+ * beside each; spoons of sugar, salt and cocoa and cups of nuts are that table from memory.
+ * Raising agents are weighed as finely as salts.
  */
 export const dryGoods: readonly SeedIngredient[] = [
   {
@@ -12,6 +12,8 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Tern Mill',
     name: 'Soft wheat flour',
     commonName: 'wheat flour',
+    roundingG: 5,
+    ndb: '20081',
     packG: 11_340,
     packPriceMinor: 1690,
     allergens: [
@@ -26,10 +28,15 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Tern Mill',
     name: 'Granulated cane sugar',
     commonName: 'sugar',
+    roundingG: 5,
+    ndb: '19335',
     packG: 11_340,
     packPriceMinor: 1540,
     allergens: [],
-    measures: [{ measure: 'cup', grams: 200 }],
+    measures: [
+      { measure: 'cup', grams: 200 },
+      { measure: 'teaspoon', grams: 4.2 },
+    ],
   },
   {
     id: 'powdered-sugar',
@@ -38,6 +45,8 @@ export const dryGoods: readonly SeedIngredient[] = [
     name: 'Powdered sugar',
     commonName: 'powdered sugar',
     madeOf: 'sugar, cornstarch',
+    roundingG: 5,
+    ndb: '19336',
     packG: 11_340,
     packPriceMinor: 1880,
     allergens: [],
@@ -52,6 +61,8 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Tern Mill',
     name: 'Light brown sugar',
     commonName: 'brown sugar',
+    roundingG: 5,
+    ndb: '19334',
     packG: 907,
     packPriceMinor: 285,
     allergens: [],
@@ -63,6 +74,7 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Tern Mill',
     name: 'Cornstarch',
     commonName: 'cornstarch',
+    ndb: '20027',
     packG: 1814,
     packPriceMinor: 560,
     allergens: [],
@@ -75,6 +87,8 @@ export const dryGoods: readonly SeedIngredient[] = [
     name: 'Baking powder',
     commonName: 'baking powder',
     madeOf: 'sodium acid pyrophosphate, sodium bicarbonate, cornstarch',
+    roundingG: 0.1,
+    ndb: '18369',
     packG: 1134,
     packPriceMinor: 980,
     allergens: [],
@@ -86,6 +100,8 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Fenwick',
     name: 'Baking soda',
     commonName: 'sodium bicarbonate',
+    roundingG: 0.1,
+    ndb: '18372',
     packG: 907,
     packPriceMinor: 190,
     allergens: [],
@@ -97,10 +113,15 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Fenwick',
     name: 'Fine sea salt',
     commonName: 'salt',
+    roundingG: 0.1,
+    ndb: '02047',
     packG: 737,
     packPriceMinor: 210,
     allergens: [],
-    measures: [{ measure: 'teaspoon', grams: 6 }],
+    measures: [
+      { measure: 'teaspoon', grams: 6 },
+      { measure: 'tablespoon', grams: 18 },
+    ],
   },
   {
     id: 'cocoa',
@@ -108,10 +129,14 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Quayside',
     name: 'Cocoa powder, alkalised',
     commonName: 'cocoa',
+    ndb: '19165',
     packG: 1000,
     packPriceMinor: 1760,
     allergens: [{ allergen: 'milk', state: 'may-contain' }],
-    measures: [{ measure: 'cup', grams: 86 }],
+    measures: [
+      { measure: 'cup', grams: 86 },
+      { measure: 'tablespoon', grams: 5.4 },
+    ],
   },
   {
     id: 'dark-chocolate',
@@ -134,9 +159,11 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Rook Orchard',
     name: 'Ground almonds',
     commonName: 'almonds',
+    ndb: '12061',
     packG: 1361,
     packPriceMinor: 1790,
     allergens: [{ allergen: 'tree-nuts', species: ['almond'], state: 'contains' }],
+    measures: [{ measure: 'cup', grams: 95 }],
   },
   {
     id: 'walnuts',
@@ -144,9 +171,11 @@ export const dryGoods: readonly SeedIngredient[] = [
     brand: 'Rook Orchard',
     name: 'Walnut pieces',
     commonName: 'walnuts',
+    ndb: '12155',
     packG: 907,
     packPriceMinor: 1120,
     allergens: [{ allergen: 'tree-nuts', species: ['walnut'], state: 'contains' }],
+    measures: [{ measure: 'cup', grams: 120 }],
   },
   {
     id: 'hazelnut-paste',

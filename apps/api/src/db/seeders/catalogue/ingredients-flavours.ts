@@ -1,6 +1,10 @@
 import type { SeedIngredient } from './catalogue-types.ts';
 
-/** Fruit, oils, syrups and flavours. Household weights are USDA SR28 (honey 19296, corn syrup 19350, vanilla extract 02050). */
+/**
+ * Fruit, oils, syrups and flavours. Household weights are USDA SR28 under the number beside each;
+ * honey by the spoon, oil, water, vinegar, juices and cinnamon are that table from memory.
+ * Densities are the cup over 236.5882365 mL; vanilla's is its tablespoon over 14.79 mL.
+ */
 export const fruitAndFlavours: readonly SeedIngredient[] = [
   {
     id: 'vanilla',
@@ -9,6 +13,8 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     name: 'Pure vanilla extract',
     commonName: 'vanilla extract',
     madeOf: 'water, alcohol, vanilla',
+    densityGPerMl: 0.879,
+    ndb: '02050',
     packG: 946,
     packPriceMinor: 7900,
     allergens: [],
@@ -24,11 +30,15 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Cope Hill Farm',
     name: 'Wildflower honey',
     commonName: 'honey',
+    ndb: '19296',
     packG: 2268,
     packPriceMinor: 2350,
     allergens: [],
     traits: ['honey'],
-    measures: [{ measure: 'cup', grams: 339 }],
+    measures: [
+      { measure: 'cup', grams: 339 },
+      { measure: 'tablespoon', grams: 21 },
+    ],
   },
   {
     id: 'corn-syrup',
@@ -36,6 +46,7 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Fenwick',
     name: 'Light corn syrup',
     commonName: 'corn syrup',
+    ndb: '19350',
     packG: 1420,
     packPriceMinor: 690,
     allergens: [],
@@ -47,9 +58,13 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Tern Mill',
     name: 'Sunflower oil',
     commonName: 'sunflower oil',
+    roundingG: 5,
+    densityGPerMl: 0.921,
+    ndb: '04506',
     packG: 2720,
     packPriceMinor: 1180,
     allergens: [],
+    measures: [{ measure: 'cup', grams: 218 }],
   },
   {
     id: 'water',
@@ -57,9 +72,13 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: null,
     name: 'Tap water',
     commonName: 'water',
+    roundingG: 5,
+    densityGPerMl: 1,
+    ndb: '14411',
     packG: 1000,
     packPriceMinor: 0,
     allergens: [],
+    measures: [{ measure: 'cup', grams: 237 }],
   },
   {
     id: 'vinegar',
@@ -67,9 +86,12 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Fenwick',
     name: 'White vinegar, 5 %',
     commonName: 'vinegar',
+    densityGPerMl: 1.006,
+    ndb: '02053',
     packG: 946,
     packPriceMinor: 240,
     allergens: [],
+    measures: [{ measure: 'cup', grams: 238 }],
   },
   {
     id: 'lemon-juice',
@@ -77,9 +99,12 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: null,
     name: 'Lemons, squeezed here',
     commonName: 'lemon juice',
+    densityGPerMl: 1.031,
+    ndb: '09152',
     packG: 1000,
     packPriceMinor: 720,
     allergens: [],
+    measures: [{ measure: 'cup', grams: 244 }],
   },
   {
     id: 'lemon-zest',
@@ -97,9 +122,12 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: null,
     name: 'Oranges, squeezed here',
     commonName: 'orange juice',
+    densityGPerMl: 1.048,
+    ndb: '09206',
     packG: 1000,
     packPriceMinor: 560,
     allergens: [],
+    measures: [{ measure: 'cup', grams: 248 }],
   },
   {
     id: 'orange-zest',
@@ -127,12 +155,15 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Ardal',
     name: 'Ground cinnamon',
     commonName: 'cinnamon',
+    roundingG: 0.1,
+    ndb: '02010',
     packG: 454,
     packPriceMinor: 1150,
     allergens: [
       { allergen: 'mustard', state: 'may-contain' },
       { allergen: 'celery', state: 'may-contain' },
     ],
+    measures: [{ measure: 'teaspoon', grams: 2.6 }],
   },
   {
     id: 'raspberries',
@@ -170,6 +201,7 @@ export const fruitAndFlavours: readonly SeedIngredient[] = [
     brand: 'Fenwick',
     name: 'Apple pectin',
     commonName: 'pectin',
+    roundingG: 0.1,
     packG: 454,
     packPriceMinor: 2150,
     allergens: [{ allergen: 'sulphites', state: 'may-contain' }],
