@@ -1,5 +1,6 @@
 import { evaluate } from './evaluate.ts';
 import { firstLoad } from './first-load.ts';
+import { formula } from './formula.ts';
 import { fuzz } from './fuzz.ts';
 import { killedWorkers } from './kills.ts';
 import { photos } from './photos.ts';
@@ -14,6 +15,7 @@ import { estimates, menu } from './routes.ts';
 
 const parts: readonly Part[] = [
   evaluate,
+  formula,
   menu,
   estimates,
   firstLoad,

@@ -7,6 +7,8 @@ import type { PartCandidate } from './typed-line.ts';
 type Shelved = {
   readonly candidate: PartCandidate;
   readonly ingredient: Ingredient | null;
+  /** Its name as it stands, in lower case. */
+  readonly name: string;
   /** Names it is known by in full: on the shelf, with its brand, on a label. */
   readonly names: readonly string[];
   readonly label: ReadonlySet<string>;
@@ -31,6 +33,7 @@ function shelvedOf(index: PantryIndex): readonly Shelved[] {
     const treated = it.pasteurised === 'yes' ? ['pasteurized', 'pasteurised'] : [];
     shelved.push({
       candidate: { part, name: it.name },
+      name: it.name.toLowerCase(),
       ingredient: it,
       names: [it.name, it.labelName, ...(it.brand === null ? [] : [`${it.brand} ${it.name}`])].map(
         sameName,
@@ -48,6 +51,7 @@ function shelvedOf(index: PantryIndex): readonly Shelved[] {
     const part: FormulaPart = { kind: 'formula', formulaVersionId: it.currentVersionId };
     shelved.push({
       candidate: { part, name: it.name },
+      name: it.name.toLowerCase(),
       ingredient: null,
       names: [sameName(it.name)],
       label: new Set(nameWords(it.name)),
@@ -68,7 +72,6 @@ export function findWholeName(
 ): { readonly candidate: PartCandidate; readonly from: number; readonly to: number } | null {
   const lower = text.toLowerCase();
   const standing = shelvedOf(index)
-    .map(({ candidate }) => ({ candidate, name: candidate.name.toLowerCase() }))
     .filter(({ name }) => standsIn(lower, name))
     .toSorted((a, b) => b.name.length - a.name.length);
   const [longest, next] = standing;
