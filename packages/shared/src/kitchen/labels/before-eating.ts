@@ -1,8 +1,10 @@
+import type { Decoration } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import type { Part } from '../parts.ts';
 import { timesOf } from '../piped.ts';
 import type { ResolvedDesign } from '../resolve-design.ts';
 import { capitalise } from '../sentences.ts';
+import { inSentence } from './name-in-sentence.ts';
 import { supportsOf } from '../supports.ts';
 import { tierName } from '../tier-name.ts';
 
@@ -14,7 +16,7 @@ const onStems: readonly string[] = ['flower', 'topper', 'leaf', 'figure'];
  * boards and dowels, dummies, decorations that are not for eating with whatever they stand on.
  */
 export function toRemove(resolved: ResolvedDesign): string[] {
-  const { tiers, decorations } = resolved;
+  const { tiers } = resolved;
   const { boards, dowels } = supportsOf(tiers);
   const hidden = [count(boards, 'board'), count(dowels, 'dowel')].filter((it) => it !== '');
   const dummies = tiers.filter((it) => !it.real);
@@ -26,16 +28,24 @@ export function toRemove(resolved: ResolvedDesign): string[] {
       ({ index }) =>
         `${tierName(index, tiers.length)}: a dummy, not cake. Nothing on it is for eating.`,
     ),
-    ...decorations
-      .filter(({ decoration }) => decoration.edge !== 'edible')
-      .map((it) => {
-        const { decoration } = it;
-        const times = timesOf(it, tiers.length);
-        const many = decoration.per === 'piece' && times > 1 ? `${times} × ` : '';
-        const stems = onStems.includes(decoration.glyph) ? ', with any wires, picks and stems' : '';
-        return `${many}${decoration.name}: not for eating. Take off first${stems}.`;
-      }),
+    ...inedible(resolved).map(({ decoration, times }) => {
+      const many = decoration.per === 'piece' && times > 1 ? `${times} × ` : '';
+      const stems = onStems.includes(decoration.glyph) ? ', with any wires, picks and stems' : '';
+      return `${many}${decoration.name}: not for eating. Take off first${stems}.`;
+    }),
   ];
+}
+
+/** Decorations that are not for eating, each kind once with how many there are. */
+function inedible({ tiers, decorations }: ResolvedDesign) {
+  const kinds = new Map<string, { decoration: Decoration; times: number }>();
+  for (const it of decorations) {
+    const { decoration } = it;
+    if (decoration.edge === 'edible') continue;
+    const times = (kinds.get(decoration.id)?.times ?? 0) + timesOf(it, tiers.length);
+    kinds.set(decoration.id, { decoration, times });
+  }
+  return [...kinds.values()];
 }
 
 function count(n: number, one: string): string {
@@ -52,7 +62,8 @@ export function cautionsOf(
   resolved: ResolvedDesign,
   eggAdvisory: string,
 ): string[] {
-  const named = (has: (part: Part) => boolean) => parts.filter(has).map((it) => it.name);
+  const named = (has: (part: Part) => boolean) =>
+    parts.filter(has).map((it) => inSentence(it.name));
   const raw = named((it) => it.contents.undercookedEgg);
   const honey = named((it) => it.contents.honey);
   const alcohol = named((it) => it.contents.alcohol);

@@ -14,6 +14,7 @@ import { coldHoldingC, fsis } from '../time-out.ts';
 import { allergenLines, gapSentence, labelGaps, type KitchenWord } from './allergen-lines.ts';
 import { cautionsOf, toRemove } from './before-eating.ts';
 import { ingredientStatement } from './ingredient-statement.ts';
+import { inSentence } from './name-in-sentence.ts';
 import { useByOf, type KeptPart } from './label-dates.ts';
 import { netWeightText, smallestFigureMm, smallestXHeightMm } from './type-size.ts';
 import { weighIngredients, type LabelledPart } from './weigh-ingredients.ts';
@@ -277,19 +278,10 @@ function productName(group: Group): string {
     group.bodies.flatMap(({ coating }) => (coating === null ? [] : coatingName(coating))),
   );
   const kind = group.kind === 'cake' ? 'Cake' : 'Cutting cake';
-  const made = [sponges, fillings, coats].filter((it) => it.length > 0).map(formatList);
-  return made.length === 0 ? kind : `${kind}: ${lowerNames(made.join(', '))}`;
-}
-
-/** Names in the middle of a line; proper names keep their capital. */
-function lowerNames(text: string): string {
-  return text.replace(
-    /(^|, | and )(\p{Lu})(?=\p{Ll})/gu,
-    (whole, before: string, head: string, at: number) =>
-      /^(?:Swiss|Italian|French|German|Russian|American)\b/u.test(text.slice(at + before.length))
-        ? whole
-        : `${before}${head.toLowerCase()}`,
-  );
+  const made = [sponges, fillings, coats]
+    .filter((it) => it.length > 0)
+    .map((names) => formatList(names.map(inSentence)));
+  return made.length === 0 ? kind : `${kind}: ${made.join(', ')}`;
 }
 
 function keepLines(keeping: readonly PartKeeping[], { resolved }: LabelInput): string[] {

@@ -65,7 +65,7 @@ function drawHead(sheet: CareSheet, { number, resolved, label, pickup }: CareCar
   sheet.paragraph([strongRun(`Care card No. ${number}. ${label.product}`, 9.5)], 1);
   const day = formatDay(pickup.date, { locale: studio.locale, year: true });
   sheet.paragraph([textRun(`Collected ${day}, ${formatWindow(pickup.start, pickup.minutes)}.`)], 4);
-  const bottom = drawCake(document, resolved, { x, y: sheet.y(), width, height: 215 });
+  const bottom = drawCake(document, resolved, { x, y: sheet.y(), width, height: 235 });
   sheet.moveTo(bottom + 2);
 }
 

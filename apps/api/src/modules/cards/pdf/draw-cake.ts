@@ -14,7 +14,7 @@ import { printable } from './fonts.ts';
 import { lineOn, mixed, outlineOf, paper } from './ink.ts';
 
 /** Points a millimetre at most: a small cake is not blown up to fill the card. */
-const largestScale = 0.62;
+const largestScale = 0.75;
 /** Room for what stands on top, and a dimension line's own height, points. */
 const headroom = 26;
 const measureStep = 13;
@@ -33,7 +33,8 @@ export function drawCake(document: CardDocument, resolved: ResolvedDesign, room:
   const board = design.cake === null ? null : boardOf(design.cake, menu);
   if (board === null || tiers.length === 0) return room.y;
   const lead = menu.studio.lengthLead;
-  const side = 74;
+  if (design.cake?.kind === 'sheet') return drawSheet(document, resolved, room);
+  const side = 60;
   const widths = widthsOf(tiers);
   const below = boardPt + 8 + widths.length * measureStep;
   const totalMm = tiers.reduce((sum, it) => sum + it.block.heightMm, 0);
@@ -76,6 +77,42 @@ export function drawCake(document: CardDocument, resolved: ResolvedDesign, room:
   const right = middle + (Math.max(...boxes.map((it) => it.width)) / 2 + 12);
   measureUp(document, right, top, floor, formatLength(totalMm, lead));
   return y;
+}
+
+/** A sheet is looked at from above: its top is what there is to see. */
+function drawSheet(document: CardDocument, resolved: ResolvedDesign, room: Box): number {
+  const { pdf } = document;
+  const [sheet] = resolved.tiers;
+  if (sheet === undefined) return room.y;
+  const { widthMm, depthMm } = sheet.block;
+  const lead = resolved.menu.studio.lengthLead;
+  const scale = Math.min((room.width - 150) / widthMm, 120 / depthMm);
+  const width = widthMm * scale;
+  const box = {
+    x: room.x + (room.width - width) / 2,
+    y: room.y + 12,
+    width,
+    height: depthMm * scale,
+  };
+  drawTier(pdf, sheet, resolved, box);
+  const glyphs = glyphsOf(resolved)[0] ?? [];
+  for (const it of glyphs) drawBand(pdf, it, box);
+  // In the corners, where they leave the words alone.
+  glyphs
+    .filter(({ glyph }) => standing.includes(glyph))
+    .forEach((it, at) => {
+      const left = at % 2 === 0;
+      const size = it.glyph === 'print' ? 20 : 13;
+      for (let n = 0; n < (it.glyph === 'print' ? 1 : it.count); n += 1) {
+        const x = left ? box.x + 16 + n * 9 : box.x + width - 16 - n * 9;
+        drawStanding(pdf, it, { x, y: box.y + 17 + (n % 2) * 5 }, size);
+      }
+    });
+  drawWords(document, resolved, 0, box);
+  const below = box.y + box.height + 9;
+  measureAcross(document, box.x, box.x + width, below, formatLength(widthMm, lead));
+  measureUp(document, box.x + width + 9, box.y, box.y + box.height, formatLength(depthMm, lead));
+  return below + measureStep;
 }
 
 /** Each width once, the widest last, so that lines below the cake grow outwards. */
