@@ -15,7 +15,7 @@ export const minor = z.int();
 /** An sRGB colour, `#rrggbb`. */
 export const colourHex = z
   .string()
-  .check(z.regex(/^#[0-9a-f]{6}$/i, 'Write a colour as # and six figures.'));
+  .check(z.regex(/^#[0-9a-f]{6}$/i, 'Write a color as # and six figures.'));
 
 /** No line breaks and no other control characters: what is kept as a line stays one. */
 const onOneLine = z.regex(/^\P{Cc}*$/u, 'On one line, please.');

@@ -48,7 +48,9 @@ function colourOf(hex: string): Color {
 /**
  * What dye makes of a base. Dye only takes light away: of the red, green and blue light a base
  * gives back, each can be lowered to what the wanted colour gives and none can be raised. So
- * deep colours come on any base, a clean pale blue comes on none that is bright yellow.
+ * deep colours come on any base, a clean pale blue comes on none that is bright yellow (it comes
+ * out green, as dyed yolk does), and nothing comes whiter than the base is. Of real dyes, which
+ * take a little of every light, this is the best that can be hoped for.
  */
 export function reachableTint(wanted: string, base: string): ReachedTint {
   const aim = toLinear(colourOf(wanted));
@@ -66,22 +68,6 @@ export function reachableTint(wanted: string, base: string): ReachedTint {
     difference: off,
     reach: off < closeBelow ? 'close' : off < shiftsBelow ? 'shifts' : 'not-on-this-base',
   };
-}
-
-/** Something with a base colour of its own: a buttercream style, a covering. */
-export type Base = { readonly id: string; readonly name: string; readonly colour: string };
-
-/** The bases on which a wanted colour comes nearer than on `base`, nearest first. */
-export function nearerBases<Item extends Base>(
-  wanted: string,
-  base: string,
-  bases: readonly Item[],
-): (Item & { readonly tint: ReachedTint })[] {
-  const here = reachableTint(wanted, base).difference;
-  return bases
-    .map((it) => ({ ...it, tint: reachableTint(wanted, it.colour) }))
-    .filter((it) => it.tint.difference < here && it.tint.reach !== 'not-on-this-base')
-    .sort((a, b) => a.tint.difference - b.tint.difference);
 }
 
 /** Colours offered as a start; names and mixes are our own. */
@@ -103,15 +89,3 @@ export const colourPicks = [
   { name: 'Plum', colour: '#6f3f63' },
   { name: 'Cocoa', colour: '#6b4a38' },
 ] as const;
-
-export type PickedTint = ReachedTint & { readonly name: string };
-
-/**
- * The picks as they come out on a base, in their own order; those that would come out as another
- * colour are left out.
- */
-export function paletteFor(base: string): PickedTint[] {
-  return colourPicks
-    .map((pick) => ({ name: pick.name, ...reachableTint(pick.colour, base) }))
-    .filter((it) => it.reach !== 'not-on-this-base');
-}

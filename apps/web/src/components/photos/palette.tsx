@@ -2,7 +2,7 @@
 export function Palette({ colours }: { readonly colours: readonly string[] }) {
   if (colours.length === 0) return null;
   return (
-    <ul aria-label="Colours in it" className="flex flex-wrap gap-x-3 gap-y-1 text-xs tabular-nums">
+    <ul aria-label="Colors in it" className="flex flex-wrap gap-x-3 gap-y-1 text-xs tabular-nums">
       {colours.map((colour) => (
         <li key={colour} className="inline-flex items-center gap-1.5">
           <span

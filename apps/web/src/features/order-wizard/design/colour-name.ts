@@ -5,8 +5,8 @@ export function colourName(colour: string): string {
   return colourPicks.find((it) => it.colour === colour)?.name ?? colour;
 }
 
-/** "Photo colour 2": a colour out of the customer's pictures, by its place among them; null for others. */
+/** "Photo color 2": a colour out of the customer's pictures, by its place among them; null for others. */
 export function photoColour(colour: string, fromPhotos: readonly string[]): string | null {
   const at = fromPhotos.indexOf(colour);
-  return at < 0 ? null : `Photo colour ${at + 1}`;
+  return at < 0 ? null : `Photo color ${at + 1}`;
 }

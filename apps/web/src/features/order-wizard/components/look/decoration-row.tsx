@@ -6,9 +6,11 @@ import { Button } from '#web/components/ui/button.tsx';
 import { NumberField } from '#web/components/ui/number-field.tsx';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
 import { Select } from '#web/components/ui/select.tsx';
-import { colourName } from '../../design/colour-name.ts';
+import { colourGroups } from '../../design/colour-groups.ts';
+import { colourName, photoColour } from '../../design/colour-name.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
+import { DecorationColour } from './decoration-colour.tsx';
 import { sourceWords } from './source-words.ts';
 
 const whole = 'whole';
@@ -22,15 +24,16 @@ type Props = {
 
 /** One decoration on the cake: where, how many, in which colour, and who brings it. */
 export function DecorationRow({ at, placed, onChange, onRemove }: Props) {
-  const { menu, values } = useWizard();
+  const { menu, values, pictures } = useWizard();
   const path = `look.decorations.${at}`;
   const quantityProblem = useProblemAt(`${path}.quantity`);
   const onMenu = menu.decorations.find((it) => it.id === placed.decorationId);
   if (onMenu === undefined) return null;
   const { tiers, kind } = values.cake;
-  const colours = [
-    ...new Set([...values.look.palette, ...(placed.colour === null ? [] : [placed.colour])]),
-  ];
+  const fromPhotos = Object.values(pictures).flatMap((it) => it.palette);
+  const groups = colourGroups(values.look.palette, fromPhotos, placed.colour);
+  const coating =
+    (placed.tier === null ? null : tiers[placed.tier]?.coating) ?? values.cake.coating;
   return (
     <li className="grid gap-3 border-l-2 border-cobalt pl-4">
       <div className="flex items-center justify-between gap-4">
@@ -78,21 +81,23 @@ export function DecorationRow({ at, placed, onChange, onRemove }: Props) {
           value={placed.quantity}
           onValue={(value) => onChange({ ...placed, quantity: value ?? Number.NaN })}
         />
-        {colours.length > 0 && (
-          <Select
-            name={`${path}.colour`}
-            label="Colour"
-            value={placed.colour ?? ''}
-            onChange={(event) => onChange({ ...placed, colour: event.target.value || null })}
-          >
-            <option value="">As we think best</option>
-            {colours.map((it) => (
-              <option key={it} value={it}>
-                {colourName(it)}
-              </option>
-            ))}
-          </Select>
-        )}
+        <Select
+          name={`${path}.colour`}
+          label="Color"
+          value={placed.colour ?? ''}
+          onChange={(event) => onChange({ ...placed, colour: event.target.value || null })}
+        >
+          <option value="">As we think best</option>
+          {groups.map(({ label, colours }) => (
+            <optgroup key={label} label={label}>
+              {colours.map((it) => (
+                <option key={it} value={it}>
+                  {photoColour(it, fromPhotos) ?? colourName(it)}
+                </option>
+              ))}
+            </optgroup>
+          ))}
+        </Select>
         {onMenu.sources.length > 1 && (
           <Select
             name={`${path}.source`}
@@ -111,6 +116,13 @@ export function DecorationRow({ at, placed, onChange, onRemove }: Props) {
           </Select>
         )}
       </div>
+      {placed.colour !== null && (
+        <DecorationColour
+          colour={placed.colour}
+          // A piped border is the cake's own buttercream; sugar, paper and ribbon start white.
+          coating={onMenu.glyph === 'border' ? coating : null}
+        />
+      )}
     </li>
   );
 }

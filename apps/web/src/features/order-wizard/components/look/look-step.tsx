@@ -7,18 +7,29 @@ import { DecorationFields } from './decoration-fields.tsx';
 import { ExtraFields } from './extra-fields.tsx';
 import { PaletteFields } from './palette-fields.tsx';
 import { PhotoFields } from './photo-fields.tsx';
+import { TierColours } from './tier-colours.tsx';
 import { WordsFields } from './words-fields.tsx';
 
 /** Colours, words, decorations, pictures to go by: all of it optional. */
 export function LookStep() {
   const note = useAnswer('look.note');
-  const { coating } = useWizard().values.cake;
+  const { values, change } = useWizard();
+  const { cake } = values;
   return (
     <StepPage step="look">
       <PhotoFields />
       <section className="grid gap-6" aria-labelledby="colours-heading">
-        <h2 id="colours-heading">Colours</h2>
-        {coating !== null && <CoatColourFields coating={coating} />}
+        <h2 id="colours-heading">Colors</h2>
+        {cake.coating !== null && (
+          <CoatColourFields
+            coating={cake.coating}
+            name="cake.coating.colour"
+            legend="Color of the coat"
+            ownLabel="Another color for the coat"
+            onCoating={(coating, undo) => change({ cake: { ...cake, coating } }, undo)}
+          />
+        )}
+        <TierColours />
         <PaletteFields />
       </section>
       <WordsFields />

@@ -23,7 +23,7 @@ export function PaletteFields() {
     if (palette.length <= mostColours) change({ look: { ...look, palette } });
   };
   return (
-    <Fold label="Colours for what goes on it" open={look.palette.length > 0}>
+    <Fold label="Colors for what goes on it" open={look.palette.length > 0}>
       <div className="grid gap-4">
         <ChipChoices
           name="look.palette"
@@ -32,7 +32,7 @@ export function PaletteFields() {
           hint={
             full
               ? 'That is five; take one out to choose another.'
-              : 'For flowers, piping and ribbon; your photos’ colours come first.'
+              : 'For flowers, piping and ribbon; your photos’ colors come first.'
           }
           error={problem}
           chips={offered.map((colour) => ({
@@ -44,7 +44,7 @@ export function PaletteFields() {
           onValue={put}
         />
         <OwnColour
-          label="Another colour for it"
+          label="Another color for it"
           onChoose={(colour) => {
             if (!look.palette.includes(colour)) put([...look.palette, colour]);
           }}

@@ -21,14 +21,14 @@ export function lookRows(
     tier === null || cake.tiers.length < 2 ? '' : tierName(tier, cake.tiers.length).toLowerCase();
   const rows: CheckRow[] = [
     {
-      label: 'Colour of the coat',
+      label: 'Color of the coat',
       value: cake.coating?.colour ? <Colours colours={[cake.coating.colour]} /> : 'As it is',
       field: 'cake.coating.colour',
     },
   ];
   if (look.palette.length > 0) {
     rows.push({
-      label: 'Colours on it',
+      label: 'Colors on it',
       value: <Colours colours={look.palette} />,
       field: 'look.palette',
     });
