@@ -128,7 +128,7 @@ describe('a changed label', () => {
   it('touches the open orders with the product in them, and no other', async () => {
     const touched = await confirmed();
     const asked = await ask();
-    const other = await confirmed({
+    const other = await ask({
       cake: { tiers: [roundTier(8, { spongeId: 'cocoa', fillingId: 'passion-fruit' })] },
     });
     const numbers = await relabel('raspberries', {
@@ -163,6 +163,18 @@ describe('a changed label', () => {
     app.clock.advance({ minutes: 30 });
     await deliver();
     expect(await mailsOf(touched)).toEqual([]);
+  });
+
+  it('reaches an order that is being sent meanwhile', async () => {
+    for (const state of ['contains', 'may-contain', 'contains'] as const) {
+      const [asked] = await Promise.all([
+        ask(),
+        relabel('raspberries', { allergens: [{ ...sesame, state }] }),
+      ]);
+      const { estimate } = await look(asked);
+      expect(estimate.allergens.find(({ allergen }) => allergen === 'sesame')?.state).toBe(state);
+    }
+    await relabel('raspberries', { allergens: [] });
   });
 
   it('does not touch what is not on labels: a price', async () => {

@@ -11,6 +11,7 @@ import { IdempotencyKey } from '#api/db/models/idempotency-key.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
 import { Order } from '#api/db/models/order.ts';
 import { Studio } from '#api/db/models/studio.ts';
+import { readPlanVersions } from '#api/db/plan-versions.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { estimateDesign } from '#api/modules/estimates/estimate-design.queries.ts';
 import { freshMenu } from '#api/modules/menu/menu.queries.ts';
@@ -44,6 +45,14 @@ const keyDays = 30;
 /** What is kept of the answer: the key is worked out again, since it is stored nowhere. */
 const keptAnswer = z.omit(submittedOrder, { key: true });
 
+/**
+ * A label, a formula or a price was saved since the order was worked out. An order that is not yet
+ * written is not derived again with the open ones, so it is worked out once more.
+ */
+class CatalogueChanged extends Error {
+  override name = 'CatalogueChanged';
+}
+
 /** Another request with this key was faster; carries nothing, its order is read instead. */
 class SentAlready extends Error {
   override name = 'SentAlready';
@@ -59,24 +68,33 @@ export async function submitOrder(deps: Deps, input: SubmitInput): Promise<Submi
   const requestHash = createHash('sha256').update(JSON.stringify(input.form)).digest('hex');
   const before = await findSubmitted(deps, input, requestHash);
   if (before !== null) return before;
-  const prepared = { ...(await prepare(deps, input.form)), transition };
-  try {
-    return await placeAndWrite(deps, input, prepared, requestHash);
-  } catch (error) {
-    if (!(error instanceof SentAlready)) throw error;
-    const meanwhile = await findSubmitted(deps, input, requestHash);
-    if (meanwhile === null) throw error;
-    return meanwhile;
+  for (let turn = 1; ; turn += 1) {
+    const prepared = { ...(await prepare(deps, input.form)), transition };
+    try {
+      return await placeAndWrite(deps, input, prepared, requestHash);
+    } catch (error) {
+      if (error instanceof CatalogueChanged && turn < mostTurns) continue;
+      if (!(error instanceof SentAlready)) throw error;
+      const meanwhile = await findSubmitted(deps, input, requestHash);
+      if (meanwhile === null) throw error;
+      return meanwhile;
+    }
   }
 }
 
+/** How often an order is worked out while somebody is at the catalogue. */
+const mostTurns = 5;
+
 type Prepared = {
+  /** Of the catalogue it was worked out with. */
+  readonly catalogueVersion: number;
   readonly menu: Menu;
   readonly estimate: Estimate;
   readonly transition: OrderTransition;
 };
 
 async function prepare({ clock }: Deps, form: SubmitOrder): Promise<Omit<Prepared, 'transition'>> {
+  const { catalogueVersion } = await readPlanVersions();
   const menu = await freshMenu();
   const { date } = form.day;
   const estimate = estimateDesign(
@@ -91,7 +109,7 @@ async function prepare({ clock }: Deps, form: SubmitOrder): Promise<Omit<Prepare
       facts: { estimate, seenTotalMinor: form.seenTotalMinor, totalMinor },
     });
   }
-  return { menu, estimate };
+  return { catalogueVersion, menu, estimate };
 }
 
 async function placeAndWrite(
@@ -118,6 +136,8 @@ async function placeAndWrite(
       if ((await IdempotencyKey.findOne({ where: keyRow(input) })) !== null) {
         throw new SentAlready();
       }
+      const { catalogueVersion } = await readPlanVersions();
+      if (catalogueVersion !== prepared.catalogueVersion) throw new CatalogueChanged();
       const order = await writeOrder(deps, { ...input, orderId, placed, ...prepared });
       const { revisionId, cakeItemId } = await writeRevision({
         orderId,

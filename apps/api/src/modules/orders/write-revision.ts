@@ -5,6 +5,7 @@ import { plainCoatOf } from '#shared/kitchen/resolve-design.ts';
 import { blockOfSheet } from '#shared/kitchen/sizes.ts';
 import { ButtercreamStyle } from '#api/db/models/buttercream-style.ts';
 import { Covering } from '#api/db/models/covering.ts';
+import { Decoration } from '#api/db/models/decoration.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import { DeclaredDiet } from '#api/db/models/declared-diet.ts';
 import { Filling } from '#api/db/models/filling.ts';
@@ -193,7 +194,7 @@ function coatingColumns(coating: Coating | null) {
 
 /** Current versions of the formulas a design names; those inside them are named by their lines. */
 async function formulaVersionsOf(design: Design): Promise<string[]> {
-  const { cake } = design;
+  const { cake, look } = design;
   if (cake === null) return [];
   const chosen = (
     pick: (it: { spongeId: string | null; fillingId: string | null }) => string | null,
@@ -211,6 +212,9 @@ async function formulaVersionsOf(design: Design): Promise<string[]> {
     Filling.findAll({ where: { id: chosen((it) => it.fillingId) } }),
     ButtercreamStyle.findAll({ where: { id: coats.flatMap((it) => it.style ?? []) } }),
     Covering.findAll({ where: { id: coats.map((it) => it.covering) } }),
+    Decoration.findAll({
+      where: { id: (look?.decorations ?? []).map((it) => it.decorationId) },
+    }),
   ]);
   const formulaIds = rows.flat().flatMap(({ formulaId }) => formulaId ?? []);
   const formulas = await Formula.findAll({ where: { id: formulaIds } });
