@@ -150,42 +150,55 @@ export type Household = {
  * grams than `mostOffPpm` are not said, further than `aboutPpm` with "about" (all memory).
  */
 const sense = {
-  most: { piece: 200, stick: 12, can: 24, cup: 40, tablespoon: 8, teaspoon: 12, pinch: 2 },
+  most: { piece: 200, stick: 12, can: 24, cup: 40, tablespoon: 8, teaspoon: 6, pinch: 2 },
   aboutPpm: 20_000,
   mostOffPpm: 60_000,
+  /** Eggs come whole, so their count may be further off: the grams beside it are weighed. */
+  mostEggOffPpm: 150_000,
 } as const;
 
 const largestFirst = ['piece', 'stick', 'can', 'cup', 'tablespoon', 'teaspoon', 'pinch'] as const;
 
-/** Cups and spoons together, each by its own weight: `1 cup + 2 tbsp`. */
-function cupAndSpoons(ingredient: Ingredient, grams: number): Household | null {
-  const cup = weightOfMeasure(ingredient, 'cup');
-  const spoon = weightOfMeasure(ingredient, 'tablespoon');
-  if (cup === null || spoon === null || grams < cup.grams / 4) return null;
-  const quarters = Math.floor((grams / cup.grams) * 4 + 1e-9) / 4;
-  const spoons = Math.round((grams - quarters * cup.grams) / spoon.grams);
-  if (spoons < 1 || spoons > 3) return null;
-  const cups = nearestMark(quarters);
-  const spooned = { value: spoons, text: String(spoons) };
-  const total = quarters * cup.grams + spoons * spoon.grams;
+/** Measures that go together, the larger in steps of its own, with how many of the smaller. */
+const together = [
+  { large: 'cup', step: 1 / 4, small: 'tablespoon', mostSmall: 3 },
+  { large: 'tablespoon', step: 1, small: 'teaspoon', mostSmall: 2 },
+] as const;
+
+/** Two measures together, each by its own weight: `1 cup + 2 tbsp`, `4 tbsp + 2 tsp`. */
+function twoTogether(
+  ingredient: Ingredient,
+  grams: number,
+  { large, step, small, mostSmall }: (typeof together)[number],
+): Household | null {
+  const largeG = weightOfMeasure(ingredient, large);
+  const smallG = weightOfMeasure(ingredient, small);
+  if (largeG === null || smallG === null) return null;
+  const count = Math.floor(grams / largeG.grams / step + 1e-9) * step;
+  const rest = Math.round((grams - count * largeG.grams) / smallG.grams);
+  if (count === 0 || count > sense.most[large] || rest < 1 || rest > mostSmall) return null;
+  const total = count * largeG.grams + rest * smallG.grams;
+  const first = say(ingredient, large, nearestMark(count));
   return {
-    text: `${say(ingredient, 'cup', cups)} + ${say(ingredient, 'tablespoon', spooned)}`,
-    count: quarters,
+    text: `${first} + ${say(ingredient, small, { value: rest, text: String(rest) })}`,
+    count,
     grams: total,
     offPpm: Math.round((total / grams - 1) * 1e6),
-    reckoned: cup.reckoned || spoon.reckoned,
+    reckoned: largeG.reckoned || smallG.reckoned,
   };
 }
 
-/** The largest measure that comes close enough, else the one that comes closest. */
+/** The largest measure that comes close enough, else the closest; eggs in their shells by count. */
 export function householdOf(ingredient: Ingredient, grams: number): Household | null {
   if (!(grams > 0) || !Number.isFinite(grams)) return null;
+  const eggs = ingredient.eggPart === null ? null : inMeasure(ingredient, 'piece', grams);
+  if (eggs !== null) return Math.abs(eggs.offPpm) > sense.mostEggOffPpm ? null : eggs;
   const options = largestFirst.flatMap((measure) => {
     const found = inMeasure(ingredient, measure, grams);
     return found === null || found.count > sense.most[measure] ? [] : [found];
   });
-  const both = cupAndSpoons(ingredient, grams);
-  const all = both === null || both.count > sense.most.cup ? options : [...options, both];
+  const pairs = together.flatMap((it) => twoTogether(ingredient, grams, it) ?? []);
+  const all = [...options, ...pairs];
   const close = all.find((it) => Math.abs(it.offPpm) <= sense.aboutPpm);
   if (close !== undefined) return close;
   const [nearest] = all.toSorted((a, b) => Math.abs(a.offPpm) - Math.abs(b.offPpm));

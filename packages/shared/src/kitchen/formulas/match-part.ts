@@ -18,6 +18,8 @@ type Shelved = {
 export type MatchedPart = {
   readonly match: PartCandidate | null;
   readonly candidates: readonly PartCandidate[];
+  /** Whether the first candidate has every telling word; without, none is quite what was typed. */
+  readonly fits: boolean;
 };
 
 const kept = new WeakMap<PantryIndex, readonly Shelved[]>();
@@ -102,7 +104,7 @@ export function matchPart(
   index: PantryIndex,
 ): MatchedPart {
   const asked = tellingWords(words);
-  if (asked.length === 0) return { match: null, candidates: [] };
+  if (asked.length === 0) return { match: null, candidates: [], fits: false };
   const noted = note === null ? [] : tellingWords(note);
   const named = sameName(words);
   const rated = shelvedOf(index)
@@ -111,9 +113,11 @@ export function matchPart(
     .toSorted(betterFirst);
   const candidates = rated.slice(0, most).map((it) => it.candidate);
   const [first, second] = rated;
-  if (first === undefined || first.fits < asked.length) return { match: null, candidates };
+  if (first === undefined || first.fits < asked.length) {
+    return { match: null, candidates, fits: false };
+  }
   const alone = second === undefined || second.fits < asked.length || tells(first, second);
-  return { match: alone ? first.candidate : null, candidates };
+  return { match: alone ? first.candidate : null, candidates, fits: true };
 }
 
 type Rated = {
@@ -124,6 +128,7 @@ type Rated = {
   readonly noted: number;
   readonly named: number;
   readonly shell: number;
+  readonly bought: number;
   readonly spare: number;
 };
 
@@ -149,12 +154,14 @@ function rate(
     named: names.includes(asked.named) ? 2 : labelled ? 1 : 0,
     shell:
       asked.counted && ingredient?.measures.some((it) => it.measure === 'piece') === true ? 1 : 0,
+    // "Vanilla" is sooner the extract on the shelf than one of the studio's own creams.
+    bought: ingredient === null ? 0 : 1,
     spare: words.size - exact,
   };
 }
 
 /** What makes one fit better than another, most telling first; spare words only put in order. */
-const scales = ['fits', 'exact', 'noted', 'shell', 'named'] as const;
+const scales = ['fits', 'exact', 'noted', 'shell', 'named', 'bought'] as const;
 
 function betterFirst(a: Rated, b: Rated): number {
   for (const scale of scales) if (a[scale] !== b[scale]) return b[scale] - a[scale];

@@ -112,19 +112,33 @@ describe('a line as bakers type it', () => {
     ['1 tbsp granulated sugar', 'no-weight'],
     ['300 g marzipan', 'unknown-part'],
     ['3 cups', 'unknown-part'],
-    ['350 g caster sugar', 'which-part'],
+    ['350 g caster sugar', 'unknown-part'],
     // Two kinds of white are on the shelf, and which is a matter of safety.
     ['100 g egg whites', 'which-part'],
     // Salted is another thing than unsalted.
-    ['200 g salted butter', 'which-part'],
+    ['200 g salted butter', 'unknown-part'],
     ['Whisk until it is done.', 'not-read'],
     ['???', 'not-read'],
     [`${'very '.repeat(60)}long`, 'not-read'],
     // Archived.
-    ['200 g old cocoa', 'which-part'],
+    ['200 g old cocoa', 'unknown-part'],
   ])('%s is kept as typed and marked', (text, code) => {
     expect(read(text)).toMatchObject({ asTyped: text, problem: { code } });
     expect(read(text).grams === null || read(text).match === null).toBe(true);
+  });
+
+  it('offers the nearest of the shelf where nothing is quite what was typed', () => {
+    const names = read('200 g salted butter').candidates.map((it) => it.name);
+    expect(names).toEqual(['Unsalted butter, 82 % fat']);
+    expect(read('200 g salted butter').match).toBeNull();
+    expect(read('300 g marzipan').candidates).toEqual([]);
+  });
+
+  it('takes a word for what is bought before what is made of it', () => {
+    const made = version('vanilla-cream', [['vanilla', 1]]);
+    const pantry = indexPantry(bookOf(shelf, [made], { 'vanilla-cream': 'Vanilla cream' }));
+    expect(readFormulaLine('1 tbsp vanilla', pantry).match?.name).toBe('Pure vanilla extract');
+    expect(readFormulaLine('50 g vanilla cream', pantry).match?.name).toBe('Vanilla cream');
   });
 
   it('takes the part that was picked, whatever the words say', () => {

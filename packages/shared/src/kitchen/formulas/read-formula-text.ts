@@ -37,12 +37,13 @@ export function readFormulaLine(
 
   const { amounts, words, note, named } = takeApart(text, index);
   const counted = amounts.some((it) => it.parts.some(({ unit }) => unit === 'piece'));
-  const { match, candidates } =
+  const found =
     part !== undefined
       ? picked(part, index)
       : named !== null
         ? only(named)
         : matchPart(words, note, counted, index);
+  const { match, candidates } = found;
   const thing = match === null ? null : thingOf(match.part, index);
   const said = qualifierOf(words, note);
   const weighed = amounts.map((it) => weighAmount(qualified(it, said), thing));
@@ -61,7 +62,7 @@ export function readFormulaLine(
     grams: grams !== null && grams > 0 ? grams : null,
     reckoned: taken?.reckoned ?? false,
     decided: taken === null ? null : rangeDecided(taken),
-    problem: problemOf({ text, words, weighed, grams, found: { match, candidates } }),
+    problem: problemOf({ text, words, weighed, grams, found }),
     findings: proofread(weighed, thing),
   };
 }
@@ -115,12 +116,13 @@ function qualified(amount: ReadAmount, qualifier: string | null): ReadAmount {
 const only = (match: NonNullable<MatchedPart['match']>): MatchedPart => ({
   match,
   candidates: [match],
+  fits: true,
 });
 
 function picked(part: FormulaPart, index: PantryIndex): MatchedPart {
   const resolved = resolvePart(index, part);
   return resolved.kind === 'missing'
-    ? { match: null, candidates: [] }
+    ? { match: null, candidates: [], fits: false }
     : only({ part, name: resolved.name });
 }
 
@@ -163,7 +165,7 @@ function problemOf({
   words,
   weighed,
   grams,
-  found: { match, candidates },
+  found: { match, fits },
 }: {
   readonly text: string;
   readonly words: string;
@@ -183,7 +185,7 @@ function problemOf({
   }
   if (match === null) {
     if (words === '') return { code: 'unknown-part', message: 'Write what it is.' };
-    return candidates.length > 0
+    return fits
       ? { code: 'which-part', message: `Choose which one “${words}” is.` }
       : { code: 'unknown-part', message: `Nothing in the pantry is called “${words}”.` };
   }
