@@ -54,7 +54,7 @@ export function decksOf({ heightMm }: Pick<Block, 'heightMm'>): 1 | 2 {
 export function cutBlock(block: Block, portion: Footprint): BlockCut {
   const decks = decksOf(block);
   if (block.shape === 'round') {
-    const rings = cutRound(block.widthMm, portion);
+    const rings = withoutCrumb(cutRound(block.widthMm, portion));
     const perDeck = rings.reduce((sum, it) => sum + it.pieces, 0);
     const cuts = cutsOfRings(block.widthMm / 2, rings);
     return { block, decks, rings, grid: null, cuts, perDeck, portions: decks * perDeck };
@@ -69,6 +69,17 @@ export function cutBlock(block: Block, portion: Footprint): BlockCut {
   };
   const cuts = cutsOfGrid(block, grid);
   return { block, decks, rings: [], grid, cuts, perDeck, portions: decks * perDeck };
+}
+
+/** A core narrower than this cannot be cut out by hand: the ring round it is cut to the middle. */
+const narrowestCoreMm = 25;
+
+function withoutCrumb(rings: readonly Ring[]): readonly Ring[] {
+  const core = rings.at(-1);
+  const around = rings.at(-2);
+  if (core === undefined || around === undefined) return rings;
+  if (core.pieces > 0 || 2 * core.outerMm >= narrowestCoreMm) return rings;
+  return [...rings.slice(0, -2), { ...around, innerMm: 0 }];
 }
 
 function cutsOfRings(centreMm: number, rings: readonly Ring[]): Cut[] {

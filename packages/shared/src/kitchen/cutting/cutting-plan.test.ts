@@ -69,6 +69,18 @@ describe('cutting a block', () => {
     expect(cuts.filter((it) => it.kind === 'circle').map((it) => it.r)).toEqual([77, 27]);
   });
 
+  it('cuts the ring round a crumb of a core to the middle', () => {
+    // 305 mm: rings of 50 mm leave 5 mm in the middle.
+    const block = { shape: 'round', widthMm: 305, depthMm: 305, heightMm: 102 } as const;
+    const { rings, portions } = cutBlock(block, dessert);
+    expect(rings.map(({ innerMm, pieces }) => [innerMm, pieces])).toEqual([
+      [102.5, 32],
+      [52.5, 19],
+      [0, 6],
+    ]);
+    expect(portions).toBe(portionsOfBlock(block, dessert));
+  });
+
   it('divides a square evenly, an inner board dividing a tall one', () => {
     const block = { shape: 'square', widthMm: 203, depthMm: 203, heightMm: 152 } as const;
     const cut = cutBlock(block, dessert);

@@ -37,7 +37,7 @@ export function OrderStructure({ order, menu }: Props) {
       {order.estimate.weightG > 0 && (
         <div className="grid gap-1">
           <h3>To carry</h3>
-          <DataList rows={[...weights.toReversed(), whole]} />
+          <DataList rows={[...topDown(weights), whole, ...apart(weights)]} />
         </div>
       )}
       {supports.length > 0 && (
@@ -61,12 +61,20 @@ export function OrderStructure({ order, menu }: Props) {
       {tins.length > 0 && (
         <div className="grid gap-1">
           <h3>Tins and batter</h3>
-          <DataList rows={tins.toReversed()} />
+          <DataList rows={[...topDown(tins), ...apart(tins)]} />
         </div>
       )}
     </div>
   );
 }
+
+const isApart = (row: DataRow): boolean => row.key.startsWith('cutting-cake');
+
+/** The cake on show as it stands in its drawing. */
+const topDown = (rows: readonly DataRow[]): DataRow[] =>
+  rows.filter((it) => !isApart(it)).toReversed();
+
+const apart = (rows: readonly DataRow[]): DataRow[] => rows.filter(isApart);
 
 function sheetsAreKnown(cake: Cake, menu: Menu): boolean {
   if (cake.kind === 'tiered') return true;
@@ -108,12 +116,16 @@ function tinRows(cake: Cake, menu: Menu): DataRow[] {
     if (tins === null) return [];
     const grams = [...new Set(tins.batterG.map((it) => formatWeight(it, lead)))];
     const times = count === 1 ? '' : `${count} × `;
-    const layersEach = tins.layersEach === 2 ? ', two layers each' : '';
+    const layersEach = tins.layersEach === 2 ? ', two layers to a tin' : '';
+    const across =
+      block.widthMm === block.depthMm
+        ? formatLength(block.widthMm, lead)
+        : `${formatLength(block.widthMm, lead)} by ${formatLength(block.depthMm, lead)}`;
     return [
       {
         key: `${at.kind} ${at.index}`,
         label: pieceName(at, cake, menu),
-        value: `${times}${tins.count} ${tins.count === 1 ? 'tin' : 'tins'}, ${formatLength(tins.depthMm, lead)} deep${layersEach}: ${formatList(grams)} of batter, standing ${formatLength(tins.fillMm.least, lead)} to ${formatLength(tins.fillMm.most, lead)} high.`,
+        value: `${times}${tins.count} ${tins.count === 1 ? 'tin' : 'tins'} of ${across}, ${formatLength(tins.depthMm, lead)} deep${layersEach}: ${formatList(grams)} of batter, standing ${formatLength(tins.fillMm.least, lead)} to ${formatLength(tins.fillMm.most, lead)} high.`,
       },
     ];
   });
