@@ -2,7 +2,7 @@ import { type ClipboardEvent, type Dispatch, type KeyboardEvent, memo } from 're
 import type { PantryIndex } from '#shared/kitchen/formulas/pantry-index.ts';
 import { FieldError, controlClasses } from '#web/components/ui/field-frame.tsx';
 import { fieldId } from '#web/lib/forms.ts';
-import { gramsText } from '../formulas/formula-words.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
 import type { EditorAction } from './editor-actions.ts';
 import type { LineRow } from './editor-form.ts';
 import { LineRemark } from './line-remark.tsx';

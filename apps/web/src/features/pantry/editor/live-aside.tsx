@@ -8,8 +8,8 @@ import { Select } from '#web/components/ui/select.tsx';
 import { AllergenLine } from '../components/allergen-line.tsx';
 import { ChangeList } from '../formulas/change-list.tsx';
 import { Cautions } from '../formulas/formula-facts.tsx';
-import { gramsText } from '../formulas/formula-words.ts';
-import { figure } from '../figures.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
+import { figure } from '#web/lib/figure.ts';
 import type { Shelf } from '../shelf.ts';
 import type { Inspected } from './inspect-form.ts';
 

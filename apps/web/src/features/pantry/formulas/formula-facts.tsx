@@ -10,7 +10,8 @@ import { Notice } from '#web/components/ui/notice.tsx';
 import { paths } from '#web/config/paths.ts';
 import { AllergenLine } from '../components/allergen-line.tsx';
 import type { Shelf } from '../shelf.ts';
-import { gramsText, onTheMenu, percentText, shelfLife } from './formula-words.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
+import { onTheMenu, percentText, shelfLife } from './formula-words.ts';
 
 type Props = {
   readonly formula: Formula;

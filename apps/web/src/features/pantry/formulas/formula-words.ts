@@ -2,7 +2,7 @@ import type { FormulaKind, FormulaStep, PartFormulas } from '#shared/contracts/p
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatDay, formatTime } from '#shared/dates/format.ts';
 import { localAt } from '#shared/dates/local-time.ts';
-import { figure } from '../figures.ts';
+import { figure } from '#web/lib/figure.ts';
 import type { House } from '../house.ts';
 
 export const kindWords: Readonly<Record<FormulaKind, string>> = {
@@ -65,12 +65,6 @@ export function onTheMenu(formulaId: string, parts: PartFormulas, menu: Menu): r
     if (parts.decorations[id]?.formulaId === formulaId) names.push(`${name}, decoration`);
   }
   return names;
-}
-
-/** Grams as a scale shows them: tenths under 10 g, whole above, thousands parted. */
-export function gramsText(grams: number, locale: string): string {
-  const digits = grams < 1 ? 2 : grams < 10 ? 1 : 0;
-  return `${figure(grams, locale, digits)} g`;
 }
 
 export function percentText(percent: number, locale: string): string {

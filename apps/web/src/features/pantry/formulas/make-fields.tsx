@@ -4,7 +4,7 @@ import { formatLength } from '#shared/kitchen/measures.ts';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { AmountField } from '../forms/amount-field.tsx';
-import { gramsText } from './formula-words.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
 import type { MakeAsked } from './make-amount.ts';
 
 type Props = {

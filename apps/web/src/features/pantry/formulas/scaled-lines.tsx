@@ -5,8 +5,9 @@ import type { PercentView } from '#shared/kitchen/formulas/percents.ts';
 import type { ScaledFormula, ScaledLine } from '#shared/kitchen/formulas/scale-formula.ts';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
 import { paths } from '#web/config/paths.ts';
-import { figure } from '../figures.ts';
-import { gramsText, percentText } from './formula-words.ts';
+import { figure } from '#web/lib/figure.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
+import { percentText } from './formula-words.ts';
 
 type Props = {
   readonly scaled: ScaledFormula;
@@ -33,7 +34,7 @@ export function ScaledLines({ scaled, percents, index, locale }: Props) {
           </span>
           <span className="min-w-0">
             <PartName line={line} index={index} />
-            {line.eggs !== null && (
+            {percents !== null && line.eggs !== null && (
               <span className="text-slate">
                 , {line.eggs.count} {line.eggs.count === 1 ? 'egg' : 'eggs'}
               </span>

@@ -9,8 +9,9 @@ import {
 } from '#shared/kitchen/measures.ts';
 import type { ScaledFormula } from '#shared/kitchen/formulas/scale-formula.ts';
 import { ToneGlyph } from '#web/components/ui/notice.tsx';
-import { figure } from '../figures.ts';
-import { gramsText, limitTime, resourceWords } from './formula-words.ts';
+import { figure } from '#web/lib/figure.ts';
+import { gramsText } from '#web/lib/grams-text.ts';
+import { limitTime, resourceWords } from './formula-words.ts';
 
 type Props = {
   readonly version: FormulaVersion;
