@@ -186,7 +186,7 @@ function kitchenAdvice(shared: Shared): Noted {
     step: 'day',
     about: aboutOf('kitchen', declared),
     sentence: `We handle ${nameOf(shared)} in this kitchen, so traces can get into any cake we make; ${whose(shared)}.`,
-    plain: `Handled in this kitchen: ${nameOf(shared)}. ${told(shared)}.${grave ? ' Talk with them and record it; only the owner takes it after that.' : ''}`,
+    plain: `Handled in this kitchen: ${nameOf(shared)}. ${told(shared)}.`,
     instead: grave
       ? 'No choice of cake changes that, so there is nothing to choose instead: we talk it over with you before we say yes. Please ask the doctor who knows your guest, too.'
       : 'Tell your guest, and let them decide.',

@@ -55,7 +55,10 @@ function changesOfCake(before: Cake, after: Cake, menu: Menu): string[] {
   coats(before).forEach((coat, at) => {
     const from = coatName(coat, menu);
     const to = coatName(coatsAfter[at] ?? null, menu);
-    if (from !== null && to !== null && from !== to) lines.add(`${from} becomes ${to}.`);
+    if (to === null || from === to) return;
+    // A tier without a coat of its own wears the cake's.
+    if (from !== null) lines.add(`${from} becomes ${to}.`);
+    else if (at === 0) lines.add(`${to} goes over it.`);
   });
   for (const cutting of after.cuttingCakes) {
     const known = before.cuttingCakes.some(

@@ -6,22 +6,24 @@ import { menuFixture } from './testing/menu-fixture.ts';
 
 const egg = { guests: { allergies: [declares({ allergen: 'egg' })] } };
 const date = '2027-07-17';
+const today = '2027-05-01';
 
 describe('whole cakes for the table', () => {
   it('have no part that a guest cannot eat, and hold in a hot garden', () => {
     const design = designWith({ ...egg, setting: { place: 'shade', warmestC: 32 } });
-    const cakes = suitableCakes({ design, date }, menuFixture);
+    const cakes = suitableCakes({ design, date }, menuFixture, today);
     // Fondant holds to 35 °C on this menu; every buttercream is past its limit.
     expect(cakes.length).toBeGreaterThan(0);
-    for (const { level, contains, way, name } of cakes) {
+    for (const { level, contains, way, name, totalMinor } of cakes) {
       expect(level, name).not.toBe('stop');
       expect(contains, name).not.toContain('egg');
-      const { advice } = evaluateDesign(
+      const { advice, price } = evaluateDesign(
         { design: { ...design, ...way?.patch }, date },
         menuFixture,
-        '2027-05-01',
+        today,
       );
       expect(advice.filter((it) => it.level === 'stop')).toEqual([]);
+      expect(totalMinor).toBe(price.totalMinor);
     }
     expect(cakes[0]?.name).toMatch(/^Dark cocoa sponge, Raspberry jam filling and Fondant over/);
   });
@@ -30,6 +32,7 @@ describe('whole cakes for the table', () => {
     const cakes = suitableCakes(
       { design: designWith({ ...egg, cake: null, setting: null }), date },
       menuFixture,
+      today,
     );
     expect(cakes[0]).toMatchObject({ way: null });
     expect(cakes[0]?.holds).toMatch(/^Holds to/);
@@ -40,6 +43,7 @@ describe('whole cakes for the table', () => {
     const vegan = suitableCakes(
       { design, date },
       { ...menuFixture, sponges: menuFixture.sponges.slice(0, 1) },
+      today,
     );
     expect(vegan).toEqual([]);
   });

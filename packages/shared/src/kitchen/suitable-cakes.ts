@@ -9,6 +9,7 @@ import { sharper } from './heat.ts';
 import { mergeAllergens } from './merge-allergens.ts';
 import type { Way } from './note.ts';
 import { partsOf } from './parts.ts';
+import { priceDesign } from './price.ts';
 import { rankCoats } from './rank-coats.ts';
 import { coatingName, resolveDesign } from './resolve-design.ts';
 import { named } from './sentences.ts';
@@ -26,6 +27,8 @@ export type SuitableCake = {
   readonly holds: string;
   /** Makes the cake as it is designed into this one; null before there is one. */
   readonly way: Way | null;
+  /** What the order would cost then, minor units; null before there is a cake. */
+  readonly totalMinor: number | null;
 };
 
 /** How many are told of; more would be the menu again. */
@@ -34,9 +37,14 @@ const most = 4;
 /**
  * Whole cakes of the menu for the guests of a design, best first for the day and the place: sponge,
  * filling and coat together, since one part that suits helps nobody beside one that does not. Those
- * that would not hold are left out while others do. Empty where the menu makes none.
+ * that would not hold are left out while others do. Empty where the menu makes none. `today` is the
+ * studio's local date.
  */
-export function suitableCakes({ design, date }: EstimateRequest, menu: Menu): SuitableCake[] {
+export function suitableCakes(
+  { design, date }: EstimateRequest,
+  menu: Menu,
+  today: string,
+): SuitableCake[] {
   const resolved = resolveDesign(design, menu);
   const table = tableOf(resolved, partsOf(resolved), { date, collectAt: null });
   const situation: Situation = { ...table, coats: rankCoats(table) };
@@ -44,12 +52,27 @@ export function suitableCakes({ design, date }: EstimateRequest, menu: Menu): Su
   const { sponges, fillings, coats } = makingsWithout(situation, clashes);
   const holding = coats.filter((it) => it.heat !== 'stop');
   const offered = varied(holding.length > 0 ? holding : coats);
+  const chosen = resolved.tiers.find((it) => it.real);
+  const bake = ownFirst(sponges, chosen?.sponge ?? null);
+  const fill = ownFirst(fillings, chosen?.filling ?? null);
   return offered.flatMap((coat, nth): SuitableCake[] => {
-    const sponge = sponges[Math.min(nth, sponges.length - 1)];
-    const filling = fillings[Math.min(nth, fillings.length - 1)];
+    const sponge = bake(nth);
+    const filling = fill(nth);
     if (sponge === undefined || filling === undefined) return [];
-    return [told({ sponge, filling, coat }, situation, clashes)];
+    const { way, ...cake } = told({ sponge, filling, coat }, situation, clashes);
+    if (way === null) return [{ ...cake, way, totalMinor: null }];
+    const made = resolveDesign({ ...design, ...way.patch }, menu);
+    return [{ ...cake, way, totalMinor: priceDesign(made, { date, today }).totalMinor }];
   });
+}
+
+/** What is chosen already stays where it suits; else the menu's own, one after the other. */
+function ownFirst<Item extends { readonly id: string }>(
+  items: readonly Item[],
+  chosen: Item | null,
+): (nth: number) => Item | undefined {
+  const kept = items.find((it) => it.id === chosen?.id);
+  return (nth) => kept ?? items[Math.min(nth, items.length - 1)];
 }
 
 /** One of each covering first, then more styles of the best. */
@@ -68,7 +91,7 @@ function told(
   made: Made,
   situation: Situation,
   clashes: (contents: Contents) => boolean,
-): SuitableCake {
+): Omit<SuitableCake, 'totalMinor'> {
   const { sponge, filling, coat } = made;
   const { design, menu } = situation.resolved;
   const contents = [

@@ -4,7 +4,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { SuitableCake } from '#shared/kitchen/suitable-cakes.ts';
 import { useWizard } from './wizard-context.ts';
 
-type Find = (request: EstimateRequest, menu: Menu) => SuitableCake[];
+type Find = (request: EstimateRequest, menu: Menu, today: string) => SuitableCake[];
 
 /** With the kitchen's other rules, which load after the first step. */
 const loadRules = () => import('#shared/kitchen/suitable-cakes.ts');
@@ -14,7 +14,7 @@ const loadRules = () => import('#shared/kitchen/suitable-cakes.ts');
  * nothing was told that speaks against any.
  */
 export function useSuitableCakes(): SuitableCake[] | null {
-  const { design, values, menu } = useWizard();
+  const { design, values, menu, today } = useWizard();
   const { allergies, diets, susceptible, infants } = values.day;
   const wanted =
     allergies.some((it) => it.allergen !== null) || diets.length > 0 || susceptible || infants;
@@ -38,10 +38,10 @@ export function useSuitableCakes(): SuitableCake[] | null {
   return useMemo(() => {
     if (find === null || unhurried === null || !wanted) return null;
     try {
-      return find.run({ design: unhurried, date }, menu);
+      return find.run({ design: unhurried, date }, menu, today);
     } catch {
       // The menu changed under the draft; it is fitted to the new one in the same moment.
       return null;
     }
-  }, [find, unhurried, date, menu, wanted]);
+  }, [find, unhurried, date, menu, today, wanted]);
 }

@@ -8,11 +8,13 @@ import {
   speciesName,
   spelledFor,
 } from '#shared/kitchen/allergen-names.ts';
+import { isAbout, isListed } from '#shared/kitchen/clashes.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { NumberField } from '#web/components/ui/number-field.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
+import { declaredName } from '../../design/contains.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { severityWords } from './severity-words.ts';
@@ -37,6 +39,7 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
   const open = row.allergen === null && !own;
   const guestsProblem = useProblemAt(`${path}.guests`);
   const allergens = declarableAllergens(region);
+  const handled = isListed(row) && menu.studio.handles.some((it) => isAbout(it, row));
   const species = row.allergen === null ? [] : declarableSpecies(row.allergen, region);
 
   const chooseAllergen = (value: string) => {
@@ -113,6 +116,17 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
           onValue={(value) => onChange({ ...row, guests: value ?? Number.NaN })}
         />
       </div>
+      {(row.allergen !== null || row.text.trim() !== '') && (
+        <p className="measure text-sm">
+          {handled && (
+            <strong>
+              We handle {declaredName(row, region)} in this kitchen, so traces can get into any
+              cake.{' '}
+            </strong>
+          )}
+          A baker reads this and talks it over with you before anything is promised.
+        </p>
+      )}
       <div>
         <Button kind="quiet" className="-ml-2" onClick={onRemove}>
           Take this one out

@@ -2,6 +2,7 @@ import { useId } from 'react';
 import { formatList } from '#shared/dates/format.ts';
 import { allergenName } from '#shared/kitchen/allergen-names.ts';
 import { isAbout, isListed } from '#shared/kitchen/clashes.ts';
+import { formatMoney } from '#shared/kitchen/money.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { declaredName } from '../../design/contains.ts';
 import { dietWords } from '../../design/diet-words.ts';
@@ -80,6 +81,8 @@ export function SuitableCakes() {
                         }}
                       >
                         Make it this
+                        {it.totalMinor !== null &&
+                          `, ${formatMoney(it.totalMinor, menu.priceBook.currency, menu.studio.locale)}`}
                       </Button>
                     ))}
                 </li>
@@ -91,7 +94,7 @@ export function SuitableCakes() {
       {handled.length > 0 && (
         <p className="measure text-sm">
           <strong>
-            Our kitchen handles {formatList(handled)} every week, so traces can get into any cake.
+            We handle {formatList(handled)} in this kitchen, so traces can get into any cake.
           </strong>{' '}
           A baker reads what you told us and talks it over with you before anything is promised.
           {listed.length > 0 && ' Your guest and their doctor decide what they eat.'}
