@@ -16,6 +16,7 @@ import { DateWatch } from '../frame/date-watch.tsx';
 import { CheckAdvice } from './check-advice.tsx';
 import { CheckAnswers } from './check-answers.tsx';
 import { FinalPrice } from './final-price.tsx';
+import { HowItIsCut } from './how-it-is-cut.tsx';
 import { SendRefusalNotice } from './send-refusal-notice.tsx';
 
 /** Everything once more, each with a way back to it; the studio's own price; then send. */
@@ -48,6 +49,9 @@ export function CheckStep() {
       <PageTitle title={steps.check.question} />
       {estimate !== null && <CheckAdvice advice={estimate.advice} />}
       <CheckAnswers />
+      {design?.cake && estimate !== null && (
+        <HowItIsCut design={design} menu={menu} portions={estimate.portions.fed} />
+      )}
       {estimate !== null && (
         <Section title="Made with">
           <MadeWith
