@@ -11,7 +11,8 @@ export type BowlPlan = {
 };
 
 /**
- * The fewest equal bowls, each in the smallest mixer that takes it; null for nothing to mix.
+ * The fewest equal bowls, each in the smallest mixer that takes it, by what goes into them; null
+ * for nothing to mix.
  * Throws `FormulaFault` without a mixer or with an amount that is none.
  */
 export function bowlsFor(grams: number, mixers: readonly Mixer[]): BowlPlan | null {
@@ -38,7 +39,7 @@ export const cooling = { minutes: 10, perEggG: 180, underC: 30 } as const;
 
 /**
  * Minutes one bowl of a formula takes to cool on the mixer; null for a formula that has no step
- * where the mixer waits for a cool bowl. `bowlG` is what comes out of the bowl.
+ * where the mixer waits for a cool bowl. `bowlG` is what goes into the bowl.
  */
 export function coolingMinutes(
   body: FormulaBody & {
@@ -61,6 +62,5 @@ export function coolingMinutes(
     if (part.kind !== 'ingredient') continue;
     if ((index.ingredients.get(part.ingredientId)?.eggPart ?? null) !== null) eggG += grams;
   }
-  const factor = bowlG / (inG * (body.yieldPpm / 1e6));
-  return (eggG * factor * cooling.minutes) / cooling.perEggG;
+  return inG > 0 ? ((eggG / inG) * bowlG * cooling.minutes) / cooling.perEggG : null;
 }

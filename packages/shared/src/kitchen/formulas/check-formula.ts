@@ -207,8 +207,9 @@ function gatherInside(
       const inner = index.versions.get(part.formulaVersionId);
       const inside = byId.get(part.formulaVersionId);
       if (inner === undefined) found ??= missing;
-      else if (inside === undefined || inside.reach.has(version.formulaId)) {
-        found ??= usesItself([name, versionName(index, inner)]);
+      else if (inside === undefined) found ??= usesItself([name, versionName(index, inner)]);
+      else if (inside.reach.has(version.formulaId)) {
+        found ??= usesItself([name, ...wayTo(version.formulaId, inner, index)]);
       } else found ??= inside.problem;
       for (const id of inside?.reach ?? []) reach.add(id);
     }

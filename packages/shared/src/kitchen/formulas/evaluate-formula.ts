@@ -4,7 +4,7 @@ import { checkFormula } from './check-formula.ts';
 import { formulaContents } from './formula-contents.ts';
 import { formulaCost, type FormulaCost } from './formula-cost.ts';
 import type { FormulaProblem } from './formula-problem.ts';
-import { formatHousehold } from './household.ts';
+import { formatHousehold, type HouseholdUnits } from './household.ts';
 import { resolvePart, type PantryIndex } from './pantry-index.ts';
 import { percentsOf, type PercentBase, type PercentView } from './percents.ts';
 import { formulaTotals, type FormulaTotals } from './totals.ts';
@@ -15,6 +15,8 @@ export type FormulaAsked = {
   readonly formulaId: string | null;
   readonly name: string;
   readonly percentOf: PercentBase | null;
+  /** The studio's own measures; US household ones unless said. */
+  readonly units?: HouseholdUnits;
 };
 
 export type EvaluatedFormula = {
@@ -31,12 +33,11 @@ export type EvaluatedFormula = {
 
 /** Everything an editor shows beside a draft, quick enough for every keystroke. Never throws. */
 export function evaluateFormula(
-  { draft, formulaId, name, percentOf }: FormulaAsked,
+  { draft, formulaId, name, percentOf, units }: FormulaAsked,
   index: PantryIndex,
 ): EvaluatedFormula {
   const body = { ...draft, ...(formulaId !== null && { formulaId }) };
   const problems = checkFormula(body, index);
-  // A yield or an empty list says nothing about the lines, but a line that is wrong does.
   const sound = problems.length === 0;
   return {
     problems,
@@ -44,7 +45,7 @@ export function evaluateFormula(
     percents: percentOf === null ? null : percentsOf(body, index, percentOf),
     household: body.lines.map((it) => {
       const part = resolvePart(index, it.part);
-      return part.kind === 'ingredient' ? formatHousehold(part.ingredient, it.grams) : null;
+      return part.kind === 'ingredient' ? formatHousehold(part.ingredient, it.grams, units) : null;
     }),
     cost: sound ? formulaCost(body, index) : null,
     contents: sound ? formulaContents(body, index, name) : null,
