@@ -1,10 +1,15 @@
 import { describe, expect, it } from 'vitest';
+import { resolveDesign } from '#shared/kitchen/resolve-design.ts';
+import { designWith, roundTier } from '#shared/kitchen/testing/design-fixture.ts';
+import { menuFixture } from '#shared/kitchen/testing/menu-fixture.ts';
 import { Book } from './book.ts';
 import { checkAddition, checkPlan, gatherStanding } from './check-plan.ts';
+import { expandDesign } from './expand-design.ts';
 import type { Fault } from './plan-fault.ts';
 import type { PlannedOrder, Supply } from './model.ts';
 import { placeWork, readyDemand } from './place-work.ts';
 import { makeDemand, makeSupply } from './testing/small-studio.ts';
+import { defaultWorkTimes } from './work-times.ts';
 
 const supply = makeSupply({ cold: [{ widthMm: 300, depthMm: 300, heightMm: 200, places: 2 }] });
 
@@ -35,6 +40,62 @@ function rules(
 ): Fault['rule'][] {
   return [...new Set(checkAddition(gatherStanding(by, standing), order).map((it) => it.rule))];
 }
+
+/** A cake of one tier with two sugar flowers, made ahead, placed in the small studio. */
+function flowered(): PlannedOrder {
+  const design = designWith({
+    cake: { tiers: [roundTier(6)] },
+    look: {
+      decorations: [
+        {
+          decorationId: 'sugar-flower',
+          tier: null,
+          quantity: 2,
+          colour: null,
+          source: 'studio',
+        },
+      ],
+    },
+  });
+  const menu = {
+    ...menuFixture,
+    decorations: menuFixture.decorations.map((it) =>
+      it.id === 'sugar-flower' ? { ...it, madeAhead: true, keepsDays: 120, noticeDays: 0 } : it,
+    ),
+  };
+  const demand = expandDesign({
+    resolved: resolveDesign(design, menu),
+    workTimes: defaultWorkTimes,
+    equipment: { bowlG: 6000, decks: 2, deckMm2: 700 * 500 },
+    noticeDays: 0,
+  });
+  const window = supply.windows.get('2027-06-18')?.at(-1);
+  if (window === undefined) throw new Error('no window');
+  const placement = placeWork(new Book(supply, []), readyDemand(demand), window, 'flowers');
+  if (!placement.found) throw new Error(`no place: ${JSON.stringify(placement.refusal)}`);
+  return placement.order;
+}
+
+describe('what dries before it goes on', () => {
+  it('has its day to dry in a plan, and the checker sees to it', () => {
+    const order = flowered();
+    expect(checkPlan(supply, [order])).toEqual([]);
+    const end = (key: string) => {
+      const work = order.demand.work.find((it) => it.key === key);
+      const place = order.places.find((it) => it.key === key);
+      return (place?.startAt ?? 0) + (work?.minutes ?? 0);
+    };
+    const start = order.places.find((it) => it.key === 'decorate:0/on')?.startAt ?? 0;
+    expect(start - end('decorate:0')).toBeGreaterThanOrEqual(24 * 60);
+    const tooLate = {
+      ...order,
+      places: order.places.map((it) =>
+        it.key === 'decorate:0' ? { ...it, startAt: start - 23 * 60 } : it,
+      ),
+    };
+    expect(rules(tooLate)).toContain('gap');
+  });
+});
 
 describe('the checker', () => {
   it('finds nothing wrong with a good plan', () => {

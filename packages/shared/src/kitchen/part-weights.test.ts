@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { amountsOf, carriedPieces, carriedWeightG } from './amounts.ts';
 import { partWeights } from './part-weights.ts';
-import { partsOf } from './parts.ts';
+import { containedAllergens, partsOf } from './parts.ts';
 import { resolveDesign } from './resolve-design.ts';
 import { arbitraryDesign } from './testing/arbitraries.ts';
 import { coat, designWith, roundTier } from './testing/design-fixture.ts';
@@ -45,6 +45,20 @@ describe('what an order is made of', () => {
     expect(piece).toMatchObject({ index: 0, count: 2 });
     // A soft filling has its dam in these too.
     expect(part(two, 'filling', 'lemon-curd')?.inCakeG).toBeLessThan(2 * 150.81 * 6 * 1.1);
+  });
+
+  it('names what only a cutting cake contains among the allergens of the whole', () => {
+    const allergens = (cuttingCakes: (typeof half & { count: number })[]) =>
+      containedAllergens(
+        partsOf(resolveDesign(designWith({ cake: { tiers: [roundTier(8)], cuttingCakes } }), menu)),
+      );
+    expect(allergens([]).some((it) => it.allergen === 'tree-nuts')).toBe(false);
+    expect(allergens([{ ...half, count: 1 }])).toContainEqual({
+      allergen: 'tree-nuts',
+      species: ['almond'],
+      state: 'contains',
+      parts: ['Almond and orange sponge'],
+    });
   });
 
   it('takes borders and lettering from the coat of their tier', () => {

@@ -22,7 +22,11 @@ export function demandOf(design: Design, menu: Menu, settings: PlanSettings): Pl
   try {
     const { design: whole, likely } = typicalDesign(design, menu);
     const resolved = resolveDesign(whole, menu);
-    const kinds = [whole.cake?.kind ?? 'tiered', ...(whole.extras.length > 0 ? ['extra'] : [])];
+    const kinds = [
+      whole.cake?.kind ?? 'tiered',
+      ...((whole.cake?.cuttingCakes ?? []).length > 0 ? ['cutting'] : []),
+      ...(whole.extras.length > 0 ? ['extra'] : []),
+    ];
     const notice = [
       ...kinds.map((kind) => settings.noticeByItem.get(kind) ?? 0),
       settings.noticeByOccasion.get(design.guests.occasionId) ?? 0,
