@@ -10,6 +10,7 @@ import { ScrollToTop } from './scroll-to-top.tsx';
 const HomePage = lazyPage(async () => (await import('#web/routes/home/home-page.tsx')).HomePage);
 const MenuPage = lazyPage(async () => (await import('#web/routes/menu/menu-page.tsx')).MenuPage);
 const CarePage = lazyPage(async () => (await import('#web/routes/care/care-page.tsx')).CarePage);
+const CakePage = lazyPage(async () => (await import('#web/routes/cake/cake-page.tsx')).CakePage);
 const PoliciesPage = lazyPage(
   async () => (await import('#web/routes/policies/policies-page.tsx')).PoliciesPage,
 );
@@ -56,6 +57,7 @@ export function AppRouter() {
           <Route path={paths.home} element={<HomePage />} />
           <Route path={paths.menu} element={<MenuPage />} />
           <Route path={paths.care} element={<CarePage />} />
+          <Route path="/cake/:code" element={<CakePage />} />
           <Route path={paths.policies} element={<PoliciesPage />} />
           <Route path={`${paths.order}/*`} element={<OrderRoutes />} />
           <Route path="/orders/:code" element={<MyOrderPage />} />

@@ -29,6 +29,8 @@ export const paths = {
   orderStep: (step: OrderStep) => `/order/${step}`,
   orderSent: '/order/sent',
   myOrder: (code: string) => `/orders/${encodeURIComponent(code)}`,
+  /** The page about one cake, by the code on its care card. */
+  cakeCare: (code: string) => `/cake/${encodeURIComponent(code)}`,
   account: '/account',
   signIn: '/sign-in',
   signInThen: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,

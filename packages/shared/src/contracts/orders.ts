@@ -176,6 +176,8 @@ export const orderView = z.object({
   /** Why it ended, in words for the customer; null while it lives. */
   ending: z.nullable(z.string()),
   pickup,
+  /** Of the page about the cake alone; null before there is a promise to make it. */
+  careCode: z.nullable(z.string()),
   hold: z.nullable(z.object({ expiresAt: instant, needsLink: z.boolean() })),
   design,
   offer: estimate,

@@ -3,6 +3,7 @@ import { formatLength } from '#shared/kitchen/measures.ts';
 import { allergenLabel, isMajorAllergen } from '#shared/kitchen/allergen-names.ts';
 import { containedAllergens, partsOf } from '#shared/kitchen/parts.ts';
 import type { Actor } from '#api/platform/actor.ts';
+import { careCodeOf } from './care-code.queries.ts';
 import { hasCare, mayCard, type CardResource } from './cards.policy.ts';
 import { confirmable, fingerprintOf } from './confirm-unknown.command.ts';
 import type { CardSource } from './label-source.queries.ts';
@@ -43,7 +44,7 @@ export function presentLabels(source: CardSource, actor: Actor): OrderLabels {
     reasons,
     reminders: [...reminders],
     unknownConfirmed,
-    careCode: hasCare(order.status) ? order.careCode : null,
+    careCode: careCodeOf(order),
     servedAt: design.setting?.servedAt ?? null,
     can: {
       printLabels: may('print-labels') && reasons.length === 0,

@@ -5,6 +5,7 @@ import type { OrderStatus } from '#shared/contracts/vocabulary.ts';
 import { isLive } from '#shared/orders/transitions.ts';
 import type { Order } from '#api/db/models/order.ts';
 import type { Actor } from '#api/platform/actor.ts';
+import { careCodeOf } from '#api/modules/cards/care-code.queries.ts';
 import { canMove } from './change-order-status.command.ts';
 import { designOf } from './order-design.queries.ts';
 import { mayOrder } from './orders.policy.ts';
@@ -52,6 +53,7 @@ export function presentOrder(page: OrderPage, actor: Actor): OrderView {
     stage: stageOf[order.status],
     ending: endingOf(order),
     pickup: pickupOf(order, revision),
+    careCode: careCodeOf(order),
     hold: presentHold(page.hold),
     design: designOf(revision),
     offer: page.estimate,

@@ -19,6 +19,7 @@ const order: OrderView = {
   status: 'asked',
   rowVersion: 1,
   stage: 'received',
+  careCode: null,
   ending: null,
   pickup: {
     date: '2027-06-19',

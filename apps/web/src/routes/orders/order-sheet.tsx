@@ -27,6 +27,7 @@ import { PriceList } from '#web/components/order/price-list.tsx';
 import { StageRuler } from '#web/features/my-order/components/stage-ruler.tsx';
 import { WithdrawOrder } from '#web/features/my-order/components/withdraw-order.tsx';
 import { orderHeadings, stageIndex, stages } from '#web/features/my-order/order-words.ts';
+import { CareCardLinks } from './care-card-links.tsx';
 
 type Props = { readonly order: OrderView; readonly menu: Menu };
 
@@ -122,6 +123,7 @@ export function OrderSheet({ order, menu }: Props) {
             </Section>
           </>
         )}
+        {order.careCode !== null && <CareCardLinks code={order.code} careCode={order.careCode} />}
         <Section title="What you asked for">
           <ChosenList order={order} menu={menu} />
         </Section>

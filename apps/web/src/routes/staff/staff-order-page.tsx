@@ -5,9 +5,11 @@ import { PageTitle } from '#web/components/ui/page-title.tsx';
 import { Pending } from '#web/components/ui/pending.tsx';
 import { paths } from '#web/config/paths.ts';
 import { CostSection } from '#web/features/kitchen-sheet/components/cost-section.tsx';
+import { MarginLine } from '#web/features/kitchen-sheet/components/margin-line.tsx';
 import { KitchenSection } from '#web/features/kitchen-sheet/components/kitchen-section.tsx';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
 import { useSession } from '#web/features/session/api/get-session.ts';
+import { CardsSection } from '#web/features/order-cards/components/cards-section.tsx';
 import { useStaffOrder } from '#web/features/staff-order/api/get-staff-order.ts';
 import { OrderView } from '#web/features/staff-order/components/order-view.tsx';
 import { ApiProblem } from '#web/lib/http.ts';
@@ -42,8 +44,17 @@ function OneOrder({ number }: { readonly number: number }) {
           menu={menu}
           parts={{
             cost: role === 'owner' && <CostSection number={number} locale={locale} />,
+            margin: role === 'owner' && <MarginLine number={number} locale={locale} />,
             kitchen: (role === 'baker' || role === 'owner') && (
               <KitchenSection number={number} locale={locale} />
+            ),
+            cards: (
+              <CardsSection
+                number={number}
+                locale={locale}
+                ingredientPath={role === 'counter' ? null : paths.staffIngredient}
+                careCardPaper={menu.studio.labelRegion === 'US' ? 'half-letter' : 'a5'}
+              />
             ),
           }}
         />
