@@ -24,6 +24,8 @@ describe('a line as bakers type it', () => {
     ['milk, 340 g', 'milk', 340],
     ['Milk: 340 g', 'milk', 340],
     ['- 340 g milk', 'milk', 340],
+    ['☐ 340 g milk*', 'milk', 340],
+    ['Milk ........ 340 g', 'milk', 340],
     ['1. 340 g milk', 'milk', 340],
     ['1 1/2 cups milk', 'milk', 366],
     ['1-1/2 cups milk', 'milk', 366],
@@ -43,6 +45,9 @@ describe('a line as bakers type it', () => {
     ['1 lb butter', 'butter', 453.592],
     ['2 # butter', 'butter', 907.185],
     ['1 lb 4 oz butter', 'butter', 566.99],
+    ['butter, 1 lb. 4 oz.', 'butter', 566.99],
+    ['454g/1lb/4 sticks butter', 'butter', 454],
+    ['2 sticks plus 2 tbsp butter', 'butter', 254.4],
     ['5 sticks (2 1/2 cups, 570 g) butter', 'butter', 570],
     ['two sticks unsalted butter, softened', 'butter', 226],
     ['1 14-oz can condensed milk', 'condensed', 396.893],
@@ -101,7 +106,29 @@ describe('a line as bakers type it', () => {
   it('says what it reckoned by a density or a cup', () => {
     expect(read('500 ml milk')).toMatchObject({ reckoned: true });
     expect(read('1 cup custard')).toMatchObject({ reckoned: true });
+    expect(read('1 heaping cup flour')).toMatchObject({ reckoned: true, grams: 125 });
     expect(read('500 g milk')).toMatchObject({ reckoned: false });
+  });
+
+  it('says how it read a point before three figures', () => {
+    expect(read('1.250 g granulated sugar')).toMatchObject({ grams: 1.25 });
+    expect(read('1.250 g granulated sugar').decided).toContain('not as thousands');
+    expect(read('0.250 kg granulated sugar')).toMatchObject({ grams: 250, decided: null });
+  });
+
+  it.each([
+    ['For the custard:', 'For the custard'],
+    ['For the custard', 'For the custard'],
+    ['Custard:', 'Custard'],
+    ['# Custard', 'Custard'],
+    ['**Custard**', 'Custard'],
+    ['FILLING', 'FILLING'],
+  ])('%s is a heading', (text, words) => {
+    expect(read(text)).toMatchObject({ kind: 'heading', words, problem: null });
+  });
+
+  it('takes a shelf’s name in capitals for what it is', () => {
+    expect(read('SALT')).toMatchObject({ kind: 'line', problem: { code: 'no-amount' } });
   });
 
   it.each([
@@ -119,12 +146,17 @@ describe('a line as bakers type it', () => {
     ['200 g salted butter', 'unknown-part'],
     ['Whisk until it is done.', 'not-read'],
     ['???', 'not-read'],
+    // Two things on a line: neither is dropped for the other.
+    ['5 egg whites + pinch of salt', 'two-things'],
+    ['200 g butter and 100 g granulated sugar', 'two-things'],
+    ['200 g Whole milk plus 5 g Fine salt', 'two-things'],
     [`${'very '.repeat(60)}long`, 'not-read'],
     // Archived.
     ['200 g old cocoa', 'unknown-part'],
   ])('%s is kept as typed and marked', (text, code) => {
     expect(read(text)).toMatchObject({ asTyped: text, problem: { code } });
-    expect(read(text).grams === null || read(text).match === null).toBe(true);
+    const { grams, match, problem } = read(text);
+    expect(grams === null || match === null || problem?.code === 'two-things').toBe(true);
   });
 
   it('offers the nearest of the shelf where nothing is quite what was typed', () => {

@@ -35,7 +35,7 @@ export function readFormulaLine(
     return { ...unread, kind: 'line', problem: { code: 'not-read', message } };
   }
 
-  const { amounts, words, note, named } = takeApart(text, index);
+  const { amounts, words, note, named, more } = takeApart(text, index);
   const counted = amounts.some((it) => it.parts.some(({ unit }) => unit === 'piece'));
   const found =
     part !== undefined
@@ -44,6 +44,7 @@ export function readFormulaLine(
         ? only(named)
         : matchPart(words, note, counted, index);
   const { match, candidates } = found;
+  if (amounts.length === 0 && !found.fits && isShouted(text)) return { ...unread, kind: 'heading' };
   const thing = match === null ? null : thingOf(match.part, index);
   const said = qualifierOf(words, note);
   const weighed = amounts.map((it) => weighAmount(qualified(it, said), thing));
@@ -61,8 +62,8 @@ export function readFormulaLine(
     candidates,
     grams: grams !== null && grams > 0 ? grams : null,
     reckoned: taken?.reckoned ?? false,
-    decided: taken === null ? null : rangeDecided(taken),
-    problem: problemOf({ text, words, weighed, grams, found }),
+    decided: taken === null ? null : decidedOf(taken),
+    problem: more ? twoThings : problemOf({ text, words, weighed, grams, found }),
     findings: proofread(weighed, thing),
   };
 }
@@ -151,12 +152,25 @@ function amountTaken(amounts: readonly WeighedAmount[]): WeighedAmount | null {
 
 /**
  * Of a range the middle is taken: what is bought and priced is then right on average, and the
- * baker sees that it was decided and can write another.
+ * baker sees that it was decided and can write another. A point before three figures is a decimal
+ * point, which is said because elsewhere it parts thousands.
  */
-function rangeDecided({ typed, parts, grams }: WeighedAmount): string | null {
-  const range = parts.some((it) => it.least !== it.most);
-  return range && grams !== null ? `${typed}: the middle, ${formatGrams(grams)}, is taken.` : null;
+function decidedOf({ typed, parts, grams }: WeighedAmount): string | null {
+  if (grams === null) return null;
+  if (parts.some((it) => it.least !== it.most)) {
+    return `${typed}: the middle, ${formatGrams(grams)}, is taken.`;
+  }
+  const thousands = /^[1-9]\d{0,2}\.\d{3}\s*(?:g|gr|grams?|ml)\b/iu.test(typed);
+  return thousands ? `${typed} is read as ${formatGrams(grams)}, not as thousands.` : null;
 }
+
+/** `FILLING`: capitals alone, which name nothing on the shelf. */
+const isShouted = (text: string) => /^[\p{Lu}\s'’-]{3,40}$/u.test(text);
+
+const twoThings = {
+  code: 'two-things',
+  message: 'More than one thing on this line: write each on a line of its own.',
+} as const;
 
 const asYouLike = /\b(?:to taste|as needed|as required|q\.?\s?s\b)/iu;
 

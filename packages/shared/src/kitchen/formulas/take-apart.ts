@@ -9,6 +9,8 @@ export type TakenApart = {
   readonly note: string | null;
   /** The part whose whole name stands in the line, if one does. */
   readonly named: PartCandidate | null;
+  /** `5 egg whites + a pinch of salt`: an amount of something else is added on the same line. */
+  readonly more: boolean;
 };
 
 /** A line without its bullet, tick box or number, and without characters nobody sees. */
@@ -16,17 +18,18 @@ export function bareLine(asTyped: string): string {
   return asTyped
     .replace(/\p{Cc}/gu, ' ')
     .trim()
-    .replace(/^(?:[-–—*•·▪◦]\s+|\[[x ]?\]\s*|\d+[.)]\s+(?=[\d¼½¾⅓⅔⅛]))+/iu, '')
+    .replace(/^(?:[-–—*•·▪◦]\s+|[☐☑✓✔□■]\s*|\[[x ]?\]\s*|\d+[.)]\s+(?=[\d¼½¾⅓⅔⅛]))+/iu, '')
     .trim();
 }
 
 /** `For the custard`, `Custard:`, `# Custard`; null for a line that is none. */
 export function headingOf(text: string): string | null {
   const marked = /^#+\s*(\D.*)$/u.exec(text)?.[1];
-  const unmarked = (marked ?? text).replace(/^[*_]+|[*_]+$/gu, '').trim();
+  const starred = /^(?:\*\*|__)([^*_]*\p{L}[^*_]*)(?:\*\*|__)$/u.exec(marked ?? text)?.[1];
+  const unmarked = (starred ?? marked ?? text).trim();
   const ended = /^(.*\p{L}.*?)\s*:$/u.exec(unmarked)?.[1];
   if (ended !== undefined) return ended;
-  if (marked !== undefined) return unmarked;
+  if (marked !== undefined || starred !== undefined) return unmarked;
   return /^for (?:the )?\p{L}[\p{L}\s'’-]*$/iu.test(unmarked) ? unmarked : null;
 }
 
@@ -38,7 +41,7 @@ const emptied = new RegExp(
 const leading =
   /^(?:(?:of|about|approx(?:imately)?|circa|ca|roughly|or|and|plus)\b\.?|[-–—,:;/.=~≈+&*•\s])+/iu;
 const trailing =
-  /(?:(?<=\s)(?:of|about|approx(?:imately)?|circa|ca|roughly|or|and|plus)\.?|[-–—,:;/=~≈+&\s])+$/iu;
+  /(?:(?<=\s)(?:of|about|approx(?:imately)?|circa|ca|roughly|or|and|plus)\.?|[-–—,:;/.…*=~≈+&\s])+$/iu;
 
 /** What is left of a line without its amounts: what it is, and what is said of it. */
 function wordsAndNote(rest: string): { words: string; note: string | null } {
@@ -68,8 +71,14 @@ export function takeApart(text: string, index: PantryIndex): TakenApart {
   const named = takeNamed(text, index);
   if (named !== null) return named;
   const { amounts, rest } = readAmounts(text);
-  return { amounts, ...wordsAndNote(rest), named: null };
+  return { amounts, ...wordsAndNote(rest), named: null, more: addsMore(rest) };
 }
+
+const added = new RegExp(
+  `[\\p{L}${nameMark})]\\s*(?:\\+|&|\\bplus\\b|\\band\\b)\\s*${amountMark}\\s*(?:of\\s+)?[\\p{L}${nameMark}]`,
+  'iu',
+);
+const addsMore = (rest: string) => added.test(rest);
 
 const afterName = new RegExp(`^\\s*(?:$|[,;:(–—${amountMark}-])`, 'u');
 
@@ -91,5 +100,6 @@ function takeNamed(text: string, index: PantryIndex): TakenApart | null {
     words: text.slice(whole.from, whole.to),
     note: notes.length === 0 ? null : notes.join(', '),
     named: whole.candidate,
+    more: addsMore(rest),
   };
 }

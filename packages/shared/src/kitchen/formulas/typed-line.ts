@@ -79,7 +79,7 @@ export type ReadLine = {
   readonly grams: number | null;
   /** By a density or another measure, not by a weight that was typed or kept. */
   readonly reckoned: boolean;
-  /** What was decided where the line leaves it open: the middle of a range. */
+  /** What was decided where the line leaves it open: the middle of a range, a point or a comma. */
   readonly decided: string | null;
   readonly problem: { readonly code: ReadProblemCode; readonly message: string } | null;
   readonly findings: readonly ProofFinding[];

@@ -17,6 +17,9 @@ const pinchesPerTeaspoon = 16;
 /** Of what pours, a spoon is the same part of a cup by weight as by volume. */
 const pours: readonly string[] = ['dairy', 'liquid', 'fat', 'flavour', 'egg'];
 
+/** A heaping cup is weighed as a level one, and that is only reckoned. */
+const inexact: readonly string[] = ['heaping', 'heaped', 'rounded', 'scant', 'generous'];
+
 /** The weight of an amount, part by part; null grams where one of them is not known. */
 export function weighAmount(amount: ReadAmount, thing: WeighedThing): WeighedAmount {
   let grams: number | null = 0;
@@ -24,7 +27,7 @@ export function weighAmount(amount: ReadAmount, thing: WeighedThing): WeighedAmo
   for (const part of amount.parts) {
     const one = weightOfOne(part, thing);
     grams = one === null || grams === null ? null : grams + one.grams * part.count;
-    reckoned ||= one?.reckoned ?? false;
+    reckoned ||= one?.reckoned === true || inexact.includes(part.qualifier ?? '');
   }
   return { ...amount, grams, reckoned };
 }
