@@ -2,6 +2,7 @@ import { createSmtpClient } from '#api/clients/smtp.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { createMailHandlers } from '#api/modules/mail/mail-handlers.ts';
 import { createMailSender } from '#api/modules/mail/mail-sender.ts';
+import { askForWarmth } from '#api/modules/orders/ask-for-warmth.command.ts';
 import { removeStalePhotos } from '#api/modules/photos/remove-stale-photos.command.ts';
 import { expireHolds } from '#api/modules/plan/expire-holds.command.ts';
 import { removeExpired } from '#api/modules/sessions/remove-expired.command.ts';
@@ -21,6 +22,7 @@ function rounds(deps: Deps): readonly PeriodicWork[] {
   return [
     { name: 'beat', everyMs: beatMs, work: () => noteBeat(beatName, clock) },
     { name: 'expire-holds', everyMs: minuteMs, work: () => expireHolds(clock.now()) },
+    { name: 'ask-for-warmth', everyMs: 15 * minuteMs, work: () => askForWarmth(clock.now()) },
     { name: 'remove-stale-photos', everyMs: 60 * minuteMs, work: () => removeStalePhotos(deps) },
     { name: 'remove-expired', everyMs: 60 * minuteMs, work: () => removeExpired(deps) },
   ];

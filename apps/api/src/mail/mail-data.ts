@@ -87,6 +87,7 @@ export type MailData = {
     readonly calendar: boolean;
   };
   'hold-ran-out': OfOrder;
+  'warmth-asked': OfOrder;
   'stop-lifted': OfOrder;
   'private-link-renewed': OfOrder;
   /** What is in the cake now, in sentences about the cake alone. */

@@ -76,6 +76,7 @@ function dataOf(typed: string): { readonly [T in MailTemplate]: MailData[T] } {
       calendar: true,
     },
     'hold-ran-out': { order },
+    'warmth-asked': { order },
     'stop-lifted': { order },
     'private-link-renewed': { order },
     message: { order, by: typed, body: typed },

@@ -48,6 +48,11 @@ export const standardWords: Readonly<Record<MailTemplate, MailWords>> = {
     closing:
       'Do you still want the cake? You need not order again: write to us from your order’s page, and we look for a place.',
   },
+  'warmth-asked': {
+    subject: 'Order No. {number}: how warm will it be on {day}?',
+    lead: 'Hello {name},\n\nWhen you ordered, nobody could know how warm it would be. Your day is close now, and we ask once more, so that your cake stands up well.',
+    closing: 'An answer to this e-mail, or a word by telephone, does as well.',
+  },
   'stop-lifted': {
     subject: 'Order No. {number}: please read this about your cake',
     lead: 'Hello {name},\n\nSomething about your order had to be settled first. The owner has looked at it and takes it on, for a reason that is yours to read.',

@@ -14,6 +14,7 @@ export type EventPayloads = {
   'order-ready': { orderId: string };
   'order-collected': { orderId: string };
   'hold-ran-out': { orderId: string };
+  'warmth-to-ask': { orderId: string };
   'stop-lifted': { orderId: string; liftedStopId: string };
   'private-link-renewed': { orderId: string };
   /** Orders contain something else since one save; the studio is told once for all of them. */
@@ -53,6 +54,7 @@ const parsers: Parsers = {
   'order-ready': (payload) => ofOrder.parse(payload),
   'order-collected': (payload) => ofOrder.parse(payload),
   'hold-ran-out': (payload) => ofOrder.parse(payload),
+  'warmth-to-ask': (payload) => ofOrder.parse(payload),
   'stop-lifted': (payload) => ofLiftedStop.parse(payload),
   'private-link-renewed': (payload) => ofOrder.parse(payload),
   'contents-changed': (payload) => ofSave.parse(payload),

@@ -25,6 +25,7 @@ type OrderTemplates = Pick<
   | 'withdrawn'
   | 'moved'
   | 'hold-ran-out'
+  | 'warmth-asked'
   | 'stop-lifted'
   | 'private-link-renewed'
   | 'ingredient-changed'
@@ -122,6 +123,27 @@ export const orderTemplates: OrderTemplates = {
       title: 'Your date is not kept any more',
       preview: `Your order for ${orderDay(order, house)} is still with us`,
       blocks: [facts(fact('Cake', order.summary)), openOrder(order)],
+    }),
+
+  'warmth-asked': ({ order }, house) =>
+    orderBody(order, house, {
+      title: 'How warm will it be?',
+      preview: `Where your cake stands on ${orderDay(order, house)}`,
+      blocks: [
+        facts(
+          fact('Cake', order.summary),
+          order.pickup === null ? null : fact('Pickup', pickupText(order.pickup, house)),
+        ),
+        notice(
+          'now',
+          'What we would like to know',
+          'The warmest it will get where the cake stands, in °F or °C, and whether it stands in the shade. A forecast is good enough.',
+        ),
+        text(
+          'If that is more than we have reckoned with, we tell you what would hold better. Nothing is changed without you.',
+        ),
+        openOrder(order, 'Tell us on your order’s page'),
+      ],
     }),
 
   'stop-lifted': ({ order }, house) =>

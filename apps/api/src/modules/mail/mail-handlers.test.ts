@@ -13,6 +13,7 @@ import { Studio } from '#api/db/models/studio.ts';
 import type { User } from '#api/db/models/user.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import { offeredDatesOf } from '#api/modules/orders/orders.queries.ts';
+import { askForWarmth } from '#api/modules/orders/ask-for-warmth.command.ts';
 import { expireHolds } from '#api/modules/plan/expire-holds.command.ts';
 import { createDispatcher } from '#api/outbox/dispatcher.ts';
 import { enqueue } from '#api/outbox/enqueue.ts';
@@ -336,6 +337,37 @@ describe('what becomes of an order', () => {
     const ours = messages.filter(({ subject }) => subject.includes(`No. ${order.number}`));
     expect(flat(to(email, ours).text)).toContain('is still with us');
     expect(to(studioInbox, ours).subject).toContain('has lost its place');
+  });
+
+  it('an unknown warmth: asked once, three days before, by day and never at night', async () => {
+    const fondant = {
+      covering: 'fondant',
+      style: 'swiss',
+      finish: 'smooth',
+      colour: null,
+    } as const;
+    const { order, email } = await known({
+      setting: { warmestC: null },
+      cake: { coating: fondant },
+    });
+    const sure = await known();
+    for (const each of [order, sure.order]) await byStaff(each, 'confirm', {});
+    await deliver();
+    await mailbox.clear();
+    const daysBefore = (days: number, time: string) =>
+      new Date(Date.parse(`${order.pickupDate ?? ''}T${time}Z`) - days * 86_400_000);
+    // New York keeps summer time then: 13:00 UTC is nine in the morning.
+    expect(await askForWarmth(daysBefore(4, '15:00:00'))).toBe(0);
+    expect(await askForWarmth(daysBefore(3, '12:59:00'))).toBe(0);
+    expect(await askForWarmth(daysBefore(3, '22:00:00'))).toBe(0);
+    expect(await askForWarmth(daysBefore(3, '13:00:00'))).toBe(1);
+    expect(await askForWarmth(daysBefore(2, '15:00:00'))).toBe(0);
+    const messages = await deliver();
+    const { text, subject } = to(email, messages);
+    expect(subject).toContain('how warm will it be');
+    expect(flat(text)).toContain('in the shade');
+    expect(text).toContain(linkOf(order));
+    expect(messages.some((it) => it.to.some((one) => one.includes(sure.email)))).toBe(false);
   });
 
   it('a stop that was lifted: that there is something to read, and nothing of what it is', async () => {

@@ -29,6 +29,7 @@ type OrderMailHandlers = Pick<
   | 'order-ready'
   | 'order-collected'
   | 'hold-ran-out'
+  | 'warmth-to-ask'
   | 'stop-lifted'
   | 'private-link-renewed'
   | 'message-written'
@@ -137,6 +138,11 @@ export function orderMailHandlers(deps: MailDeps): OrderMailHandlers {
         await toCustomer(told, context, 'hold-ran-out', { order: told.forCustomer });
         await toStudio(told, context, 'hold-ran-out-notice', { order: told.forStaff });
       });
+    },
+
+    async 'warmth-to-ask'({ orderId }, context) {
+      const told = await loadToldOrder(deps, orderId);
+      await toCustomer(told, context, 'warmth-asked', { order: told.forCustomer });
     },
 
     async 'stop-lifted'({ orderId, liftedStopId }, context) {

@@ -33,6 +33,7 @@ const freshness: Readonly<Record<MailTemplate, Freshness>> = {
   withdrawn: {},
   moved: { while: isLive, newestOnly: true },
   'hold-ran-out': { while: asked, withoutPlace: true },
+  'warmth-asked': { while: settled, newestOnly: true },
   'stop-lifted': { while: isLive },
   'private-link-renewed': { newestOnly: true },
   'ingredient-changed': { while: isLive },

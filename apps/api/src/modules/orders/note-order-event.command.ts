@@ -20,6 +20,7 @@ export type OrderEventKind =
   | 'message-written'
   | 'photo-added'
   | 'allergy-answered'
+  | 'warmth-asked'
   | 'stop-talked'
   | 'stop-lifted'
   | 'lifted-stop-accepted'

@@ -18,6 +18,7 @@ const sentences: Record<OrderEventKind, string> = {
   'message-written': 'Wrote a message.',
   'photo-added': 'Added a photo.',
   'allergy-answered': 'Answered an allergy.',
+  'warmth-asked': 'Asked the customer how warm it will be.',
   'stop-talked': 'Recorded a talk about a stop.',
   'stop-lifted': 'Lifted a stop, with a reason.',
   'lifted-stop-accepted': 'Read and accepted the reason for a lifted stop.',
