@@ -3,6 +3,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import type { Formula, FormulaVersion } from '#shared/contracts/pantry.ts';
 import { formatList } from '#shared/dates/format.ts';
 import type { EvaluatedFormula } from '#shared/kitchen/formulas/evaluate-formula.ts';
+import { allergenLabel } from '#shared/kitchen/allergen-names.ts';
 import { formatBenchTemperature, mlPerUsCup } from '#shared/kitchen/measures.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { DataList, type DataRow } from '#web/components/ui/data-list.tsx';
@@ -69,6 +70,38 @@ export function Cautions({ seen, shelf }: Pick<Props, 'seen' | 'shelf'>) {
     </>
   );
 }
+
+/** On the bench's paper: what it contains and how long it keeps, nothing that others need not read. */
+export function PrintedFacts({ version, seen, menu }: Pick<Props, 'version' | 'seen' | 'menu'>) {
+  const { labelRegion } = menu.studio;
+  const told = (seen.contents?.allergens ?? []).filter((it) => it.state !== 'not-declared');
+  const keeps = [
+    version.keepsRoomHours === null ? '' : `at room ${shelfLife(version.keepsRoomHours)}`,
+    version.keepsChilledHours === null ? '' : `chilled ${shelfLife(version.keepsChilledHours)}`,
+    version.keepsFrozenHours === null ? '' : `frozen ${shelfLife(version.keepsFrozenHours)}`,
+  ].filter((it) => it !== '');
+  return (
+    <div className="hidden gap-1 print:grid">
+      <p>
+        <strong>
+          {seen.contents === null
+            ? 'What it contains is unknown.'
+            : told.length === 0
+              ? 'No allergen of the list is named.'
+              : `${told.map((it) => `${statement[it.state]} ${allergenLabel(it, labelRegion)}`).join('; ')}.`}
+        </strong>
+      </p>
+      {keeps.length > 0 && <p>Keeps {keeps.join(', ')}.</p>}
+    </div>
+  );
+}
+
+const statement = {
+  contains: 'Contains',
+  'may-contain': 'May contain',
+  unknown: 'Unknown:',
+  'not-declared': '',
+} as const;
 
 function factRows({ version, seen, shelf, menu }: Props): DataRow[] {
   const { studio } = menu;
@@ -148,7 +181,7 @@ function UsedIn({ formula, shelf, menu }: Pick<Props, 'formula' | 'shelf' | 'men
   const sold = onTheMenu(formula.id, shelf.pantry.parts, menu);
   const inside = shelf.formulasUsing(formula.id);
   return (
-    <section data-print="no" className="grid gap-1">
+    <section className="grid gap-1">
       <h2 className="text-lg">Used in</h2>
       {sold.length + inside.length === 0 && <p className="text-slate">Nothing yet.</p>}
       <ul className="grid">

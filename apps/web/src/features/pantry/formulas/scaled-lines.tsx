@@ -94,8 +94,8 @@ function PartName({ line, index }: NameProps) {
   );
 }
 
-/** Only where a scale would show it: under a tenth of a percent nothing is said. */
-const toldFromPpm = 1000;
+/** Under half a percent nothing is said at the line; the whole says its own above. */
+const toldFromPpm = 5000;
 
 function Drift({ line, locale }: { readonly line: ScaledLine; readonly locale: string }) {
   if (Math.abs(line.driftPpm) < toldFromPpm) return null;

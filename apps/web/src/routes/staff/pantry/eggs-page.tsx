@@ -35,7 +35,7 @@ export function EggsPage() {
     void navigate(`?${writeEggSearch(next)}`, { replace: true });
   if (isRefused(error)) return <BakersOnly title="Eggs" />;
   return (
-    <div className="page grid gap-6 py-6">
+    <div className="page grid gap-6 py-6 print:block print:space-y-4 print:px-0 print:pt-3">
       <PageTitle title="Eggs" />
       <form
         role="search"
@@ -55,7 +55,12 @@ export function EggsPage() {
       ) : data === undefined ? (
         <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
       ) : (
-        <div className={classNames('grid gap-6', isPlaceholderData && 'opacity-60')}>
+        <div
+          className={classNames(
+            'grid gap-6 print:block print:space-y-4',
+            isPlaceholderData && 'opacity-60',
+          )}
+        >
           {error !== null && (
             <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
           )}
@@ -88,20 +93,20 @@ function Plan({ plan, locale }: { readonly plan: EggPlanView; readonly locale: s
           <EggDays days={days} locale={locale} />
         </Rim>
       )}
-      <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-2">
+      <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-2 print:block print:space-y-4">
         {days.length > 0 && (
-          <Section title="Left over">
+          <Section title="Left over" className="print:block">
             <EggLeftovers leftovers={leftovers} locale={locale} />
           </Section>
         )}
-        <div className="grid gap-8">
+        <div className="grid gap-8 print:block print:space-y-4">
           {cartons.length > 0 && (
-            <Section title="Out of cartons">
+            <Section title="Out of cartons" className="print:block">
               <EggCartons cartons={cartons} locale={locale} />
             </Section>
           )}
           {alternatives.length > 0 && (
-            <Section title="Cartons instead">
+            <Section title="Cartons instead" className="print:block">
               <CartonsInstead alternatives={alternatives} locale={locale} />
             </Section>
           )}

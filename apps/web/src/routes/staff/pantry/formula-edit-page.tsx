@@ -16,7 +16,7 @@ export function FormulaEditPage() {
   const [params] = useSearchParams();
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>
+      <PantryGate title="Formula, next version">
         {(pantry) => {
           const shelf = shelfOf(pantry);
           const kept = shelf.formulas.get(id);

@@ -14,7 +14,7 @@ export function FormulaNewPage() {
   const from = params.get('from') ?? '';
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>
+      <PantryGate title="New formula">
         {(pantry) => {
           const shelf = shelfOf(pantry);
           const copied = shelf.index.versions.get(from) ?? null;

@@ -18,7 +18,7 @@ import { TouchedOrders } from '#web/features/pantry/components/touched-orders.ts
 import { TitleRow } from '#web/features/pantry/components/title-row.tsx';
 import { FormulaBench } from '#web/features/pantry/formulas/formula-bench.tsx';
 import { FormulaDab } from '#web/features/pantry/formulas/formula-dab.tsx';
-import { FormulaFacts } from '#web/features/pantry/formulas/formula-facts.tsx';
+import { FormulaFacts, PrintedFacts } from '#web/features/pantry/formulas/formula-facts.tsx';
 import { kindWords, versionDate } from '#web/features/pantry/formulas/formula-words.ts';
 import { VersionHistory } from '#web/features/pantry/formulas/version-history.tsx';
 import { type KeptFormula, shelfOf } from '#web/features/pantry/shelf.ts';
@@ -28,7 +28,7 @@ export function FormulaPage() {
   const { id = '' } = useParams();
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>{(pantry) => <Find id={id} pantry={pantry} />}</PantryGate>
+      <PantryGate title="Formula">{(pantry) => <Find id={id} pantry={pantry} />}</PantryGate>
     </div>
   );
 }
@@ -130,7 +130,8 @@ function OneFormula({ kept, pantry }: Props) {
         </Notice>
       )}
       <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_24rem] print:block">
-        <div className="grid min-w-0 gap-10">
+        <div className="grid min-w-0 gap-4">
+          <PrintedFacts version={version} seen={seen} menu={menu} />
           <FormulaBench
             key={`bench ${version.id} ${params.get('make') ?? ''}`}
             formula={formula}
@@ -139,15 +140,17 @@ function OneFormula({ kept, pantry }: Props) {
             menu={menu}
             makeG={params.get('make')}
           />
-          <VersionHistory
-            key={`versions ${current.id}`}
-            kept={kept}
-            shown={version}
-            shelf={shelf}
-            house={menu.studio}
-          />
         </div>
-        <FormulaFacts formula={formula} version={version} seen={seen} shelf={shelf} menu={menu} />
+        <div className="lg:col-start-2 lg:row-span-2 lg:row-start-1 print:hidden">
+          <FormulaFacts formula={formula} version={version} seen={seen} shelf={shelf} menu={menu} />
+        </div>
+        <VersionHistory
+          key={`versions ${current.id}`}
+          kept={kept}
+          shown={version}
+          shelf={shelf}
+          house={menu.studio}
+        />
       </div>
     </>
   );

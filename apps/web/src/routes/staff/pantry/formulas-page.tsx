@@ -27,7 +27,7 @@ import { roomForTable, useMedia } from '#web/lib/use-media.ts';
 export function FormulasPage() {
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>{(pantry) => <Formulas pantry={pantry} />}</PantryGate>
+      <PantryGate title="Formulas">{(pantry) => <Formulas pantry={pantry} />}</PantryGate>
     </div>
   );
 }

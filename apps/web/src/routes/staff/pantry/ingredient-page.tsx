@@ -18,7 +18,7 @@ export function IngredientPage() {
   const { id } = useParams();
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>
+      <PantryGate title="Ingredient">
         {(pantry) => <OneIngredient key={id ?? 'new'} id={id ?? null} pantry={pantry} />}
       </PantryGate>
     </div>

@@ -26,7 +26,7 @@ import { roomForTable, useMedia } from '#web/lib/use-media.ts';
 export function IngredientsPage() {
   return (
     <div className="page grid gap-5 py-6">
-      <PantryGate>{(pantry) => <Shelf pantry={pantry} />}</PantryGate>
+      <PantryGate title="Ingredients">{(pantry) => <Shelf pantry={pantry} />}</PantryGate>
     </div>
   );
 }

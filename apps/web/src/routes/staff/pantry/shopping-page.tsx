@@ -28,7 +28,7 @@ export function ShoppingPage() {
   const { data, error, isPending, isPlaceholderData, isFetching, refetch } = useShopping(span);
   if (isRefused(error)) return <BakersOnly title="Shopping" />;
   return (
-    <div className="page grid gap-6 py-6">
+    <div className="page grid gap-6 py-6 print:block print:space-y-4 print:px-0 print:pt-3">
       <PageTitle title="Shopping" />
       <form role="search" data-print="no" onSubmit={(event) => event.preventDefault()}>
         <SpanFields
@@ -44,7 +44,12 @@ export function ShoppingPage() {
       ) : data === undefined ? (
         <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
       ) : (
-        <div className={classNames('grid gap-6', isPlaceholderData && 'opacity-60')}>
+        <div
+          className={classNames(
+            'grid gap-6 print:block print:space-y-4',
+            isPlaceholderData && 'opacity-60',
+          )}
+        >
           {error !== null && (
             <Failure error={error} onRetry={() => void refetch()} retrying={isFetching} />
           )}
