@@ -64,7 +64,11 @@ export async function noteContentChanges(save: NotedSave): Promise<number[]> {
 }
 
 function differs(old: OpenOrder, order: OpenOrder, region: LabelRegion): boolean {
-  return newAdvice(old.advice, order.advice).length > 0 || isOther(old.holds, order.holds, region);
+  // Advice hangs on what is in it and handled near it: where neither is new, nor is that.
+  if (contentDifferences(old.holds, order.holds, region).length === 0) return false;
+  return (
+    isOther(old.holds, order.holds, region) || newAdvice(old.advice(), order.advice()).length > 0
+  );
 }
 
 /** What is handled in the kitchen touches an order only where a guest declared it: by advice. */
@@ -104,7 +108,7 @@ async function noteOne(one: OneChange): Promise<boolean> {
   const told = earlier.filter((it) => it.told).map(({ change }) => change);
   for (const { change } of earlier.filter((it) => !it.told)) await change.update({ endedAt: now });
   const known = contentsBefore(order.revision, told, old.holds);
-  const clashes = newAdvice(adviceBefore(order.revision, told), order.advice).length > 0;
+  const clashes = newAdvice(adviceBefore(order.revision, told), order.advice()).length > 0;
   if (!clashes && !isOther(known, order.holds, region)) {
     await noteOrderEvent({ orderId, kind: 'contents-put-right', actor });
     return false;
@@ -119,7 +123,7 @@ async function noteOne(one: OneChange): Promise<boolean> {
     formulaVersionId: 'formulaVersionId' in cause ? cause.formulaVersionId : null,
     told: known,
     holds: order.holds,
-    advice: [...order.advice],
+    advice: [...order.advice()],
     clashes,
     mailAt: new Date(now.getTime() + graceMs),
     byUserId: actor.userId,

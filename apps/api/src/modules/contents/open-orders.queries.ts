@@ -19,8 +19,8 @@ export type OpenOrder = {
   readonly order: Order;
   readonly revision: OrderRevision;
   readonly holds: OrderContents;
-  /** Everything advised about what is in it. */
-  readonly advice: readonly Advice[];
+  /** Everything advised about what is in it; worked out when it is first asked for. */
+  advice(): readonly Advice[];
 };
 
 /**
@@ -51,13 +51,21 @@ export async function openOrders(now: Date): Promise<Map<string, OpenOrder>> {
     const menu = over(book, (formulaId) => versionIds.get(formulaId));
     const design = designOf(revision);
     const today = localAt(now, order.zone).date;
-    const { advice } = evaluateDesign({ design, date: order.pickupDate }, menu, today);
     found.set(order.id, {
       order,
       revision,
       holds: contentsOfDesign(design, menu),
-      advice: advice.filter(isAboutContents),
+      advice: onceOnly(() =>
+        evaluateDesign({ design, date: order.pickupDate }, menu, today).advice.filter(
+          isAboutContents,
+        ),
+      ),
     });
   }
   return found;
+}
+
+function onceOnly<T>(work: () => T): () => T {
+  let done: { readonly result: T } | null = null;
+  return () => (done ??= { result: work() }).result;
 }
