@@ -22,43 +22,21 @@ export function changesOf(design: Design, patch: DesignPatch, menu: Menu): strin
 
 function changesOfCake(before: Cake, after: Cake, menu: Menu): string[] {
   if (before.kind !== after.kind || before.tiers.length !== after.tiers.length) return [];
-  const inside = (cake: Cake) => [
-    ...cake.tiers,
-    ...(cake.sheet === null ? [] : [cake.sheet]),
-    ...cake.cuttingCakes,
-  ];
   const lines = new Set<string>();
-  const add = (from: string | null, to: string | null, what: (to: string | null) => string) => {
-    if (from !== null && from !== to) lines.add(what(to));
-  };
-  if (before.tiers.some((it) => it.real) && after.tiers.every((it) => !it.real)) {
-    if (after.tiers.length > 0) lines.add('The cake on show is a dummy: nobody eats from it.');
+  const wasEaten = before.tiers.some((it) => it.real);
+  if (wasEaten && after.tiers.every((it) => !it.real)) {
+    lines.add('The cake on show is a dummy: nobody eats from it.');
   } else {
-    const then = inside(after);
-    inside(before).forEach((it, at) => {
+    const then = insidesOf(after);
+    insidesOf(before).forEach((it, at) => {
       const next = then[at];
-      if (next === undefined) return;
-      const spongeName = (id: string) => nameIn(menu.sponges, id, 'sponge');
-      const fillingName = (id: string) => nameIn(menu.fillings, id, 'filling');
-      add(it.spongeId, next.spongeId, (to) =>
-        to === null ? '' : `${spongeName(it.spongeId ?? '')} becomes ${spongeName(to)}.`,
-      );
-      add(it.fillingId, next.fillingId, (to) =>
-        to === null
-          ? `${fillingName(it.fillingId ?? '')} is left out.`
-          : `${fillingName(it.fillingId ?? '')} becomes ${fillingName(to)}.`,
-      );
+      if (next !== undefined) addInside(lines, it, next, menu);
     });
   }
-  const coats = (cake: Cake) => [cake.coating, ...cake.tiers.map((it) => it.coating)];
-  const coatsAfter = coats(after);
-  coats(before).forEach((coat, at) => {
-    const from = coatName(coat, menu);
-    const to = coatName(coatsAfter[at] ?? null, menu);
-    if (to === null || from === to) return;
+  addCoat(lines, before.coating, after.coating, menu);
+  before.tiers.forEach((tier, at) => {
     // A tier without a coat of its own wears the cake's.
-    if (from !== null) lines.add(`${from} becomes ${to}.`);
-    else if (at === 0) lines.add(`${to} goes over it.`);
+    if (tier.coating !== null) addCoat(lines, tier.coating, after.tiers[at]?.coating ?? null, menu);
   });
   for (const cutting of after.cuttingCakes) {
     const known = before.cuttingCakes.some(
@@ -69,8 +47,37 @@ function changesOfCake(before: Cake, after: Cake, menu: Menu): string[] {
       lines.add(`Cut in the kitchen, kept cold until then: ${cutting.count} × ${size.name}.`);
     }
   }
-  lines.delete('');
   return [...lines];
+}
+
+type Inside = { readonly spongeId: string | null; readonly fillingId: string | null };
+
+const insidesOf = ({ tiers, sheet, cuttingCakes }: Cake): readonly Inside[] =>
+  sheet === null ? [...tiers, ...cuttingCakes] : [...tiers, sheet, ...cuttingCakes];
+
+function addInside(lines: Set<string>, from: Inside, to: Inside, menu: Menu): void {
+  if (from.spongeId !== null && to.spongeId !== null && from.spongeId !== to.spongeId) {
+    const name = nameIn(menu.sponges, from.spongeId, 'sponge');
+    lines.add(`${name} becomes ${nameIn(menu.sponges, to.spongeId, 'sponge')}.`);
+  }
+  if (from.fillingId === null || from.fillingId === to.fillingId) return;
+  const name = nameIn(menu.fillings, from.fillingId, 'filling');
+  lines.add(
+    to.fillingId === null
+      ? `${name} is left out.`
+      : `${name} becomes ${nameIn(menu.fillings, to.fillingId, 'filling')}.`,
+  );
+}
+
+function addCoat(lines: Set<string>, from: Coating | null, to: Coating | null, menu: Menu): void {
+  if (to === null || from === to) return;
+  const after = coatName(to, menu);
+  if (from === null) {
+    lines.add(`${after} goes over it.`);
+    return;
+  }
+  const before = coatName(from, menu);
+  if (before !== after) lines.add(`${before} becomes ${after}.`);
 }
 
 function nameIn(
@@ -81,9 +88,9 @@ function nameIn(
   return named(items.find((it) => it.id === id)?.name ?? id, kind);
 }
 
-function coatName(coat: Coating | null, menu: Menu): string | null {
-  const covering = menu.coverings.find((it) => it.id === coat?.covering);
-  if (coat === null || covering === undefined) return null;
+function coatName(coat: Coating, menu: Menu): string {
+  const covering = menu.coverings.find((it) => it.id === coat.covering);
+  if (covering === undefined) return coat.covering;
   const style = menu.styles.find((it) => it.id === coat.style) ?? null;
   return `${coatingName({ covering, style })}, ${coat.finish}`;
 }
