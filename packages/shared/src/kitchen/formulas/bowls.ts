@@ -1,5 +1,6 @@
 import type { FormulaBody, PantryIndex } from './pantry-index.ts';
 import { faultOf } from './formula-problem.ts';
+import { formulaTotals, mixedG } from './totals.ts';
 
 export type Mixer = { readonly id: string; readonly name: string; readonly capacityG: number };
 
@@ -11,8 +12,8 @@ export type BowlPlan = {
 };
 
 /**
- * The fewest equal bowls, each in the smallest mixer that takes it, by what goes into them; null
- * for nothing to mix.
+ * The fewest equal bowls, each in the smallest mixer that takes it, by what the mixer holds
+ * (`mixedG`); null for nothing to mix.
  * Throws `FormulaFault` without a mixer or with an amount that is none.
  */
 export function bowlsFor(grams: number, mixers: readonly Mixer[]): BowlPlan | null {
@@ -39,7 +40,7 @@ export const cooling = { minutes: 10, perEggG: 180, underC: 30 } as const;
 
 /**
  * Minutes one bowl of a formula takes to cool on the mixer; null for a formula that has no step
- * where the mixer waits for a cool bowl. `bowlG` is what goes into the bowl.
+ * where the mixer waits for a cool bowl. `bowlG` is what the mixer holds.
  */
 export function coolingMinutes(
   body: FormulaBody & {
@@ -55,12 +56,11 @@ export function coolingMinutes(
     (it) => it.resource === 'mixer' && it.critical !== null && it.critical.limitC <= cooling.underC,
   );
   if (!cools) return null;
-  let inG = 0;
   let eggG = 0;
   for (const { part, grams } of body.lines) {
-    inG += grams;
     if (part.kind !== 'ingredient') continue;
     if ((index.ingredients.get(part.ingredientId)?.eggPart ?? null) !== null) eggG += grams;
   }
-  return inG > 0 ? ((eggG / inG) * bowlG * cooling.minutes) / cooling.perEggG : null;
+  const wholeG = mixedG(body, formulaTotals(body).outG);
+  return wholeG > 0 ? ((eggG / wholeG) * bowlG * cooling.minutes) / cooling.perEggG : null;
 }

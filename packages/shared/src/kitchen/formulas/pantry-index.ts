@@ -17,6 +17,8 @@ export type FormulaBody = {
   readonly lines: readonly FormulaLine[];
   /** What is left of what goes in, parts per million. */
   readonly yieldPpm: number;
+  /** What of that loss the oven takes; none unless said. */
+  readonly bakeLossPpm?: number;
 };
 
 /** What a line's part is. */

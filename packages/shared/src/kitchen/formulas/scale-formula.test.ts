@@ -100,6 +100,9 @@ describe('a formula scaled', () => {
     expect(byButter.lines[2]?.exactG).toBeCloseTo(454, 9);
     expect(byButter.lines[0]?.exactG).toBeCloseTo(454 / 2.7, 9);
     expect(scaleFormula(swiss, index, { bowls: 3, bowlG: 1200 }).exactOutG).toBeCloseTo(3600, 9);
+    // A mixer holds batter: the oven takes a tenth of it afterwards.
+    const sponge = { ...swiss, yieldPpm: 900_000, bakeLossPpm: 100_000 };
+    expect(scaleFormula(sponge, index, { bowls: 2, bowlG: 1000 }).exactInG).toBeCloseTo(2000, 9);
   });
 
   it('sums its rounded lines and tells the drift of each and of the whole', () => {

@@ -7,9 +7,9 @@ import {
   type ResolvedPart,
 } from './pantry-index.ts';
 import { roundGrams, shellEggG } from './round-grams.ts';
-import { formulaTotals } from './totals.ts';
+import { formulaTotals, mixedG } from './totals.ts';
 
-/** How much of it: grams that come out, a factor, bowls of so many grams each, or one line's grams. */
+/** How much: grams that come out, a factor, bowls of so many grams of mix, or one line's grams. */
 export type ScaleTo =
   | { readonly toG: number }
   | { readonly factor: number }
@@ -92,9 +92,8 @@ function factorOf(body: FormulaBody, to: ScaleTo, outG: number): number {
   if ('factor' in to) return amountOf(to.factor, 'a factor');
   if ('toG' in to) return amountOf(to.toG, 'a weight') / outG;
   if ('bowls' in to) {
-    return (
-      (amountOf(to.bowls, 'a number of bowls') * amountOf(to.bowlG, 'a weight of one bowl')) / outG
-    );
+    const bowlG = amountOf(to.bowlG, 'a weight of one bowl');
+    return (amountOf(to.bowls, 'a number of bowls') * bowlG) / mixedG(body, outG);
   }
   const line = body.lines[to.line];
   if (line === undefined) throw faultOf('missing-part', `There is no line ${to.line + 1}.`);

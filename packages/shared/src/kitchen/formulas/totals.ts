@@ -24,3 +24,11 @@ export function formulaTotals(
     shares: body.lines.map((it) => (inG > 0 ? it.grams / inG : 0)),
   };
 }
+
+/**
+ * Grams the mixer holds for so many that come out in the end: batter before the oven takes its
+ * share. What boils away or stays in pans is gone before the bowl, or after it and small.
+ */
+export function mixedG(body: FormulaBody, outG: number): number {
+  return outG / (1 - Math.min(body.bakeLossPpm ?? 0, 900_000) / 1e6);
+}
