@@ -2,6 +2,7 @@ import type { Ingredient } from '#shared/contracts/pantry.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
 import { groupBy } from '#shared/group-by.ts';
+import { eggOf } from '#shared/kitchen/eggs/egg-of.ts';
 import type { EggTask } from '#shared/kitchen/eggs/joint-plan.ts';
 import { datedNeeds } from '#shared/kitchen/needs/dated-needs.ts';
 import type { UnknownNeed } from '#shared/kitchen/needs/kitchen-needs.ts';
@@ -71,9 +72,10 @@ export async function needsOfSpan({ from, to }: Span): Promise<SpanNeeds> {
 
 /** The egg among it: one making of a formula on a day is one task, whoever it is for. */
 export function eggTasksOf({ needs }: Pick<SpanNeeds, 'needs'>): EggTask[] {
-  const eggs = needs.flatMap((it) =>
-    it.ingredient.eggPart === null ? [] : { ...it, part: it.ingredient.eggPart },
-  );
+  const eggs = needs.flatMap((it) => {
+    const egg = eggOf(it.ingredient);
+    return egg === null ? [] : { ...it, part: egg.part };
+  });
   return [
     ...groupBy(eggs, (it) => [it.date, it.formula?.id ?? '', it.ingredient.id].join(' ')).values(),
   ].flatMap((of): EggTask[] => {

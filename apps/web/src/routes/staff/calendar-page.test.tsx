@@ -106,6 +106,7 @@ beforeEach(() => {
   shown = view;
   server.use(
     http.get('*/api/menu', () => HttpResponse.json(menuFixture)),
+    http.get('*/api/session', () => HttpResponse.json({ user: null, googleSignIn: false })),
     http.get('*/api/staff/calendar', () => HttpResponse.json(shown)),
   );
 });

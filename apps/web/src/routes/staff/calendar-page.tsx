@@ -13,7 +13,9 @@ import { WaitingColumn } from '#web/features/calendar/components/waiting-column.
 import { WeekGrid } from '#web/features/calendar/components/week-grid.tsx';
 import { WeekList } from '#web/features/calendar/components/week-list.tsx';
 import { rangeOf, readPlace } from '#web/features/calendar/days/calendar-range.ts';
+import { MarginLine } from '#web/features/kitchen-sheet/components/margin-line.tsx';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
+import { useSession } from '#web/features/session/api/get-session.ts';
 import { OrderActionDialog } from '#web/features/staff-order/actions/order-action-dialog.tsx';
 import type { OrderAct } from '#web/features/staff-order/actions/order-act.ts';
 import { classNames } from '#web/lib/class-names.ts';
@@ -25,6 +27,7 @@ type Acting = { readonly number: number; readonly act: OrderAct };
 export function CalendarPage() {
   const menu = useMenu();
   const { locale, zone } = menu.studio;
+  const owner = useSession().data?.user?.role === 'owner';
   const [search] = useSearchParams();
   const [acting, setActing] = useState<Acting | null>(null);
   const today = todayIn(new Date(), zone);
@@ -76,7 +79,12 @@ export function CalendarPage() {
       </div>
       {data !== undefined && <WaitingColumn waiting={data.waiting} locale={locale} onAct={act} />}
       {acting !== null && (
-        <OrderActionDialog {...acting} menu={menu} onClose={() => setActing(null)} />
+        <OrderActionDialog
+          {...acting}
+          menu={menu}
+          margin={owner && <MarginLine number={acting.number} locale={locale} />}
+          onClose={() => setActing(null)}
+        />
       )}
     </div>
   );

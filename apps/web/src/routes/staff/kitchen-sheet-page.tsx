@@ -35,7 +35,7 @@ function Sheet({ number }: { readonly number: number }) {
   if (isRefused(error)) return <BakersOnly title={`Kitchen sheet, No. ${number}`} />;
   if (error instanceof ApiProblem && error.code === 'not-found') return <NotFoundPage />;
   return (
-    <div className="page grid gap-5 py-6 print:py-0">
+    <div className="page grid gap-5 py-6 print:block print:space-y-4 print:px-0 print:pt-3">
       <p data-print="no">
         <Link to={paths.staffOrder(number)} className="link inline-block py-1">
           The order

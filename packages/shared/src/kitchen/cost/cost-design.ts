@@ -4,6 +4,7 @@ import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import type { TaskKind } from '#shared/contracts/vocabulary.ts';
 import type { Work } from '#shared/dates/model.ts';
 import { groupBy } from '#shared/group-by.ts';
+import { eggOf } from '../eggs/egg-of.ts';
 import { formatLength } from '../measures.ts';
 import type { IngredientNeed, KitchenNeeds } from '../needs/kitchen-needs.ts';
 import { isPiped, timesOf } from '../piped.ts';
@@ -99,8 +100,8 @@ export function costDesign(input: CostInput): DesignCost {
   const weighed = needs.ingredients
     .map((it) => ({ ...it, grams: it.grams - it.forDecorationsG }))
     .filter((it) => it.grams > 0);
-  const eggs = weighed.filter((it) => it.ingredient.eggPart !== null);
-  const rest = weighed.filter((it) => it.ingredient.eggPart === null);
+  const eggs = weighed.filter((it) => eggOf(it.ingredient) !== null);
+  const rest = weighed.filter((it) => eggOf(it.ingredient) === null);
   const direct: CostLine[] = [
     lineOf('ingredients', bought(rest)),
     lineOf('eggs', bought(eggs)),

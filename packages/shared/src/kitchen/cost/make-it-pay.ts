@@ -234,7 +234,7 @@ const moneyOf =
     formatMoney(amountMinor, cost.currency, locale);
 
 /** "12.5 %", to a tenth. */
-export function percent(ppm: number): string {
+function percent(ppm: number): string {
   return `${String(Math.round(ppm / 1000) / 10)} %`;
 }
 

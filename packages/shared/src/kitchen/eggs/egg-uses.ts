@@ -2,7 +2,7 @@ import type { EggPart } from '#shared/contracts/pantry.ts';
 import { explodeFormula } from '../formulas/explode-formula.ts';
 import { FormulaFault } from '../formulas/formula-problem.ts';
 import { currentVersion, type PantryIndex } from '../formulas/pantry-index.ts';
-import { shellEggG } from '../formulas/round-grams.ts';
+import { eggOf } from './egg-of.ts';
 import { largeEggG } from './egg-weights.ts';
 import type { EggLeftover } from './plan-eggs.ts';
 
@@ -89,13 +89,13 @@ function eggPerKg(
     let [white, yolk, pasteurised] = [0, 0, false];
     for (const [id, grams] of ingredients) {
       const ingredient = index.ingredients.get(id);
-      if (ingredient === undefined || ingredient.eggPart === null) continue;
-      pasteurised ||= shellEggG(ingredient) === null || ingredient.pasteurised === 'yes';
-      if (ingredient.eggPart !== 'yolk')
-        white +=
-          ingredient.eggPart === 'white' ? grams : (grams * largeEggG.white) / largeEggG.whole;
-      if (ingredient.eggPart !== 'white')
-        yolk += ingredient.eggPart === 'yolk' ? grams : (grams * largeEggG.yolk) / largeEggG.whole;
+      const egg = ingredient === undefined ? null : eggOf(ingredient);
+      if (ingredient === undefined || egg === null) continue;
+      pasteurised ||= !egg.shell || ingredient.pasteurised === 'yes';
+      if (egg.part !== 'yolk')
+        white += egg.part === 'white' ? grams : (grams * largeEggG.white) / largeEggG.whole;
+      if (egg.part !== 'white')
+        yolk += egg.part === 'yolk' ? grams : (grams * largeEggG.yolk) / largeEggG.whole;
     }
     return { white, yolk, pasteurised };
   } catch (error) {

@@ -2,7 +2,7 @@ import type { EggPart, Ingredient } from '#shared/contracts/pantry.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
 import { groupBy } from '#shared/group-by.ts';
 import type { PantryIndex } from '../formulas/pantry-index.ts';
-import { shellEggG } from '../formulas/round-grams.ts';
+import { eggOf } from './egg-of.ts';
 import { leftoverDays, leftoverUses, type LeftoverDay, type LeftoverUse } from './egg-uses.ts';
 import type { EggClass } from './egg-weights.ts';
 import { planCartons, type CartonPlan } from './plan-cartons.ts';
@@ -62,8 +62,8 @@ export function jointEggPlan(
   index: PantryIndex,
   { size, keeping }: JointOptions = usual,
 ): JointEggPlan {
-  const cracked = tasks.filter((it) => shellEggG(it.ingredient) !== null);
-  const poured = tasks.filter((it) => shellEggG(it.ingredient) === null);
+  const cracked = tasks.filter((it) => eggOf(it.ingredient)?.shell === true);
+  const poured = tasks.filter((it) => eggOf(it.ingredient)?.shell === false);
   const shell = planEggs(cracked, size, keeping);
   return {
     shell,
@@ -103,6 +103,7 @@ function instead(
     if (carton === undefined || carton.pack === null) return [];
     const rest = cracked.filter((it) => it.formulaId !== first.formulaId);
     const fewer = eggs - planEggs(rest, size, keeping).eggs;
+    if (fewer <= 0) return [];
     const sharing = poured.filter((it) => it.ingredient.id === carton.id);
     const { grams: packG } = carton.pack;
     const before = planCartons(sharing, packG).cartons;
@@ -124,7 +125,8 @@ function instead(
 
 function cartonOf(part: EggPart, index: PantryIndex): Ingredient | undefined {
   for (const it of index.ingredients.values()) {
-    const poured = it.eggPart === part && shellEggG(it) === null;
+    const egg = eggOf(it);
+    const poured = egg !== null && egg.part === part && !egg.shell;
     if (poured && it.pasteurised === 'yes' && it.archivedAt === null) return it;
   }
   return undefined;
@@ -138,11 +140,10 @@ export function eggsAlone(
   needs: readonly { readonly ingredient: Ingredient; readonly grams: number }[],
 ): { readonly crack: number; readonly leftWhiteG: number; readonly leftYolkG: number } {
   const plan = planEggs(
-    needs.flatMap(({ ingredient, grams }) =>
-      ingredient.eggPart === null || shellEggG(ingredient) === null
-        ? []
-        : { date: oneDay, part: ingredient.eggPart, grams },
-    ),
+    needs.flatMap(({ ingredient, grams }) => {
+      const egg = eggOf(ingredient);
+      return egg?.shell === true ? { date: oneDay, part: egg.part, grams } : [];
+    }),
   );
   const [left] = leftoverDays(plan.leftovers);
   return { crack: plan.eggs, leftWhiteG: left?.whiteG ?? 0, leftYolkG: left?.yolkG ?? 0 };

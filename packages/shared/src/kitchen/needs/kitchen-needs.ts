@@ -27,7 +27,7 @@ export type FormulaNeed = {
   readonly outG: number;
   /** Grams in the mixer: what goes in for a batter, what comes out for the rest. */
   readonly mixG: number;
-  /** Null where the studio has no mixer or nothing is mixed. */
+  /** Null where the studio has no mixer, or no step of the formula uses one. */
   readonly bowls: BowlPlan | null;
   /** Names of what it is for: parts of the menu, or formulas it goes into. */
   readonly for: readonly string[];
@@ -146,7 +146,8 @@ function formulaNeed(
     scaled,
     outG,
     mixG,
-    bowls: mixers.some((it) => it.capacityG > 0) ? bowlsFor(mixG, mixers) : null,
+    bowls:
+      usesMixer(version) && mixers.some((it) => it.capacityG > 0) ? bowlsFor(mixG, mixers) : null,
     for: [...purposes],
   };
 }
@@ -189,4 +190,9 @@ function buyDecoration({ id }: WeighedPart, { resolved, parts }: NeedsInput, buy
     const grams = it.grams * times;
     buy(it.ingredientId, { grams, forDecorationsG: grams, asItIsG: grams });
   }
+}
+
+/** A formula without steps is taken for one that is mixed. */
+function usesMixer({ steps }: FormulaVersion): boolean {
+  return steps.length === 0 || steps.some((it) => it.resource === 'mixer');
 }

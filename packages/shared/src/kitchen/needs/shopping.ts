@@ -1,5 +1,6 @@
 import type { Ingredient } from '#shared/contracts/pantry.ts';
 import { atPackPrice } from '../cost/at-pack-price.ts';
+import { eggOf } from '../eggs/egg-of.ts';
 import { shellEggG } from '../formulas/round-grams.ts';
 
 /** One thing to buy; null where its pack is not known. */
@@ -48,6 +49,7 @@ function together(needs: readonly Bought[]): Bought[] {
 /**
  * What to buy for so many needs, in whole packs. Eggs that are cracked are bought as eggs, whatever
  * part of them is used: `shelf` is where the studio's shell egg is found, among all ingredients.
+ * What costs nothing (tap water) is not bought.
  */
 export function shoppingList(
   needs: readonly Bought[],
@@ -55,9 +57,11 @@ export function shoppingList(
   shelf: readonly Ingredient[],
 ): ShoppingList {
   const wanted = together(needs);
-  const shell = wanted.filter((it) => shellEggG(it.ingredient) !== null);
-  const rest = wanted.filter((it) => shellEggG(it.ingredient) === null);
-  const lines = rest.map((it) => lineOf(it, eggs.cartons.get(it.ingredient.id)));
+  const shell = wanted.filter((it) => eggOf(it.ingredient)?.shell === true);
+  const rest = wanted.filter((it) => eggOf(it.ingredient)?.shell !== true);
+  const lines = rest
+    .filter((it) => it.ingredient.pack?.priceMinor !== 0)
+    .map((it) => lineOf(it, eggs.cartons.get(it.ingredient.id)));
   const first = shell[0];
   if (first !== undefined && eggs.shell > 0) {
     const dozen = shellEgg(shelf) ?? first.ingredient;
@@ -81,7 +85,7 @@ export function shoppingList(
 /** Whole eggs in their shell, as the studio buys them now. */
 function shellEgg(shelf: readonly Ingredient[]): Ingredient | undefined {
   return shelf.find(
-    (it) => it.eggPart === 'whole' && it.archivedAt === null && shellEggG(it) !== null,
+    (it) => it.archivedAt === null && eggOf(it)?.shell === true && it.eggPart === 'whole',
   );
 }
 

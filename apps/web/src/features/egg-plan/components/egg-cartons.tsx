@@ -45,7 +45,7 @@ export function EggCartons({
         ))}
       </ul>
       <p className="text-sm text-slate">
-        Liquid pasteurised egg keeps 10 days unopened and 3 opened, chilled (FDA storage chart); the
+        Liquid pasteurized egg keeps 10 days unopened and 3 opened, chilled (FDA storage chart); the
         maker’s own date goes before it.
       </p>
     </div>

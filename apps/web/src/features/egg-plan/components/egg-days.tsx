@@ -13,7 +13,7 @@ export function EggDays({ days, locale }: Props) {
       {days.map((day) => (
         <li
           key={day.date}
-          className="grid gap-x-8 gap-y-2 border-b border-seam px-5 py-4 break-inside-avoid last:border-b-0 sm:grid-cols-[13rem_minmax(0,1fr)] sm:px-7 print:grid-cols-[12rem_minmax(0,1fr)]"
+          className="grid gap-x-8 gap-y-2 border-b border-seam px-5 py-4 break-inside-avoid last:border-b-0 sm:grid-cols-[13rem_minmax(0,1fr)] sm:px-7 print:grid-cols-[12rem_minmax(0,1fr)] print:px-0 print:py-2"
         >
           <div className="grid content-start gap-0.5">
             <h3>{formatDay(day.date, { locale })}</h3>
@@ -50,6 +50,9 @@ function separateWords({ crack, whole }: EggDayView): string {
   return `${whole} ${whole === 1 ? 'goes' : 'go'} in whole, ${apart} separated.`;
 }
 
+/** Less is not worth getting out of the fridge first, grams. */
+const worthTakingG = 5;
+
 const partWords = { whole: 'whole egg', white: 'whites', yolk: 'yolks' } as const;
 
 function Use({
@@ -61,15 +64,13 @@ function Use({
   readonly date: string;
   readonly locale: string;
 }) {
-  const older = use.from.filter((it) => it.crackedOn < date && it.grams >= 0.5);
+  const older = use.from.filter((it) => it.crackedOn < date && it.grams >= worthTakingG);
   return (
-    <li className="grid grid-cols-[5.5rem_1.5rem_minmax(0,1fr)] items-baseline gap-x-3 py-1">
+    <li className="grid grid-cols-[4.5rem_1.5rem_minmax(0,1fr)] gap-x-3 py-1">
       <span className="text-right font-semibold whitespace-nowrap tabular-nums">
         {gramsText(use.grams, locale)}
       </span>
-      <span className="self-center">
-        <EggGlyph part={use.part} />
-      </span>
+      <EggGlyph part={use.part} />
       <span className="min-w-0">
         {partWords[use.part]} for {use.formula},{' '}
         <span className="text-sm text-slate">

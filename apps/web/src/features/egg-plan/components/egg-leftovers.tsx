@@ -90,7 +90,7 @@ function Uses({
             {it.pasteurised && (
               <span className="text-sm text-slate">
                 {' '}
-                (written for pasteurised egg: with raw egg the mix itself must reach its limit on a
+                (written for pasteurized egg: with raw egg the mix itself must reach its limit on a
                 probe, or the egg notice goes with the cake)
               </span>
             )}

@@ -30,12 +30,12 @@ const families: readonly (readonly [family: string, name: string])[] = [
 export function ShoppingList({ list, locale }: Props) {
   const byFamily = groupBy(list.lines, (it) => it.family);
   return (
-    <div className="grid gap-x-10 gap-y-6 px-5 py-5 sm:px-7 lg:grid-cols-2 print:grid-cols-2 print:p-0">
+    <div className="gap-x-10 px-5 pt-5 sm:px-7 lg:columns-2 print:columns-2 print:p-0">
       {families.map(([family, name]) => {
         const lines = byFamily.get(family);
         if (lines === undefined) return null;
         return (
-          <section key={family} className="grid content-start break-inside-avoid">
+          <section key={family} className="mb-6 break-inside-avoid print:mb-3">
             <h2 className="text-lg">{name}</h2>
             <ul>
               {lines.map((line) => (

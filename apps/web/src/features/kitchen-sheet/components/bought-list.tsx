@@ -6,7 +6,7 @@ type Props = { readonly ingredients: KitchenSheet['ingredients']; readonly local
 /** Everything bought that goes in, through all formulas, heaviest first. */
 export function BoughtList({ ingredients, locale }: Props) {
   return (
-    <ul className="grid gap-x-10 sm:grid-cols-2 print:grid-cols-2">
+    <ul className="grid gap-x-10 sm:grid-cols-2 print:block print:columns-2">
       {ingredients.map((it) => (
         <li
           key={it.id}

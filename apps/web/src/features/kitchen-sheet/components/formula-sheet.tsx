@@ -30,7 +30,7 @@ export function FormulaSheet({ formula, locale }: Props) {
             The order keeps the version it was made with; {formula.newer} is today’s.
           </p>
         )}
-        {formula.pasteurised && <p className="text-sm text-slate">Written for pasteurised egg.</p>}
+        {formula.pasteurised && <p className="text-sm text-slate">Written for pasteurized egg.</p>}
       </header>
       <ol className="border-t border-seam">
         {lines.map((line, at) => (
@@ -45,12 +45,10 @@ export function FormulaSheet({ formula, locale }: Props) {
       </ol>
       {bowls !== null && (
         <p className="text-sm">
-          <strong>
-            {bowls.bowls === 1 ? 'One bowl' : `${bowls.bowls} bowls`} of {grams(bowls.eachG)}
-          </strong>{' '}
-          in the {bowls.mixer}
+          <strong>{bowls.mixer}:</strong> {bowls.bowls === 1 ? 'one bowl' : `${bowls.bowls} bowls`}{' '}
+          of {grams(bowls.eachG)}
           {bowls.coolingMinutes !== null &&
-            `; about ${formatDuration(Math.max(1, Math.round(bowls.coolingMinutes)))} for a bowl to cool`}
+            `; a bowl takes about ${formatDuration(Math.max(1, Math.round(bowls.coolingMinutes)))} to cool`}
           .
         </p>
       )}

@@ -10,7 +10,7 @@ type Props = { readonly sheet: KitchenSheet; readonly locale: string };
 /** Formulas side by side, as many as there is room for. */
 export function FormulaSheets({ sheet, locale }: Props) {
   return (
-    <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-2 print:grid-cols-2 print:gap-y-5">
+    <div className="grid items-start gap-x-10 gap-y-8 lg:grid-cols-2 print:block print:columns-2 print:space-y-5">
       {sheet.formulas.map((formula) => (
         <FormulaSheet key={formula.versionId} formula={formula} locale={locale} />
       ))}
@@ -21,7 +21,7 @@ export function FormulaSheets({ sheet, locale }: Props) {
 /** Weights by tier, and the eggs this order alone would take. */
 export function KitchenSummary({ sheet, locale }: Props) {
   return (
-    <div className="grid gap-4">
+    <div className="grid gap-4 print:block print:space-y-3">
       <UnknownNeeds unknown={sheet.unknown} locale={locale} />
       <PieceWeights pieces={sheet.pieces} locale={locale} />
       {sheet.eggs.crack > 0 && <p>{eggSentence(sheet, locale)}</p>}
@@ -32,13 +32,13 @@ export function KitchenSummary({ sheet, locale }: Props) {
 /** Everything on a page of its own, to print and take to the bench. */
 export function WholeSheet({ sheet, locale }: Props) {
   return (
-    <div className="grid gap-8 print:gap-5">
+    <div className="grid gap-8 print:block print:space-y-5">
       <KitchenSummary sheet={sheet} locale={locale} />
-      <section className="grid gap-4">
+      <section className="grid gap-4 print:block print:space-y-3">
         <h2>Formulas</h2>
         <FormulaSheets sheet={sheet} locale={locale} />
       </section>
-      <section className="grid gap-3">
+      <section className="grid gap-3 print:block print:space-y-2">
         <h2>All of it, as bought</h2>
         <BoughtList ingredients={sheet.ingredients} locale={locale} />
       </section>

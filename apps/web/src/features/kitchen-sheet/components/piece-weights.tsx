@@ -6,7 +6,7 @@ type Props = { readonly pieces: readonly KitchenPiece[]; readonly locale: string
 /** Each tier and cutting cake with what goes on it and what is made for it. */
 export function PieceWeights({ pieces, locale }: Props) {
   return (
-    <table className="w-full border-collapse">
+    <table className="w-full max-w-3xl border-collapse print:text-sm">
       <caption className="sr-only">Weights by tier</caption>
       <thead>
         <tr className="border-b border-seam text-left text-sm text-slate">
@@ -33,14 +33,17 @@ export function PieceWeights({ pieces, locale }: Props) {
           </tr>
           {piece.parts.map((part) => (
             <tr key={`${part.part} ${part.name}`} className="border-b border-seam">
-              <th scope="row" className="py-1.5 pr-4 text-left font-normal">
+              <th scope="row" className="py-1.5 pr-4 text-left font-normal print:py-0.5">
                 {part.name}
               </th>
-              <td className="py-1.5 pl-4 text-right whitespace-nowrap tabular-nums">
+              <td className="py-1.5 pl-4 text-right whitespace-nowrap tabular-nums print:py-0.5">
                 {gramsText(part.inCakeG, locale)}
               </td>
-              <td className="py-1.5 pl-4 text-right whitespace-nowrap tabular-nums">
+              <td className="py-1.5 pl-4 text-right whitespace-nowrap tabular-nums print:py-0.5">
                 {gramsText(part.toMakeG, locale)}
+                {part.part === 'sponge' && (
+                  <span className="block text-sm text-slate print:ml-1 print:inline">batter</span>
+                )}
               </td>
             </tr>
           ))}

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { StaffOrder } from '#shared/contracts/staff.ts';
 
@@ -5,6 +6,8 @@ import type { StaffOrder } from '#shared/contracts/staff.ts';
 export type ActProps = {
   readonly order: StaffOrder;
   readonly menu: Menu;
+  /** What the price leaves, for the owner; beside it where it is about to be confirmed. */
+  readonly margin?: ReactNode;
   /** It went through. */
   readonly onDone: () => void;
   readonly onClose: () => void;

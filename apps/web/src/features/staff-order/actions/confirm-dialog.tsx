@@ -22,7 +22,7 @@ import { ActFailure } from './act-failure.tsx';
 import type { ActProps } from './act-props.ts';
 
 /** The last look: what it costs and the e-mail as it will go; then one press. */
-export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
+export function ConfirmDialog({ order, menu, margin, onDone, onClose }: ActProps) {
   const [note, setNote] = useState('');
   const [shownNote, setShownNote] = useState('');
   const look = useConfirmation(order.number, shownNote);
@@ -80,6 +80,7 @@ export function ConfirmDialog({ order, menu, onDone, onClose }: ActProps) {
             />
           ))}
           <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
+          {margin}
         </div>
         <section aria-labelledby={heading} className="grid min-w-0 gap-3">
           <h3 id={heading}>The e-mail that goes out</h3>

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { statusWords } from '#web/components/order/status-mark.tsx';
 import { Button } from '#web/components/ui/button.tsx';
@@ -19,6 +19,8 @@ type Props = {
   readonly number: number;
   readonly act: OrderAct;
   readonly menu: Menu;
+  /** Shown with the price where it is about to be confirmed. */
+  readonly margin?: ReactNode;
   readonly onClose: () => void;
 };
 
@@ -33,7 +35,7 @@ const titles: Readonly<Record<OrderAct, (number: number) => string>> = {
 };
 
 /** One act on one order, from wherever it was asked for; it always works on the order as it is now. */
-export function OrderActionDialog({ number, act, menu, onClose }: Props) {
+export function OrderActionDialog({ number, act, menu, margin, onClose }: Props) {
   const { data, isPending, error, refetch } = useStaffOrder(number);
   return (
     <Dialog open onClose={onClose} title={titles[act](number)} wide={act === 'confirm'}>
@@ -42,7 +44,14 @@ export function OrderActionDialog({ number, act, menu, onClose }: Props) {
       ) : data === undefined ? (
         <Failure error={error} onRetry={() => void refetch()} />
       ) : (
-        <Act order={data} act={act} menu={menu} onDone={onClose} onClose={onClose} />
+        <Act
+          order={data}
+          act={act}
+          menu={menu}
+          margin={margin}
+          onDone={onClose}
+          onClose={onClose}
+        />
       )}
     </Dialog>
   );

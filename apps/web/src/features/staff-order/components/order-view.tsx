@@ -31,6 +31,8 @@ import { OrderStructure } from './order-structure.tsx';
 export type OrderParts = {
   /** Under the price: what it costs to make, for the owner. */
   readonly cost?: ReactNode;
+  /** The same in a line, where it is about to be confirmed. */
+  readonly margin?: ReactNode;
   /** What goes into it, formula by formula; as wide as the page. */
   readonly kitchen?: ReactNode;
   /** What is printed for it. */
@@ -159,6 +161,7 @@ export function OrderView({ order, menu, parts = {} }: Props) {
           number={order.number}
           act={act}
           menu={menu}
+          margin={parts.margin}
           onClose={() => setAct(null)}
         />
       )}
