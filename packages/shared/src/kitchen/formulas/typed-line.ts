@@ -59,7 +59,13 @@ export type ProofFinding = {
 export type PartCandidate = { readonly part: FormulaPart; readonly name: string };
 
 export type ReadProblemCode =
-  'not-read' | 'no-amount' | 'to-taste' | 'no-weight' | 'unknown-part' | 'which-part';
+  | 'not-read'
+  | 'no-amount'
+  | 'to-taste'
+  | 'no-weight'
+  | 'two-things'
+  | 'unknown-part'
+  | 'which-part';
 
 /** A line of a typed formula: what was made of it, and always what was typed. */
 export type ReadLine = {
