@@ -1,7 +1,7 @@
 import type { Cake, Coating, Design, PlacedDecoration } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { portionsWanted } from '#shared/kitchen/portions.ts';
-import { proposeStacks, tiersOf } from '#shared/kitchen/proposals.ts';
+import { plainWish, proposeStacks, tiersOf } from '#shared/kitchen/proposals.ts';
 import { cuttingCakeOf, proposeShows } from '#shared/kitchen/propose-cutting.ts';
 
 /** A design that can be planned, and whether it is the customer's own or a likely one. */
@@ -45,7 +45,7 @@ function typicalCake({ guests }: Design, menu: Menu): Omit<Cake, 'coating'> {
   );
   if (most !== undefined) return { ...none, tiers: tiersOf(most, inside) };
   // Beyond what the studio stacks, a grand show and cutting cakes for the rest.
-  const [show] = proposeShows(wanted, menu, portion, { keepTop: false, alone: false }).toSorted(
+  const [show] = proposeShows(wanted, menu, portion, { ...plainWish, alone: false }).toSorted(
     (a, b) => b.stack.sizes.length - a.stack.sizes.length,
   );
   if (show === undefined) return none;

@@ -164,6 +164,14 @@ describe('proposals with cutting cakes', () => {
     expect(sheet(200)?.cuttingCakes).toHaveLength(1);
   });
 
+  it('stay square where the cake is', () => {
+    const tiers = [roundTier(10, { shape: 'square' }), roundTier(6, { shape: 'square' })];
+    for (const it of propose(designWith({ cake: { tiers } }))) {
+      expect(it.tiers.every((tier) => tier.shape === 'square')).toBe(true);
+      if (it.sheet === null) expect(it.name).toMatch(/square tiers?, /);
+    }
+  });
+
   it('keep the top tier back where it was kept back, and feed everybody from the others', () => {
     const tiers = [roundTier(10), roundTier(8), roundTier(6, { keepsake: true })];
     const proposals = propose(designWith({ cake: { tiers } })).filter((it) => it.sheet === null);

@@ -20,6 +20,17 @@ export type ProposedStack = Stack & {
   readonly blurb: string;
 };
 
+/** What somebody wants of a stack beside its size. */
+export type StackWish = {
+  /** The top tier is a keepsake and the others feed everybody. */
+  readonly keepTop: boolean;
+  /** The studio's own usual shape takes its place where it bakes none of this one. */
+  readonly shape: 'round' | 'square';
+};
+
+/** A round cake that is all eaten. */
+export const plainWish: StackWish = { keepTop: false, shape: 'round' };
+
 /** The look of a stack: tiers within these steps of one another, and no more than this many. */
 const largestStepMm = 130;
 const mostTiers = 6;
@@ -36,28 +47,28 @@ const roundingMm = 1;
 const stacksByMenu = new WeakMap<Menu, Map<string, readonly Stack[]>>();
 
 /**
- * Every sensible stack of the studio's round sizes (square where it bakes no round ones), fewest
- * portions first.
+ * Every sensible stack of the studio's sizes of one shape, fewest portions first; of the other
+ * shape where it bakes none of it.
  */
-export function stacksOf(menu: Menu, portion: PortionSize, keepTop: boolean): readonly Stack[] {
+export function stacksOf(menu: Menu, portion: PortionSize, wish: StackWish): readonly Stack[] {
   let byPortion = stacksByMenu.get(menu);
   if (byPortion === undefined) {
     byPortion = new Map();
     stacksByMenu.set(menu, byPortion);
   }
-  const key = `${portion.id}:${String(keepTop)}`;
+  const key = `${portion.id}:${wish.shape}:${String(wish.keepTop)}`;
   let stacks = byPortion.get(key);
   if (stacks === undefined) {
-    stacks = enumerate(menu, portion, keepTop);
+    stacks = enumerate(menu, portion, wish);
     byPortion.set(key, stacks);
   }
   return stacks;
 }
 
-function enumerate(menu: Menu, portion: PortionSize, keepTop: boolean): Stack[] {
-  const round = menu.tierSizes.filter((it) => it.shape === 'round');
-  const shapes = round.length > 0 ? round : menu.tierSizes.filter((it) => it.shape === 'square');
-  const widestFirst = shapes.toSorted((a, b) => b.widthMm - a.widthMm);
+function enumerate(menu: Menu, portion: PortionSize, { keepTop, shape }: StackWish): Stack[] {
+  const wished = menu.tierSizes.filter((it) => it.shape === shape);
+  const even = menu.tierSizes.filter((it) => it.shape !== 'rectangle');
+  const widestFirst = (wished.length > 0 ? wished : even).toSorted((a, b) => b.widthMm - a.widthMm);
   const stacks: Stack[] = [];
   const grow = (sizes: readonly TierSize[], from: number) => {
     if (sizes.length > (keepTop ? 1 : 0)) stacks.push(...atHeights(sizes, portion, keepTop));
@@ -118,16 +129,16 @@ export function usualTiers(wanted: number): number {
 /**
  * Two or three stacks that feed a number of portions: the one that wastes least, one with some
  * over, and one of another number of tiers. Least waste first; usual heights before
- * double ones. Empty where the studio bakes nothing large enough. With `keepTop` the top tier is a
- * keepsake and the others feed everybody. The same menu and number always give the same answer.
+ * double ones. Empty where the studio bakes nothing large enough. The same menu, number and wish
+ * always give the same answer.
  */
 export function proposeStacks(
   wanted: number,
   menu: Menu,
   portion: PortionSize,
-  keepTop = false,
+  wish: StackWish = plainWish,
 ): ProposedStack[] {
-  const enough = stacksOf(menu, portion, keepTop).filter((it) => it.portions >= wanted);
+  const enough = stacksOf(menu, portion, wish).filter((it) => it.portions >= wanted);
   const single = enough.filter((it) => it.heightMm <= doubleHeightMm);
   const usable = single.length > 0 ? single : enough;
   const tiers = usualTiers(wanted);
@@ -178,7 +189,8 @@ export function nameOfStack({ sizes, keepTop }: Stack, menu: Menu): string {
   const lead = menu.studio.lengthLead;
   const figures = sizes.map((it) => lengthFigure(it.widthMm, lead));
   const kept = keepTop ? ', the top one kept back' : '';
-  return `${countOf(sizes.length, 'tier')}, ${formatList(figures)} ${lead}${kept}`;
+  const shape = sizes[0]?.shape === 'square' ? 'square ' : '';
+  return `${countOf(sizes.length, `${shape}tier`)}, ${formatList(figures)} ${lead}${kept}`;
 }
 
 /** Layers of sponge for a height: one for about every 35 mm, an even number when cut double. */

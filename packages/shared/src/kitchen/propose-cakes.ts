@@ -3,7 +3,7 @@ import type { Proposal } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { portionsWanted } from './portions.ts';
 import { priceDesign, type PriceTerms } from './price.ts';
-import { proposeStacks, tiersOf } from './proposals.ts';
+import { proposeStacks, tiersOf, type StackWish } from './proposals.ts';
 import { cuttingCakeOf, proposeSheet, proposeShows, sheetOf } from './propose-cutting.ts';
 import { resolveDesign, type ResolvedDesign } from './resolve-design.ts';
 import { guestsClash } from './situation.ts';
@@ -17,7 +17,7 @@ const mostRemembered = 64;
  * (no decorations, no extras). Large tables are offered a cake on show with cutting cakes in the
  * kitchen; tables no stack feeds are offered nothing else. They take the sponge, filling and coat
  * already chosen, else the first of the menu that no guest's allergy or diet speaks against; a top
- * tier that is kept back stays kept back.
+ * tier that is kept back stays kept back, and square stays square.
  */
 export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Proposal[] {
   const { design, menu, portionSize } = resolved;
@@ -25,13 +25,16 @@ export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Propo
   const inside = insideOf(resolved);
   const coating = design.cake?.coating ?? null;
   const top = resolved.tiers.length > 1 ? resolved.tiers.at(-1) : undefined;
-  const keepTop = design.cake?.kind === 'tiered' && top?.keepsake === true;
+  const wish: StackWish = {
+    keepTop: design.cake?.kind === 'tiered' && top?.keepsake === true,
+    shape: resolved.tiers[0]?.block.shape === 'square' ? 'square' : 'round',
+  };
   const key = JSON.stringify([
     wanted,
     portionSize.id,
     inside,
     coating,
-    keepTop,
+    wish,
     terms.date,
     terms.today,
   ]);
@@ -42,7 +45,7 @@ export function proposeCakes(resolved: ResolvedDesign, terms: PriceTerms): Propo
   }
   const before = known.get(key);
   if (before !== undefined) return [...before];
-  const proposals = unpriced(resolved, inside, keepTop).map((it): Proposal => {
+  const proposals = unpriced(resolved, inside, wish).map((it): Proposal => {
     const cake = cakeOfProposal(it, coating);
     const alone = resolveDesign({ ...design, cake, look: null, extras: [] }, menu);
     return { ...it, priceMinor: priceDesign(alone, terms).totalMinor };
@@ -66,12 +69,12 @@ type Inside = { readonly spongeId: string | null; readonly fillingId: string | n
 function unpriced(
   { design, menu, portionSize }: ResolvedDesign,
   inside: Inside,
-  keepTop: boolean,
+  wish: StackWish,
 ): Omit<Proposal, 'priceMinor'>[] {
   const wanted = portionsWanted(design.guests, menu);
-  const stacks = proposeStacks(wanted, menu, portionSize, keepTop);
+  const stacks = proposeStacks(wanted, menu, portionSize, wish);
   const alone = stacks.length > 0;
-  const shows = proposeShows(wanted, menu, portionSize, { keepTop, alone });
+  const shows = proposeShows(wanted, menu, portionSize, { ...wish, alone });
   const sheet = proposeSheet(wanted, menu, portionSize);
   // Beside a show cake two stacks are choice enough: a third of another height steps back.
   const beside =

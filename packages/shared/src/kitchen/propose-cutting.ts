@@ -1,6 +1,13 @@
 import type { CuttingCake, Sheet } from '#shared/contracts/design.ts';
 import type { Menu, PortionSize, SheetSize } from '#shared/contracts/menu.ts';
-import { idOfStack, nameOfStack, stacksOf, usualTiers, type Stack } from './proposals.ts';
+import {
+  idOfStack,
+  nameOfStack,
+  stacksOf,
+  usualTiers,
+  type Stack,
+  type StackWish,
+} from './proposals.ts';
 import { cuttingWords } from './sentences.ts';
 import { doubleHeightMm, portionsOfSheet } from './sizes.ts';
 
@@ -72,14 +79,14 @@ export function proposeShows(
   wanted: number,
   menu: Menu,
   portion: PortionSize,
-  { keepTop, alone }: { readonly keepTop: boolean; readonly alone: boolean },
+  { alone, ...wish }: StackWish & { readonly alone: boolean },
 ): ProposedShow[] {
   if (alone && wanted < fewestForCutting) return [];
-  const stacks = stacksOf(menu, portion, keepTop).filter((it) => it.heightMm <= doubleHeightMm);
+  const stacks = stacksOf(menu, portion, wish).filter((it) => it.heightMm <= doubleHeightMm);
   const largest = stacks.at(-1)?.portions ?? 0;
   const least = Math.min(wanted * showShare.least, largest * 0.5);
   const most = wanted * showShare.most;
-  const wish = Math.min(wanted * showShare.best, largest * 0.8);
+  const ideal = Math.min(wanted * showShare.best, largest * 0.8);
   const best = (tiers: number): ProposedShow | null => {
     const found = stacks
       .filter((it) => it.sizes.length === tiers && it.portions >= least && it.portions <= most)
@@ -94,7 +101,7 @@ export function proposeShows(
   const costOf = (it: { stack: Stack; cut: Cut; portions: number }) =>
     (it.portions - wanted) / slack +
     it.cut.count * 0.5 +
-    (Math.abs(it.stack.portions - wish) / Math.max(1, wish)) * 2;
+    (Math.abs(it.stack.portions - ideal) / Math.max(1, ideal)) * 2;
   const usual = Math.max(fewestOnShow, usualTiers(wanted * showShare.best));
   const grand = best(usual) ?? best(usual - 1) ?? best(usual + 1);
   if (grand === null) return [];

@@ -175,7 +175,7 @@ describe('sending an order', () => {
     expect(offer.price.lines.filter((it) => it.kind === 'cutting-cake')).toHaveLength(1);
     const order = await Order.findOne({ where: { code }, rejectOnEmpty: true });
     const items = await OrderItem.findAll({
-      where: { revisionId: order.currentRevisionId },
+      where: { revisionId: order.currentRevisionId ?? '' },
       order: [['position', 'ASC']],
     });
     expect(items.map(({ kind, quantity, sheetSizeId }) => [kind, quantity, sheetSizeId])).toEqual([

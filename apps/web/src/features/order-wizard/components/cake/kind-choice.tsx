@@ -13,6 +13,7 @@ import { addTier, isProposal, nextTier, takeProposal, takeSheet } from '../../de
 import { firstInside } from '../../design/first-inside.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
+import { KeepTop } from './keep-top.tsx';
 
 const sheetRow = 'sheet';
 const ownRow = 'own';
@@ -97,7 +98,7 @@ export function KindChoice() {
     const drawn = cakeOfProposal(proposal, null);
     return {
       value: proposal.id,
-      label: summariseCake(drawn, menu),
+      label: proposal.name,
       description: `${proposal.blurb}: ${proposal.portions} portions`,
       picture: (
         <span aria-hidden="true" className="block w-20">
@@ -109,16 +110,19 @@ export function KindChoice() {
   }
 
   return (
-    <RadioGroup
-      name="cake.tiers"
-      legend={`For ${day.headCount}, we would bake one of these`}
-      hint="Prices are for the cake with what is inside it; what goes over and on it comes later."
-      large
-      error={tiersProblem ?? sheetProblem}
-      rows={rows}
-      value={chosen()}
-      onValue={choose}
-    />
+    <div className="grid gap-2">
+      <RadioGroup
+        name="cake.tiers"
+        legend={`For ${day.headCount}, we would bake one of these`}
+        hint="Prices are for the cake with what is inside it; what goes over and on it comes later."
+        large
+        error={tiersProblem ?? sheetProblem}
+        rows={rows}
+        value={chosen()}
+        onValue={choose}
+      />
+      <KeepTop taken={matching ?? null} />
+    </div>
   );
 }
 
