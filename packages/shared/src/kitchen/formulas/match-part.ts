@@ -116,13 +116,15 @@ export function matchPart(
   if (first === undefined || first.fits < asked.length) {
     return { match: null, candidates, fits: false };
   }
+  // A misspelt word may be another word: butter and batter are one letter apart.
+  const spelt = first.exact === asked.length;
   const alone = second === undefined || second.fits < asked.length || tells(first, second);
-  return { match: alone ? first.candidate : null, candidates, fits: true };
+  return { match: spelt && alone ? first.candidate : null, candidates, fits: true };
 }
 
 type Rated = {
   readonly candidate: PartCandidate;
-  /** Telling words found; exact ones count whole, misspelt ones a little less. */
+  /** Telling words found, misspelt ones included; and those spelt as they are. */
   readonly fits: number;
   readonly exact: number;
   readonly noted: number;
