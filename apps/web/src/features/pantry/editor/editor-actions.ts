@@ -38,6 +38,9 @@ export type EditorAction =
   | { readonly type: 'remove-step'; readonly key: number }
   | { readonly type: 'move-step'; readonly key: number; readonly by: 1 | -1 };
 
+/** A pasted tab is a blank: what is kept as a line stays one. */
+const onOneLine = (text: string) => text.replaceAll(/\p{Cc}+/gu, ' ');
+
 /** The form after one thing done to it; what did not change stays the same object. */
 export function editorReducer(form: EditorForm, action: EditorAction): EditorForm {
   switch (action.type) {
@@ -48,7 +51,7 @@ export function editorReducer(form: EditorForm, action: EditorAction): EditorFor
     case 'text':
       return changeLine(form, action.key, (row) => ({
         ...row,
-        text: action.text,
+        text: onOneLine(action.text),
         stored: null,
         picked: row.stored === null ? row.picked : { part: row.stored.part, words: action.words },
       }));
@@ -109,7 +112,7 @@ function changeLine(form: EditorForm, key: number, change: (row: LineRow) => Lin
 
 function addLines(form: EditorForm, at: number, texts: readonly string[]): EditorForm {
   const step = form.lines[at - 1]?.step ?? form.lines[at]?.step ?? 0;
-  const added = texts.map((text, i) => blankLine(form.nextKey + i, step, text));
+  const added = texts.map((text, i) => blankLine(form.nextKey + i, step, onOneLine(text)));
   return {
     ...form,
     lines: form.lines.toSpliced(at, 0, ...added),
@@ -120,10 +123,14 @@ function addLines(form: EditorForm, at: number, texts: readonly string[]): Edito
 /** A pasted text goes to the end; its headings become steps, so that nothing of it is lost. */
 function paste(form: EditorForm, { headings, lines }: Pasted): EditorForm {
   const before = form.steps.length;
-  const steps = headings.map((text, i) => blankStep(form.nextKey + i, text));
+  const steps = headings.map((text, i) => blankStep(form.nextKey + i, onOneLine(text)));
   const first = form.nextKey + steps.length;
   const rows = lines.map(({ text, stage }, i) =>
-    blankLine(first + i, stage === 0 ? Math.max(0, before - 1) : before + stage - 1, text),
+    blankLine(
+      first + i,
+      stage === 0 ? Math.max(0, before - 1) : before + stage - 1,
+      onOneLine(text),
+    ),
   );
   return {
     ...form,

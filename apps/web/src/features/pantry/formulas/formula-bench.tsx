@@ -66,9 +66,7 @@ export function FormulaBench({ formula, version, shelf, menu, makeG }: Props) {
       ? scaleFormula(version, index, { factor: whole.factor / bowls.bowls })
       : whole;
   const cools =
-    whole === null || bowls === null
-      ? null
-      : coolingMinutes(version, index, whole.exactOutG / bowls.bowls);
+    whole === null || bowls === null ? null : coolingMinutes(version, index, bowls.eachG);
 
   return (
     <Rim label="At the bench" className="grid gap-6 p-5 sm:p-7 print:border-0 print:p-0">

@@ -88,7 +88,14 @@ export function PrintedFacts({ version, seen, menu }: Pick<Props, 'version' | 's
             ? 'What it contains is unknown.'
             : told.length === 0
               ? 'No allergen of the list is named.'
-              : `${told.map((it) => `${statement[it.state]} ${allergenLabel(it, labelRegion)}`).join('; ')}.`}
+              : (['contains', 'may-contain', 'unknown'] as const)
+                  .map((state) => [state, told.filter((it) => it.state === state)] as const)
+                  .filter(([, entries]) => entries.length > 0)
+                  .map(
+                    ([state, entries]) =>
+                      `${statement[state]} ${formatList(entries.map((it) => allergenLabel(it, labelRegion)))}.`,
+                  )
+                  .join(' ')}
         </strong>
       </p>
       {keeps.length > 0 && <p>Keeps {keeps.join(', ')}.</p>}
@@ -100,7 +107,6 @@ const statement = {
   contains: 'Contains',
   'may-contain': 'May contain',
   unknown: 'Unknown:',
-  'not-declared': '',
 } as const;
 
 function factRows({ version, seen, shelf, menu }: Props): DataRow[] {
