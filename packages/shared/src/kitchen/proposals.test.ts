@@ -177,6 +177,8 @@ describe('proposals with cutting cakes', () => {
     const proposals = propose(designWith({ cake: { tiers } })).filter((it) => it.sheet === null);
     for (const it of proposals) {
       expect(it.tiers.at(-1)?.keepsake).toBe(true);
+      // A keepsake is small: 6 in at most.
+      expect(it.tiers.at(-1)?.widthMm).toBeLessThanOrEqual(152);
       expect(it.name).toMatch(/the top one kept back/);
       expect(it.portions).toBeGreaterThanOrEqual(70);
     }

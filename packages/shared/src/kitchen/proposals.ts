@@ -35,6 +35,9 @@ export const plainWish: StackWish = { keepTop: false, shape: 'round' };
 const largestStepMm = 130;
 const mostTiers = 6;
 
+/** A tier to keep is small: nobody stores a large one for a year (memory). */
+const largestKeepsakeMm = 160;
+
 /** The usual height of a tier, 4 in; the size's nearest is taken. */
 const usualHeightMm = 102;
 
@@ -69,9 +72,14 @@ function enumerate(menu: Menu, portion: PortionSize, { keepTop, shape }: StackWi
   const wished = menu.tierSizes.filter((it) => it.shape === shape);
   const even = menu.tierSizes.filter((it) => it.shape !== 'rectangle');
   const widestFirst = (wished.length > 0 ? wished : even).toSorted((a, b) => b.widthMm - a.widthMm);
+  const largestKept = Math.max(largestKeepsakeMm, widestFirst.at(-1)?.widthMm ?? 0);
+  const isKept = (sizes: readonly TierSize[]) =>
+    sizes.length > 1 && (sizes.at(-1)?.widthMm ?? 0) <= largestKept;
   const stacks: Stack[] = [];
   const grow = (sizes: readonly TierSize[], from: number) => {
-    if (sizes.length > (keepTop ? 1 : 0)) stacks.push(...atHeights(sizes, portion, keepTop));
+    if (sizes.length > 0 && (!keepTop || isKept(sizes))) {
+      stacks.push(...atHeights(sizes, portion, keepTop));
+    }
     if (sizes.length === mostTiers) return;
     const top = sizes.at(-1);
     for (const [index, next] of widestFirst.entries()) {
