@@ -49,13 +49,12 @@ export const kitchenFormula = z.object({
 });
 export type KitchenFormula = z.infer<typeof kitchenFormula>;
 
-export const kitchenPart = z.object({
+const kitchenPart = z.object({
   part: z.enum(['sponge', 'filling', 'style', 'covering', 'decoration']),
   name: z.string(),
   inCakeG: grams,
   toMakeG: grams,
 });
-export type KitchenPart = z.infer<typeof kitchenPart>;
 
 /** A tier, the sheet, one of a kind of cutting cake, or all decorations together. */
 export const kitchenPiece = z.object({

@@ -12,7 +12,7 @@ import type { FeatureRoutes } from '#api/http/route.ts';
 import { authorise } from '#api/modules/authorise.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { findOrderByNumber } from '#api/modules/orders/orders.queries.ts';
-import { orderNumber } from '#api/modules/staff-orders/order-number.ts';
+import { orderNumber } from '#api/http/order-number.ts';
 import { planEggsOfSpan } from './egg-plan.queries.ts';
 import { presentKitchenSheet } from './kitchen-sheet.presenter.ts';
 import { mayKitchen } from './kitchen.policy.ts';

@@ -1,7 +1,5 @@
 import { Op } from 'sequelize';
 import type { OrderCost } from '#shared/contracts/kitchen-sheet.ts';
-import { expandDesign } from '#shared/dates/expand-design.ts';
-import type { WorkTimes } from '#shared/dates/work-times.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import { chargedPortions } from '#shared/kitchen/charged-portions.ts';
 import { costDesign } from '#shared/kitchen/cost/cost-design.ts';
@@ -17,7 +15,7 @@ import { Extra } from '#api/db/models/extra.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { PriceBookVersion } from '#api/db/models/price-book-version.ts';
 import { loadOrderRecord } from '#api/modules/orders/orders.queries.ts';
-import { loadPlanSettings, loadWorkTimes } from '#api/modules/plan/plan-settings.ts';
+import { workByTimes } from '#api/modules/plan/work-of-design.queries.ts';
 import { needsOfOrder } from './order-needs.queries.ts';
 
 /**
@@ -25,10 +23,9 @@ import { needsOfOrder } from './order-needs.queries.ts';
  * its offer, and what would make it pay.
  */
 export async function costOfOrder(order: Order): Promise<OrderCost> {
-  const [record, ground, settings, extras, book] = await Promise.all([
+  const [record, ground, extras, book] = await Promise.all([
     loadOrderRecord(order),
     needsOfOrder(order),
-    loadPlanSettings(),
     Extra.findAll(),
     PriceBookVersion.findOne({
       where: { validFrom: { [Op.lte]: currentClock().now() } },
@@ -39,13 +36,12 @@ export async function costOfOrder(order: Order): Promise<OrderCost> {
   const { content: rates } = book;
   const { menu, design, resolved, pantry } = ground;
   const price = record.agreedPrice ?? record.revision.estimate.price;
-  const workTimes = await loadWorkTimes(record.revision.workTimeVersionId);
-  const { equipment } = settings;
+  const workOf = await workByTimes(record.revision.workTimeVersionId);
   const costOf = (it: ResolvedDesign, paid: { totalMinor: number; taxMinor: number }): DesignCost =>
     costDesign({
       resolved: it,
       needs: ground.needsOf(it),
-      work: workOf(it, workTimes, equipment),
+      work: workOf(it),
       parts: pantry.parts,
       extraCosts: new Map(extras.map(({ id, costMinor }) => [id, costMinor])),
       rates,
@@ -83,16 +79,6 @@ export async function costOfOrder(order: Order): Promise<OrderCost> {
     agreed: record.agreedPrice !== null,
     levers,
   };
-}
-
-/** Hands' work by the times the order was planned with; none before there is a cake. */
-function workOf(
-  resolved: ResolvedDesign,
-  workTimes: WorkTimes,
-  equipment: Parameters<typeof expandDesign>[0]['equipment'],
-) {
-  if (resolved.design.cake === null) return [];
-  return expandDesign({ resolved, workTimes, equipment, noticeDays: 0 }).work;
 }
 
 /** Portions that are charged for, in the tiers and in the kitchen's cutting cakes. */

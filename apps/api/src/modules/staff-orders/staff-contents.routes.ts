@@ -14,7 +14,7 @@ import type { Deps } from '#api/modules/deps.ts';
 import { findOrderByNumber } from '#api/modules/orders/orders.queries.ts';
 import type { Staff } from '#api/platform/actor.ts';
 import { authoriseStaff } from './authorise-staff.ts';
-import { orderNumber } from './order-number.ts';
+import { orderNumber } from '#api/http/order-number.ts';
 import { loadStaffOrderPage } from './staff-order.queries.ts';
 import { presentStaffOrder } from './staff-orders.presenter.ts';
 

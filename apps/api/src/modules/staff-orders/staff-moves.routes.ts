@@ -31,7 +31,7 @@ import { declineOrder as declineOrderCommand } from './decline-order.command.ts'
 import { liftStop as liftStopCommand } from './lift-stop.command.ts';
 import { markOrder as markOrderCommand } from './mark-order.command.ts';
 import { moveOrder as moveOrderCommand } from './move-order.command.ts';
-import { orderNumber } from './order-number.ts';
+import { orderNumber } from '#api/http/order-number.ts';
 import { recordTalk as recordTalkCommand } from './record-talk.command.ts';
 import { loadStaffOrderPage } from './staff-order.queries.ts';
 import type { StaffOrderAction } from './staff-orders.policy.ts';

@@ -19,7 +19,7 @@ import { authoriseStaff } from './authorise-staff.ts';
 import { blockersOf } from './blockers.queries.ts';
 import { findOrders } from './list-orders.queries.ts';
 import { loadOrderRows } from './order-cards.queries.ts';
-import { orderNumber } from './order-number.ts';
+import { orderNumber } from '#api/http/order-number.ts';
 import { renewLink } from './renew-link.command.ts';
 import { loadFit, loadStaffOrderPage } from './staff-order.queries.ts';
 import { presentStaffOrder } from './staff-orders.presenter.ts';

@@ -30,7 +30,13 @@ export function FormulaSheet({ formula, locale }: Props) {
             The order keeps the version it was made with; {formula.newer} is today’s.
           </p>
         )}
-        {formula.pasteurised && <p className="text-sm text-slate">Written for pasteurized egg.</p>}
+        {formula.pasteurised && (
+          <p className="text-sm text-slate">
+            Written for pasteurized egg.
+            {lines.some((it) => it.eggs !== null) &&
+              ' With eggs in the shell the mix itself must reach its limit on a probe, or the egg notice goes with the cake; your local food code decides.'}
+          </p>
+        )}
       </header>
       <ol className="border-t border-seam">
         {lines.map((line, at) => (
