@@ -146,6 +146,7 @@ function rate(
   const has = (word: string) => words.has(word);
   const near = (word: string) => has(word) || [...words].some((it) => nearlySame(it, word));
   const exact = asked.asked.filter(has).length;
+  const called = names.includes(asked.named);
   const labelled =
     label.size === new Set(asked.asked).size && asked.asked.every((it) => label.has(it));
   return {
@@ -153,11 +154,12 @@ function rate(
     exact,
     fits: asked.asked.filter(near).length,
     noted: asked.noted.filter(has).length,
-    named: names.includes(asked.named) ? 2 : labelled ? 1 : 0,
+    named: called ? 2 : labelled ? 1 : 0,
     shell:
       asked.counted && ingredient?.measures.some((it) => it.measure === 'piece') === true ? 1 : 0,
-    // "Vanilla" is sooner the extract on the shelf than one of the studio's own creams.
-    bought: ingredient === null ? 0 : 1,
+    // "Vanilla" is sooner the extract on the shelf than one of the studio's own creams; but what
+    // is bought and made under one and the same name is asked about.
+    bought: ingredient === null || called ? 0 : 1,
     spare: words.size - exact,
   };
 }
