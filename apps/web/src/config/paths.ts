@@ -26,6 +26,9 @@ export const paths = {
   policies: '/policies',
   policy: (kind: PolicyText['kind']) => `/policies#${kind}`,
   order: '/order',
+  /** The order begun with a cake; after the `#`, so that no server reads of an allergy in it. */
+  orderWith: (start: Readonly<Record<string, string>>) =>
+    `/order#${new URLSearchParams(start).toString()}`,
   orderStep: (step: OrderStep) => `/order/${step}`,
   orderSent: '/order/sent',
   myOrder: (code: string) => `/orders/${encodeURIComponent(code)}`,

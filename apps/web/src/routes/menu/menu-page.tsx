@@ -1,4 +1,6 @@
+import { useState } from 'react';
 import { Link } from 'react-router-dom';
+import { byLevel } from '#shared/kitchen/heat.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { DecorationGlyph } from '#web/components/cake-drawing/decoration-glyph.tsx';
 import { LinkButton } from '#web/components/ui/link-button.tsx';
@@ -8,10 +10,30 @@ import { Section } from '#web/components/ui/section.tsx';
 import { paths } from '#web/config/paths.ts';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
 import { CoatComparison } from './coat-comparison.tsx';
+import {
+  judgeContents,
+  judgeDecoration,
+  judgeFilling,
+  noWish,
+  type Verdict,
+  type Wish,
+} from './judge-part.ts';
+import { MenuWish } from './menu-wish.tsx';
+import { WholeCakes } from './whole-cakes.tsx';
 import { ColourSpoon, PartRow } from './part-row.tsx';
 import { SizeTable } from './size-table.tsx';
 
 const per = { piece: 'each', tier: 'a tier', cake: 'a cake' } as const;
+
+/** Parts with how each suits the table, those that fall away last; else in the studio's own order. */
+function judged<Part extends { readonly id: string }>(
+  parts: readonly Part[],
+  judge: (part: Part) => Verdict,
+) {
+  return parts
+    .map((part) => ({ ...part, verdict: judge(part) }))
+    .sort((a, b) => byLevel(a.verdict.level, b.verdict.level));
+}
 
 /** Everything the studio makes, what is in it and what it costs. */
 export function MenuPage() {
@@ -19,6 +41,9 @@ export function MenuPage() {
   const { locale, currency, labelRegion } = menu.studio;
   const money = (minor: number) => formatMoney(minor, currency, locale);
   const extraCost = (minor: number) => (minor === 0 ? undefined : `+ ${money(minor)} a portion`);
+  const [asked, setAsked] = useState(noWish);
+  const unread = asked.warmestC !== null && Number.isNaN(asked.warmestC);
+  const wish: Wish = unread ? { ...asked, warmestC: null } : asked;
   const prices = menu.priceBook.tierBands.map((it) => it.perPortionMinor);
   return (
     <div className="page grid gap-14 py-8">
@@ -37,13 +62,17 @@ export function MenuPage() {
 
       <Rim label="Buttercreams side by side" className="grid gap-5 p-4 sm:p-8">
         <h2>Six buttercreams, side by side</h2>
-        <CoatComparison menu={menu} />
+        <MenuWish menu={menu} wish={asked} onWish={setAsked} />
+        <CoatComparison menu={menu} wish={wish} />
+        {(wish.allergen !== null || wish.warmestC !== null) && (
+          <WholeCakes menu={menu} wish={wish} />
+        )}
       </Rim>
 
       <div className="grid gap-x-14 gap-y-14 md:grid-cols-2">
         <Section title="Sponges">
           <ul className="grid">
-            {menu.sponges.map((it) => (
+            {judged(menu.sponges, (it) => judgeContents(it.contents, wish, menu)).map((it) => (
               <PartRow
                 key={it.id}
                 {...it}
@@ -56,7 +85,7 @@ export function MenuPage() {
         </Section>
         <Section title="Fillings">
           <ul className="grid">
-            {menu.fillings.map((it) => (
+            {judged(menu.fillings, (it) => judgeFilling(it, wish, menu)).map((it) => (
               <PartRow
                 key={it.id}
                 {...it}
@@ -79,8 +108,9 @@ export function MenuPage() {
 
       <Section title="Decorations">
         <ul className="grid gap-x-14 md:grid-cols-2">
-          {menu.decorations.map((it) => (
+          {judged(menu.decorations, (it) => judgeDecoration(it, wish, menu)).map((it) => (
             <PartRow
+              verdict={it.verdict}
               key={it.id}
               name={it.name}
               blurb={it.blurb}
