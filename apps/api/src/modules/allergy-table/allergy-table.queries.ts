@@ -5,7 +5,7 @@ import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { AllergyRule } from '#api/db/models/allergy-rule.ts';
 import { KitchenAllergen } from '#api/db/models/kitchen-allergen.ts';
 import { Studio } from '#api/db/models/studio.ts';
-import { handledAllergens, loadCakeRows } from '#api/modules/menu/load-cake-parts.ts';
+import { handledAllergens, loadCakeRows } from '#api/modules/menu/cake-parts.queries.ts';
 import { currentPantry } from '#api/modules/pantry/load-pantry.queries.ts';
 
 /** The owner's words as they are kept, in one order whatever order they were written in. */

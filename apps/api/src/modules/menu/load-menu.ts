@@ -17,8 +17,8 @@ import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { publicPriceBook } from '#shared/kitchen/price-book.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import { currentPantry } from '#api/modules/pantry/load-pantry.queries.ts';
-import { cakePartsOf, handledAllergens, loadCakeRows } from './load-cake-parts.ts';
-import type { CakeParts, CakeRows, VersionOf } from './load-cake-parts.ts';
+import { cakePartsOf, handledAllergens, loadCakeRows } from './cake-parts.queries.ts';
+import type { CakeParts, CakeRows, VersionOf } from './cake-parts.queries.ts';
 import { inOrder, offered } from '#api/db/offered.ts';
 import { presentStudioCard } from './studio-card.ts';
 

@@ -1,6 +1,6 @@
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
-import type { VersionOf } from './load-cake-parts.ts';
+import type { VersionOf } from './cake-parts.queries.ts';
 import { loadMenuGround, menuContent } from './load-menu.ts';
 
 /** Makes menus over one pantry or another, parts that are not offered any more included. */

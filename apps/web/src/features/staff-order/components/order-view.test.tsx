@@ -22,7 +22,28 @@ const egg = {
   answer: null,
 };
 
+const soyChange = {
+  id: 'c1',
+  at: '2027-06-01T14:00:00.000Z',
+  changes: ['It contains soy now: in Vanilla sponge.'],
+  cause: 'The label of Soft wheat flour',
+  by: 'Noor Haddad',
+  clashes: ['Contains soy: Vanilla sponge. Declared: allergy, 1 guest.'],
+  mailAt: '2027-06-01T14:10:00.000Z',
+  acknowledged: null,
+  told: null,
+};
+
 describe('the order’s page', () => {
+  it('says what is in it now, against what it is, and until when nobody may hand it over', () => {
+    show(staffOrderFixture({ contentChanges: [soyChange] }));
+    const block = screen.getByRole('region', { name: 'What is in it has changed' });
+    expect(block).toHaveTextContent('The label of Soft wheat flour, changed by Noor Haddad');
+    expect(block).toHaveTextContent('Against what guests told:Contains soy: Vanilla sponge.');
+    expect(block).toHaveTextContent('neither marked ready nor handed over. Our e-mail goes out');
+    expect(block).toHaveTextContent('No baker has seen to it yet.');
+  });
+
   it('offers nothing that the server does not allow', () => {
     show(staffOrderFixture({ allergies: [egg], blockers: [eggStop] }));
     const actions = screen.queryAllByRole('button');
@@ -43,11 +64,14 @@ describe('the order’s page', () => {
     ['addPhotos', 'Add a photo'],
     ['answerAllergy', 'Record the talk'],
     ['liftStop', 'Take it all the same'],
+    ['tellContents', 'I have told them'],
+    ['acknowledgeContents', 'Say what you do about it'],
   ] as const)('offers %s alone where only that is allowed', (right, name) => {
     show(
       staffOrderFixture({
         allergies: [egg],
         blockers: [eggStop],
+        contentChanges: [soyChange],
         can: { ...nothingAllowed, [right]: true },
       }),
     );
