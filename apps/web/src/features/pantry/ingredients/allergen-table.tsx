@@ -53,6 +53,8 @@ export function AllergenTable({ rows, unnamed, region, problems, onRows }: Props
             key={row.key}
             legend={at === 0 ? name : `${name}, others`}
             value={row.state}
+            name={`allergens.${rows.indexOf(row)}`}
+            error={rowProblem(problems, rows.indexOf(row))}
             options={allergenStates}
             onValue={(state) => change(row.key, { state })}
           >
@@ -89,6 +91,11 @@ export function AllergenTable({ rows, unnamed, region, problems, onRows }: Props
       })}
     </div>
   );
+}
+
+/** What is wrong with a row, in any part of it. */
+function rowProblem(problems: readonly FieldProblem[], at: number): string | undefined {
+  return problems.find(({ name }) => /^allergens\.(\d+)/.exec(name)?.[1] === String(at))?.message;
 }
 
 /** The region's species, and any other a row already names. */

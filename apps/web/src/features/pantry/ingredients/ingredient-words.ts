@@ -1,4 +1,4 @@
-import type { EggPart, HouseholdMeasure, Ingredient } from '#shared/contracts/pantry.ts';
+import type { EggPart, HouseholdMeasure } from '#shared/contracts/pantry.ts';
 import type { IngredientFamily } from '#shared/contracts/pantry.ts';
 import type { AllergenState } from '#shared/contracts/vocabulary.ts';
 
@@ -54,8 +54,3 @@ export const factWords: Readonly<Record<(typeof factNames)[number], string>> = {
   honey: 'Honey',
   animalOrigin: 'From meat, fish or slaughter',
 };
-
-/** Name and maker: "Unsalted butter, 82 % fat (Millbrook Creamery)". */
-export function ingredientTitle({ name, brand }: Pick<Ingredient, 'name' | 'brand'>): string {
-  return brand === null || brand === '' ? name : `${name} (${brand})`;
-}

@@ -2,7 +2,7 @@ import { householdMeasure, householdMeasures } from '#shared/contracts/pantry.ts
 import { Button } from '#web/components/ui/button.tsx';
 import { Select } from '#web/components/ui/select.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
-import type { FieldProblem } from '#web/lib/forms.ts';
+import { type FieldProblem, fieldId } from '#web/lib/forms.ts';
 import { AmountField } from '../forms/amount-field.tsx';
 import { problemAt } from '../forms/check-draft.ts';
 import { type MeasureRow, nextKey } from './ingredient-form.ts';
@@ -26,11 +26,14 @@ export function MeasureTable({ rows, problems, onRows }: Props) {
           {rows.map((row, at) => (
             <li
               key={row.key}
+              id={fieldId(`measures.${at}`)}
+              tabIndex={-1}
               className="grid grid-cols-2 items-end gap-x-3 gap-y-2 py-3 sm:grid-cols-[8.5rem_minmax(0,1fr)_7rem_minmax(0,1.4fr)_auto]"
             >
               <Select
                 label="One"
                 name={`measures.${at}.measure`}
+                error={problemAt(problems, `measures.${at}`)}
                 value={row.measure}
                 onChange={(event) => {
                   const measure = householdMeasure.safeParse(event.target.value);

@@ -1,5 +1,7 @@
 import { type ReactNode, useId } from 'react';
+import { FieldError } from '#web/components/ui/field-frame.tsx';
 import { classNames } from '#web/lib/class-names.ts';
+import { fieldId } from '#web/lib/forms.ts';
 
 type Props<V extends string> = {
   readonly legend: ReactNode;
@@ -10,6 +12,9 @@ type Props<V extends string> = {
     readonly stop?: boolean;
   }[];
   readonly onValue: (value: V) => void;
+  /** The field's path, so that the error summary can come here. */
+  readonly name?: string;
+  readonly error?: string | undefined;
   readonly children?: ReactNode;
 };
 
@@ -19,11 +24,18 @@ export function StateRow<V extends string>({
   value,
   options,
   onValue,
+  name,
+  error,
   children,
 }: Props<V>) {
   const group = useId();
   return (
-    <fieldset className="grid gap-x-4 gap-y-1 border-b border-seam py-2 sm:grid-cols-[minmax(9rem,1fr)_minmax(0,24rem)] sm:items-center">
+    <fieldset
+      id={name === undefined ? undefined : fieldId(name)}
+      tabIndex={name === undefined ? undefined : -1}
+      aria-describedby={error ? `${group}-error` : undefined}
+      className="grid gap-x-4 gap-y-1 border-b border-seam py-2 sm:grid-cols-[minmax(9rem,1fr)_minmax(0,24rem)] sm:items-center"
+    >
       <legend className="contents">
         <span className="min-w-0 font-semibold">{legend}</span>
       </legend>
@@ -57,7 +69,12 @@ export function StateRow<V extends string>({
           </label>
         ))}
       </div>
-      {children && <div className="grid gap-2 sm:col-span-2">{children}</div>}
+      {(children || error) && (
+        <div className="grid gap-2 sm:col-span-2">
+          <FieldError id={`${group}-error`} message={error} />
+          {children}
+        </div>
+      )}
     </fieldset>
   );
 }
