@@ -57,7 +57,7 @@ export const demoForms = {
       round(10, 'lemon', 'raspberry'),
       round(7, 'vanilla', 'raspberry'),
     ),
-    setting: { place: 'shade', warmestC: 24, minutesOut: 90, driveMinutes: 20, servedAt: null },
+    setting: { place: 'shade', warmestC: 24, minutesOut: 90, driveMinutes: 20, servedAt: 16 * 60 },
     look: look({
       palette: ['#2c7a4b', '#ffffff'],
       decorations: [placed('pressed-flowers', 0), placed('fine-lace', 1)],
@@ -74,7 +74,7 @@ export const demoForms = {
       round(8, 'vanilla', 'passion-fruit'),
       round(5, 'honey', 'lemon-curd'),
     ),
-    setting: { place: 'shade', warmestC: 25, minutesOut: 90, driveMinutes: 25, servedAt: null },
+    setting: { place: 'shade', warmestC: 25, minutesOut: 90, driveMinutes: 25, servedAt: 15 * 60 + 30 },
     look: look({
       palette: ['#faf6ec', '#f2b632', '#2c7a4b'],
       decorations: [

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import { saveAllergyTable, type AllergyTable } from '#shared/contracts/allergy-table.ts';
 import type { StudioCard } from '#shared/contracts/menu.ts';
 import { Button } from '#web/components/ui/button.tsx';
@@ -31,6 +31,15 @@ export function AllergyTableForm({ table, studio, today, onSaved }: Props) {
   const save = useSaveAllergyTable();
   const toast = useToast();
   const put = (change: Partial<TableDraft>) => setDraft((it) => ({ ...it, ...change }));
+  // The same each time, so that typing a text leaves the eighty fields of the tables alone.
+  const putRules = useCallback(
+    (rules: TableDraft['rules']) => setDraft((it) => ({ ...it, rules })),
+    [],
+  );
+  const putKitchen = useCallback(
+    (kitchen: TableDraft['kitchen']) => setDraft((it) => ({ ...it, kitchen })),
+    [],
+  );
   const takeUp = (from: AllergyTable) => {
     setDraft(draftOf(from));
     setMadeFrom(from.version);
@@ -89,11 +98,7 @@ export function AllergyTableForm({ table, studio, today, onSaved }: Props) {
           {studio.labelRegion === 'US' ? 'celiac' : 'coeliac'} disease are talked over even where an
           allergen is only handled here.
         </p>
-        <AnswerTable
-          rules={draft.rules}
-          region={studio.labelRegion}
-          onRules={(rules) => put({ rules })}
-        />
+        <AnswerTable rules={draft.rules} region={studio.labelRegion} onRules={putRules} />
       </Section>
       <Section title="What the kitchen handles">
         <p className="measure text-slate">
@@ -106,7 +111,7 @@ export function AllergyTableForm({ table, studio, today, onSaved }: Props) {
           region={studio.labelRegion}
           locale={studio.locale}
           today={today}
-          onKitchen={(kitchen) => put({ kitchen })}
+          onKitchen={putKitchen}
         />
       </Section>
       <Section title="In your words">

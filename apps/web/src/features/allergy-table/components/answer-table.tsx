@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { allergyAnswer, type AllergyAnswer } from '#shared/contracts/menu.ts';
 import {
   severities,
@@ -22,7 +23,7 @@ type Props = {
 const unsaid: AllergyAnswer = 'talk';
 
 /** Allergen by severity: the owner's word where a cake contains it. */
-export function AnswerTable({ rules, region, onRules }: Props) {
+export const AnswerTable = memo(function AnswerTable({ rules, region, onRules }: Props) {
   const rows: readonly (AllergenId | null)[] = [null, ...declarableAllergens(region)];
   return (
     <div className="grid">
@@ -63,7 +64,7 @@ export function AnswerTable({ rules, region, onRules }: Props) {
       ))}
     </div>
   );
-}
+});
 
 type CellProps = {
   readonly allergen: AllergenId | null;

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import type { AllergyTable } from '#shared/contracts/allergy-table.ts';
 import type { AllergenId, LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { formatDay } from '#shared/dates/format.ts';
@@ -21,7 +22,7 @@ type Props = {
 };
 
 /** What is handled here: from the labels by itself, and what the owner adds, with the assessment. */
-export function KitchenNotes({ fromLabels, region, ...props }: Props) {
+export const KitchenNotes = memo(function KitchenNotes({ fromLabels, region, ...props }: Props) {
   return (
     <ul className="grid">
       {declarableAllergens(region).map((allergen) => (
@@ -35,7 +36,7 @@ export function KitchenNotes({ fromLabels, region, ...props }: Props) {
       ))}
     </ul>
   );
-}
+});
 
 type RowProps = Omit<Props, 'fromLabels'> & {
   readonly allergen: AllergenId;

@@ -162,6 +162,17 @@ describe('handing over', () => {
     });
     has({
       ...order,
+      allergies: [
+        {
+          id: 'a1',
+          allergen: 'sesame',
+          species: null,
+          text: '',
+          severity: 'anaphylaxis',
+          guests: 2,
+          answer: null,
+        },
+      ],
       contacts: [
         ...order.contacts,
         { as: 'collects', name: 'Theo Marsh', email: '', phone: '', reachBy: 'phone' },
@@ -172,6 +183,11 @@ describe('handing over', () => {
     );
     const { user, onClose } = open('collect');
     expect(await screen.findByRole('textbox', { name: 'Who takes it' })).toHaveValue('Theo Marsh');
+    // What is said aloud as it changes hands: the guests' allergies, what is in it, what comes out.
+    const say = screen.getByRole('region', { name: 'Say this as you hand it over' });
+    expect(say).toHaveTextContent('Sesame: allergy, anaphylaxis, 2 guests');
+    expect(say).toHaveTextContent(/Contains: .*egg/);
+    expect(say).toHaveTextContent(/Hidden inside: .*dowels/);
     await user.type(screen.getByRole('textbox', { name: /How it looked/ }), 'Cold and upright');
     await user.click(screen.getByRole('button', { name: 'It is collected' }));
     await waitFor(() => expect(onClose).toHaveBeenCalled());
