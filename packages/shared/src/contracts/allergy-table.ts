@@ -9,7 +9,6 @@ export const allergyCell = z.object({
   severity,
   answer: allergyAnswer,
 });
-export type AllergyCell = z.infer<typeof allergyCell>;
 
 /** What the owner says of one allergen in the kitchen, beside what the labels show. */
 export const kitchenNote = z.object({
