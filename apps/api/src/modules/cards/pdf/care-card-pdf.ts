@@ -4,6 +4,7 @@ import { formatDay, formatTime, formatWindow } from '#shared/dates/format.ts';
 import { cuttingPlanOf, type PieceCut } from '#shared/kitchen/cutting/cutting-plan.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import type { ResolvedDesign } from '#shared/kitchen/resolve-design.ts';
+import { supportsOf, type DowelPlace } from '#shared/kitchen/supports.ts';
 import type { PageMm } from './card-document.ts';
 import {
   bodySize,
@@ -122,18 +123,33 @@ function drawCutting(sheet: CareSheet, { resolved }: CareCard): void {
   if (plan === null) return;
   const lead = resolved.menu.studio.lengthLead;
   const { portion } = plan;
+  const dowels = supportsOf(resolved.tiers).perTier.map((it) =>
+    it.dowels.flatMap((set) => [...set.at]),
+  );
+  const aside = [
+    resolved.tiers.length > 1 ? 'Take the tiers apart first, from the top down. ' : '',
+    dowels.some((it) => it.length > 0) ? 'Red dots are dowels: take them out. ' : '',
+  ].join('');
   sheet.title('Cutting it', 120);
   sheet.paragraph([
     textRun(
-      `${plan.portions} portions of ${formatLength(portion.widthMm, lead)} by ${formatLength(portion.depthMm, lead)}. Take the tiers apart from the top down; all drawn to one scale, from above.`,
+      `${plan.portions} portions of ${formatLength(portion.widthMm, lead)} by ${formatLength(portion.depthMm, lead)}. ${aside}All drawn to one scale, from above.`,
     ),
   ]);
   const widest = Math.max(1, ...plan.pieces.map((it) => it.cut?.block.widthMm ?? 0));
   const scale = Math.min(0.34, (sheet.width * 0.36) / widest);
-  for (const piece of plan.pieces) drawPiece(sheet, piece, scale, widest * scale);
+  for (const piece of plan.pieces) {
+    const standing = piece.kind === 'tier' ? (dowels[piece.index] ?? []) : [];
+    drawPiece(sheet, piece, standing, { scale, room: widest * scale });
+  }
 }
 
-function drawPiece(sheet: CareSheet, piece: PieceCut, scale: number, room: number): void {
+function drawPiece(
+  sheet: CareSheet,
+  piece: PieceCut,
+  dowels: readonly DowelPlace[],
+  { scale, room }: { readonly scale: number; readonly room: number },
+): void {
   const { document, x, width } = sheet;
   const indent = room + 12;
   const count = piece.count > 1 ? `${piece.count} × ` : '';
@@ -153,7 +169,7 @@ function drawPiece(sheet: CareSheet, piece: PieceCut, scale: number, room: numbe
   const top = sheet.y();
   if (piece.cut !== null) {
     const across = piece.cut.block.widthMm * scale;
-    drawCut(document.pdf, piece.cut, { x: x + (room - across) / 2, y: top + 1 }, scale);
+    drawCut(document.pdf, piece.cut, dowels, { x: x + (room - across) / 2, y: top + 1, scale });
   }
   document.writeLines(lines, x + indent, top);
   sheet.moveTo(top + height);

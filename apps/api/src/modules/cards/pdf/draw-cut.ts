@@ -1,13 +1,18 @@
 import type { BlockCut } from '#shared/kitchen/cutting/cut-block.ts';
+import type { DowelPlace } from '#shared/kitchen/supports.ts';
 import { paper } from './ink.ts';
 
-/** A block from above with every cut of the knife, at a scale in points a millimetre. */
+/**
+ * A block from above with every cut of the knife and every dowel in it, at a scale in points a
+ * millimetre.
+ */
 export function drawCut(
   pdf: PDFKit.PDFDocument,
   { block, cuts }: BlockCut,
-  at: { readonly x: number; readonly y: number },
-  scale: number,
+  dowels: readonly DowelPlace[],
+  at: { readonly x: number; readonly y: number; readonly scale: number },
 ): void {
+  const { scale } = at;
   const width = block.widthMm * scale;
   const height = block.depthMm * scale;
   if (block.shape === 'round') {
@@ -24,4 +29,8 @@ export function drawCut(
     }
   }
   pdf.lineWidth(0.7).strokeColor(paper.ink).stroke();
+  for (const dowel of dowels) {
+    pdf.circle(at.x + width / 2 + dowel.x * scale, at.y + height / 2 + dowel.y * scale, 1.6);
+    pdf.fill(paper.berry);
+  }
 }

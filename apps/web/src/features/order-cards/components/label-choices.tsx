@@ -80,7 +80,13 @@ export function LabelChoices({ number, labels }: Props) {
         </Select>
       )}
       <div className="flex flex-wrap gap-x-6 gap-y-4">
-        <NumberField label="Copies" value={copies} onValue={setCopies} error={copiesError} />
+        <NumberField
+          label="Copies"
+          hint="One for each box."
+          value={copies}
+          onValue={setCopies}
+          error={copiesError}
+        />
         <NumberField
           key={label}
           label="On the scale"
