@@ -94,10 +94,21 @@ function Line({
       <span className="min-w-0">
         {line.name}
         {line.formula && <span className="text-sm text-slate"> (its own formula)</span>}
+        {isFar(line) && (
+          <span className="text-sm whitespace-nowrap text-slate">
+            {' '}
+            ({grams(line.exactG)} exactly)
+          </span>
+        )}
       </span>
       <span className="text-sm text-slate tabular-nums empty:hidden max-sm:col-start-2 print:col-start-auto">
         {beside}
       </span>
     </li>
   );
+}
+
+/** Where rounding moved a line by a percent or more (whole eggs, mostly). */
+function isFar({ exactG, driftG }: KitchenLine): boolean {
+  return Math.abs(driftG) >= exactG / 100;
 }

@@ -10,13 +10,16 @@ export function MarginLine({ number, locale }: Props) {
   if (data === undefined || data.marginPpm === null) return null;
   const money = (minor: number) => formatMoney(minor, data.currency, locale);
   const least = data.unknown.length > 0;
-  return (
+  const cost = `costs ${least ? 'at least ' : ''}${money(data.totalMinor)} to make`;
+  const aim = `you aim for ${shareText(data.targetMarginPpm, locale)}`;
+  return data.marginMinor < 0 ? (
+    <p className="text-sm">
+      For you: {cost} and <strong>loses {money(-data.marginMinor)}</strong>; {aim}.
+    </p>
+  ) : (
     <p className="text-sm text-slate">
-      For you: costs {least ? 'at least ' : ''}
-      {money(data.totalMinor)} to make,{' '}
-      {data.marginMinor < 0 ? 'and loses ' : least ? 'leaves at most ' : 'leaves '}
-      {money(Math.abs(data.marginMinor))} ({shareText(data.marginPpm, locale)}; you aim for{' '}
-      {shareText(data.targetMarginPpm, locale)}).
+      For you: {cost} and leaves {least ? 'at most ' : ''}
+      {money(data.marginMinor)}, {shareText(data.marginPpm, locale)}; {aim}.
     </p>
   );
 }
