@@ -4,6 +4,7 @@ import { explodeFormula } from '../formulas/explode-formula.ts';
 import { FormulaFault } from '../formulas/formula-problem.ts';
 import { versionName, type PantryIndex } from '../formulas/pantry-index.ts';
 import { scaleFormula, type ScaledFormula } from '../formulas/scale-formula.ts';
+import { mixedG } from '../formulas/totals.ts';
 import { partWeights, type WeighedPart } from '../part-weights.ts';
 import { isPiped, timesOf } from '../piped.ts';
 import type { ResolvedDesign } from '../resolve-design.ts';
@@ -139,7 +140,7 @@ function formulaNeed(
   mixers: readonly Mixer[],
 ): FormulaNeed {
   const scaled = scaleFormula(version, index, { toG: outG });
-  const mixG = version.bakeLossPpm > 0 ? scaled.exactInG : outG;
+  const mixG = mixedG(version, outG);
   return {
     version,
     name: versionName(index, version),

@@ -4,6 +4,7 @@ import type { Formula, FormulaVersion } from '#shared/contracts/pantry.ts';
 import { bowlsFor, coolingMinutes } from '#shared/kitchen/formulas/bowls.ts';
 import { percentsOf } from '#shared/kitchen/formulas/percents.ts';
 import { type ScaledFormula, scaleFormula } from '#shared/kitchen/formulas/scale-formula.ts';
+import { mixedG } from '#shared/kitchen/formulas/totals.ts';
 import { formatWeight } from '#shared/kitchen/measures.ts';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { ChipChoice } from '#web/components/ui/chips.tsx';
@@ -58,7 +59,7 @@ export function FormulaBench({ formula, version, shelf, menu, makeG }: Props) {
   const whole = made.ok ? made.scaled : null;
   const bowls =
     whole !== null && pantry.mixers.some((it) => it.capacityG > 0) && usesMixer(version)
-      ? bowlsFor(whole.exactInG, pantry.mixers)
+      ? bowlsFor(mixedG(version, whole.exactOutG), pantry.mixers)
       : null;
   const several = bowls !== null && bowls.bowls > 1;
   const scaled =
