@@ -1,5 +1,5 @@
 import { readdirSync } from 'node:fs';
-import { readFile, readdir, writeFile } from 'node:fs/promises';
+import { copyFile, mkdir, readFile, readdir, writeFile } from 'node:fs/promises';
 import path from 'node:path';
 import { promisify } from 'node:util';
 import { brotliCompress, constants, gzip } from 'node:zlib';
@@ -68,12 +68,14 @@ function printedFonts(): Plugin {
   const folder = path.join(apiSource, 'modules/cards/pdf/fonts');
   return {
     name: 'tierwell:printed-fonts',
-    async buildStart() {
+    apply: 'build',
+    async writeBundle(options) {
+      const target = path.join(options.dir ?? 'dist/server', 'fonts');
+      await mkdir(target, { recursive: true });
       const names = (await readdir(folder)).filter((name) => name.endsWith('.ttf'));
-      for (const name of names) {
-        const source = await readFile(path.join(folder, name));
-        this.emitFile({ type: 'asset', fileName: `fonts/${name}`, source });
-      }
+      await Promise.all(
+        names.map((name) => copyFile(path.join(folder, name), path.join(target, name))),
+      );
     },
   };
 }
