@@ -26,6 +26,15 @@ describe('what was chosen, for reading over', () => {
     );
   });
 
+  it('names what is cut in the kitchen, each kind with its number', () => {
+    const half = { sizeId: 'half', count: 2, layers: 2, spongeId: 'vanilla', fillingId: null };
+    const design = designWith({ cake: { cuttingCakes: [half, { ...half, count: 1, layers: 1 }] } });
+    expect(valueOf(chosenRows(design, menuFixture), 'In the kitchen')).toBe(
+      '2 × Half sheet, 13 x 18 in, to cut: Vanilla, two layers; Half sheet, 13 x 18 in, to cut: Vanilla, one layer',
+    );
+    expect(valueOf(chosenRows(designWith({}), menuFixture), 'In the kitchen')).toBeUndefined();
+  });
+
   it('spells the words as they will be piped, with their tier', () => {
     const design = designWith({
       cake: { tiers: [roundTier(10), roundTier(8), roundTier(6)] },

@@ -1,19 +1,10 @@
-import type { Coating, CuttingCake, Design, Look } from '#shared/contracts/design.ts';
+import type { Coating, Design, Look } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { colourPicks } from './colour.ts';
-import { capitalise, countOf } from './sentences.ts';
+import { cutWords, insideWords, sheetInside } from './inside-words.ts';
+import { capitalise } from './sentences.ts';
 import { tierName } from './tier-name.ts';
-
-/** "Dark cocoa, filled with raspberry jam". Parts gone from the menu are called by their id. */
-export function insideWords(
-  { spongeId, fillingId }: { readonly spongeId: string | null; readonly fillingId: string | null },
-  menu: Menu,
-): string {
-  const sponge = menu.sponges.find((it) => it.id === spongeId)?.name ?? spongeId ?? '';
-  const filling = menu.fillings.find((it) => it.id === fillingId)?.name ?? fillingId;
-  return filling === null ? sponge : `${sponge}, filled with ${filling.toLowerCase()}`;
-}
 
 /** "American buttercream, textured, tinted shell pink (#f5d3cf)"; empty without a coat. */
 export function coatWords(coat: Coating | null, menu: Menu): string {
@@ -103,19 +94,6 @@ export function chosenRows({ cake, look, extras }: Design, menu: Menu): ChosenRo
     },
   ];
   return rows.filter((it) => it.value !== '');
-}
-
-function sheetInside(sheet: NonNullable<Design['cake']>['sheet'], menu: Menu): string {
-  return sheet === null
-    ? ''
-    : `${insideWords(sheet, menu)}, ${countOf(sheet.layers, 'layer').toLowerCase()}`;
-}
-
-/** "2 × Half sheet, 13 × 18 in, to cut: vanilla, filled with raspberry jam, two layers". */
-export function cutWords(cut: CuttingCake, menu: Menu): string {
-  const name = menu.sheetSizes.find((it) => it.id === cut.sizeId)?.name ?? cut.sizeId;
-  const times = cut.count === 1 ? '' : `${cut.count} × `;
-  return `${times}${name}, to cut: ${sheetInside(cut, menu)}`;
 }
 
 /** One value where all are alike; else each with its tier's name. */

@@ -1,7 +1,7 @@
 import type { Cake, Coating, Look, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
-import { cutWords } from '#shared/kitchen/chosen-words.ts';
+import { cutWords } from '#shared/kitchen/inside-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { countOf } from '#shared/kitchen/sentences.ts';
 

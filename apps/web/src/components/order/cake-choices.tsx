@@ -1,6 +1,7 @@
 import type { Cake, Look, Tier } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import { coatWords, cutWords, decorationWords, insideWords } from '#shared/kitchen/chosen-words.ts';
+import { coatWords, decorationWords } from '#shared/kitchen/chosen-words.ts';
+import { cutWords, insideWords } from '#shared/kitchen/inside-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { plainCoatOf } from '#shared/kitchen/resolve-design.ts';
 import { capitalise, countOf } from '#shared/kitchen/sentences.ts';

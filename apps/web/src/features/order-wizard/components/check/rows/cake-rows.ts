@@ -1,5 +1,5 @@
 import type { Menu } from '#shared/contracts/menu.ts';
-import { cutWords } from '#shared/kitchen/chosen-words.ts';
+import { cutWords } from '#shared/kitchen/inside-words.ts';
 import { formatLength } from '#shared/kitchen/measures.ts';
 import { countOf } from '#shared/kitchen/sentences.ts';
 import { summariseCake } from '#shared/kitchen/summarise-design.ts';
