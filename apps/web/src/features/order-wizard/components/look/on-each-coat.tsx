@@ -1,3 +1,4 @@
+import { useRef } from 'react';
 import type { Coating } from '#shared/contracts/design.ts';
 import { coatBases, tryOnCoats, type TriedColour } from '#shared/kitchen/coat-bases.ts';
 import { isDeepColour } from '#shared/kitchen/deep-colour.ts';
@@ -25,6 +26,7 @@ type Props = {
 /** What a chosen colour comes out as: on the coat it is for, and on each other one. */
 export function OnEachCoat({ coating, name, onCoat }: Props) {
   const { menu, running } = useWizard();
+  const panel = useRef<HTMLDivElement>(null);
   const { colour } = coating;
   const bases = coatBases(menu, coating.style);
   const isOurs = ({ base }: TriedColour) =>
@@ -72,12 +74,14 @@ export function OnEachCoat({ coating, name, onCoat }: Props) {
           <Button
             kind="secondary"
             className="col-start-2 justify-self-start sm:col-start-3"
-            onClick={() =>
+            onClick={() => {
               onCoat(
                 coatOf({ covering: base.covering, style: base.style }, coating, menu),
                 `${base.name} it is.`,
-              )
-            }
+              );
+              // The button goes with the coat it offered; the focus stays with the color.
+              panel.current?.focus({ preventScroll: true });
+            }}
           >
             Change to it<VisuallyHidden>: {base.name}</VisuallyHidden>
           </Button>
@@ -87,7 +91,7 @@ export function OnEachCoat({ coating, name, onCoat }: Props) {
   };
 
   return (
-    <div className="grid gap-3 border-l-2 border-cobalt pl-4">
+    <div ref={panel} tabIndex={-1} className="grid gap-3 border-l-2 border-cobalt pl-4">
       <div role="status" className="grid gap-3">
         <p className="flex flex-wrap items-center gap-x-3 gap-y-1">
           <strong className="font-display">
