@@ -16,7 +16,7 @@ export function EggDays({ days, locale }: Props) {
           className="grid gap-x-8 gap-y-2 border-b border-seam px-5 py-4 break-inside-avoid last:border-b-0 sm:grid-cols-[13rem_minmax(0,1fr)] sm:px-7 print:grid-cols-[12rem_minmax(0,1fr)] print:px-0 print:py-2"
         >
           <div className="grid content-start gap-0.5">
-            <h3>{formatDay(day.date, { locale })}</h3>
+            <h2 className="text-lg">{formatDay(day.date, { locale })}</h2>
             {day.crack === 0 ? (
               <p className="text-slate">Crack none: what is left does.</p>
             ) : (

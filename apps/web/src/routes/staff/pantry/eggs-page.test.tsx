@@ -107,7 +107,7 @@ describe('the plan of eggs', () => {
   it('says what to crack on which day, what is left and what it could become', async () => {
     open();
     const days = await screen.findByRole('region', { name: 'Eggs to crack' });
-    const [first, second] = within(days).getAllByRole('heading', { level: 3 });
+    const [first, second] = within(days).getAllByRole('heading', { level: 2 });
     expect(first).toHaveTextContent('Monday 7 June');
     expect(within(days).getByText('6 go in whole, 14 separated.')).toBeVisible();
     expect(second).toHaveTextContent('Wednesday 9 June');
