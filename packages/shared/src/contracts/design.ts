@@ -213,7 +213,7 @@ export const words = z.object({
 });
 
 export const look = z.object({
-  palette: z.array(colourHex).check(z.maxLength(5, 'At most five colours.')),
+  palette: z.array(colourHex).check(z.maxLength(5, 'At most five colors.')),
   words: z.array(words).check(z.maxLength(6)),
   decorations: z.array(placedDecoration).check(z.maxLength(40, 'At most 40 decorations.')),
   note: prose(2000),

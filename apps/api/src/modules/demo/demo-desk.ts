@@ -83,7 +83,7 @@ async function sendPicture(
   const { photo, claimKey } = await withFile(deps, drawing, (file) =>
     keepPhoto(deps, { file, kind: 'inspiration', note: '', actor: visitor, order: null }),
   );
-  const note = index === 0 ? 'The feeling of this one' : 'And colours like these';
+  const note = index === 0 ? 'The feeling of this one' : 'And colors like these';
   return { id: photo.id, claimKey: claimKey ?? '', note };
 }
 
