@@ -344,7 +344,10 @@ const table: Readonly<Record<string, Line>> = {
   'archive-formula': line(bakers, () => post('/api/pantry/formulas/raspberry-jam/archive')),
   'restore-formula': line(bakers, () => post('/api/pantry/formulas/raspberry-jam/restore')),
   'create-ingredient': line(bakers, () =>
-    post('/api/pantry/ingredients', { basedOn: null, draft: plums }),
+    post('/api/pantry/ingredients', {
+      basedOn: null,
+      draft: { ...plums, name: `Plums ${newId()}` },
+    }),
   ),
   'save-ingredient': line(bakers, () =>
     put('/api/pantry/ingredients/raspberries', { basedOn: null, draft: plums }),

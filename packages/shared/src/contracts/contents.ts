@@ -39,6 +39,8 @@ export const staffContentChange = z.object({
   clashes: z.array(z.string()),
   /** When the customer's mail goes out unless the change is put right first; null without address. */
   mailAt: z.nullable(instant),
+  /** It was to go out by now and has not arrived: staff tell the customer themselves. */
+  mailLate: z._default(z.boolean(), false),
   acknowledged: z.nullable(z.object({ by: z.string(), at: instant, note: z.string() })),
   /** How the customer came to know; null while they do not. */
   told: z.nullable(z.object({ by: z.string(), at: instant, how: z.string() })),

@@ -1,4 +1,5 @@
 import { Consent } from '#api/db/models/consent.ts';
+import { ContentChange } from '#api/db/models/content-change.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import { Identity } from '#api/db/models/identity.ts';
 import { ItemTier } from '#api/db/models/item-tier.ts';
@@ -98,6 +99,10 @@ async function exportRevision(
     order: [['position', 'ASC']],
   });
   const items = await OrderItem.findAll({ where: { revisionId: revision.id } });
+  const changes = await ContentChange.findAll({
+    where: { revisionId: revision.id },
+    order: [['n', 'ASC']],
+  });
   const tiers = await ItemTier.findAll({ where: { itemId: items.map(({ id }) => id) } });
   return {
     allergies: allergies.map(({ allergen, freeText, severity, guests, answer }) => ({
@@ -108,8 +113,12 @@ async function exportRevision(
       answer,
     })),
     words: tiers.flatMap(({ words }) => (words === null ? [] : [words])),
-    notes: [revision.note, revision.dietNote, ...items.map(({ note }) => note)].filter(
-      (note) => note !== '',
-    ),
+    notes: [
+      revision.note,
+      revision.dietNote,
+      ...items.map(({ note }) => note),
+      // What staff wrote about a change of what is in the cake, and how the customer was told.
+      ...changes.flatMap(({ acknowledgedNote, toldHow }) => [acknowledgedNote, toldHow]),
+    ].filter((note) => note !== ''),
   };
 }

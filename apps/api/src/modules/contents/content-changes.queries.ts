@@ -8,6 +8,7 @@ import type { Advice, Estimate } from '#shared/contracts/estimates.ts';
 import type { LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { contentDifferences } from '#shared/kitchen/content-differences.ts';
 import { isAboutContents, newAdvice, withContents } from '#shared/kitchen/order-contents.ts';
+import { currentClock } from '#api/db/current-database.ts';
 import { ContentChange } from '#api/db/models/content-change.ts';
 import { FormulaVersion } from '#api/db/models/formula-version.ts';
 import { Formula } from '#api/db/models/formula.ts';
@@ -86,6 +87,9 @@ export async function contentChangeViews(revision: OrderRevision): Promise<Conte
   }));
 }
 
+/** How long a mail that is due may take before staff are asked to tell the customer themselves. */
+const patienceMs = 15 * 60_000;
+
 /** The changes as staff read them, with who did and knows what. */
 export async function staffContentChanges(revision: OrderRevision): Promise<StaffContentChange[]> {
   const changes = await changesOf([revision.id]);
@@ -115,6 +119,7 @@ export async function staffContentChanges(revision: OrderRevision): Promise<Staf
           )
         : [],
       mailAt: hasAddress ? change.mailAt.toISOString() : null,
+      mailLate: change.mailAt.getTime() + patienceMs < currentClock().now().getTime(),
       acknowledged:
         acknowledgedAt === null
           ? null

@@ -80,7 +80,7 @@ export function cakePartsOf(
         id: row.id,
         name: row.name,
         blurb: row.blurb,
-        colour: row.colourHex,
+        colour: version.baseColour ?? row.colourHex,
         contents,
         densityGPerMl: version.densityGPerMl,
         bakeLossPpm: version.bakeLossPpm,
@@ -94,7 +94,7 @@ export function cakePartsOf(
         id: row.id,
         name: row.name,
         blurb: row.blurb,
-        colour: row.colourHex,
+        colour: version.baseColour ?? row.colourHex,
         contents,
         densityGPerMl: version.densityGPerMl,
         thicknessMm: row.thicknessUm / 1000,
@@ -151,7 +151,7 @@ export function cakePartsOf(
       id: row.id,
       name: row.name,
       blurb: row.blurb,
-      colour: row.colourHex,
+      colour: formula?.version.baseColour ?? row.colourHex,
       // Where there is no formula of its own, the buttercream decides: the steadiest one is the bound.
       holdsToC:
         row.holdsToC ??

@@ -1,4 +1,9 @@
-import type { Formula, FormulaVersion, Ingredient } from '#shared/contracts/pantry.ts';
+import type {
+  Formula,
+  FormulaVersion,
+  Ingredient,
+  IngredientDraft,
+} from '#shared/contracts/pantry.ts';
 import { invalidField, notFound } from '#api/platform/app-error.ts';
 import type { WholePantry } from './load-pantry.queries.ts';
 
@@ -25,9 +30,26 @@ export function ingredientIn(pantry: WholePantry, id: string): Ingredient {
 
 /** Two formulas of one name could not be told apart at the bench. @throws `invalid-input` */
 export function refuseTakenName({ formulas }: WholePantry, name: string, own?: string): void {
-  const plain = (words: string) => words.trim().toLowerCase();
   const taken = formulas.some(
     (it) => it.id !== own && it.archivedAt === null && plain(it.name) === plain(name),
   );
   if (taken) throw invalidField(['name'], 'Another formula has this name already.');
 }
+
+/** Nor two products of one name and maker on the shelf. @throws `invalid-input` */
+export function refuseTakenProduct(
+  { ingredients }: WholePantry,
+  { name, brand }: Pick<IngredientDraft, 'name' | 'brand'>,
+  own?: string,
+): void {
+  const taken = ingredients.some(
+    (it) =>
+      it.id !== own &&
+      it.archivedAt === null &&
+      plain(it.name) === plain(name) &&
+      plain(it.brand ?? '') === plain(brand ?? ''),
+  );
+  if (taken) throw invalidField(['draft', 'name'], 'This one is on the shelf already.');
+}
+
+const plain = (words: string): string => words.trim().toLowerCase();

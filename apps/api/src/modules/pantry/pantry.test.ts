@@ -377,6 +377,16 @@ describe('an ingredient', () => {
     expect(problem.parse(loser.body).facts).toMatchObject({ current: { id: ingredient.id } });
   });
 
+  it('is on the shelf once: a second of its name is another maker’s', async () => {
+    const twice = async (changes: Partial<IngredientDraft>) =>
+      baker.post('/api/pantry/ingredients', { basedOn: null, draft: ingredientDraftOf(changes) });
+    const named = { name: 'fine SEA salt', labelName: 'salt' };
+    expect(issuesOf(await twice({ ...named, brand: 'Fenwick' }))).toEqual([
+      'draft.name: This one is on the shelf already.',
+    ]);
+    expect((await twice({ ...named, brand: 'Grey Dunes' })).status).toBe(201);
+  });
+
   it('cannot say what no label says', async () => {
     const issues = async (changes: Partial<IngredientDraft>) =>
       issuesOf(

@@ -14,7 +14,7 @@ import type { Staff } from '#api/platform/actor.ts';
 import { AppError } from '#api/platform/app-error.ts';
 import { newId } from '#api/platform/ids.ts';
 import { refuseImpossibleLabel } from './check-label.ts';
-import { ingredientIn } from './find-in-pantry.ts';
+import { ingredientIn, refuseTakenProduct } from './find-in-pantry.ts';
 import { currentPantry } from './load-pantry.queries.ts';
 import { isSameIngredient, isSameLabel } from './same-draft.ts';
 import { mgOf } from './write-version.ts';
@@ -26,6 +26,7 @@ export async function createIngredient(
   { draft }: SaveIngredient,
 ): Promise<SavedIngredient> {
   return inTransaction(async () => {
+    refuseTakenProduct(await currentPantry(), draft);
     refuseImpossibleLabel(draft, await localToday(clock.now()));
     const { id } = await Ingredient.create({ id: newId(), ...columnsOf(draft) });
     await writeLabel(id, draft);
@@ -52,13 +53,15 @@ export async function saveIngredient(
 ): Promise<SavedIngredient> {
   return inTransaction(async () => {
     const now = clock.now();
-    const current = ingredientIn(await currentPantry(), id);
+    const pantry = await currentPantry();
+    const current = ingredientIn(pantry, id);
     if (basedOn === null || !isSameIngredient(basedOn, current)) {
       throw new AppError('changed-meanwhile', {
         detail: `Somebody has changed ${current.name} meanwhile.`,
         facts: { current },
       });
     }
+    refuseTakenProduct(pantry, draft, id);
     refuseImpossibleLabel(draft, await localToday(now));
     if (isSameIngredient(draft, current)) return { ingredient: current, touched: [] };
     const label = !isSameLabel(draft, current);

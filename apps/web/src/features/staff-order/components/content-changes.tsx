@@ -63,10 +63,7 @@ function Change({ order, change, studio }: ChangeProps) {
         <>
           <p>
             <strong>The customer does not know yet:</strong> until then it is neither marked ready
-            nor handed over.{' '}
-            {change.mailAt === null
-              ? 'There is no e-mail address, so tell them yourselves.'
-              : `Our e-mail goes out ${when(change.mailAt)}, unless it is put right in the pantry first.`}
+            nor handed over. {mailWords(change, when)}
           </p>
           {order.can.tellContents && <TellContents order={order} change={change} />}
         </>
@@ -86,4 +83,13 @@ function Change({ order, change, studio }: ChangeProps) {
       )}
     </Notice>
   );
+}
+
+function mailWords(
+  { mailAt, mailLate }: StaffContentChange,
+  when: (instant: string) => string,
+): string {
+  if (mailAt === null) return 'There is no e-mail address, so tell them yourselves.';
+  if (mailLate) return 'Our e-mail has not arrived (see E-mails below), so tell them yourselves.';
+  return `Our e-mail goes out ${when(mailAt)}, unless it is put right in the pantry first.`;
 }

@@ -30,6 +30,7 @@ const soyChange = {
   by: 'Noor Haddad',
   clashes: ['Contains soy: Vanilla sponge. Declared: allergy, 1 guest.'],
   mailAt: '2027-06-01T14:10:00.000Z',
+  mailLate: false,
   acknowledged: null,
   told: null,
 };
