@@ -39,6 +39,7 @@ import { PropertyFields } from './property-fields.tsx';
 import { StepFields } from './step-fields.tsx';
 import { onTheForm, typedFormula } from './typed-formula.ts';
 import { useFormulaEditor } from './use-formula-editor.ts';
+import { useSteadyProblems } from './use-steady-problems.ts';
 
 type Props = {
   /** The formula whose next version is written; null for a new one. */
@@ -66,7 +67,10 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
   const [inOrders, setInOrders] = useState(false);
   const lead = house.temperatureLead;
 
-  const problems = [...liveProblems(inspected.problems, form, attempt > 0), ...refused];
+  const problems = useSteadyProblems([
+    ...liveProblems(inspected.problems, form, attempt > 0),
+    ...refused,
+  ]);
 
   const onSaved = ({ formula, version, carried, touched }: SavedFormula) => {
     draft.clear();

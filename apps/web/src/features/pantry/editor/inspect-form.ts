@@ -1,6 +1,7 @@
 import * as z from 'zod/mini';
 import {
   type FormulaDraft,
+  type FormulaLine,
   type FormulaVersion,
   createFormula,
   formulaDraft,
@@ -31,6 +32,8 @@ type Ground = {
 
 /** Everything that follows from what is typed. */
 export type Inspected = {
+  /** The lines that could be read. */
+  readonly lines: readonly FormulaLine[];
   /** Of the lines that could be read. */
   readonly seen: EvaluatedFormula;
   /** Each row's percent of what goes in, by the row's key. */
@@ -85,6 +88,7 @@ export function inspectForm(form: EditorForm, ground: Ground): Inspected {
   ]);
   const draft = problems.length === 0 && checked.ok ? checked.value : null;
   return {
+    lines: typed.lines,
     seen,
     shares: byKey(
       typed.keys,

@@ -7,7 +7,6 @@ import type { KeptFormula, Shelf } from '../shelf.ts';
 import { editorReducer } from './editor-actions.ts';
 import { editorForm, emptyForm, formOfVersion } from './editor-form.ts';
 import { inspectForm } from './inspect-form.ts';
-import { typedFormula } from './typed-formula.ts';
 
 type Options = {
   /** Null for a new formula. */
@@ -51,10 +50,7 @@ export function useFormulaEditor({ kept, from, shelf, house }: Options) {
       }),
     [typed, shelf, kept, base, from, percentOf, house],
   );
-  const choices = useMemo(
-    () => percentChoices({ lines: [...typedFormula(typed, shelf.index, lead).lines] }, shelf.index),
-    [typed, shelf, lead],
-  );
+  const choices = useMemo(() => percentChoices(inspected, shelf.index), [inspected, shelf]);
 
   const unsaved = form !== start;
   const draft = useKeptDraft({

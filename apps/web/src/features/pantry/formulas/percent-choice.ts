@@ -1,11 +1,11 @@
-import type { FormulaDraft } from '#shared/contracts/pantry.ts';
+import type { FormulaLine } from '#shared/contracts/pantry.ts';
 import { type PantryIndex, resolvePart } from '#shared/kitchen/formulas/pantry-index.ts';
 import type { PercentBase } from '#shared/kitchen/formulas/percents.ts';
 
 /** `flour`, `butter` or `line-3`: what a percent view is a percentage of, as a list's value. */
 export type PercentChoice = string;
 
-type Lines = Pick<FormulaDraft, 'lines'>;
+type Lines = { readonly lines: readonly FormulaLine[] };
 
 /** What lines can be a percentage of; flour and butter only where there is some. */
 export function percentChoices(
