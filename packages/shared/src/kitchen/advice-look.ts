@@ -317,7 +317,7 @@ function deepColourAdvice({ design, tiers, decorations }: ResolvedDesign): Noted
       step: 'look',
       about: 'deep-colour',
       sentence:
-        'Deep colours stain lips, fingers and cloth, and may bleed into paler ones overnight.',
+        'Deep colors stain lips, fingers and cloth, and may bleed into paler ones overnight.',
       instead: 'A paler tint, or the deep one in small touches, behaves better.',
     }),
   ];
