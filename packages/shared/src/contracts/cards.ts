@@ -128,7 +128,6 @@ export const confirmUnknown = z.object({
   /** What the owner saw, word for word; anything else is asked again. */
   sentences: z.array(z.string().check(z.maxLength(2000))).check(z.maxLength(200)),
 });
-export type ConfirmUnknown = z.infer<typeof confirmUnknown>;
 
 /** One part of the cake with what it is made of. */
 export const carePart = z.object({

@@ -1,9 +1,7 @@
+import type { LabelSegment } from '#shared/contracts/cards.ts';
 import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import type { AllergenId } from '#shared/contracts/vocabulary.ts';
 import { speciesName } from '../allergen-names.ts';
-
-/** A stretch of a label; where a law wants allergens to stand out, those do. */
-export type LabelSegment = { readonly text: string; readonly emphasised: boolean };
 
 /**
  * How an allergen may be named inside an ingredient's own words. A word that only sounds like one

@@ -1,8 +1,9 @@
+import type { LabelSegment } from '#shared/contracts/cards.ts';
 import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import type { LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { allergenName } from '../allergen-names.ts';
 import { capitalise } from '../sentences.ts';
-import { emphasise, joinSegments, plain, type LabelSegment } from './allergen-words.ts';
+import { emphasise, joinSegments, plain } from './allergen-words.ts';
 import type { WeighedIngredient } from './weigh-ingredients.ts';
 
 /** Ingredients of so little may stand last together, 21 CFR 101.4(a)(2): two percent by weight. */
