@@ -112,7 +112,13 @@ describe('going on', () => {
 
   it('applies advice in one press and takes it back in another', async () => {
     const values = answered();
-    values.setting = { place: 'shade', warmestC: 27, minutesOut: 60, driveMinutes: 20 };
+    values.setting = {
+      place: 'shade',
+      warmestC: 27,
+      minutesOut: 60,
+      driveMinutes: 20,
+      servedAt: null,
+    };
     bench.keepDraft(values);
     const { user } = bench.open('/order/setting');
     const panel = await screen.findByRole('region', { name: 'Your cake so far' });
