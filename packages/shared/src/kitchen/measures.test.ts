@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import {
   celsiusToFahrenheit,
   fahrenheitToCelsius,
+  benchCelsius,
   formatBenchTemperature,
   formatLength,
   formatTemperature,
@@ -66,14 +67,19 @@ describe('what people read', () => {
     expect(formatTemperature(23, 'F')).toBe('73 °F / 23 °C');
   });
 
-  // Common practice, no source: the bench takes 240 °F as 115 °C and 160 °F as 71 °C.
+  // Common practice, no source: the bench takes 240 °F as 115 °C, 200 °F as 93 °C and 160 °F as
+  // 71 °C; 80 °F as 27 °C is memory. Every other mark is by arithmetic.
   it.each([
     [115, '240 °F / 115 °C'],
     [71, '160 °F / 71 °C'],
     [4, '40 °F / 4 °C'],
-    [93, '199 °F / 93 °C'],
+    [93, '200 °F / 93 °C'],
+    [27, '80 °F / 27 °C'],
+    [100, '212 °F / 100 °C'],
   ])('gives the bench %i °C as %s', (celsius, text) => {
     expect(formatBenchTemperature(celsius, 'F')).toBe(text);
+    // What is typed back by its °F is the same mark again.
+    expect(benchCelsius(Number(text.split(' ')[0]))).toBeCloseTo(celsius, 6);
   });
 
   it('writes weights in both systems', () => {

@@ -56,6 +56,7 @@ const benchPairs: readonly (readonly [celsius: number, fahrenheit: number])[] = 
   [4, 40],
   [27, 80],
   [71, 160],
+  [93, 200],
   [115, 240],
 ];
 

@@ -179,7 +179,7 @@ export function FormulaEditor({ kept, from, shelf, house }: Props) {
         <FormErrorSummary problems={attempt > 0 ? problems : []} attempt={attempt} />
         {failure !== null && <Failure error={failure} />}
         <Rim label="The formula" className="grid gap-10 p-4 sm:p-7">
-          <div className="grid gap-4 sm:grid-cols-[minmax(0,1fr)_14rem]">
+          <div className="grid items-start gap-4 sm:grid-cols-[minmax(0,1fr)_14rem]">
             <TextField
               label="Name"
               name="name"
