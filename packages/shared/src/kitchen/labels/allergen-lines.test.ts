@@ -38,6 +38,11 @@ describe('the Contains line', () => {
     expect(linesOf([entry('tree-nuts', ['coconut'])], 'US').contains).toBeNull();
   });
 
+  it('names what lies against the cake and is taken off before eating', () => {
+    const lines = allergenLines(weighed([milk]), quiet, 'US', [], [egg]);
+    expect(lines.contains).toBe('Contains: Milk, Egg.');
+  });
+
   it('is not printed in the EU and the UK, where the list says it', () => {
     for (const region of ['EU', 'UK'] as const) {
       expect(linesOf([milk], region)).toMatchObject({

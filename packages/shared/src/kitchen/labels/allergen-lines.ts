@@ -93,15 +93,20 @@ function isUnknown(
   );
 }
 
-/** The lines, for ingredients and the kitchen they were worked in. */
+/**
+ * The lines, for ingredients and the kitchen they were worked in. `touching` is what is not eaten
+ * and lies against what is; the Contains line names it too.
+ */
 export function allergenLines(
   ingredients: readonly WeighedIngredient[],
   kitchen: KitchenWord,
   region: LabelRegion,
   declared: readonly AllergenId[],
+  touching: readonly AllergenEntry[] = [],
 ): AllergenLines {
   const all = mergeAllergens(ingredients.map((it) => it.allergens));
   const contained = all.filter((it) => it.state === 'contains');
+  const named = mergeAllergens([contained, touching.filter((it) => it.state === 'contains')]);
   const major = (entries: readonly AllergenEntry[]) =>
     entries.filter((it) => isMajorAllergen(it, region));
   const handled = major(beyond(mergeAllergens([kitchen.handles]), contained));
@@ -116,8 +121,8 @@ export function allergenLines(
   const isIn = contained.length > 0;
   return {
     contains:
-      region === 'US' && major(contained).length > 0
-        ? `Contains: ${sourcesOf(contained).map(title).join(', ')}.`
+      region === 'US' && major(named).length > 0
+        ? `Contains: ${sourcesOf(named).map(title).join(', ')}.`
         : null,
     signpost: region !== 'US' && isIn ? 'For allergens, see the ingredients in bold.' : null,
     notKnown: notKnownOf(ingredients, region, declared),

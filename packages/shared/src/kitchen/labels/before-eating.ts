@@ -1,5 +1,7 @@
 import type { Decoration } from '#shared/contracts/menu.ts';
+import type { AllergenState, LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
+import { allergenLabel } from '../allergen-names.ts';
 import type { Part } from '../parts.ts';
 import { timesOf } from '../piped.ts';
 import type { ResolvedDesign } from '../resolve-design.ts';
@@ -31,9 +33,22 @@ export function toRemove(resolved: ResolvedDesign): string[] {
     ...inedible(resolved).map(({ decoration, times }) => {
       const many = decoration.per === 'piece' && times > 1 ? `${times} × ` : '';
       const stems = onStems.includes(decoration.glyph) ? ', with any wires, picks and stems' : '';
-      return `${many}${decoration.name}: not for eating. Take off first${stems}.`;
+      const made = madeWith(decoration, resolved.menu.studio.labelRegion);
+      return `${many}${decoration.name}: not for eating. Take off first${stems}.${made}`;
     }),
   ];
+}
+
+/** What is not eaten touches what is: its allergens are told all the same. */
+function madeWith({ contents }: Decoration, region: LabelRegion): string {
+  const named = (state: AllergenState) =>
+    contents.allergens.filter((it) => it.state === state).map((it) => allergenLabel(it, region));
+  const contained = named('contains');
+  const unknown = named('unknown');
+  return [
+    contained.length === 0 ? '' : ` Made with ${formatList(contained)}.`,
+    unknown.length === 0 ? '' : ` Not known: whether ${formatList(unknown)} is in it.`,
+  ].join('');
 }
 
 /** Decorations that are not for eating, each kind once with how many there are. */

@@ -182,6 +182,26 @@ describe('the label of an order', () => {
     expect(labels[0]?.useBy).toBeNull();
   });
 
+  it('tells what a flower that comes off is made with', () => {
+    const flower = {
+      decorationId: 'sugar-flower',
+      tier: 0,
+      quantity: 3,
+      colour: null,
+      source: 'studio' as const,
+    };
+    const look = {
+      palette: [],
+      words: [],
+      note: '',
+      decorations: [flower, { ...flower, tier: 1 }],
+    };
+    const [label] = labelsOf(input({ ...twoTiers, look })).labels;
+    expect(label?.remove).toContain(
+      '6 × Sugar flower: not for eating. Take off first, with any wires, picks and stems. Made with egg.',
+    );
+  });
+
   it('has nothing to print where there is no cake', () => {
     const { labels, reasons } = labelsOf(input({ ...twoTiers, cake: null }));
     expect(labels).toEqual([]);

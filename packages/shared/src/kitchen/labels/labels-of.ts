@@ -1,4 +1,5 @@
 import type { LabelReason, LabelText } from '#shared/contracts/cards.ts';
+import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import type { AllergenId } from '#shared/contracts/vocabulary.ts';
 import { formatDuration, formatList } from '#shared/dates/format.ts';
 import type { LocalDate } from '#shared/dates/local-time.ts';
@@ -125,7 +126,13 @@ function labelOf(
   const netG = weights.reduce((sum, it) => sum + it.eatenG, 0);
   const declared = resolved.design.guests.allergies.flatMap((it) => it.allergen ?? []);
   const kitchen: KitchenWord = { handles: studio.handles, assessed };
-  const { notKnown, ...lines } = allergenLines(ingredients, kitchen, region, declared);
+  const { notKnown, ...lines } = allergenLines(
+    ingredients,
+    kitchen,
+    region,
+    declared,
+    touchingAllergens(group, resolved),
+  );
   const unread = unreadParts(group, input, parts);
   const keeping = weights.flatMap(({ ref }) => input.keepingOf(ref) ?? []);
   const useBy = useByOf(keeping, studio.zone);
@@ -207,6 +214,14 @@ function weightsOf(group: Group, resolved: ResolvedDesign): Weight[] {
     }
   }
   return [...sums.values()];
+}
+
+/** Of decorations that are taken off before eating. */
+function touchingAllergens(group: Group, { decorations }: ResolvedDesign): AllergenEntry[] {
+  if (!group.decorated) return [];
+  return decorations
+    .filter(({ decoration }) => decoration.edge !== 'edible')
+    .flatMap(({ decoration }) => decoration.contents.allergens);
 }
 
 /** The design as far as this label is about it. */
