@@ -135,7 +135,7 @@ export function PriceBookForm({ prices, menu, today, onSaved }: Props) {
             <CostFields />
           </div>
         </div>
-        <aside className="grid gap-8 lg:sticky lg:top-6 lg:max-h-[calc(100dvh-3rem)] lg:overflow-y-auto lg:pb-2">
+        <div className="grid gap-8 lg:sticky lg:top-6 lg:max-h-[calc(100dvh-3rem)] lg:overflow-y-auto lg:pb-2">
           <Rim label="What changes" className="grid gap-4 p-4 sm:p-5">
             <h2>What changes</h2>
             <WhatChanges next={read.success ? read.data : null} today={today} />
@@ -151,7 +151,7 @@ export function PriceBookForm({ prices, menu, today, onSaved }: Props) {
           <Section title="The books so far">
             <VersionList prices={prices} zone={zone} locale={locale} />
           </Section>
-        </aside>
+        </div>
       </form>
     </PriceDraftContext>
   );
