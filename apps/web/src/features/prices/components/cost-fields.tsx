@@ -14,7 +14,7 @@ export function CostFields() {
         For the margin beside each order; customers never see it. Ingredients count at the price of
         their packs, in the pantry.
       </p>
-      <div className="grid gap-5 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))]">
+      <div className="grid gap-5 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end">
         <AmountField
           place="labourPerHourMinor"
           label="An hour at the bench"

@@ -17,7 +17,7 @@ export function DecorationPrices() {
   const money = (minor: number) => formatMoney(minor, currency, menu.studio.locale);
   return (
     <Section title="Decorations and extras">
-      <div className="grid grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] gap-5">
+      <div className="grid grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end gap-5">
         <AmountField
           place="decoratingPerHourMinor"
           label="An hour of decorating sells for"
@@ -62,7 +62,7 @@ export function DecorationPrices() {
         </ul>
       </Fieldset>
       <Fieldset legend="Beside the cake">
-        <div className="grid gap-x-6 gap-y-4 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))]">
+        <div className="grid gap-x-6 gap-y-4 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end">
           {prices.extras.map(({ id, name }) => (
             <AmountField
               key={id}

@@ -36,7 +36,7 @@ export function OrderRules() {
           </>
         )}
       </BandRows>
-      <div className="grid grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] gap-5">
+      <div className="grid grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end gap-5">
         <AmountField
           place="minimumMinor"
           label="No cake is sold for less than"

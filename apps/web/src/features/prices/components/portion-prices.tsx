@@ -41,7 +41,7 @@ export function PortionPrices() {
           </>
         )}
       </BandRows>
-      <div className="grid gap-5 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))]">
+      <div className="grid gap-5 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end">
         <AmountField
           place="sheetPerPortionMinor"
           label="Sheets and cutting cakes, a portion"

@@ -30,7 +30,7 @@ export function Surcharges() {
       <div className="grid gap-8">
         {kinds.map(({ field, things, legend }) => (
           <Fieldset key={field} legend={legend}>
-            <div className="grid gap-x-6 gap-y-4 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))]">
+            <div className="grid gap-x-6 gap-y-4 grid-cols-[repeat(auto-fill,minmax(10rem,1fr))] items-end">
               {prices[things].map(({ id, name }) => (
                 <AmountField
                   key={id}
