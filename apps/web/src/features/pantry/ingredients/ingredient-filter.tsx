@@ -1,7 +1,7 @@
 import { type Ingredient, ingredientFamilies, ingredientFamily } from '#shared/contracts/pantry.ts';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
 import { Select } from '#web/components/ui/select.tsx';
-import { FindField } from '../components/find-field.tsx';
+import { FindField } from '#web/components/ui/find-field.tsx';
 import { gapWeight, gapsOf } from './ingredient-gaps.ts';
 import type { IngredientSearch } from './ingredient-search.ts';
 import { familyWords } from './ingredient-words.ts';

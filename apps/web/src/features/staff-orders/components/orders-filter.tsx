@@ -1,9 +1,9 @@
-import { useEffect, useState } from 'react';
 import type { ListOrdersQuery, OrderList } from '#shared/contracts/staff.ts';
 import { orderStatuses } from '#shared/contracts/vocabulary.ts';
 import { statusWord } from '#web/components/order/status-mark.tsx';
 import { ChipChoices } from '#web/components/ui/chips.tsx';
 import { Checkbox } from '#web/components/ui/checkbox.tsx';
+import { FindField } from '#web/components/ui/find-field.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
 
 type Props = {
@@ -11,9 +11,6 @@ type Props = {
   readonly counts: OrderList['counts'] | undefined;
   readonly onQuery: (query: ListOrdersQuery) => void;
 };
-
-/** Typing rests this long before the list is asked for. */
-const restMs = 300;
 
 /** What narrows the list; every change is in the address at once. */
 export function OrdersFilter({ query, counts, onQuery }: Props) {
@@ -24,6 +21,7 @@ export function OrdersFilter({ query, counts, onQuery }: Props) {
     <form role="search" className="grid gap-4" onSubmit={(event) => event.preventDefault()}>
       <div className="flex flex-wrap items-end gap-x-5 gap-y-3">
         <FindField
+          hint="A number, a name, an e-mail address."
           find={query.find ?? ''}
           onFind={(find) =>
             onQuery({ ...query, find: find === '' ? undefined : find, page: undefined })
@@ -77,39 +75,4 @@ export function OrdersFilter({ query, counts, onQuery }: Props) {
 
 function dateOf(event: { readonly target: { readonly value: string } }): string | undefined {
   return event.target.value === '' ? undefined : event.target.value;
-}
-
-type FindProps = { readonly find: string; readonly onFind: (find: string) => void };
-
-/** Finds by number, name, address or words; waits until typing rests. */
-function FindField({ find, onFind }: FindProps) {
-  const [text, setText] = useState(find);
-  const [seen, setSeen] = useState({ find, sent: find });
-  if (find !== seen.find) {
-    setSeen({ ...seen, find });
-    // Another view was chosen; what we sent ourselves must not overwrite what is typed since.
-    if (find !== seen.sent) setText(find);
-  }
-  useEffect(() => {
-    const wanted = text.trim();
-    if (wanted === find) return undefined;
-    const timer = setTimeout(() => {
-      setSeen((now) => ({ ...now, sent: wanted }));
-      onFind(wanted);
-    }, restMs);
-    return () => clearTimeout(timer);
-  }, [text, find, onFind]);
-  return (
-    <div className="min-w-0 grow basis-64">
-      <TextField
-        type="search"
-        label="Find"
-        hint="A number, a name, an e-mail address."
-        autoComplete="off"
-        maxLength={100}
-        value={text}
-        onChange={(event) => setText(event.target.value)}
-      />
-    </div>
-  );
 }

@@ -9,7 +9,7 @@ import { PageTitle } from '#web/components/ui/page-title.tsx';
 import { Rim } from '#web/components/ui/rim.tsx';
 import { paths } from '#web/config/paths.ts';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
-import { FindField } from '#web/features/pantry/components/find-field.tsx';
+import { FindField } from '#web/components/ui/find-field.tsx';
 import { PantryGate } from '#web/features/pantry/components/pantry-gate.tsx';
 import { TitleRow } from '#web/features/pantry/components/title-row.tsx';
 import { FormulaCards, FormulaTable } from '#web/features/pantry/formulas/formula-list.tsx';
