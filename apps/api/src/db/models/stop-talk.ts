@@ -8,10 +8,7 @@ import type {
 import { key, text, writtenAt } from '../columns.ts';
 
 /** What was said and settled about a stop that no declared allergy stands behind. */
-export class StopTalk extends Model<
-  InferAttributes<StopTalk>,
-  InferCreationAttributes<StopTalk>
-> {
+export class StopTalk extends Model<InferAttributes<StopTalk>, InferCreationAttributes<StopTalk>> {
   declare id: CreationOptional<string>;
   declare orderId: string;
   declare revisionId: string;

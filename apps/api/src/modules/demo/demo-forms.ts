@@ -74,7 +74,13 @@ export const demoForms = {
       round(8, 'vanilla', 'passion-fruit'),
       round(5, 'honey', 'lemon-curd'),
     ),
-    setting: { place: 'shade', warmestC: 25, minutesOut: 90, driveMinutes: 25, servedAt: 15 * 60 + 30 },
+    setting: {
+      place: 'shade',
+      warmestC: 25,
+      minutesOut: 90,
+      driveMinutes: 25,
+      servedAt: 15 * 60 + 30,
+    },
     look: look({
       palette: ['#faf6ec', '#f2b632', '#2c7a4b'],
       decorations: [
