@@ -50,11 +50,13 @@ export function formatTemperature(celsius: number, lead: TemperatureLead): strin
 
 /**
  * Pairs the bench takes as one mark although the arithmetic lands a degree beside (common
- * practice, no source).
+ * practice, no source; 68 °C with 155 °F is the FDA Food Code's, 3-401.11).
  */
 const benchPairs: readonly (readonly [celsius: number, fahrenheit: number])[] = [
   [4, 40],
+  [21, 70],
   [27, 80],
+  [68, 155],
   [71, 160],
   [93, 200],
   [115, 240],
