@@ -330,7 +330,7 @@ describe('putting away', () => {
       'formula Raspberry jam',
     ]);
     expect(await used('/api/pantry/ingredients/marshmallow/archive')).toContain(
-      'decoration Modelled figure',
+      'decoration Modeled figure',
     );
   });
 

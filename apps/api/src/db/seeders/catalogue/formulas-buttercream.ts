@@ -253,7 +253,7 @@ export const buttercreamFormulas: readonly SeedFormula[] = [
         text: 'Bring custard and butter to the same 65 °F (18 °C); cold custard curdles it.',
         activeMinutes: 2,
         waitingMinutes: 30,
-        resource: 'cold',
+        resource: 'bench',
       },
       {
         text: 'Beat the butter white, then the custard a spoon at a time, then vanilla.',

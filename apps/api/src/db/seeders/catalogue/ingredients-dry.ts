@@ -78,7 +78,10 @@ export const dryGoods: readonly SeedIngredient[] = [
     packG: 1814,
     packPriceMinor: 560,
     allergens: [],
-    measures: [{ measure: 'cup', grams: 128 }],
+    measures: [
+      { measure: 'cup', grams: 128 },
+      { measure: 'tablespoon', grams: 8, source: 'trade memory' },
+    ],
   },
   {
     id: 'baking-powder',
@@ -127,7 +130,7 @@ export const dryGoods: readonly SeedIngredient[] = [
     id: 'cocoa',
     family: 'chocolate',
     brand: 'Quayside',
-    name: 'Cocoa powder, alkalised',
+    name: 'Cocoa powder, alkalized',
     commonName: 'cocoa',
     ndb: '19165',
     packG: 1000,

@@ -24,9 +24,9 @@ export const studio = {
   kitchenNotice:
     'Everything here is made in one kitchen. We tell you what is in your cake and what else we handle; we cannot promise that a trace of the rest is not in it. If an allergy at your table is serious, please talk to us before you order, and ask your doctor what is right for you.',
   homeKitchenText:
-    'Made in a licensed commercial kitchen at 14 Oxbow Lane, Alder Falls. Local food rules apply to us and to you: ask us for our licence if you need it.',
+    'Made in a licensed commercial kitchen at 14 Oxbow Lane, Alder Falls. Local food rules apply to us and to you: ask us for our license if you need it.',
   eggAdvisory:
-    'Eating raw or undercooked egg may raise the risk of illness, above all for young children, older people, pregnant people and anyone whose defences are low.',
+    'Eating raw or undercooked egg may raise the risk of illness, above all for young children, older people, pregnant people and anyone whose defenses are low.',
 } as const;
 
 /** What the owner says beyond the ingredients, with the assessment it rests on. */
