@@ -26,7 +26,7 @@ const eggRules: Record<LabelRegion, string> = {
 };
 
 /**
- * Consumer advisory for egg that is neither pasteurised nor cooked to its limit (FDA Food Code
+ * Consumer advisory for egg that is neither pasteurized nor cooked to its limit (FDA Food Code
  * 2022, 3-603.11), which is not served to highly susceptible people (3-801.11). The advisory's
  * words are the studio's; the local code decides. Methods that pour syrup into egg default to
  * pasteurised egg: the mix itself is not measured, so the syrup's heat counts for nothing here.
@@ -36,9 +36,9 @@ function eggAdvice(situation: Situation): Noted[] {
   if (raw.length === 0) return [];
   const { design, menu } = situation.resolved;
   const { eggAdvisory, labelRegion, temperatureLead } = menu.studio;
-  const made = `${formatList(raw)} ${raw.length === 1 ? 'is' : 'are'} made with egg that is neither pasteurised nor cooked through.`;
+  const made = `${formatList(raw)} ${raw.length === 1 ? 'is' : 'are'} made with egg that is neither pasteurized nor cooked through.`;
   const advisory = eggAdvisory === '' ? 'Raw or undercooked egg can make people ill.' : eggAdvisory;
-  const toDo = `Use pasteurised egg, or bring the mix itself to ${formatTemperature(cookedEggC, temperatureLead)} on a probe and log it; else the advisory goes with the cake (${eggRules[labelRegion]}).`;
+  const toDo = `Use pasteurized egg, or bring the mix itself to ${formatTemperature(cookedEggC, temperatureLead)} on a probe and log it; else the advisory goes with the cake (${eggRules[labelRegion]}).`;
   const ways = waysWithout(situation, (it) => it.undercookedEgg);
   const shared = { step: 'cake', code: 'egg', about: 'egg', ways } as const;
   if (!design.guests.susceptible) {
@@ -49,7 +49,7 @@ function eggAdvice(situation: Situation): Noted[] {
         sentence: `${made} ${advisory}`,
         plain: `Raw egg: ${formatList(raw)}. ${toDo}`,
         instead:
-          'Ask us to make it with pasteurised egg, and tell us if anyone pregnant, very young, old or with weak defences is coming.',
+          'Ask us to make it with pasteurized egg, and tell us if anyone pregnant, very young, old or with weak defenses is coming.',
       }),
     ];
   }
@@ -61,8 +61,8 @@ function eggAdvice(situation: Situation): Noted[] {
       plain: `Raw egg at a table with susceptible guests: ${formatList(raw)}. ${toDo}`,
       instead:
         ways.length === 0
-          ? 'Ask us to make it with pasteurised egg.'
-          : 'Ask us to make it with pasteurised egg, or take one of these.',
+          ? 'Ask us to make it with pasteurized egg.'
+          : 'Ask us to make it with pasteurized egg, or take one of these.',
       talk: true,
     }),
   ];

@@ -79,7 +79,7 @@ const factNames: Record<ContentFact, string> = {
   cochineal: 'cochineal',
   honey: 'honey',
   animalOrigin: 'something from meat, fish or slaughter',
-  undercookedEgg: 'egg that is neither pasteurised nor cooked through',
+  undercookedEgg: 'egg that is neither pasteurized nor cooked through',
 };
 
 /** What no label settles counts as there, so the words leave both open. */
@@ -90,7 +90,7 @@ const factNow: Record<ContentFact, string> = {
   honey: 'There is honey in it now, or a label that does not rule it out.',
   animalOrigin:
     'There is something from meat, fish or slaughter in it now, or a label that does not rule it out.',
-  undercookedEgg: 'There is egg in it now that is neither pasteurised nor cooked through.',
+  undercookedEgg: 'There is egg in it now that is neither pasteurized nor cooked through.',
 };
 
 function newlyHandled(before: OrderContents, now: OrderContents, region: LabelRegion): string[] {

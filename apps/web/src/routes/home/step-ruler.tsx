@@ -2,7 +2,7 @@ const steps = [
   { name: 'The day', line: 'How many will eat, who must not eat what, and when.' },
   { name: 'The cake', line: 'Tiers or a sheet, sponges and fillings, drawn as you choose.' },
   { name: 'Where it goes', line: 'How warm it gets there decides which buttercream stands up.' },
-  { name: 'The look', line: 'Colours, words, flowers, and the pictures you have saved.' },
+  { name: 'The look', line: 'Colors, words, flowers, and the pictures you have saved.' },
   { name: 'You', line: 'Who orders and who collects.' },
   { name: 'Check', line: 'Everything once more, each with a way back. Then send it.' },
 ] as const;

@@ -328,7 +328,7 @@ function remindersOf(
       : []),
     ...(label.homeKitchen === ''
       ? [
-          'Many places ask for a sentence about a home kitchen or a licence. Check your local rules.',
+          'Many places ask for a sentence about a home kitchen or a license. Check your local rules.',
         ]
       : ['The sentence about your kitchen is yours. Check your local rules for its wording.']),
   ];

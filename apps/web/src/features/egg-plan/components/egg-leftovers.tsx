@@ -35,7 +35,7 @@ export function EggLeftovers({ leftovers, locale }: Props) {
       <p className="text-sm text-slate">
         Loose whites and yolks keep 2 to 4 days in the fridge, covered and marked with their day
         (FDA storage chart). Whites may be frozen; yolks freeze badly. Your local food code and your
-        licence have the last word.
+        license have the last word.
       </p>
     </div>
   );

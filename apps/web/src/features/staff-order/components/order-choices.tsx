@@ -21,7 +21,7 @@ export function OrderChoices({ order, menu }: { readonly order: StaffOrder; read
     look !== null &&
       look.palette.length > 0 && {
         key: 'palette',
-        label: 'Colours',
+        label: 'Colors',
         value: <Palette colours={look.palette} />,
       },
     look !== null &&

@@ -91,7 +91,7 @@ export function AllergyFields() {
         />
         <Checkbox
           name={susceptible.name}
-          label="Somebody pregnant, very young, elderly or with weak defences will eat it"
+          label="Somebody pregnant, very young, elderly or with weak defenses will eat it"
           hint="Then eggs that are not cooked through matter more."
           checked={susceptible.value}
           onChange={(event) => susceptible.onValue(event.target.checked)}
