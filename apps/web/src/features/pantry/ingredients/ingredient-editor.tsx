@@ -29,6 +29,7 @@ import {
   formOf,
   ingredientForm,
   joinDrafts,
+  readBase,
   typedDraft,
 } from './ingredient-form.ts';
 
@@ -65,7 +66,7 @@ export function IngredientEditor({ ingredient, usedIn, house, currency }: Props)
     key: `ingredient:${ingredient?.id ?? 'new'}`,
     contract: ingredientForm,
     values: form,
-    basedOn: null,
+    basedOn: base === null ? null : JSON.stringify(base),
     unsaved,
   });
 
@@ -155,6 +156,9 @@ export function IngredientEditor({ ingredient, usedIn, house, currency }: Props)
             house={house}
             onTake={() => {
               setForm(found.values);
+              // Its own beginning comes with it: what others saved since must not be undone unseen.
+              const begun = readBase(found.basedOn);
+              if (begun !== null && base !== null) setBase(begun);
               draft.settle(false);
             }}
             onDrop={() => draft.settle(true)}

@@ -85,6 +85,16 @@ export function draftOf(ingredient: Ingredient): IngredientDraft {
   return ingredientDraft.parse(ingredient);
 }
 
+/** What a draft kept on the device was begun from, or null where it no longer reads as a product. */
+export function readBase(kept: string | null): IngredientDraft | null {
+  try {
+    const read = ingredientDraft.safeParse(JSON.parse(kept ?? 'null'));
+    return read.success ? read.data : null;
+  } catch {
+    return null;
+  }
+}
+
 export function formOf(draft: IngredientDraft, currency: string): IngredientForm {
   return {
     ...draft,

@@ -165,4 +165,30 @@ describe('an ingredient', () => {
       },
     });
   });
+
+  it('saves what was begun before somebody else saved over what it was begun from', async () => {
+    const pantry = pantryFixture();
+    server.use(
+      http.put('*/api/pantry/ingredients/milk', async ({ request }) => {
+        sent.push(await request.json());
+        return refusal('unavailable', 503);
+      }),
+    );
+    const first = open('/staff/pantry/ingredients/milk', pantry);
+    await first.user.type(await screen.findByRole('textbox', { name: /Maker/ }), 'Alder Dairy');
+    first.unmount();
+    const soy = { allergen: 'soy', species: [], state: 'contains' } as const;
+    const ingredients = pantry.ingredients.map((it) =>
+      it.id === 'milk' ? { ...it, allergens: [...it.allergens, soy] } : it,
+    );
+    const { user } = open('/staff/pantry/ingredients/milk', { ...pantry, ingredients });
+    await user.click(await screen.findByRole('button', { name: 'Go on with it' }));
+    await user.click(screen.getByRole('button', { name: 'Save' }));
+    await waitFor(() => expect(sent).toHaveLength(1));
+    // The server sees that the soy is not in what this was begun from, and asks.
+    expect(sent[0]).toMatchObject({
+      basedOn: { allergens: [{ allergen: 'milk' }] },
+      draft: { brand: expect.stringContaining('Alder Dairy') },
+    });
+  });
 });
