@@ -94,7 +94,7 @@ function Line({
       <span className="min-w-0">
         {line.name}
         {line.formula && <span className="text-sm text-slate"> (its own formula)</span>}
-        {isFar(line) && (
+        {isFar(line) && grams(line.exactG) !== grams(line.roundedG) && (
           <span className="text-sm whitespace-nowrap text-slate">
             {' '}
             ({grams(line.exactG)} exactly)
