@@ -47,6 +47,8 @@ export async function preparedMenu(): Promise<PreparedMenu> {
 
 /** The menu as it is in the database now; orders are priced by it. */
 export async function freshMenu(): Promise<Menu> {
+  // A look that is under way may have begun before the change that must be in it.
+  await loading?.catch(() => null);
   return (await lookAgain()).menu;
 }
 

@@ -43,7 +43,14 @@ export function ordersRoutes(deps: Deps): FeatureRoutes {
       response: submittedOrder,
       status: 201,
       idempotent: true,
-      refusals: ['price-changed', 'date-gone', 'too-many-holds', 'key-reused', 'not-allowed'],
+      refusals: [
+        'price-changed',
+        'date-gone',
+        'too-many-holds',
+        'key-reused',
+        'not-allowed',
+        'unavailable',
+      ],
     },
     async ({ actor, body, idempotencyKey, request }) => {
       authorise(actor, maySubmitOrder(actor));

@@ -61,7 +61,8 @@ class SentAlready extends Error {
 /**
  * Takes an order: prices it again, keeps a place in the plan for it where there is one, and writes
  * it with its events and e-mails in one transaction. The same key twice is one order.
- * @throws `price-changed`, `date-gone`, `too-many-holds`, `key-reused`, `invalid-input`, `not-allowed`
+ * @throws `price-changed`, `date-gone`, `too-many-holds`, `key-reused`, `invalid-input`, `not-allowed`,
+ * `unavailable` while somebody saves the catalogue over and over
  */
 export async function submitOrder(deps: Deps, input: SubmitInput): Promise<Submitted> {
   const transition = submitTransition(input.actor);
@@ -73,7 +74,12 @@ export async function submitOrder(deps: Deps, input: SubmitInput): Promise<Submi
     try {
       return await placeAndWrite(deps, input, prepared, requestHash);
     } catch (error) {
-      if (error instanceof CatalogueChanged && turn < mostTurns) continue;
+      if (error instanceof CatalogueChanged) {
+        if (turn < mostTurns) continue;
+        throw new AppError('unavailable', {
+          detail: 'We are changing our menu this very moment. Nothing was sent; please try again.',
+        });
+      }
       if (!(error instanceof SentAlready)) throw error;
       const meanwhile = await findSubmitted(deps, input, requestHash);
       if (meanwhile === null) throw error;
