@@ -7,6 +7,7 @@ import { OrderContact } from '#api/db/models/order-contact.ts';
 import { OrderEvent } from '#api/db/models/order-event.ts';
 import { Order } from '#api/db/models/order.ts';
 import { Quote } from '#api/db/models/quote.ts';
+import { StopTalk } from '#api/db/models/stop-talk.ts';
 import { User } from '#api/db/models/user.ts';
 import { inTransaction } from '#api/db/transaction.ts';
 import { makeOrder } from '#api/testing/factories.ts';
@@ -50,9 +51,25 @@ describe('taking one’s data out', () => {
     const order = await makeOrder({
       contact: { email: 'priya@example.com', name: 'Priya Venkat' },
     });
-    await inTransaction(() =>
-      Message.create({ orderId: order.id, sender: 'customer', body: 'With a little less sugar?' }),
-    );
+    const where = { orderId: order.id, revisionId: order.currentRevisionId ?? '' };
+    const { id: byUserId } = await addUser('baker');
+    const at = app.clock.now();
+    const stop = { code: 'heat', about: 'heat:cake' };
+    await inTransaction(async () => {
+      await Message.create({
+        orderId: order.id,
+        sender: 'customer',
+        body: 'With a little less sugar?',
+      });
+      await StopTalk.create({ ...where, ...stop, text: 'Carried in at noon.', byUserId, at });
+      await LiftedStop.create({
+        ...where,
+        ...stop,
+        reason: 'It stands indoors.',
+        liftedByUserId: byUserId,
+        liftedAt: at,
+      });
+    });
     const client = await signInCustomer(app, 'priya@example.com');
     const answer = await client.get('/api/account/export');
     expect(answer.headers.get('Content-Disposition')).toContain('attachment');
@@ -62,6 +79,7 @@ describe('taking one’s data out', () => {
       number: order.number,
       contacts: [{ as: 'ordered', name: 'Priya Venkat', email: 'priya@example.com' }],
       messages: [{ body: 'With a little less sugar?' }],
+      notes: ['Carried in at noon.', 'It stands indoors.'],
     });
   });
 });

@@ -3,6 +3,7 @@ import { ContentChange } from '#api/db/models/content-change.ts';
 import { DeclaredAllergy } from '#api/db/models/declared-allergy.ts';
 import { Identity } from '#api/db/models/identity.ts';
 import { ItemTier } from '#api/db/models/item-tier.ts';
+import { LiftedStop } from '#api/db/models/lifted-stop.ts';
 import { Message } from '#api/db/models/message.ts';
 import { OrderContact } from '#api/db/models/order-contact.ts';
 import { OrderItem } from '#api/db/models/order-item.ts';
@@ -10,6 +11,7 @@ import { OrderRevision } from '#api/db/models/order-revision.ts';
 import { Order } from '#api/db/models/order.ts';
 import { Photo } from '#api/db/models/photo.ts';
 import { SentMail } from '#api/db/models/sent-mail.ts';
+import { StopTalk } from '#api/db/models/stop-talk.ts';
 import { User } from '#api/db/models/user.ts';
 import { notFound } from '#api/platform/app-error.ts';
 import type { AccountExport } from '#shared/contracts/accounts.ts';
@@ -94,15 +96,12 @@ async function exportRevision(
   revision: OrderRevision | undefined,
 ): Promise<Pick<ExportedOrder, 'allergies' | 'words' | 'notes'>> {
   if (revision === undefined) return { allergies: [], words: [], notes: [] };
-  const allergies = await DeclaredAllergy.findAll({
-    where: { revisionId: revision.id },
-    order: [['position', 'ASC']],
-  });
-  const items = await OrderItem.findAll({ where: { revisionId: revision.id } });
-  const changes = await ContentChange.findAll({
-    where: { revisionId: revision.id },
-    order: [['n', 'ASC']],
-  });
+  const where = { revisionId: revision.id };
+  const allergies = await DeclaredAllergy.findAll({ where, order: [['position', 'ASC']] });
+  const items = await OrderItem.findAll({ where });
+  const changes = await ContentChange.findAll({ where, order: [['n', 'ASC']] });
+  const talks = await StopTalk.findAll({ where, order: [['at', 'ASC']] });
+  const lifted = await LiftedStop.findAll({ where, order: [['liftedAt', 'ASC']] });
   const tiers = await ItemTier.findAll({ where: { itemId: items.map(({ id }) => id) } });
   return {
     allergies: allergies.map(({ allergen, freeText, severity, guests, answer }) => ({
@@ -119,6 +118,9 @@ async function exportRevision(
       ...items.map(({ note }) => note),
       // What staff wrote about a change of what is in the cake, and how the customer was told.
       ...changes.flatMap(({ acknowledgedNote, toldHow }) => [acknowledgedNote, toldHow]),
+      // What was talked over with the customer, and why the owner took the order all the same.
+      ...talks.map(({ text }) => text),
+      ...lifted.map(({ reason }) => reason),
     ].filter((note) => note !== ''),
   };
 }
