@@ -1,3 +1,4 @@
+import { isLive } from '#shared/orders/transitions.ts';
 import { ContentChange } from '#api/db/models/content-change.ts';
 import type { Order } from '#api/db/models/order.ts';
 import { inTransaction } from '#api/db/transaction.ts';
@@ -67,6 +68,7 @@ export async function tellContents(
 }
 
 async function find(order: Order, id: string): Promise<ContentChange> {
+  if (!isLive(order.status)) throw done('This order has ended: nobody need be told any more.');
   const change = await ContentChange.findOne({ where: { id, orderId: order.id, endedAt: null } });
   if (change === null)
     throw notFound('That was put right, or something newer has taken its place.');

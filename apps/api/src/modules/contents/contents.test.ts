@@ -279,6 +279,19 @@ describe('a changed label', () => {
     await relabel('vanilla', { allergens: [] });
   });
 
+  it('is nobody’s to see to any more once the order has ended', async () => {
+    const asked = await confirmed();
+    await relabel('vanilla', { allergens: [sesame] });
+    const change = (await look(asked)).contentChanges.at(-1);
+    await inTransaction(() =>
+      Order.update({ status: 'cancelled' }, { where: { code: asked.code } }),
+    );
+    const path = `contents/${change?.id ?? ''}`;
+    expect(codeOf(await move(asked, `${path}/acknowledge`, { note: 'x' }))).toBe('wrong-state');
+    expect(codeOf(await move(asked, `${path}/told`, { how: 'By telephone.' }))).toBe('wrong-state');
+    await relabel('vanilla', { allergens: [] });
+  });
+
   it('that nobody has read makes everything it does not name unknown in every open order', async () => {
     const asked = await confirmed();
     const numbers = await relabel('salt', { labelCheckedOn: null });
