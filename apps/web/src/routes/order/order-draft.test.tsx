@@ -60,6 +60,26 @@ describe('the draft of an order', () => {
     await waitFor(() => expect(name).toHaveValue('Mara Quill'));
   });
 
+  it('begins with a cake of the menu, and taking it back keeps what was typed since', async () => {
+    const { user } = bench.open(
+      '/order#sponge=chocolate&filling=raspberry&covering=buttercream&style=italian&allergen=egg',
+    );
+    expect(await screen.findByText(/Your cake from the menu is in the order/)).toBeVisible();
+    await user.type(screen.getByLabelText('Number of people'), '40');
+    await waitFor(() =>
+      expect(bench.kept()).toMatchObject({
+        values: { cake: { tiers: [{ spongeId: 'chocolate' }] }, day: { headCount: 40 } },
+      }),
+    );
+    await user.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(screen.getByLabelText('Number of people')).toHaveValue('40');
+    await waitFor(() =>
+      expect(bench.kept()).toMatchObject({
+        values: { cake: { tiers: [] }, day: { allergies: [], headCount: 40 } },
+      }),
+    );
+  });
+
   it('offers a newer draft of another tab instead of writing over it', async () => {
     bench.keepDraft(answered());
     const { user } = bench.open('/order/you');

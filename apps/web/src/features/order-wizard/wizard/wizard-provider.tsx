@@ -1,13 +1,11 @@
 import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { FormProvider, useForm } from 'react-hook-form';
-import { useLocation } from 'react-router-dom';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { today as todayIn } from '#shared/dates/local-time.ts';
 import { useToast } from '#web/components/ui/toast.tsx';
 import type { OrderStep } from '#web/config/paths.ts';
 import { designOf } from '../design/design-of.ts';
 import { fitToMenu } from '../design/fit-to-menu.ts';
-import { startWith } from '../design/start-with.ts';
 import { DraftKeeper } from '../draft/draft-keeper.ts';
 import type { DraftRecord, KeptPicture, SendAttempt } from '../draft/draft-record.ts';
 import { deviceShelf } from '../draft/draft-storage.ts';
@@ -17,6 +15,7 @@ import { laterStep } from '../steps/steps.ts';
 import { same } from './same.ts';
 import { useEstimate } from './use-estimate.ts';
 import { usePhotoQueue } from './use-photo-queue.ts';
+import { useStartWith } from './use-start-with.ts';
 import { useStable } from './use-stable.ts';
 import { type Wizard, WizardContext } from './wizard-context.ts';
 
@@ -50,7 +49,7 @@ function later(run: () => void, ms: number): () => void {
 }
 
 /** Restores the draft once, when the wizard opens. */
-function begin(menu: Menu, customer: Customer | null, fragment: string) {
+function begin(menu: Menu, customer: Customer | null) {
   const shelf = deviceShelf();
   const restored = shelf.read();
   const keeper = new DraftKeeper(
@@ -58,16 +57,7 @@ function begin(menu: Menu, customer: Customer | null, fragment: string) {
     restored,
   );
   const { values, gone } = fitToMenu(restored?.values ?? emptyOrder(), menu);
-  const before = introduce(values, customer);
-  const begun = startWith(fragment, before, menu);
-  return {
-    keeper,
-    values: begun ?? before,
-    /** What stood before a link from the menu put its cake there. */
-    before: begun === null ? null : before,
-    gone,
-    aside: asideOf(restored),
-  };
+  return { keeper, values: introduce(values, customer), gone, aside: asideOf(restored) };
 }
 
 /** Fills in the name and address of whoever is signed in, where nothing was written yet. */
@@ -82,8 +72,7 @@ function introduce(values: OrderForm, customer: Customer | null): OrderForm {
 
 /** The wizard's state: one form, kept on the device, with its design, estimate and photos. */
 export function WizardProvider({ menu, customer, children }: Props) {
-  const { hash } = useLocation();
-  const [start] = useState(() => begin(menu, customer, hash));
+  const [start] = useState(() => begin(menu, customer));
   const { keeper } = start;
   const form = useForm<OrderForm>({ defaultValues: start.values, resolver: orderResolver });
   const [values, setValues] = useState(start.values);
@@ -102,20 +91,13 @@ export function WizardProvider({ menu, customer, children }: Props) {
     [form],
   );
 
+  useStartWith(form, menu);
+
   useEffect(() => {
     if (start.gone.length > 0) {
       toast({ message: `No longer on the menu, so taken out: ${start.gone.join(', ')}.` });
     }
   }, [start, toast]);
-
-  useEffect(() => {
-    const { before } = start;
-    if (before === null) return;
-    toast({
-      message: 'Your cake from the menu is in the order; say how many will eat it.',
-      onUndo: () => form.reset(before),
-    });
-  }, [start, form, toast]);
 
   // Somebody signed in on another page meanwhile.
   useEffect(() => {
