@@ -237,6 +237,13 @@ describe('a formula as bakers type it', () => {
     expect(lines.at(-1)?.problem?.code).toBe('not-read');
   });
 
+  it('takes a line that is too long for one as it is, and looks no further', () => {
+    const words = 'for a '.repeat(40_000);
+    const line = readFormulaLine(words, index);
+    expect(line).toMatchObject({ asTyped: words, kind: 'line', amounts: [], match: null });
+    expect(line.problem?.code).toBe('not-read');
+  });
+
   it('loses nothing, whatever is typed', () => {
     const scraps = fc.constantFrom(
       '1',

@@ -28,12 +28,13 @@ export function readFormulaLine(
   const text = bareLine(asTyped);
   const unread = { ...nothingRead, asTyped, stage, words: text };
   if (text === '') return { ...unread, kind: 'blank' };
-  const heading = part === undefined ? headingOf(text) : null;
-  if (heading !== null) return { ...unread, kind: 'heading', words: heading };
+  // Before anything looks at it: whole books get pasted, and patterns take their time on them.
   if (text.length > longest) {
     const message = `Too long to be read: at most ${longest} characters on a line.`;
     return { ...unread, kind: 'line', problem: { code: 'not-read', message } };
   }
+  const heading = part === undefined ? headingOf(text) : null;
+  if (heading !== null) return { ...unread, kind: 'heading', words: heading };
 
   const { amounts, words, note, named, more } = takeApart(text, index);
   const counted = amounts.some((it) => it.parts.some(({ unit }) => unit === 'piece'));
