@@ -1,6 +1,7 @@
 import { estimatesRoutes } from '#api/modules/estimates/estimates.routes.ts';
 import { ordersRoutes } from '#api/modules/orders/orders.routes.ts';
 import { photosRoutes } from '#api/modules/photos/photos.routes.ts';
+import { kitchenRulesRoutes } from '#api/modules/kitchen-rules/kitchen-rules.routes.ts';
 import { allergyTableRoutes } from '#api/modules/allergy-table/allergy-table.routes.ts';
 import { accountsRoutes } from '#api/modules/accounts/accounts.routes.ts';
 import { datesRoutes } from '#api/modules/dates/dates.routes.ts';
@@ -49,6 +50,7 @@ export function featureRoutes(deps: Deps): readonly FeatureRoutes[] {
     accountsRoutes(deps),
     peopleRoutes(deps),
     allergyTableRoutes(deps),
+    kitchenRulesRoutes(deps),
     pricesRoutes(deps),
     healthRoutes(deps),
   ];

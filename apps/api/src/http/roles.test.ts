@@ -329,6 +329,19 @@ const table: Readonly<Record<string, Line>> = {
     }),
   ),
 
+  // Every figure the kitchen goes by; made from others than the present ones, as above.
+  'see-kitchen-rules': line(owners, '/api/staff/kitchen-rules'),
+  'save-kitchen-rules': line(owners, () =>
+    put('/api/staff/kitchen-rules', {
+      version: 'another',
+      rules: {},
+      altitudeM: 0,
+      monthlyWarmestC: Array.from({ length: 12 }, () => 20),
+      dessertFactorPpm: 700_000,
+      wordsPer100Mm: 13,
+    }),
+  ),
+
   // Formulas and ingredients: refused for what they ask, once it is known who asks.
   'load-pantry': line(bakers, '/api/pantry'),
   'create-formula': line(bakers, () =>

@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
 import { colourHex, id, localDate, minor, slug } from './common.ts';
+import { kitchenRules } from './kitchen-rules.ts';
 import {
   allergenId,
   allergenState,
@@ -275,6 +276,8 @@ export const menu = z.object({
   priceBook,
   allergyRules: z.array(allergyRule),
   policies: z.array(policyText),
+  /** The kitchen's own figures, which all amounts, proposals and advice go by. */
+  kitchen: kitchenRules,
   /** Words piped on a tier fit this many characters per 100 mm of its width. */
   wordsPer100Mm: z.int(),
   maxPhotos: z.int(),

@@ -56,7 +56,7 @@ export function bakeSponges(plan: Expansion, layers: readonly Layer[]): Batches 
     const tinsMm2 = sum(
       of.map(({ body, count }) => {
         const { widthMm, depthMm } = body.block;
-        return count * (tinsOf(body)?.count ?? 0) * widthMm * depthMm;
+        return count * (tinsOf(body, plan.rules)?.count ?? 0) * widthMm * depthMm;
       }),
     );
     const loads = Math.max(1, Math.ceil(tinsMm2 / deckMm2));

@@ -1,3 +1,4 @@
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { AllergenId, Severity } from '#shared/contracts/vocabulary.ts';
 import { amountsOf, type BodyAmounts } from '#shared/kitchen/amounts.ts';
 import { containedAllergens, partsOf } from '#shared/kitchen/parts.ts';
@@ -17,10 +18,6 @@ export type ExpandInput = {
   readonly noticeDays: number;
 };
 
-/** Room round a tier on its board, and over it, in the fridge; millimetres. */
-const boardMarginMm = 40;
-const headroomMm = 20;
-
 /** Severities for which work is kept apart from what the guest must not have. */
 export const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylaxis'];
 
@@ -32,7 +29,7 @@ export const keepsApart: readonly Severity[] = ['coeliac', 'allergy', 'anaphylax
  * @throws when the design has no cake or no coating yet
  */
 export function expandDesign({ resolved, workTimes, equipment, noticeDays }: ExpandInput): Demand {
-  const plan = new Expansion(workTimes, equipment);
+  const plan = new Expansion(workTimes, equipment, resolved.menu.kitchen);
   const shown = shownLayers(resolved);
   const cutting = cuttingLayers(resolved);
   const layers = [...shown, ...cutting];
@@ -59,7 +56,7 @@ export function expandDesign({ resolved, workTimes, equipment, noticeDays }: Exp
     work: plan.work,
     links: plan.links,
     boxes: layers.flatMap(({ body, count }) =>
-      Array.from({ length: count }, () => boxOf(body.block)),
+      Array.from({ length: count }, () => boxOf(body.block, resolved.menu.kitchen)),
     ),
     contains,
     apart: apartFrom(resolved, contains),
@@ -116,11 +113,14 @@ function tierName({ index }: ResolvedTier, { design, tiers }: ResolvedDesign): s
   return tiers.length === 3 ? 'the middle tier' : `tier ${index + 1}`;
 }
 
-/** What a tier takes of the fridge, on its board. */
-export function boxOf(block: Pick<Block, 'widthMm' | 'depthMm' | 'heightMm'>): Box {
+/** What a tier takes of the fridge on its board, with the room round and over it. */
+export function boxOf(
+  block: Pick<Block, 'widthMm' | 'depthMm' | 'heightMm'>,
+  { fridgeMarginMm, fridgeHeadroomMm }: KitchenRules,
+): Box {
   return {
-    widthMm: block.widthMm + 2 * boardMarginMm,
-    depthMm: block.depthMm + 2 * boardMarginMm,
-    heightMm: block.heightMm + headroomMm,
+    widthMm: block.widthMm + 2 * fridgeMarginMm,
+    depthMm: block.depthMm + 2 * fridgeMarginMm,
+    heightMm: block.heightMm + fridgeHeadroomMm,
   };
 }

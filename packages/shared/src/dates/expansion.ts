@@ -1,3 +1,4 @@
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { ResolvedBody } from '#shared/kitchen/resolve-design.ts';
 import { areaMm2, perimeterMm, type Block } from '#shared/kitchen/sizes.ts';
 import type { Link, Work } from './model.ts';
@@ -45,10 +46,12 @@ export class Expansion {
   readonly links: Link[] = [];
   readonly times: WorkTimes;
   readonly equipment: Equipment;
+  readonly rules: KitchenRules;
 
-  constructor(times: WorkTimes, equipment: Equipment) {
+  constructor(times: WorkTimes, equipment: Equipment, rules: KitchenRules) {
     this.times = times;
     this.equipment = equipment;
+    this.rules = rules;
   }
 
   /** How long before the pickup window's end the finished cake may be begun. */

@@ -43,7 +43,7 @@ function typicalCake({ guests }: Design, menu: Menu): Omit<Cake, 'coating'> {
   const [most] = proposeStacks(wanted, menu, portion).toSorted(
     (a, b) => b.sizes.length - a.sizes.length,
   );
-  if (most !== undefined) return { ...none, tiers: tiersOf(most, inside) };
+  if (most !== undefined) return { ...none, tiers: tiersOf(most, inside, menu.kitchen) };
   // Beyond what the studio stacks, a grand show and cutting cakes for the rest.
   const [show] = proposeShows(wanted, menu, portion, { ...plainWish, alone: false }).toSorted(
     (a, b) => b.stack.sizes.length - a.stack.sizes.length,
@@ -52,7 +52,7 @@ function typicalCake({ guests }: Design, menu: Menu): Omit<Cake, 'coating'> {
   const { stack, cut } = show;
   return {
     ...none,
-    tiers: tiersOf(stack, inside),
+    tiers: tiersOf(stack, inside, menu.kitchen),
     cuttingCakes: [cuttingCakeOf(cut.size, cut.count, inside)],
   };
 }

@@ -9,7 +9,6 @@ import { cakeOfProposal } from './propose-cakes.ts';
 import { cuttingCakeOf, sheetsFor } from './propose-cutting.ts';
 import { wornCoat, type ResolvedDesign } from './resolve-design.ts';
 import { cuttingWords } from './sentences.ts';
-import { smallestStepMm } from './sizes.ts';
 import { supportsOf } from './supports.ts';
 import { tierName } from './tier-name.ts';
 
@@ -29,9 +28,6 @@ export function cakeAdvice(
     ...supportAdvice(resolved),
   ];
 }
-
-/** Over this share of the portions wanted, a smaller cake is worth a word. */
-const plenty = 1.4;
 
 function portionAdvice(
   resolved: ResolvedDesign,
@@ -73,7 +69,7 @@ function portionAdvice(
       }),
     ];
   }
-  if (fed <= wanted * plenty || fed - wanted < 10) return [];
+  if (fed <= wanted * (1 + resolved.menu.kitchen.plentyPpm / 1e6) || fed - wanted < 10) return [];
   return [
     note({
       code: 'portions',
@@ -162,6 +158,7 @@ const nearestOf = (values: readonly number[], wanted: number): number | undefine
 
 function stepAdvice(cake: Cake, menu: Menu): Noted[] {
   const lead = menu.studio.lengthLead;
+  const { smallestStepMm } = menu.kitchen;
   return cake.tiers.flatMap((tier, index): Noted[] => {
     const above = cake.tiers[index + 1];
     if (above === undefined) return [];
@@ -218,8 +215,8 @@ function dummyAdvice({ tiers }: ResolvedDesign): Noted[] {
   ];
 }
 
-function supportAdvice({ tiers }: ResolvedDesign): Noted[] {
-  const { boards, dowels } = supportsOf(tiers);
+function supportAdvice({ tiers, menu }: ResolvedDesign): Noted[] {
+  const { boards, dowels } = supportsOf(tiers, menu.kitchen);
   if (boards === 0) return [];
   const inside =
     dowels === 0

@@ -85,12 +85,10 @@ const detailWords = {
   fine: 'fine detail',
 } as const;
 
-/** Styles up to this on the scale of five are hard to get smooth. */
-const hardToSmooth = 2;
-
 function finishAdvice(situation: Situation): Noted[] {
   const { resolved } = situation;
   const { cake } = resolved.design;
+  const { roughUpTo } = resolved.menu.kitchen;
   return distinctCoats(resolved.tiers).flatMap((coat): Noted[] => {
     const { covering, style, finish } = coat;
     const [first] = covering.finishes;
@@ -122,13 +120,12 @@ function finishAdvice(situation: Situation): Noted[] {
         }),
       ];
     }
-    const rough =
-      covering.id === 'buttercream' && style !== null && style.smoothness <= hardToSmooth;
+    const rough = covering.id === 'buttercream' && style !== null && style.smoothness <= roughUpTo;
     if (!rough || finish !== 'smooth') return [];
     const ways = otherCoats(
       situation,
       coat,
-      (it) => it.covering.id === 'buttercream' && (it.style?.smoothness ?? 0) > hardToSmooth,
+      (it) => it.covering.id === 'buttercream' && (it.style?.smoothness ?? 0) > roughUpTo,
     );
     return [
       note({

@@ -25,10 +25,10 @@ const inStyle = (style: StyleId, warmestC: number | null, place: 'indoors' | 'sh
 
 describe('heat', () => {
   it('is ok at least 3 °C under the limit, care up to it, stop above', () => {
-    expect(fareInHeat(26, 23)).toBe('ok');
-    expect(fareInHeat(26, 23.1)).toBe('care');
-    expect(fareInHeat(26, 26)).toBe('care');
-    expect(fareInHeat(26, 26.1)).toBe('stop');
+    expect(fareInHeat(26, 23, menuFixture.kitchen)).toBe('ok');
+    expect(fareInHeat(26, 23.1, menuFixture.kitchen)).toBe('care');
+    expect(fareInHeat(26, 26, menuFixture.kitchen)).toBe('care');
+    expect(fareInHeat(26, 26.1, menuFixture.kitchen)).toBe('stop');
   });
 
   it('is told in a plain sentence with what would stand up', () => {
@@ -98,11 +98,11 @@ describe('heat', () => {
   it('takes the studio’s figure for the month, and its warmest while there is no day', () => {
     const unknown = { ...indoors, warmestC: null };
     const outside = { ...unknown, place: 'shade' as const };
-    expect(warmthOf(outside, menuFixture.studio, '2027-01-16').celsius).toBe(4);
+    expect(warmthOf(outside, menuFixture, '2027-01-16').celsius).toBe(4);
     // Common practice, no source: rooms are kept at 22 °C or so, however cold the day.
-    expect(warmthOf(unknown, menuFixture.studio, '2027-01-16').celsius).toBe(22);
-    expect(warmthOf(unknown, menuFixture.studio, '2027-06-19').celsius).toBe(28);
-    expect(warmthOf(unknown, menuFixture.studio, null).celsius).toBe(31);
+    expect(warmthOf(unknown, menuFixture, '2027-01-16').celsius).toBe(22);
+    expect(warmthOf(unknown, menuFixture, '2027-06-19').celsius).toBe(28);
+    expect(warmthOf(unknown, menuFixture, null).celsius).toBe(31);
     const found = about(
       evaluate(inStyle('swiss', null, 'shade')),
       'heat-unknown:buttercream-swiss',
@@ -194,6 +194,7 @@ describe('time out of the fridge', () => {
         setting: indoors,
         warmestC: 20,
         studio: menuFixture.studio,
+        rules: menuFixture.kitchen,
         widestMm: 200,
         collectAt: null,
         perishable: true,
@@ -218,6 +219,7 @@ describe('time out of the fridge', () => {
         setting: served,
         warmestC,
         studio: menuFixture.studio,
+        rules: menuFixture.kitchen,
         widestMm: 200,
         collectAt,
         perishable: true,

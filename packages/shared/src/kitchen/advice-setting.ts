@@ -42,14 +42,15 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
   const { setting } = situation.resolved.design;
   if (setting === null) return [];
   const limitC = coatLimitC(coat);
-  const level = fareOfCoat(limitC, setting, warmth);
+  const { kitchen } = situation.resolved.menu;
+  const level = fareOfCoat(limitC, setting, warmth, kitchen);
   if (setting.place === 'sun') return [sunAdvice(coat, limitC, situation, warmth)];
   const lead = situation.resolved.menu.studio.temperatureLead;
   const limit = formatTemperature(limitC, lead);
   const expected = formatTemperature(warmth.celsius, lead);
   const shared = { level, step: 'setting' } as const;
   // What would do by the figure we reckon with needs no other coat, only to be asked again.
-  const fare = fareInHeat(limitC, warmth.celsius);
+  const fare = fareInHeat(limitC, warmth.celsius, kitchen);
   const ways = fare === 'ok' ? [] : waysFrom(coat, limitC, situation, fare);
   if (!warmth.known) {
     return [
@@ -100,9 +101,10 @@ function sunAdvice(
   situation: Situation,
   warmth: Warmth,
 ): Noted {
-  const { setting } = situation.resolved.design;
+  const { design, menu } = situation.resolved;
+  const { setting } = design;
   const shade: WayOut[] =
-    setting === null || fareInHeat(limitC, warmth.celsius) === 'stop'
+    setting === null || fareInHeat(limitC, warmth.celsius, menu.kitchen) === 'stop'
       ? []
       : [{ label: 'In the shade', patch: { setting: { ...setting, place: 'shade' } } }];
   return note({

@@ -24,9 +24,6 @@ export function isPerishable({ tiers, cuttingCakes }: ResolvedDesign): boolean {
   );
 }
 
-/** The part of the limit from which a late speech is enough to pass it. */
-const nearTheLimit = 0.75;
-
 /** Minutes out, drive and all; a dummy may stand as long as it likes. */
 function minutesOutOf({ design, tiers }: ResolvedDesign): number {
   if (design.setting === null) return 0;
@@ -41,7 +38,8 @@ function outAdvice(situation: Situation, warmth: Warmth): Noted[] {
   if (setting === null || tiers.length === 0 || !isPerishable(resolved)) return [];
   const allowed = minutesAllowed(warmth.celsius);
   const out = minutesOutOf(resolved);
-  if (out <= allowed * nearTheLimit) return [];
+  // From some part of the limit on, a late speech is enough to pass it.
+  if (out <= (allowed * menu.kitchen.closeToTimePpm) / 1e6) return [];
   const level: AdviceLevel = out > allowed ? 'stop' : 'care';
   const rule = timeRule(warmth.celsius, menu.studio.temperatureLead);
   const before = Math.floor((allowed - setting.driveMinutes) / 15) * 15;
@@ -94,13 +92,11 @@ function arrivalAdvice({ resolved, collectAt }: Situation): Noted[] {
   ];
 }
 
-/** Longer drives than this ask for a word about the car (memory). */
-const longDriveMinutes = 45;
-
-function driveAdvice({ design, tiers }: ResolvedDesign): Noted[] {
+/** Long drives ask for a word about the car. */
+function driveAdvice({ design, tiers, menu }: ResolvedDesign): Noted[] {
   if (design.setting === null || tiers.length === 0) return [];
   const { driveMinutes } = design.setting;
-  if (driveMinutes < longDriveMinutes) return [];
+  if (driveMinutes < menu.kitchen.longDriveMinutes) return [];
   const stacked = tiers.length > 1;
   return [
     note({

@@ -1,29 +1,8 @@
 import type { CarriedPiece } from '#shared/contracts/estimates.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import { looseDecorationsG, pipedPerTier } from './piped.ts';
 import type { ResolvedBody, ResolvedDesign } from './resolve-design.ts';
-import { areaMm2, boardOf, doubleHeightMm, ledgesOf, perimeterMm, volumeMl } from './sizes.ts';
-
-/**
- * The studio's defaults. Thicknesses and the tenth for bowl and bag are from the kitchen's
- * definition; bead, dam and board figures are from trade memory, without a source.
- */
-export const amountRules = {
-  crumbCoatMm: 2,
-  finalCoatMm: 4,
-  /** The one coat that lies under fondant. */
-  underFondantMm: 3,
-  /** What stays in bowl and bag: 10 %. */
-  bowlAndBagPpm: 100_000,
-  /** Width of the ring of frosting that holds a soft filling. */
-  damMm: 10,
-  /** Bead at the foot of a smooth or textured tier, and of the borders of a piped one. */
-  footBeadMm: 8,
-  pipedBeadMm: 12,
-  boardGPerMl: 0.4,
-  cardThicknessMm: 3,
-  cardGPerMl: 0.6,
-  dummyGPerMl: 0.03,
-} as const;
+import { areaMm2, boardOf, ledgesOf, perimeterMm, volumeMl } from './sizes.ts';
 
 /** Grams of one tier, sheet or cutting cake: what is made for it, and what of that is carried. */
 export type BodyAmounts = {
@@ -69,23 +48,23 @@ function coatMl(tier: ResolvedBody, visibleTopMm2: number, thicknessMm: number):
 }
 
 /** Length times the bead's cross-section: a foot border, or foot and rim where it is piped. */
-function borderMl(tier: ResolvedBody): number {
+function borderMl(tier: ResolvedBody, rules: KitchenRules): number {
   const piped = tier.coating?.finish === 'piped';
-  const bead = piped ? amountRules.pipedBeadMm : amountRules.footBeadMm;
+  const bead = piped ? rules.pipedBeadMm : rules.footBeadMm;
   const lengthMm = perimeterMm(tier.block) * (piped ? 2 : 1);
   return (lengthMm * Math.PI * (bead / 2) ** 2) / 1000;
 }
 
 type Coats = { readonly frostingMl: number; readonly coveringMl: number };
 
-function coatsOf(tier: ResolvedBody, visibleTopMm2: number): Coats {
-  const { crumbCoatMm, finalCoatMm, underFondantMm } = amountRules;
+function coatsOf(tier: ResolvedBody, visibleTopMm2: number, rules: KitchenRules): Coats {
+  const { crumbCoatMm, finalCoatMm, underFondantMm } = rules;
   const coat = (thicknessMm: number) => coatMl(tier, visibleTopMm2, thicknessMm);
   if (tier.coating === null) return { frostingMl: 0, coveringMl: 0 };
   const { covering } = tier.coating;
   switch (covering.id) {
     case 'buttercream':
-      return { frostingMl: coat(crumbCoatMm + finalCoatMm) + borderMl(tier), coveringMl: 0 };
+      return { frostingMl: coat(crumbCoatMm + finalCoatMm) + borderMl(tier, rules), coveringMl: 0 };
     case 'semi-naked':
       return { frostingMl: coat(crumbCoatMm), coveringMl: 0 };
     case 'fondant':
@@ -103,20 +82,24 @@ type OnBody = {
   readonly pipedG: number;
 };
 
-/** Grams of one body, unrounded. */
-export function amountsOfBody(body: ResolvedBody, { visibleTopMm2, pipedG }: OnBody): BodyAmounts {
+/** Grams of one body by the studio's figures, unrounded. */
+export function amountsOfBody(
+  body: ResolvedBody,
+  { visibleTopMm2, pipedG }: OnBody,
+  rules: KitchenRules,
+): BodyAmounts {
   const { block, sponge, filling, coating } = body;
   const gaps = body.real && filling !== null ? Math.max(0, body.layers - 1) : 0;
   const thicknessMm = filling?.thicknessMm ?? 0;
   const gapMl = (gaps * areaMm2(block) * thicknessMm) / 1000;
   const damMl =
     filling?.soft === true && coating !== null
-      ? Math.min(gapMl, (gaps * perimeterMm(block) * amountRules.damMm * thicknessMm) / 1000)
+      ? Math.min(gapMl, (gaps * perimeterMm(block) * rules.damMm * thicknessMm) / 1000)
       : 0;
   const spongeG = Math.max(0, volumeMl(block) - gapMl) * (sponge?.densityGPerMl ?? 0);
   const fillingG = (gapMl - damMl) * (filling?.densityGPerMl ?? 0);
 
-  const coats = coatsOf(body, visibleTopMm2);
+  const coats = coatsOf(body, visibleTopMm2, rules);
   // Ganache has no buttercream beside it, so it makes its own dam, borders and letters.
   const alone = coating !== null && coating.style === null;
   const style = coating?.style ?? null;
@@ -125,8 +108,8 @@ export function amountsOfBody(body: ResolvedBody, { visibleTopMm2, pipedG }: OnB
   const coveringOnCakeG =
     (coats.coveringMl + (alone ? damMl : 0)) * (coating?.covering.densityGPerMl ?? 0) +
     (alone ? pipedG : 0);
-  const spare = 1 + amountRules.bowlAndBagPpm / 1e6;
-  const dummyG = body.real ? 0 : volumeMl(block) * amountRules.dummyGPerMl;
+  const spare = 1 + rules.bowlAndBagPpm / 1e6;
+  const dummyG = body.real ? 0 : volumeMl(block) * rules.dummyGPerMl;
   return {
     spongeG,
     batterG: sponge === null ? 0 : batterG(spongeG, sponge),
@@ -135,29 +118,31 @@ export function amountsOfBody(body: ResolvedBody, { visibleTopMm2, pipedG }: OnB
     frostingOnCakeG,
     coveringG: coating?.covering.id === 'ganache' ? coveringOnCakeG * spare : coveringOnCakeG,
     coveringOnCakeG,
-    carriedG: spongeG + fillingG + frostingOnCakeG + coveringOnCakeG + dummyG + cardsG(body),
+    carriedG: spongeG + fillingG + frostingOnCakeG + coveringOnCakeG + dummyG + cardsG(body, rules),
   };
 }
 
 /** The card under a tier, and the inner one of a tall tier; both are hidden and carried. */
-function cardsG({ block, real }: ResolvedBody): number {
-  const cards = real && block.heightMm > doubleHeightMm ? 2 : 1;
-  const ml = (areaMm2(block) * amountRules.cardThicknessMm) / 1000;
-  return cards * ml * amountRules.cardGPerMl;
+function cardsG({ block, real }: ResolvedBody, rules: KitchenRules): number {
+  const cards = real && block.heightMm > rules.doubleHeightMm ? 2 : 1;
+  const ml = (areaMm2(block) * rules.cardThicknessMm) / 1000;
+  return cards * ml * rules.cardGPerMl;
 }
 
 /** Grams of the whole cake and its cutting cakes, unrounded, and of each piece. */
 export function amountsOf(resolved: ResolvedDesign): CakeAmounts {
+  const rules = resolved.menu.kitchen;
   const ledges = ledgesOf(resolved.tiers.map((it) => it.block));
   const piped = pipedPerTier(resolved);
   const perTier = resolved.tiers.map((tier, index) =>
-    amountsOfBody(tier, {
-      visibleTopMm2: ledges[index]?.areaMm2 ?? 0,
-      pipedG: piped[index] ?? 0,
-    }),
+    amountsOfBody(
+      tier,
+      { visibleTopMm2: ledges[index]?.areaMm2 ?? 0, pipedG: piped[index] ?? 0 },
+      rules,
+    ),
   );
   const perCuttingCake = resolved.cuttingCakes.map((body) =>
-    amountsOfBody(body, { visibleTopMm2: areaMm2(body.block), pipedG: 0 }),
+    amountsOfBody(body, { visibleTopMm2: areaMm2(body.block), pipedG: 0 }, rules),
   );
   const sum = (kind: keyof Sums) =>
     perTier.reduce((total, it) => total + it[kind], 0) +
@@ -186,7 +171,7 @@ export function carriedWeightG(resolved: ResolvedDesign, amounts: CakeAmounts): 
   const { design, menu } = resolved;
   if (design.cake === null || resolved.tiers.length === 0) return 0;
   const board = boardOf(design.cake, menu);
-  const boardG = board === null ? 0 : volumeMl(board) * amountRules.boardGPerMl;
+  const boardG = board === null ? 0 : volumeMl(board) * menu.kitchen.boardGPerMl;
   const tiersG = amounts.perTier.reduce((sum, it) => sum + it.carriedG, 0);
   return Math.round(tiersG + boardG + looseDecorationsG(resolved));
 }

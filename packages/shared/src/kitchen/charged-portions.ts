@@ -20,6 +20,6 @@ export function chargedPortions(body: ResolvedBody, kind: 'tiered' | 'sheet', me
   if (!body.real) return 0;
   const portion = pricePortion(menu);
   return kind === 'tiered'
-    ? portionsOfBlock(body.block, portion)
+    ? portionsOfBlock(body.block, portion, menu.kitchen)
     : portionsOfSheet({ id: '', name: '', ...body.block }, portion);
 }

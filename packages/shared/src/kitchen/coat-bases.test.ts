@@ -4,7 +4,9 @@ import { menuFixture } from './testing/menu-fixture.ts';
 
 const bases = coatBases(menuFixture, 'german');
 const reachOf = (wanted: string) =>
-  Object.fromEntries(tryOnCoats(wanted, bases).map(({ base, tint }) => [base.id, tint.reach]));
+  Object.fromEntries(
+    tryOnCoats(wanted, bases, menuFixture).map(({ base, tint }) => [base.id, tint.reach]),
+  );
 
 describe('a colour on every coat', () => {
   it('is tried on the six buttercreams, on fondant over the chosen one, and on ganache', () => {
@@ -46,7 +48,9 @@ describe('a colour on every coat', () => {
   });
 
   it('lists the nearest first', () => {
-    const differences = tryOnCoats('#f5d3cf', bases).map(({ tint }) => tint.difference);
+    const differences = tryOnCoats('#f5d3cf', bases, menuFixture).map(
+      ({ tint }) => tint.difference,
+    );
     expect(differences).toEqual(differences.toSorted((a, b) => a - b));
   });
 });

@@ -40,8 +40,12 @@ export function coatBases(menu: Menu, under: StyleId | null): CoatBase[] {
 export type TriedColour = { readonly base: CoatBase; readonly tint: ReachedTint };
 
 /** A wanted colour on each of the coats, the one that comes nearest first. */
-export function tryOnCoats(wanted: string, bases: readonly CoatBase[]): TriedColour[] {
+export function tryOnCoats(
+  wanted: string,
+  bases: readonly CoatBase[],
+  { kitchen }: Menu,
+): TriedColour[] {
   return bases
-    .map((base) => ({ base, tint: reachableTint(wanted, base.colour) }))
+    .map((base) => ({ base, tint: reachableTint(wanted, base.colour, kitchen) }))
     .sort((a, b) => a.tint.difference - b.tint.difference);
 }

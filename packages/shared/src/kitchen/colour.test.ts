@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { usualKitchen } from '#shared/contracts/kitchen-rules.ts';
 import { colourDifference, colourPicks, reachableTint } from './colour.ts';
 import { styles } from './testing/menu-parts-fixture.ts';
 import { sharmaPairs } from './testing/sharma-pairs.ts';
@@ -30,7 +31,11 @@ describe('the difference of two colours', () => {
 
 describe('a wanted colour on a base', () => {
   it('does not come as a clean pale blue on bright yellow, but turns green', () => {
-    const { reach, reached, difference } = reachableTint('#bcd7ea', styleColour('french'));
+    const { reach, reached, difference } = reachableTint(
+      '#bcd7ea',
+      styleColour('french'),
+      usualKitchen,
+    );
     expect(reach).toBe('not-on-this-base');
     expect(difference).toBeGreaterThan(20);
     const [red, green, blue] = [1, 3, 5].map((at) =>
@@ -43,7 +48,11 @@ describe('a wanted colour on a base', () => {
   it('is close under 3, shifts under 10 and does not come from 10 on', () => {
     const greys = Array.from({ length: 60 }, (_, at) => (255 - at).toString(16));
     for (const grey of greys) {
-      const { difference, reach } = reachableTint('#ffffff', `#${grey}${grey}${grey}`);
+      const { difference, reach } = reachableTint(
+        '#ffffff',
+        `#${grey}${grey}${grey}`,
+        usualKitchen,
+      );
       expect(reach).toBe(
         difference < 3 ? 'close' : difference < 10 ? 'shifts' : 'not-on-this-base',
       );
@@ -52,7 +61,7 @@ describe('a wanted colour on a base', () => {
 
   it('comes close on any base where it is deep', () => {
     for (const { colour } of bases) {
-      expect(reachableTint('#2d4372', colour).reach).toBe('close');
+      expect(reachableTint('#2d4372', colour, usualKitchen).reach).toBe('close');
     }
   });
 
@@ -62,7 +71,7 @@ describe('a wanted colour on a base', () => {
       .map((it) => `#${it.toString(16).padStart(6, '0')}`);
     fc.assert(
       fc.property(hex, fc.constantFrom(...bases), (wanted, base) => {
-        const { reached } = reachableTint(wanted, base.colour);
+        const { reached } = reachableTint(wanted, base.colour, usualKitchen);
         for (const at of [1, 3, 5]) {
           const channel = (it: string) => Number.parseInt(it.slice(at, at + 2), 16);
           expect(channel(reached)).toBeLessThanOrEqual(channel(base.colour));
@@ -75,7 +84,9 @@ describe('a wanted colour on a base', () => {
   it('of our picks all come on plain white, and most on bright yellow do not', () => {
     const coming = (base: string) =>
       colourPicks
-        .filter(({ colour }) => reachableTint(colour, base).reach !== 'not-on-this-base')
+        .filter(
+          ({ colour }) => reachableTint(colour, base, usualKitchen).reach !== 'not-on-this-base',
+        )
         .map(({ name }) => name);
     expect(coming('#ffffff')).toHaveLength(colourPicks.length);
     expect(coming(styleColour('french'))).toContain('Fir');

@@ -8,6 +8,7 @@ import {
   useMode,
   type Color,
 } from 'culori/fn';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 
 useMode(modeRgb);
 useMode(modeLab65);
@@ -16,9 +17,11 @@ const toLinear = useMode(modeLrgb);
 /** CIEDE2000 with its standard weights, in CIELAB under D65. */
 const difference = differenceCiede2000();
 
-/** Under 3 the eye takes it for the wanted colour; under 10 it is the same name, shifted. */
-const closeBelow = 3;
-const shiftsBelow = 10;
+/**
+ * Under which difference a colour comes `close` (3: the eye takes it for the wanted one), and under
+ * which it `shifts` (10: the same name still).
+ */
+type ReachRule = Pick<KitchenRules, 'closeBelow' | 'shiftsBelow'>;
 
 export type Reach = 'close' | 'shifts' | 'not-on-this-base';
 
@@ -52,7 +55,11 @@ function colourOf(hex: string): Color {
  * out green, as dyed yolk does), and nothing comes whiter than the base is. Of real dyes, which
  * take a little of every light, this is the best that can be hoped for.
  */
-export function reachableTint(wanted: string, base: string): ReachedTint {
+export function reachableTint(
+  wanted: string,
+  base: string,
+  { closeBelow, shiftsBelow }: ReachRule,
+): ReachedTint {
   const aim = toLinear(colourOf(wanted));
   const start = toLinear(colourOf(base));
   const reached = formatHex({

@@ -60,6 +60,7 @@ export function evaluateDesign(request: EstimateRequest, menu: Menu, today: stri
       setting: design.setting,
       warmestC: table.warmth?.celsius ?? null,
       studio: menu.studio,
+      rules: menu.kitchen,
       widestMm: widestEatenMm(resolved),
       collectAt,
       perishable: resolved.tiers.length === 0 || isPerishable(resolved),

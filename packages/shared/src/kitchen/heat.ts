@@ -1,9 +1,7 @@
 import type { Setting } from '#shared/contracts/design.ts';
-import type { ButtercreamStyle, Covering, StudioCard } from '#shared/contracts/menu.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
+import type { ButtercreamStyle, Covering, Menu } from '#shared/contracts/menu.ts';
 import type { AdviceLevel } from '#shared/contracts/vocabulary.ts';
-
-/** At least so far under a limit is `ok`; from there up to the limit is `care`. */
-export const heatMarginC = 3;
 
 /** What the cake will meet, and whether the customer knows it or the studio reckons it. */
 export type Warmth = {
@@ -16,28 +14,36 @@ export type Warmth = {
 /** Without a figure of the studio's own for a month. */
 const unmeasuredC = 27;
 
-/** People keep rooms at 22 °C / 72 °F or so, however cold the day: common practice, no source. */
-export const usualRoomC = 22;
-
 /**
  * The warmest a setting will get. "Don't know" takes the studio's figure for the month of the
  * day, indoors no less than a heated room; while no day is chosen, that of its warmest month.
  */
-export function warmthOf(setting: Setting, studio: StudioCard, date: string | null): Warmth {
+export function warmthOf(
+  setting: Setting,
+  { studio, kitchen }: Pick<Menu, 'studio' | 'kitchen'>,
+  date: string | null,
+): Warmth {
   if (setting.warmestC !== null) return { celsius: setting.warmestC, known: true, month: null };
   const figures = studio.monthlyWarmestC;
   if (date !== null) {
     const month = Number(date.slice(5, 7));
     const outdoors = figures[month - 1] ?? unmeasuredC;
-    const celsius = setting.place === 'indoors' ? Math.max(outdoors, usualRoomC) : outdoors;
+    const celsius = setting.place === 'indoors' ? Math.max(outdoors, kitchen.usualRoomC) : outdoors;
     return { celsius, known: false, month };
   }
   const celsius = figures.length === 0 ? unmeasuredC : Math.max(...figures);
   return { celsius, known: false, month: null };
 }
 
-/** `ok` at least 3 °C under the limit, `care` up to it, `stop` above. */
-export function fareInHeat(limitC: number, warmestC: number): AdviceLevel {
+/** How far under a limit counts as `ok`. */
+type MarginRule = Pick<KitchenRules, 'heatMarginC'>;
+
+/** `ok` by the studio's margin under the limit (3 °C), `care` up to it, `stop` above. */
+export function fareInHeat(
+  limitC: number,
+  warmestC: number,
+  { heatMarginC }: MarginRule,
+): AdviceLevel {
   if (warmestC > limitC) return 'stop';
   return warmestC > limitC - heatMarginC ? 'care' : 'ok';
 }
@@ -54,9 +60,14 @@ export function coatLimitC(coat: {
 }
 
 /** How a coat fares: heat, direct sun (always a stop), and a figure nobody knows (never `ok`). */
-export function fareOfCoat(limitC: number, setting: Setting, warmth: Warmth): AdviceLevel {
+export function fareOfCoat(
+  limitC: number,
+  setting: Setting,
+  warmth: Warmth,
+  rules: MarginRule,
+): AdviceLevel {
   if (setting.place === 'sun') return 'stop';
-  const fare = fareInHeat(limitC, warmth.celsius);
+  const fare = fareInHeat(limitC, warmth.celsius, rules);
   return fare === 'ok' && !warmth.known ? 'care' : fare;
 }
 

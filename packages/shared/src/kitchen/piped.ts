@@ -5,9 +5,6 @@ import { perimeterMm } from './sizes.ts';
 /** A border's own weight is told for a round of 8 in, 203 mm; others go by their length. */
 const borderToldForMm = Math.PI * 203;
 
-/** Piped lettering: a bead of 3 mm and some 150 mm of it a letter (memory), grams. */
-const gramsALetter = 1;
-
 /**
  * Whether a decoration is piped from the tier's own coat: a border with no ingredients of its own.
  * What is in it is then counted with that coat, in contents and in grams.
@@ -29,7 +26,7 @@ export function timesOf({ placed, decoration }: ResolvedDecoration, tiers: numbe
 }
 
 /** Grams of piped decorations and lettering on each tier from the board up, on the cake. */
-export function pipedPerTier({ tiers, decorations, design }: ResolvedDesign): number[] {
+export function pipedPerTier({ tiers, decorations, design, menu }: ResolvedDesign): number[] {
   const grams = tiers.map(() => 0);
   const add = (tier: number, g: number) => {
     const at = Math.min(tier, tiers.length - 1);
@@ -44,7 +41,7 @@ export function pipedPerTier({ tiers, decorations, design }: ResolvedDesign): nu
   }
   if (tiers.length > 0) {
     for (const { tier, text } of design.look?.words ?? []) {
-      add(tier, text.replaceAll(/\s/gu, '').length * gramsALetter);
+      add(tier, text.replaceAll(/\s/gu, '').length * menu.kitchen.letterG);
     }
   }
   return grams;

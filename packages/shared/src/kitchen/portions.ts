@@ -46,6 +46,6 @@ export function countPortions(design: Design, menu: Menu): PortionCount {
 
 function portionsServed({ cake }: Design, menu: Menu, size: PortionSize): number[] {
   if (cake === null) return [];
-  if (cake.kind === 'tiered') return portionsPerTier(cake.tiers, size);
+  if (cake.kind === 'tiered') return portionsPerTier(cake.tiers, size, menu.kitchen);
   return cake.sheet === null ? [] : [portionsOfSheet(sheetSizeOf(cake.sheet, menu), size)];
 }

@@ -6,7 +6,7 @@ import { priceDesign } from './price.ts';
 import { cakeOfProposal, proposeCakes } from './propose-cakes.ts';
 import { proposeStacks, tiersOf, usualLayers } from './proposals.ts';
 import { resolveDesign } from './resolve-design.ts';
-import { portionsPerTier, smallestStepMm } from './sizes.ts';
+import { portionsPerTier } from './sizes.ts';
 import { declares, designWith, roundTier, swissCoat } from './testing/design-fixture.ts';
 import { menuFixture as menu } from './testing/menu-fixture.ts';
 
@@ -21,8 +21,15 @@ describe('proposed stacks', () => {
       fc.property(fc.integer({ min: 1, max: 250 }), anySize, (wanted, portion) => {
         const stacks = proposeStacks(wanted, menu, portion);
         for (const stack of stacks) {
-          const tiers = tiersOf(stack, { spongeId: 'vanilla', fillingId: 'raspberry' });
-          const fed = portionsPerTier(tiers, portion).reduce((sum, it) => sum + it, 0);
+          const tiers = tiersOf(
+            stack,
+            { spongeId: 'vanilla', fillingId: 'raspberry' },
+            menu.kitchen,
+          );
+          const fed = portionsPerTier(tiers, portion, menu.kitchen).reduce(
+            (sum, it) => sum + it,
+            0,
+          );
           expect(fed).toBe(stack.portions);
           expect(fed).toBeGreaterThanOrEqual(wanted);
           for (const [index, tier] of tiers.entries()) {
@@ -34,7 +41,7 @@ describe('proposed stacks', () => {
             const above = tiers[index + 1];
             if (above === undefined) continue;
             // Tins kept in whole millimetres lose up to one in a step of two inches.
-            expect(tier.widthMm - above.widthMm).toBeGreaterThanOrEqual(smallestStepMm - 1);
+            expect(tier.widthMm - above.widthMm).toBeGreaterThanOrEqual(50 - 1);
           }
         }
       }),
@@ -65,7 +72,7 @@ describe('proposed stacks', () => {
   });
 
   it('have layers that go with their height', () => {
-    expect([75, 102, 127, 152].map(usualLayers)).toEqual([2, 3, 3, 4]);
+    expect([75, 102, 127, 152].map((it) => usualLayers(it, menu.kitchen))).toEqual([2, 3, 3, 4]);
   });
 });
 

@@ -1,9 +1,10 @@
 import type { Tier } from '#shared/contracts/design.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { Menu, PortionSize, TierSize } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { lengthFigure } from './measures.ts';
 import { countOf } from './sentences.ts';
-import { doubleHeightMm, portionsOfBlock, smallestStepMm } from './sizes.ts';
+import { decksOf, portionsOfBlock, type TallRule } from './sizes.ts';
 
 /** A stack of the studio's tins, from the board up, and how many it feeds. */
 export type Stack = {
@@ -31,19 +32,6 @@ export type StackWish = {
 /** A round cake that is all eaten. */
 export const plainWish: StackWish = { keepTop: false, shape: 'round' };
 
-/** The look of a stack: tiers within these steps of one another, and no more than this many. */
-const largestStepMm = 130;
-const mostTiers = 6;
-
-/** A tier to keep is small: nobody stores a large one for a year (memory). */
-const largestKeepsakeMm = 160;
-
-/** The usual height of a tier, 4 in; the size's nearest is taken. */
-const usualHeightMm = 102;
-
-/** "Some over" has this much more than wanted, at least. */
-const someOver = 1.1;
-
 /** A millimetre lost between inches and millimetres is not a smaller step. */
 const roundingMm = 1;
 
@@ -69,16 +57,18 @@ export function stacksOf(menu: Menu, portion: PortionSize, wish: StackWish): rea
 }
 
 function enumerate(menu: Menu, portion: PortionSize, { keepTop, shape }: StackWish): Stack[] {
+  const { kitchen } = menu;
+  const { smallestStepMm, largestStepMm, mostTiers } = kitchen;
   const wished = menu.tierSizes.filter((it) => it.shape === shape);
   const even = menu.tierSizes.filter((it) => it.shape !== 'rectangle');
   const widestFirst = (wished.length > 0 ? wished : even).toSorted((a, b) => b.widthMm - a.widthMm);
-  const largestKept = Math.max(largestKeepsakeMm, widestFirst.at(-1)?.widthMm ?? 0);
+  const largestKept = Math.max(kitchen.largestKeepsakeMm, widestFirst.at(-1)?.widthMm ?? 0);
   const isKept = (sizes: readonly TierSize[]) =>
     sizes.length > 1 && (sizes.at(-1)?.widthMm ?? 0) <= largestKept;
   const stacks: Stack[] = [];
   const grow = (sizes: readonly TierSize[], from: number) => {
     if (sizes.length > 0 && (!keepTop || isKept(sizes))) {
-      stacks.push(...atHeights(sizes, portion, keepTop));
+      stacks.push(...atHeights(sizes, portion, keepTop, kitchen));
     }
     if (sizes.length === mostTiers) return;
     const top = sizes.at(-1);
@@ -96,7 +86,13 @@ function enumerate(menu: Menu, portion: PortionSize, { keepTop, shape }: StackWi
 }
 
 /** A stack at the usual height, and again with double tiers for tables that need more. */
-function atHeights(sizes: readonly TierSize[], portion: PortionSize, keepTop: boolean): Stack[] {
+function atHeights(
+  sizes: readonly TierSize[],
+  portion: PortionSize,
+  keepTop: boolean,
+  rules: KitchenRules,
+): Stack[] {
+  const { usualHeightMm, doubleHeightMm } = rules;
   const common = (sizes[0]?.heightsMm ?? []).filter((height) =>
     sizes.every((it) => it.heightsMm.includes(height)),
   );
@@ -120,18 +116,18 @@ function atHeights(sizes: readonly TierSize[], portion: PortionSize, keepTop: bo
             keepTop,
             portions: sizes
               .slice(0, keepTop ? -1 : undefined)
-              .reduce((sum, it) => sum + portionsOfBlock({ ...it, heightMm }, portion), 0),
+              .reduce((sum, it) => sum + portionsOfBlock({ ...it, heightMm }, portion, rules), 0),
           },
         ],
   );
 }
 
-/** How many tiers look right for a table (memory). */
-export function usualTiers(wanted: number): number {
-  if (wanted <= 28) return 1;
-  if (wanted <= 60) return 2;
-  if (wanted <= 120) return 3;
-  return wanted <= 200 ? 4 : 5;
+/** How many tiers look right for a table, by the studio's figures. */
+export function usualTiers(wanted: number, rules: KitchenRules): number {
+  if (wanted <= rules.oneTierPortions) return 1;
+  if (wanted <= rules.twoTierPortions) return 2;
+  if (wanted <= rules.threeTierPortions) return 3;
+  return wanted <= rules.fourTierPortions ? 4 : 5;
 }
 
 /**
@@ -146,10 +142,11 @@ export function proposeStacks(
   portion: PortionSize,
   wish: StackWish = plainWish,
 ): ProposedStack[] {
+  const { kitchen } = menu;
   const enough = stacksOf(menu, portion, wish).filter((it) => it.portions >= wanted);
-  const single = enough.filter((it) => it.heightMm <= doubleHeightMm);
+  const single = enough.filter((it) => decksOf(it, kitchen) === 1);
   const usable = single.length > 0 ? single : enough;
-  const tiers = usualTiers(wanted);
+  const tiers = usualTiers(wanted, kitchen);
   const offBy = (it: Stack) => Math.abs(it.sizes.length - tiers);
   // Waste first; between stacks that waste much the same, the more usual number of tiers.
   const slack = Math.max(2, Math.round(wanted * 0.05));
@@ -163,7 +160,7 @@ export function proposeStacks(
   const just = best(wanted, usable);
   if (just === undefined) return [];
   const over = best(
-    Math.max(just.portions + 1, Math.ceil(wanted * someOver)),
+    Math.max(just.portions + 1, Math.ceil(wanted * (1 + kitchen.someOverPpm / 1e6))),
     usable.filter((it) => it.sizes.length === just.sizes.length),
   );
   const other = best(
@@ -202,22 +199,23 @@ export function nameOfStack({ sizes, keepTop }: Stack, menu: Menu): string {
 }
 
 /** Layers of sponge for a height: one for about every 35 mm, an even number when cut double. */
-export function usualLayers(heightMm: number): number {
+export function usualLayers(heightMm: number, rules: TallRule): number {
   if (heightMm <= 90) return 2;
-  return heightMm <= doubleHeightMm ? 3 : 4;
+  return decksOf({ heightMm }, rules) === 1 ? 3 : 4;
 }
 
 /** The tiers of a stack as they stand in a design. */
 export function tiersOf(
   stack: Stack,
   inside: { readonly spongeId: string | null; readonly fillingId: string | null },
+  rules: TallRule,
 ): Tier[] {
   return stack.sizes.map(({ shape, widthMm, depthMm }, index) => ({
     shape,
     widthMm,
     depthMm,
     heightMm: stack.heightMm,
-    layers: usualLayers(stack.heightMm),
+    layers: usualLayers(stack.heightMm, rules),
     real: true,
     keepsake: stack.keepTop && index === stack.sizes.length - 1,
     spongeId: inside.spongeId,

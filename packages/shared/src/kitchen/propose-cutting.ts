@@ -9,7 +9,7 @@ import {
   type StackWish,
 } from './proposals.ts';
 import { cuttingWords } from './sentences.ts';
-import { doubleHeightMm, portionsOfSheet } from './sizes.ts';
+import { decksOf, portionsOfSheet } from './sizes.ts';
 
 /** So many sheets of one size, cut in the kitchen. */
 type Cut = { readonly size: SheetSize; readonly count: number; readonly portions: number };
@@ -34,20 +34,8 @@ export type ProposedSheet = {
   readonly cut: Cut | null;
 };
 
-/** Smaller tables see the whole cake cut (memory). */
-const fewestForCutting = 80;
-
-/** What the cake on show feeds of the whole, at least, at most and best (memory). */
-const showShare = { least: 0.3, most: 0.75, best: 0.5 } as const;
-
-/** A cake that is only for show and a first cut has this many tiers at least (memory). */
-const fewestOnShow = 3;
-
 /** No more than this many of one kind in an order. */
 const mostOfOneKind = 100;
-
-/** A sheet that leaves more than this is no sensible choice for so few. */
-const sheetWaste = { share: 1.35, portions: 8 } as const;
 
 /** The sheets of one size that feed a number with the least waste, then the fewest of them. */
 export function sheetsFor(wanted: number, menu: Menu, portion: PortionSize): Cut | null {
@@ -81,8 +69,15 @@ export function proposeShows(
   portion: PortionSize,
   { alone, ...wish }: StackWish & { readonly alone: boolean },
 ): ProposedShow[] {
-  if (alone && wanted < fewestForCutting) return [];
-  const stacks = stacksOf(menu, portion, wish).filter((it) => it.heightMm <= doubleHeightMm);
+  const { kitchen } = menu;
+  const showShare = {
+    least: kitchen.showLeastPpm / 1e6,
+    most: kitchen.showMostPpm / 1e6,
+    best: kitchen.showBestPpm / 1e6,
+  };
+  const fewestOnShow = kitchen.fewestTiersOnShow;
+  if (alone && wanted < kitchen.cuttingFromPortions) return [];
+  const stacks = stacksOf(menu, portion, wish).filter((it) => decksOf(it, kitchen) === 1);
   const largest = stacks.at(-1)?.portions ?? 0;
   const least = Math.min(wanted * showShare.least, largest * 0.5);
   const most = wanted * showShare.most;
@@ -102,7 +97,7 @@ export function proposeShows(
     (it.portions - wanted) / slack +
     it.cut.count * 0.5 +
     (Math.abs(it.stack.portions - ideal) / Math.max(1, ideal)) * 2;
-  const usual = Math.max(fewestOnShow, usualTiers(wanted * showShare.best));
+  const usual = Math.max(fewestOnShow, usualTiers(wanted * showShare.best, kitchen));
   const grand = best(usual) ?? best(usual - 1) ?? best(usual + 1);
   if (grand === null) return [];
   if (alone) return [grand];
@@ -139,7 +134,8 @@ export function proposeSheet(
     .map((size) => ({ size, each: portionsOfSheet(size, portion) }))
     .filter((it) => it.each > 0)
     .toSorted((a, b) => a.each - b.each);
-  const most = Math.max(wanted * sheetWaste.share, wanted + sheetWaste.portions);
+  const { sheetOverPpm, sheetOverPortions } = menu.kitchen;
+  const most = Math.max(wanted * (1 + sheetOverPpm / 1e6), wanted + sheetOverPortions);
   const single = bySize.find((it) => it.each >= wanted && it.each <= most);
   if (single !== undefined) return describeSheet(single.size, single.each, null);
   const shown = bySize.findLast((it) => it.each < wanted);

@@ -61,7 +61,7 @@ function judgeHeat(
 ): { level: AdviceLevel; sentence: string } {
   const { setting } = resolved.design;
   if (setting === null || warmth === null) return { level: 'ok', sentence: `Holds to ${limit}.` };
-  const level = fareOfCoat(limitC, setting, warmth);
+  const level = fareOfCoat(limitC, setting, warmth, resolved.menu.kitchen);
   if (setting.place === 'sun') {
     return { level, sentence: `No coat lasts in direct sun; this one holds to ${limit} in shade.` };
   }

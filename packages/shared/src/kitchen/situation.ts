@@ -49,7 +49,7 @@ export function tableOf(
     resolved,
     ...when,
     parts,
-    warmth: setting === null ? null : warmthOf(setting, resolved.menu.studio, when.date),
+    warmth: setting === null ? null : warmthOf(setting, resolved.menu, when.date),
     guestClashes: guestClashesOf(resolved),
   };
 }

@@ -20,6 +20,8 @@ import { designFixture, roundTier } from './testing/design-fixture.ts';
 import { menuFixture } from './testing/menu-fixture.ts';
 import { UnknownPart } from './unknown-part.ts';
 
+const { kitchen } = menuFixture;
+
 const round = (inches: number, high: number): Block => ({
   shape: 'round',
   widthMm: inchesToMm(inches),
@@ -66,8 +68,8 @@ describe('portions', () => {
     expect(bound(oneByTwo)).toBeCloseTo(narrow, 1);
     expect(bound(oneAndAHalfByTwo)).toBeCloseTo(wide, 1);
     for (const portion of [oneByTwo, oneAndAHalfByTwo]) {
-      expect(portionsOfBlock(block, portion)).toBeLessThanOrEqual(bound(portion));
-      expect(portionsOfBlock(block, portion)).toBeGreaterThan(bound(portion) - 3);
+      expect(portionsOfBlock(block, portion, kitchen)).toBeLessThanOrEqual(bound(portion));
+      expect(portionsOfBlock(block, portion, kitchen)).toBeGreaterThan(bound(portion) - 3);
     }
   });
 
@@ -103,7 +105,7 @@ describe('portions', () => {
       fc.property(blocks, fc.constantFrom(...menuFixture.portionSizes), (raw, portion) => {
         const block = raw.shape === 'rectangle' ? raw : { ...raw, depthMm: raw.widthMm };
         const decks = block.heightMm > 130 ? 2 : 1;
-        expect(portionsOfBlock(block, portion)).toBeLessThanOrEqual(
+        expect(portionsOfBlock(block, portion, kitchen)).toBeLessThanOrEqual(
           (decks * areaMm2(block)) / (portion.widthMm * portion.depthMm),
         );
       }),
@@ -112,7 +114,8 @@ describe('portions', () => {
 
   it('cuts a tier over 130 mm high two portions deep', () => {
     const portion = { widthMm: 25, depthMm: 50 };
-    const at = (heightMm: number) => portionsOfBlock({ ...round(8, 4), heightMm }, portion);
+    const at = (heightMm: number) =>
+      portionsOfBlock({ ...round(8, 4), heightMm }, portion, kitchen);
     expect(at(131)).toBe(2 * at(130));
   });
 
@@ -122,7 +125,7 @@ describe('portions', () => {
       roundTier(8, { real: false, spongeId: null, fillingId: null }),
       roundTier(6, { keepsake: true }),
     ];
-    expect(portionsPerTier(tiers, { widthMm: 25, depthMm: 50 })).toEqual([39, 0, 0]);
+    expect(portionsPerTier(tiers, { widthMm: 25, depthMm: 50 }, kitchen)).toEqual([39, 0, 0]);
   });
 });
 

@@ -1,4 +1,5 @@
 import type { Cake, Sheet, Tier } from '#shared/contracts/design.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { Menu, PortionSize, SheetSize } from '#shared/contracts/menu.ts';
 import type { Shape } from '#shared/contracts/vocabulary.ts';
 import { UnknownPart } from './unknown-part.ts';
@@ -13,16 +14,6 @@ export type Block = {
 
 /** What is cut: width along the ring or row, depth towards the middle, millimetres. */
 export type Footprint = Pick<PortionSize, 'widthMm' | 'depthMm'>;
-
-/** Above this height a tier has an inner board and is cut two portions deep. */
-export const doubleHeightMm = 130;
-
-/** Steps between stacked tiers, edge to edge across the cake, at least this much. */
-export const smallestStepMm = 50;
-
-/** The board shows this much all round the lowest tier, so that hands can lift it. */
-const boardMarginMm = 50;
-const boardThicknessMm = 12;
 
 /** Sums of quotients can fall a hair short of a whole number; half a millionth is not cake. */
 const hair = 1e-9;
@@ -87,9 +78,17 @@ export function cutGrid(
   return straight.columns * straight.rows >= turned.columns * turned.rows ? straight : turned;
 }
 
+/** How a tall tier is told from others. */
+export type TallRule = Pick<KitchenRules, 'doubleHeightMm'>;
+
+/** Decks a block is cut in: two where an inner board divides a tall tier. */
+export function decksOf({ heightMm }: Pick<Block, 'heightMm'>, rules: TallRule): 1 | 2 {
+  return heightMm > rules.doubleHeightMm ? 2 : 1;
+}
+
 /** Portions a block gives when it is all cut, by the cutting plan. */
-export function portionsOfBlock(block: Block, portion: Footprint): number {
-  const decks = block.heightMm > doubleHeightMm ? 2 : 1;
+export function portionsOfBlock(block: Block, portion: Footprint, rules: TallRule): number {
+  const decks = decksOf(block, rules);
   if (block.shape === 'round') {
     return decks * cutRound(block.widthMm, portion).reduce((sum, ring) => sum + ring.pieces, 0);
   }
@@ -112,8 +111,14 @@ export function portionsOfSheet(size: SheetSize, portion: Footprint): number {
 }
 
 /** Portions served per tier from the board up; keepsakes and dummies are kept out of it. */
-export function portionsPerTier(tiers: readonly Tier[], portion: Footprint): number[] {
-  return tiers.map((tier) => (tier.real && !tier.keepsake ? portionsOfBlock(tier, portion) : 0));
+export function portionsPerTier(
+  tiers: readonly Tier[],
+  portion: Footprint,
+  rules: TallRule,
+): number[] {
+  return tiers.map((tier) =>
+    tier.real && !tier.keepsake ? portionsOfBlock(tier, portion, rules) : 0,
+  );
 }
 
 /**
@@ -149,9 +154,13 @@ export function blockOfSheet({ widthMm, depthMm, heightMm }: SheetSize): Block {
   return { shape: 'rectangle', widthMm, depthMm, heightMm };
 }
 
-/** The board the cake stands on; null while there is no cake. Throws `UnknownPart`. */
+/**
+ * The board the cake stands on, wide enough all round for hands to lift it; null while there is no cake. Throws
+ * `UnknownPart`.
+ */
 export function boardOf(cake: Cake, menu: Menu): Block | null {
   const blocks = blocksOf(cake, menu);
+  const { boardMarginMm, boardThicknessMm } = menu.kitchen;
   const lowest = blocks[0];
   if (lowest === undefined) return null;
   return {

@@ -17,16 +17,18 @@ export function supportRows(cake: Cake, menu: Menu): SupportRow[] {
   const board = boardOf(cake, menu);
   const blocks = blocksOf(cake, menu);
   const bodies = blocks.map((block, at) => ({ block, real: cake.tiers[at]?.real ?? true }));
-  const rows = supportsOf(bodies).perTier.map(({ tier, board: card, innerBoard, dowels }) => {
-    const lines = [
-      ...(card === null ? [] : [`On a card of its own size, ${sizeOf(card, lead)}.`]),
-      ...(innerBoard === null
-        ? []
-        : [`A board inside, ${formatLength(innerBoard.atMm, lead)} above its foot.`]),
-      ...dowels.map((it) => dowelWords(it, lead)),
-    ];
-    return { name: tierName(tier, bodies.length), lines };
-  });
+  const rows = supportsOf(bodies, menu.kitchen).perTier.map(
+    ({ tier, board: card, innerBoard, dowels }) => {
+      const lines = [
+        ...(card === null ? [] : [`On a card of its own size, ${sizeOf(card, lead)}.`]),
+        ...(innerBoard === null
+          ? []
+          : [`A board inside, ${formatLength(innerBoard.atMm, lead)} above its foot.`]),
+        ...dowels.map((it) => dowelWords(it, lead)),
+      ];
+      return { name: tierName(tier, bodies.length), lines };
+    },
+  );
   const whole =
     board === null ? [] : [{ name: 'Cake board', lines: [`${capitalise(sizeOf(board, lead))}.`] }];
   return [...whole, ...rows.filter((it) => it.lines.length > 0)];

@@ -7,7 +7,7 @@ import { designWith, roundTier } from './testing/design-fixture.ts';
 import { menuFixture as menu } from './testing/menu-fixture.ts';
 
 const supports = (tiers: ReturnType<typeof roundTier>[]) =>
-  supportsOf(resolveDesign(designWith({ cake: { tiers } }), menu).tiers);
+  supportsOf(resolveDesign(designWith({ cake: { tiers } }), menu).tiers, menu.kitchen);
 
 describe('boards and dowels', () => {
   it('are none in a cake of one usual tier', () => {
@@ -46,7 +46,7 @@ describe('boards and dowels', () => {
     fc.assert(
       fc.property(arbitraryDesign, (design) => {
         const { tiers } = resolveDesign(design, menu);
-        for (const { tier, dowels } of supportsOf(tiers).perTier) {
+        for (const { tier, dowels } of supportsOf(tiers, menu.kitchen).perTier) {
           for (const set of dowels) {
             const borne = tiers[set.bears === 'tier-above' ? tier + 1 : tier]?.block;
             expect(set.at).toHaveLength(set.count);

@@ -1,5 +1,6 @@
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { ResolvedTier } from './resolve-design.ts';
-import { doubleHeightMm, type Block } from './sizes.ts';
+import { decksOf, type Block } from './sizes.ts';
 
 type Base = Pick<Block, 'shape' | 'widthMm' | 'depthMm'>;
 
@@ -33,21 +34,17 @@ export type Supports = {
   readonly perTier: readonly TierSupports[];
 };
 
-/** A dowel for so much of the width it bears, and never fewer than four (memory). */
-const mmPerDowel = 40;
-const fewestDowels = 4;
-
-/** Dowels stand this far out under what they bear (memory). */
-const shareOfWidth = 0.7;
-
 /**
  * Boards and dowels of a stacked cake, and the inner board of each tall tier with the dowels under
  * it. Foam bears what stands on it: a dummy has no dowels and no inner board.
  */
-export function supportsOf(tiers: readonly Pick<ResolvedTier, 'block' | 'real'>[]): Supports {
+export function supportsOf(
+  tiers: readonly Pick<ResolvedTier, 'block' | 'real'>[],
+  rules: KitchenRules,
+): Supports {
   const perTier = tiers.map(({ block, real }, tier): TierSupports => {
     const { shape, widthMm, depthMm, heightMm } = block;
-    const tall = real && heightMm > doubleHeightMm;
+    const tall = real && decksOf(block, rules) === 2;
     const above = tiers[tier + 1]?.block;
     const lengthMm = tall ? heightMm / 2 : heightMm;
     return {
@@ -55,8 +52,8 @@ export function supportsOf(tiers: readonly Pick<ResolvedTier, 'block' | 'real'>[
       board: tier === 0 ? null : { shape, widthMm, depthMm },
       innerBoard: tall ? { shape, widthMm, depthMm, atMm: heightMm / 2 } : null,
       dowels: [
-        ...(tall ? [dowelsUnder('inner-board', block, lengthMm)] : []),
-        ...(real && above !== undefined ? [dowelsUnder('tier-above', above, lengthMm)] : []),
+        ...(tall ? [dowelsUnder('inner-board', block, lengthMm, rules)] : []),
+        ...(real && above !== undefined ? [dowelsUnder('tier-above', above, lengthMm, rules)] : []),
       ],
     };
   });
@@ -68,18 +65,27 @@ export function supportsOf(tiers: readonly Pick<ResolvedTier, 'block' | 'real'>[
   };
 }
 
-function dowelsUnder(bears: DowelSet['bears'], base: Base, lengthMm: number): DowelSet {
+function dowelsUnder(
+  bears: DowelSet['bears'],
+  base: Base,
+  lengthMm: number,
+  { mmPerDowel, fewestDowels, dowelReachPpm }: KitchenRules,
+): DowelSet {
   const count = Math.max(
     fewestDowels,
     Math.round(Math.max(base.widthMm, base.depthMm) / mmPerDowel),
   );
-  return { bears, count, lengthMm, at: placesUnder(base, count) };
+  return { bears, count, lengthMm, at: placesUnder(base, count, dowelReachPpm / 1e6) };
 }
 
 /** Evenly on a ring under a round, on a frame under a square or rectangle. */
-function placesUnder({ shape, widthMm, depthMm }: Base, count: number): DowelPlace[] {
-  const across = (widthMm * shareOfWidth) / 2;
-  const along = (depthMm * shareOfWidth) / 2;
+function placesUnder(
+  { shape, widthMm, depthMm }: Base,
+  count: number,
+  reach: number,
+): DowelPlace[] {
+  const across = (widthMm * reach) / 2;
+  const along = (depthMm * reach) / 2;
   return Array.from({ length: count }, (_, n) => {
     const turn = n / count;
     if (shape === 'round') {

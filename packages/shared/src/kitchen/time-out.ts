@@ -1,4 +1,5 @@
 import type { Setting } from '#shared/contracts/design.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { StudioCard } from '#shared/contracts/menu.ts';
 import type { LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { formatDuration, formatTime } from '#shared/dates/format.ts';
@@ -47,9 +48,6 @@ export function coldHoldingC(region: LabelRegion): number {
   return region === 'UK' ? 8 : 5;
 }
 
-/** Of a width at which a tier takes long to soften all through: 9 in or so (memory). */
-const largeTierMm = 225;
-
 export type KeepCool = {
   /** How long it may be out of the cold in all, minutes. */
   readonly allowed: number;
@@ -71,6 +69,7 @@ export type KeepCoolInput = {
   readonly setting: Setting | null;
   readonly warmestC: number | null;
   readonly studio: Pick<StudioCard, 'labelRegion' | 'temperatureLead'>;
+  readonly rules: Pick<KitchenRules, 'largeTierMm' | 'softenLeastHours' | 'softenMostHours'>;
   /** The widest tier that is eaten, mm; 0 while there is none. */
   readonly widestMm: number;
   /** When it is collected, minutes since midnight; null while nobody knows. */
@@ -81,7 +80,7 @@ export type KeepCoolInput = {
 
 /** "Keep it in the fridge until ...": what goes on the care card and under the setting. */
 export function keepCoolText(input: KeepCoolInput): string {
-  const { setting, warmestC, studio, widestMm, collectAt, perishable } = input;
+  const { setting, warmestC, studio, rules, widestMm, collectAt, perishable } = input;
   const lead = studio.temperatureLead;
   if (!perishable) return 'Keep it in a cool room, out of the sun, until you cut it.';
   const cold = formatTemperature(coldHoldingC(studio.labelRegion), lead);
@@ -100,9 +99,9 @@ export function keepCoolText(input: KeepCoolInput): string {
       ? `Straight from us to the table: it is there at ${formatTime(Math.min(there, 24 * 60))} and cut at ${formatTime(setting.servedAt ?? 0)}. Until then and afterwards: the fridge, at ${cold} or colder.`
       : `${fridge}, ${untilWords(setting, before, until)}.`,
     inAll,
-    ...(before > 0 && widestMm >= largeTierMm
+    ...(before > 0 && widestMm >= rules.largeTierMm
       ? [
-          'A tier this large takes 1 to 3 h to soften all through; that is for the taste, and the limit comes first.',
+          `A tier this large takes ${rules.softenLeastHours} to ${rules.softenMostHours} h to soften all through; that is for the taste, and the limit comes first.`,
         ]
       : []),
   ].join(' ');

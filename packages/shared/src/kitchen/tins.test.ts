@@ -10,7 +10,7 @@ import { tinsOf } from './tins.ts';
 
 const tins = (tier: ReturnType<typeof roundTier>) => {
   const [only] = resolveDesign(designWith({ cake: { tiers: [tier] } }), menu).tiers;
-  return only === undefined ? null : tinsOf(only);
+  return only === undefined ? null : tinsOf(only, menu.kitchen);
 };
 
 describe('tins', () => {
@@ -51,7 +51,10 @@ describe('tins', () => {
           [resolved.cuttingCakes, perCuttingCake],
         ] as const) {
           for (const [index, body] of bodies.entries()) {
-            const sum = (tinsOf(body)?.batterG ?? []).reduce((total, it) => total + it, 0);
+            const sum = (tinsOf(body, menu.kitchen)?.batterG ?? []).reduce(
+              (total, it) => total + it,
+              0,
+            );
             expect(sum).toBeCloseTo(amounts[index]?.batterG ?? 0, 3);
           }
         }

@@ -1,7 +1,8 @@
 import type { Cake, Coating, Setting } from '#shared/contracts/design.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
 import type { Filling } from '#shared/contracts/menu.ts';
 import { detailOf, fineness, finestOn } from './detail.ts';
-import { coatLimitC, fareInHeat, heatMarginC, usualRoomC } from './heat.ts';
+import { coatLimitC, fareInHeat } from './heat.ts';
 import { formatTemperature } from './measures.ts';
 import type { WayOut } from './note.ts';
 import { coatingName, type ResolvedCoating } from './resolve-design.ts';
@@ -95,7 +96,7 @@ function byWorkOn({ resolved, coats }: Situation, coat: ResolvedCoating): readon
 }
 
 /** A room no warmer than a coat likes, kept to until the cake is cut. */
-export function roomFor(limitC: number): number {
+export function roomFor(limitC: number, { usualRoomC, heatMarginC }: KitchenRules): number {
   return Math.min(usualRoomC, Math.floor(limitC - heatMarginC));
 }
 
@@ -103,7 +104,7 @@ export function roomFor(limitC: number): number {
 export function movedIndoors({ resolved, warmth }: Situation, limitC: number): Setting | null {
   const { setting } = resolved.design;
   if (setting === null || warmth === null) return null;
-  const warmestC = roomFor(limitC);
+  const warmestC = roomFor(limitC, resolved.menu.kitchen);
   if (setting.place === 'indoors' && warmth.known && warmth.celsius <= warmestC) return null;
   return { ...setting, place: 'indoors', warmestC };
 }
@@ -124,7 +125,9 @@ export function heatWays(coat: ResolvedCoating, limitC: number, situation: Situa
   const better = otherCoats(
     situation,
     coat,
-    (it) => coatLimitC(it) > limitC && fareInHeat(coatLimitC(it), warmth.celsius) !== 'stop',
+    (it) =>
+      coatLimitC(it) > limitC &&
+      fareInHeat(coatLimitC(it), warmth.celsius, situation.resolved.menu.kitchen) !== 'stop',
   );
   return [...better, ...indoorsWays(limitC, situation)];
 }

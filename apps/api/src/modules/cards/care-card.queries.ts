@@ -14,9 +14,7 @@ export async function printCareCard(
   if (label === null) throw notFound('There is no cake in this order.');
   const { setting } = design;
   const fridge =
-    setting === null
-      ? null
-      : keepCoolOf(setting, warmthOf(setting, menu.studio, pickup.date).celsius);
+    setting === null ? null : keepCoolOf(setting, warmthOf(setting, menu, pickup.date).celsius);
   const usual = menu.studio.labelRegion === 'US' ? 'half-letter' : 'a5';
   return careCardPdf(
     {

@@ -19,6 +19,7 @@ import { localAt } from '#shared/dates/local-time.ts';
 import { currentPantry } from '#api/modules/pantry/load-pantry.queries.ts';
 import { cakePartsOf, handledAllergens, loadCakeRows } from './cake-parts.queries.ts';
 import type { CakeParts, CakeRows, VersionOf } from './cake-parts.queries.ts';
+import { kitchenOf } from '#api/db/kitchen-of.ts';
 import { inOrder, offered } from '#api/db/offered.ts';
 import { presentStudioCard } from './studio-card.ts';
 
@@ -96,6 +97,7 @@ export async function loadMenuGround(now: Date, { archivedToo = false } = {}): P
       priceBook: publicPriceBook(book.id, book.content),
       allergyRules: rules.map(({ allergen, severity, answer }) => ({ allergen, severity, answer })),
       policies,
+      kitchen: kitchenOf(studio),
       wordsPer100Mm: studio.wordsPerDecimetre,
       maxPhotos: studio.maxPhotos,
     },

@@ -9,6 +9,8 @@ import { addDays, toUtcMinute } from '#shared/dates/local-time.ts';
 import type { UtcMinute } from '#shared/dates/local-time.ts';
 import type { Link, Place, PlannedOrder, Supply, Work } from '#shared/dates/model.ts';
 import { coldStartsWith } from '#shared/dates/model.ts';
+import { Studio } from '#api/db/models/studio.ts';
+import { kitchenOf } from '#api/db/kitchen-of.ts';
 import { currentDatabase } from '#api/db/current-database.ts';
 import { shiftKey } from './load-supply.ts';
 
@@ -17,6 +19,7 @@ import { shiftKey } from './load-supply.ts';
  * collected), with its unfinished work. Read in a few statements: past orders cost nothing.
  */
 export async function loadStanding(supply: Supply): Promise<PlannedOrder[]> {
+  const rules = kitchenOf(await Studio.findByPk(1, { rejectOnEmpty: true }));
   const orders = await readRows(orderRow, ordersSql, { today: supply.today });
   const [work, links, fills, tiers, allergies] = await Promise.all([
     readRows(workRow, workSql, { today: supply.today }),
@@ -45,7 +48,7 @@ export async function loadStanding(supply: Supply): Promise<PlannedOrder[]> {
           .filter((it) => keys.has(it.before) && keys.has(it.after))
           .map(({ before, after, gap, keeps }): Link => ({ before, after, gap, keeps })),
         boxes: (tiersBy.get(order.id) ?? []).flatMap((it) =>
-          Array.from({ length: it.quantity }, () => boxOf(it)),
+          Array.from({ length: it.quantity }, () => boxOf(it, rules)),
         ),
         contains,
         apart: (allergiesBy.get(order.id) ?? [])

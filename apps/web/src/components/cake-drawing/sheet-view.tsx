@@ -9,12 +9,12 @@ import { PipedWords } from './piped-words.tsx';
 import { TierCoat } from './tier-coat.tsx';
 
 const gap = 42;
-const boardMarginMm = 50;
 
 /** A sheet cake: from above, where its words and pictures lie, and from the side; one scale. */
 export function SheetView({ cake, look, menu, room, show, hatch }: ViewProps) {
   const size = menu.sheetSizes.find((it) => it.id === cake.sheet?.sizeId);
   if (size === undefined || cake.sheet === null) return null;
+  const { boardMarginMm } = menu.kitchen;
   const across = size.widthMm + 2 * boardMarginMm;
   const scale = Math.min(
     0.9,

@@ -107,7 +107,7 @@ function Piece({ piece, widestMm, dowels }: PieceProps) {
 function dowelsIn(cake: Cake, menu: Menu): DowelPlace[][] {
   const blocks = blocksOf(cake, menu);
   const bodies = blocks.map((block, at) => ({ block, real: cake.tiers[at]?.real ?? true }));
-  return supportsOf(bodies).perTier.map(({ dowels }) =>
+  return supportsOf(bodies, menu.kitchen).perTier.map(({ dowels }) =>
     dowels.filter((it) => it.bears === 'tier-above').flatMap((it) => it.at),
   );
 }

@@ -78,11 +78,11 @@ export function judgeDecoration({ contents }: Decoration, wish: Wish, menu: Menu
 function judgeHeat(
   limitC: number,
   { warmestC }: Wish,
-  { studio }: Menu,
+  { studio, kitchen }: Menu,
   words: { readonly over: string; readonly near: string },
 ): Verdict {
   if (warmestC === null) return fine;
-  const level = fareInHeat(limitC, warmestC);
+  const level = fareInHeat(limitC, warmestC, kitchen);
   if (level === 'ok') return fine;
   const limit = formatTemperature(limitC, studio.temperatureLead);
   return { level, reasons: [`${level === 'stop' ? words.over : words.near} ${limit}`] };

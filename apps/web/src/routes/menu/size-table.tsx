@@ -11,7 +11,7 @@ export function SizeTable({ menu }: { readonly menu: Menu }) {
       key: `round-${size.widthMm}`,
       name: formatLength(size.widthMm, lead),
       counts: menu.portionSizes.map((it) =>
-        portionsOfBlock({ ...size, heightMm: size.heightsMm[0] ?? 100 }, it),
+        portionsOfBlock({ ...size, heightMm: size.heightsMm[0] ?? 100 }, it, menu.kitchen),
       ),
     })),
     ...menu.sheetSizes.map((size) => ({

@@ -1,5 +1,5 @@
 import type { Menu } from '#shared/contracts/menu.ts';
-import { fareInHeat, heatMarginC } from '#shared/kitchen/heat.ts';
+import { fareInHeat } from '#shared/kitchen/heat.ts';
 import { formatTemperature } from '#shared/kitchen/measures.ts';
 
 type Props = {
@@ -20,7 +20,7 @@ const at = (celsius: number) =>
  * above; the table's own warmth a tick upon it. The words beside it say the same.
  */
 export function WarmthScale({ limitC, warmestC, menu }: Props) {
-  const well = at(limitC - heatMarginC);
+  const well = at(limitC - menu.kitchen.heatMarginC);
   const still = at(limitC);
   return (
     <span className="grid gap-1">
@@ -37,7 +37,9 @@ export function WarmthScale({ limitC, warmestC, menu }: Props) {
               d={`M${at(warmestC)} 0v12`}
               strokeWidth="2"
               stroke={
-                fareInHeat(limitC, warmestC) === 'stop' ? 'var(--color-berry)' : 'var(--color-ink)'
+                fareInHeat(limitC, warmestC, menu.kitchen) === 'stop'
+                  ? 'var(--color-berry)'
+                  : 'var(--color-ink)'
               }
             />
           )}

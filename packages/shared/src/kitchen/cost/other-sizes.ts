@@ -2,7 +2,6 @@ import type { Cake, Design } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import { formatLength } from '../measures.ts';
 import { countPortions } from '../portions.ts';
-import { smallestStepMm } from '../sizes.ts';
 import { tierName } from '../tier-name.ts';
 
 /** The same design with one tier, or the sheet, a size up or down. */
@@ -39,7 +38,7 @@ function otherTiers(cake: Cake, menu: Menu): SizedCake[] {
       if (size === undefined) return [];
       const { widthMm, depthMm } = size;
       const tiers = cake.tiers.map((it, n) => (n === index ? { ...it, widthMm, depthMm } : it));
-      if (!stacks(tiers, index)) return [];
+      if (!stacks(tiers, index, menu.kitchen)) return [];
       const [to, from] = [widthMm, tier.widthMm].map((mm) => formatLength(mm, lead));
       return {
         label: `${tierName(index, tiers.length)} ${to} instead of ${from}`,
@@ -50,7 +49,7 @@ function otherTiers(cake: Cake, menu: Menu): SizedCake[] {
 }
 
 /** A step wide enough to the tier below and above. */
-function stacks(tiers: Cake['tiers'], index: number): boolean {
+function stacks(tiers: Cake['tiers'], index: number, { smallestStepMm }: Menu['kitchen']): boolean {
   const [below, here, above] = [tiers[index - 1], tiers[index], tiers[index + 1]];
   const steps = (lower: typeof here, upper: typeof here) =>
     lower === undefined ||

@@ -1,11 +1,5 @@
-import {
-  cutGrid,
-  cutRound,
-  doubleHeightMm,
-  type Block,
-  type Footprint,
-  type Ring,
-} from '../sizes.ts';
+import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
+import { cutGrid, cutRound, decksOf, type Block, type Footprint, type Ring } from '../sizes.ts';
 
 /**
  * One cut of the knife seen from above, millimetres from the upper left corner of the block's
@@ -45,16 +39,14 @@ export type BlockCut = {
   readonly portions: number;
 };
 
-/** Decks a block is cut in. */
-export function decksOf({ heightMm }: Pick<Block, 'heightMm'>): 1 | 2 {
-  return heightMm > doubleHeightMm ? 2 : 1;
-}
+/** The studio's figures for cutting. */
+type CutRules = Pick<KitchenRules, 'doubleHeightMm' | 'narrowestCoreMm'>;
 
 /** The cuts of a block into portions; their number agrees with `portionsOfBlock`. */
-export function cutBlock(block: Block, portion: Footprint): BlockCut {
-  const decks = decksOf(block);
+export function cutBlock(block: Block, portion: Footprint, rules: CutRules): BlockCut {
+  const decks = decksOf(block, rules);
   if (block.shape === 'round') {
-    const rings = withoutCrumb(cutRound(block.widthMm, portion));
+    const rings = withoutCrumb(cutRound(block.widthMm, portion), rules);
     const perDeck = rings.reduce((sum, it) => sum + it.pieces, 0);
     const cuts = cutsOfRings(block.widthMm / 2, rings);
     return { block, decks, rings, grid: null, cuts, perDeck, portions: decks * perDeck };
@@ -71,10 +63,8 @@ export function cutBlock(block: Block, portion: Footprint): BlockCut {
   return { block, decks, rings: [], grid, cuts, perDeck, portions: decks * perDeck };
 }
 
-/** A core narrower than this cannot be cut out by hand: the ring round it is cut to the middle. */
-const narrowestCoreMm = 25;
-
-function withoutCrumb(rings: readonly Ring[]): readonly Ring[] {
+/** A core too narrow to be cut out by hand: the ring round it is cut to the middle. */
+function withoutCrumb(rings: readonly Ring[], { narrowestCoreMm }: CutRules): readonly Ring[] {
   const core = rings.at(-1);
   const around = rings.at(-2);
   if (core === undefined || around === undefined) return rings;

@@ -30,8 +30,8 @@ describe('cutting a block', () => {
   it('gives exactly the portions that are counted, and stays inside the cake', () => {
     fc.assert(
       fc.property(blocks, fc.constantFrom(...menu.portionSizes), (block, portion) => {
-        const cut = cutBlock(block, portion);
-        expect(cut.portions).toBe(portionsOfBlock(block, portion));
+        const cut = cutBlock(block, portion, menu.kitchen);
+        expect(cut.portions).toBe(portionsOfBlock(block, portion, menu.kitchen));
         const hair = 1e-6;
         for (const at of cut.cuts.flatMap(reach)) {
           expect(at).toBeGreaterThanOrEqual(-hair);
@@ -44,7 +44,7 @@ describe('cutting a block', () => {
   it('makes no piece smaller than the portion', () => {
     fc.assert(
       fc.property(blocks, fc.constantFrom(...menu.portionSizes), (block, portion) => {
-        const { rings, grid, perDeck } = cutBlock(block, portion);
+        const { rings, grid, perDeck } = cutBlock(block, portion, menu.kitchen);
         const wanted = portion.widthMm * portion.depthMm;
         for (const { outerMm, innerMm, pieces } of rings) {
           if (pieces === 0) continue;
@@ -62,7 +62,7 @@ describe('cutting a block', () => {
 
   it('has as many slices as pieces in each ring, and a circle between rings', () => {
     const block = { shape: 'round', widthMm: 254, depthMm: 254, heightMm: 102 } as const;
-    const { cuts, rings } = cutBlock(block, dessert);
+    const { cuts, rings } = cutBlock(block, dessert, menu.kitchen);
     // 25 + 13 slices; the core of one piece is not cut.
     expect(rings.map((it) => it.pieces)).toEqual([25, 13, 1]);
     expect(cuts.filter((it) => it.kind === 'line')).toHaveLength(38);
@@ -72,18 +72,18 @@ describe('cutting a block', () => {
   it('cuts the ring round a crumb of a core to the middle', () => {
     // 305 mm: rings of 50 mm leave 5 mm in the middle.
     const block = { shape: 'round', widthMm: 305, depthMm: 305, heightMm: 102 } as const;
-    const { rings, portions } = cutBlock(block, dessert);
+    const { rings, portions } = cutBlock(block, dessert, menu.kitchen);
     expect(rings.map(({ innerMm, pieces }) => [innerMm, pieces])).toEqual([
       [102.5, 32],
       [52.5, 19],
       [0, 6],
     ]);
-    expect(portions).toBe(portionsOfBlock(block, dessert));
+    expect(portions).toBe(portionsOfBlock(block, dessert, menu.kitchen));
   });
 
   it('divides a square evenly, an inner board dividing a tall one', () => {
     const block = { shape: 'square', widthMm: 203, depthMm: 203, heightMm: 152 } as const;
-    const cut = cutBlock(block, dessert);
+    const cut = cutBlock(block, dessert, menu.kitchen);
     expect(cut).toMatchObject({ decks: 2, perDeck: 32, portions: 64 });
     expect(cut.grid).toMatchObject({ columns: 8, rows: 4, pieceWidthMm: 25.375 });
     expect(cut.cuts).toHaveLength(7 + 3);

@@ -43,7 +43,7 @@ export function cuttingPlanOf(design: Design, menu: Menu): CuttingPlan | null {
   const lead = menu.studio.lengthLead;
   const flat = sheetFootprint(portion);
   const piece = (it: Omit<PieceCut, 'cut' | 'steps'>, block: Block, footprint: Footprint) => {
-    const cut = it.left === 'dummy' ? null : cutBlock(block, footprint);
+    const cut = it.left === 'dummy' ? null : cutBlock(block, footprint, menu.kitchen);
     return { ...it, cut, steps: cuttingSteps(it.left, cut, lead) };
   };
   const pieces: PieceCut[] = [];

@@ -19,7 +19,7 @@ const onStems: readonly string[] = ['flower', 'topper', 'leaf', 'figure'];
  */
 export function toRemove(resolved: ResolvedDesign): string[] {
   const { tiers } = resolved;
-  const { boards, dowels } = supportsOf(tiers);
+  const { boards, dowels } = supportsOf(tiers, resolved.menu.kitchen);
   const hidden = [count(boards, 'board'), count(dowels, 'dowel')].filter((it) => it !== '');
   const dummies = tiers.filter((it) => !it.real);
   return [

@@ -1,3 +1,4 @@
+import { usualKitchen } from '#shared/contracts/kitchen-rules.ts';
 import type { Menu, TierSize } from '#shared/contracts/menu.ts';
 import { egg, entry, milk, soy, wheat } from './contents-fixture.ts';
 import { coverings, decorations, fillings, sponges, styles } from './menu-parts-fixture.ts';
@@ -118,6 +119,7 @@ export const menuFixture: Menu = {
       since: '2026-01-01',
     },
   ],
+  kitchen: usualKitchen,
   wordsPer100Mm: 13,
   maxPhotos: 8,
 };

@@ -123,7 +123,7 @@ function drawCutting(sheet: CareSheet, { resolved }: CareCard): void {
   if (plan === null) return;
   const lead = resolved.menu.studio.lengthLead;
   const { portion } = plan;
-  const dowels = supportsOf(resolved.tiers).perTier.map((it) =>
+  const dowels = supportsOf(resolved.tiers, resolved.menu.kitchen).perTier.map((it) =>
     it.dowels.flatMap((set) => [...set.at]),
   );
   const aside = [

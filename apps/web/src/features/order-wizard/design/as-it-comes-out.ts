@@ -10,7 +10,8 @@ export function baseOf(coating: Coating, menu: Menu): string {
 
 function reached(coating: Coating | null, menu: Menu): Coating | null {
   if (coating === null || coating.colour === null) return coating;
-  return { ...coating, colour: reachableTint(coating.colour, baseOf(coating, menu)).reached };
+  const { reached: colour } = reachableTint(coating.colour, baseOf(coating, menu), menu.kitchen);
+  return { ...coating, colour };
 }
 
 /** The cake with every wished-for tint as its base lets it come out: what the drawing may show. */

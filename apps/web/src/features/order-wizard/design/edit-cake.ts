@@ -2,7 +2,6 @@ import type { Cake, CuttingCake, Look, Sheet, Tier } from '#shared/contracts/des
 import type { DesignPatch, Proposal } from '#shared/contracts/estimates.ts';
 import type { Menu, SheetSize } from '#shared/contracts/menu.ts';
 import { cuttingCakeOf, usualSheetLayers } from '#shared/kitchen/propose-cutting.ts';
-import { smallestStepMm } from '#shared/kitchen/sizes.ts';
 import type { OrderForm } from '../draft/empty-order.ts';
 import type { Inside } from './first-inside.ts';
 
@@ -111,7 +110,7 @@ export function nextTier(cake: Cake, menu: Menu, inside: Inside): Tier | null {
     .filter((size) => below === undefined || size.shape === below.shape)
     .toSorted((a, b) => b.widthMm - a.widthMm);
   const fitting = below
-    ? sizes.filter((size) => size.widthMm <= below.widthMm - smallestStepMm)
+    ? sizes.filter((size) => size.widthMm <= below.widthMm - menu.kitchen.smallestStepMm)
     : sizes.filter((size) => size.shape === 'round' && size.widthMm <= 250);
   const size = fitting[0] ?? sizes.at(-1);
   if (size === undefined || cake.tiers.length >= mostTiers) return null;

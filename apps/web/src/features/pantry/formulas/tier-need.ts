@@ -41,7 +41,11 @@ export function tierNeedG(
   if (role === null) return null;
   const body = bodyFor(role, formula, version, tiers, menu, parts);
   if (body === null) return null;
-  const amounts = amountsOfBody(body, { visibleTopMm2: areaMm2(body.block), pipedG: 0 });
+  const amounts = amountsOfBody(
+    body,
+    { visibleTopMm2: areaMm2(body.block), pipedG: 0 },
+    menu.kitchen,
+  );
   const each = {
     sponge: amounts.batterG * (1 - version.bakeLossPpm / 1e6),
     filling: amounts.fillingG,

@@ -106,13 +106,16 @@ function tinRows(cake: Cake, menu: Menu): DataRow[] {
     }),
   ];
   return bodies.flatMap(({ at, count, block, layers, real, spongeId, fillingId }): DataRow[] => {
-    const tins = tinsOf({
-      block,
-      layers,
-      real,
-      sponge: menu.sponges.find((it) => it.id === spongeId) ?? null,
-      filling: menu.fillings.find((it) => it.id === fillingId) ?? null,
-    });
+    const tins = tinsOf(
+      {
+        block,
+        layers,
+        real,
+        sponge: menu.sponges.find((it) => it.id === spongeId) ?? null,
+        filling: menu.fillings.find((it) => it.id === fillingId) ?? null,
+      },
+      menu.kitchen,
+    );
     if (tins === null) return [];
     const grams = [...new Set(tins.batterG.map((it) => formatWeight(it, lead)))];
     const times = count === 1 ? '' : `${count} × `;

@@ -20,7 +20,7 @@ export function KeepTop({ taken }: { readonly taken: Proposal | null }) {
       const stacks = proposeStacks(portionsWanted(day, menu), menu, portion, { keepTop, shape });
       const stack = stacks.find((it) => it.blurb === taken.blurb) ?? stacks[0];
       if (stack !== undefined) {
-        const tiers = tiersOf(stack, firstInside(menu, day));
+        const tiers = tiersOf(stack, firstInside(menu, day), menu.kitchen);
         change(takeProposal(values, { tiers, cuttingCakes: [] }));
         return;
       }

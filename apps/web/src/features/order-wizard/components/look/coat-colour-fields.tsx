@@ -39,7 +39,7 @@ export function CoatColourFields({ coating, name, legend, ownLabel, onCoating }:
       ...(coating.colour === null ? [] : [coating.colour]),
     ]),
   ]
-    .map((colour) => reachableTint(colour, base))
+    .map((colour) => reachableTint(colour, base, menu.kitchen))
     .toSorted((a, b) => nearness.indexOf(a.reach) - nearness.indexOf(b.reach));
   const { colour } = coating;
 

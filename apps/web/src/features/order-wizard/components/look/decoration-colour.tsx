@@ -19,7 +19,7 @@ export function DecorationColour({ colour, coating }: Props) {
   const base = piped ? baseOf({ ...coating, covering: 'buttercream' }, menu) : null;
   const deep = isDeepColour(colour);
   if (base === null && !deep) return null;
-  const tint = base === null ? null : reachableTint(colour, base);
+  const tint = base === null ? null : reachableTint(colour, base, menu.kitchen);
   return (
     <p className="flex flex-wrap items-center gap-x-3 gap-y-1 text-sm">
       {tint !== null && (

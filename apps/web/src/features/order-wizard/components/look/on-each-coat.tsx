@@ -31,8 +31,8 @@ export function OnEachCoat({ coating, name, onCoat }: Props) {
   const bases = coatBases(menu, coating.style);
   const isOurs = ({ base }: TriedColour) =>
     base.covering === coating.covering && base.style === coating.style;
-  const tried = tryOnCoats(colour, bases);
-  const here = reachableTint(colour, baseOf(coating, menu));
+  const tried = tryOnCoats(colour, bases, menu);
+  const here = reachableTint(colour, baseOf(coating, menu), menu.kitchen);
   const others = tried.filter((it) => !isOurs(it));
   const nearer = others.filter(
     ({ tint }) => tint.difference < here.difference && tint.reach !== 'not-on-this-base',

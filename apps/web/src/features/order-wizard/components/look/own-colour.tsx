@@ -2,6 +2,7 @@ import { useId, useState } from 'react';
 import { reachableTint } from '#shared/kitchen/colour.ts';
 import { Button } from '#web/components/ui/button.tsx';
 import { TextField } from '#web/components/ui/text-field.tsx';
+import { useWizard } from '../../wizard/wizard-context.ts';
 import { readColour } from '../../design/read-colour.ts';
 import { ColourDot } from './colour-dot.tsx';
 import { ReachMark } from './reach-mark.tsx';
@@ -15,11 +16,13 @@ type Props = {
 
 /** A colour of one's own, by the device's picker or by its figures; it counts once it is taken. */
 export function OwnColour({ label, onChoose, base }: Props) {
+  const { menu } = useWizard();
   const id = useId();
   const [typed, setTyped] = useState('#d9767c');
   const [tried, setTried] = useState(false);
   const colour = readColour(typed);
-  const tint = colour === null || base === undefined ? null : reachableTint(colour, base);
+  const tint =
+    colour === null || base === undefined ? null : reachableTint(colour, base, menu.kitchen);
   return (
     <div className="grid gap-2" role="group" aria-label={label}>
       <div className="flex flex-wrap items-end gap-3">

@@ -21,7 +21,7 @@ export function SettingFields() {
   const drive = useAnswer('setting.driveMinutes');
   const served = useAnswer('setting.servedAt');
   const lead = menu.studio.temperatureLead;
-  const reckoned = warmthOf({ ...values.setting, warmestC: null }, menu.studio, values.day.date);
+  const reckoned = warmthOf({ ...values.setting, warmestC: null }, menu, values.day.date);
   return (
     <div className="grid gap-6">
       <ChipChoice
