@@ -111,16 +111,20 @@ export function matchPart(
     .map((it) => rate(it, { asked, noted, named, counted }))
     .filter((it) => it.fits > 0)
     .toSorted(betterFirst);
-  const candidates = rated.slice(0, most).map((it) => it.candidate);
   const [first, second] = rated;
   if (first === undefined || first.fits < asked.length) {
-    return { match: null, candidates, fits: false };
+    return { match: null, candidates: candidatesOf(rated), fits: false };
   }
+  // Where some have every word, one with half of them is no choice: whites are no yolks.
+  const candidates = candidatesOf(rated.filter((it) => it.fits === asked.length));
   // A misspelt word may be another word: butter and batter are one letter apart.
   const spelt = first.exact === asked.length;
   const alone = second === undefined || second.fits < asked.length || tells(first, second);
   return { match: spelt && alone ? first.candidate : null, candidates, fits: true };
 }
+
+const candidatesOf = (rated: readonly Rated[]): readonly PartCandidate[] =>
+  rated.slice(0, most).map((it) => it.candidate);
 
 type Rated = {
   readonly candidate: PartCandidate;

@@ -168,6 +168,12 @@ describe('a line as bakers type it', () => {
     expect(read('300 g marzipan').candidates).toEqual([]);
   });
 
+  it('offers only what has every word where something has: whites are no yolks', () => {
+    const names = read('100 g egg whites').candidates.map((it) => it.name);
+    expect(names.length).toBeGreaterThan(1);
+    expect(names.filter((it) => !/white/iu.test(it))).toEqual([]);
+  });
+
   it('takes a word for what is bought before what is made of it', () => {
     const made = version('vanilla-cream', [['vanilla', 1]]);
     const pantry = indexPantry(bookOf(shelf, [made], { 'vanilla-cream': 'Vanilla cream' }));

@@ -98,7 +98,7 @@ export const LineList = memo(function LineList(props: Props) {
       <p role="status" className="sr-only">
         {said}
       </p>
-      <div className="flex flex-wrap items-start gap-2">
+      <div className="flex flex-wrap items-start gap-2 has-[textarea]:grid has-[textarea]:justify-items-start has-[textarea]:*:last:w-full">
         <Button kind="secondary" onClick={() => wishes.onAddAfter(lines.length - 1, [''])}>
           Add a line
         </Button>
