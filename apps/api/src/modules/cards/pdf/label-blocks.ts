@@ -8,9 +8,12 @@ export function labelBlocks(label: LabelText, size: number): Block[] {
   const text = (words: string): Run => ({ text: words, font: 'text', size, colour: paper.ink });
   const strong = (words: string): Run => ({ text: words, font: 'strong', size, colour: paper.ink });
   const gap = size * 0.3;
-  const paragraph = (...runs: readonly Run[]): Block => ({ runs, gap });
-  const maybe = (words: string | null, face: (it: string) => Run = text): Block[] =>
-    words === null || words === '' ? [] : [paragraph(face(words))];
+  const maybe = (words: string | null): Block[] =>
+    words === null || words === '' ? [] : [{ runs: [text(words)], gap, together: words }];
+  // The list and what it contains are read as one and not parted (21 CFR 101.2(e), FALCPA).
+  const contents = (...runs: readonly Run[]): Block => ({ runs, gap, together: 'contents' });
+  const warned = (words: string | null): Block[] =>
+    words === null || words === '' ? [] : [contents(strong(words))];
   return [
     {
       runs: [{ text: label.studio.name, font: 'display', size: size * 1.3, colour: paper.cobalt }],
@@ -18,13 +21,13 @@ export function labelBlocks(label: LabelText, size: number): Block[] {
     },
     { runs: [strong(label.product)], gap: 0 },
     { runs: [text(label.about)], gap: 0 },
-    paragraph(
+    contents(
       strong('Ingredients: '),
       ...label.ingredients.map((it) => (it.emphasised ? strong(it.text) : text(it.text))),
     ),
-    ...maybe(label.contains, strong),
-    ...label.notKnown.flatMap((it) => maybe(it, strong)),
-    ...maybe(label.mayContain, strong),
+    ...warned(label.contains),
+    ...label.notKnown.flatMap(warned),
+    ...warned(label.mayContain),
     ...maybe(together(label.makersWarn, label.kitchen, label.signpost)),
     ...maybe(together(...label.keep)),
     ...maybe(together(...label.remove)),

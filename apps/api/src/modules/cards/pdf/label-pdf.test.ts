@@ -100,6 +100,17 @@ describe('a printed label', () => {
     expect(pages[1]?.text).toContain(`No. 2421, 2 of ${pages.length}`);
   });
 
+  it('parts neither the list nor what it contains where one label holds both', async () => {
+    const list = Array.from({ length: 24 }, (_, at) => `flavor number ${at}`).join(', ');
+    const text: LabelText = { ...label, ingredients: [{ text: `${list}.`, emphasised: false }] };
+    const pages = await readPdf(
+      await labelsPdf([{ label: text, copies: 1 }], { ...print, paper: 'single' }),
+    );
+    expect(pages[0]?.text).not.toContain('Ingredients:');
+    expect(pages[1]?.text).toContain('Ingredients: flavor number 0,');
+    expect(pages[1]?.text).toContain('flavor number 23. Contains: Milk, Egg, Wheat.');
+  });
+
   it('refuses plainly what not even several labels hold', async () => {
     const endless: LabelText = {
       ...label,

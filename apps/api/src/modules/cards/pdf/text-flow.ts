@@ -12,6 +12,8 @@ export type Run = {
 export type Block = {
   readonly runs: readonly Run[];
   readonly gap: number;
+  /** Neighbours of one name stand in one column wherever a column holds them all. */
+  readonly together?: string;
 };
 
 export type PlacedRun = Run & { readonly x: number };
@@ -21,6 +23,7 @@ export type Line = {
   readonly height: number;
   /** Above it, where it is not the first of its column. */
   readonly gap: number;
+  readonly together?: string;
 };
 
 /** Width of text in a face, points. */
@@ -40,7 +43,12 @@ export function breakLines(blocks: readonly Block[], width: number, measure: Mea
     const end = () => {
       if (runs.length === 0) return;
       const height = Math.max(...runs.map((it) => it.size)) * leading;
-      lines.push({ runs, height, gap: lines.length === 0 ? block.gap : 0 });
+      lines.push({
+        runs,
+        height,
+        gap: lines.length === 0 ? block.gap : 0,
+        ...(block.together !== undefined && { together: block.together }),
+      });
       runs = [];
       x = 0;
     };
@@ -106,14 +114,19 @@ function wordsOf(block: Block, width: number, measure: Measure): Word[] {
   });
 }
 
-/** Fills columns of a height one after another; a line stands whole in one of them. */
+/**
+ * Fills columns of a height one after another; a line stands whole in one of them, and what belongs
+ * together begins a new one rather than being parted, if one holds it.
+ */
 export function fillColumns(lines: readonly Line[], heights: (column: number) => number): Line[][] {
   const columns: Line[][] = [];
   let column: Line[] = [];
   let used = 0;
-  for (const line of lines) {
+  for (const [at, line] of lines.entries()) {
     const gap = column.length === 0 ? 0 : line.gap;
-    if (column.length > 0 && used + gap + line.height > heights(columns.length)) {
+    const kept = heightOf(beginningAt(lines, at));
+    const needed = kept > heights(columns.length + 1) ? line.height : kept;
+    if (column.length > 0 && used + gap + needed > heights(columns.length)) {
       columns.push(column);
       column = [];
       used = 0;
@@ -123,6 +136,15 @@ export function fillColumns(lines: readonly Line[], heights: (column: number) =>
   }
   if (column.length > 0) columns.push(column);
   return columns;
+}
+
+/** The lines that stay together from the one that begins them; any other line is by itself. */
+function beginningAt(lines: readonly Line[], at: number): Line[] {
+  const rest = lines.slice(at);
+  const name = lines[at]?.together;
+  if (name === undefined || lines[at - 1]?.together === name) return rest.slice(0, 1);
+  const end = rest.findIndex((it) => it.together !== name);
+  return end < 0 ? rest : rest.slice(0, end);
 }
 
 /** How high lines stand one under another, points. */
