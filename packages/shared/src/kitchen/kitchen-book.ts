@@ -22,8 +22,18 @@ export type KitchenBook = {
   contents(versionId: string): Contents;
 };
 
-/** A pantry as the rules about contents read it; whoever keeps it works nothing out twice. */
-export function kitchenBook({ ingredients, formulas, versions }: Shelves): KitchenBook {
+const books = new WeakMap<Shelves, KitchenBook>();
+
+/** A pantry as the rules about contents read it: the same book for the same pantry. */
+export function kitchenBook(shelves: Shelves): KitchenBook {
+  const before = books.get(shelves);
+  if (before !== undefined) return before;
+  const book = makeBook(shelves);
+  books.set(shelves, book);
+  return book;
+}
+
+function makeBook({ ingredients, formulas, versions }: Shelves): KitchenBook {
   const bought = new Map(ingredients.map((it) => [it.id, ingredientNode(it)]));
   const names = new Map(formulas.map(({ id, name }) => [id, name]));
   const kept = new Map(versions.map((it) => [it.id, it]));
@@ -106,6 +116,50 @@ export function ingredientNode(bought: Ingredient): IngredientNode {
     honey: bought.honey,
     animalOrigin: bought.animalOrigin,
     egg: bought.eggPart === null ? 'none' : bought.pasteurised === 'yes' ? 'pasteurised' : 'raw',
+  };
+}
+
+/** The versions that are kept, by their formulas: what an order is made with instead of today's. */
+export function keptVersions(
+  versionIds: readonly string[],
+  { versions }: Pick<KitchenBook, 'versions'>,
+): Map<string, string> {
+  return new Map(
+    versionIds.flatMap((id) => {
+      const version = versions.get(id);
+      return version === undefined ? [] : [[version.formulaId, id] as const];
+    }),
+  );
+}
+
+/** One decoration: what of it is bought as it is, and the formula of the rest. */
+export type MadeDecoration = {
+  readonly id: string;
+  readonly name: string;
+  readonly weightMg: number;
+  readonly bought: readonly { readonly ingredientId: string; readonly weightMg: number }[];
+  /** Null where nothing of it is made. */
+  readonly versionId: string | null;
+};
+
+/** A decoration as if it were a formula: of bought goods, of a formula, of both or of no food. */
+export function decorationNode(
+  { id, name, weightMg, bought, versionId }: MadeDecoration,
+  book: KitchenBook,
+): FormulaNode {
+  return {
+    kind: 'formula',
+    // Formulas have ids of their own, which may be the same word.
+    id: `decoration ${id}`,
+    name,
+    lines: [
+      ...bought.flatMap((line) => {
+        const part = book.ingredients.get(line.ingredientId);
+        return part === undefined ? [] : [{ weightMg: line.weightMg, part, joinsAtStep: 0 }];
+      }),
+      ...(versionId === null ? [] : [{ weightMg, part: book.node(versionId), joinsAtStep: 0 }]),
+    ],
+    steps: [],
   };
 }
 

@@ -7,7 +7,12 @@ import type { Pickup } from '#shared/contracts/orders.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import type { FormulaNode } from '#shared/kitchen/derive-contents.ts';
 import { evaluateDesign } from '#shared/kitchen/evaluate-design.ts';
-import { kitchenBook, type KitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import {
+  decorationNode,
+  keptVersions,
+  kitchenBook,
+  type KitchenBook,
+} from '#shared/kitchen/kitchen-book.ts';
 import {
   labelsOf,
   type OrderLabelTexts,
@@ -62,10 +67,11 @@ export async function loadCardSource(
     plannedTasksOf([order.id]),
   ]);
   const book = kitchenBook(pantry);
-  const versionOf = versionsKept(
-    book,
+  const own = keptVersions(
     kept.map((it) => it.formulaVersionId),
+    book,
   );
+  const versionOf = (formulaId: string) => own.get(formulaId);
   const menu = over(book, versionOf);
   const design = servedThen(designOf(revision), servedAt);
   const resolved = resolveDesign(design, menu);
@@ -112,20 +118,6 @@ function servedThen(design: Design, servedAt: number | undefined): Design {
   return { ...design, setting: { ...design.setting, servedAt } };
 }
 
-/** The version of a formula that a revision keeps, by the formula. */
-function versionsKept(
-  book: KitchenBook,
-  versionIds: readonly string[],
-): (formulaId: string) => string | undefined {
-  const byFormula = new Map(
-    versionIds.flatMap((id) => {
-      const version = book.versions.get(id);
-      return version === undefined ? [] : [[version.formulaId, id] as const];
-    }),
-  );
-  return (formulaId) => byFormula.get(formulaId);
-}
-
 type Makings = {
   readonly pantry: WholePantry;
   readonly book: KitchenBook;
@@ -158,7 +150,7 @@ function makingsOf({ pantry, book, versionOf, resolved, madeTimes, otherwise }: 
     const formulaId = formulaIdOf(ref);
     const version = formulaId === null ? null : current(formulaId);
     if (ref.part !== 'decoration') return version === null ? null : book.node(version.id);
-    return decorationNode(ref.id, version, { pantry, book, resolved });
+    return decorationOf(ref.id, version, { pantry, book, resolved });
   };
   const keepingOf = (ref: PartRef): PartKeeping | null => {
     const formulaId = formulaIdOf(ref);
@@ -197,28 +189,24 @@ function find(ids: Readonly<Partial<Record<string, string>>>, id: string): strin
   return ids[id] ?? null;
 }
 
-/** A decoration as if it were a formula: of bought goods, of a formula, of both or of no food. */
-function decorationNode(
+/** One decoration of an order, by the formula version the order keeps. */
+function decorationOf(
   id: string,
   version: FormulaVersion | null,
   { pantry, book, resolved }: Pick<Makings, 'pantry' | 'book' | 'resolved'>,
 ): FormulaNode {
   const shown = resolved.decorations.find((it) => it.decoration.id === id)?.decoration;
-  const bought = (pantry.parts.decorations[id]?.ingredients ?? []).flatMap((line) => {
-    const part = book.ingredients.get(line.ingredientId);
-    return part === undefined
-      ? []
-      : [{ weightMg: Math.round(line.grams * 1000), part, joinsAtStep: 0 }];
-  });
-  const made =
-    version === null
-      ? []
-      : [{ weightMg: (shown?.weightG ?? 0) * 1000, part: book.node(version.id), joinsAtStep: 0 }];
-  return {
-    kind: 'formula',
-    id: `decoration ${id}`,
-    name: shown?.name ?? id,
-    lines: [...bought, ...made],
-    steps: [],
-  };
+  const bought = (pantry.parts.decorations[id]?.ingredients ?? []).map(
+    ({ ingredientId, grams }) => ({ ingredientId, weightMg: Math.round(grams * 1000) }),
+  );
+  return decorationNode(
+    {
+      id,
+      name: shown?.name ?? id,
+      weightMg: (shown?.weightG ?? 0) * 1000,
+      bought,
+      versionId: version?.id ?? null,
+    },
+    book,
+  );
 }

@@ -4,7 +4,7 @@ import { orderStatuses } from '#shared/contracts/vocabulary.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import { groupBy } from '#shared/group-by.ts';
 import { evaluateDesign } from '#shared/kitchen/evaluate-design.ts';
-import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import { keptVersions, kitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { contentsOfDesign, isAboutContents } from '#shared/kitchen/order-contents.ts';
 import { isLive } from '#shared/orders/transitions.ts';
 import type { OrderRevision } from '#api/db/models/order-revision.ts';
@@ -42,11 +42,10 @@ export async function openOrders(now: Date): Promise<Map<string, OpenOrder>> {
   for (const order of orders) {
     const revision = revisions.get(order.currentRevisionId ?? '');
     if (revision === undefined) continue;
-    const versionIds = new Map(
-      (keptOf.get(revision.id) ?? []).flatMap(({ formulaVersionId }) => {
-        const version = book.versions.get(formulaVersionId);
-        return version === undefined ? [] : [[version.formulaId, version.id] as const];
-      }),
+    const own = keptOf.get(revision.id) ?? [];
+    const versionIds = keptVersions(
+      own.map((it) => it.formulaVersionId),
+      book,
     );
     const menu = over(book, (formulaId) => versionIds.get(formulaId));
     const design = designOf(revision);

@@ -3,7 +3,7 @@ import type { Menu } from '#shared/contracts/menu.ts';
 import { groupBy } from '#shared/group-by.ts';
 import { currentVersion, indexPantry } from '#shared/kitchen/formulas/pantry-index.ts';
 import type { PantryIndex } from '#shared/kitchen/formulas/pantry-index.ts';
-import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import { keptVersions, kitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { needsOf } from '#shared/kitchen/needs/kitchen-needs.ts';
 import type { KitchenNeeds } from '#shared/kitchen/needs/kitchen-needs.ts';
 import { resolveDesign } from '#shared/kitchen/resolve-design.ts';
@@ -51,11 +51,10 @@ export async function needsOfOrders(orders: readonly Order[]): Promise<NeedsOfOr
   const found = orders.flatMap((order): OrderNeeds[] => {
     const revision = revisions.get(order.currentRevisionId ?? '');
     if (revision === undefined) return [];
-    const versionIds = new Map(
-      (keptOf.get(revision.id) ?? []).flatMap(({ formulaVersionId }) => {
-        const version = index.versions.get(formulaVersionId);
-        return version === undefined ? [] : [[version.formulaId, version.id] as const];
-      }),
+    const own = keptOf.get(revision.id) ?? [];
+    const versionIds = keptVersions(
+      own.map((it) => it.formulaVersionId),
+      book,
     );
     // Most orders keep what is current, and share a menu.
     const key = [...versionIds]

@@ -4,7 +4,7 @@ import { finishId } from '#shared/contracts/vocabulary.ts';
 import { decorationPrice } from '#shared/kitchen/decoration-price.ts';
 import { deriveContents } from '#shared/kitchen/derive-contents.ts';
 import type { FormulaNode } from '#shared/kitchen/derive-contents.ts';
-import { ingredientIdsIn } from '#shared/kitchen/kitchen-book.ts';
+import { decorationNode, ingredientIdsIn } from '#shared/kitchen/kitchen-book.ts';
 import type { KitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import { mergeAllergens } from '#shared/kitchen/merge-allergens.ts';
 import type { PriceBookContent } from '#shared/contracts/prices.ts';
@@ -142,7 +142,7 @@ export function cakePartsOf(
       weightG: Math.round(row.weightMg / 1000),
       caution: row.caution,
       smallParts: row.smallParts,
-      contents: decorationContents(row, book, versionOf),
+      contents: deriveContents(decorationOf(row, book, versionOf)),
     })),
   };
   parts.coverings = rows.coverings.map((row) => {
@@ -196,27 +196,10 @@ function limitOf(version: FormulaVersion): number {
   return version.holdsToC ?? 20;
 }
 
-function decorationContents(row: Decoration, book: KitchenBook, versionOf: VersionOf): Contents {
-  return deriveContents(decorationNode(row, book, versionOf));
-}
-
-/** A decoration as if it were a formula: of bought goods, of a formula, of both or of no food. */
-function decorationNode(row: Decoration, book: KitchenBook, versionOf: VersionOf): FormulaNode {
-  const bought: FormulaNode['lines'] = (row.ingredients ?? []).flatMap((line) => {
-    const part = book.ingredients.get(line.ingredientId);
-    return part === undefined ? [] : [{ weightMg: line.weightMg, part, joinsAtStep: 0 }];
-  });
-  const made: FormulaNode['lines'] =
-    row.formulaId === null
-      ? []
-      : [
-          {
-            weightMg: row.weightMg,
-            part: book.node(versionIdOf(book, row.formulaId, versionOf)),
-            joinsAtStep: 0,
-          },
-        ];
-  return { kind: 'formula', id: row.id, name: row.name, lines: [...bought, ...made], steps: [] };
+function decorationOf(row: Decoration, book: KitchenBook, versionOf: VersionOf): FormulaNode {
+  const { id, name, weightMg, formulaId, ingredients: bought = [] } = row;
+  const versionId = formulaId === null ? null : versionIdOf(book, formulaId, versionOf);
+  return decorationNode({ id, name, weightMg, bought, versionId }, book);
 }
 
 /**
@@ -231,7 +214,7 @@ export function handledAllergens(rows: CakeRows, book: KitchenBook): AllergenEnt
     .map((formulaId) => book.node(versionIdOf(book, formulaId, current)));
   const put = rows.decorations
     .filter(({ archivedAt }) => archivedAt === null)
-    .map((row) => decorationNode(row, book, current));
+    .map((row) => decorationOf(row, book, current));
   const used = new Set([...made, ...put].flatMap((node) => [...ingredientIdsIn(node)]));
   const bought = [...used].flatMap((id) =>
     (book.ingredients.get(id)?.allergens ?? []).filter((it) => it.state === 'contains'),

@@ -5,24 +5,14 @@ import {
   type FormulaLine as NodeLine,
   type FormulaNode,
 } from '#shared/kitchen/derive-contents.ts';
-import { kitchenBook, type KitchenBook } from '#shared/kitchen/kitchen-book.ts';
+import { kitchenBook } from '#shared/kitchen/kitchen-book.ts';
 import type { FormulaBody, PantryIndex } from './pantry-index.ts';
-
-const books = new WeakMap<PantryIndex, KitchenBook>();
-
-function bookOf(index: PantryIndex): KitchenBook {
-  const before = books.get(index);
-  if (before !== undefined) return before;
-  const book = kitchenBook(index.book);
-  books.set(index, book);
-  return book;
-}
 
 type Body = FormulaBody & { readonly steps: readonly FormulaStep[] };
 
 /** A version or an unsaved draft with everything inside it. It must be sound (`checkFormula`). */
 function draftNode(body: Body, index: PantryIndex, name: string): FormulaNode {
-  const book = bookOf(index);
+  const book = kitchenBook(index.book);
   return {
     kind: 'formula',
     id: body.formulaId ?? '',
