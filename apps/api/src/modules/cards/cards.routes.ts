@@ -21,7 +21,7 @@ import type { Actor } from '#api/platform/actor.ts';
 import { AppError, invalidField, notFound } from '#api/platform/app-error.ts';
 import { printCareCard } from './care-card.queries.ts';
 import { hasCare, mayCard, type CardAction } from './cards.policy.ts';
-import { presentCare, presentLabels, stopsOf } from './cards.presenter.ts';
+import { presentCare, presentLabels, resourceOf, stopsOf } from './cards.presenter.ts';
 import { findOrderByCareCode } from './care-code.queries.ts';
 import { confirmUnknown } from './confirm-unknown.command.ts';
 import { loadCardSource, type CardSource } from './label-source.queries.ts';
@@ -137,7 +137,7 @@ export function cardsRoutes(deps: Deps): FeatureRoutes {
     },
     async ({ actor, params: { code }, query, response }) => {
       const order = await findOrderByCode(code);
-      reveal(mayCard(actor, 'see-care-card', resourceOf(order)) && hasCare(order.status));
+      reveal(mayCard(actor, 'see-care-card', resourceOf({ order })) && hasCare(order.status));
       await sendCareCard(response, order, query);
     },
     limitByAddress(deps, 'print-card'),
@@ -187,10 +187,6 @@ async function findForStaff(actor: Actor, action: CardAction, number: string): P
 
 /** Staff may or may not by their role, whichever order it is. */
 const anyOrder = { id: '', customerId: null, status: 'asked' } as const;
-
-function resourceOf(order: Order) {
-  return { id: order.id, customerId: order.customerUserId, status: order.status };
-}
 
 /** Which labels, how often; the grams off the scale go on the one they were weighed for. */
 function jobsOf({ labels }: CardSource, query: PrintLabelsQuery): LabelJob[] {

@@ -16,6 +16,7 @@ import { orderNumber } from '#api/http/order-number.ts';
 import { planEggsOfSpan } from './egg-plan.queries.ts';
 import { presentKitchenSheet } from './kitchen-sheet.presenter.ts';
 import { mayKitchen } from './kitchen.policy.ts';
+import { presentOrderCost } from './order-cost.presenter.ts';
 import { costOfOrder } from './order-cost.queries.ts';
 import { needsOfOrder } from './order-needs.queries.ts';
 import { shoppingOfSpan } from './shopping.queries.ts';
@@ -37,7 +38,7 @@ export function kitchenRoutes(_deps: Deps): FeatureRoutes {
       refusals: ['not-found'],
     },
     async ({ actor, params: { number } }) => {
-      authorise(actor, mayKitchen(actor, 'see-sheet'));
+      authorise(actor, mayKitchen(actor, 'see-kitchen-sheet'));
       const needs = await needsOfOrder(await findOrderByNumber(Number(number)));
       return presentKitchenSheet(needs, needs.index);
     },
@@ -54,8 +55,8 @@ export function kitchenRoutes(_deps: Deps): FeatureRoutes {
       refusals: ['not-found'],
     },
     async ({ actor, params: { number } }) => {
-      authorise(actor, mayKitchen(actor, 'see-cost'));
-      return costOfOrder(await findOrderByNumber(Number(number)));
+      authorise(actor, mayKitchen(actor, 'see-order-cost'));
+      return presentOrderCost(await costOfOrder(await findOrderByNumber(Number(number))));
     },
   );
 

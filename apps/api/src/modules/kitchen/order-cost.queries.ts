@@ -1,5 +1,5 @@
 import { Op } from 'sequelize';
-import type { OrderCost } from '#shared/contracts/kitchen-sheet.ts';
+import type { PayLever } from '#shared/contracts/kitchen-sheet.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import { chargedPortions } from '#shared/kitchen/charged-portions.ts';
 import { costDesign } from '#shared/kitchen/cost/cost-design.ts';
@@ -18,11 +18,18 @@ import { loadOrderRecord } from '#api/modules/orders/orders.queries.ts';
 import { workByTimes } from '#api/modules/plan/work-of-design.queries.ts';
 import { needsOfOrder } from './order-needs.queries.ts';
 
+export type CostOfOrder = {
+  readonly cost: DesignCost;
+  /** Its price is agreed, and not an offer any more. */
+  readonly agreed: boolean;
+  readonly levers: readonly PayLever[];
+};
+
 /**
  * What an order costs to make by today's prices, wages and packs, against its agreed price or else
  * its offer, and what would make it pay.
  */
-export async function costOfOrder(order: Order): Promise<OrderCost> {
+export async function costOfOrder(order: Order): Promise<CostOfOrder> {
   const [record, ground, extras, book] = await Promise.all([
     loadOrderRecord(order),
     needsOfOrder(order),
@@ -72,13 +79,7 @@ export async function costOfOrder(order: Order): Promise<OrderCost> {
     sizes,
     locale: menu.studio.locale,
   });
-  return {
-    ...cost,
-    lines: cost.lines.map((it) => ({ ...it, items: [...it.items] })),
-    unknown: [...cost.unknown],
-    agreed: record.agreedPrice !== null,
-    levers,
-  };
+  return { cost, agreed: record.agreedPrice !== null, levers };
 }
 
 /** Portions that are charged for, in the tiers and in the kitchen's cutting cakes. */

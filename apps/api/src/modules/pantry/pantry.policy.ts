@@ -1,9 +1,10 @@
+import type { StaffRole } from '#shared/contracts/vocabulary.ts';
 import type { Actor } from '#api/platform/actor.ts';
 
 /** Reading the pantry shows what things cost, so it is for those who may change it. */
 export type PantryAction = 'see' | 'save';
 
-const allowed: Readonly<Record<PantryAction, readonly string[]>> = {
+const allowed: Readonly<Record<PantryAction, readonly StaffRole[]>> = {
   see: ['baker', 'owner'],
   save: ['baker', 'owner'],
 };
