@@ -5,7 +5,7 @@ import { formatTemperature } from '#shared/kitchen/measures.ts';
 import { capitalise } from '#shared/kitchen/sentences.ts';
 import { CoatSwatch } from '#web/components/coats/coat-swatch.tsx';
 import { Dots } from '#web/components/ui/dots.tsx';
-import { containsLine } from '#web/features/order-wizard/design/contains.ts';
+import { containsLine, namesAnything } from '#web/features/order-wizard/design/contains.ts';
 import { classNames } from '#web/lib/class-names.ts';
 import { judgeCoat, type Verdict, type Wish } from './judge-part.ts';
 import { VerdictLine } from './verdict-line.tsx';
@@ -29,7 +29,7 @@ export function CoatComparison({ menu, wish }: Props) {
     <div className="grid gap-6">
       <p role="status" className="text-slate">
         {asked
-          ? `Left by themselves: ${left} of ${menu.styles.length} buttercreams. The sponge under them counts too.`
+          ? `Of the ${menu.styles.length} buttercreams, ${left} can be the outer coat${wish.warmestC === null ? '' : '; under fondant others can'}. The sponge and the filling count too.`
           : 'Each swatch is the color the food has by itself.'}
       </p>
       <ul className="grid gap-x-4 gap-y-8 sm:grid-cols-2 sm:gap-x-6 md:grid-cols-3 xl:grid-cols-6 xl:gap-x-4">
@@ -148,8 +148,10 @@ function CoveringColumn({
       <p>{covering.blurb}</p>
       <p className="text-sm text-slate">
         {covering.id === 'ganache' ? '' : 'Lies over a buttercream, which adds its own contents. '}
-        {capitalise(containsLine(covering.contents, labelRegion))}. Holds to{' '}
-        {formatTemperature(covering.holdsToC, temperatureLead)}.
+        {namesAnything(covering.contents) || covering.id === 'ganache'
+          ? `${capitalise(containsLine(covering.contents, labelRegion))}. `
+          : ''}
+        Holds to {formatTemperature(covering.holdsToC, temperatureLead)}.
       </p>
     </li>
   );

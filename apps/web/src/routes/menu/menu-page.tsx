@@ -9,6 +9,7 @@ import { Rim } from '#web/components/ui/rim.tsx';
 import { Section } from '#web/components/ui/section.tsx';
 import { paths } from '#web/config/paths.ts';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
+import { contentsToSay } from '#web/features/order-wizard/design/contains.ts';
 import { CoatComparison } from './coat-comparison.tsx';
 import {
   judgeContents,
@@ -63,10 +64,10 @@ export function MenuPage() {
       <Rim label="Buttercreams side by side" className="grid gap-5 p-4 sm:p-8">
         <h2>Six buttercreams, side by side</h2>
         <MenuWish menu={menu} wish={asked} onWish={setAsked} />
-        <CoatComparison menu={menu} wish={wish} />
         {(wish.allergen !== null || wish.warmestC !== null) && (
           <WholeCakes menu={menu} wish={wish} />
         )}
+        <CoatComparison menu={menu} wish={wish} />
       </Rim>
 
       <div className="grid gap-x-14 gap-y-14 md:grid-cols-2">
@@ -115,7 +116,7 @@ export function MenuPage() {
               name={it.name}
               blurb={it.blurb}
               caution={it.caution}
-              contents={it.edge === 'edible' ? it.contents : undefined}
+              contents={contentsToSay(it)}
               region={labelRegion}
               price={`${money(it.priceMinor)} ${per[it.per]}`}
               picture={<DecorationGlyph glyph={it.glyph} className="size-10" />}

@@ -27,6 +27,17 @@ describe('whole cakes for a table', () => {
     expect(cakes.every(({ coat }) => coat.covering.id !== 'buttercream')).toBe(true);
   });
 
+  it('are filled with what stays firm that day, where the menu has such a filling', () => {
+    const [first, ...others] = menuFixture.fillings;
+    if (first === undefined) throw new Error('a menu has fillings');
+    const menu = {
+      ...menuFixture,
+      fillings: [...others.map((it) => ({ ...it, holdsToC: 24 })), { ...first, holdsToC: 31 }],
+    };
+    const cakes = wholeCakesFor({ ...noWish, warmestC: 30 }, menu);
+    expect(new Set(cakes.map(({ filling }) => filling.id))).toEqual(new Set([first.id]));
+  });
+
   it('are none where one part cannot be had', () => {
     const menu = { ...menuFixture, sponges: [] };
     expect(wholeCakesFor(noWish, menu)).toEqual([]);

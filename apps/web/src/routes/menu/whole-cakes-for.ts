@@ -29,13 +29,23 @@ export function wholeCakesFor(wish: Wish, menu: Menu): WholeCake[] {
       .filter(({ level }, _, all) => level === all[0]?.level)
       .map(({ part }) => part);
   const sponges = best(menu.sponges, (it) => judgeContents(it.contents, wish, menu));
-  const fillings = best(menu.fillings, (it) => judgeFilling(it, wish, menu));
+  const fillings = steadiest(
+    best(menu.fillings, (it) => judgeFilling(it, wish, menu)),
+    wish,
+  );
   const coats = left(coatsOf(menu), (it) => judgeWholeCoat(it, wish, menu)).map(({ part }) => part);
   return coats.slice(0, most).flatMap((coat, at) => {
     const sponge = sponges[at % sponges.length];
     const filling = fillings[at % fillings.length];
     return sponge === undefined || filling === undefined ? [] : [{ sponge, filling, coat }];
   });
+}
+
+/** Fillings that stay firm at that warmth, if there are any: a soft one is care in a sheet, and a stop under a tier. */
+function steadiest(fillings: Filling[], { warmestC }: Wish): Filling[] {
+  if (warmestC === null) return fillings;
+  const firm = fillings.filter((it) => it.holdsToC >= warmestC);
+  return firm.length > 0 ? firm : fillings;
 }
 
 /** Each buttercream, fondant over each, and ganache. */

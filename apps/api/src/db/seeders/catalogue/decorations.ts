@@ -159,7 +159,7 @@ export const decorations: readonly SeedDecoration[] = [
     minutes: 8,
     materialsCostMinor: 110,
     weightG: 60,
-    caution: 'Coloured with carmine (cochineal).',
+    caution: 'Colored with carmine (cochineal).',
     lines: [{ ingredient: 'sprinkle-mix', grams: 60 }],
   },
   {
@@ -254,7 +254,7 @@ export const decorations: readonly SeedDecoration[] = [
     ...plain,
     id: 'figure',
     name: 'Modeled figure',
-    blurb: 'An animal, a person, a favourite thing, about 8 cm tall.',
+    blurb: 'An animal, a person, a favorite thing, about 8 cm tall.',
     glyph: 'figure',
     edge: 'remove-before-eating',
     sources: ['studio'],

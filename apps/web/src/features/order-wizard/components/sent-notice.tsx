@@ -84,7 +84,8 @@ function NextSteps({ order, studio }: Props & { readonly order: SentOrder }) {
       )}
       <Step at={2} title="The baker reads it">
         You get an answer {within}: yes with a price, or a question, or the nearest days that can be
-        done.
+        done. What you told us of allergies is read first, and talked over with you wherever it
+        needs it, before anything is promised.
       </Step>
       <Step at={3} title="Nothing is to be paid before you agree">
         Follow your order, write to us or take it back on its own page.

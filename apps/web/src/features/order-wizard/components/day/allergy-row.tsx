@@ -124,7 +124,8 @@ export function AllergyRow({ at, row, onChange, onRemove }: Props) {
               cake.{' '}
             </strong>
           )}
-          A baker reads this and talks it over with you before anything is promised.
+          A baker reads this before anything is promised, and talks it over with you wherever it
+          needs it.
         </p>
       )}
       <div>

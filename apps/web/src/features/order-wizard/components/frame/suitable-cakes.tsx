@@ -96,7 +96,8 @@ export function SuitableCakes() {
           <strong>
             We handle {formatList(handled)} in this kitchen, so traces can get into any cake.
           </strong>{' '}
-          A baker reads what you told us and talks it over with you before anything is promised.
+          A baker reads what you told us before anything is promised, and talks it over with you
+          wherever it needs it.
           {listed.length > 0 && ' Your guest and their doctor decide what they eat.'}
         </p>
       )}

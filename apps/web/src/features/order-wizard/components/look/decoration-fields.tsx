@@ -1,10 +1,14 @@
 import type { PlacedDecoration } from '#shared/contracts/design.ts';
 import type { Decoration } from '#shared/contracts/menu.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
+import { isPiped } from '#shared/kitchen/piped.ts';
 import { DecorationGlyph } from '#web/components/cake-drawing/decoration-glyph.tsx';
 import { Button } from '#web/components/ui/button.tsx';
 import { Fold } from '#web/components/ui/fold.tsx';
-import { containsLine } from '../../design/contains.ts';
+import { capitalise } from '#shared/kitchen/sentences.ts';
+import { formatList } from '#shared/dates/format.ts';
+import { ToneGlyph } from '#web/components/ui/notice.tsx';
+import { clashesOf, containsLine, contentsToSay } from '../../design/contains.ts';
 import { useProblemAt } from '../../steps/use-answer.ts';
 import { useWizard } from '../../wizard/wizard-context.ts';
 import { DecorationRow } from './decoration-row.tsx';
@@ -70,6 +74,7 @@ export function DecorationFields() {
                   <p className="text-sm text-slate">
                     {it.blurb} {containsOf(it)}
                   </p>
+                  <DoesNotSuit clashes={clashesWithTable(it)} />
                 </div>
                 <p className="shrink-0 text-right text-sm tabular-nums">
                   {formatMoney(it.priceMinor, menu.priceBook.currency, menu.studio.locale)}
@@ -88,8 +93,29 @@ export function DecorationFields() {
   );
 
   function containsOf(it: Decoration): string {
-    if (it.edge === 'remove-before-eating') return 'Comes off before eating.';
-    if (it.edge === 'food-contact-only') return 'Not for eating.';
-    return `It ${containsLine(it.contents, menu.studio.labelRegion).replace(/^no /, 'has no ')}.`;
+    const contents = contentsToSay(it);
+    const said =
+      contents === undefined
+        ? ''
+        : ` ${capitalise(containsLine(contents, menu.studio.labelRegion))}.`;
+    if (it.edge === 'remove-before-eating') return `Comes off before eating.${said}`;
+    if (it.edge === 'food-contact-only') return `Not for eating.${said}`;
+    return isPiped(it) ? 'Contains what the coat contains.' : said.trim();
   }
+
+  function clashesWithTable(it: Decoration): readonly string[] {
+    const { allergies, diets } = values.day;
+    return clashesOf(it.contents, allergies, diets, menu.studio.labelRegion);
+  }
+}
+
+/** Said before it is chosen, so that nobody adds what their guest must not have. */
+function DoesNotSuit({ clashes }: { readonly clashes: readonly string[] }) {
+  if (clashes.length === 0) return null;
+  return (
+    <p className="flex gap-2 text-sm font-semibold text-berry">
+      <ToneGlyph tone="berry" />
+      Does not suit: {formatList(clashes)}.
+    </p>
+  );
 }
