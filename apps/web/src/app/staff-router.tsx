@@ -54,6 +54,9 @@ const PricesPage = lazyPage(
 const AllergiesPage = lazyPage(
   async () => (await import('#web/routes/staff/allergies-page.tsx')).AllergiesPage,
 );
+const KitchenRulesPage = lazyPage(
+  async () => (await import('#web/routes/staff/kitchen-rules-page.tsx')).KitchenRulesPage,
+);
 const MePage = lazyPage(async () => (await import('#web/routes/staff/me-page.tsx')).MePage);
 
 /** The staff's addresses; loaded apart, so that no customer carries them. */
@@ -83,6 +86,7 @@ export function StaffRouter() {
           <Route index element={<PeoplePage />} />
           <Route path="prices" element={<PricesPage />} />
           <Route path="allergies" element={<AllergiesPage />} />
+          <Route path="kitchen" element={<KitchenRulesPage />} />
         </Route>
         <Route path="me" element={<MePage />} />
         <Route path="*" element={<NotFoundPage />} />

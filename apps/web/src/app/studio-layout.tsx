@@ -9,6 +9,7 @@ const places = [
   { to: paths.staffPeople, name: 'People', end: true },
   { to: paths.staffPrices, name: 'Prices' },
   { to: paths.staffAllergies, name: 'Allergies' },
+  { to: paths.staffKitchen, name: 'Kitchen' },
 ] as const;
 
 /** The Studio's own places, above each of its pages. */

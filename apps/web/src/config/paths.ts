@@ -62,6 +62,7 @@ export const paths = {
   staffIngredientNew: '/staff/pantry/ingredients/new',
   staffEggs: '/staff/pantry/eggs',
   staffShopping: '/staff/pantry/shopping',
+  staffKitchen: '/staff/studio/kitchen',
   staffAllergies: '/staff/studio/allergies',
   staffMe: '/staff/me',
   staffMail: (id: string) => `/staff/mail/${encodeURIComponent(id)}`,

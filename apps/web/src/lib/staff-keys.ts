@@ -9,6 +9,7 @@ export const staffKeys = {
   people: ['staff', 'people'],
   prices: ['staff', 'prices'],
   allergyTable: ['staff', 'allergy-table'],
+  kitchenRules: ['staff', 'kitchen-rules'],
   pantry: ['staff', 'pantry'],
   eggs: ['staff', 'pantry', 'eggs'],
   shopping: ['staff', 'pantry', 'shopping'],
