@@ -91,7 +91,7 @@ export const kitchenSheet = z.object({
 });
 export type KitchenSheet = z.infer<typeof kitchenSheet>;
 
-export const costKind = z.enum([
+const costKind = z.enum([
   'ingredients',
   'eggs',
   'packaging',
@@ -100,6 +100,7 @@ export const costKind = z.enum([
   'labour',
   'overhead',
 ]);
+export type CostKind = z.infer<typeof costKind>;
 
 const costItem = z.object({
   label: z.string(),

@@ -1,4 +1,4 @@
-import type { FormulaVersion } from '#shared/contracts/pantry.ts';
+import type { FormulaPart, FormulaVersion } from '#shared/contracts/pantry.ts';
 import { indexPantry } from '#shared/kitchen/formulas/pantry-index.ts';
 import { AppError } from '#api/platform/app-error.ts';
 import type { WholePantry } from './load-pantry.queries.ts';
@@ -43,12 +43,21 @@ export async function carryInto(
       const formulaVersionId = newest.get(inside) ?? line.part.formulaVersionId;
       return { ...line, part: { kind: 'formula' as const, formulaVersionId } };
     });
+    if (lines.every(({ part }, at) => isSamePart(part, version.lines[at]?.part))) {
+      // It holds the newest already; there is nothing new to say of it.
+      newest.set(next, version.id);
+      continue;
+    }
     const versionId = await writeVersion(next, { ...version, lines }, byUserId);
     newest.set(next, versionId);
     made.push(versionId);
   }
   return made;
 }
+
+const isSamePart = (one: FormulaPart, other: FormulaPart | undefined): boolean =>
+  one.kind !== 'formula' ||
+  (other?.kind === 'formula' && other.formulaVersionId === one.formulaVersionId);
 
 function holdsNone(formulaIds: readonly string[], waiting: ReadonlySet<string>): AppError {
   return new AppError('invalid-input', {

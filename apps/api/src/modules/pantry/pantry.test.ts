@@ -298,6 +298,16 @@ describe('a formula inside others', () => {
     expect(newOuter.lines).toEqual([holding(newUser.id), holding(result.version.id, 5)]);
     expect(current(pantry, other.formula.id).lines).toEqual([holding(inner.version.id)]);
 
+    // Said once more: everything named holds the newest already.
+    const again = await saved(inner.formula.id, {
+      basedOn: result.version.id,
+      name: 'Base',
+      draft: { ...syrup, note: 'Less water.' },
+      carryInto: [outer.formula.id, user.formula.id],
+    });
+    expect(again).toMatchObject({ version: { id: result.version.id }, carried: [] });
+    expect(current(await load(), outer.formula.id).id).toBe(newOuter.id);
+
     const wrong = await save(inner.formula.id, {
       basedOn: result.version.id,
       name: 'Base',

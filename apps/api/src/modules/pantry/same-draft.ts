@@ -46,7 +46,10 @@ export function isSameIngredient(a: IngredientDraft, b: IngredientDraft): boolea
   return JSON.stringify(ingredientParts(a)) === JSON.stringify(ingredientParts(b));
 }
 
-/** Whether the label says the same: what it is made of, its allergens and the facts on it. */
+/**
+ * Whether the label says the same of what may hurt somebody: its allergens, the facts on it, and
+ * that it was read at all. Its wording does not count.
+ */
 export function isSameLabel(a: IngredientDraft, b: IngredientDraft): boolean {
   return JSON.stringify(labelParts(a)) === JSON.stringify(labelParts(b));
 }

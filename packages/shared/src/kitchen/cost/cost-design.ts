@@ -1,4 +1,5 @@
 import type { Price } from '#shared/contracts/estimates.ts';
+import type { CostKind } from '#shared/contracts/kitchen-sheet.ts';
 import type { PartFormulas } from '#shared/contracts/pantry.ts';
 import type { PriceBookContent } from '#shared/contracts/prices.ts';
 import type { TaskKind } from '#shared/contracts/vocabulary.ts';
@@ -29,17 +30,6 @@ export type CostInput = {
   readonly rates: CostRates;
   readonly price: Pick<Price, 'totalMinor' | 'taxMinor'>;
 };
-
-export const costKinds = [
-  'ingredients',
-  'eggs',
-  'packaging',
-  'decorations',
-  'extras',
-  'labour',
-  'overhead',
-] as const;
-export type CostKind = (typeof costKinds)[number];
 
 /** One thing inside a line; null where its price is not known. */
 export type CostItem = {

@@ -1,9 +1,10 @@
 import type { FormulaLine, FormulaVersion } from '#shared/contracts/pantry.ts';
-import type { AllergenEntry, Contents } from '#shared/contracts/menu.ts';
+import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import type { LabelRegion } from '#shared/contracts/vocabulary.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { allergenLabel } from '#shared/kitchen/allergen-names.ts';
 import type { TemperatureLead } from '#shared/kitchen/measures.ts';
+import { contentFacts, type ContentFact } from '#shared/kitchen/order-contents.ts';
 import { checkFormula } from './check-formula.ts';
 import { compareMethods } from './compare-methods.ts';
 import { formulaContents } from './formula-contents.ts';
@@ -168,15 +169,7 @@ const factWords = {
   honey: 'honey',
   animalOrigin: 'something from meat, fish or slaughter',
   undercookedEgg: 'egg that is neither pasteurized nor cooked through',
-} satisfies Partial<Record<keyof Contents, string>>;
-const facts = [
-  'gelatine',
-  'alcohol',
-  'cochineal',
-  'honey',
-  'animalOrigin',
-  'undercookedEgg',
-] as const;
+} satisfies Record<ContentFact, string>;
 
 /** What it contains now and did not before, and what is not named any more; never "free from". */
 function contentChanges(
@@ -197,7 +190,7 @@ function contentChanges(
     const labels = formatList(lost.map((it) => allergenLabel(it, region)));
     texts.push(`Its labels do not name ${labels} any more in the way they did.`);
   }
-  for (const fact of facts) {
+  for (const fact of contentFacts) {
     if (old[fact] === now[fact]) continue;
     texts.push(
       now[fact]

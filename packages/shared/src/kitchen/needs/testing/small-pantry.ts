@@ -7,31 +7,9 @@ import type {
   PartFormulas,
 } from '#shared/contracts/pantry.ts';
 import type { FormulaBook } from '../../formulas/pantry-index.ts';
+import { bought as boughtAs, version } from '../../testing/pantry-fixture.ts';
 
 /** A pantry for tests, with what the menu fixture's Swiss and German cakes take. Prices in cents. */
-
-const plainIngredient: Ingredient = {
-  id: '',
-  name: '',
-  brand: null,
-  labelName: '',
-  labelContents: null,
-  labelCheckedOn: '2027-01-04',
-  family: 'other',
-  pack: null,
-  densityGPerMl: null,
-  roundingG: 1,
-  eggPart: null,
-  pasteurised: 'no',
-  gelatine: 'no',
-  alcohol: 'no',
-  cochineal: 'no',
-  honey: 'no',
-  animalOrigin: 'no',
-  measures: [],
-  allergens: [],
-  archivedAt: null,
-};
 
 /** A bought thing; without a pack its price is unknown. */
 export function bought(
@@ -39,7 +17,7 @@ export function bought(
   pack: Ingredient['pack'],
   change: Partial<Ingredient> = {},
 ): Ingredient {
-  return { ...plainIngredient, id, name: id, labelName: id, pack, ...change };
+  return { ...boughtAs(id, id, { pack }), ...change };
 }
 
 export function shellEgg(id: string, eggPart: EggPart, each: number, pack: Ingredient['pack']) {
@@ -61,34 +39,11 @@ export function madeBy(
 ): { readonly formula: Formula; readonly version: FormulaVersion } {
   return {
     formula: { id, kind, name: id, currentVersionId: `${id}-1`, archivedAt: null },
-    version: {
-      id: `${id}-1`,
-      formulaId: id,
-      n: 1,
-      lines: lines.map(([part, grams]) => ({
-        part: part.startsWith('@')
-          ? { kind: 'formula', formulaVersionId: `${part.slice(1)}-1` }
-          : { kind: 'ingredient', ingredientId: part },
-        grams,
-        asTyped: null,
-        step: 0,
-      })),
-      steps: [],
-      yieldPpm: 1_000_000,
-      densityGPerMl: 1,
-      bakeLossPpm: 0,
-      baseColour: null,
-      keepsRoomHours: null,
-      keepsChilledHours: null,
-      keepsFrozenHours: null,
-      holdsToC: null,
-      refrigerate: true,
-      pasteurisedByDefault: false,
-      note: '',
-      createdAt: '2027-01-04T12:00:00Z',
-      createdBy: '',
-      ...change,
-    },
+    version: version(
+      id,
+      lines.map(([part, grams]) => [part.startsWith('@') ? `${part}-1` : part, grams]),
+      change,
+    ),
   };
 }
 
