@@ -30,7 +30,7 @@ const fields = 'grid grid-cols-1 gap-x-8 gap-y-5 min-[26rem]:grid-cols-2 lg:grid
 
 /** Figures of the studio that the kitchen goes by. */
 const places = [
-  { name: 'altitudeM', label: 'Height above the sea', kind: 'altitude', unit: '', usual: 0 },
+  { name: 'altitudeM', label: 'Height above the sea', kind: 'altitude', unit: '', usual: null },
   {
     name: 'dessertFactorPpm',
     label: 'Eat cake beside other desserts',

@@ -19,6 +19,12 @@ type Leads = Pick<StudioCard, 'lengthLead' | 'temperatureLead'>;
 const mmPerFoot = 12 * mmPerInch;
 const trimmed = (value: number, digits: number) => String(Number(value.toFixed(digits)));
 
+/** A quarter of an inch that is kept as whole millimeters is that quarter: 102 mm are 4 in. */
+function inches(mm: number): string {
+  const quarters = Math.round((mm / mmPerInch) * 4) / 4;
+  return trimmed(Math.round(quarters * mmPerInch) === mm ? quarters : mm / mmPerInch, 2);
+}
+
 /** In the one unit that stands in the field. */
 export function writeFigure(kind: FigureKind, value: number, leads: Leads): string {
   const inInches = leads.lengthLead === 'in';
@@ -27,7 +33,7 @@ export function writeFigure(kind: FigureKind, value: number, leads: Leads): stri
     case 'thin':
       return `${trimmed(value, 2)} mm`;
     case 'length':
-      return inInches ? `${trimmed(value / mmPerInch, 2)} in` : `${trimmed(value / 10, 1)} cm`;
+      return inInches ? `${inches(value)} in` : `${trimmed(value / 10, 1)} cm`;
     case 'warmth':
       return inF ? `${trimmed(celsiusToFahrenheit(value), 0)} °F` : `${trimmed(value, 1)} °C`;
     case 'degrees':

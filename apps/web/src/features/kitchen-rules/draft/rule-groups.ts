@@ -75,7 +75,8 @@ export const ruleGroups: readonly RuleGroup[] = [
   },
   {
     title: 'What is proposed',
-    about: 'Which cakes customers are shown for their number of guests.',
+    about:
+      'Which cakes customers are shown for their number of guests, and how much too much is worth a word.',
     fields: [
       ...all('number', [
         ['oneTierPortions', 'One tier up to', 'portions'],
@@ -86,7 +87,7 @@ export const ruleGroups: readonly RuleGroup[] = [
       ]),
       ...all('share', [
         ['someOverPpm', '“Some over” has more by'],
-        ['plentyPpm', 'Say it is plenty from'],
+        ['plentyPpm', 'A smaller cake is named from'],
       ]),
     ],
   },
@@ -126,8 +127,8 @@ export const ruleGroups: readonly RuleGroup[] = [
       ...all('length', [['mmPerDowel', 'A dowel for each']]),
       ...all('share', [['dowelReachPpm', 'Dowels stand out to']]),
       ...all('length', [
-        ['fridgeMarginMm', 'Room around it'],
-        ['fridgeHeadroomMm', 'Room over it'],
+        ['fridgeMarginMm', 'Room around a tier, chilled'],
+        ['fridgeHeadroomMm', 'Room over a tier, chilled'],
       ]),
     ],
   },
@@ -138,15 +139,15 @@ export const ruleGroups: readonly RuleGroup[] = [
     fields: [
       ...all('degrees', [['heatMarginC', 'Fine this far under a limit']]),
       ...all('warmth', [['usualRoomC', 'A room, whatever the day']]),
-      ...all('share', [['closeToTimePpm', 'Close, of the time out, from']]),
+      ...all('share', [['closeToTimePpm', 'Time out is close from']]),
       ...all('minutes', [['longDriveMinutes', 'A long drive']]),
       ...all('length', [['largeTierMm', 'A large tier, slow to soften']]),
       ...all('number', [
-        ['softenLeastHours', 'Softens in at least', 'hours'],
-        ['softenMostHours', 'Softens in at most', 'hours'],
+        ['softenLeastHours', 'Softens in at least', 'h'],
+        ['softenMostHours', 'Softens in at most', 'h'],
         ['roughUpTo', 'Hard to smooth up to', 'of 5'],
-        ['closeBelow', 'A color comes close under', 'CIEDE2000'],
-        ['shiftsBelow', 'A color shifts under', 'CIEDE2000'],
+        ['closeBelow', 'A color is close under (CIEDE2000)'],
+        ['shiftsBelow', 'A color shifts under (CIEDE2000)'],
       ]),
     ],
   },
