@@ -1,3 +1,4 @@
+import { inSentence } from './labels/name-in-sentence.ts';
 import type { AllergenEntry, Contents } from '#shared/contracts/menu.ts';
 import { mergeAllergens } from './merge-allergens.ts';
 
@@ -169,7 +170,7 @@ function statementOf(
   for (const { line, inside } of gathered) {
     const text =
       line.part.kind === 'formula'
-        ? `${line.part.name.toLowerCase()} (${inside.statement})`
+        ? `${inSentence(line.part.name)} (${inside.statement})`
         : inside.statement;
     weights.set(text, (weights.get(text) ?? 0) + line.weightMg);
   }

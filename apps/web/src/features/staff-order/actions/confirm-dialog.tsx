@@ -45,7 +45,8 @@ export function ConfirmDialog({ order, menu, margin, onDone, onClose }: ActProps
       !blockers.some((other) => other.code === it.code && other.about === it.about),
   );
   const reasonFor = (it: Advice) =>
-    order.lifted.find((other) => other.code === it.code && other.about === it.about)?.reason ?? '';
+    order.lifted.find((other) => other.code === it.code && other.about === it.about)?.reason ??
+    answerTo(it, order);
   const noteWaits = note.trim() !== shownNote;
 
   return (
@@ -145,6 +146,14 @@ export function ConfirmDialog({ order, menu, margin, onDone, onClose }: ActProps
       </DialogActions>
     </>
   );
+}
+
+/** What was settled about an allergy told in words; nothing for any other advice. */
+function answerTo({ code, about }: Advice, { allergies }: ActProps['order']): string {
+  if (code !== 'allergy-text') return '';
+  const told = allergies.find((it) => about === `allergy-text:${it.text.trim()}`);
+  const answer = told?.answer ?? null;
+  return answer === null ? '' : `Settled: ${answer.text} (${answer.by})`;
 }
 
 type BlockedProps = Pick<ActProps, 'order' | 'onClose'> & {
