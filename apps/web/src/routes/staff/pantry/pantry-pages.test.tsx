@@ -2,6 +2,7 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { Route, Routes } from 'react-router-dom';
 import { beforeEach, describe, expect, it } from 'vitest';
+import type { AllergenEntry } from '#shared/contracts/menu.ts';
 import type { Pantry } from '#shared/contracts/pantry.ts';
 import { menuFixture } from '#shared/kitchen/testing/menu-fixture.ts';
 import { version } from '#shared/kitchen/testing/pantry-fixture.ts';
@@ -177,7 +178,7 @@ describe('an ingredient', () => {
     const first = open('/staff/pantry/ingredients/milk', pantry);
     await first.user.type(await screen.findByRole('textbox', { name: /Maker/ }), 'Alder Dairy');
     first.unmount();
-    const soy = { allergen: 'soy', species: [], state: 'contains' } as const;
+    const soy: AllergenEntry = { allergen: 'soy', species: [], state: 'contains' };
     const ingredients = pantry.ingredients.map((it) =>
       it.id === 'milk' ? { ...it, allergens: [...it.allergens, soy] } : it,
     );
