@@ -34,7 +34,7 @@ const byCode = z.object({ code: z.string().check(z.maxLength(20)) });
 export function cardsRoutes(deps: Deps): FeatureRoutes {
   const routes = createRoutes();
   const source = (order: Order, servedAt?: number) =>
-    loadCardSource(order, deps.clock.now(), servedAt);
+    loadCardSource(order, deps.clock.now(), { servedAt });
 
   routes.add(
     {
@@ -171,7 +171,8 @@ export function careRoutes(deps: Deps): FeatureRoutes {
       response.set('X-Robots-Tag', 'noindex');
       const order = await findOrderByCareCode(code);
       if (order === null || !hasCare(order.status)) throw notFound();
-      const care = presentCare(await loadCardSource(order, deps.clock.now()));
+      const source = await loadCardSource(order, deps.clock.now(), { forAnybody: true });
+      const care = presentCare(source);
       if (care === null) throw notFound();
       return care;
     },

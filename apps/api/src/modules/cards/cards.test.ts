@@ -218,6 +218,28 @@ describe('the page about the cake', () => {
     expect(answer.text).not.toMatch(freeFrom);
   });
 
+  it('reads the same whatever guests told, and names every allergen nobody knows of', async () => {
+    const { code, guest } = await confirmed();
+    const { careCode } = orderView.parse((await guest.get(`/api/orders/${code}`)).body);
+    const where = {
+      ingredientId: 'granulated-sugar',
+      allergen: 'celery',
+      state: 'unknown',
+    } as const;
+    await inTransaction(async () => {
+      await IngredientAllergen.create({ ...where, species: null });
+      await noteCatalogueChange();
+    });
+    const answer = await app.visitor().get(`/api/care/${careCode ?? ''}`);
+    expect(cakeCare.parse(answer.body).label.notKnown).toEqual([
+      'Not known: whether sugar contains celery.',
+    ]);
+    await inTransaction(async () => {
+      await IngredientAllergen.destroy({ where });
+      await noteCatalogueChange();
+    });
+  });
+
   it('is not there for an order that is not confirmed, nor for a code of nothing', async () => {
     const { code } = await ask();
     const order = await Order.findOne({ where: { code }, rejectOnEmpty: true });

@@ -4,6 +4,7 @@ import type { Estimate } from '#shared/contracts/estimates.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
 import type { FormulaVersion } from '#shared/contracts/pantry.ts';
 import type { Pickup } from '#shared/contracts/orders.ts';
+import { allergenIds } from '#shared/contracts/vocabulary.ts';
 import { localAt } from '#shared/dates/local-time.ts';
 import type { FormulaNode } from '#shared/kitchen/derive-contents.ts';
 import { evaluateDesign } from '#shared/kitchen/evaluate-design.ts';
@@ -46,14 +47,21 @@ export type CardSource = OrderLabelTexts & {
   readonly label: LabelText | null;
 };
 
+export type CardAsked = {
+  /** When it will be cut, where somebody knows better by now. */
+  readonly servedAt?: number;
+  /** For readers nobody knows: no word hangs on what guests told. */
+  readonly forAnybody?: boolean;
+};
+
 /**
  * Everything labels, care card and care page of an order are made from. The revision that was agreed
- * stands until another is. `servedAt` is when it will be cut, where somebody knows better by now.
+ * stands until another is.
  */
 export async function loadCardSource(
   order: Order,
   now: Date,
-  servedAt?: number,
+  { servedAt, forAnybody = false }: CardAsked = {},
 ): Promise<CardSource> {
   const revisionId = order.agreedRevisionId ?? order.currentRevisionId;
   if (revisionId === null) throw new Error(`Order ${order.id} has no revision.`);
@@ -91,6 +99,7 @@ export async function loadCardSource(
         .filter((it) => it.assessment !== null && it.assessment.trim() !== '')
         .map((it) => it.allergen),
     ),
+    ...(forAnybody ? { heeded: allergenIds } : {}),
     number: order.number,
     occasion: menu.occasions.find((it) => it.id === design.guests.occasionId)?.name ?? 'Cake',
     madeOn: ended.length === 0 ? null : localAt(new Date(Math.max(...ended)), order.zone).date,

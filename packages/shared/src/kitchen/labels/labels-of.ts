@@ -35,6 +35,11 @@ export type LabelInput = {
   readonly keepingOf: (part: PartRef) => PartKeeping | null;
   /** Allergens whose "may contain" rests on the owner's own assessment. */
   readonly assessed: ReadonlySet<AllergenId>;
+  /**
+   * Allergens of which it is said that nobody knows, beside those of the region's list; what guests
+   * told of unless given.
+   */
+  readonly heeded?: readonly AllergenId[];
   readonly number: number;
   readonly occasion: string;
   readonly madeOn: LocalDate | null;
@@ -124,7 +129,8 @@ function labelOf(
   const ingredients = weighIngredients(labelled);
   const finishedG = weights.reduce((sum, it) => sum + it.inCakeG, 0);
   const netG = weights.reduce((sum, it) => sum + it.eatenG, 0);
-  const declared = resolved.design.guests.allergies.flatMap((it) => it.allergen ?? []);
+  const declared =
+    input.heeded ?? resolved.design.guests.allergies.flatMap((it) => it.allergen ?? []);
   const kitchen: KitchenWord = { handles: studio.handles, assessed };
   const { notKnown, ...lines } = allergenLines(
     ingredients,
