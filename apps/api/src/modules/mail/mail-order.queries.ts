@@ -118,8 +118,10 @@ export function adviceToTell({ advice }: Estimate, level: Advice['level']): stri
     .map(({ sentence, instead }) => `${sentence} ${instead}`.trim());
 }
 
-const takenOutOrOff: ReadonlySet<Advice['code']> = new Set([
+/** What comes out or off, and what those at the table want to know: alcohol, as a flavor too. */
+const toldBeforeEating: ReadonlySet<Advice['code']> = new Set([
   'supports',
+  'alcohol',
   'inedible',
   'small-parts',
   'flowers',
@@ -127,7 +129,7 @@ const takenOutOrOff: ReadonlySet<Advice['code']> = new Set([
 
 function takenOut({ advice }: Estimate): string[] {
   return advice
-    .filter((it) => takenOutOrOff.has(it.code))
+    .filter((it) => toldBeforeEating.has(it.code))
     .map(({ sentence, instead }) => `${sentence} ${instead}`.trim());
 }
 

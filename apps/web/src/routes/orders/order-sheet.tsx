@@ -36,10 +36,10 @@ export function OrderSheet({ order, menu }: Props) {
   const { studio } = menu;
   const { locale } = studio;
   const reached = stageIndex(order.stage);
-  // What holds a cake up is no warning, but has to come out before it is eaten.
+  // No warnings, but to be known: what holds a cake up comes out before it is eaten, and alcohol.
   const warned = order.offer.advice.filter(
     (it) =>
-      (it.level !== 'ok' || it.code === 'supports') &&
+      (it.level !== 'ok' || it.code === 'supports' || it.code === 'alcohol') &&
       // What was lifted stands above, with its reason.
       !order.lifted.some((lifted) => lifted.sentence === it.sentence),
   );
