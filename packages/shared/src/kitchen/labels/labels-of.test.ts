@@ -182,6 +182,13 @@ describe('the label of an order', () => {
     expect(labels[0]?.useBy).toBeNull();
   });
 
+  it('is not printed for a part that stops keeping before the cake leaves', () => {
+    const late = input(twoTiers, { pickupAt: new Date('2027-06-21T14:00:01Z') });
+    expect(labelsOf(late).reasons.map((it) => it.code)).toContain('shelf-life');
+    const inTime = input(twoTiers, { pickupAt: new Date('2027-06-21T14:00:00Z') });
+    expect(labelsOf(inTime).reasons).toEqual([]);
+  });
+
   it('tells what a flower that comes off is made with', () => {
     const flower = {
       decorationId: 'sugar-flower',

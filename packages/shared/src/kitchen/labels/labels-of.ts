@@ -182,11 +182,20 @@ function labelOf(
           ),
           formulaId: it.formulaId,
         })),
+      // A day that is over before the cake leaves is on nobody's label.
+      ...(useBy.at !== null && useBy.at < input.pickupAt
+        ? [
+            reason(
+              'shelf-life',
+              `${useBy.because} keeps only until before the pickup: make it later in the plan, or look at its shelf life.`,
+            ),
+          ]
+        : []),
       ...(label.studio.address === ''
         ? [reason('address', 'A label carries the studio’s address, and there is none yet.')]
         : []),
     ],
-    reminders: remindersOf(label, useBy, input),
+    reminders: remindersOf(label),
   };
 }
 
@@ -320,18 +329,9 @@ function addressOf(studio: ResolvedDesign['menu']['studio']): string {
   return [street, town, `${region} ${postcode}`.trim()].filter((it) => it !== '').join(', ');
 }
 
-function remindersOf(
-  label: LabelText,
-  useBy: ReturnType<typeof useByOf>,
-  { pickupAt }: LabelInput,
-): string[] {
+function remindersOf(label: LabelText): string[] {
   return [
     'The net weight is worked out from the design. Weigh the cake, take off what its boards weigh, and write the grams.',
-    ...(useBy.at !== null && useBy.at < pickupAt
-      ? [
-          `${useBy.because} keeps only until before the pickup: look at the plan, or at its shelf life.`,
-        ]
-      : []),
     ...(label.homeKitchen === ''
       ? [
           'Many places ask for a sentence about a home kitchen or a license. Check your local rules.',
