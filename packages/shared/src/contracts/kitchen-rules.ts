@@ -72,6 +72,8 @@ export const kitchenRules = z
     /** Tiers are proposed at the height that is nearest to this. */
     usualHeightMm: mm(102, 75, 180),
     largestKeepsakeMm: mm(160, 100, 400),
+    /** Lower tiers are proposed with two layers, higher ones with three, double ones with four. */
+    twoLayersUpToMm: mm(90, 0, 180),
     /** Up to so many portions a table has one tier, two, three, four. */
     oneTierPortions: whole(28, 1, 10_000),
     twoTierPortions: whole(60, 1, 10_000),
@@ -97,6 +99,13 @@ export const kitchenRules = z
     fewestDowels: whole(4, 3, 12),
     /** How far out dowels stand under what they bear. */
     dowelReachPpm: share(700_000, 30, 95),
+    /** How far above the cake a thing reaches that stands on top. */
+    topperStandsMm: mm(120, 0, 600),
+    figureStandsMm: mm(80, 0, 600),
+    flowerStandsMm: mm(50, 0, 600),
+    fruitStandsMm: mm(40, 0, 300),
+    leafStandsMm: mm(30, 0, 300),
+    borderStandsMm: mm(10, 0, 100),
     /** Room round a tier on its board, and over it, in the fridge. */
     fridgeMarginMm: mm(40, 0, 150),
     fridgeHeadroomMm: mm(20, 0, 150),

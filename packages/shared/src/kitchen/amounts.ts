@@ -1,5 +1,6 @@
 import type { CarriedPiece } from '#shared/contracts/estimates.ts';
 import type { KitchenRules } from '#shared/contracts/kitchen-rules.ts';
+import type { Decoration } from '#shared/contracts/menu.ts';
 import { looseDecorationsG, pipedPerTier } from './piped.ts';
 import type { ResolvedBody, ResolvedDesign } from './resolve-design.ts';
 import { areaMm2, boardOf, ledgesOf, perimeterMm, volumeMl } from './sizes.ts';
@@ -195,20 +196,29 @@ export function carriedPieces(resolved: ResolvedDesign, amounts: CakeAmounts): C
   ];
 }
 
-/** How far above the cake a thing reaches that stands on top, mm (memory). */
-const standsMm = {
-  topper: 120,
-  figure: 80,
-  flower: 50,
-  fruit: 40,
-  leaf: 30,
-  pearl: 0,
-  border: 10,
-  drip: 0,
-  print: 0,
-  ribbon: 0,
-  sprinkle: 0,
-} as const;
+/** How far above the cake a thing reaches that stands on top, mm; what lies flat reaches nowhere. */
+function standsMm(glyph: Decoration['glyph'], rules: KitchenRules): number {
+  switch (glyph) {
+    case 'topper':
+      return rules.topperStandsMm;
+    case 'figure':
+      return rules.figureStandsMm;
+    case 'flower':
+      return rules.flowerStandsMm;
+    case 'fruit':
+      return rules.fruitStandsMm;
+    case 'leaf':
+      return rules.leafStandsMm;
+    case 'border':
+      return rules.borderStandsMm;
+    case 'pearl':
+    case 'drip':
+    case 'print':
+    case 'ribbon':
+    case 'sprinkle':
+      return 0;
+  }
+}
 
 /** Millimetres from the table to the tip: board, tiers, what stands on top; 0 without a cake. */
 export function heightMm(resolved: ResolvedDesign): number {
@@ -218,7 +228,7 @@ export function heightMm(resolved: ResolvedDesign): number {
   const top = tiers.length - 1;
   const onTop = resolved.decorations
     .filter((it) => it.placed.tier === null || it.placed.tier >= top)
-    .map((it) => standsMm[it.decoration.glyph]);
+    .map((it) => standsMm(it.decoration.glyph, menu.kitchen));
   return (
     board.heightMm + tiers.reduce((sum, it) => sum + it.block.heightMm, 0) + Math.max(0, ...onTop)
   );

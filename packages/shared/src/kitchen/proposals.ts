@@ -4,7 +4,7 @@ import type { Menu, PortionSize, TierSize } from '#shared/contracts/menu.ts';
 import { formatList } from '#shared/dates/format.ts';
 import { lengthFigure } from './measures.ts';
 import { countOf } from './sentences.ts';
-import { decksOf, portionsOfBlock, type TallRule } from './sizes.ts';
+import { decksOf, portionsOfBlock } from './sizes.ts';
 
 /** A stack of the studio's tins, from the board up, and how many it feeds. */
 export type Stack = {
@@ -198,9 +198,12 @@ export function nameOfStack({ sizes, keepTop }: Stack, menu: Menu): string {
   return `${countOf(sizes.length, `${shape}tier`)}, ${formatList(figures)} ${lead}${kept}`;
 }
 
+/** Figures that say how many layers a tier has. */
+type LayerRules = Pick<KitchenRules, 'doubleHeightMm' | 'twoLayersUpToMm'>;
+
 /** Layers of sponge for a height: one for about every 35 mm, an even number when cut double. */
-export function usualLayers(heightMm: number, rules: TallRule): number {
-  if (heightMm <= 90) return 2;
+export function usualLayers(heightMm: number, rules: LayerRules): number {
+  if (heightMm <= rules.twoLayersUpToMm) return 2;
   return decksOf({ heightMm }, rules) === 1 ? 3 : 4;
 }
 
@@ -208,7 +211,7 @@ export function usualLayers(heightMm: number, rules: TallRule): number {
 export function tiersOf(
   stack: Stack,
   inside: { readonly spongeId: string | null; readonly fillingId: string | null },
-  rules: TallRule,
+  rules: LayerRules,
 ): Tier[] {
   return stack.sizes.map(({ shape, widthMm, depthMm }, index) => ({
     shape,

@@ -9,6 +9,8 @@ type Props = {
   readonly label: string;
   readonly kind: FigureKind;
   readonly unit?: string | undefined;
+  /** Where nothing is usual. */
+  readonly hint?: string | undefined;
   readonly value: number;
   /** What studios go by that set nothing; null where there is no such figure. */
   readonly usual: number | null;
@@ -19,14 +21,14 @@ type Props = {
 
 /** One figure, with what is usual and the way back to it. */
 export function FigureField(props: Props) {
-  const { name, label, kind, unit, value, usual, studio, error, onValue } = props;
+  const { name, label, kind, unit, hint, value, usual, studio, error, onValue } = props;
   const told = usual === null ? null : tellFigure(kind, usual, studio, unit);
   return (
     <div className="grid content-start gap-1">
       <NumberField
         name={name}
         label={label}
-        hint={told === null ? undefined : `Usually ${told}`}
+        hint={told === null ? hint : `Usually ${told}`}
         error={error}
         inputMode={kind === 'number' ? 'decimal' : 'text'}
         className="max-w-32 tabular-nums"

@@ -152,6 +152,7 @@ export function KitchenRulesForm({ settings, studio, onSaved }: Props) {
               kind={kind}
               unit={unit === '' ? undefined : unit}
               value={draft[name]}
+              hint={usual === null ? 'In feet or meters' : undefined}
               usual={usual}
               studio={studio}
               error={errorAt(name)}

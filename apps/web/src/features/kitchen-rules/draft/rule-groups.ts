@@ -69,6 +69,7 @@ export const ruleGroups: readonly RuleGroup[] = [
         ['largestStepMm', 'Largest step between tiers'],
         ['usualHeightMm', 'Usual height of a tier'],
         ['largestKeepsakeMm', 'Largest tier to keep'],
+        ['twoLayersUpToMm', 'Two layers up to'],
       ]),
       ...all('thin', [['narrowestCoreMm', 'Narrowest core cut out']]),
     ],
@@ -131,6 +132,18 @@ export const ruleGroups: readonly RuleGroup[] = [
         ['fridgeHeadroomMm', 'Room over a tier, chilled'],
       ]),
     ],
+  },
+  {
+    title: 'What stands on top',
+    about: 'How far above the cake it reaches: part of its height as it is carried.',
+    fields: all('length', [
+      ['topperStandsMm', 'A topper'],
+      ['figureStandsMm', 'A figure'],
+      ['flowerStandsMm', 'Flowers'],
+      ['fruitStandsMm', 'Fruit'],
+      ['leafStandsMm', 'Leaves'],
+      ['borderStandsMm', 'A border'],
+    ]),
   },
   {
     title: 'Heat, time and the look',
