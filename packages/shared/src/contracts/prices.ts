@@ -89,7 +89,9 @@ export const priceBookForm = z.object({
   ),
   sheetPerPortionMinor: amount,
   dummyTierMinor: amount,
-  finishes: z.array(z.object({ id: finishId, perPortionMinor: amount })),
+  finishes: z
+    .array(z.object({ id: finishId, perPortionMinor: amount }))
+    .check(distinct((it) => it.id, 'id', 'One price for each finish.')),
   wordsMinor: amount,
   minimumMinor: amount,
   rush: z

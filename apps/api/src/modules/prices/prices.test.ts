@@ -145,6 +145,11 @@ describe('a price book with something wrong in it', () => {
       { taxes: ['A', 'B'].map((name) => ({ category: 'cake', name, ratePpm: 0 })) },
       ['taxes', 1, 'category'],
     ],
+    [
+      'two prices for one finish',
+      { finishes: [1, 2].map((perPortionMinor) => ({ id: 'piped', perPortionMinor })) },
+      ['finishes', 1, 'id'],
+    ],
     ['a step of nothing', { roundToMinor: 0 }, ['roundToMinor']],
     ['a deposit of more than all', { depositPpm: 1_000_001 }, ['depositPpm']],
     [
