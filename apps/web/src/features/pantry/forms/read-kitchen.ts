@@ -15,17 +15,24 @@ export function degreesOf(text: string, lead: TemperatureLead): number | null {
   return Math.round(celsius * 100) / 100;
 }
 
-/** Whole hours out of "36 h", "5 days", "2 weeks", "3 months" or a bare figure of hours. */
+/**
+ * Whole hours out of "36 h", "5 days", "2 days and 12 h", "2 weeks", "3 months" or a bare figure of
+ * hours; NaN for anything else. "2-3 days" is nobody's shelf life: which of the two is meant is
+ * asked and not added up.
+ */
 export function hoursOf(text: string): number | null {
-  if (text.trim() === '') return null;
-  const parts = [...text.toLowerCase().matchAll(/(\d+(?:[.,]\d+)?)\s*([a-z]*)/g)];
+  const tidy = text.trim().toLowerCase();
+  if (tidy === '') return null;
+  const figures = /(\d+(?:[.,]\d+)?)\s*([a-z]*)/g;
+  if (!/^(?:,|and|\s)*$/.test(tidy.replaceAll(figures, ' '))) return Number.NaN;
+  const parts = [...tidy.matchAll(figures)];
   let hours = 0;
   for (const [, figure = '', unit = ''] of parts) {
-    const each = hoursPer(unit);
+    const each = unit === '' && parts.length > 1 ? null : hoursPer(unit);
     if (each === null) return Number.NaN;
     hours += Number(figure.replace(',', '.')) * each;
   }
-  return parts.length === 0 ? Number.NaN : Math.round(hours);
+  return Math.round(hours);
 }
 
 function hoursPer(unit: string): number | null {

@@ -62,7 +62,14 @@ describe('what is typed of a step', () => {
     ['1 week', 168],
     ['2 months', 1440],
     ['', null],
+    ['2 days and 12 h', 60],
+    ['1.5 days', 36],
     ['long', Number.NaN],
+    ['-3 h', Number.NaN],
+    ['2-3 days', Number.NaN],
+    ['2 3 days', Number.NaN],
+    ['about 5 days', Number.NaN],
+    ['5 days?', Number.NaN],
   ])('reads %j as %j hours', (text, hours) => {
     expect(hoursOf(text)).toEqual(hours);
     if (hours !== null && !Number.isNaN(hours)) expect(hoursOf(shelfText(hours))).toBe(hours);
