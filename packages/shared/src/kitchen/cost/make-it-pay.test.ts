@@ -85,9 +85,19 @@ describe('what would make it pay', () => {
 
   it('names what ingredients would have to cost less, and the dearest', () => {
     expect(lever(input, 'ingredients')).toMatchObject({
-      enough: true,
+      enough: false,
       sentence:
-        '$25.00 less of the $30.00 (15 % of the net price) they cost. Dearest: Butter $24.00, Sugar $6.00.',
+        'It would take $25.00 less of the $30.00 (15 % of the net price) they cost: more than buying better saves. Dearest: Butter $24.00, Sugar $6.00.',
+    });
+  });
+
+  it('calls it enough only where no more than a quarter of them has to go', () => {
+    const dearer = cost.lines.map((it) =>
+      it.kind === 'ingredients' ? { ...it, amountMinor: 12_000 } : it,
+    );
+    expect(lever({ ...input, cost: { ...cost, lines: dearer } }, 'ingredients')).toMatchObject({
+      enough: true,
+      sentence: expect.stringMatching(/^\$25\.00 less of the \$120\.00/u),
     });
   });
 

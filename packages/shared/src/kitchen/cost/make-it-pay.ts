@@ -148,6 +148,9 @@ function minutesLever(input: PayInput): Lever | null {
   };
 }
 
+/** What buying better may save of what ingredients cost, without another cake (memory). */
+const mostSaved = 0.25;
+
 function ingredientLever(input: PayInput): Lever | null {
   const { cost, rates } = input;
   const lines = [lineOf(cost, 'ingredients'), lineOf(cost, 'eggs')].filter(
@@ -164,17 +167,21 @@ function ingredientLever(input: PayInput): Lever | null {
     .slice(0, 3)
     .map((it) => `${it.label} ${money(it.amountMinor ?? 0)}`)
     .join(', ');
-  const enough = less <= spent;
+  const enough = less <= spent * mostSaved;
   const share =
     cost.netPriceMinor > 0
       ? ` (${percent((spent / cost.netPriceMinor) * whole)} of the net price)`
       : '';
+  const they = `the ${money(spent)}${share} they cost`;
+  const sentence = enough
+    ? `${money(less)} less of ${they}.`
+    : less <= spent
+      ? `It would take ${money(less)} less of ${they}: more than buying better saves.`
+      : `Even all of ${they} would not be enough.`;
   return {
     kind: 'ingredients',
     title: 'Spend less on ingredients',
-    sentence: enough
-      ? `${money(less)} less of the ${money(spent)}${share} they cost. Dearest: ${dearest}.`
-      : `Even all of the ${money(spent)}${share} they cost would not be enough. Dearest: ${dearest}.`,
+    sentence: `${sentence} Dearest: ${dearest}.`,
     enough,
   };
 }
