@@ -36,7 +36,7 @@ describe('heat', () => {
     expect(found).toMatchObject({
       level: 'stop',
       step: 'setting',
-      sentence: 'Too warm outside for Russian; it holds to 73 °F / 23 °C.',
+      sentence: 'Too warm outside for Russian buttercream; it holds to 73 °F / 23 °C.',
     });
     expect(found?.instead).toContain('Italian meringue buttercream');
     expect(found?.instead).toContain('would stand up.');

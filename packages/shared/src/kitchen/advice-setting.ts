@@ -34,10 +34,6 @@ export function distinctCoats(tiers: readonly ResolvedTier[]): ResolvedCoating[]
 export const coatKey = ({ covering, style }: ResolvedCoating): string =>
   style === null ? covering.id : `${covering.id}-${style.id}`;
 
-/** What people call a coat in a sentence about heat: the style where it is the outside. */
-const outside = (coat: ResolvedCoating): string =>
-  coat.covering.id === 'buttercream' && coat.style !== null ? coat.style.name : coatingName(coat);
-
 function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth): Noted[] {
   const { setting } = situation.resolved.design;
   if (setting === null) return [];
@@ -58,8 +54,8 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
         ...shared,
         code: 'heat-unknown',
         about: `heat-unknown:${coatKey(coat)}`,
-        sentence: `You do not know yet how warm it will be; ${reckoned(warmth, situation)} ${expected}. ${outside(coat)} holds to ${limit}.`,
-        plain: `Warmth not known, reckoned ${expected}; ${outside(coat)} holds to ${limit}. Ask again three days before.`,
+        sentence: `You do not know yet how warm it will be; ${reckoned(warmth, situation)} ${expected}. ${coatingName(coat)} holds to ${limit}.`,
+        plain: `Warmth not known, reckoned ${expected}; ${coatingName(coat)} holds to ${limit}. Ask again three days before.`,
         instead: `We ask you again three days before. ${standUp(ways)}`.trim(),
         ways,
         talk: level === 'stop',
@@ -68,7 +64,7 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
   }
   const about = `heat:${coatKey(coat)}`;
   if (level === 'ok') {
-    const sentence = `${outside(coat)} stands up well there; it holds to ${limit}.`;
+    const sentence = `${coatingName(coat)} stands up well there; it holds to ${limit}.`;
     return [note({ ...shared, code: 'heat', about, sentence })];
   }
   return [
@@ -78,9 +74,9 @@ function coatAdvice(coat: ResolvedCoating, situation: Situation, warmth: Warmth)
       about,
       sentence:
         level === 'stop'
-          ? `Too warm ${whereWords[setting.place]} for ${outside(coat)}; it holds to ${limit}.`
-          : `${outside(coat)} holds to ${limit}, and you expect ${expected}: that is close.`,
-      plain: `${outside(coat)} holds to ${limit}; expected ${expected} ${whereWords[setting.place]}.`,
+          ? `Too warm ${whereWords[setting.place]} for ${coatingName(coat)}; it holds to ${limit}.`
+          : `${coatingName(coat)} holds to ${limit}, and you expect ${expected}: that is close.`,
+      plain: `${coatingName(coat)} holds to ${limit}; expected ${expected} ${whereWords[setting.place]}.`,
       instead: [
         standUp(ways),
         level === 'stop'
@@ -112,8 +108,8 @@ function sunAdvice(
     level: 'stop',
     step: 'setting',
     about: `sun:${coatKey(coat)}`,
-    sentence: `Direct sun melts ${outside(coat)}, however mild the day.`,
-    plain: `Stands in direct sun: no coat holds there, ${outside(coat)} neither.`,
+    sentence: `Direct sun melts ${coatingName(coat)}, however mild the day.`,
+    plain: `Stands in direct sun: no coat holds there, ${coatingName(coat)} neither.`,
     instead: 'Stand it in the shade, or keep it inside until you cut it.',
     ways: [...shade, ...indoorsWays(limitC, situation)],
     talk: true,

@@ -45,7 +45,9 @@ export function CakeDrawing({
     cake !== null && (cake.kind === 'sheet' ? cake.sheet !== null : cake.tiers.length > 0);
   const highest = there ? highestPoint(cake, look, menu, view.room) : view.room.y;
   const above = size === 'full' ? measureGap + 28 : 6;
-  const headroom = trimmed ? Math.max(0, highest - above) : 0;
+  // Less than none where a tall cake with something standing on it needs more paper above.
+  const spare = highest - above;
+  const headroom = trimmed ? spare : Math.min(0, spare);
   const kitchen = there ? kitchenRowHeight(cake, size === 'full') : 0;
   const floor = view.room.y + view.room.height;
   const level = highest + (floor - highest) * (1 - made);

@@ -48,6 +48,12 @@ export function SuitableCakes() {
         </p>
       ) : (
         <>
+          {avoided.length === 0 && ways.length > 0 && (
+            <p className="measure">
+              By their ingredients these go with what you told us: {formatList(ways)}. Best for your
+              day first.
+            </p>
+          )}
           {avoided.length > 0 && (
             <p className="measure">
               By their ingredients none of these contains {formatList(avoided)}: not in the sponge,

@@ -51,7 +51,7 @@ export function DecorationRow({ at, placed, onChange, onRemove }: Props) {
           {onMenu.caution}
         </p>
       )}
-      <div className="grid grid-cols-2 gap-4 sm:grid-cols-4">
+      <div className="grid gap-4 min-[480px]:grid-cols-2 sm:grid-cols-4">
         {kind === 'tiered' && tiers.length > 1 && (
           <Select
             name={`${path}.tier`}

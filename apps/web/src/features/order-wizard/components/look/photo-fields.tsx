@@ -113,7 +113,10 @@ export function PhotoFields() {
         </div>
       )}
       <VisuallyHidden>
-        {photos.length > 0 && `${photos.length} pictures have arrived.`}
+        {photos.length > 0 &&
+          (photos.length === 1
+            ? 'One picture has arrived.'
+            : `${photos.length} pictures have arrived.`)}
       </VisuallyHidden>
     </section>
   );
