@@ -13,12 +13,14 @@ import { authorise } from '#api/modules/authorise.ts';
 import type { Deps } from '#api/modules/deps.ts';
 import { findOrderByNumber } from '#api/modules/orders/orders.queries.ts';
 import { orderNumber } from '#api/http/order-number.ts';
+import { presentEggPlan } from './egg-plan.presenter.ts';
 import { planEggsOfSpan } from './egg-plan.queries.ts';
 import { presentKitchenSheet } from './kitchen-sheet.presenter.ts';
 import { mayKitchen } from './kitchen.policy.ts';
 import { presentOrderCost } from './order-cost.presenter.ts';
 import { costOfOrder } from './order-cost.queries.ts';
 import { needsOfOrder } from './order-needs.queries.ts';
+import { presentShopping } from './shopping.presenter.ts';
 import { shoppingOfSpan } from './shopping.queries.ts';
 
 const params = z.object({ number: orderNumber });
@@ -71,7 +73,7 @@ export function kitchenRoutes(_deps: Deps): FeatureRoutes {
     },
     async ({ actor, query }) => {
       authorise(actor, mayKitchen(actor, 'plan-eggs'));
-      return planEggsOfSpan(query);
+      return presentEggPlan(await planEggsOfSpan(query));
     },
   );
 
@@ -86,7 +88,7 @@ export function kitchenRoutes(_deps: Deps): FeatureRoutes {
     },
     async ({ actor, query }) => {
       authorise(actor, mayKitchen(actor, 'plan-shopping'));
-      return shoppingOfSpan(query);
+      return presentShopping(await shoppingOfSpan(query));
     },
   );
   return routes;
