@@ -1,7 +1,10 @@
 import type { Cake, Design } from '#shared/contracts/design.ts';
 import type { Menu } from '#shared/contracts/menu.ts';
-import { cuttingPlanOf, type PieceCut } from '#shared/kitchen/cutting/cutting-plan.ts';
-import { formatLength } from '#shared/kitchen/measures.ts';
+import {
+  cuttingPlanOf,
+  portionsSentence,
+  type PieceCut,
+} from '#shared/kitchen/cutting/cutting-plan.ts';
 import { blocksOf } from '#shared/kitchen/sizes.ts';
 import { supportsOf, type DowelPlace } from '#shared/kitchen/supports.ts';
 import { CutDrawing } from './cut-drawing.tsx';
@@ -14,16 +17,14 @@ export function CuttingPlan({ design, menu }: Props) {
   const plan = isOnMenu(design, menu) ? cuttingPlanOf(design, menu) : null;
   if (plan === null || cake === null) return <p>The studio no longer bakes this size.</p>;
   const lead = menu.studio.lengthLead;
-  const { pieces, portion, portions } = plan;
+  const { pieces } = plan;
   const widestMm = Math.max(1, ...pieces.map((it) => it.cut?.block.widthMm ?? 0));
   const dowels = dowelsIn(cake, menu);
   const standing = pieces.some((it) => it.kind === 'tier' && (dowels[it.index] ?? []).length > 0);
   return (
     <div className="grid gap-5">
       <p className="measure">
-        {portions} {portions === 1 ? 'portion' : 'portions'} of the {portion.name.toLowerCase()}{' '}
-        size, {formatLength(portion.widthMm, lead)} by {formatLength(portion.depthMm, lead)} at a
-        tier’s full height.
+        {portionsSentence(plan, lead)}
         {cake.kind === 'tiered' &&
           cake.tiers.length > 1 &&
           ' Take the tiers apart first, top down.'}

@@ -6,7 +6,7 @@ import { arbitraryDesign } from '../testing/arbitraries.ts';
 import { designWith, roundTier } from '../testing/design-fixture.ts';
 import { menuFixture as menu } from '../testing/menu-fixture.ts';
 import { cutBlock, type Cut } from './cut-block.ts';
-import { cuttingPlanOf } from './cutting-plan.ts';
+import { cuttingPlanOf, portionsSentence } from './cutting-plan.ts';
 
 const dessert = { widthMm: 25, depthMm: 50 };
 
@@ -135,6 +135,23 @@ describe('the cutting plan', () => {
     expect(steps({ shape: 'square' })).toEqual([
       'Cut 5 strips from side to side, each 2 in / 5 cm deep, and each strip into 10 pieces of 1 in / 2.5 cm: 50 pieces (10 by 5).',
     ]);
+  });
+
+  it('says the guests’ portion of tiers, and of sheets none that they are not cut by', () => {
+    const said = (cake: Parameters<typeof designWith>[0]['cake']) => {
+      const plan = cuttingPlanOf(designWith({ cake }), menu);
+      return plan === null ? null : portionsSentence(plan, 'in');
+    };
+    expect(said({ tiers: [roundTier(10)] })).toBe(
+      '39 portions of the dessert size, 1 in / 2.5 cm by 2 in / 5 cm at full height.',
+    );
+    const size = menu.sheetSizes[0]?.id ?? '';
+    const cuttingCakes = [
+      { sizeId: size, count: 2, layers: 1, spongeId: 'vanilla', fillingId: null },
+    ];
+    expect(said({ tiers: [roundTier(10)], cuttingCakes })).toMatch(
+      /^\d+ portions; from tiers, of the dessert size, /u,
+    );
   });
 
   it('is none before there is a cake', () => {

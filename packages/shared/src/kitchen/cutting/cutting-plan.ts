@@ -4,6 +4,7 @@ import { pieceName } from '../piece-name.ts';
 import { portionSizeOf } from '../portions.ts';
 import { blockOfSheet, sheetFootprint, sheetSizeOf, type Block, type Footprint } from '../sizes.ts';
 import { cutBlock, type BlockCut } from './cut-block.ts';
+import { formatLength, type LengthLead } from '../measures.ts';
 import { cuttingSteps } from './cutting-steps.ts';
 
 /** One tier, the sheet, or one kind of cutting cake, and how it is cut. */
@@ -95,4 +96,19 @@ export function cuttingPlanOf(design: Design, menu: Menu): CuttingPlan | null {
       .filter((it) => it.left === null)
       .reduce((sum, it) => sum + it.count * (it.cut?.portions ?? 0), 0),
   };
+}
+
+/**
+ * "77 portions of the dessert size, 1 in / 2.5 cm by 2 in / 5 cm at full height." Sheets are cut by
+ * a size of their own, which their steps tell, so the guests' portion is said of tiers alone.
+ */
+export function portionsSentence(
+  { pieces, portion, portions }: CuttingPlan,
+  lead: LengthLead,
+): string {
+  const count = `${portions} ${portions === 1 ? 'portion' : 'portions'}`;
+  const tiers = pieces.filter((it) => it.kind === 'tier').length;
+  const size = `of the ${portion.name.toLowerCase()} size, ${formatLength(portion.widthMm, lead)} by ${formatLength(portion.depthMm, lead)} at full height`;
+  if (tiers === 0) return `${count}.`;
+  return tiers === pieces.length ? `${count} ${size}.` : `${count}; from tiers, ${size}.`;
 }

@@ -1,8 +1,11 @@
 import type { CardPaper, LabelText } from '#shared/contracts/cards.ts';
 import type { Pickup } from '#shared/contracts/orders.ts';
 import { formatDay, formatTime, formatWindow } from '#shared/dates/format.ts';
-import { cuttingPlanOf, type PieceCut } from '#shared/kitchen/cutting/cutting-plan.ts';
-import { formatLength } from '#shared/kitchen/measures.ts';
+import {
+  cuttingPlanOf,
+  portionsSentence,
+  type PieceCut,
+} from '#shared/kitchen/cutting/cutting-plan.ts';
 import type { ResolvedDesign } from '#shared/kitchen/resolve-design.ts';
 import { supportsOf, type DowelPlace } from '#shared/kitchen/supports.ts';
 import type { PageMm } from './card-document.ts';
@@ -122,7 +125,6 @@ function drawCutting(sheet: CareSheet, { resolved }: CareCard): void {
   const plan = cuttingPlanOf(resolved.design, resolved.menu);
   if (plan === null) return;
   const lead = resolved.menu.studio.lengthLead;
-  const { portion } = plan;
   const dowels = supportsOf(resolved.tiers, resolved.menu.kitchen).perTier.map((it) =>
     it.dowels.flatMap((set) => [...set.at]),
   );
@@ -132,9 +134,7 @@ function drawCutting(sheet: CareSheet, { resolved }: CareCard): void {
   ].join('');
   sheet.title('Cutting it', 120);
   sheet.paragraph([
-    textRun(
-      `${plan.portions} portions of ${formatLength(portion.widthMm, lead)} by ${formatLength(portion.depthMm, lead)}. ${aside}All drawn to one scale, from above.`,
-    ),
+    textRun(`${portionsSentence(plan, lead)} ${aside}All drawn to one scale, from above.`),
   ]);
   const widest = Math.max(1, ...plan.pieces.map((it) => it.cut?.block.widthMm ?? 0));
   const scale = Math.min(0.34, (sheet.width * 0.36) / widest);
