@@ -105,7 +105,7 @@ function OnTheShelf({ form, currency, problems, onForm }: Props) {
           />
           <AmountField
             label="and costs"
-            hint="Empty: unknown"
+            hint="Both empty: unknown"
             name="pack.priceMinor"
             unit={currency}
             value={form.packPrice}
