@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { pricesView, type SavePrices } from '#shared/contracts/prices.ts';
 import { request } from '#web/lib/http.ts';
-import { staffKeys } from '#web/lib/staff-keys.ts';
+import { orderChanged, staffKeys } from '#web/lib/staff-keys.ts';
 import { pricesQuery } from './get-prices.ts';
 
 /** Writes the next version of the price book. */
@@ -13,8 +13,10 @@ export function useSavePrices() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: savePrices,
-    onSuccess: (prices) => {
+    onSuccess: async (prices) => {
       client.setQueryData(pricesQuery().queryKey, prices);
+      // What an order costs to make and leaves goes by the book in force.
+      await orderChanged(client);
     },
     onError: () => client.invalidateQueries({ queryKey: staffKeys.prices }),
   });
