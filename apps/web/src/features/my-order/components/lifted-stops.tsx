@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import type { LiftedStop, OrderView } from '#shared/contracts/orders.ts';
 import type { StudioCard } from '#shared/contracts/menu.ts';
 import { instantWords } from '#web/components/order/order-times.ts';
@@ -69,12 +69,14 @@ function Lifted({ order, studio, lifted }: Props & { readonly lifted: LiftedStop
 function Accept({ order, lifted }: { readonly order: OrderView; readonly lifted: LiftedStop }) {
   const [read, setRead] = useState(false);
   const [missing, setMissing] = useState(false);
+  const box = useRef<HTMLInputElement>(null);
   const accept = useAcceptLiftedStop(order.code);
   const toast = useToast();
   return (
     <div className="grid gap-3">
       {accept.isError && <Failure error={accept.error} />}
       <Checkbox
+        ref={box}
         label="I have read what is in the cake and why you take the order"
         checked={read}
         error={missing && !read ? 'Tick this once you have read both.' : undefined}
@@ -86,6 +88,7 @@ function Accept({ order, lifted }: { readonly order: OrderView; readonly lifted:
           onClick={() => {
             if (!read) {
               setMissing(true);
+              box.current?.focus();
               return;
             }
             accept.mutate(

@@ -130,7 +130,7 @@ function StepSelect({ at, step, steps, onStep }: StepProps) {
     <select
       aria-label={`Line ${at + 1} goes in at step`}
       value={step}
-      className="min-h-11 rounded-action border-[1.5px] border-seam bg-enamel px-2 text-sm text-slate max-sm:col-start-2 max-sm:row-start-3 max-sm:justify-self-start sm:col-start-4 sm:row-start-1"
+      className="min-h-11 rounded-action border-[1.5px] border-slate bg-enamel px-2 text-sm text-slate max-sm:col-start-2 max-sm:row-start-3 max-sm:justify-self-start sm:col-start-4 sm:row-start-1"
       onChange={(event) => onStep(Number(event.target.value))}
     >
       {Array.from({ length: steps }, (_, i) => (

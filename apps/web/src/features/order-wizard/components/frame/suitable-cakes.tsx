@@ -4,6 +4,7 @@ import { allergenName } from '#shared/kitchen/allergen-names.ts';
 import { isAbout, isListed } from '#shared/kitchen/clashes.ts';
 import { formatMoney } from '#shared/kitchen/money.ts';
 import { Button } from '#web/components/ui/button.tsx';
+import { VisuallyHidden } from '#web/components/ui/visually-hidden.tsx';
 import { declaredName } from '../../design/contains.ts';
 import { dietWords } from '../../design/diet-words.ts';
 import { applyPatch } from '../../design/edit-cake.ts';
@@ -87,6 +88,7 @@ export function SuitableCakes() {
                         }}
                       >
                         Make it this
+                        <VisuallyHidden>: {it.name}</VisuallyHidden>
                         {it.totalMinor !== null &&
                           `, ${formatMoney(it.totalMinor, menu.priceBook.currency, menu.studio.locale)}`}
                       </Button>
