@@ -1,4 +1,5 @@
 import type { KitchenSheet } from '#shared/contracts/kitchen-sheet.ts';
+import { figure } from '#web/lib/figure.ts';
 import { gramsText } from '#web/lib/grams-text.ts';
 
 type Props = { readonly ingredients: KitchenSheet['ingredients']; readonly locale: string };
@@ -27,7 +28,7 @@ export function BoughtList({ ingredients, locale }: Props) {
 
 function packsText(packs: number, locale: string): string {
   const digits = packs < 10 ? 1 : 0;
-  const shown = packs.toLocaleString(locale, { maximumFractionDigits: digits });
+  const shown = figure(packs, locale, digits);
   if (packs < 0.05) return 'a little of a pack';
   return `${shown} ${shown === '1' ? 'pack' : 'packs'}`;
 }

@@ -1,4 +1,5 @@
 import type { CostLine } from '#shared/contracts/kitchen-sheet.ts';
+import { figure } from '#web/lib/figure.ts';
 
 /** What a line of the cost is called. */
 export const costWords: Readonly<Record<CostLine['kind'], string>> = {
@@ -13,5 +14,5 @@ export const costWords: Readonly<Record<CostLine['kind'], string>> = {
 
 /** "37.5 %", of parts per million, to a tenth. */
 export function shareText(ppm: number, locale: string): string {
-  return `${(ppm / 10_000).toLocaleString(locale, { maximumFractionDigits: 1 })} %`;
+  return `${figure(ppm / 10_000, locale, 1)} %`;
 }
