@@ -11,6 +11,7 @@ import { useContractForm } from '#web/lib/use-contract-form.ts';
 import { ActFailure } from '../actions/act-failure.tsx';
 import { useAcknowledgeContents } from '../api/acknowledge-contents.ts';
 import { useTellContents } from '../api/tell-contents.ts';
+import { NoteForm } from './note-form.tsx';
 
 const seenForm = z.omit(acknowledgeContents, { rowVersion: true });
 const toldForm = z.omit(tellContents, { rowVersion: true });
@@ -55,9 +56,10 @@ function SeenForm({ order, change, onFold }: FormProps) {
   const acknowledge = useAcknowledgeContents(order.number);
   const toast = useToast();
   return (
-    <form
-      noValidate
-      className="grid gap-3"
+    <NoteForm
+      failure={failure}
+      pending={acknowledge.isPending}
+      onFold={onFold}
       onSubmit={submit(async ({ note }) => {
         await acknowledge.mutateAsync({
           note,
@@ -67,7 +69,6 @@ function SeenForm({ order, change, onFold }: FormProps) {
         toast({ message: 'What you do about it is noted with the order.' });
       })}
     >
-      <ActFailure error={failure} />
       <TextArea
         {...form.register('note')}
         label="What is done about it"
@@ -75,15 +76,7 @@ function SeenForm({ order, change, onFold }: FormProps) {
         rows={3}
         error={errorOf(form.formState.errors, 'note')}
       />
-      <div className="flex flex-wrap gap-3">
-        <Button type="submit" pending={acknowledge.isPending}>
-          Note it
-        </Button>
-        <Button kind="quiet" onClick={onFold}>
-          Not yet
-        </Button>
-      </div>
-    </form>
+    </NoteForm>
   );
 }
 
@@ -99,15 +92,15 @@ function ToldForm({ order, change, onFold }: FormProps) {
   const tell = useTellContents(order.number);
   const toast = useToast();
   return (
-    <form
-      noValidate
-      className="grid gap-3"
+    <NoteForm
+      failure={failure}
+      pending={tell.isPending}
+      onFold={onFold}
       onSubmit={submit(async ({ how }) => {
         await tell.mutateAsync({ how, changeId: change.id, rowVersion: order.rowVersion });
         toast({ message: 'Noted that the customer knows.' });
       })}
     >
-      <ActFailure error={failure} />
       <TextArea
         {...form.register('how')}
         label="How they were told"
@@ -115,14 +108,6 @@ function ToldForm({ order, change, onFold }: FormProps) {
         rows={2}
         error={errorOf(form.formState.errors, 'how')}
       />
-      <div className="flex flex-wrap gap-3">
-        <Button type="submit" pending={tell.isPending}>
-          Note it
-        </Button>
-        <Button kind="quiet" onClick={onFold}>
-          Not yet
-        </Button>
-      </div>
-    </form>
+    </NoteForm>
   );
 }

@@ -7,16 +7,15 @@ import {
   liftStop,
   recordTalk,
 } from '#shared/contracts/staff.ts';
-import { Button } from '#web/components/ui/button.tsx';
 import { errorOf } from '#web/components/ui/form-problems.tsx';
 import { TextArea } from '#web/components/ui/text-area.tsx';
 import { useToast } from '#web/components/ui/toast.tsx';
 import { Unfold } from '#web/components/ui/unfold.tsx';
 import { useContractForm } from '#web/lib/use-contract-form.ts';
-import { ActFailure } from '../actions/act-failure.tsx';
 import { useAnswerAllergy } from '../api/answer-allergy.ts';
 import { useLiftStop } from '../api/lift-stop.ts';
 import { useRecordTalk } from '../api/record-talk.ts';
+import { NoteForm } from './note-form.tsx';
 
 const answerForm = z.omit(answerAllergy, { rowVersion: true });
 const talkForm = z.omit(recordTalk, { rowVersion: true, about: true });
@@ -36,15 +35,15 @@ function AnswerForm({ order, allergy, onFold }: AnswerProps & { readonly onFold:
   const answer = useAnswerAllergy(order.number);
   const toast = useToast();
   return (
-    <form
-      noValidate
-      className="grid gap-3"
+    <NoteForm
+      failure={failure}
+      pending={answer.isPending}
+      onFold={onFold}
       onSubmit={submit(async ({ text }) => {
         await answer.mutateAsync({ text, allergyId: allergy.id, rowVersion: order.rowVersion });
         toast({ message: 'The talk is noted with the order.' });
       })}
     >
-      <ActFailure error={failure} />
       <TextArea
         {...form.register('text')}
         label="What was said and settled"
@@ -52,15 +51,7 @@ function AnswerForm({ order, allergy, onFold }: AnswerProps & { readonly onFold:
         rows={3}
         error={errorOf(form.formState.errors, 'text')}
       />
-      <div className="flex flex-wrap gap-3">
-        <Button type="submit" pending={answer.isPending}>
-          Note it
-        </Button>
-        <Button kind="quiet" onClick={onFold}>
-          Not yet
-        </Button>
-      </div>
-    </form>
+    </NoteForm>
   );
 }
 
@@ -76,15 +67,15 @@ function TalkForm({ order, blocker, onFold }: StopProps & { readonly onFold: () 
   const record = useRecordTalk(order.number);
   const toast = useToast();
   return (
-    <form
-      noValidate
-      className="grid gap-3"
+    <NoteForm
+      failure={failure}
+      pending={record.isPending}
+      onFold={onFold}
       onSubmit={submit(async ({ text }) => {
         await record.mutateAsync({ text, about: blocker.about, rowVersion: order.rowVersion });
         toast({ message: 'The talk is noted with the order.' });
       })}
     >
-      <ActFailure error={failure} />
       <TextArea
         {...form.register('text')}
         label="What was said and settled"
@@ -92,15 +83,7 @@ function TalkForm({ order, blocker, onFold }: StopProps & { readonly onFold: () 
         rows={3}
         error={errorOf(form.formState.errors, 'text')}
       />
-      <div className="flex flex-wrap gap-3">
-        <Button type="submit" pending={record.isPending}>
-          Note it
-        </Button>
-        <Button kind="quiet" onClick={onFold}>
-          Not yet
-        </Button>
-      </div>
-    </form>
+    </NoteForm>
   );
 }
 
@@ -118,15 +101,17 @@ function LiftForm({ order, blocker, onFold }: StopProps & { readonly onFold: () 
   const lift = useLiftStop(order.number);
   const toast = useToast();
   return (
-    <form
-      noValidate
-      className="grid gap-3"
+    <NoteForm
+      failure={failure}
+      pending={lift.isPending}
+      submitLabel="Take it, for this reason"
+      kind="danger"
+      onFold={onFold}
       onSubmit={submit(async ({ reason }) => {
         await lift.mutateAsync({ reason, about: blocker.about, rowVersion: order.rowVersion });
         toast({ message: 'Your reason is noted. The customer is asked by e-mail to read it.' });
       })}
     >
-      <ActFailure error={failure} />
       <TextArea
         {...form.register('reason')}
         label="Why you take it all the same"
@@ -134,14 +119,6 @@ function LiftForm({ order, blocker, onFold }: StopProps & { readonly onFold: () 
         rows={3}
         error={errorOf(form.formState.errors, 'reason')}
       />
-      <div className="flex flex-wrap gap-3">
-        <Button type="submit" kind="danger" pending={lift.isPending}>
-          Take it, for this reason
-        </Button>
-        <Button kind="quiet" onClick={onFold}>
-          Not yet
-        </Button>
-      </div>
-    </form>
+    </NoteForm>
   );
 }
