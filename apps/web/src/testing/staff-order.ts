@@ -19,6 +19,9 @@ export const nothingAllowed: StaffOrder['can'] = {
   renewLink: false,
   addPhotos: false,
   sendMailAgain: false,
+  seeKitchen: false,
+  seeCost: false,
+  seePantry: false,
   acknowledgeContents: false,
   tellContents: false,
 };

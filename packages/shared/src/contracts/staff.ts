@@ -191,6 +191,10 @@ export const staffOrder = z.object({
     sendMailAgain: z.boolean(),
     acknowledgeContents: z._default(z.boolean(), false),
     tellContents: z._default(z.boolean(), false),
+    /** What goes into it; what it costs to make; the pantry that both come from. */
+    seeKitchen: z.boolean(),
+    seeCost: z.boolean(),
+    seePantry: z.boolean(),
   }),
 });
 export type StaffOrder = z.infer<typeof staffOrder>;

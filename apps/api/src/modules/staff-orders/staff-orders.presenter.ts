@@ -1,9 +1,11 @@
 import type { DeclaredAllergy, StaffOrder } from '#shared/contracts/staff.ts';
 import { isLive } from '#shared/orders/transitions.ts';
 import type { OrderEvent } from '#api/db/models/order-event.ts';
+import { mayKitchenDo } from '#api/modules/kitchen/may-kitchen.queries.ts';
 import { canMove } from '#api/modules/orders/change-order-status.command.ts';
 import { designOf } from '#api/modules/orders/order-design.queries.ts';
 import { pickupOf } from '#api/modules/orders/pickup.queries.ts';
+import { mayPantryDo } from '#api/modules/pantry/may-pantry.queries.ts';
 import type { Actor } from '#api/platform/actor.ts';
 import { sentenceOf } from './event-sentences.ts';
 import type { StaffOrderPage } from './staff-order.queries.ts';
@@ -117,6 +119,9 @@ function rightsOf(page: StaffOrderPage, actor: Actor): StaffOrder['can'] {
     renewLink: mayStaff(actor, 'renew-link'),
     addPhotos: mayStaff(actor, 'add-photos'),
     sendMailAgain: mayStaff(actor, 'send-mail-again'),
+    seeKitchen: mayKitchenDo(actor, 'see-kitchen-sheet'),
+    seeCost: mayKitchenDo(actor, 'see-order-cost'),
+    seePantry: mayPantryDo(actor, 'see'),
     acknowledgeContents:
       mayStaff(actor, 'acknowledge-contents') &&
       isOpen &&

@@ -8,7 +8,6 @@ import { CostSection } from '#web/features/kitchen-sheet/components/cost-section
 import { MarginLine } from '#web/features/kitchen-sheet/components/margin-line.tsx';
 import { KitchenSection } from '#web/features/kitchen-sheet/components/kitchen-section.tsx';
 import { useMenu } from '#web/features/menu/api/get-menu.ts';
-import { useSession } from '#web/features/session/api/get-session.ts';
 import { CardsSection } from '#web/features/order-cards/components/cards-section.tsx';
 import { useStaffOrder } from '#web/features/staff-order/api/get-staff-order.ts';
 import { OrderView } from '#web/features/staff-order/components/order-view.tsx';
@@ -28,7 +27,6 @@ export function StaffOrderPage() {
 function OneOrder({ number }: { readonly number: number }) {
   const menu = useMenu();
   const { data, error, isPending, refetch, isFetching } = useStaffOrder(number);
-  const role = useSession().data?.user?.role;
   const { locale } = menu.studio;
   useFragment(data !== undefined);
   return (
@@ -43,16 +41,14 @@ function OneOrder({ number }: { readonly number: number }) {
           order={data}
           menu={menu}
           parts={{
-            cost: role === 'owner' && <CostSection number={number} locale={locale} />,
-            margin: role === 'owner' && <MarginLine number={number} locale={locale} />,
-            kitchen: (role === 'baker' || role === 'owner') && (
-              <KitchenSection number={number} locale={locale} />
-            ),
+            cost: data.can.seeCost && <CostSection number={number} locale={locale} />,
+            margin: data.can.seeCost && <MarginLine number={number} locale={locale} />,
+            kitchen: data.can.seeKitchen && <KitchenSection number={number} locale={locale} />,
             cards: (
               <CardsSection
                 number={number}
                 locale={locale}
-                ingredientPath={role === 'counter' ? null : paths.staffIngredient}
+                ingredientPath={data.can.seePantry ? paths.staffIngredient : null}
                 careCardPaper={menu.studio.labelRegion === 'US' ? 'half-letter' : 'a5'}
               />
             ),

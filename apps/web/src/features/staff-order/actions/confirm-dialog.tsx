@@ -3,6 +3,7 @@ import { Link } from 'react-router-dom';
 import type { Advice } from '#shared/contracts/estimates.ts';
 import { FitLine } from '#web/components/order/fit-line.tsx';
 import { AdviceNote } from '#web/components/order/advice-note.tsx';
+import { allergyWords } from '#web/components/order/allergy-words.ts';
 import { plainly } from '#web/components/order/plainly.ts';
 import { pickupWords } from '#web/components/order/order-times.ts';
 import { PriceList } from '#web/components/order/price-list.tsx';
@@ -80,6 +81,21 @@ export function ConfirmDialog({ order, menu, margin, onDone, onClose }: ActProps
               advice={{ ...plainly(it), instead: reasonFor(it) }}
             />
           ))}
+          {order.allergies.length > 0 && (
+            <div className="grid gap-1">
+              <h3>Told about guests</h3>
+              <ul className="grid gap-1 text-sm">
+                {order.allergies.map((it) => (
+                  <li key={it.id}>
+                    <span className="font-semibold text-berry">
+                      {allergyWords(it, menu.studio.labelRegion)}
+                    </span>
+                    {it.answer === null ? '. No talk is recorded.' : '. The talk is recorded.'}
+                  </li>
+                ))}
+              </ul>
+            </div>
+          )}
           <PriceList price={price} totalLabel="They pay" locale={menu.studio.locale} />
           {margin}
         </div>
