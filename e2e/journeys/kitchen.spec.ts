@@ -101,6 +101,8 @@ test('an owner takes an order against an allergy, the customer accepts why, and 
     await page.getByRole('button', { name: 'Record the talk' }).click();
     await page.getByLabel('What was said and settled').fill('Rang Mara: the guest brings his own.');
     await page.getByRole('button', { name: 'Note it' }).click();
+    // News comes one at a time: what comes next must not be read over by what was before.
+    await expect(page.getByText('The talk is noted with the order.')).toBeVisible();
     await page.getByRole('button', { name: 'Take it all the same' }).click();
     await page.getByLabel('Why you take it all the same').fill('The guest will not eat of it.');
     await page.getByRole('button', { name: 'Take it, for this reason' }).click();
