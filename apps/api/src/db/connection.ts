@@ -6,6 +6,9 @@ import { isInTransaction, StrayWriteError, transactionNamespace } from './transa
 /** How long a statement waits for another process to finish its write, milliseconds. */
 const busyTimeout = 5000;
 
+/** Ends once every connection that was told to close has done so. */
+let closing: Promise<void> = Promise.resolve();
+
 /**
  * A connection as we want every one to be; there is one for reading and one for writing.
  * Statements run one after the other, so that waiting ones do not hold libuv's threads.
@@ -30,6 +33,22 @@ class TunedDatabase extends sqlite3.Database {
       return this;
     }
     return super.all(sql, ...rest);
+  }
+
+  /**
+   * One after the other: of two that close at once each takes the other for still reading, and
+   * neither puts the log back into the file.
+   */
+  override close(done?: (error: Error | null) => void): void {
+    closing = closing.then(
+      () =>
+        new Promise((closed) => {
+          super.close((error) => {
+            done?.(error);
+            closed();
+          });
+        }),
+    );
   }
 }
 
